@@ -11,6 +11,8 @@ interface Described {
   readonly unit: string
   /** One sentence. */
   readonly meaning: string
+  /** Read only when another key of the same family has one of these values. */
+  readonly only?: { readonly key: string; readonly values: readonly string[] }
 }
 
 export interface Limits {

@@ -13,4 +13,4 @@ export const hubbleTimeGyr = (h0: number): number => 1 / perSecond(h0) / (1e9 * 
 /** c/H₀ in Mpc. */
 export const hubbleLengthMpc = (h0: number): number => SPEED_OF_LIGHT / 1e3 / h0
 /** c/H₀ in Gly (10⁹ Julian light years): the same number as 1/H₀ in Gyr. */
-export const hubbleLengthGly = (h0: number): number => (SPEED_OF_LIGHT / perSecond(h0)) / (1e9 * LIGHT_YEAR)
+export const hubbleLengthGly = (h0: number): number => SPEED_OF_LIGHT / perSecond(h0) / (1e9 * LIGHT_YEAR)

@@ -1,0 +1,66 @@
+import { type Asymptote, type Family, type Law, numberOf } from './law'
+import { powerLaw } from './power-law'
+
+/** f = a^(−3(1+w0+wa)) e^(−3wa(1−a)): closed form of Linder 2003, Phys. Rev. Lett. 90, 091301, eq. 7. */
+function linearInScale(w0: number, wa: number): Law {
+  if (wa === 0) return powerLaw(w0)
+  const early = 3 * (1 + w0 + wa)
+  const w = (N: number) => w0 - wa * Math.expm1(N)
+  const logDensity = (N: number) => -early * N + 3 * wa * Math.expm1(N)
+  const past: Asymptote = {
+    kind: 'power',
+    exponent: early,
+    logCoefficient: -3 * wa,
+    // |3 wa a| < 1e-17
+    settled: Math.log(1e-17 / Math.abs(3 * wa)),
+  }
+  return {
+    density: (N) => Math.exp(logDensity(N)),
+    change: (N, d) => Math.exp(logDensity(N)) * Math.expm1(-early * d + 3 * wa * Math.exp(N) * Math.expm1(d)),
+    w,
+    wSlope: (N) => -wa * Math.exp(N),
+    exponentRange: (from, to) => {
+      const [one, other] = [3 * (1 + w(from)), 3 * (1 + w(to))]
+      return one < other ? [one, other] : [other, one]
+    },
+    past,
+    future: { kind: wa > 0 ? 'exploding' : 'vanishing' },
+    breaks: [],
+  }
+}
+
+export const cpl: Family = {
+  key: 'cpl',
+  label: 'w linear in a',
+  formula: 'w = w_0 + w_a (1 − a)',
+  meaning: 'w moves from w_0 + w_a in the early universe through w_0 today, and on without bound in the future.',
+  source: 'Chevallier & Polarski 2001, Int. J. Mod. Phys. D 10, 213; Linder 2003, Phys. Rev. Lett. 90, 091301',
+  caution: 'The law describes the past; beyond today w runs away linearly in a, which no measurement supports.',
+  parameters: [
+    {
+      kind: 'number',
+      key: 'w0',
+      symbol: 'w_0',
+      label: 'w today',
+      unit: '',
+      meaning: 'Pressure over energy density of dark energy today.',
+      min: -20,
+      max: 20,
+      fallback: -1,
+      slider: { min: -2, max: 0.4, step: 0.01 },
+    },
+    {
+      kind: 'number',
+      key: 'wa',
+      symbol: 'w_a',
+      label: 'slope of w',
+      unit: '',
+      meaning: '−dw/da: by how much w was larger in the early universe than today.',
+      min: -20,
+      max: 20,
+      fallback: 0,
+      slider: { min: -3, max: 2, step: 0.01 },
+    },
+  ],
+  law: (values) => linearInScale(numberOf(values, 'w0'), numberOf(values, 'wa')),
+}
