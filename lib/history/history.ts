@@ -1,0 +1,1 @@
+export interface History { readonly todo?: never }
