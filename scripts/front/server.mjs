@@ -1,0 +1,67 @@
+/** The HTTP server in front of the application: refuses what is malformed, compresses, adds headers, keeps time. */
+import { createServer } from 'node:http'
+import { compress } from './compress.mjs'
+import { setSecurityHeaders } from './headers.mjs'
+import { sendProblem, writeProblem } from './problem.mjs'
+import { LONGEST_TARGET, methodProblem, OPTIONS_HEADERS, targetProblem } from './target.mjs'
+
+/** @typedef {(request: import('node:http').IncomingMessage, response: import('node:http').ServerResponse) => unknown} Handler */
+
+/** Milliseconds, and bytes. A visitor on a slow line gets through; one who only holds a connection does not. */
+const LIMITS = {
+  headersTimeout: 15_000,
+  requestTimeout: 30_000,
+  keepAliveTimeout: 15_000,
+  connectionsCheckingInterval: 5_000,
+  // The longest target that we read, and as much again as Node's default for the other headers.
+  maxHeaderSize: LONGEST_TARGET + 16 * 1024,
+}
+/** A connection on which nothing has moved for this long is dropped; no answer takes as long to begin. */
+const SILENCE = 120_000
+
+/**
+ * @param {Handler} handler answers what is let through
+ * @param {Partial<typeof LIMITS>} [limits]
+ */
+export function createFront(handler, limits = {}) {
+  const server = createServer({ ...LIMITS, ...limits }, (request, response) => {
+    const target = request.url ?? ''
+    setSecurityHeaders(response, target)
+    const problem = methodProblem(request.method) ?? targetProblem(target)
+    if (problem) sendProblem(response, problem, target.split('?')[0].slice(0, 200))
+    else if (request.method === 'OPTIONS') response.writeHead(204, OPTIONS_HEADERS).end()
+    else compress(request, response, () => answer(handler, request, response))
+  })
+  server.setTimeout(SILENCE)
+  server.on('connect', (_request, socket) => writeProblem(socket, /** @type {any} */ (methodProblem('CONNECT'))))
+  server.on('clientError', (error, socket) => {
+    if (socket.writable && !('code' in error && error.code === 'ECONNRESET')) writeProblem(socket, parserProblem(error))
+    else socket.destroy()
+  })
+  return server
+}
+
+/**
+ * The application answers its own errors; this is for those that it did not foresee.
+ * @type {(handler: Handler, ...exchange: Parameters<Handler>) => Promise<void>}
+ */
+async function answer(handler, request, response) {
+  try {
+    await handler(request, response)
+  } catch (error) {
+    console.error(error)
+    if (response.headersSent) response.destroy()
+    else sendProblem(response, { status: 500, detail: 'The server failed to answer.' }, request.url ?? '')
+  }
+}
+
+/**
+ * @param {Error & {code?: string}} error of Node's parser
+ * @returns {import('./problem.mjs').Problem}
+ */
+function parserProblem({ code }) {
+  if (code === 'HPE_INVALID_METHOD') return /** @type {any} */ (methodProblem(''))
+  if (code === 'HPE_HEADER_OVERFLOW') return { status: 431, detail: 'The address and headers are too long together.' }
+  if (code === 'ERR_HTTP_REQUEST_TIMEOUT') return { status: 408, detail: 'The request did not arrive in time.' }
+  return { status: 400, detail: 'This is not a request in HTTP/1.1.' }
+}

@@ -1,0 +1,93 @@
+/** What a request may ask for: refusals of methods and targets that no page or route should have to think about. */
+
+/** Nothing is changed by a request, so these are all. */
+const ALLOW = 'GET, HEAD, OPTIONS'
+const METHODS = new Set(ALLOW.split(', '))
+
+/**
+ * Room for six scenarios and a thousand full doubles, all percent-encoded (about 40 kB), and some more.
+ */
+export const LONGEST_TARGET = 48 * 1024
+
+/** @typedef {import('./problem.mjs').Problem} Problem */
+
+/**
+ * @param {string | undefined} method
+ * @returns {Problem | null}
+ */
+export function methodProblem(method = '') {
+  if (METHODS.has(method)) return null
+  return {
+    status: 405,
+    detail: `This server answers ${ALLOW}, not ${method || 'this method'}.`,
+    headers: { Allow: ALLOW },
+  }
+}
+
+/**
+ * @param {string} target as in the request line
+ * @returns {Problem | null}
+ */
+export function targetProblem(target) {
+  if (target.length > LONGEST_TARGET) {
+    return { status: 414, detail: `The address has ${target.length} characters; ${LONGEST_TARGET} are the most.` }
+  }
+  // Also keeps a path from being taken for a host: `http://other/`, `//other/`, `/\other/`.
+  if (!target.startsWith('/') || target.startsWith('//') || target.includes('\\')) {
+    return bad('The request must name a path that starts with one slash, and no host.')
+  }
+  const { path, query } = split(target)
+  const decoded = decode(path)
+  if (decoded === null) return bad('The path holds a percent sign that encodes no character.')
+  if (hasControl(decoded)) return bad('The path holds a control character.')
+  return isApi(path) ? queryProblem(query) : null
+}
+
+/** The answer to OPTIONS. */
+export const OPTIONS_HEADERS = { Allow: ALLOW, 'Content-Length': '0' }
+
+/**
+ * Pages read a damaged query as well as they can and say so; the interface refuses it.
+ * @param {string} query
+ * @returns {Problem | null}
+ */
+function queryProblem(query) {
+  const pairs = query.split('&').map((pair) => pair.split(/=(.*)/s))
+  const at = pairs.findIndex((pair) => pair.some((part) => decode(part) === null))
+  if (at < 0) return null
+  const [key, value = ''] = pairs[at]
+  const scenario = key === 's' ? pairs.slice(0, at).filter(([earlier]) => earlier === 's').length : null
+  const message = `The value of ${key} holds a percent sign that encodes no character; a percent sign itself is %25.`
+  return { ...bad(message), errors: [{ parameter: key, scenario, value, allowed: 'percent-encoded UTF-8', message }] }
+}
+
+/** @param {string} target */
+function split(target) {
+  const at = target.indexOf('?')
+  return at < 0 ? { path: target, query: '' } : { path: target.slice(0, at), query: target.slice(at + 1) }
+}
+
+/** @param {string} text */
+function decode(text) {
+  try {
+    return decodeURIComponent(text)
+  } catch {
+    return null
+  }
+}
+
+/** @param {string} text */
+function hasControl(text) {
+  for (const character of text) if (character < ' ' || character === '\x7f') return true
+  return false
+}
+
+/** @param {string} path */
+function isApi(path) {
+  return path === '/api' || path.startsWith('/api/')
+}
+
+/** @param {string} detail @returns {Problem} */
+function bad(detail) {
+  return { status: 400, detail }
+}
