@@ -14,7 +14,7 @@ import { fileURLToPath } from 'node:url'
 const BITS = 192n
 const ONE = 1n << BITS
 const STEP_DENOMINATOR = 48n
-const PANELS = 16
+const PANELS = 17
 const WIDTH = 20n
 const SHIFT = 4n
 const TERMS = 12
@@ -37,7 +37,7 @@ function root(a) {
   return guess
 }
 
-/** Exponential: the argument is divided by 2^16, summed as a Taylor series and squared back. @param {bigint} a */
+/** Exponential: the argument is divided by 2^16, summed as a Taylor series and squared back. @param {bigint} a @returns {bigint} */
 function exponential(a) {
   if (a < 0n) return over(ONE, exponential(-a))
   const small = a >> 16n
@@ -125,7 +125,7 @@ function integrals(y, points) {
 }
 
 /**
- * What the panels tabulate for y ≥ 1, as functions of e = 4/(y + 4): R/(y + 4), (1 − s)/e² and (ds/d ln y)/e².
+ * What the panels tabulate for y ≥ 3/4, as functions of e = 4/(y + 4): R/(y + 4), (1 − s)/e² and (ds/d ln y)/e².
  * The limits at e = 0 are left to the interpolation, whose points are inside the panels.
  * @param {bigint} e @param {ReturnType<typeof trapezoid>} points
  */
@@ -143,7 +143,7 @@ function panelFunctions(e, points) {
 }
 
 /**
- * What stays of R, D and DD for y < 1 after the terms in y² and y⁴ ln y, over y⁴.
+ * What stays of R, D and DD for y < 3/4 after the terms in y² and y⁴ ln y, over y⁴.
  * @param {bigint} y @param {ReturnType<typeof trapezoid>} points
  */
 function remainders(y, points) {
@@ -225,21 +225,21 @@ export function neutrinoTable() {
   const panels = Array.from({ length: PANELS }, (_, i) =>
     expand((e) => panelFunctions(e, points), BigInt(2 * i + 1) * half, half),
   )
-  const small = expand((y) => remainders(y, points), ONE / 2n, ONE / 2n)
+  const small = expand((y) => remainders(y, points), fraction(3n, 8n), fraction(3n, 8n))
   /** @param {number} f */
   const rows = (f) => literal([...panels, small].map(({ polynomials }) => polynomials[f]))
   /** @param {number} f */
   const worst = (f) => Math.max(...panels.map(({ errors }) => errors[f])).toExponential(1)
   return `// Written by scripts/neutrino-table.mjs, which says how; do not edit.
-// ${PANELS} panels of width 1/${WIDTH} in e = ${SHIFT}/(y + ${SHIFT}), from e = 0 up, then one row for 0 ≤ y ≤ 1; in a row the
+// ${PANELS} panels of width 1/${WIDTH} in e = ${SHIFT}/(y + ${SHIFT}), from e = 0 up, then one row for 0 ≤ y ≤ 3/4; in a row the
 // coefficients of the powers of t, which goes from −1 to 1 across the panel.
 // Measured error, with the coefficients rounded as printed, half way between the interpolation points (absolute):
 // panels: ratio ${worst(0)}, pressure ${worst(1)}, slope ${worst(2)};
-// row for y ≤ 1: ${small.errors.map((error) => error.toExponential(1)).join(', ')}, to be multiplied by y⁴.
+// row for y ≤ 3/4: ${small.errors.map((error) => error.toExponential(1)).join(', ')}, to be multiplied by y⁴.
 
 /** Coefficients in a row. */
 export const TERMS = ${TERMS}
-/** Panels; the row of this number is the one for y ≤ 1. */
+/** Panels; the row of this number is the one for y ≤ 3/4. */
 export const PANELS = ${PANELS}
 /** Panels in one unit of e. */
 export const PANELS_PER_UNIT = ${WIDTH}
