@@ -1,0 +1,69 @@
+/** A curve with its marks. Hue comes by class, dash by the place in the list: a reader without colours can tell them apart. */
+import type { Curve, Mark } from './long-view'
+import type { Frame, Plot } from './plot'
+import type { Point } from './sample'
+import { px, type SvgNode, svg } from './svg'
+
+/** Line width and marks in units of the type. */
+const LINE = 0.17
+const RING = 0.32
+const CROSS = 0.36
+const ARROW = 0.62
+
+/** Dashes in units of the line width; round ends make short ones dots. */
+const DASHES = ['', '3.4 2.4', '0 2.2', '5 2.2 0 2.2', '1.6 2.4', '7 2.4']
+
+export function dashOf(slot: number, width: number): string | null {
+  const dash = DASHES[slot % DASHES.length]
+  if (!dash) return null
+  return dash
+    .split(' ')
+    .map((part) => px(Number(part) * width))
+    .join(' ')
+}
+
+export function drawCurve(curve: Curve, plot: Plot, { type }: Frame): SvgNode {
+  const width = px(LINE * type)
+  const dash = dashOf(curve.slot, width)
+  const stroke = { class: 'curve', 'stroke-width': width, ...(dash === null ? {} : { 'stroke-dasharray': dash }) }
+  return svg(
+    'g',
+    { class: `slot-${curve.slot}` },
+    ...asymptote(curve, plot, type),
+    svg('path', { d: curve.segments.map((segment) => pathOf(segment, plot)).join(''), ...stroke }),
+    ...curve.marks.map((mark) => drawMark(mark, plot, type)),
+  )
+}
+
+function pathOf(points: readonly Point[], plot: Plot): string {
+  return points.map(([time, scale], i) => `${i === 0 ? 'M' : 'L'}${plot.x(time)} ${plot.y(scale)}`).join('')
+}
+
+function asymptote({ asymptote: time }: Curve, plot: Plot, type: number): SvgNode[] {
+  if (time === null) return []
+  const x = plot.x(time)
+  const dash = `${px(0.1 * type)} ${px(0.3 * type)}`
+  return [svg('line', { x1: x, x2: x, y1: plot.top, y2: plot.bottom, class: 'asymptote', 'stroke-dasharray': dash })]
+}
+
+function drawMark(mark: Mark, plot: Plot, type: number): SvgNode {
+  const [x, y] = [plot.x(mark.at[0]), plot.y(mark.at[1])]
+  const width = px(LINE * type)
+  if (mark.kind === 'ring')
+    return svg('circle', { cx: x, cy: y, r: px(RING * type), class: 'ring', 'stroke-width': px(0.8 * width) })
+  if (mark.kind === 'arrow') return arrow([plot.x(mark.from[0]), plot.y(mark.from[1])], [x, y], ARROW * type)
+  const arm = CROSS * type
+  const d = `M${px(x - arm)} ${px(y - arm)}L${px(x + arm)} ${px(y + arm)}M${px(x - arm)} ${px(y + arm)}L${px(x + arm)} ${px(y - arm)}`
+  return svg('path', { d, class: 'cross', 'stroke-width': width })
+}
+
+/** A head along the last stretch of the curve, its tip just beyond the point. */
+function arrow([x1, y1]: readonly [number, number], [x2, y2]: readonly [number, number], size: number): SvgNode {
+  const length = Math.hypot(x2 - x1, y2 - y1) || 1
+  const [ux, uy] = [(x2 - x1) / length, (y2 - y1) / length]
+  const [tipX, tipY] = [x2 + 0.5 * size * ux, y2 + 0.5 * size * uy]
+  const [backX, backY] = [tipX - size * ux, tipY - size * uy]
+  const half = 0.42 * size
+  const d = `M${px(tipX)} ${px(tipY)}L${px(backX - half * uy)} ${px(backY + half * ux)}L${px(backX + half * uy)} ${px(backY - half * ux)}Z`
+  return svg('path', { d, class: 'arrow' })
+}

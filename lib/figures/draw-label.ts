@@ -1,0 +1,25 @@
+/** A label in the colour of its curve, with a rim of the ground so that it stays readable over lines. */
+import { type Label, NAME_LINE, NOTE_LINE, NOTE_SIZE } from './labels'
+import type { Frame } from './plot'
+import { px, type SvgNode, svg } from './svg'
+
+export function drawLabel(label: Label, { type }: Frame): SvgNode {
+  const place = { x: px(label.x), 'text-anchor': label.anchor }
+  const children: SvgNode[] = []
+  let y = label.y
+  if (label.leader) children.push(leader(label.leader))
+  if (label.name) {
+    children.push(svg('text', { ...place, y: px(y + 0.92 * type), 'font-size': type, class: 'name' }, label.name))
+    y += NAME_LINE * type
+  }
+  if (label.note) {
+    const size = px(NOTE_SIZE * type)
+    children.push(svg('text', { ...place, y: px(y + 0.82 * type), 'font-size': size, class: 'note' }, label.note))
+    y += NOTE_LINE * type
+  }
+  return svg('g', { class: `slot-${label.slot}` }, ...children)
+}
+
+function leader([x1, y1, x2, y2]: readonly [number, number, number, number]): SvgNode {
+  return svg('line', { x1: px(x1), y1: px(y1), x2: px(x2), y2: px(y2), class: 'leader' })
+}

@@ -1,0 +1,51 @@
+/** The long view as a drawing. */
+import { axes, timeAxisTitle } from './draw-axes'
+import { drawCurve } from './draw-curve'
+import { drawLabel } from './draw-label'
+import { labelHeight, labelWidth, nameOf, placeLabels } from './labels'
+import type { LongView } from './long-view'
+import { type Frame, type Margins, type Plot, plotOf } from './plot'
+import { type SvgNode, svg } from './svg'
+import { textWidth } from './text-width'
+
+/** The vertical axis stands above its upper end. */
+const SCALE_TITLE = 'scale factor a'
+
+export function drawLongView(view: LongView, frame: Frame): SvgNode {
+  const plot = plotOf(frame, marginsOf(view, frame), view.window)
+  const free = plot.left + textWidth(SCALE_TITLE, frame.type * 0.9) + frame.type
+  const labels = placeLabels(view, plot, frame, free)
+  return svg(
+    'svg',
+    { viewBox: `0 0 ${frame.width} ${frame.height}`, class: 'chart', role: 'img', 'aria-label': view.alternative },
+    ...ground(view, plot, frame),
+    ...axes(view.window, plot, frame, SCALE_TITLE),
+    ...view.curves.map((curve) => drawCurve(curve, plot, frame)),
+    ...labels.map((label) => drawLabel(label, frame)),
+  )
+}
+
+function marginsOf(view: LongView, frame: Frame): Margins {
+  const { type, compact } = frame
+  const texts = view.curves.map((curve) => ({ name: nameOf(curve, frame), note: compact ? '' : curve.note }))
+  const beside = texts.filter((_, i) => view.curves[i]?.finish?.edge !== 'top').map((text) => labelWidth(text, type))
+  const above = texts.filter((_, i) => view.curves[i]?.finish?.edge === 'top').map((text) => labelHeight(text, type))
+  const title = textWidth(timeAxisTitle(), type * 0.9)
+  return {
+    left: 2.4 * type,
+    right: compact ? 0.6 * type : Math.max(title, ...beside) + 1.4 * type,
+    top: Math.max(1.5 * type, ...above.map((height) => height + 1.3 * type)),
+    bottom: compact ? 3.2 * type : 2 * type,
+  }
+}
+
+/** The future lies on a tint; hatched where it is an extrapolation. */
+function ground(view: LongView, plot: Plot, { id }: Frame): SvgNode[] {
+  const x = plot.x(0)
+  const area = { x, y: plot.top, width: plot.right - x, height: plot.bottom - plot.top }
+  const lines = svg('path', { d: 'M-2 10L10 -2M6 18L18 6', class: 'hatch' })
+  const pattern = svg('pattern', { id: `${id}-hatch`, width: 8, height: 8, patternUnits: 'userSpaceOnUse' }, lines)
+  const tint = svg('rect', { ...area, class: 'tint' })
+  if (!view.hatched) return [tint]
+  return [svg('defs', {}, pattern), tint, svg('rect', { ...area, fill: `url(#${id}-hatch)` })]
+}

@@ -1,0 +1,46 @@
+/** From the quantities of a figure to pixels. */
+import { px } from './svg'
+import type { Window } from './window'
+
+/** What the place of a figure asks for: a wide page, a phone, a slide. */
+export interface Frame {
+  readonly width: number
+  readonly height: number
+  /** Size of the type; lines and gaps follow from it. */
+  readonly type: number
+  /** True where labels have no room beside the plot. */
+  readonly compact: boolean
+  /** Begins the ids of this drawing, so that several fit one page. */
+  readonly id: string
+}
+
+/** The plot's edges, in pixels from the upper left corner. */
+export interface Plot {
+  readonly left: number
+  readonly right: number
+  readonly top: number
+  readonly bottom: number
+  readonly x: (time: number) => number
+  readonly y: (scale: number) => number
+}
+
+export interface Margins {
+  readonly left: number
+  readonly right: number
+  readonly top: number
+  readonly bottom: number
+}
+
+export function plotOf(frame: Frame, margins: Margins, { from, to, top: a }: Window): Plot {
+  const { left, top } = margins
+  const right = frame.width - margins.right
+  const bottom = frame.height - margins.bottom
+  return {
+    left,
+    right,
+    top,
+    bottom,
+    x: (time) => px(left + ((time - from) / (to - from)) * (right - left)),
+    y: (scale) => px(bottom - (scale / a) * (bottom - top)),
+  }
+}

@@ -1,0 +1,25 @@
+/** What becomes of a universe, in one or two sentences with the numbers that matter. */
+import type { Solution } from '../solve'
+import { accelerationClause } from './acceleration'
+import { beyondSentence } from './beyond'
+import { endClause, endTail } from './ending'
+import { originClause } from './origin'
+import { reachSentence } from './reach'
+import { capital, joined } from './sentence'
+
+/** The part of a solution that the words need. */
+export type Told = Pick<Solution, 'scenario' | 'origin' | 'end' | 'measures' | 'moments'>
+
+export interface Verdict {
+  /** Origin, acceleration and ending, then what they lead to. */
+  readonly sentences: readonly string[]
+  /** What the ending owes to the law beyond today; null where that choice changes nothing. */
+  readonly aside: string | null
+}
+
+/** `other`: the same scenario with the other choice of `beyond`, null where the law knows no difference. */
+export function verdictOf(told: Told, other: Told | null): Verdict {
+  const clauses = [originClause(told), accelerationClause(told), endClause(told)].filter((clause) => clause !== null)
+  const sentences = [`${capital(joined(clauses))}.`, endTail(told), reachSentence(told)].filter((one) => one !== null)
+  return { sentences, aside: other === null ? null : beyondSentence(told, other) }
+}
