@@ -8,8 +8,8 @@
  * s² ≤ ⟨g²⟩ ≤ s, it lies between s(1 − s) and 2s(1 − s): s rises strictly from 0 (massless) to 1 (cold), ln R is convex in
  * ln y, and ln(s/(1 − s)) rises with ln y at a rate between 1 and 2.
  *
- * Domain 0 ≤ y ≤ 1e300; infinity gives the limit, a negative number NaN. For y ≥ 3/4 polynomials in e = 4/(y + 4), whose
- * last panel reaches y = ∞; for y < 3/4 the known terms in y² and y⁴ ln y and a polynomial for the rest. See table.ts.
+ * Domain 0 ≤ y ≤ 1e300; infinity gives the limit, a negative number NaN. For y ≥ 3/4 polynomials in e = 4/(y + 4), which
+ * reach y = ∞ at e = 0; for y < 3/4 the known terms in y² and y⁴ ln y and a polynomial for the rest. See table.ts.
  */
 import { FIRST, PANELS, PANELS_PER_UNIT, RATIO, SECOND, SHIFT, TERMS } from './table'
 
