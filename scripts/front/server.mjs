@@ -13,6 +13,8 @@ const LIMITS = {
   requestTimeout: 30_000,
   keepAliveTimeout: 15_000,
   connectionsCheckingInterval: 5_000,
+  // Refused below, with a body that says why.
+  requireHostHeader: false,
   // The longest target that we read, and as much again as Node's default for the other headers.
   maxHeaderSize: LONGEST_TARGET + 16 * 1024,
 }
@@ -27,13 +29,16 @@ export function createFront(handler, limits = {}) {
   const server = createServer({ ...LIMITS, ...limits }, (request, response) => {
     const target = request.url ?? ''
     setSecurityHeaders(response, target)
-    const problem = methodProblem(request.method) ?? targetProblem(target)
+    const problem = methodProblem(request.method) ?? hostProblem(request) ?? targetProblem(target)
     if (problem) sendProblem(response, problem, target.split('?')[0].slice(0, 200))
     else if (request.method === 'OPTIONS') response.writeHead(204, OPTIONS_HEADERS).end()
     else compress(request, response, () => answer(handler, request, response))
   })
   server.setTimeout(SILENCE)
   server.on('connect', (_request, socket) => writeProblem(socket, /** @type {any} */ (methodProblem('CONNECT'))))
+  server.on('checkExpectation', (_request, response) => {
+    sendProblem(response, { status: 417, detail: 'This server meets no expectation but 100-continue.' }, '')
+  })
   server.on('clientError', (error, socket) => {
     if (socket.writable && !('code' in error && error.code === 'ECONNRESET')) writeProblem(socket, parserProblem(error))
     else socket.destroy()
@@ -56,6 +61,15 @@ async function answer(handler, request, response) {
 }
 
 /**
+ * @param {import('node:http').IncomingMessage} request
+ * @returns {import('./problem.mjs').Problem | null}
+ */
+function hostProblem({ httpVersion, headers }) {
+  if (httpVersion !== '1.1' || headers.host !== undefined) return null
+  return { status: 400, detail: 'A request in HTTP/1.1 must have a Host header.' }
+}
+
+/**
  * @param {Error & {code?: string}} error of Node's parser
  * @returns {import('./problem.mjs').Problem}
  */
@@ -63,5 +77,8 @@ function parserProblem({ code }) {
   if (code === 'HPE_INVALID_METHOD') return /** @type {any} */ (methodProblem(''))
   if (code === 'HPE_HEADER_OVERFLOW') return { status: 431, detail: 'The address and headers are too long together.' }
   if (code === 'ERR_HTTP_REQUEST_TIMEOUT') return { status: 408, detail: 'The request did not arrive in time.' }
+  if (code === 'HPE_INVALID_URL') {
+    return { status: 400, detail: 'The address holds characters that have to be percent-encoded.' }
+  }
   return { status: 400, detail: 'This is not a request in HTTP/1.1.' }
 }

@@ -8,7 +8,7 @@ const OUTPUT = join(ROOT, '.next')
 const STAMP = join(OUTPUT, '.built')
 
 /** What no page or route is made from. A list of exceptions, so that a new source folder cannot be forgotten. */
-const APART = new Set(['node_modules', 'test', 'e2e', 'scripts', 'test-results', 'playwright-report', 'coverage'])
+const APART = new Set(['node_modules', 'test', 'e2e', 'test-results', 'playwright-report', 'coverage'])
 
 /** @param {string} path from the project's folder */
 export function isSource(path) {
@@ -18,7 +18,7 @@ export function isSource(path) {
 
 /**
  * Settings that a build may take into its output.
- * @param {NodeJS.ProcessEnv} env
+ * @param {import('./project.mjs').Environment} env
  */
 export function builtIn(env) {
   return Object.entries(env)

@@ -8,7 +8,7 @@ const STAMP = join(ROOT, 'node_modules', '.installed')
 /**
  * The npm that runs us, else the one on the path. Other package managers set `npm_execpath` too; they do not read our
  * lockfile.
- * @param {NodeJS.ProcessEnv} env
+ * @param {import('./project.mjs').Environment} env
  * @returns {readonly [string, ...string[]]}
  */
 export function npmCommand(env) {

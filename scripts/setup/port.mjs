@@ -7,7 +7,7 @@ import { Refusal } from './project.mjs'
 /**
  * `-p` or `--port`, else PORT, else 3000. 0 takes any free port.
  * @param {string[]} args
- * @param {NodeJS.ProcessEnv} env
+ * @param {import('./project.mjs').Environment} env
  */
 export function choosePort(args, env) {
   const text = portArgument(args) ?? (env.PORT || '3000')

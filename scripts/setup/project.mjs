@@ -2,6 +2,8 @@
 import { spawnSync } from 'node:child_process'
 import { fileURLToPath } from 'node:url'
 
+/** @typedef {Readonly<Record<string, string | undefined>>} Environment */
+
 export const ROOT = fileURLToPath(new URL('../../', import.meta.url))
 
 /** A mistake that one line explains; anything else that is thrown keeps its stack. */

@@ -1,0 +1,96 @@
+/**
+ * `npm test`: installs, then checks types and style, runs the unit tests, builds, and runs the browser tests against the
+ * build. Every step runs even if an earlier one failed; the last line counts the tests, and a failed step as one more.
+ */
+import { nodeProblem } from './setup/node-version.mjs'
+
+const problem = nodeProblem(process.version)
+if (problem) {
+  console.error(problem)
+  process.exit(1)
+}
+
+const { mkdtempSync, readFileSync, rmSync } = await import('node:fs')
+const { tmpdir } = await import('node:os')
+const { join } = await import('node:path')
+const { fail, Refusal, run, runNode } = await import('./setup/project.mjs')
+const { ensureInstalled, npmCommand } = await import('./setup/install.mjs')
+const { ensureBuilt } = await import('./setup/build.mjs')
+const { ensureChromium } = await import('./setup/chromium.mjs')
+const { probePort } = await import('./setup/port.mjs')
+const { atLeastOneFailed, closingLine, sum, tallyPlaywright, tallyVitest } = await import('./setup/tally.mjs')
+
+/** @typedef {import('./setup/tally.mjs').Tally} Tally */
+
+const FAILED = { passed: 0, failed: 1, skipped: 0 }
+const NOTHING = { passed: 0, failed: 0, skipped: 0 }
+const reports = mkdtempSync(join(tmpdir(), 'longhence-'))
+
+/** @returns {Tally} */
+function check() {
+  const [command, ...args] = npmCommand(process.env)
+  return run(command, [...args, 'run', 'check']) === 0 ? NOTHING : FAILED
+}
+
+/** @returns {Tally} */
+function unitTests() {
+  const report = join(reports, 'unit.json')
+  const args = ['run', '--config', 'test/vitest.config.ts', '--reporter=default', '--reporter=json']
+  const code = runNode('vitest/vitest.mjs', [...args, `--outputFile.json=${report}`])
+  return atLeastOneFailed(code === 0, read(report, tallyVitest))
+}
+
+/** @returns {Tally} */
+function build() {
+  try {
+    ensureBuilt()
+    return NOTHING
+  } catch (error) {
+    if (!(error instanceof Refusal)) throw error
+    console.error(error.message)
+    return FAILED
+  }
+}
+
+/**
+ * @param {string} chromium
+ * @returns {Promise<Tally>}
+ */
+async function browserTests(chromium) {
+  const report = join(reports, 'browser.json')
+  const code = runNode('@playwright/test/cli.js', ['test', '--config', 'e2e/playwright.config.ts'], {
+    CHROMIUM_PATH: chromium,
+    PLAYWRIGHT_JSON_OUTPUT_FILE: report,
+    PORT: String(await probePort(0)),
+  })
+  return atLeastOneFailed(code === 0, read(report, tallyPlaywright))
+}
+
+/**
+ * @param {string} file
+ * @param {(report: any) => Tally} tally
+ */
+function read(file, tally) {
+  try {
+    return tally(JSON.parse(readFileSync(file, 'utf8')))
+  } catch (error) {
+    console.error(`No report of the tests: ${error instanceof Error ? error.message : error}`)
+    return FAILED
+  }
+}
+
+try {
+  ensureInstalled()
+  const chromium = ensureChromium()
+  const tallies = [check(), unitTests()]
+  const built = build()
+  // Without a build there is nothing to browse, and the failed build is counted.
+  tallies.push(built, built.failed > 0 ? NOTHING : await browserTests(chromium))
+  const total = sum(tallies)
+  console.log(closingLine(total))
+  process.exitCode = total.failed > 0 || total.passed === 0 ? 1 : 0
+} catch (error) {
+  fail(error)
+} finally {
+  rmSync(reports, { recursive: true, force: true })
+}

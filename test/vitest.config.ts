@@ -1,0 +1,10 @@
+import { fileURLToPath } from 'node:url'
+import { defineConfig } from 'vitest/config'
+
+export default defineConfig({
+  test: {
+    root: fileURLToPath(new URL('..', import.meta.url)),
+    include: ['test/**/*.test.{ts,tsx}'],
+    environment: 'node',
+  },
+})
