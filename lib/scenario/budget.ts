@@ -12,28 +12,35 @@ export interface Budget {
   readonly states: readonly MassiveState[]
   /** Baryons and cold dark matter: Ω_m less the massive neutrinos. Negative where they outweigh it: such a code is refused. */
   readonly coldMatter: number
+  /** What rounding took from `coldMatter`: density + remainder is right to twice the digits of a double. */
+  readonly coldRemainder: number
   readonly curvature: number
   readonly dark: number
-  /** Which of the two follows from the others. */
+  /** Which of the two follows from the others: it is the correctly rounded 1 − (radiation + Ω_m + the given one). */
   readonly closes: 'curvature' | 'dark'
-  /**
-   * The closing density is the correctly rounded 1 − (photons + massless neutrinos + each massive state + cold matter +
-   * the given one), and this is what the rounding took: density + remainder is right to twice the digits of a double.
-   */
+  /** What rounding took from the closing density, as for cold matter. */
   readonly closingRemainder: number
 }
 
 export function budgetOf(scenario: Scenario): Budget {
   const { photons, masslessNeutrinos, states } = radiationBudget(scenario.radiation, scenario.h0)
-  const massiveNeutrinos = exactSum(states.map((one) => one.density)).high
-  const coldMatter = scenario.matter - massiveNeutrinos
   const { given, value } = scenario.closure
-  const terms = [photons, masslessNeutrinos, ...states.map((one) => one.density), coldMatter, value]
+  const weights = states.map((one) => one.density)
+  const cold = exactSum([scenario.matter, ...weights.map((one) => -one)])
+  const terms = [photons, masslessNeutrinos, scenario.matter, value]
   const closing = closingDensity(terms, scenario.radiation.kind !== 'thermal')
-  const [curvature, dark] = given === 'curvature' ? [value, closing.high] : [closing.high, value]
-  const closes = given === 'curvature' ? 'dark' : 'curvature'
-  const closingRemainder = closing.low
-  return { photons, masslessNeutrinos, massiveNeutrinos, states, coldMatter, curvature, dark, closes, closingRemainder }
+  return {
+    photons,
+    masslessNeutrinos,
+    massiveNeutrinos: exactSum(weights).high,
+    states,
+    coldMatter: cold.high,
+    coldRemainder: cold.low,
+    curvature: given === 'curvature' ? value : closing.high,
+    dark: given === 'curvature' ? closing.high : value,
+    closes: given === 'curvature' ? 'dark' : 'curvature',
+    closingRemainder: closing.low,
+  }
 }
 
 /**

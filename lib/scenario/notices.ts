@@ -24,22 +24,27 @@ function closingNotice(scenario: Scenario, budget: Budget): Notice | null {
   const radiation = budget.photons + budget.masslessNeutrinos
   // 1e-12: far above the rounding of typed decimals, far below what anyone types as a difference.
   if (Math.abs(1 - matter - closure.value) > 1e-12 || radiation === 0 || radiation > SMALL) return null
-  const leftover = short(closure.given === 'dark' ? budget.curvature : budget.dark)
-  const sum = `The given densities add up to 1 without the radiation of ${short(radiation)}`
-  if (closure.given === 'dark') {
-    const flat: Scenario = { ...scenario, closure: { given: 'curvature', value: 0 } }
-    return { message: `${sum}, so the universe is slightly closed: Ω_k = ${leftover}.`, code: writeScenario(flat) }
-  }
-  const bare: Scenario = { ...scenario, radiation: { kind: 'none' } }
-  const message = `${sum}, so dark energy closes the budget with Ω_DE = ${leftover} and decides the far future.`
-  return { message, code: writeScenario(bare) }
+  const effect =
+    closure.given === 'dark'
+      ? `the universe is slightly closed: Ω_k = ${short(budget.curvature)}`
+      : `dark energy closes the budget with Ω_DE = ${short(budget.dark)} and decides the far future`
+  const message = `The given densities add up to 1 without the radiation of ${short(radiation)}, so ${effect}.`
+  return { message, code: writeScenario(withoutLeftover(scenario)) }
+}
+
+/** Flat, the radiation taken from dark energy; where there was to be no dark energy, without radiation. */
+function withoutLeftover(scenario: Scenario): Scenario {
+  const { given, value } = scenario.closure
+  if (given === 'curvature') return { ...scenario, radiation: { kind: 'none' } }
+  const flat: Scenario = { ...scenario, closure: { given: 'curvature', value: 0 } }
+  return value === 0 ? { ...flat, radiation: { kind: 'none' } } : flat
 }
 
 /** Published tables give Ω_b near 0.05 and Ω_b h² near 0.022. */
 function baryonNotice(scenario: Scenario): Notice | null {
   if (scenario.baryons <= 0.03) return null
   const physical = Number((scenario.baryons * (scenario.h0 / 100) ** 2).toPrecision(4))
-  const message = `baryons is Ω_b h²; ${scenario.baryons} looks like Ω_b, which would be Ω_b h² = ${short(physical)}.`
+  const message = `baryons is Ω_b h²; ${scenario.baryons} looks like Ω_b, which would be Ω_b h² = ${physical}.`
   const fits = physical >= BARYONS.min && physical <= 0.03
   return { message, code: fits ? writeScenario({ ...scenario, baryons: physical }) : null }
 }
