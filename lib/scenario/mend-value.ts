@@ -1,7 +1,8 @@
 /** The nearest good text of one value, or null where there is no telling what was meant. */
 import type { Limits, ListParameter, Parameter } from '../parameter'
 import { FORBIDDEN } from './name'
-import { AS, type OwnParameter } from './parameters'
+import type { OwnParameter } from './own-parameter'
+import { AS } from './parameters'
 import { plainDecimal } from './values'
 
 export function nearestText(parameter: Parameter | OwnParameter, text: string): string | null {

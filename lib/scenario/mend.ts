@@ -4,18 +4,8 @@ import type { Family } from '../dark-energy/law'
 import type { Parameter } from '../parameter'
 import { loosePairs } from './mend-text'
 import { nearestText } from './mend-value'
-import {
-  CMB,
-  CURVATURE,
-  DARK,
-  EOS,
-  MASSES,
-  MATTER,
-  NU,
-  OWN_PARAMETERS,
-  type OwnParameter,
-  RADIATION,
-} from './parameters'
+import type { OwnParameter } from './own-parameter'
+import { CMB, CURVATURE, DARK, EOS, MASSES, MATTER, NU, OWN_PARAMETERS, RADIATION } from './parameters'
 import { clip } from './problems'
 import { MOST_SCENARIOS } from './query'
 import { readScenario } from './read'

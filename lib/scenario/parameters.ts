@@ -1,24 +1,7 @@
 /** The scenario's own keys, in canonical order; a dark-energy family adds its keys between `eos` and `beyond`. */
 import { FAMILIES } from '../dark-energy'
 import type { Family } from '../dark-energy/law'
-import type { ChoiceParameter, ListParameter, NumberParameter } from '../parameter'
-
-/** Where the form puts a parameter. */
-export type Group = 'expansion rate' | 'densities' | 'radiation and neutrinos' | 'dark energy' | 'name'
-
-/** `fallback` null: an absent key has no number of its own (what it then is follows from the others). */
-interface OwnNumber extends Omit<NumberParameter, 'fallback'> {
-  readonly fallback: number | null
-}
-
-/** Free text, counted in code points. */
-interface TextParameter extends Omit<ChoiceParameter, 'kind' | 'fallback' | 'choices'> {
-  readonly kind: 'text'
-  readonly least: number
-  readonly most: number
-}
-
-export type OwnParameter = (OwnNumber | ListParameter | ChoiceParameter | TextParameter) & { readonly group: Group }
+import type { OwnParameter } from './own-parameter'
 
 export const H0 = {
   kind: 'number',
