@@ -1,57 +1,36 @@
 /**
  * The pipeline in a few calls; read this first:
- * scenario → model (density budget and E²) → history (t and η as functions of a, origin and end) → measures and moments.
+ * scenario → budget and model (E² of a) → history (t and η as functions of a, origin and end) → measures and moments.
  */
-import type { History } from './history/history'
+import { eventAtTime, isEvent } from './history/event'
+import { type History, historyOf } from './history/history'
 import type { EndKind, OriginKind } from './history/outcome'
-import type { MeasureKey } from './quantities/measures'
+import { isMissing, type Outcome } from './measures/outcome'
+import { MEASURES, type MeasureKey } from './quantities/measures'
+import { type Moment, momentsOf } from './quantities/moments'
+import { type Budget, budgetOf } from './scenario/budget'
+import { type Notice, noticesOf } from './scenario/notices'
 import type { Scenario } from './scenario/scenario'
+import { writeScenario } from './scenario/write'
+import { hubbleTimeGyr } from './units'
+
+export type { Moment, MomentKind } from './quantities/moments'
+
+/** Version of the numbers: it rises when the same code gives other digits. */
+export const ENGINE = '1'
 
 /** A number with its unit and an absolute bound on its numerical error, or the reason why there is none. */
 export type Answer =
   | { readonly value: number; readonly unit: string; readonly error: number; readonly because: null }
   | { readonly value: null; readonly unit: string; readonly error: null; readonly because: string }
 
-export interface Moment {
-  readonly kind: MomentKind
-  readonly label: string
-  /** Gyr from now; null when infinite. */
-  readonly time: number | null
-  readonly scale: number | null
-  readonly redshift: number | null
-}
-
-export type MomentKind =
-  | 'origin'
-  | 'matter-radiation-equality'
-  | 'recombination'
-  | 'drag'
-  | 'acceleration-start'
-  | 'acceleration-end'
-  | 'matter-dark-equality'
-  | 'now'
-  | 'turnaround'
-  | 'unbinding-cluster'
-  | 'unbinding-galaxy'
-  | 'unbinding-planet'
-  | 'unbinding-earth'
-  | 'unbinding-atom'
-  | 'end'
-
 export interface Solution {
   readonly scenario: Scenario
   /** Canonical scenario code. */
   readonly code: string
-  /** The scenario's name, or a short description of it when it has none. */
+  /** The scenario's name, or its code without the name when it has none. */
   readonly label: string
-  readonly densities: {
-    readonly photons: number
-    readonly masslessNeutrinos: number
-    readonly massiveNeutrinos: number
-    readonly coldMatter: number
-    readonly curvature: number
-    readonly dark: number
-  }
+  readonly budget: Budget
   /** Gyr from now. */
   readonly origin: { readonly kind: OriginKind; readonly time: number | null; readonly scale: number }
   /** Gyr from now. */
@@ -65,11 +44,49 @@ export interface Solution {
   }
   readonly measures: Readonly<Record<MeasureKey, Answer>>
   readonly moments: readonly Moment[]
-  /** Plain sentences about what the user may not have meant. */
-  readonly notices: readonly string[]
+  /** What the user may not have meant. */
+  readonly notices: readonly Notice[]
   readonly history: History
 }
 
-/** a at the given times (Gyr from now, ascending); NaN-free: null where the history does not reach. */
-export declare function scalesAt(solution: Solution, times: readonly number[]): (number | null)[]
-export declare function solve(scenario: Scenario): Solution
+export function solve(scenario: Scenario): Solution {
+  const budget = budgetOf(scenario)
+  const history = historyOf(scenario, budget)
+  const subject = { scenario, budget, history }
+  const code = writeScenario(scenario)
+  const measures = MEASURES.map((one) => [one.key, answer(one.value(subject), one.unit)] as const)
+  return {
+    scenario,
+    code,
+    label: scenario.name ?? code,
+    budget,
+    ...originAndEnd(history, hubbleTimeGyr(scenario.h0)),
+    measures: Object.fromEntries(measures) as Record<MeasureKey, Answer>,
+    moments: momentsOf(subject),
+    notices: noticesOf(scenario, budget),
+    history,
+  }
+}
+
+function originAndEnd({ origin, end }: History, gyr: number): Pick<Solution, 'origin' | 'end'> {
+  const inGyr = (time: number | null) => (time === null ? null : time * gyr)
+  const turnaround = end.turnaround && { time: end.turnaround.time * gyr, scale: end.turnaround.scale }
+  return {
+    origin: { kind: origin.kind, time: inGyr(origin.time), scale: origin.scale },
+    end: { ...end, time: inGyr(end.time), turnaround, proven: origin.proven && end.proven },
+  }
+}
+
+const answer = (outcome: Outcome, unit: string): Answer =>
+  isMissing(outcome)
+    ? { value: null, unit, error: null, because: outcome.because }
+    : { value: outcome.value, unit, error: outcome.error, because: null }
+
+/** a at times in Gyr from now; null where the history does not reach. */
+export function scalesAt(solution: Solution, times: readonly number[]): (number | null)[] {
+  const gyr = hubbleTimeGyr(solution.scenario.h0)
+  return times.map((time) => {
+    const event = eventAtTime(solution.history, time / gyr)
+    return isEvent(event) ? Math.exp(event.place.N) : null
+  })
+}

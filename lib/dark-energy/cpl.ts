@@ -6,7 +6,6 @@ function linearInScale(w0: number, wa: number): Law {
   if (wa === 0) return powerLaw(w0)
   const early = 3 * (1 + w0 + wa)
   const w = (N: number) => w0 - wa * Math.expm1(N)
-  const logDensity = (N: number) => -early * N + 3 * wa * Math.expm1(N)
   const past: Asymptote = {
     kind: 'power',
     exponent: early,
@@ -15,8 +14,8 @@ function linearInScale(w0: number, wa: number): Law {
     settled: Math.log(1e-17 / Math.abs(3 * wa)),
   }
   return {
-    density: (N) => Math.exp(logDensity(N)),
-    change: (N, d) => Math.exp(logDensity(N)) * Math.expm1(-early * d + 3 * wa * Math.exp(N) * Math.expm1(d)),
+    logDensity: (N) => -early * N + 3 * wa * Math.expm1(N),
+    logChange: (N, d) => -early * d + 3 * wa * Math.exp(N) * Math.expm1(d),
     w,
     wSlope: (N) => -wa * Math.exp(N),
     exponentRange: (from, to) => {

@@ -14,10 +14,10 @@ export type Asymptote =
   | { readonly kind: 'exploding' }
 
 export interface Law {
-  /** f(N) = ρ/ρ_today; f(0) = 1. */
-  density(N: number): number
-  /** f(N + d) − f(N), without cancellation for small d. */
-  change(N: number, d: number): number
+  /** ln f(N) with f = ρ/ρ_today; f(0) = 1. */
+  logDensity(N: number): number
+  /** ln f(N + d) − ln f(N), without cancellation for small d. */
+  logChange(N: number, d: number): number
   /** w(N). */
   w(N: number): number
   /** dw/dN. */

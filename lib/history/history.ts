@@ -1,1 +1,46 @@
-export interface History { readonly todo?: never }
+/**
+ * The whole history of a scenario: up to four arms, glued at today and at the turning points.
+ * before a bounce ← bounce ← past — today — future → turnaround → home again.
+ */
+import { familyOf } from '../dark-energy/index'
+import type { Law } from '../dark-energy/law'
+import { powerLaw } from '../dark-energy/power-law'
+import { type Model, modelOf } from '../model'
+import type { Budget } from '../scenario/budget'
+import type { Scenario } from '../scenario/scenario'
+import { type Arm, armOf } from './arm'
+import { endOf } from './ending'
+import { originOf } from './origin'
+import type { End, Origin } from './outcome'
+
+export interface History {
+  /** From today to smaller a, by the law of the past. */
+  readonly past: Arm
+  /** From today to larger a, by the law of the future. */
+  readonly future: Arm
+  /** To larger a by the law of the past: the way in before a bounce, mirrored. */
+  readonly before: Arm
+  /** To smaller a by the law of the future: the way back after a turnaround. */
+  readonly home: Arm
+  readonly origin: Origin
+  readonly end: End
+}
+
+/** All of it, in 1/H₀ and c/H₀. Explicit laws only; every time carries the error bound of its arm. */
+export function historyOf(scenario: Scenario, budget: Budget): History {
+  const followed = familyOf(scenario.eos).law(scenario.law)
+  const past = modelOf(budget, followed)
+  const held = scenario.beyond === 'hold' && budget.dark !== 0
+  return assemble(past, held ? modelOf(budget, heldLaw(followed)) : past)
+}
+
+/** w of today from today on: the contraction after a turnaround keeps it too. */
+const heldLaw = (law: Law): Law => powerLaw(law.w(0))
+
+function assemble(pastLaw: Model, futureLaw: Model): History {
+  const arms = { past: armOf(pastLaw, -1), future: armOf(futureLaw, 1) }
+  const same = pastLaw === futureLaw
+  const before = same || arms.past.end.kind === 'none' ? arms.future : armOf(pastLaw, 1)
+  const home = same || arms.future.end.kind === 'none' ? arms.past : armOf(futureLaw, -1)
+  return { ...arms, before, home, origin: originOf(arms.past, before), end: endOf(arms.future, home) }
+}

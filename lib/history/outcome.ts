@@ -18,6 +18,8 @@ export interface Origin {
   readonly kind: OriginKind
   readonly time: number | null
   readonly scale: number
+  readonly proven: boolean
+  readonly because: string
 }
 
 export interface End {
@@ -26,7 +28,6 @@ export interface End {
   /** Limit of a; null when infinite. */
   readonly scale: number | null
   readonly turnaround: { readonly time: number; readonly scale: number } | null
-  /** True when origin and end follow with certainty from the law as typed. */
   readonly proven: boolean
   /** One sentence. */
   readonly because: string

@@ -1,4 +1,8 @@
 /** What every output of Longhence says about itself. */
+import type { History } from '../history/history'
+import type { Budget } from '../scenario/budget'
+import type { Scenario } from '../scenario/scenario'
+
 export interface Quantity {
   /** Name in answers and tables. */
   readonly key: string
@@ -14,3 +18,17 @@ export interface Quantity {
   readonly formula: string
   readonly source: string
 }
+
+/** What quantities are read from. */
+export interface Subject {
+  readonly scenario: Scenario
+  readonly budget: Budget
+  readonly history: History
+}
+
+export const fixed = (count: number) => ({ kind: 'fixed', count }) as const
+export const significant = (count: number) => ({ kind: 'significant', count }) as const
+
+export const FRIEDMANN = 'Friedmann 1922, Z. Phys. 10, 377'
+export const HOGG = 'Hogg 1999, arXiv:astro-ph/9905116'
+export const HORIZONS = 'Davis & Lineweaver 2004, PASA 21, 97, arXiv:astro-ph/0310808'

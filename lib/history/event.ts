@@ -1,0 +1,155 @@
+/**
+ * An event of the history: where on which arm, when, and how far in conformal time.
+ * Arms are symmetric in time about a turning point, so the contracting branches are mirrored arms.
+ */
+import type { Arm, Clock } from './arm'
+import type { History } from './history'
+import { expansionAtPlace, fromToday, type Place, placeAt, placeElapsed, placeRemaining, toEnd } from './place'
+
+export type Branch = 'expanding' | 'contracting'
+/** before = before a bounce, contracting; past and future = the expansion that holds today; home = after a turnaround. */
+export type Phase = 'before' | 'past' | 'future' | 'home'
+
+export interface Event {
+  readonly phase: Phase
+  readonly place: Place
+  /** 1 while expanding, −1 while contracting: the sign of H. */
+  readonly sign: 1 | -1
+  /** In an oscillating history: how many whole swings lie between the event's own swing and the turning point nearest to today. */
+  readonly swings: number
+}
+
+/** An event, or the reason why the history has none there. */
+export type Found = Event | { readonly because: string }
+
+export const isEvent = (found: Found): found is Event => 'place' in found
+
+const missing = (because: string): Found => ({ because })
+const event = (phase: Phase, place: Place): Event => ({
+  phase,
+  place,
+  sign: phase === 'past' || phase === 'future' ? 1 : -1,
+  swings: 0,
+})
+
+/** The event at scale factor e^N on a branch. */
+export function eventAtScale(history: History, N: number, branch: Branch): Found {
+  if (branch === 'expanding') {
+    const phase = N <= 0 ? 'past' : 'future'
+    const place = placeAt(history[phase], Math.abs(N))
+    return place ? event(phase, place) : missing('the expansion that holds today never has this scale factor')
+  }
+  if (history.future.end.kind === 'root') return contracting('home', N > 0 ? history.future : history.home, N)
+  if (history.past.end.kind === 'root') return contracting('before', N > 0 ? history.before : history.past, N)
+  return missing('this universe has no contracting branch')
+}
+
+function contracting(phase: Phase, arm: Arm, N: number): Found {
+  const place = placeAt(arm, Math.abs(N))
+  return place ? event(phase, place) : missing('the contracting branch never has this scale factor')
+}
+
+/** The event at a time from now, in 1/H₀. */
+export function eventAtTime(history: History, time: number): Found {
+  return time <= 0 ? pastEvent(history, -time) : futureEvent(history, time)
+}
+
+/** The event at an age since the origin; negative ages lie before a bounce. */
+export function eventAtAge(history: History, age: number): Found {
+  const { past, origin } = history
+  if (origin.time === null) return missing('the past is infinite, so no age can be counted')
+  if (age < 0) return past.end.kind === 'root' ? beforeBounce(history, -age) : missing('nothing lies before the origin')
+  if (age > past.time.total) return futureEvent(history, age - past.time.total)
+  const place = placeRemaining(past, 'time', age)
+  return place ? event('past', place) : missing(OUT_OF_RANGE)
+}
+
+const OUT_OF_RANGE = 'the scale factor there is outside the range of floating-point numbers'
+
+function pastEvent(history: History, elapsed: number): Found {
+  const { past } = history
+  if (elapsed <= past.time.total) {
+    const place = placeElapsed(past, 'time', elapsed)
+    return place ? event('past', place) : missing(OUT_OF_RANGE)
+  }
+  if (past.end.kind !== 'root') return missing('this is before the origin')
+  return beforeBounce(history, elapsed - past.time.total)
+}
+
+function futureEvent(history: History, elapsed: number): Found {
+  const { future } = history
+  if (elapsed <= future.time.total) {
+    const place = placeElapsed(future, 'time', elapsed)
+    return place ? event('future', place) : missing(OUT_OF_RANGE)
+  }
+  if (future.end.kind !== 'root') return missing('this is after the end')
+  return mirrored(history, 'home', elapsed - future.time.total, 'this is after the end')
+}
+
+const beforeBounce = (history: History, since: number): Found =>
+  mirrored(history, 'before', since, 'this is before the origin')
+
+/** The two arms that lie beyond a turning point: first the one that leads back towards today's size, then the one beyond it. */
+const swing = (history: History, phase: 'home' | 'before'): readonly [Arm, Arm] =>
+  phase === 'home' ? [history.future, history.home] : [history.past, history.before]
+
+/** `since` a turning point, away from today: back along the near arm, on along the far one; from a second turning point to and fro. */
+function mirrored(history: History, phase: 'home' | 'before', since: number, beyond: string): Found {
+  const [near, far] = swing(history, phase)
+  const whole = near.time.total + far.time.total
+  if (since > whole && far.end.kind !== 'root') return missing(beyond)
+  const swings = Number.isFinite(whole) ? Math.floor(since / whole) : 0
+  const away = swings % 2 === 0
+  const left = away ? since - swings * whole : (swings + 1) * whole - since
+  const place =
+    left <= near.time.total ? placeRemaining(near, 'time', left) : placeElapsed(far, 'time', left - near.time.total)
+  if (!place) return missing(OUT_OF_RANGE)
+  return { phase, place, sign: away ? -1 : 1, swings }
+}
+
+/** Time or conformal time between an event beyond a turning point and that point. */
+function sinceTurning(history: History, one: Event, phase: 'home' | 'before', clock: Clock): number {
+  const [near, far] = swing(history, phase)
+  const along = one.place.arm === near ? toEnd(one.place, clock) : near[clock].total + fromToday(one.place, clock)
+  if (one.swings === 0) return along
+  const whole = near[clock].total + far[clock].total
+  return one.swings % 2 === 0 ? one.swings * whole + along : (one.swings + 1) * whole - along
+}
+
+/** Time or conformal time from now to the event; past negative. */
+export function sinceNow(history: History, one: Event, clock: Clock): number {
+  switch (one.phase) {
+    case 'past':
+      return -fromToday(one.place, clock)
+    case 'future':
+      return fromToday(one.place, clock)
+    case 'home':
+      return history.future[clock].total + sinceTurning(history, one, 'home', clock)
+    case 'before':
+      return -history.past[clock].total - sinceTurning(history, one, 'before', clock)
+  }
+}
+
+/** Time or conformal time since the origin: the big bang, or the last bounce. Infinity where the past is infinite. */
+export function sinceOrigin(history: History, one: Event, clock: Clock): number {
+  const { past } = history
+  if (one.phase === 'past') return toEnd(one.place, clock)
+  if (one.phase === 'before') return -sinceTurning(history, one, 'before', clock)
+  return past[clock].total + sinceNow(history, one, clock)
+}
+
+/** Time or conformal time left to the end; Infinity where there is none. */
+export function untilEnd(history: History, one: Event, clock: Clock): number {
+  const { future, home } = history
+  if (future.end.kind === 'double') return Number.POSITIVE_INFINITY
+  if (future.end.kind === 'none') {
+    if (one.phase === 'future') return toEnd(one.place, clock)
+    return future[clock].total - sinceNow(history, one, clock)
+  }
+  if (home.end.kind !== 'none') return Number.POSITIVE_INFINITY
+  if (one.phase === 'home' && one.place.arm === home) return toEnd(one.place, clock)
+  return 2 * future[clock].total + home[clock].total - sinceNow(history, one, clock)
+}
+
+/** E² at an event. */
+export const expansionAtEvent = ({ place }: Event): number => expansionAtPlace(place)

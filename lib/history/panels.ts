@@ -1,0 +1,81 @@
+/**
+ * Adaptive Chebyshev panels for the two integrals of a zone. A panel stands when its last two coefficients are below 2e-14 of the
+ * largest; a rejected one shrinks, a good one lets the next grow. The factors are tuned for few evaluations.
+ */
+import { antiderivative, coefficientsInto, evaluate, NODE_COUNT, relativeTail, sumAtOne } from '../numerics/chebyshev'
+import type { Samples, Zone } from './zone'
+
+/** One integral over a panel. */
+export interface Stretch {
+  /** Antiderivative from the inner edge, as a Chebyshev series. */
+  readonly series: Float64Array
+  readonly total: number
+  /** Absolute error bound of the total: what the series leaves out, and rounding. */
+  readonly error: number
+}
+
+export interface Panel {
+  readonly zone: Zone
+  readonly from: number
+  readonly to: number
+  readonly time: Stretch
+  readonly conformal: Stretch
+}
+
+const RESOLVED = 2e-14
+/** A panel this narrow (in s) is taken as it is; its error bound says so. */
+const NARROWEST = 1e-9
+const GROWTH = 1.7
+/** Panels tried in one zone before the scenario is given up. */
+const MOST_PANELS = 4000
+
+const samples: Samples = { time: new Float64Array(NODE_COUNT), conformal: new Float64Array(NODE_COUNT) }
+const coefficients = new Float64Array(NODE_COUNT)
+
+/** Panels that cover [zone.from, zone.to], outwards; an infinite zone ends where `enough` says so after a panel. */
+export function panelsOf(zone: Zone, enough: (panel: Panel, edge: number) => boolean): readonly Panel[] {
+  const panels: Panel[] = []
+  let [from, width] = [zone.from, zone.width]
+  let tried = 0
+  while (from < zone.to) {
+    if (++tried > MOST_PANELS) throw new RangeError(`more than ${MOST_PANELS} panels would be needed`)
+    const to = from + width >= zone.to - width * 0.05 ? zone.to : from + width
+    const panel = panelOver(zone, from, to)
+    if (panel.worst > RESOLVED && to - from > NARROWEST) {
+      width = (to - from) * Math.max(0.35, Math.min(0.75, (RESOLVED / panel.worst) ** (1 / 15)))
+      continue
+    }
+    panels.push(panel)
+    if (enough(panel, to)) break
+    width = (to - from) * Math.min(GROWTH, Math.max(1, 0.95 * (RESOLVED / (panel.worst + 1e-17)) ** (1 / 15)))
+    from = to
+  }
+  return panels
+}
+
+function panelOver(zone: Zone, from: number, to: number): Panel & { readonly worst: number } {
+  const [centre, half] = [(from + to) / 2, (to - from) / 2]
+  zone.sampleInto(samples, centre, half)
+  const conditioning = Math.max(
+    zone.conditioning(from + half * 0.01),
+    zone.conditioning(centre),
+    zone.conditioning(to - half * 0.01),
+  )
+  const rounding = Number.EPSILON * (2 + conditioning)
+  const [time, timeTail] = stretchOf(samples.time, half, rounding)
+  const [conformal, conformalTail] = stretchOf(samples.conformal, half, rounding)
+  return { zone, from, to, time, conformal, worst: Math.max(timeTail, conformalTail) }
+}
+
+function stretchOf(values: Float64Array, half: number, rounding: number): readonly [Stretch, number] {
+  coefficientsInto(coefficients, values)
+  const tail = relativeTail(coefficients)
+  const left = Math.abs(coefficients[NODE_COUNT - 1]) + Math.abs(coefficients[NODE_COUNT - 2])
+  const series = antiderivative(coefficients, half)
+  const total = sumAtOne(series)
+  return [{ series, total, error: left * half + rounding * Math.abs(total) }, tail]
+}
+
+/** The integral from the panel's inner edge to s. */
+export const within = (panel: Panel, stretch: Stretch, s: number): number =>
+  evaluate(stretch.series, (2 * (s - panel.from)) / (panel.to - panel.from) - 1)

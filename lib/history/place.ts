@@ -1,0 +1,128 @@
+/** Places on an arm, and the integrals to and from them. */
+import { TODAY } from '../model'
+import { gaussLegendre } from '../numerics/gauss-legendre'
+import { brent } from '../numerics/roots'
+import { type Arm, type Clock, FARTHEST } from './arm'
+import { type Stretch, within } from './panels'
+import { elapsedIn, remainingIn } from './tail'
+
+/** A place on an arm: s is the variable of its panel's zone, or the distance into the tail beyond the last panel. */
+export interface Place {
+  readonly arm: Arm
+  readonly N: number
+  readonly panel: number
+  readonly s: number
+}
+
+/** On this part of the first panel an integral from today is taken directly, to keep its relative accuracy. */
+const NEAR_TODAY = 0.15
+
+/** The place at distance m = |ln a| from today, or null beyond a turning point. */
+export function placeAt(arm: Arm, m: number): Place | null {
+  if (arm.end.kind !== 'none' && m > Math.abs(arm.end.N)) return null
+  const panel = Math.min(indexBelow(arm.edges, m), arm.panels.length)
+  const N = arm.direction * m
+  if (panel === arm.panels.length) return { arm, N, panel, s: m - arm.edges[panel] }
+  return { arm, N, panel, s: arm.panels[panel].zone.variableAt(m) }
+}
+
+/** Index of the last entry of an ascending list that is not above the value. */
+function indexBelow(list: Float64Array, value: number): number {
+  let [low, high] = [0, list.length]
+  while (high - low > 1) {
+    const middle = (low + high) >> 1
+    if (list[middle] <= value) low = middle
+    else high = middle
+  }
+  return low
+}
+
+/** ∫ from today to the place. */
+export function fromToday(place: Place, clock: Clock): number {
+  const { arm, panel } = place
+  const m = Math.abs(place.N)
+  if (m < NEAR_TODAY * arm.edges[1]) return nearToday(arm, m, clock)
+  const inner = arm[clock].fromToday[panel]
+  if (panel === arm.panels.length) return inner + (arm.tail ? elapsedIn(arm.tail[clock], place.s) : 0)
+  return inner + within(arm.panels[panel], arm.panels[panel][clock], place.s)
+}
+
+/** The same by Gauss's rule on [0, m], where E² is formed from today's exact 1. */
+function nearToday(arm: Arm, m: number, clock: Clock): number {
+  const integrand = (s: number) => {
+    const N = arm.direction * s
+    return (clock === 'time' ? 1 : Math.exp(-N)) / Math.sqrt(arm.model.expansionFrom(TODAY, N))
+  }
+  return gaussLegendre(integrand, 0, m)
+}
+
+/** ∫ from the place to the end of the arm; Infinity where it diverges. */
+export function toEnd(place: Place, clock: Clock): number {
+  const { arm, panel } = place
+  if (panel === arm.panels.length) {
+    if (arm.tail) return remainingIn(arm.tail[clock], place.s)
+    return arm[clock].total === Number.POSITIVE_INFINITY ? Number.POSITIVE_INFINITY : 0
+  }
+  const stretch = arm.panels[panel][clock]
+  return arm[clock].toEnd[panel] + (stretch.total - within(arm.panels[panel], stretch, place.s))
+}
+
+/** Where the integral from today has this value; null beyond the end, and where a leaves the range of doubles. */
+export function placeElapsed(arm: Arm, clock: Clock, value: number): Place | null {
+  const sums = arm[clock]
+  if (!(value <= sums.total)) return null
+  const panel = indexBelow(sums.fromToday, value)
+  if (panel === arm.panels.length) {
+    return placeInTail(arm, (D) => elapsedBeyond(arm, clock, D) - (value - sums.fromToday[panel]))
+  }
+  if (panel === 0) return placeInPanel(arm, 0, (s) => fromToday(placeOf(arm, 0, s), clock) - value)
+  const stretch = arm.panels[panel][clock]
+  const rest = value - sums.fromToday[panel]
+  return placeInPanel(arm, panel, (s) => within(arm.panels[panel], stretch, s) - rest)
+}
+
+/** Where the integral to the end has this value, which keeps its relative accuracy near the end; null where there is none. */
+export function placeRemaining(arm: Arm, clock: Clock, value: number): Place | null {
+  const sums = arm[clock]
+  if (!(value >= 0 && value <= sums.total) || !Number.isFinite(sums.total)) return null
+  let panel = arm.panels.length - 1
+  if (value < sums.toEnd[panel])
+    return placeInTail(arm, (D) => (arm.tail ? value - remainingIn(arm.tail[clock], D) : 0))
+  while (panel > 0 && sums.toEnd[panel - 1] <= value) panel--
+  const stretch: Stretch = arm.panels[panel][clock]
+  const rest = value - sums.toEnd[panel]
+  return placeInPanel(arm, panel, (s) => rest - (stretch.total - within(arm.panels[panel], stretch, s)))
+}
+
+const elapsedBeyond = (arm: Arm, clock: Clock, D: number): number => (arm.tail ? elapsedIn(arm.tail[clock], D) : 0)
+
+const placeOf = (arm: Arm, panel: number, s: number): Place => ({
+  arm,
+  N: arm.direction * arm.panels[panel].zone.distanceAt(s),
+  panel,
+  s,
+})
+
+/** The root of an increasing function of s on a panel. */
+function placeInPanel(arm: Arm, panel: number, f: (s: number) => number): Place {
+  const { from, to } = arm.panels[panel]
+  if (f(from) >= 0) return placeOf(arm, panel, from)
+  if (f(to) <= 0) return placeOf(arm, panel, to)
+  return placeOf(arm, panel, brent(f, from, to))
+}
+
+/** Beyond the last panel; at a static state for ever where the arm leads there. */
+function placeInTail(arm: Arm, f: (D: number) => number): Place | null {
+  const panel = arm.panels.length
+  if (arm.end.kind === 'double') return placeOf(arm, panel - 1, arm.panels[panel - 1].to)
+  const farthest = FARTHEST - arm.edges[panel]
+  if (arm.tail === null || !(f(farthest) >= 0)) return null
+  const D = f(0) >= 0 ? 0 : brent(f, 0, farthest)
+  return { arm, N: arm.direction * (arm.edges[panel] + D), panel, s: D }
+}
+
+/** E² at a place. */
+export function expansionAtPlace({ arm, panel, s, N }: Place): number {
+  if (panel < arm.panels.length) return arm.panels[panel].zone.expansion(s)
+  return arm.tail ? arm.tail.expansion(s) : arm.model.expansion(N, Math.exp(-N))
+}

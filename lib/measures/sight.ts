@@ -1,0 +1,52 @@
+/** What a line of sight from here and now meets: comoving distance to an event, and horizons as seen from an event. */
+import { type Event, eventAtScale, isEvent, sinceNow, sinceOrigin, untilEnd } from '../history/event'
+import type { History } from '../history/history'
+import { type Place, placeElapsed } from '../history/place'
+import { antipode } from './distances'
+import { bounded, type Missing, missing, type Outcome } from './outcome'
+
+/** Comoving distance χ in c/H₀ to what is seen at the event, or why it is not on our past light path through the expansion. */
+export function comovingDistance(history: History, event: Event): number | Missing {
+  if (event.phase === 'future') return missing('it lies in the future: no line of sight leads there')
+  if (event.phase !== 'past') return missing('lines of sight are followed only through the expansion that holds today')
+  return -sinceNow(history, event, 'conformal')
+}
+
+/** Comoving distance that light has covered since the beginning, to the event; the contraction before a bounce counts. */
+export function particleHorizon(history: History, event: Event): number | Missing {
+  const before = beforeExpansion(history)
+  if (typeof before !== 'number') return before
+  const since = before + sinceOrigin(history, event, 'conformal')
+  return Number.isFinite(since) ? since : missing('light has had unlimited conformal time: the horizon is infinite')
+}
+
+/** Conformal time before the origin of the expansion: zero after a big bang. */
+function beforeExpansion(history: History): number | Missing {
+  const { kind } = history.origin
+  if (kind === 'oscillating' || kind === 'static') return missing('the past has no beginning: the horizon is infinite')
+  return kind === 'bounce' ? history.past.conformal.total + history.before.conformal.total : 0
+}
+
+/** Comoving distance that light sent at the event can still cover before the end. */
+export function eventHorizon(history: History, event: Event): number | Missing {
+  const left = untilEnd(history, event, 'conformal')
+  return Number.isFinite(left) ? left : missing('light has unlimited conformal time ahead: there is no event horizon')
+}
+
+/**
+ * Redshift of what lies at comoving distance χ and is seen today; missing beyond the origin of the expansion or the antipode.
+ * `uncertainty` is the error of χ.
+ */
+export function redshiftAt(history: History, chi: number, uncertainty: number): Outcome {
+  const { past } = history
+  if (chi > antipode(past.model.budget.curvature))
+    return missing('the distance reaches beyond the antipode of the closed space')
+  if (!(chi < past.conformal.total))
+    return missing('the distance reaches beyond all that light could cross since the origin of the expansion')
+  const place: Place | null = placeElapsed(past, 'conformal', chi)
+  if (place === null) return missing('the scale factor there is outside the range of floating-point numbers')
+  const z = Math.expm1(-place.N)
+  const found = eventAtScale(history, place.N, 'expanding')
+  const rate = isEvent(found) ? Math.sqrt(past.model.expansion(place.N, Math.exp(-place.N))) : 0
+  return bounded(z, (uncertainty + past.conformal.error) * rate)
+}

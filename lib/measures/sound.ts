@@ -1,0 +1,88 @@
+/**
+ * Recombination and the sound horizon, by fits for the standard early universe. Each is null outside the range of its fit.
+ */
+import { eventAtScale, isEvent } from '../history/event'
+import type { History } from '../history/history'
+import type { Model } from '../model'
+import { integrate } from '../numerics/integrate'
+import type { Scenario } from '../scenario/scenario'
+import { transverseDistance } from './distances'
+import { type Bounded, bounded, isMissing, type Missing, missing, type Outcome } from './outcome'
+import { comovingDistance } from './sight'
+
+/** z* of Hu & Sugiyama 1996 is 0.18% high of the values of Planck 2018 (arXiv:1807.06209, Table 2, five columns). */
+const CALIBRATION = 0.99818
+/** How far the fits stray from those five columns. */
+const RECOMBINATION_FIT_ERROR = 0.03 * 10
+const DRAG_FIT_ERROR = 0.05
+
+/** Why the fits do not hold, or null where they do: the ranges within which they were made or checked. */
+function outside({ radiation, baryons, h0, matter }: Scenario): Missing | null {
+  if (radiation.kind !== 'thermal') return missing('without a photon temperature there is no recombination to compute')
+  const density = matter * (h0 / 100) ** 2
+  const ranges: readonly (readonly [string, number, number, number])[] = [
+    ['the photon temperature', radiation.cmb, 2.7, 2.75],
+    ['the effective number of neutrinos', radiation.nu, 2, 4.5],
+    ['Ω_b h²', baryons, 0.015, 0.03],
+    ['Ω_m h²', density, 0.08, 0.25],
+  ]
+  const broken = ranges.find(([, value, low, high]) => !(value >= low && value <= high))
+  if (!broken) return null
+  const [name, value, low, high] = broken
+  return missing(`the fit holds for ${name} from ${low} to ${high}, and here it is ${Number(value.toPrecision(4))}`)
+}
+
+/** z of last scattering: Hu & Sugiyama 1996, ApJ 471, 542, eq. E-1, times 0.99818. */
+export function recombinationRedshift(scenario: Scenario): Outcome {
+  const refusal = outside(scenario)
+  if (refusal) return refusal
+  const [b, m] = [scenario.baryons, scenario.matter * (scenario.h0 / 100) ** 2]
+  const g1 = (0.0783 * b ** -0.238) / (1 + 39.5 * b ** 0.763)
+  const g2 = 0.56 / (1 + 21.1 * b ** 1.81)
+  return {
+    value: CALIBRATION * 1048 * (1 + 0.00124 * b ** -0.738) * (1 + g1 * m ** g2),
+    error: RECOMBINATION_FIT_ERROR,
+  }
+}
+
+/** z at which baryons leave the photons' drag: Aizpuru, Arjona & Nesseris 2021, Phys. Rev. D 104, 043521, eq. A2. */
+export function dragRedshift(scenario: Scenario): Outcome {
+  const refusal = outside(scenario)
+  if (refusal) return refusal
+  const [b, m] = [scenario.baryons, scenario.matter * (scenario.h0 / 100) ** 2]
+  const value = (1 + 428.169 * b ** 0.256459 * m ** 0.616388 + 925.56 * m ** 0.751615) * m ** -0.714129
+  return { value, error: DRAG_FIT_ERROR }
+}
+
+/** Comoving sound horizon at z in c/H₀: ∫ c_s da/(a² H) with c_s = c/√(3(1 + R)), R = 3ρ_b/4ρ_γ. */
+export function soundHorizon(history: History, scenario: Scenario, z: Bounded): Outcome {
+  const { model, end } = history.past
+  if (end.kind !== 'none') return missing('the expansion did not begin at a = 0')
+  const load = (0.75 * scenario.baryons) / ((scenario.h0 / 100) ** 2 * model.budget.photons)
+  const integrand = (a: number) => 1 / Math.sqrt(3 * (1 + load * a) * a ** 4 * model.expansion(Math.log(a), 1 / a))
+  const scale = 1 / (1 + z.value)
+  const { value, error } = integrate(integrand, 0, scale)
+  return bounded(value, error + (integrand(scale) * z.error) / (1 + z.value) ** 2)
+}
+
+/** θ* = r_s(z*)/D_M(z*), radian. */
+export function acousticAngle(history: History, scenario: Scenario): Outcome {
+  const z = recombinationRedshift(scenario)
+  if (isMissing(z)) return z
+  const sound = soundHorizon(history, scenario, z)
+  if (isMissing(sound)) return sound
+  const event = eventAtScale(history, -Math.log1p(z.value), 'expanding')
+  if (!isEvent(event)) return missing(event.because)
+  const chi = comovingDistance(history, event)
+  if (typeof chi !== 'number') return chi
+  const distance = transverseDistance(chi, history.past.model.budget.curvature)
+  const angle = sound.value / distance
+  return bounded(
+    angle,
+    sound.error / distance +
+      (angle * z.error) / (1 + z.value) / distance / hubbleAtRedshift(history.past.model, z.value),
+  )
+}
+
+const hubbleAtRedshift = (model: Model, z: number): number =>
+  Math.sqrt(model.expansion(-Math.log1p(z), 1 + z)) / (1 + z)

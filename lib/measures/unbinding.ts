@@ -1,0 +1,67 @@
+/**
+ * When a bound system is torn apart on the way to a rip: ä/a = (2π/P)² for a system of period P.
+ * An order of magnitude: a circular orbit loses its bound state already at ä/a = (27/256)(2π/P)².
+ * Compare Caldwell, Kamionkowski & Weinberg 2003, Phys. Rev. Lett. 91, 071301: t_rip − t ≈ P √(2|1+3w|)/(6π|1+w|).
+ */
+
+import { JULIAN_YEAR } from '../constants'
+import type { History } from '../history/history'
+import { fromToday, placeAt } from '../history/place'
+import type { Model } from '../model'
+import { brent } from '../numerics/roots'
+import { hubbleTimeGyr } from '../units'
+
+const YEAR = JULIAN_YEAR
+const MINUTE = 60
+
+/** Periods: common practice, no source; the atom's is the classical period of the electron of hydrogen. */
+export const UNBOUND_SYSTEMS = [
+  { kind: 'unbinding-cluster', label: 'clusters of galaxies come apart', period: 3.6e9 * YEAR },
+  { kind: 'unbinding-galaxy', label: 'large galaxies come apart', period: 225e6 * YEAR },
+  { kind: 'unbinding-planet', label: 'planets leave their stars', period: YEAR },
+  { kind: 'unbinding-earth', label: 'rocky planets break up', period: 90 * MINUTE },
+  { kind: 'unbinding-atom', label: 'atoms are torn apart', period: 1.5e-16 },
+] as const
+export type UnboundSystem = (typeof UNBOUND_SYSTEMS)[number]
+
+const DESTRUCTIVE: readonly History['end']['kind'][] = ['rip', 'little-rip', 'singular']
+
+/** Time from now in 1/H₀ and ln a; null when the universe does not end that way, or the system is never bound after today. */
+export function unbinding(history: History, h0: number, { period }: UnboundSystem): { time: number; N: number } | null {
+  if (!DESTRUCTIVE.includes(history.end.kind)) return null
+  const { future } = history
+  const periods = (hubbleTimeGyr(h0) * 1e9 * YEAR) / period
+  const threshold = 2 * Math.log(2 * Math.PI * periods)
+  const excess = (N: number) => logAcceleration(future.model, N) - threshold
+  if (excess(0) >= 0) return null
+  const far = firstAbove(excess)
+  if (far === null) return null
+  const N = brent(excess, 0, far)
+  const place = placeAt(future, N)
+  return place === null ? null : { time: fromToday(place, 'time'), N }
+}
+
+/** Doubling steps until the system is unbound; null where ln a grows beyond all numbers that the law can be asked for. */
+function firstAbove(excess: (N: number) => number): number | null {
+  for (let N = 1; N < 1e12; N *= 2) if (excess(N) > 0) return N
+  return null
+}
+
+/** ln of ä/a in H₀², −∞ where it is not positive; by logarithms, for E² leaves the doubles before an atom breaks. */
+function logAcceleration(model: Model, N: number): number {
+  const terms = model.components.map((one) => {
+    const [low, high] = one.exponentRange(N, N)
+    return { log: one.logSize(N), weight: Math.sign(one.omega) * (1 - (low + high) / 4) }
+  })
+  const largest = Math.max(...terms.map((one) => one.log))
+  if (largest === Number.POSITIVE_INFINITY) return largest
+  return (
+    largest +
+    Math.log(
+      Math.max(
+        0,
+        terms.reduce((sum, one) => sum + one.weight * Math.exp(one.log - largest), 0),
+      ),
+    )
+  )
+}

@@ -1,0 +1,209 @@
+/**
+ * E²(a) = H²/H₀² as a sum of densities, a function of N = ln a alone:
+ * Ω_r a⁻⁴ + Σ Ω_ν(a) + Ω_c a⁻³ + Ω_k a⁻² + Ω_DE f(a), with E(1) = 1.
+ * Every component is Ω e^(−∫n dN); its derivatives follow from n and n′ (Friedmann's equation and the conservation of energy).
+ */
+import type { Asymptote, Law } from './dark-energy/law'
+import { energyDerivatives, energyRatio, energyRatioChange, logSlope, logSlopeDerivative } from './neutrinos/energy'
+import { expm2 } from './numerics/exponential'
+import { gaussLegendre } from './numerics/gauss-legendre'
+import type { Budget } from './scenario/budget'
+import type { MassiveState } from './scenario/radiation'
+
+/** E² at an anchor N, where it is known without rounding: 1 today, 0 at a turning point. */
+export interface Anchor {
+  readonly N: number
+  readonly value: number
+}
+
+export interface Derivatives {
+  /** E². */
+  value: number
+  /** dE²/dN. */
+  first: number
+  /** d²E²/dN². */
+  second: number
+}
+
+/** One component of E², for arguments about signs and growth. */
+export interface Component {
+  readonly key: 'radiation' | 'matter' | 'neutrino' | 'curvature' | 'dark'
+  /** Ω today, with its sign. */
+  readonly omega: number
+  /** ln |Ω f| at N. */
+  logSize(N: number): number
+  /** Bounds of the exponent n on [from, to]. */
+  exponentRange(from: number, to: number): readonly [number, number]
+  /** (g(N + d) − g(N) − d g′(N))/g(N), without cancellation for small d. */
+  bend(N: number, d: number): number
+  readonly past: Asymptote
+  readonly future: Asymptote
+}
+
+/** Today: E² = 1 exactly. */
+export const TODAY: Anchor = { N: 0, value: 1 }
+
+export interface Model {
+  readonly budget: Budget
+  readonly law: Law
+  /** The components that are not zero. */
+  readonly components: readonly Component[]
+  /** E² at N, with a⁻¹ = e^(−N) passed in by callers who know it more exactly. */
+  expansion(N: number, inverseScale: number): number
+  /** E²(anchor.N + d), without cancellation for small d. */
+  expansionFrom(anchor: Anchor, d: number): number
+  /** E²(N + d) − E²(N) − d dE²/dN, without cancellation for small d: all of E² near a double root at N. */
+  bendFrom(N: number, d: number): number
+  /** Sum of the sizes of the terms that expansionFrom adds: its rounding error is a few eps times this. */
+  magnitudeFrom(anchor: Anchor, d: number): number
+  /** Sum of the sizes of the components at N: the rounding error of expansion is a few eps times this. */
+  magnitude(N: number): number
+  /** E² and its first two derivatives by N. */
+  derivatives(N: number): Derivatives
+}
+
+export function modelOf(budget: Budget, law: Law): Model {
+  const { curvature, dark, coldMatter } = budget
+  const radiation = budget.photons + budget.masslessNeutrinos
+  const states = budget.states
+
+  const expansion = (N: number, inverseScale: number): number => {
+    const x = inverseScale
+    let relativistic = radiation
+    for (const state of states) relativistic += state.masslessDensity * energyRatio(state.y / x)
+    const known = ((relativistic * x + coldMatter) * x + curvature) * x * x
+    return dark === 0 ? known : known + dark * Math.exp(law.logDensity(N))
+  }
+
+  const changes = (anchor: Anchor, d: number, add: (term: number) => void): void => {
+    const x = Math.exp(-anchor.N)
+    const e = Math.expm1(-d)
+    const squared = e * (e + 2)
+    const fourth = squared * (squared + 2)
+    add(curvature * x * x * squared)
+    add(coldMatter * x * x * x * e * (e * (e + 3) + 3))
+    add(radiation * x * x * x * x * fourth)
+    for (const state of states) {
+      const y = state.y / x
+      const today = state.masslessDensity * energyRatio(y) * x * x * x * x
+      add(today * (fourth + energyRatioChange(y, d) * (1 + fourth)))
+    }
+    if (dark !== 0) add(dark * Math.exp(law.logDensity(anchor.N)) * Math.expm1(law.logChange(anchor.N, d)))
+  }
+
+  const energy = new Float64Array(3)
+  const derivatives = (N: number): Derivatives => {
+    const x = Math.exp(-N)
+    const [k, m, r] = [curvature * x * x, coldMatter * x ** 3, radiation * x ** 4]
+    const out = { value: k + m + r, first: -2 * k - 3 * m - 4 * r, second: 4 * k + 9 * m + 16 * r }
+    const add = (density: number, n: number, slope: number) => {
+      out.value += density
+      out.first -= n * density
+      out.second += (n * n - slope) * density
+    }
+    for (const state of states) {
+      const y = state.y / x
+      energyDerivatives(y, energy)
+      add(state.masslessDensity * energy[0] * x ** 4, 4 - energy[1], -energy[2])
+    }
+    if (dark !== 0) add(dark * Math.exp(law.logDensity(N)), 3 * (1 + law.w(N)), 3 * law.wSlope(N))
+    return out
+  }
+
+  const components = componentsOf(budget, law)
+  return {
+    budget,
+    law,
+    components,
+    expansion,
+    bendFrom: (N, d) =>
+      components.reduce((sum, one) => sum + Math.sign(one.omega) * Math.exp(one.logSize(N)) * one.bend(N, d), 0),
+    expansionFrom(anchor, d) {
+      let sum = anchor.value
+      changes(anchor, d, (term) => {
+        sum += term
+      })
+      return sum
+    },
+    magnitudeFrom(anchor, d) {
+      let sum = Math.abs(anchor.value)
+      changes(anchor, d, (term) => {
+        sum += Math.abs(term)
+      })
+      return sum
+    },
+    magnitude: (N) => components.reduce((sum, one) => sum + Math.exp(one.logSize(N)), 0),
+    derivatives,
+  }
+}
+
+/** E² at N by the form that rounds least: from today's E² = 1 nearby, as the plain sum elsewhere. */
+export function expansionAt(model: Model, N: number, inverseScale: number): number {
+  return Math.abs(N) < 0.7 ? model.expansionFrom(TODAY, N) : model.expansion(N, inverseScale)
+}
+
+function componentsOf(budget: Budget, law: Law): readonly Component[] {
+  const all: Component[] = [
+    powerComponent('radiation', budget.photons + budget.masslessNeutrinos, 4),
+    powerComponent('matter', budget.coldMatter, 3),
+    powerComponent('curvature', budget.curvature, 2),
+    darkComponent(budget.dark, law),
+    ...budget.states.map(neutrinoComponent),
+  ]
+  return all.filter((one) => one.omega !== 0)
+}
+
+/** Bend of g from L = ln g(N + d)/g(N) and n′: expm2(L) + L + n d, where L + n d = −∫₀^d (d − t) n′(N + t) dt. */
+const bendOf = (logChange: number, d: number, exponentSlope: (t: number) => number): number =>
+  expm2(logChange) - gaussLegendre((t) => (d - t) * exponentSlope(t), 0, d)
+
+function powerComponent(key: Component['key'], omega: number, exponent: number): Component {
+  const logCoefficient = Math.log(Math.abs(omega))
+  const range = [exponent, exponent] as const
+  const asymptote = { kind: 'power', exponent, logCoefficient, settled: 0 } as const
+  return {
+    key,
+    omega,
+    logSize: (N) => logCoefficient - exponent * N,
+    exponentRange: () => range,
+    bend: (_, d) => expm2(-exponent * d),
+    past: asymptote,
+    future: asymptote,
+  }
+}
+
+function darkComponent(omega: number, law: Law): Component {
+  const log = Math.log(Math.abs(omega))
+  const scaled = (one: Asymptote): Asymptote =>
+    one.kind === 'power' ? { ...one, logCoefficient: one.logCoefficient + log } : one
+  return {
+    key: 'dark',
+    omega,
+    logSize: (N) => log + law.logDensity(N),
+    exponentRange: law.exponentRange,
+    bend: (N, d) => bendOf(law.logChange(N, d), d, (t) => 3 * law.wSlope(N + t)),
+    past: scaled(law.past),
+    future: scaled(law.future),
+  }
+}
+
+/** The exponent of a massive state falls from 4 to 3, since the logarithmic slope of its energy ratio rises from 0 to 1. */
+function neutrinoComponent(state: MassiveState): Component {
+  const y = (N: number) => state.y * Math.exp(N)
+  const logMassless = Math.log(state.masslessDensity)
+  // The energy ratio is 1 + 0.07 y² at small y and (y/3.15)(1 + 6.5/y²) at large y: settled where the corrections are below 1e-17.
+  return {
+    key: 'neutrino',
+    omega: state.density,
+    logSize: (N) => logMassless + Math.log(energyRatio(y(N))) - 4 * N,
+    bend: (N, d) => bendOf(Math.log1p(energyRatioChange(y(N), d)) - 4 * d, d, (t) => -logSlopeDerivative(y(N + t))),
+    exponentRange: (from, to) => [4 - logSlope(y(to)), 4 - logSlope(y(from))],
+    past: { kind: 'power', exponent: 4, logCoefficient: logMassless, settled: Math.log(1e-8 / state.y) },
+    future: {
+      kind: 'power',
+      exponent: 3,
+      logCoefficient: logMassless + Math.log(energyRatio(1e20) * 1e-20 * state.y),
+      settled: Math.log(1e9 / state.y),
+    },
+  }
+}

@@ -1,0 +1,70 @@
+/**
+ * Chebyshev interpolation on [−1, 1] at the sixteen first-kind nodes, and its exact antiderivative.
+ * Formulas: Trefethen, Approximation Theory and Approximation Practice, 2013, ch. 3 and 19; Clenshaw & Curtis 1960.
+ */
+
+export const NODE_COUNT = 16
+
+/** x_k = cos(π(k + ½)/16), descending from just below 1. */
+export const NODES: Float64Array = Float64Array.from({ length: NODE_COUNT }, (_, k) =>
+  Math.cos((Math.PI * (k + 0.5)) / NODE_COUNT),
+)
+
+/** Row j holds the weights that turn sixteen samples into the coefficient of T_j. */
+const TRANSFORM: Float64Array = Float64Array.from({ length: NODE_COUNT * NODE_COUNT }, (_, index) => {
+  const [j, k] = [Math.floor(index / NODE_COUNT), index % NODE_COUNT]
+  const weight = (j === 0 ? 1 : 2) / NODE_COUNT
+  return weight * Math.cos((Math.PI * j * (k + 0.5)) / NODE_COUNT)
+})
+
+/** Coefficients of the interpolant through the samples at NODES, written into `out` (16 numbers). */
+export function coefficientsInto(out: Float64Array, samples: Float64Array): void {
+  for (let j = 0, at = 0; j < NODE_COUNT; j++) {
+    let sum = 0
+    for (let k = 0; k < NODE_COUNT; k++, at++) sum += TRANSFORM[at] * samples[k]
+    out[j] = sum
+  }
+}
+
+/**
+ * Coefficients (17) of scale · ∫_{−1}^{x} of the series, from b_j = (c_{j−1} − c_{j+1})/2j.
+ * The value at x = −1 is zero by the choice of b_0.
+ */
+export function antiderivative(coefficients: Float64Array, scale: number): Float64Array {
+  const out = new Float64Array(NODE_COUNT + 1)
+  const c = (j: number) => (j < NODE_COUNT ? coefficients[j] : 0)
+  let constant = 0
+  for (let j = 1; j <= NODE_COUNT; j++) {
+    const before = j === 1 ? 2 * c(0) : c(j - 1)
+    out[j] = (scale * (before - c(j + 1))) / (2 * j)
+    constant += j % 2 === 1 ? out[j] : -out[j]
+  }
+  out[0] = constant
+  return out
+}
+
+/** Sum of the series at 1: the integral over the whole panel when the series is an antiderivative from −1. */
+export function sumAtOne(coefficients: Float64Array): number {
+  let sum = 0
+  for (let j = coefficients.length - 1; j >= 0; j--) sum += coefficients[j]
+  return sum
+}
+
+/** Value of Σ c_j T_j(x) by Clenshaw's recurrence (Clenshaw 1955, MTAC 9, 118). */
+export function evaluate(coefficients: Float64Array, x: number): number {
+  let [b1, b2] = [0, 0]
+  for (let j = coefficients.length - 1; j > 0; j--) {
+    const b = coefficients[j] + 2 * x * b1 - b2
+    b2 = b1
+    b1 = b
+  }
+  return coefficients[0] + x * b1 - b2
+}
+
+/** Size of the last two coefficients relative to the largest: the series is resolved when this is near eps. */
+export function relativeTail(coefficients: Float64Array): number {
+  let largest = 0
+  for (let j = 0; j < NODE_COUNT; j++) largest = Math.max(largest, Math.abs(coefficients[j]))
+  const last = Math.abs(coefficients[NODE_COUNT - 1]) + Math.abs(coefficients[NODE_COUNT - 2])
+  return largest === 0 ? 0 : last / largest
+}

@@ -1,0 +1,165 @@
+/** The timetable of a scenario: every moment kind once, with its label and where it lies in the history. */
+import { type Event, eventAtScale, isEvent, sinceNow } from '../history/event'
+import type { History } from '../history/history'
+import {
+  acceleration,
+  type Crossing,
+  crossings,
+  darkOverMatter,
+  matterOverRadiation,
+  nearestToNow,
+} from '../measures/epochs'
+import { isMissing, type Outcome } from '../measures/outcome'
+import { dragRedshift, recombinationRedshift } from '../measures/sound'
+import { UNBOUND_SYSTEMS, unbinding } from '../measures/unbinding'
+import { hubbleTimeGyr } from '../units'
+import type { Subject } from './quantity'
+
+export type MomentKind =
+  | 'origin'
+  | 'matter-radiation-equality'
+  | 'recombination'
+  | 'drag'
+  | 'acceleration-start'
+  | 'acceleration-end'
+  | 'matter-dark-equality'
+  | 'now'
+  | 'turnaround'
+  | 'unbinding-cluster'
+  | 'unbinding-galaxy'
+  | 'unbinding-planet'
+  | 'unbinding-earth'
+  | 'unbinding-atom'
+  | 'end'
+
+export interface Moment {
+  readonly kind: MomentKind
+  readonly label: string
+  /** Gyr from now; null when infinite. */
+  readonly time: number | null
+  readonly scale: number | null
+  readonly redshift: number | null
+}
+
+/** More changes of the sign of ä than this are told as an oscillation, not listed. */
+export const MOST_CHANGES = 20
+
+const ORIGINS: Readonly<Record<History['origin']['kind'], string>> = {
+  'big-bang': 'Big Bang',
+  bounce: 'bounce',
+  eternal: 'no beginning',
+  static: 'static state, infinitely long ago',
+  oscillating: 'last bounce',
+  singular: 'singular beginning',
+}
+
+const ENDS: Readonly<Record<History['end']['kind'], string>> = {
+  crunch: 'Big Crunch',
+  rip: 'Big Rip',
+  'little-rip': 'little rip, never complete',
+  exponential: 'expands for ever, exponentially',
+  accelerating: 'expands for ever, accelerating',
+  coasting: 'expands for ever, coasting',
+  decelerating: 'expands for ever, decelerating',
+  static: 'comes to rest',
+  singular: 'singular end',
+  oscillating: 'swings for ever',
+}
+
+/** All moments in time order; those at infinite times stand first and last. */
+export function momentsOf(subject: Subject): readonly Moment[] {
+  const { history, scenario } = subject
+  const gyr = hubbleTimeGyr(scenario.h0)
+  const at = (kind: MomentKind, label: string, event: Event): Moment => ({
+    kind,
+    label,
+    time: sinceNow(history, event, 'time') * gyr,
+    ...placeOf(event.place.N),
+  })
+  const crossing = (kind: MomentKind, label: string, one: Crossing | null): Moment[] =>
+    onExpansion(history, one?.N ?? null, (event) => at(kind, label, event))
+  const fit = (kind: MomentKind, label: string, z: Outcome): Moment[] =>
+    isMissing(z) ? [] : onExpansion(history, -Math.log1p(z.value), (event) => at(kind, label, event))
+  const between = [
+    ...equalities(subject, crossing),
+    ...fit('recombination', 'last scattering', recombinationRedshift(scenario)),
+    ...fit('drag', 'end of the drag epoch', dragRedshift(scenario)),
+    ...changes(history).flatMap((one) =>
+      crossing(
+        one.rising ? 'acceleration-start' : 'acceleration-end',
+        one.rising ? 'acceleration begins' : 'acceleration ends',
+        one,
+      ),
+    ),
+    { kind: 'now' as const, label: 'now', time: 0, scale: 1, redshift: 0 },
+    ...turnaround(subject, gyr),
+    ...unbindings(subject, gyr),
+  ]
+  between.sort((one, other) => (one.time ?? 0) - (other.time ?? 0))
+  return [first(subject, gyr), ...between, last(subject, gyr)]
+}
+
+const placeOf = (N: number) => {
+  const scale = Math.exp(N)
+  const redshift = Math.expm1(-N)
+  return { scale: Number.isFinite(scale) ? scale : null, redshift: Number.isFinite(redshift) ? redshift : null }
+}
+
+function onExpansion(history: History, N: number | null, make: (event: Event) => Moment): Moment[] {
+  if (N === null) return []
+  const event = eventAtScale(history, N, 'expanding')
+  return isEvent(event) ? [make(event)] : []
+}
+
+function equalities(
+  { history, budget }: Subject,
+  crossing: (kind: MomentKind, label: string, one: Crossing | null) => Moment[],
+): Moment[] {
+  const radiation = budget.photons + budget.masslessNeutrinos + budget.massiveNeutrinos
+  const early = budget.coldMatter > 0 && radiation > 0 ? nearestToNow(crossings(history, matterOverRadiation)) : null
+  const late = budget.coldMatter > 0 && budget.dark > 0 ? nearestToNow(crossings(history, darkOverMatter)) : null
+  return [
+    ...crossing('matter-radiation-equality', 'matter equals radiation', early),
+    ...crossing('matter-dark-equality', 'matter equals dark energy', late),
+  ]
+}
+
+/** Changes of the sign of ä on the expansion that holds today. */
+function changes(history: History): readonly Crossing[] {
+  const all = crossings(history, acceleration)
+  return all.length > MOST_CHANGES ? [] : all
+}
+
+function turnaround({ history }: Subject, gyr: number): Moment[] {
+  const { turnaround } = history.end
+  if (!turnaround) return []
+  return [
+    {
+      kind: 'turnaround',
+      label: 'expansion stops',
+      time: turnaround.time * gyr,
+      ...placeOf(Math.log(turnaround.scale)),
+    },
+  ]
+}
+
+function unbindings({ history, scenario }: Subject, gyr: number): Moment[] {
+  return UNBOUND_SYSTEMS.flatMap((system) => {
+    const found = unbinding(history, scenario.h0, system)
+    return found === null
+      ? []
+      : [{ kind: system.kind, label: system.label, time: found.time * gyr, ...placeOf(found.N) }]
+  })
+}
+
+function first({ history }: Subject, gyr: number): Moment {
+  const { kind, time, scale } = history.origin
+  const redshift = scale > 0 ? 1 / scale - 1 : null
+  return { kind: 'origin', label: ORIGINS[kind], time: time === null ? null : time * gyr, scale, redshift }
+}
+
+function last({ history }: Subject, gyr: number): Moment {
+  const { kind, time, scale } = history.end
+  const redshift = scale === null ? -1 : scale > 0 ? 1 / scale - 1 : null
+  return { kind: 'end', label: ENDS[kind], time: time === null ? null : time * gyr, scale, redshift }
+}
