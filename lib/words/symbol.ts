@@ -5,7 +5,7 @@ export interface Run {
   readonly text: string
 }
 
-const SCRIPT = /([_^])(?:\{([^{}]*)\}|([−+-]?[\p{L}\p{N}]+))/gu
+const SCRIPT = /([_^])(?:\{([^{}]*)\}|([−+-]?[\p{L}\p{N}*∞]+))/gu
 
 /** `Ω_m h^2` as runs of plain text, subscripts and superscripts. */
 export function runsOf(markup: string): readonly Run[] {

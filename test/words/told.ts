@@ -17,7 +17,7 @@ export const SCENARIO: Scenario = {
   name: null,
 }
 
-type Told = Omit<Solution, 'history' | 'densities' | 'notices'>
+type Told = Omit<Solution, 'history' | 'budget' | 'notices'>
 
 interface Sketch {
   readonly scenario?: Partial<Scenario>

@@ -1,0 +1,23 @@
+import { Footer } from './ui/footer'
+
+export const metadata = { title: 'No such page' }
+
+export default function NotFound() {
+  return (
+    <div className="page">
+      <header className="masthead">
+        <a className="brand" href="/">
+          Longhence
+        </a>
+      </header>
+      <main className="lone">
+        <h1>There is no such page</h1>
+        <p>
+          Scenarios live in the address of the <a href="/">explorer</a>, behind <code>?s=</code>. Perhaps a part of the
+          link was lost on the way.
+        </p>
+      </main>
+      <Footer data={null} />
+    </div>
+  )
+}

@@ -1,0 +1,48 @@
+import type { Explorer } from '../../lib/answers/explorer'
+import type { MeasureWords } from '../../lib/words/measures'
+import { Symbols } from './symbol'
+
+export function Measures({ view }: { readonly view: Explorer }) {
+  return (
+    <section aria-labelledby="measures">
+      <h2 id="measures" className="heading">
+        Measures today of {view.scenarios[view.place.focus]?.name}
+      </h2>
+      <table className="measures">
+        <thead className="spoken">
+          <tr>
+            <th scope="col">Measure</th>
+            <th scope="col">Symbol</th>
+            <th scope="col">Value</th>
+          </tr>
+        </thead>
+        <tbody>
+          {view.measures.map((measure) => (
+            <Row key={measure.key} measure={measure} />
+          ))}
+        </tbody>
+      </table>
+    </section>
+  )
+}
+
+function Row({ measure }: { readonly measure: MeasureWords }) {
+  const { key, label, symbol, meaning, value, unit, because } = measure
+  return (
+    <tr data-measure={key}>
+      <th scope="row" title={meaning}>
+        {label}
+      </th>
+      <td className="symbol">
+        <Symbols markup={symbol} />
+      </td>
+      {value === null ? (
+        <td className="none">{because}</td>
+      ) : (
+        <td className="value">
+          <b>{value}</b> {unit}
+        </td>
+      )}
+    </tr>
+  )
+}

@@ -1,0 +1,31 @@
+import type { Explorer } from '../../lib/answers/explorer'
+
+export function Moments({ view }: { readonly view: Explorer }) {
+  const scenario = view.scenarios[view.place.focus]
+  return (
+    <section aria-labelledby="moments">
+      <h2 id="moments" className="heading">
+        Moments of {scenario?.name}
+      </h2>
+      <table className="moments">
+        <thead className="spoken">
+          <tr>
+            <th scope="col">From now</th>
+            <th scope="col">Moment</th>
+            <th scope="col">Redshift or scale factor</th>
+          </tr>
+        </thead>
+        <tbody>
+          {view.moments.map(({ kind, label, when, where }) => (
+            <tr key={`${kind}${when}${label}`} className={kind === 'now' ? 'present' : undefined}>
+              <td className="when">{when}</td>
+              <th scope="row">{label}</th>
+              <td className="where">{where}</td>
+            </tr>
+          ))}
+        </tbody>
+      </table>
+      <p className="because">{scenario?.because}</p>
+    </section>
+  )
+}

@@ -1,0 +1,26 @@
+import type { Refusal as Refused } from '../../lib/answers/explorer'
+
+/** Names what is wrong with an address and says what is shown in its place. */
+export function Refusal({ refusal }: { readonly refusal: Refused }) {
+  const { problems, changes, link } = refusal
+  return (
+    <aside className="refusal" role="alert">
+      <h2>This link cannot be read as written</h2>
+      <ul>
+        {problems.map(({ parameter, scenario, value, allowed, message }) => (
+          <li key={`${scenario}${parameter}${message}`}>
+            <b>{parameter}</b> {value && <q>{value}</q>} {scenario !== null && `in scenario ${scenario + 1}`}: {message}{' '}
+            Allowed: {allowed}.
+          </li>
+        ))}
+      </ul>
+      {link === null ? (
+        <p>Nothing of it could be kept; the examples are shown instead.</p>
+      ) : (
+        <p>
+          Shown is the nearest good reading: {changes.join(' ')} <a href={link}>Open that reading</a>
+        </p>
+      )}
+    </aside>
+  )
+}

@@ -1,0 +1,39 @@
+import type { ScenarioView } from '../../lib/answers/explorer'
+import { Key } from './key'
+
+interface Props {
+  readonly scenarios: readonly ScenarioView[]
+  readonly focus: number
+}
+
+export function Verdicts({ scenarios, focus }: Props) {
+  return (
+    <section className="verdicts" aria-label="Verdict">
+      {scenarios.map((scenario) => (
+        <VerdictOf key={scenario.slot} scenario={scenario} current={scenario.slot === focus} />
+      ))}
+    </section>
+  )
+}
+
+function VerdictOf({ scenario, current }: { readonly scenario: ScenarioView; readonly current: boolean }) {
+  const { slot, name, verdict, proven, notices } = scenario
+  return (
+    <article className={current ? 'verdict current' : 'verdict'}>
+      <Key slot={slot} />
+      <h2>
+        <a className={`ink-${slot}`} href={scenario.link} rel="nofollow" aria-current={current ? 'true' : undefined}>
+          {name}
+        </a>
+      </h2>
+      <p className="said">{verdict.sentences.join(' ')}</p>
+      {verdict.aside && <p className="aside">{verdict.aside}</p>}
+      {!proven && <p className="aside">The ending is found by sampling, not proven.</p>}
+      {notices.map((notice) => (
+        <p key={notice.message} className="aside notice">
+          {notice.message} {notice.link && <a href={notice.link}>Correct it</a>}
+        </p>
+      ))}
+    </article>
+  )
+}

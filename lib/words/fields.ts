@@ -1,0 +1,165 @@
+/** The form of a scenario: what a person may type, in groups, and what closes the budget. */
+import { FAMILIES, familyOf } from '../dark-energy'
+import type { Family } from '../dark-energy/law'
+import type { Parameter, ParameterValue } from '../parameter'
+import type { Budget } from '../scenario/budget'
+import { isUsed } from '../scenario/family-keys'
+import * as own from '../scenario/parameters'
+import type { Scenario } from '../scenario/scenario'
+import { significant } from './number'
+
+export interface Choice {
+  readonly value: string
+  readonly label: string
+}
+
+interface Described {
+  readonly name: string
+  readonly symbol: string
+  readonly label: string
+  readonly meaning: string
+  readonly value: string
+}
+
+export type Field =
+  | (Described & { readonly kind: 'number' | 'list'; readonly unit: string; readonly allowed: string })
+  | (Described & { readonly kind: 'choice'; readonly choices: readonly Choice[] })
+  | (Described & { readonly kind: 'text'; readonly most: number })
+  /** Follows from the others: shown, and carried in full so that another choice of what closes changes nothing. */
+  | (Described & { readonly kind: 'closing'; readonly shown: string })
+
+export interface FieldGroup {
+  readonly key: string
+  readonly title: string
+  /** Seldom changed: folded until asked for. */
+  readonly folded: boolean
+  readonly fields: readonly Field[]
+  /** Beside the group: the law in a formula, and how far it can be trusted. */
+  readonly family: Pick<Family, 'formula' | 'meaning' | 'caution' | 'source'> | null
+}
+
+export interface Form {
+  readonly groups: readonly FieldGroup[]
+  /** What the choices of the form would need that are not made now. */
+  readonly hidden: readonly { readonly name: string; readonly value: string }[]
+}
+
+/** Names of the form's own choices, which are not keys of the scenario code. */
+export const CLOSES = 'closes'
+export const LIGHT = 'light'
+
+const CLOSING: readonly Choice[] = [
+  { value: 'dark', label: 'dark energy' },
+  { value: 'curvature', label: 'curvature' },
+]
+const LIGHTS: readonly Choice[] = [
+  { value: 'thermal', label: 'photons and neutrinos' },
+  { value: 'given', label: 'given by its density' },
+  { value: 'none', label: 'none' },
+]
+
+export function formOf(scenario: Scenario, budget: Budget): Form {
+  const family = familyOf(scenario.eos)
+  const groups = [
+    group('densities', 'Densities today', densityFields(scenario, budget)),
+    group('rate', 'Expansion rate', [numberField(own.H0, scenario.h0)]),
+    { ...group('dark', 'Dark energy', darkFields(scenario, family)), family },
+    { ...group('light', 'Radiation, neutrinos, baryons', lightFields(scenario)), folded: true },
+    group('name', 'Name', [nameField(scenario)]),
+  ]
+  return { groups, hidden: hiddenFields(scenario, budget) }
+}
+
+function group(key: string, title: string, fields: readonly Field[]): FieldGroup {
+  return { key, title, fields, folded: false, family: null }
+}
+
+function densityFields({ matter, closure }: Scenario, budget: Budget): Field[] {
+  const dark = closure.given === 'dark' ? numberField(own.DARK, closure.value) : closingField(own.DARK, budget.dark)
+  const curvature =
+    closure.given === 'curvature'
+      ? numberField(own.CURVATURE, closure.value)
+      : closingField(own.CURVATURE, budget.curvature)
+  const closes = closure.given === 'dark' ? 'curvature' : 'dark'
+  return [
+    numberField(own.MATTER, matter),
+    dark,
+    curvature,
+    choiceField(CLOSES, 'closes the budget', 'What is left to make the densities add up to 1.', closes, CLOSING),
+  ]
+}
+
+function darkFields(scenario: Scenario, family: Family): Field[] {
+  const choices = FAMILIES.map(({ key, label }) => ({ value: key, label }))
+  const used = family.parameters.filter((one) => isUsed(one, scenario.law) === true)
+  return [
+    choiceField(own.EOS.key, own.EOS.label, own.EOS.meaning, scenario.eos, choices),
+    ...used.map((one) => familyField(one, scenario.law[one.key])),
+    ...(family.parameters.length === 0
+      ? []
+      : [choiceField(own.BEYOND.key, own.BEYOND.label, own.BEYOND.meaning, scenario.beyond, own.BEYOND.choices)]),
+  ]
+}
+
+function familyField(parameter: Parameter, value: ParameterValue | undefined): Field {
+  if (parameter.kind !== 'choice') return numberField(parameter, value ?? '')
+  return choiceField(parameter.key, parameter.label, parameter.meaning, String(value), parameter.choices)
+}
+
+function lightFields({ radiation, baryons }: Scenario): Field[] {
+  const meaning = 'What of light and neutrinos there is today.'
+  return [
+    choiceField(LIGHT, 'radiation', meaning, radiation.kind, LIGHTS),
+    ...radiationFields(radiation),
+    numberField(own.BARYONS, baryons),
+  ]
+}
+
+function radiationFields(radiation: Scenario['radiation']): Field[] {
+  if (radiation.kind === 'none') return []
+  if (radiation.kind === 'given') return [numberField(own.RADIATION, radiation.density)]
+  const masses = radiation.masses.length > 0 ? radiation.masses : [0]
+  return [numberField(own.CMB, radiation.cmb), numberField(own.NU, radiation.nu), numberField(own.MASSES, masses)]
+}
+
+function nameField({ name }: Scenario): Field {
+  const { key, symbol, label, meaning, most } = own.AS
+  return { kind: 'text', name: key, symbol, label, meaning, value: name ?? '', most }
+}
+
+type Numeric = Pick<
+  Exclude<Parameter, { kind: 'choice' }>,
+  'key' | 'symbol' | 'label' | 'meaning' | 'unit' | 'min' | 'max'
+> & {
+  readonly kind: 'number' | 'list'
+}
+
+function numberField(parameter: Numeric, value: ParameterValue): Field {
+  const { kind, key, symbol, label, meaning, unit, min, max } = parameter
+  const text = typeof value === 'object' ? value.join('; ') : String(value)
+  return {
+    kind,
+    name: key,
+    symbol,
+    label,
+    meaning,
+    unit,
+    value: text,
+    allowed: `${min} to ${max}`.replaceAll('-', '−'),
+  }
+}
+
+function closingField(parameter: Numeric, value: number): Field {
+  const { key, symbol, label, meaning } = parameter
+  return { kind: 'closing', name: key, symbol, label, meaning, value: String(value), shown: significant(value, 4) }
+}
+
+function choiceField(name: string, label: string, meaning: string, value: string, choices: readonly Choice[]): Field {
+  return { kind: 'choice', name, symbol: '', label, meaning, value, choices }
+}
+
+function hiddenFields({ radiation }: Scenario, budget: Budget): Form['hidden'] {
+  if (radiation.kind === 'given') return []
+  const massless = budget.photons + budget.masslessNeutrinos
+  return [{ name: own.RADIATION.key, value: String(Number(massless.toPrecision(4))) }]
+}
