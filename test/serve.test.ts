@@ -70,7 +70,7 @@ describe('what is refused', () => {
     ['bytes beyond ASCII', 400, 'GET /é'],
     ['a broken query under /api', 400, 'GET /api/at?s=as:100%'],
     ['a target over the limit', 414, `GET /?s=${'a'.repeat(LONGEST_TARGET)}`],
-    ['headers over the limit', 431, `GET /?s=${'a'.repeat(2 * LONGEST_TARGET)}`],
+    ['headers over the limit', 431, `GET /?s=${'a'.repeat(3 * LONGEST_TARGET)}`],
   ]
 
   test.each(refusals)('%s: %i', async (_what, status, line) => {
@@ -92,6 +92,15 @@ describe('what is refused', () => {
     expect(await raw(port, 'GET / HTTP/1.1\r\nConnection: close\r\n\r\n')).toMatchObject({ status: 400 })
     const expecting = 'GET / HTTP/1.1\r\nHost: x\r\nExpect: tea\r\nConnection: close\r\n\r\n'
     expect(await raw(port, expecting)).toMatchObject({ status: 417 })
+  })
+
+  test("a router's state that Next cannot read", async () => {
+    const { port } = await start((_incoming, response) => response.end())
+    const status = async (state: string) =>
+      (await get(port, '/', { RSC: '1', 'Next-Router-State-Tree': state })).response.statusCode
+    expect(await status('%zz')).toBe(400)
+    expect(await status('[1]')).toBe(400)
+    expect(await status(encodeURIComponent('["",{"children":["__PAGE__",{}]}]'))).toBe(200)
   })
 
   test('a broken query names the parameter and its scenario', async () => {

@@ -3,6 +3,7 @@ import { createServer } from 'node:http'
 import { compress } from './compress.mjs'
 import { setSecurityHeaders } from './headers.mjs'
 import { sendProblem, writeProblem } from './problem.mjs'
+import { LONGEST_STATE, routerStateProblem } from './router-state.mjs'
 import { LONGEST_TARGET, methodProblem, OPTIONS_HEADERS, targetProblem } from './target.mjs'
 
 /** @typedef {(request: import('node:http').IncomingMessage, response: import('node:http').ServerResponse) => unknown} Handler */
@@ -15,8 +16,8 @@ const LIMITS = {
   connectionsCheckingInterval: 5_000,
   // Refused below, with a body that says why.
   requireHostHeader: false,
-  // The longest target that we read, and as much again as Node's default for the other headers.
-  maxHeaderSize: LONGEST_TARGET + 16 * 1024,
+  // The two that may be long, and Node's default for all the others.
+  maxHeaderSize: LONGEST_TARGET + LONGEST_STATE + 16 * 1024,
 }
 /** A connection on which nothing has moved for this long is dropped; no answer takes as long to begin. */
 const SILENCE = 120_000
@@ -29,7 +30,11 @@ export function createFront(handler, limits = {}) {
   const server = createServer({ ...LIMITS, ...limits }, (request, response) => {
     const target = request.url ?? ''
     setSecurityHeaders(response, target)
-    const problem = methodProblem(request.method) ?? hostProblem(request) ?? targetProblem(target)
+    const problem =
+      methodProblem(request.method) ??
+      hostProblem(request) ??
+      targetProblem(target) ??
+      routerStateProblem(request.headers)
     if (problem) sendProblem(response, problem, target.split('?')[0].slice(0, 200))
     else if (request.method === 'OPTIONS') response.writeHead(204, OPTIONS_HEADERS).end()
     else compress(request, response, () => answer(handler, request, response))
