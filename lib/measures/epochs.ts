@@ -16,37 +16,34 @@ const STEPS = 8
 /** How far beyond the last panel, in ln a, to look. */
 const BEYOND = 60
 
-/** All sign changes on the expanding branch, in order of a. A pair nearer together than an eighth of a panel can be missed. */
+/**
+ * All sign changes on the expanding branch, in order of a. Between two looks, an eighth of a panel apart, a pair can be missed.
+ */
 export function crossings(history: History, f: (model: Model, N: number) => number): readonly Crossing[] {
-  const past = changesAlong(history.past, f).reverse()
-  return [...past, ...changesAlong(history.future, f)]
-}
-
-function changesAlong(arm: Arm, f: (model: Model, N: number) => number): Crossing[] {
-  const value = (N: number) => f(arm.model, N)
+  const looks = [...looksAlong(history.past).reverse(), { arm: history.past, N: 0 }, ...looksAlong(history.future)]
   const found: Crossing[] = []
-  let before = 0
-  let was = value(0)
-  for (const m of stations(arm)) {
-    const N = arm.direction * m
-    const is = value(N)
-    if (was !== 0 && is !== 0 && Number.isFinite(is) && was > 0 !== is > 0) {
-      const at = brent(value, before, N)
-      found.push({ N: at, rising: arm.direction > 0 ? is > 0 : was > 0 })
+  let [before, was] = [0, 0]
+  let zero: number | null = null
+  for (const { arm, N } of looks) {
+    const is = f(arm.model, N)
+    if (is === 0) zero = N
+    if (is === 0 || !Number.isFinite(is)) continue
+    if (was !== 0 && was > 0 !== is > 0) {
+      found.push({ N: zero ?? brent((x) => f(arm.model, x), before, N), rising: is > 0 })
     }
-    if (is !== 0) [before, was] = [N, is]
+    ;[before, was, zero] = [N, is, null]
   }
   return found
 }
 
-/** Distances from today at which to look, outwards. */
-function stations(arm: Arm): readonly number[] {
-  const list: number[] = []
-  for (const { zone, from, to } of arm.panels) {
-    for (let k = 1; k <= STEPS; k++) list.push(zone.distanceAt(from + ((to - from) * k) / STEPS))
-  }
-  if (arm.tail) for (let k = 1; k <= BEYOND; k++) list.push(arm.edges[arm.edges.length - 1] + k)
-  return list
+/** Where to look, outwards from today. */
+function looksAlong(arm: Arm): { arm: Arm; N: number }[] {
+  const distances = arm.panels.flatMap(({ zone, from, to }) =>
+    Array.from({ length: STEPS }, (_, k) => zone.distanceAt(from + ((to - from) * (k + 1)) / STEPS)),
+  )
+  const last = arm.edges[arm.edges.length - 1]
+  const beyond = arm.tail ? Array.from({ length: BEYOND }, (_, k) => last + k + 1) : []
+  return [...distances, ...beyond].map((m) => ({ arm, N: arm.direction * m }))
 }
 
 /** ä/a in H₀², from the components with their own exponents: Σ Ω_i g_i (1 − n_i/2). */
