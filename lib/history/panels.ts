@@ -41,18 +41,19 @@ export function panelsOf(zone: Zone, enough: (panel: Panel, edge: number) => boo
     if (++tried > MOST_PANELS) throw new RangeError(`more than ${MOST_PANELS} panels would be needed`)
     const to = from + width >= zone.to - width * 0.05 ? zone.to : from + width
     const panel = panelOver(zone, from, to)
-    if (panel.worst > RESOLVED && to - from > NARROWEST) {
-      width = (to - from) * Math.max(0.35, Math.min(0.75, (RESOLVED / panel.worst) ** (1 / 15)))
+    if (panel.worst > 1 && to - from > NARROWEST) {
+      width = (to - from) * Math.max(0.35, Math.min(0.75, panel.worst ** (-1 / 15)))
       continue
     }
     panels.push(panel)
     if (enough(panel, to)) break
-    width = (to - from) * Math.min(GROWTH, Math.max(1, 0.95 * (RESOLVED / (panel.worst + 1e-17)) ** (1 / 15)))
+    width = (to - from) * Math.min(GROWTH, Math.max(1, 0.95 * (panel.worst + 1e-3) ** (-1 / 15)))
     from = to
   }
   return panels
 }
 
+/** `worst` is the size of the last two coefficients over what is asked. */
 function panelOver(zone: Zone, from: number, to: number): Panel & { readonly worst: number } {
   const [centre, half] = [(from + to) / 2, (to - from) / 2]
   zone.sampleInto(samples, centre, half)
@@ -64,7 +65,9 @@ function panelOver(zone: Zone, from: number, to: number): Panel & { readonly wor
   const rounding = Number.EPSILON * (2 + conditioning)
   const [time, timeTail] = stretchOf(samples.time, half, rounding)
   const [conformal, conformalTail] = stretchOf(samples.conformal, half, rounding)
-  return { zone, from, to, time, conformal, worst: Math.max(timeTail, conformalTail) }
+  // Where E² is small beside its terms, rounding shows in the last coefficients and no narrower panel would lower it.
+  const resolved = Math.max(RESOLVED, rounding)
+  return { zone, from, to, time, conformal, worst: Math.max(timeTail, conformalTail) / resolved }
 }
 
 function stretchOf(values: Float64Array, half: number, rounding: number): readonly [Stretch, number] {

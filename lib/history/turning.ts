@@ -80,10 +80,20 @@ function settle(model: Model, start: number, direction: Direction): Search {
     const { first } = model.derivatives(N)
     const magnitude = model.magnitude(N)
     // A slope that rounding could have made: the root is double as far as doubles can tell.
-    if (direction * first > -1e-7 * magnitude) return { kind: 'double', N }
+    if (direction * first > -1e-7 * magnitude) return { kind: 'double', N: atRest(model, N) }
     const change = expansionAt(model, N, Math.exp(-N)) / first
     N -= change
     if (Math.abs(change) <= 2 * Number.EPSILON * Math.abs(N)) break
   }
   return { kind: 'root', N, certain: true }
+}
+
+/** The minimum of E² near N: where its slope vanishes. */
+function atRest(model: Model, start: number): number {
+  let N = start
+  for (let step = 0; step < 8; step++) {
+    const { first, second } = model.derivatives(N)
+    N -= first / second
+  }
+  return N
 }
