@@ -29,7 +29,7 @@ const SILENCE = 120_000
 export function createFront(handler, limits = {}) {
   const server = createServer({ ...LIMITS, ...limits }, (request, response) => {
     const target = request.url ?? ''
-    setSecurityHeaders(response, target)
+    setSecurityHeaders(request, response)
     const problem =
       methodProblem(request.method) ??
       hostProblem(request) ??

@@ -1,0 +1,52 @@
+/** The content policy: it stops what was not meant, and nothing that was. */
+import { expect, type Page, test } from '@playwright/test'
+
+/** Collects whatever the browser refuses or reports as an error from here on. */
+async function complaints(page: Page): Promise<string[]> {
+  const heard: string[] = []
+  page.on('console', (message) => message.type() === 'error' && heard.push(message.text()))
+  page.on('pageerror', (error) => heard.push(error.message))
+  await page.exposeFunction('refused', (what: string) => heard.push(what))
+  await page.addInitScript(() => {
+    document.addEventListener('securitypolicyviolation', ({ violatedDirective, blockedURI }) =>
+      (globalThis as unknown as { refused(what: string): void }).refused(`${violatedDirective} ${blockedURI}`),
+    )
+  })
+  return heard
+}
+
+for (const path of ['/', '/?s=matter:0.3,eos:constant,w:-1.2', '/?s=matter:none', '/nothing-here']) {
+  test(`${path} runs its own scripts and is refused nothing`, async ({ page }) => {
+    const heard = await complaints(page)
+    await page.goto(path, { waitUntil: 'networkidle' })
+    expect(await page.locator('h1').count()).toBe(1)
+    // The framework's scripts have run.
+    expect(await page.evaluate(() => 'next' in window)).toBe(true)
+    const expected = path === '/nothing-here' ? [expect.stringContaining('404')] : []
+    expect(heard).toEqual(expected)
+  })
+}
+
+test('a script without the nonce does not run', async ({ page }) => {
+  const heard = await complaints(page)
+  await page.goto('/', { waitUntil: 'networkidle' })
+  await page.evaluate(() => document.body.insertAdjacentHTML('beforeend', '<img src="x:" onerror="window.ran = true">'))
+  await expect.poll(() => heard.join()).toContain('script-src')
+  expect(await page.evaluate(() => 'ran' in window)).toBe(false)
+})
+
+test('the nonce is new in each answer, and the one that a visitor sends is not taken', async ({ request }) => {
+  const sent = "script-src 'nonce-mine'"
+  const seen = new Set<string>()
+  for (let i = 0; i < 3; i++) {
+    const response = await request.get('/', { headers: { 'Content-Security-Policy': sent } })
+    const [, nonce] = /'nonce-([^']+)'/.exec(response.headers()['content-security-policy']) ?? []
+    const html = await response.text()
+    const scripts = html.match(/<script[^>]*>/g) ?? []
+    expect(scripts.length).toBeGreaterThan(0)
+    expect(scripts.filter((tag) => !tag.includes(`nonce="${nonce}"`))).toEqual([])
+    seen.add(nonce)
+  }
+  expect(seen.size).toBe(3)
+  expect(seen).not.toContain('mine')
+})
