@@ -50,6 +50,10 @@ export interface Model {
   readonly components: readonly Component[]
   /** E² at N, with a⁻¹ = e^(−N) passed in by callers who know it more exactly. */
   expansion(N: number, inverseScale: number): number
+  /** Do today's densities cancel to 1 from a sum of sizes above 4? */
+  readonly cancels: boolean
+  /** Is any component negative? */
+  readonly signed: boolean
   /** E²(anchor.N + d), without cancellation for small d. */
   expansionFrom(anchor: Anchor, d: number): number
   /** E²(N + d) − E²(N) − d dE²/dN, without cancellation for small d: all of E² near a double root at N. */
@@ -72,23 +76,29 @@ export function modelOf(budget: Budget, law: Law): Model {
     let relativistic = radiation
     for (const state of states) relativistic += state.masslessDensity * energyRatio(state.y / x)
     const known = ((relativistic * x + coldMatter) * x + curvature) * x * x
-    return dark === 0 ? known : known + dark * Math.exp(law.logDensity(N))
+    if (dark === 0) return known
+    const log = law.logDensity(N)
+    return known + (log === 0 ? dark : dark * Math.exp(log))
   }
 
-  const changes = (anchor: Anchor, d: number, add: (term: number) => void): void => {
+  /** E²(anchor.N + d) − E²(anchor.N), and the sum of the sizes of its terms in `size`. */
+  let size = 0
+  const changeFrom = (anchor: Anchor, d: number): number => {
     const x = Math.exp(-anchor.N)
     const e = Math.expm1(-d)
     const squared = e * (e + 2)
     const fourth = squared * (squared + 2)
-    add(curvature * x * x * squared)
-    add(coldMatter * x * x * x * e * (e * (e + 3) + 3))
-    add(radiation * x * x * x * x * fourth)
+    const k = curvature * x * x * squared
+    const m = coldMatter * x * x * x * e * (e * (e + 3) + 3)
+    let relativistic = radiation * fourth
     for (const state of states) {
       const y = state.y / x
-      const today = state.masslessDensity * energyRatio(y) * x * x * x * x
-      add(today * (fourth + energyRatioChange(y, d) * (1 + fourth)))
+      relativistic += state.masslessDensity * energyRatio(y) * (fourth + energyRatioChange(y, d) * (1 + fourth))
     }
-    if (dark !== 0) add(dark * Math.exp(law.logDensity(anchor.N)) * Math.expm1(law.logChange(anchor.N, d)))
+    const r = relativistic * x * x * x * x
+    const de = dark === 0 ? 0 : dark * Math.exp(law.logDensity(anchor.N)) * Math.expm1(law.logChange(anchor.N, d))
+    size = Math.abs(k) + Math.abs(m) + Math.abs(r) + Math.abs(de)
+    return k + m + r + de
   }
 
   const energy = new Float64Array(3)
@@ -115,31 +125,24 @@ export function modelOf(budget: Budget, law: Law): Model {
     budget,
     law,
     components,
+    cancels: components.reduce((sum, one) => sum + Math.abs(one.omega), 0) > 4,
+    signed: components.some((one) => one.omega < 0),
     expansion,
     bendFrom: (N, d) =>
       components.reduce((sum, one) => sum + Math.sign(one.omega) * Math.exp(one.logSize(N)) * one.bend(N, d), 0),
-    expansionFrom(anchor, d) {
-      let sum = anchor.value
-      changes(anchor, d, (term) => {
-        sum += term
-      })
-      return sum
-    },
+    expansionFrom: (anchor, d) => anchor.value + changeFrom(anchor, d),
     magnitudeFrom(anchor, d) {
-      let sum = Math.abs(anchor.value)
-      changes(anchor, d, (term) => {
-        sum += Math.abs(term)
-      })
-      return sum
+      changeFrom(anchor, d)
+      return Math.abs(anchor.value) + size
     },
     magnitude: (N) => components.reduce((sum, one) => sum + Math.exp(one.logSize(N)), 0),
     derivatives,
   }
 }
 
-/** E² at N by the form that rounds least: from today's E² = 1 nearby, as the plain sum elsewhere. */
+/** E² at N by the form that rounds least: from today's E² = 1 nearby where large densities cancel, as the plain sum elsewhere. */
 export function expansionAt(model: Model, N: number, inverseScale: number): number {
-  return Math.abs(N) < 0.7 ? model.expansionFrom(TODAY, N) : model.expansion(N, inverseScale)
+  return model.cancels && Math.abs(N) < 0.7 ? model.expansionFrom(TODAY, N) : model.expansion(N, inverseScale)
 }
 
 function componentsOf(budget: Budget, law: Law): readonly Component[] {

@@ -3,12 +3,13 @@
  * scenario → budget and model (E² of a) → history (t and η as functions of a, origin and end) → measures and moments.
  */
 import { eventAtTime, isEvent } from './history/event'
-import { type History, historyOf } from './history/history'
+import type { History } from './history/history'
 import type { EndKind, OriginKind } from './history/outcome'
 import { isMissing, type Outcome } from './measures/outcome'
 import { MEASURES, type MeasureKey } from './quantities/measures'
 import { type Moment, momentsOf } from './quantities/moments'
-import { type Budget, budgetOf } from './scenario/budget'
+import { subjectOf } from './quantities/quantity'
+import type { Budget } from './scenario/budget'
 import { type Notice, noticesOf } from './scenario/notices'
 import type { Scenario } from './scenario/scenario'
 import { writeScenario } from './scenario/write'
@@ -50,9 +51,8 @@ export interface Solution {
 }
 
 export function solve(scenario: Scenario): Solution {
-  const budget = budgetOf(scenario)
-  const history = historyOf(scenario, budget)
-  const subject = { scenario, budget, history }
+  const subject = subjectOf(scenario)
+  const { budget, history } = subject
   const code = writeScenario(scenario)
   const measures = MEASURES.map((one) => [one.key, answer(one.value(subject), one.unit)] as const)
   return {

@@ -36,7 +36,9 @@ export function plainZone(model: Model, direction: Direction, from: number, to: 
     variableAt: (m) => m,
     expansion: (s) => expansionAt(model, direction * s, Math.exp(-direction * s)),
     conditioning: (s) =>
-      1 + model.magnitude(direction * s) / expansionAt(model, direction * s, Math.exp(-direction * s)),
+      model.signed
+        ? 1 + model.magnitude(direction * s) / expansionAt(model, direction * s, Math.exp(-direction * s))
+        : 2,
     sampleInto(out, centre, half) {
       const central = Math.exp(-direction * centre)
       for (let k = 0; k < NODE_COUNT; k++) {

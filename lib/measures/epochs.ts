@@ -1,5 +1,4 @@
 /** Moments when one thing overtakes another: sign changes of a function of ln a along the expansion that holds today. */
-
 import type { Arm } from '../history/arm'
 import type { History } from '../history/history'
 import type { Component, Model } from '../model'
@@ -11,25 +10,58 @@ export interface Crossing {
   readonly rising: boolean
 }
 
-/** Steps per panel of the integrals, whose widths follow the bends of E². */
-const STEPS = 8
+/** Looks per panel of the integrals, whose widths follow the bends of E². */
+const LOOKS = 4
 /** How far beyond the last panel, in ln a, to look. */
 const BEYOND = 60
+/** Farthest ln a at which densities are still doubles. */
+const FARTHEST = 700
+
+/** A function of ln a along the expansion, with bounds of its slope, so that no sign change can hide. */
+export interface Comparison {
+  value(model: Model, N: number): number
+  slopeRange(model: Model, from: number, to: number): readonly [number, number]
+}
+
+/** All sign changes of a comparison, in order of a. */
+export function overtakings(history: History, comparison: Comparison): readonly Crossing[] {
+  const [low, high] = [reachOf(history.past), reachOf(history.future)]
+  return [
+    ...changesBetween(comparison, history.past.model, low, 0),
+    ...changesBetween(comparison, history.future.model, 0, high),
+  ]
+}
+
+const reachOf = (arm: Arm): number => (arm.end.kind === 'none' ? arm.direction * FARTHEST : arm.end.N)
+
+/** Intervals where the slope keeps its sign hold one change at most; where |value| outweighs the slope there is none; others are halved. */
+function changesBetween(comparison: Comparison, model: Model, from: number, to: number): Crossing[] {
+  const value = (N: number) => comparison.value(model, N)
+  const [low, high] = comparison.slopeRange(model, from, to)
+  const middle = (from + to) / 2
+  if (low < 0 && high > 0 && to - from > 1e-6) {
+    if (Math.abs(value(middle)) > (Math.max(-low, high) * (to - from)) / 2) return []
+    return [...changesBetween(comparison, model, from, middle), ...changesBetween(comparison, model, middle, to)]
+  }
+  const [left, right] = [value(from), value(to)]
+  if (right === 0 || left > 0 === right > 0) return []
+  return [{ N: left === 0 ? from : brent(value, from, to), rising: left < right }]
+}
 
 /**
- * All sign changes on the expanding branch, in order of a. Between two looks, an eighth of a panel apart, a pair can be missed.
+ * Changes of the sign of ä, in order of a, from looks at every quarter of a panel: a pair nearer together can be missed.
  */
-export function crossings(history: History, f: (model: Model, N: number) => number): readonly Crossing[] {
+export function accelerationChanges(history: History): readonly Crossing[] {
   const looks = [...looksAlong(history.past).reverse(), { arm: history.past, N: 0 }, ...looksAlong(history.future)]
   const found: Crossing[] = []
   let [before, was] = [0, 0]
   let zero: number | null = null
   for (const { arm, N } of looks) {
-    const is = f(arm.model, N)
+    const is = acceleration(arm.model, N)
     if (is === 0) zero = N
     if (is === 0 || !Number.isFinite(is)) continue
     if (was !== 0 && was > 0 !== is > 0) {
-      found.push({ N: zero ?? brent((x) => f(arm.model, x), before, N), rising: is > 0 })
+      found.push({ N: zero ?? brent((x) => acceleration(arm.model, x), before, N), rising: is > 0 })
     }
     ;[before, was, zero] = [N, is, null]
   }
@@ -38,36 +70,63 @@ export function crossings(history: History, f: (model: Model, N: number) => numb
 
 /** Where to look, outwards from today. */
 function looksAlong(arm: Arm): { arm: Arm; N: number }[] {
-  const distances = arm.panels.flatMap(({ zone, from, to }) =>
-    Array.from({ length: STEPS }, (_, k) => zone.distanceAt(from + ((to - from) * (k + 1)) / STEPS)),
-  )
+  const looks: { arm: Arm; N: number }[] = []
+  for (const { zone, from, to } of arm.panels) {
+    for (let k = 1; k <= LOOKS; k++)
+      looks.push({ arm, N: arm.direction * zone.distanceAt(from + ((to - from) * k) / LOOKS) })
+  }
   const last = arm.edges[arm.edges.length - 1]
-  const beyond = arm.tail ? Array.from({ length: BEYOND }, (_, k) => last + k + 1) : []
-  return [...distances, ...beyond].map((m) => ({ arm, N: arm.direction * m }))
+  if (arm.tail) for (let k = 1; k <= BEYOND; k++) looks.push({ arm, N: arm.direction * (last + k) })
+  return looks
 }
 
-/** ä/a in H₀², from the components with their own exponents: Σ Ω_i g_i (1 − n_i/2). */
-export const acceleration = (model: Model, N: number): number => {
+/** ä/a in H₀². */
+const acceleration = (model: Model, N: number): number => {
   const { value, first } = model.derivatives(N)
   return value + 0.5 * first
 }
 
-const logOf = (model: Model, keys: readonly Component['key'][], N: number): number =>
-  Math.log(
-    model.components.filter((one) => keys.includes(one.key)).reduce((sum, one) => sum + Math.exp(one.logSize(N)), 0),
-  )
+const MATTER: readonly Component['key'][] = ['matter']
+const RADIATION: readonly Component['key'][] = ['radiation', 'neutrino']
+const DARK: readonly Component['key'][] = ['dark']
 
-/** ln of cold matter over photons and all neutrinos. */
-export const matterOverRadiation = (model: Model, N: number): number =>
-  logOf(model, ['matter'], N) - logOf(model, ['radiation', 'neutrino'], N)
+/** ln of the summed sizes of some components. */
+function logOf(model: Model, keys: readonly Component['key'][], N: number): number {
+  let [largest, sum] = [Number.NEGATIVE_INFINITY, 0]
+  for (const one of model.components) {
+    if (!keys.includes(one.key)) continue
+    const log = one.logSize(N)
+    sum = log > largest ? sum * Math.exp(largest - log) + 1 : sum + Math.exp(log - largest)
+    largest = Math.max(largest, log)
+  }
+  return largest + Math.log(sum)
+}
 
-/** ln of dark energy over cold matter. */
-export const darkOverMatter = (model: Model, N: number): number =>
-  model.components.reduce(
-    (sum, one) => sum + (one.key === 'dark' ? one.logSize(N) : one.key === 'matter' ? -one.logSize(N) : 0),
-    0,
-  )
+/** Bounds of the exponents of some components over an interval. */
+function exponentsOf(
+  model: Model,
+  keys: readonly Component['key'][],
+  from: number,
+  to: number,
+): readonly [number, number] {
+  const ranges = model.components.filter((one) => keys.includes(one.key)).map((one) => one.exponentRange(from, to))
+  return [Math.min(...ranges.map(([low]) => low)), Math.max(...ranges.map(([, high]) => high))]
+}
+
+const ratio = (over: readonly Component['key'][], under: readonly Component['key'][]): Comparison => ({
+  value: (model, N) => logOf(model, over, N) - logOf(model, under, N),
+  slopeRange: (model, from, to) => {
+    const [above, below] = [exponentsOf(model, over, from, to), exponentsOf(model, under, from, to)]
+    return [below[0] - above[1], below[1] - above[0]]
+  },
+})
+
+/** ln of cold matter over photons and all neutrinos; both must be there. */
+export const matterOverRadiation = ratio(MATTER, RADIATION)
+
+/** ln of dark energy over cold matter; both must be there. */
+export const darkOverMatter = ratio(DARK, MATTER)
 
 /** Of several crossings the last up to now, else the first ahead; null when there is none. */
 export const nearestToNow = (list: readonly Crossing[]): Crossing | null =>
-  [...list].reverse().find((one) => one.N <= 0) ?? list.find((one) => one.N > 0) ?? null
+  list.findLast((one) => one.N <= 0) ?? list.find((one) => one.N > 0) ?? null

@@ -41,12 +41,13 @@ export function redshiftAt(history: History, chi: number, uncertainty: number): 
   const { past } = history
   if (chi > antipode(past.model.budget.curvature))
     return missing('the distance reaches beyond the antipode of the closed space')
-  if (!(chi < past.conformal.total))
+  const error = uncertainty + past.conformal.error
+  if (!(chi + error < past.conformal.total))
     return missing('the distance reaches beyond all that light could cross since the origin of the expansion')
   const place: Place | null = placeElapsed(past, 'conformal', chi)
   if (place === null) return missing('the scale factor there is outside the range of floating-point numbers')
   const z = Math.expm1(-place.N)
   const found = eventAtScale(history, place.N, 'expanding')
   const rate = isEvent(found) ? Math.sqrt(past.model.expansion(place.N, Math.exp(-place.N))) : 0
-  return bounded(z, (uncertainty + past.conformal.error) * rate)
+  return bounded(z, error * rate)
 }

@@ -107,26 +107,20 @@ export function energyDerivatives(y: number, out: Float64Array): void {
 }
 
 /** Positive points and weights of the Gauss-Legendre rules of 4 and 10 points on (−1, 1) (Abramowitz & Stegun 1964, table 25.4). */
-const SHORT = {
+const RULE = {
   points: [0.33998104358485626, 0.8611363115940526],
   weights: [0.6521451548625461, 0.34785484513745385],
 }
-const LONG = {
-  points: [0.14887433898163122, 0.4333953941292472, 0.6794095682990244, 0.8650633666889845, 0.9739065285171717],
-  weights: [0.29552422471475287, 0.26926671930999635, 0.21908636251598204, 0.1494513491505806, 0.06667134430868814],
-}
-
-/** Up to these |d| the rules err by less than 1e-16 of the integral: the nearest singularities of s lie π/2 off in Im ln y. */
+/** Up to this |d| the rule errs by less than 1e-16 of the integral: the nearest singularities of s lie π/2 off in Im ln y. */
 const SHORT_REACH = 0.05
-const LONG_REACH = 1
 
 /** ∫ s d ln y from ln y to ln y + d: ln of R(y e^d)/R(y). */
-function slopeIntegral(y: number, d: number, rule: typeof LONG): number {
+function slopeIntegral(y: number, d: number): number {
   const half = d / 2
   let sum = 0
-  for (let i = 0; i < rule.points.length; i++) {
-    const step = half * rule.points[i]
-    sum += rule.weights[i] * (logSlope(y * Math.exp(half + step)) + logSlope(y * Math.exp(half - step)))
+  for (let i = 0; i < RULE.points.length; i++) {
+    const step = half * RULE.points[i]
+    sum += RULE.weights[i] * (logSlope(y * Math.exp(half + step)) + logSlope(y * Math.exp(half - step)))
   }
   return half * sum
 }
@@ -137,8 +131,7 @@ function slopeIntegral(y: number, d: number, rule: typeof LONG): number {
  */
 export function energyRatioChange(y: number, d: number): number {
   const reach = Math.abs(d)
-  if (reach <= SHORT_REACH) return Math.expm1(slopeIntegral(y, d, SHORT))
-  if (reach <= LONG_REACH) return Math.expm1(slopeIntegral(y, d, LONG))
+  if (reach <= SHORT_REACH) return Math.expm1(slopeIntegral(y, d))
   const before = energyExcess(y)
   return (energyExcess(y * Math.exp(d)) - before) / (1 + before)
 }

@@ -10,18 +10,29 @@ export const NODES: Float64Array = Float64Array.from({ length: NODE_COUNT }, (_,
   Math.cos((Math.PI * (k + 0.5)) / NODE_COUNT),
 )
 
-/** Row j holds the weights that turn sixteen samples into the coefficient of T_j. */
-const TRANSFORM: Float64Array = Float64Array.from({ length: NODE_COUNT * NODE_COUNT }, (_, index) => {
-  const [j, k] = [Math.floor(index / NODE_COUNT), index % NODE_COUNT]
+const HALF = NODE_COUNT / 2
+
+/** Row j holds the weights that turn eight sums (even j) or differences (odd j) of mirrored samples into the coefficient of T_j. */
+const TRANSFORM: Float64Array = Float64Array.from({ length: NODE_COUNT * HALF }, (_, index) => {
+  const [j, k] = [Math.floor(index / HALF), index % HALF]
   const weight = (j === 0 ? 1 : 2) / NODE_COUNT
   return weight * Math.cos((Math.PI * j * (k + 0.5)) / NODE_COUNT)
 })
 
+const sums = new Float64Array(HALF)
+const differences = new Float64Array(HALF)
+
 /** Coefficients of the interpolant through the samples at NODES, written into `out` (16 numbers). */
 export function coefficientsInto(out: Float64Array, samples: Float64Array): void {
+  for (let k = 0; k < HALF; k++) {
+    const [right, left] = [samples[k], samples[NODE_COUNT - 1 - k]]
+    sums[k] = right + left
+    differences[k] = right - left
+  }
   for (let j = 0, at = 0; j < NODE_COUNT; j++) {
+    const folded = j % 2 === 0 ? sums : differences
     let sum = 0
-    for (let k = 0; k < NODE_COUNT; k++, at++) sum += TRANSFORM[at] * samples[k]
+    for (let k = 0; k < HALF; k++, at++) sum += TRANSFORM[at] * folded[k]
     out[j] = sum
   }
 }
@@ -32,11 +43,11 @@ export function coefficientsInto(out: Float64Array, samples: Float64Array): void
  */
 export function antiderivative(coefficients: Float64Array, scale: number): Float64Array {
   const out = new Float64Array(NODE_COUNT + 1)
-  const c = (j: number) => (j < NODE_COUNT ? coefficients[j] : 0)
   let constant = 0
   for (let j = 1; j <= NODE_COUNT; j++) {
-    const before = j === 1 ? 2 * c(0) : c(j - 1)
-    out[j] = (scale * (before - c(j + 1))) / (2 * j)
+    const before = j === 1 ? 2 * coefficients[0] : coefficients[j - 1]
+    const after = j + 1 < NODE_COUNT ? coefficients[j + 1] : 0
+    out[j] = (scale * (before - after)) / (2 * j)
     constant += j % 2 === 1 ? out[j] : -out[j]
   }
   out[0] = constant

@@ -2,14 +2,7 @@
 import { type Event, eventAtScale, isEvent } from '../history/event'
 import { leadingExponent } from '../history/tail'
 import { curvatureRadius } from '../measures/distances'
-import {
-  acceleration,
-  type Crossing,
-  crossings,
-  darkOverMatter,
-  matterOverRadiation,
-  nearestToNow,
-} from '../measures/epochs'
+import { type Crossing, nearestToNow } from '../measures/epochs'
 import { type Bounded, bounded, finiteOr, isMissing, type Missing, missing, type Outcome } from '../measures/outcome'
 import { deceleration, jerk } from '../measures/rates'
 import { eventHorizon, particleHorizon, redshiftAt } from '../measures/sight'
@@ -208,9 +201,9 @@ const ALL: readonly MeasureQuantity[] = [
       'Redshift of the last change from deceleration to acceleration, or of the first one ahead (then negative).',
     formula: 'ä(z) = 0',
     source: FRIEDMANN,
-    value: ({ history }) =>
+    value: ({ epochs }) =>
       redshiftOf(
-        nearestToNow(crossings(history, acceleration).filter((one) => one.rising)),
+        nearestToNow(epochs.acceleration.filter((one) => one.rising)),
         'the expansion never changes from deceleration to acceleration',
       ),
   },
@@ -223,12 +216,12 @@ const ALL: readonly MeasureQuantity[] = [
     meaning: 'Redshift at which cold matter equals photons and all neutrinos.',
     formula: 'ρ_c = ρ_γ + ρ_ν',
     source: FRIEDMANN,
-    value: ({ history, budget }) => {
+    value: ({ epochs, budget }) => {
       const none = 'cold matter and radiation are never equal on the expansion that holds today'
       if (!(budget.coldMatter > 0 && budget.photons + budget.masslessNeutrinos + budget.massiveNeutrinos > 0)) {
         return missing('there is no cold matter or no radiation in this scenario')
       }
-      return redshiftOf(nearestToNow(crossings(history, matterOverRadiation)), none)
+      return redshiftOf(nearestToNow(epochs.matterRadiation), none)
     },
   },
   {
@@ -240,11 +233,11 @@ const ALL: readonly MeasureQuantity[] = [
     meaning: 'Redshift at which cold matter equals dark energy.',
     formula: 'ρ_c = ρ_DE',
     source: FRIEDMANN,
-    value: ({ history, budget }) => {
+    value: ({ epochs, budget }) => {
       if (!(budget.dark > 0 && budget.coldMatter > 0))
         return missing('there is no cold matter or no positive dark energy')
       const none = 'cold matter and dark energy are never equal on the expansion that holds today'
-      return redshiftOf(nearestToNow(crossings(history, darkOverMatter)), none)
+      return redshiftOf(nearestToNow(epochs.matterDark), none)
     },
   },
   {

@@ -1,14 +1,7 @@
 /** The timetable of a scenario: every moment kind once, with its label and where it lies in the history. */
 import { type Event, eventAtScale, isEvent, sinceNow } from '../history/event'
 import type { History } from '../history/history'
-import {
-  acceleration,
-  type Crossing,
-  crossings,
-  darkOverMatter,
-  matterOverRadiation,
-  nearestToNow,
-} from '../measures/epochs'
+import { type Crossing, nearestToNow } from '../measures/epochs'
 import { isMissing, type Outcome } from '../measures/outcome'
 import { dragRedshift, recombinationRedshift } from '../measures/sound'
 import { UNBOUND_SYSTEMS, unbinding } from '../measures/unbinding'
@@ -84,7 +77,7 @@ export function momentsOf(subject: Subject): readonly Moment[] {
     ...equalities(subject, crossing),
     ...fit('recombination', 'last scattering', recombinationRedshift(scenario)),
     ...fit('drag', 'end of the drag epoch', dragRedshift(scenario)),
-    ...changes(history).flatMap((one) =>
+    ...changes(subject).flatMap((one) =>
       crossing(
         one.rising ? 'acceleration-start' : 'acceleration-end',
         one.rising ? 'acceleration begins' : 'acceleration ends',
@@ -112,23 +105,18 @@ function onExpansion(history: History, N: number | null, make: (event: Event) =>
 }
 
 function equalities(
-  { history, budget }: Subject,
+  { epochs }: Subject,
   crossing: (kind: MomentKind, label: string, one: Crossing | null) => Moment[],
 ): Moment[] {
-  const radiation = budget.photons + budget.masslessNeutrinos + budget.massiveNeutrinos
-  const early = budget.coldMatter > 0 && radiation > 0 ? nearestToNow(crossings(history, matterOverRadiation)) : null
-  const late = budget.coldMatter > 0 && budget.dark > 0 ? nearestToNow(crossings(history, darkOverMatter)) : null
   return [
-    ...crossing('matter-radiation-equality', 'matter equals radiation', early),
-    ...crossing('matter-dark-equality', 'matter equals dark energy', late),
+    ...crossing('matter-radiation-equality', 'matter equals radiation', nearestToNow(epochs.matterRadiation)),
+    ...crossing('matter-dark-equality', 'matter equals dark energy', nearestToNow(epochs.matterDark)),
   ]
 }
 
 /** Changes of the sign of ä on the expansion that holds today. */
-function changes(history: History): readonly Crossing[] {
-  const all = crossings(history, acceleration)
-  return all.length > MOST_CHANGES ? [] : all
-}
+const changes = ({ epochs }: Subject): readonly Crossing[] =>
+  epochs.acceleration.length > MOST_CHANGES ? [] : epochs.acceleration
 
 function turnaround({ history }: Subject, gyr: number): Moment[] {
   const { turnaround } = history.end

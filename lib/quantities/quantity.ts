@@ -1,6 +1,13 @@
 /** What every output of Longhence says about itself. */
-import type { History } from '../history/history'
-import type { Budget } from '../scenario/budget'
+import { type History, historyOf } from '../history/history'
+import {
+  accelerationChanges,
+  type Crossing,
+  darkOverMatter,
+  matterOverRadiation,
+  overtakings,
+} from '../measures/epochs'
+import { type Budget, budgetOf } from '../scenario/budget'
 import type { Scenario } from '../scenario/scenario'
 
 export interface Quantity {
@@ -24,6 +31,30 @@ export interface Subject {
   readonly scenario: Scenario
   readonly budget: Budget
   readonly history: History
+  readonly epochs: Epochs
+}
+
+/** When one thing overtakes another, in order of a; empty where one of the two is missing. */
+export interface Epochs {
+  readonly acceleration: readonly Crossing[]
+  readonly matterRadiation: readonly Crossing[]
+  readonly matterDark: readonly Crossing[]
+}
+
+export function subjectOf(scenario: Scenario): Subject {
+  const budget = budgetOf(scenario)
+  const history = historyOf(scenario, budget)
+  return { scenario, budget, history, epochs: epochsOf(history, budget) }
+}
+
+function epochsOf(history: History, budget: Budget): Epochs {
+  const cold = budget.coldMatter > 0
+  const radiation = budget.photons + budget.masslessNeutrinos + budget.massiveNeutrinos
+  return {
+    acceleration: accelerationChanges(history),
+    matterRadiation: cold && radiation > 0 ? overtakings(history, matterOverRadiation) : [],
+    matterDark: cold && budget.dark > 0 ? overtakings(history, darkOverMatter) : [],
+  }
 }
 
 export const fixed = (count: number) => ({ kind: 'fixed', count }) as const

@@ -14,7 +14,7 @@ import {
 } from '../../lib/history/event'
 import { type History, historyOf } from '../../lib/history/history'
 import { antipode, comovingVolume, transverseDistance } from '../../lib/measures/distances'
-import { acceleration, crossings, darkOverMatter, matterOverRadiation } from '../../lib/measures/epochs'
+import { accelerationChanges, darkOverMatter, matterOverRadiation, overtakings } from '../../lib/measures/epochs'
 import { isMissing } from '../../lib/measures/outcome'
 import { deceleration, hubbleRate, jerk } from '../../lib/measures/rates'
 import { comovingDistance, eventHorizon, particleHorizon, redshiftAt } from '../../lib/measures/sight'
@@ -74,11 +74,11 @@ const PLAIN: Readonly<Record<string, (one: Case) => number>> = {
   t_crunch_from_now: ({ history }) => history.end.time ?? Number.NaN,
   t_rip_from_now: ({ history }) => history.end.time ?? Number.NaN,
   lifetime: ({ history }) => history.past.time.total + (history.end.time ?? Number.NaN),
-  a_eq_mr: ({ history }) => Math.exp(crossings(history, matterOverRadiation)[0].N),
-  'a_eq_mde[0]': ({ history }) => Math.exp(crossings(history, darkOverMatter)[0].N),
-  'a_eq_mde[1]': ({ history }) => Math.exp(crossings(history, darkOverMatter)[1].N),
-  'a_acc[0]': ({ history }) => Math.exp(crossings(history, acceleration)[0].N),
-  'a_acc[1]': ({ history }) => Math.exp(crossings(history, acceleration)[1].N),
+  a_eq_mr: ({ history }) => Math.exp(overtakings(history, matterOverRadiation)[0].N),
+  'a_eq_mde[0]': ({ history }) => Math.exp(overtakings(history, darkOverMatter)[0].N),
+  'a_eq_mde[1]': ({ history }) => Math.exp(overtakings(history, darkOverMatter)[1].N),
+  'a_acc[0]': ({ history }) => Math.exp(accelerationChanges(history)[0].N),
+  'a_acc[1]': ({ history }) => Math.exp(accelerationChanges(history)[1].N),
 }
 
 const chi = (one: Case, scale: number) => number(comovingDistance(one.history, at(one, scale)))
