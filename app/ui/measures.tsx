@@ -11,8 +11,8 @@ export function Measures({ view }: { readonly view: Explorer }) {
       <table className="measures">
         <thead className="spoken">
           <tr>
-            <th scope="col">Measure</th>
             <th scope="col">Symbol</th>
+            <th scope="col">Measure</th>
             <th scope="col">Value</th>
           </tr>
         </thead>
@@ -30,12 +30,12 @@ function Row({ measure }: { readonly measure: MeasureWords }) {
   const { key, label, symbol, meaning, value, unit, because } = measure
   return (
     <tr data-measure={key}>
-      <th scope="row" title={meaning}>
-        {label}
-      </th>
       <td className="symbol">
         <Symbols markup={symbol} />
       </td>
+      <th scope="row" title={meaning}>
+        {label}
+      </th>
       {value === null ? (
         <td className="none">{because}</td>
       ) : (

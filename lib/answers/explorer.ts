@@ -1,5 +1,7 @@
 /** Everything the explorer shows, from the texts of an address: what a page needs and nothing to compute. */
+import { contentsAt } from '../figures/contents'
 import { type LongView, longView } from '../figures/long-view'
+import type { Entry } from '../figures/window'
 import { DEMO } from '../scenario/demo'
 import { mendQuery } from '../scenario/mend'
 import { MOST_SCENARIOS, readQuery } from '../scenario/query'
@@ -72,12 +74,20 @@ export function explorer(asked: Asked): Explorer {
     title: demo ? DEMO.title : joined(solutions.map(({ label }) => label)),
     place,
     scenarios: solutions.map((solution, slot) => scenarioView(solution, slot, scenarios, place)),
-    figure: longView(solutions.map((solution) => ({ solution, scales: (times) => scalesAt(solution, times) }))),
+    figure: longView(solutions.map(drawable)),
     form: formOf(focus.scenario, focus.budget),
-    moments: focus.moments.map(momentWords),
+    moments: momentWords(focus),
     measures: measureWords(focus.measures),
     refusal: refusal && { ...refusal, link: refusal.link && pageLink(scenarios, place) },
     links: linksOf(scenarios, place),
+  }
+}
+
+function drawable(solution: Solution): Entry<Solution> {
+  return {
+    solution,
+    scales: (times) => scalesAt(solution, times),
+    contents: (time) => contentsAt(solution, time),
   }
 }
 

@@ -8,8 +8,9 @@ import type { Window } from './window'
 
 type Told = Pick<Solution, 'scenario' | 'label' | 'origin' | 'end' | 'measures' | 'moments'>
 
-export function longViewCaption(solutions: readonly Told[]): string {
+export function longViewCaption(solutions: readonly Told[], ribbons: boolean): string {
   const parts = ['Scale factor a against time from now.', marksOf(solutions)]
+  if (ribbons) parts.push('Ribbons: what dominates; the line above them: the expansion accelerates.')
   const followed = solutions.filter(({ scenario }) => extrapolates(scenario)).map(({ label }) => label)
   if (followed.length > 0)
     parts.push(

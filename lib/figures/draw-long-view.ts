@@ -2,10 +2,11 @@
 import { axes, timeAxisTitle } from './draw-axes'
 import { drawCurve } from './draw-curve'
 import { drawLabel } from './draw-label'
+import { drawRibbons, ribbonsHeight } from './draw-ribbons'
 import { labelHeight, labelWidth, nameOf, placeLabels } from './labels'
 import type { LongView } from './long-view'
 import { type Frame, type Margins, type Plot, plotOf } from './plot'
-import { type SvgNode, svg } from './svg'
+import { px, type SvgNode, svg } from './svg'
 import { textWidth } from './text-width'
 
 /** The vertical axis stands above its upper end. */
@@ -17,10 +18,16 @@ export function drawLongView(view: LongView, frame: Frame): SvgNode {
   const labels = placeLabels(view, plot, frame, free)
   return svg(
     'svg',
-    { viewBox: `0 0 ${frame.width} ${frame.height}`, class: 'chart', role: 'img', 'aria-label': view.alternative },
+    {
+      viewBox: `0 0 ${frame.width} ${px(frame.height + ribbonsHeight(view.curves, frame))}`,
+      class: 'chart',
+      role: 'img',
+      'aria-label': view.alternative,
+    },
     ...ground(view, plot, frame),
     ...axes(view.window, plot, frame, SCALE_TITLE),
     ...view.curves.map((curve) => drawCurve(curve, plot, frame)),
+    ...drawRibbons(view.curves, plot, frame),
     ...labels.map((label) => drawLabel(label, frame)),
   )
 }
@@ -43,9 +50,11 @@ function marginsOf(view: LongView, frame: Frame): Margins {
 function ground(view: LongView, plot: Plot, { id }: Frame): SvgNode[] {
   const x = plot.x(0)
   const area = { x, y: plot.top, width: plot.right - x, height: plot.bottom - plot.top }
-  const lines = svg('path', { d: 'M-2 10L10 -2M6 18L18 6', class: 'hatch' })
-  const pattern = svg('pattern', { id: `${id}-hatch`, width: 8, height: 8, patternUnits: 'userSpaceOnUse' }, lines)
+  const pattern = (name: string) => {
+    const lines = svg('path', { d: 'M-2 10L10 -2M6 18L18 6', class: name })
+    return svg('pattern', { id: `${id}-${name}`, width: 8, height: 8, patternUnits: 'userSpaceOnUse' }, lines)
+  }
   const tint = svg('rect', { ...area, class: 'tint' })
   if (!view.hatched) return [tint]
-  return [svg('defs', {}, pattern), tint, svg('rect', { ...area, fill: `url(#${id}-hatch)` })]
+  return [svg('defs', {}, pattern('hatch'), pattern('veil')), tint, svg('rect', { ...area, fill: `url(#${id}-hatch)` })]
 }

@@ -51,23 +51,35 @@ export function placeLabels(view: LongView, plot: Plot, frame: Frame, free: numb
 function topLabels(curves: readonly Curve[], plot: Plot, frame: Frame, free: number): Label[] {
   const { type } = frame
   const ends = curves.filter((curve) => curve.finish?.edge === 'top')
-  const room = (frame.width - free) / Math.max(1, ends.length) - GAP * type
+  const widths = ends.map((curve) => labelWidth(textsOf(curve, frame), type))
+  const room = sharedRoom(widths, frame.width - free - ends.length * GAP * type)
   const texts = ends.map((curve) => shortened(textsOf(curve, frame), room, type))
   const wishes = ends.map((curve, i) => ({
     middle: plot.x(curve.finish?.at[0] ?? 0),
     length: labelWidth(texts[i] ?? EMPTY, type) + GAP * type,
   }))
   const middles = spread(wishes, free, frame.width)
-  const tallest = Math.max(0, ...texts.map((text) => labelHeight(text, type)))
-  const y = plot.top - 0.9 * type - tallest
   return ends.map((curve, i) => {
     const x = middles[i] ?? 0
     const half = (wishes[i]?.length ?? 0) / 2 - GAP * type
     const target = wishes[i]?.middle ?? 0
-    const foot = y + labelHeight(texts[i] ?? EMPTY, type) + 2
+    const y = plot.top - 0.9 * type - labelHeight(texts[i] ?? EMPTY, type)
+    const foot = plot.top - 0.9 * type + 2
     const leader = [Math.max(x - half, Math.min(x + half, target)), foot, target, plot.top - 2] as const
     return { slot: curve.slot, ...(texts[i] ?? EMPTY), anchor: 'middle' as const, x, y, leader }
   })
+}
+
+/** The greatest width such that all fit when the longer ones are cut to it. */
+function sharedRoom(widths: readonly number[], total: number): number {
+  let left = total
+  const ascending = [...widths].sort((one, other) => one - other)
+  for (const [i, width] of ascending.entries()) {
+    const share = left / (ascending.length - i)
+    if (width > share) return share
+    left -= width
+  }
+  return Number.POSITIVE_INFINITY
 }
 
 const EMPTY = { name: '', note: '' }
@@ -134,9 +146,12 @@ function placeInside(wish: InsideWish, view: LongView, plot: Plot, frame: Frame,
   }
 }
 
+/** A label may be so many steps from its end. */
+const FARTHEST_STEP = 14
+
 /** To the right and to the left of the end, at ever larger distances up or down. */
 function candidates(x: number, y: number, width: number, height: number, type: number): Box[] {
-  const steps = [0, 1, -1, 2, -2, 3, -3, 4, 5, 6, 7, 8]
+  const steps = Array.from({ length: 2 * FARTHEST_STEP + 1 }, (_, i) => (i % 2 === 0 ? i / 2 : -(i + 1) / 2))
   return steps.flatMap((step) =>
     [x + 0.7 * type, x - 0.7 * type - width].map((left) => ({ x: left, y: y - step * 0.8 * type, width, height })),
   )

@@ -3,6 +3,7 @@ import type { Solution } from '../solve'
 import { extrapolates } from '../words/beyond'
 import { END_NAMES, endLabel, endsInTime } from '../words/ending'
 import { longViewCaption, longViewText } from './caption'
+import { type Eras, erasOf } from './eras'
 import { type Point, sampleCurve } from './sample'
 import { type Entry, type Window, windowOf } from './window'
 
@@ -33,6 +34,10 @@ export interface Curve {
   readonly asymptote: number | null
   /** The ending by name, and its time where it has one. */
   readonly ending: string
+  /** Null where the contents are not known. */
+  readonly eras: Eras | null
+  /** True where the future is the extrapolation of a law fitted to the past. */
+  readonly extrapolated: boolean
 }
 
 export interface LongView {
@@ -47,11 +52,15 @@ export interface LongView {
 export function longView(entries: readonly Entry<Drawn>[]): LongView {
   const window = windowOf(entries)
   const solutions = entries.map(({ solution }) => solution)
+  const curves = entries.map((entry, slot) => curveOf(entry, slot, window))
   return {
     window,
-    curves: entries.map((entry, slot) => curveOf(entry, slot, window)),
-    hatched: solutions.some(({ scenario }) => extrapolates(scenario)),
-    caption: longViewCaption(solutions),
+    curves,
+    hatched: curves.some(({ extrapolated }) => extrapolated),
+    caption: longViewCaption(
+      solutions,
+      curves.some(({ eras }) => eras !== null),
+    ),
     alternative: longViewText(solutions, window),
   }
 }
@@ -71,6 +80,8 @@ function curveOf(entry: Entry<Drawn>, slot: number, window: Window): Curve {
     finish,
     asymptote,
     ending: endLabel(solution),
+    eras: entry.contents ? erasOf(entry.contents, window) : null,
+    extrapolated: extrapolates(solution.scenario),
   }
 }
 

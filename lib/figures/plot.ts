@@ -47,7 +47,7 @@ export function plotOf(frame: Frame, margins: Margins, { from, to, top: a }: Win
 
 /** The page's widths: a phone, a tablet, a desk or a hall. */
 export const FRAMES: readonly Frame[] = [
-  { id: 'narrow', width: 370, height: 286, type: 13, compact: true },
-  { id: 'middle', width: 800, height: 370, type: 15, compact: false },
-  { id: 'wide', width: 1240, height: 430, type: 15, compact: false },
+  { id: 'narrow', width: 370, height: 262, type: 13, compact: true },
+  { id: 'middle', width: 800, height: 330, type: 15, compact: false },
+  { id: 'wide', width: 1240, height: 365, type: 15, compact: false },
 ]

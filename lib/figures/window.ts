@@ -1,5 +1,6 @@
 /** The shared window of several histories: every origin, and every ending that falls within reason. */
 import type { Solution } from '../solve'
+import type { Contents } from './contents'
 
 export type Seen = Pick<Solution, 'origin' | 'end' | 'measures'>
 /** a at times in Gyr from now, ascending; null where the history does not reach. */
@@ -8,6 +9,8 @@ export type Scales = (times: readonly number[]) => readonly (number | null)[]
 export interface Entry<S extends Seen = Seen> {
   readonly solution: S
   readonly scales: Scales
+  /** What dominates at a time; absent where nobody knows. */
+  readonly contents?: (time: number) => Contents | null
 }
 
 export interface Window {

@@ -1,7 +1,7 @@
 /** Since when the expansion speeds up or slows down, as a clause without a subject; null where the ending says it all. */
 import type { Moment } from '../solve'
 import { duration } from './time'
-import type { Told } from './verdict'
+import type { Told } from './told'
 
 type Change = Moment & { readonly time: number }
 

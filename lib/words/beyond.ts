@@ -3,7 +3,7 @@ import { familyOf } from '../dark-energy'
 import type { Scenario } from '../scenario/scenario'
 import { endClause } from './ending'
 import { duration } from './time'
-import type { Told } from './verdict'
+import type { Told } from './told'
 
 /** Two endings of one kind are told apart when their times differ by more than this part. A taste, not a law. */
 const NOTEWORTHY = 0.01

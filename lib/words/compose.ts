@@ -67,12 +67,13 @@ function written(key: string, typed: string): string {
   return list ? lists(typed) : plain(typed)
 }
 
-/** A number as a person types it: decimal comma, true minus sign, blanks between thousands. */
+/** A number as a person types it: decimal comma, true minus sign, blanks between thousands. No comma is left to end a pair. */
 function plain(typed: string): string {
   return typed
     .replace(/[\s\u2009\u202f\u00a0]/g, '')
     .replaceAll('−', '-')
     .replace(/^([^,]*),([^,]*)$/, '$1.$2')
+    .replaceAll(',', ';')
 }
 
 /** Numbers parted by blanks, semicolons or underscores. */

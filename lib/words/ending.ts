@@ -1,8 +1,8 @@
 /** How a history ends: as a clause without a subject, as a short label, and what follows from it. */
 import type { EndKind } from '../history/outcome'
-import { significant } from './number'
+import { significant, withUnit } from './number'
 import { duration, fromNow, size } from './time'
-import type { Told } from './verdict'
+import type { Told } from './told'
 
 type Ended = Pick<Told, 'end'>
 
@@ -71,7 +71,7 @@ export function endTail(told: Told): string | null {
   if (told.end.kind === 'rip') return tornApart(told)
   const limit = told.measures.asymptoticHubble.value
   if (limit === null || told.end.kind !== 'exponential') return null
-  return `H tends to ${significant(limit, 3)} km/s/Mpc.`
+  return `H tends to ${withUnit(significant(limit, 3), 'km/s/Mpc')}.`
 }
 
 function tornApart({ end, moments }: Told): string | null {

@@ -27,6 +27,11 @@ export function significant(value: number, digits: number): string {
   return dressed(rounded.toFixed(Math.max(0, decimals)))
 }
 
+/** A number and its unit, never parted at the end of a line. */
+export function withUnit(text: string, unit: string): string {
+  return unit === '' ? text : `${text}\u00a0${unit}`
+}
+
 /** With a sign even where positive: a time from now. */
 export function signed(text: string): string {
   return text.startsWith(MINUS) || /^[0.]+$/.test(text) ? text : `+${text}`

@@ -1,6 +1,6 @@
 /** How a history begins, as a clause without a subject. */
 import { duration, size } from './time'
-import type { Told } from './verdict'
+import type { Told } from './told'
 
 export function originClause({ origin }: Pick<Told, 'origin'>): string {
   const ago = origin.time === null ? 'infinitely long ago' : `${duration(-origin.time)} ago`

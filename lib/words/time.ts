@@ -1,5 +1,5 @@
 /** Times in words: Gyr to two decimals, smaller units where Gyr would round to nothing. */
-import { fixed, signed, significant } from './number'
+import { fixed, signed, significant, withUnit } from './number'
 
 const SMALLER: readonly (readonly [unit: string, perGyr: number])[] = [
   ['Myr', 1e3],
@@ -11,18 +11,18 @@ const SMALLER: readonly (readonly [unit: string, perGyr: number])[] = [
 ]
 
 /** Below this many Gyr two decimals say too little. */
-const FINE = 0.1
+export const NEAR = 0.5
 
 /** A length of time, e.g. `13.79 Gyr`, `110 Myr`. */
 export function duration(gyr: number): string {
-  if (gyr >= FINE || gyr === 0) return `${fixed(gyr, 2)} Gyr`
+  if (gyr >= NEAR || gyr === 0) return withUnit(fixed(gyr, 2), 'Gyr')
   const fitting = SMALLER.find(([, perGyr]) => gyr * perGyr >= 1) ?? (['s', 31557600e9] as const)
-  return `${significant(gyr * fitting[1], 3)} ${fitting[0]}`
+  return withUnit(significant(gyr * fitting[1], 3), fitting[0])
 }
 
 /** A time from now, e.g. `+53.28 Gyr`, `−13.79 Gyr`. */
 export function fromNow(gyr: number): string {
-  return `${signed(fixed(gyr, 2))} Gyr`
+  return withUnit(signed(fixed(gyr, 2)), 'Gyr')
 }
 
 /** A scale factor as a multiple of today's. */

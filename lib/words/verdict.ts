@@ -1,14 +1,11 @@
 /** What becomes of a universe, in one or two sentences with the numbers that matter. */
-import type { Solution } from '../solve'
 import { accelerationClause } from './acceleration'
 import { beyondSentence } from './beyond'
 import { endClause, endTail } from './ending'
 import { originClause } from './origin'
 import { reachSentence } from './reach'
 import { capital, joined } from './sentence'
-
-/** The part of a solution that the words need. */
-export type Told = Pick<Solution, 'scenario' | 'origin' | 'end' | 'measures' | 'moments'>
+import type { Told } from './told'
 
 export interface Verdict {
   /** Origin, acceleration and ending, then what they lead to. */

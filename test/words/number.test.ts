@@ -1,9 +1,10 @@
 import { describe, expect, it } from 'vitest'
+import type { Moment } from '../../lib/solve'
 import { momentWords } from '../../lib/words/moments'
 import { fixed, signed, significant } from '../../lib/words/number'
 import { runsOf } from '../../lib/words/symbol'
 import { duration, fromNow } from '../../lib/words/time'
-import { moment } from './told'
+import { moment, told } from './told'
 
 describe('numbers', () => {
   it.each([
@@ -26,16 +27,20 @@ describe('numbers', () => {
   ])('%d to three digits is %s', (value, text) => expect(significant(value, 3)).toBe(text))
 
   it('bears a sign where it is a time from now', () => {
-    expect([fromNow(53.28), fromNow(-13.789), fromNow(0)]).toEqual(['+53.28 Gyr', '−13.79 Gyr', '0.00 Gyr'])
+    expect([fromNow(53.28), fromNow(-13.789), fromNow(0)]).toEqual([
+      '+53.28\u00a0Gyr',
+      '−13.79\u00a0Gyr',
+      '0.00\u00a0Gyr',
+    ])
     expect(signed('0')).toBe('0')
   })
 
   it.each([
-    [13.789, '13.79 Gyr'],
-    [0.11, '0.11 Gyr'],
-    [0.06, '60.0 Myr'],
-    [0.000371, '371 kyr'],
-    [1e-9 / 365.25, '1.00 days'],
+    [13.789, '13.79\u00a0Gyr'],
+    [0.11, '110\u00a0Myr'],
+    [0.06, '60.0\u00a0Myr'],
+    [0.000371, '371\u00a0kyr'],
+    [1e-9 / 365.25, '1.00\u00a0days'],
   ])('%d Gyr is %s', (gyr, text) => expect(duration(gyr)).toBe(text))
 })
 
@@ -77,12 +82,22 @@ describe('symbols', () => {
 })
 
 describe('moments', () => {
+  const rows = (...moments: Moment[]) => momentWords({ ...told({ end: { kind: 'rip', time: 40 } }), moments })
+
   it('carry redshift behind and scale factor ahead', () => {
-    expect(momentWords(moment('acceleration-start', -6.1, 0.615))).toMatchObject({ when: '−6.10 Gyr', where: 'z 0.63' })
-    expect(momentWords(moment('matter-radiation-equality', -13.78, 1 / 3403))).toMatchObject({ where: 'z 3402' })
-    expect(momentWords(moment('turnaround', 53.28, 2.748))).toMatchObject({ when: '+53.28 Gyr', where: 'a 2.75' })
-    expect(momentWords(moment('origin', null, 0))).toMatchObject({ when: '−∞', where: '' })
-    expect(momentWords(moment('end', null))).toMatchObject({ when: '+∞', where: '' })
-    expect(momentWords(moment('now', 0, 1))).toMatchObject({ when: 'now', where: '' })
+    expect(rows(moment('acceleration-start', -6.1, 0.615))).toMatchObject([{ when: '−6.10\u00a0Gyr', where: 'z 0.63' }])
+    expect(rows(moment('turnaround', 33.28, 2.748))).toMatchObject([{ when: '+33.28\u00a0Gyr', where: 'a 2.75' }])
+    expect(rows(moment('origin', null, 0))).toMatchObject([{ when: '−∞', where: '' }])
+    expect(rows(moment('end', null))).toMatchObject([{ when: '+∞', where: '' }])
+    expect(rows(moment('now', 0, 1))).toMatchObject([{ when: 'now', label: 'today', where: '' }])
+  })
+
+  it('tell how close to the origin or the end they are', () => {
+    expect(rows(moment('recombination', -13.789 + 3.7e-4, 1 / 1091))).toMatchObject([
+      { label: 'recombination, after 370\u00a0kyr', where: 'z 1090' },
+    ])
+    expect(rows(moment('unbinding-galaxy', 39.94, 100))).toMatchObject([
+      { label: 'unbinding-galaxy, 60.0\u00a0Myr before' },
+    ])
   })
 })

@@ -1,0 +1,154 @@
+import { describe, expect, it } from 'vitest'
+import { drawLongView } from '../../lib/figures/draw-long-view'
+import { type Label, labelHeight, labelWidth, placeLabels } from '../../lib/figures/labels'
+import { longView } from '../../lib/figures/long-view'
+import { FRAMES, type Frame, plotOf } from '../../lib/figures/plot'
+import { sampleCurve } from '../../lib/figures/sample'
+import { serialize } from '../../lib/figures/svg'
+import { windowOf } from '../../lib/figures/window'
+import * as universes from './universes'
+
+const { bounce, deSitter, einsteinDeSitter, flatLambda, milne, phantom, sinking } = universes
+const SIX = [flatLambda(), sinking(), phantom(), bounce(), milne(), einsteinDeSitter()]
+const SETS = {
+  demo: [flatLambda(), sinking(0.12), phantom(-1.25)],
+  six: SIX,
+  alike: [0.2, 0.25, 0.3, 0.35, 0.4, 0.45].map((matter) => flatLambda(matter, `Matter ${matter}`)),
+  crunches: [0.1, 0.12, 0.5, 0.7, 1, 2].map((sink) => sinking(sink, `Sink ${sink}`)),
+  'one of a thousand Gyr beside one of one': [flatLambda(0.3, 'slow', 1000), flatLambda(0.3, 'fast', 1)],
+  'without a beginning': [deSitter()],
+}
+
+describe('the shared window', () => {
+  it.each(Object.entries(SETS))('holds now, every origin and every ending within reason: %s', (_, set) => {
+    const { from, to } = windowOf(set)
+    expect(from).toBeLessThan(0)
+    for (const { solution } of set) {
+      expect(solution.origin.time ?? 0).toBeGreaterThan(from)
+      const end = solution.end.time
+      if (end !== null && end < -5 * from) expect(end).toBeLessThan(to)
+    }
+  })
+
+  it('does not stretch to an ending that is too far', () => {
+    const far = sinking(0.0001)
+    expect(far.solution.end.time ?? 0).toBeGreaterThan(windowOf([far]).to)
+    expect(longView([far]).curves[0]).toMatchObject({ note: expect.stringContaining('later: Big Crunch') })
+  })
+
+  it('holds the turn of a crunch', () => {
+    const { turnaround } = sinking().solution.end
+    expect(windowOf([sinking()]).top).toBeGreaterThan(turnaround?.scale ?? Number.NaN)
+  })
+})
+
+describe('a sampled curve', () => {
+  it.each(SIX.map((entry) => [entry.solution.label, entry] as const))('%s lies on its closed form', (_, entry) => {
+    const window = windowOf(SIX)
+    const points = sampleCurve(entry, window).flat()
+    const exact = entry.scales(points.map(([time]) => time))
+    points.forEach(([time, scale], i) => {
+      const limit = [entry.solution.origin.time, entry.solution.end.time].includes(time)
+      // A point on the upper edge is interpolated between samples: a part in a thousand of the window.
+      if (!limit) expect(Math.abs(scale - (exact[i] ?? Number.NaN))).toBeLessThan(1e-3 * window.top)
+    })
+  })
+
+  it.each(SIX.map((entry) => [entry.solution.label, entry] as const))(
+    '%s follows it between points too',
+    (_, entry) => {
+      const window = windowOf(SIX)
+      for (const segment of sampleCurve(entry, window)) {
+        segment.slice(1).forEach(([to, high], i) => {
+          const [from, low] = segment[i] ?? [to, high]
+          const time = (from + to) / 2
+          const exact = entry.scales([time])[0] ?? Number.NaN
+          // Distance from the chord, each axis in parts of the window; the root at an origin is steep, so height alone
+          // would say little. 1e-3 of the window is half a pixel of the wide figure.
+          const steep = Math.abs(high - low) / window.top / ((to - from) / (window.to - window.from))
+          expect(Math.abs(exact - (low + high) / 2) / window.top / Math.hypot(1, steep)).toBeLessThan(1e-3)
+        })
+      }
+    },
+  )
+
+  it('comes in parts where it leaves through the top and returns', () => {
+    const parts = sampleCurve(sinking(), { from: -10, to: 60, top: 1.3 })
+    expect(parts).toHaveLength(2)
+    expect(parts.map((part) => part.at(0)?.[1])).toEqual([0, 1.3])
+    expect(parts.map((part) => part.at(-1)?.[1])).toEqual([1.3, 0])
+  })
+
+  it('draws the contraction before a bounce', () => {
+    const [first] = sampleCurve(bounce(), windowOf([bounce()]))[0] ?? []
+    expect(first?.[0]).toBeLessThan(-10)
+    expect(first?.[1]).toBeGreaterThan(bounce().solution.origin.scale)
+  })
+})
+
+describe('marks', () => {
+  const kinds = (entry: (typeof SIX)[number]) => longView([entry]).curves[0]?.marks.map(({ kind }) => kind)
+
+  it('ring an origin, cross an ending, point on where there is none', () => {
+    expect(kinds(flatLambda())).toEqual(['ring', 'arrow'])
+    expect(kinds(sinking())).toEqual(['ring', 'cross'])
+    expect(kinds(deSitter())).toEqual(['arrow', 'arrow'])
+    expect(kinds(bounce())).toEqual(['ring', 'arrow', 'arrow'])
+    expect(kinds(phantom())).toEqual(['arrow', 'arrow', 'cross'])
+  })
+})
+
+describe('labels', () => {
+  const cases = Object.entries(SETS).flatMap(([name, set]) =>
+    FRAMES.map((frame) => [name, frame.id, set, frame] as const),
+  )
+
+  it.each(cases)('do not collide and stay on the sheet: %s, %s', (_, __, set, frame) => {
+    const view = longView(set)
+    const plot = plotOf(frame, { left: 36, right: frame.compact ? 8 : 140, top: 55, bottom: 42 }, view.window)
+    const boxes = placeLabels(view, plot, frame, plot.left + 100).map((label) => boxOf(label, frame))
+    boxes.forEach((one, i) => {
+      expect(one.left).toBeGreaterThanOrEqual(0)
+      expect(one.right).toBeLessThanOrEqual(frame.width + 1)
+      for (const other of boxes.slice(i + 1)) {
+        expect(
+          one.left < other.right && other.left < one.right && one.top < other.bottom && other.top < one.bottom,
+        ).toBe(false)
+      }
+    })
+  })
+
+  function boxOf(label: Label, { type }: Frame) {
+    const width = labelWidth(label, type)
+    const left = label.x - { start: 0, middle: width / 2, end: width }[label.anchor]
+    return { left, right: left + width, top: label.y, bottom: label.y + labelHeight(label, type) }
+  }
+})
+
+describe('the drawing', () => {
+  it('has no inline styles, no NaN, and says what it shows', () => {
+    for (const frame of FRAMES) {
+      const view = longView(SETS.demo)
+      const text = serialize(drawLongView(view, frame))
+      expect(text).not.toMatch(/style=|NaN|Infinity|undefined/)
+      expect(text).toContain('role="img"')
+      expect(view.alternative).toContain('Steady light: begins in a Big Bang')
+    }
+  })
+
+  it('escapes what a person typed', () => {
+    const text = serialize(drawLongView(longView([flatLambda(0.3, '<b>"&')]), FRAMES[2] as Frame))
+    expect(text).not.toContain('<b>')
+    expect(text).toContain('&lt;b&gt;')
+  })
+
+  it('hatches only what extrapolates a law', () => {
+    const followed = sinking(0.2, 'one', { eos: 'cpl', law: { w0: -0.6, wa: -1.6 } })
+    const held = sinking(0.2, 'one', { eos: 'cpl', law: { w0: -0.6, wa: -1.6 }, beyond: 'hold' })
+    expect(longView([followed])).toMatchObject({
+      hatched: true,
+      caption: expect.stringContaining('Hatched: one follows'),
+    })
+    expect([longView([held]).hatched, longView([flatLambda()]).hatched]).toEqual([false, false])
+  })
+})
