@@ -1,9 +1,10 @@
 /** Places on an arm, and the integrals to and from them. */
 import { TODAY } from '../model'
+import { solveIncreasing } from '../numerics/chebyshev'
 import { gaussLegendre } from '../numerics/gauss-legendre'
 import { brent } from '../numerics/roots'
 import { type Arm, type Clock, FARTHEST } from './arm'
-import { type Stretch, within } from './panels'
+import { within } from './panels'
 import { elapsedIn, remainingIn } from './tail'
 
 /** A place on an arm: s is the variable of its panel's zone, or the distance into the tail beyond the last panel. */
@@ -75,11 +76,16 @@ export function placeElapsed(arm: Arm, clock: Clock, value: number): Place | nul
   if (panel === arm.panels.length) {
     return placeInTail(arm, (D) => elapsedBeyond(arm, clock, D) - (value - sums.fromToday[panel]))
   }
-  if (panel === 0) return placeInPanel(arm, 0, (s) => fromToday(placeOf(arm, 0, s), clock) - value)
-  const stretch = arm.panels[panel][clock]
-  const rest = value - sums.fromToday[panel]
-  return placeInPanel(arm, panel, (s) => within(arm.panels[panel], stretch, s) - rest)
+  if (panel === 0) {
+    const near = variableNear(arm)
+    const direct = (x: number) => fromToday(placeOf(arm, 0, x), clock) - value
+    if (direct(near) > 0) return placeOf(arm, 0, brent(direct, arm.panels[0].from, near))
+  }
+  return placeInPanel(arm, panel, clock, value - sums.fromToday[panel])
 }
+
+/** Just inside the part of the first panel where integrals from today are taken directly. */
+const variableNear = (arm: Arm): number => arm.panels[0].zone.variableAt(0.99 * NEAR_TODAY * arm.edges[1])
 
 /** Where the integral to the end has this value, which keeps its relative accuracy near the end; null where there is none. */
 export function placeRemaining(arm: Arm, clock: Clock, value: number): Place | null {
@@ -89,9 +95,7 @@ export function placeRemaining(arm: Arm, clock: Clock, value: number): Place | n
   if (value < sums.toEnd[panel])
     return placeInTail(arm, (D) => (arm.tail ? value - remainingIn(arm.tail[clock], D) : 0))
   while (panel > 0 && sums.toEnd[panel - 1] <= value) panel--
-  const stretch: Stretch = arm.panels[panel][clock]
-  const rest = value - sums.toEnd[panel]
-  return placeInPanel(arm, panel, (s) => rest - (stretch.total - within(arm.panels[panel], stretch, s)))
+  return placeInPanel(arm, panel, clock, arm.panels[panel][clock].total - (value - sums.toEnd[panel]))
 }
 
 const elapsedBeyond = (arm: Arm, clock: Clock, D: number): number => (arm.tail ? elapsedIn(arm.tail[clock], D) : 0)
@@ -103,12 +107,11 @@ const placeOf = (arm: Arm, panel: number, s: number): Place => ({
   s,
 })
 
-/** The root of an increasing function of s on a panel. */
-function placeInPanel(arm: Arm, panel: number, f: (s: number) => number): Place {
-  const { from, to } = arm.panels[panel]
-  if (f(from) >= 0) return placeOf(arm, panel, from)
-  if (f(to) <= 0) return placeOf(arm, panel, to)
-  return placeOf(arm, panel, brent(f, from, to))
+/** Where the integral from a panel's inner edge has this value. */
+function placeInPanel(arm: Arm, panel: number, clock: Clock, value: number): Place {
+  const { from, to, [clock]: stretch } = arm.panels[panel]
+  const x = solveIncreasing(stretch.series, value)
+  return placeOf(arm, panel, from + ((x + 1) / 2) * (to - from))
 }
 
 /** Beyond the last panel; at a static state for ever where the arm leads there. */

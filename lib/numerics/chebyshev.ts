@@ -72,6 +72,32 @@ export function evaluate(coefficients: Float64Array, x: number): number {
   return coefficients[0] + x * b1 - b2
 }
 
+/**
+ * x in [−1, 1] at which an increasing series has the value `target`; the nearer end where it has not.
+ * Newton's steps with value and slope from one recurrence, kept inside a shrinking bracket; to the rounding of the series.
+ */
+export function solveIncreasing(coefficients: Float64Array, target: number): number {
+  let [low, high] = [-1, 1]
+  const total = sumAtOne(coefficients)
+  let x = Math.max(-1, Math.min(1, total > 0 ? (2 * target) / total - 1 : 0))
+  for (let step = 0; step < 60; step++) {
+    let [b1, b2, d1, d2] = [0, 0, 0, 0]
+    for (let j = coefficients.length - 1; j > 0; j--) {
+      const d = 2 * b1 + 2 * x * d1 - d2
+      const b = coefficients[j] + 2 * x * b1 - b2
+      ;[b2, b1, d2, d1] = [b1, b, d1, d]
+    }
+    const value = coefficients[0] + x * b1 - b2 - target
+    if (value > 0) high = x
+    else low = x
+    const newton = x - value / (b1 + x * d1 - d2)
+    const next = newton >= low && newton <= high ? newton : (low + high) / 2
+    if (Math.abs(next - x) <= 2e-16) return next
+    x = next
+  }
+  return x
+}
+
 /** Size of the last two coefficients relative to the largest: the series is resolved when this is near eps. */
 export function relativeTail(coefficients: Float64Array): number {
   let largest = 0
