@@ -16,7 +16,7 @@ interface Props {
 
 export async function generateMetadata(props: Props): Promise<Metadata> {
   const view = await read(props)
-  return { title: view.title, description: view.figure.alternative }
+  return { title: { absolute: `${view.title} · Longhence` }, description: view.figure.alternative }
 }
 
 export default async function Page(props: Props) {

@@ -55,10 +55,11 @@ test.describe('without JavaScript', () => {
     await page.goto('/')
     const paper = await ground()
     await page.getByRole('link', { name: 'Night' }).click()
+    await expect.poll(ground).not.toBe(paper)
     const night = await ground()
-    expect(night).not.toBe(paper)
     await page.getByRole('button', { name: 'Apply' }).click()
-    expect(await ground()).toBe(night)
+    await expect(page).toHaveURL(/theme=night/)
+    await expect.poll(ground).toBe(night)
   })
 })
 

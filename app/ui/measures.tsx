@@ -35,14 +35,18 @@ function Row({ measure }: { readonly measure: MeasureWords }) {
       </td>
       <th scope="row" title={meaning}>
         {label}
+        {because && <span className="reason">{because}</span>}
       </th>
-      {value === null ? (
-        <td className="none">{because}</td>
-      ) : (
-        <td className="value">
-          <b>{value}</b> {unit}
-        </td>
-      )}
+      <td className="value">{value === null ? '–' : <Value value={value} unit={unit} />}</td>
     </tr>
+  )
+}
+
+function Value({ value, unit }: { readonly value: string; readonly unit: string }) {
+  return (
+    <>
+      <b>{value}</b>
+      {unit && ` ${unit}`}
+    </>
   )
 }

@@ -13,6 +13,6 @@ function Plain({ text }: { readonly text: string }) {
   const parts = text.split(/(?<!\p{L})(\p{L})(?!\p{L})/u)
   return parts.map((part, i) => {
     const key = `${i}${part}`
-    return i % 2 === 1 ? <i key={key}>{part}</i> : <span key={key}>{part}</span>
+    return i % 2 === 1 ? <i key={key}>{part}</i> : part
   })
 }

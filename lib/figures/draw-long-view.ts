@@ -49,7 +49,7 @@ function marginsOf(view: LongView, frame: Frame): Margins {
 /** The future lies on a tint; hatched where it is an extrapolation. */
 function ground(view: LongView, plot: Plot, { id }: Frame): SvgNode[] {
   const x = plot.x(0)
-  const area = { x, y: plot.top, width: plot.right - x, height: plot.bottom - plot.top }
+  const area = { x, y: plot.top, width: px(plot.right - x), height: px(plot.bottom - plot.top) }
   const pattern = (name: string) => {
     const lines = svg('path', { d: 'M-2 10L10 -2M6 18L18 6', class: name })
     return svg('pattern', { id: `${id}-${name}`, width: 8, height: 8, patternUnits: 'userSpaceOnUse' }, lines)

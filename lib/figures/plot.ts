@@ -32,9 +32,9 @@ export interface Margins {
 }
 
 export function plotOf(frame: Frame, margins: Margins, { from, to, top: a }: Window): Plot {
-  const { left, top } = margins
-  const right = frame.width - margins.right
-  const bottom = frame.height - margins.bottom
+  const [left, top] = [px(margins.left), px(margins.top)]
+  const right = px(frame.width - margins.right)
+  const bottom = px(frame.height - margins.bottom)
   return {
     left,
     right,
