@@ -17,6 +17,9 @@ const BEYOND = 60
 /** Farthest ln a at which densities are still doubles. */
 const FARTHEST = 700
 
+/** A step in ln a by which a function that passes through zero has left it. */
+const BEFORE = 1e-6
+
 /** A function of ln a along the expansion, with bounds of its slope, so that no sign change can hide. */
 export interface Comparison {
   value(model: Model, N: number): number
@@ -44,8 +47,10 @@ function changesBetween(comparison: Comparison, model: Model, from: number, to: 
     return [...changesBetween(comparison, model, from, middle), ...changesBetween(comparison, model, middle, to)]
   }
   const [left, right] = [value(from), value(to)]
-  if (right === 0 || left > 0 === right > 0) return []
-  return [{ N: left === 0 ? from : brent(value, from, to), rising: left < right }]
+  // Exactly zero where an interval begins, as today with equal densities: what came before decides.
+  const before = left === 0 ? value(from - BEFORE) : left
+  if (right === 0 || before > 0 === right > 0) return []
+  return [{ N: left === 0 ? from : brent(value, from, to), rising: before < right }]
 }
 
 /**
