@@ -3,12 +3,11 @@ import { contentsAt } from '../figures/contents'
 import { type LongView, longView } from '../figures/long-view'
 import type { Entry } from '../figures/window'
 import { DEMO } from '../scenario/demo'
-import { mendQuery } from '../scenario/mend'
-import { MOST_SCENARIOS, readQuery } from '../scenario/query'
+import { MOST_SCENARIOS } from '../scenario/query'
 import { readScenario } from '../scenario/read'
 import type { Problem, Scenario } from '../scenario/scenario'
 import { linkQuery } from '../scenario/write'
-import { type Solution, scalesAt, solve } from '../solve'
+import { type Solution, scalesAt } from '../solve'
 import { otherBeyond } from '../words/beyond'
 import { type Form, formOf } from '../words/fields'
 import { type Place, pageLink, readPlace, THEMES, type Theme } from '../words/link'
@@ -16,6 +15,7 @@ import { type MeasureWords, measureWords } from '../words/measures'
 import { type MomentWords, momentWords } from '../words/moments'
 import { joined } from '../words/sentence'
 import { type Verdict, verdictOf } from '../words/verdict'
+import { type Opened, opened, solutionOf } from './opened'
 
 export interface Asked {
   /** Every `s`, decoded once. */
@@ -65,22 +65,26 @@ export interface Explorer {
 }
 
 export function explorer(asked: Asked): Explorer {
-  const { scenarios, refusal } = opened(asked.codes)
+  const address = opened(asked.codes)
+  const solutions = address.solutions.map(named)
+  const scenarios = solutions.map(({ scenario }) => scenario)
   const place = readPlace(asked.focus, asked.theme, scenarios.length)
-  const solutions = scenarios.map((scenario, slot) => named(solve(scenario), slot))
   const focus = solutions[place.focus] as Solution
-  const demo = asked.codes.length === 0
   return {
-    title: demo ? DEMO.title : joined(solutions.map(({ label }) => label)),
+    title: asked.codes.length === 0 ? DEMO.title : joined(solutions.map(({ label }) => label)),
     place,
     scenarios: solutions.map((solution, slot) => scenarioView(solution, slot, scenarios, place)),
     figure: longView(solutions.map(drawable)),
     form: formOf(focus.scenario, focus.budget),
     moments: momentWords(focus),
     measures: measureWords(focus.measures),
-    refusal: refusal && { ...refusal, link: refusal.link && pageLink(scenarios, place) },
+    refusal: address.problems.length === 0 ? null : refusalOf(address, pageLink(scenarios, place)),
     links: linksOf(scenarios, place),
   }
+}
+
+function refusalOf({ problems, changes, kept }: Opened, link: string): Refusal {
+  return { problems, changes, link: kept ? link : null }
 }
 
 function drawable(solution: Solution): Entry<Solution> {
@@ -89,28 +93,6 @@ function drawable(solution: Solution): Entry<Solution> {
     scales: (times) => scalesAt(solution, times),
     contents: (time) => contentsAt(solution, time),
   }
-}
-
-interface Opened {
-  readonly scenarios: readonly Scenario[]
-  readonly refusal: Refusal | null
-}
-
-/** The scenarios of an address, else their nearest good readings, else the demo. */
-function opened(codes: readonly string[]): Opened {
-  const reading = readQuery(codes)
-  if (reading.ok) return { scenarios: reading.value, refusal: null }
-  const { problems } = reading
-  const mended = mendQuery(codes)
-  if (mended === null) return { scenarios: demoScenarios(), refusal: { problems, changes: [], link: null } }
-  const changes = mended.flatMap((one) => one.changes)
-  return { scenarios: mended.map((one) => one.scenario), refusal: { problems, changes, link: '/' } }
-}
-
-function demoScenarios(): readonly Scenario[] {
-  const demo = readQuery(DEMO.codes)
-  if (!demo.ok) throw new Error('the demo is a good reading')
-  return demo.value
 }
 
 /** A scenario without a name is called by its place in the list. */
@@ -124,7 +106,7 @@ function scenarioView(solution: Solution, slot: number, scenarios: readonly Scen
     slot,
     name: solution.label,
     plainCode: decodeURIComponent(solution.code),
-    verdict: verdictOf(solution, other && solve(other)),
+    verdict: verdictOf(solution, other && solutionOf(other)),
     because: solution.end.because,
     proven: solution.end.proven,
     link: pageLink(scenarios, { ...place, focus: slot }),

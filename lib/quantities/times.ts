@@ -1,0 +1,62 @@
+/** Columns that say when: times, and the size of the universe. */
+import { missing } from '../measures/outcome'
+import type { Column } from './column'
+import { FRIEDMANN, fixed, HOGG, significant } from './quantity'
+
+export const TIME_COLUMNS: readonly Column[] = [
+  {
+    key: 'time',
+    symbol: 't − t_0',
+    label: 'time from now',
+    unit: 'Gyr',
+    digits: fixed(3),
+    meaning: 'Cosmic time from now; the past is negative.',
+    formula: 't − t_0 = ∫ da/(a H), from today',
+    source: FRIEDMANN,
+    value: (_, { time }) => time,
+  },
+  {
+    key: 'age',
+    symbol: 't',
+    label: 'age',
+    unit: 'Gyr',
+    digits: fixed(3),
+    meaning: 'Cosmic time since the origin, the big bang or the last bounce; negative before a bounce.',
+    formula: 't = ∫ da/(a H), from the origin',
+    source: FRIEDMANN,
+    value: (_, { age }) => (Number.isFinite(age) ? age : missing('the past is infinite, so no age can be counted')),
+  },
+  {
+    key: 'lookback',
+    symbol: 't_L',
+    label: 'lookback time',
+    unit: 'Gyr',
+    digits: fixed(3),
+    meaning: 'How long ago; negative in the future.',
+    formula: 't_L = t_0 − t',
+    source: `${HOGG}, eq. 30`,
+    value: (_, { time }) => -time,
+  },
+  {
+    key: 'scale',
+    symbol: 'a',
+    label: 'scale factor',
+    unit: '',
+    digits: significant(5),
+    meaning: 'Size of all cosmic distances over their size today.',
+    formula: 'a = 1/(1 + z)',
+    source: FRIEDMANN,
+    value: (_, { scale }) => scale,
+  },
+  {
+    key: 'redshift',
+    symbol: 'z',
+    label: 'redshift',
+    unit: '',
+    digits: significant(5),
+    meaning: 'Stretching since then of light that arrives today, less one; negative where space is larger than today.',
+    formula: 'z = 1/a − 1',
+    source: `${HOGG}, eq. 11`,
+    value: (_, { redshift }) => redshift,
+  },
+]
