@@ -1,32 +1,4 @@
-/** Roots of one equation in one unknown, bracketed, so that an answer always exists. */
-
-/**
- * Root of f in [from, to], where f changes sign: Newton's step while it stays inside the shrinking bracket, bisection else
- * (Press et al., Numerical Recipes, §9.4). `evaluate` returns f; `slope` its derivative at the same point.
- * Ends when a step is below 2 eps |x| or the bracket is empty; the answer is good to the noise of f over its slope.
- */
-export function bracketedNewton(
-  f: (x: number) => number,
-  slope: (x: number) => number,
-  from: number,
-  to: number,
-): number {
-  const rising = f(to) > 0
-  let [low, high] = rising ? [from, to] : [to, from]
-  let x = (from + to) / 2
-  for (let step = 0; step < 200; step++) {
-    const value = f(x)
-    if (value === 0) return x
-    if (value < 0) low = x
-    else high = x
-    const newton = x - value / slope(x)
-    const inside = newton > Math.min(low, high) && newton < Math.max(low, high)
-    const next = inside && step < 60 ? newton : (low + high) / 2
-    if (Math.abs(next - x) <= 2 * Number.EPSILON * Math.abs(x) || next === low || next === high) return next
-    x = next
-  }
-  return x
-}
+/** The root of one equation in one unknown, bracketed, so that an answer always exists. */
 
 /** Root of f in [from, to], where f changes sign, by Brent's method (Brent 1973, ch. 4), to 2 eps |x| or the noise of f. */
 export function brent(f: (x: number) => number, from: number, to: number): number {
