@@ -84,7 +84,7 @@ test('a link opened in a fresh context gives the same numbers', async ({ page, b
 
 test('a bad link opens with a notice and the nearest good reading', async ({ page }) => {
   expect((await page.goto('/?s=h0:70,matter:0.3x&s=h0:5000'))?.status()).toBe(200)
-  const notice = page.getByRole('alert').filter({ hasText: 'cannot be read' })
+  const notice = page.getByRole('alert').filter({ hasText: 'cannot be shown' })
   await expect(notice).toContainText('matter')
   await expect(notice).toContainText('0.3x')
   await expect(notice).toContainText('h0')
@@ -96,7 +96,7 @@ test('a bad link opens with a notice and the nearest good reading', async ({ pag
 
 test('a link of which nothing can be kept still opens', async ({ page }) => {
   expect((await page.goto('/?s='))?.status()).toBe(200)
-  await expect(page.getByRole('alert').filter({ hasText: 'cannot be read' })).toBeVisible()
+  await expect(page.getByRole('alert').filter({ hasText: 'cannot be shown' })).toBeVisible()
   await expect(page.locator('.verdict')).not.toHaveCount(0)
 })
 

@@ -5,7 +5,7 @@ export function Refusal({ refusal }: { readonly refusal: Refused }) {
   const { problems, changes, link } = refusal
   return (
     <aside className="refusal" role="alert">
-      <h2>This link cannot be read as written</h2>
+      <h2>This link cannot be shown as written</h2>
       <ul>
         {problems.map(({ parameter, scenario, value, allowed, message }) => (
           <li key={`${scenario}${parameter}${message}`}>

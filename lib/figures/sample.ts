@@ -38,8 +38,10 @@ function around(time: number, reach: number): number[] {
 function pointsAt({ solution, scales }: Entry, times: readonly number[]): Sample[] {
   const values = scales(times)
   const known = new Map(boundary(solution))
-  return times.map((time, i) => [time, known.get(time) ?? values[i] ?? null])
+  return times.map((time, i) => [time, known.get(time) ?? finite(values[i])])
 }
+
+const finite = (scale: number | null | undefined) => (Number.isFinite(scale) ? (scale ?? null) : null)
 
 /** Where the scale factor is known without asking: a limit that the history itself may not include. */
 function boundary({ origin, end }: Entry['solution']): Point[] {

@@ -56,6 +56,15 @@ describe('the explorer', () => {
   })
 })
 
+it('a legal scenario that the engine cannot solve is named, and the others are shown', () => {
+  const hard = 'matter:0,eos:cpl,w0:0,wa:-5e-324,masses:0'
+  const { refusal, scenarios } = open('h0:70,as:Good', hard)
+  // Where the engine learns to solve it, there is nothing left to name.
+  if (refusal === null) return expect(scenarios).toHaveLength(2)
+  expect(refusal.problems).toMatchObject([{ scenario: 1, message: expect.stringContaining('no solution') }])
+  expect(scenarios.map(({ name }) => name)).toEqual(['Good'])
+})
+
 describe('links of the page', () => {
   const three = ['h0:70,as:One', 'h0:71,as:Two', 'h0:72,as:Three 2']
   const view = explorer({ codes: three, focus: '3', theme: 'night' })
