@@ -1,0 +1,217 @@
+/**
+ * The height of the potential: the smallest positive one for which the field, at rest until a = 10⁻⁶, has today's Ω_DE at a = 1.
+ *
+ * The field's energy only falls while the universe expands (dρ/dN = −φ̇²), so heights below Ω_DE/v(start) cannot do: the search goes
+ * up from there in ln(height), looking several times per swing of the field, and follows every peak in between to its top.
+ */
+import type { Potential } from '../../dark-energy/potential'
+import { type Arrival, type Purse, type Step, travel } from '../../numerics/ode'
+import type { Background } from './background'
+import { byScale, energyOf, type Field } from './motion'
+import { overBudget, unsolvable } from './unsolvable'
+
+/** ln a until which the field is at rest. */
+export const FROZEN = Math.log(1e-6)
+const FINAL = 1e-12
+const COARSE = 1e-6
+const MIDDLE = 1e-9
+/** Farthest apart looks lie in ln(height), and how many fall to half a swing of the field. */
+const WIDEST = 0.35
+const PER_SWING = 5
+/** Evaluations of the equation of motion for one search. */
+export const BUDGET = 200_000
+
+/** A field on its way to today. */
+export interface Shot {
+  /** ln of the height over the smallest conceivable one. */
+  readonly y: number
+  /** Ω_DE reached less the one wanted, over the one wanted; null where the universe does not come to a = 1. */
+  readonly excess: number | null
+  /** How often φ̇ changed its sign. */
+  readonly swings: number
+}
+
+export interface Search {
+  readonly potential: Potential
+  readonly background: Background
+  /** Ω_DE today. */
+  readonly target: number
+  readonly purse: Purse
+}
+
+const lowestOf = ({ potential, target }: Search): number => target / potential.value(potential.start)
+
+export const fieldOf = (search: Search, y: number): Field => ({
+  potential: search.potential,
+  background: search.background,
+  height: lowestOf(search) * Math.exp(y),
+})
+
+/** Follows the field from rest to today. */
+function shoot(search: Search, y: number, tolerance: number): Shot {
+  const field = fieldOf(search, y)
+  const state = Float64Array.of(search.potential.start, 0)
+  let [swings, sign] = [0, 0]
+  const after = (_: number, { 1: speed }: Float64Array) => {
+    if (sign * speed < 0) swings++
+    sign = Math.sign(speed)
+    return false
+  }
+  const arrival = run(field, state, tolerance, search.purse, after, false)
+  if (arrival === 'spent') throw overBudget('The field swings too often before today to be followed.')
+  const excess = arrival === 'there' ? (energyOf(field, state[0], state[1]) - search.target) / search.target : null
+  return { y, excess, swings }
+}
+
+function run(
+  field: Field,
+  state: Float64Array,
+  tolerance: number,
+  purse: Purse,
+  after: (x: number, state: Float64Array, step: Step | null) => boolean,
+  dense: boolean,
+): Arrival {
+  return travel(byScale(field), { from: FROZEN, to: 0, state, tolerance, first: 0.2, after, dense, purse })
+}
+
+/** The field's way from rest to today, step by step. */
+export function passage(field: Field, purse: Purse): { readonly steps: readonly Step[]; readonly state: Float64Array } {
+  const steps: Step[] = []
+  const state = Float64Array.of(field.potential.start, 0)
+  const after = (_x: number, _state: Float64Array, step: Step | null) => {
+    if (step) steps.push(step)
+    return false
+  }
+  if (run(field, state, FINAL, purse, after, true) === 'spent')
+    throw overBudget('The field swings too often before today to be followed.')
+  return { steps, state }
+}
+
+/** The field of the smallest height, or a problem that says how much Ω_DE can be reached. */
+export function fieldToday(search: Search): Field {
+  if (search.potential.slope(search.potential.start) === 0) return fieldOf(search, 0)
+  return fieldOf(search, polished(search, bracketOf(search)))
+}
+
+/** Two heights between which Ω_DE passes its value, at coarse accuracy. */
+function bracketOf(search: Search): readonly [Shot, Shot] {
+  const top = highest(search)
+  let before: Shot | null = null
+  let last: Shot = shoot(search, 0, COARSE)
+  let best = last.excess ?? -1
+  const note = (shot: Shot) => {
+    best = Math.max(best, shot.excess ?? -1)
+  }
+  while (last.y < top) {
+    const next = shoot(search, Math.min(top, last.y + strideAfter(last)), COARSE)
+    note(next)
+    const pair = crossing(search, before, last, next, note)
+    if (pair) return pair
+    ;[before, last] = [last, next]
+  }
+  throw unreachable(search, best)
+}
+
+/** Where a sign change lies among three successive looks. */
+function crossing(
+  search: Search,
+  before: Shot | null,
+  last: Shot,
+  next: Shot,
+  note: (shot: Shot) => void,
+): readonly [Shot, Shot] | null {
+  if (next.excess === null) return null
+  if (last.excess === null) return next.excess > 0 ? pastTurning(search, last, next) : null
+  if (last.excess < 0 !== next.excess < 0) return [last, next]
+  if (before?.excess == null || last.excess >= 0) return null
+  if (!(before.excess < last.excess && next.excess < last.excess)) return null
+  const peak = peakOf(search, before.y, last, next.y)
+  note(peak)
+  return peak.excess !== null && peak.excess >= 0 ? [before, peak] : null
+}
+
+/** Between a height with which the universe turns round too early and one with too much Ω_DE: a lower one that arrives. */
+function pastTurning(search: Search, turned: Shot, arrived: Shot): readonly [Shot, Shot] | null {
+  let [low, high] = [turned.y, arrived]
+  for (let i = 0; i < 40; i++) {
+    const middle = shoot(search, (low + high.y) / 2, COARSE)
+    if (middle.excess === null) low = middle.y
+    else if (middle.excess < 0) return [middle, high]
+    else high = middle
+  }
+  return null
+}
+
+/** First on the straight line to the target, then by steps that resolve the swings. */
+function strideAfter({ excess, swings, y }: Shot): number {
+  const widest = Math.min(WIDEST, 2 / PER_SWING / Math.max(1, swings))
+  if (y > 0 || excess === null || excess <= -1) return widest
+  return Math.min(widest, Math.max(1e-9, -1.5 * Math.log1p(excess)))
+}
+
+/** Top of a peak inside (from, to), by golden sections (Kiefer 1953) from three looks. */
+function peakOf(search: Search, from: number, inner: Shot, to: number): Shot {
+  let [low, high, best] = [from, to, inner]
+  for (let i = 0; i < 24 && high - low > 1e-5; i++) {
+    const right = high - best.y > best.y - low
+    const y = best.y + 0.381966 * (right ? high - best.y : low - best.y)
+    const shot = shoot(search, y, MIDDLE)
+    if ((shot.excess ?? -1) > (best.excess ?? -1)) {
+      ;[low, high] = right ? [best.y, high] : [low, best.y]
+      best = shot
+    } else if (right) high = y
+    else low = y
+    if (best.excess !== null && best.excess >= 0) break
+  }
+  return best
+}
+
+/** The root in a bracket: false position at coarse accuracy (Dowell & Jarratt 1971), secants at full accuracy. */
+function polished(search: Search, [one, other]: readonly [Shot, Shot]): number {
+  const [a, b] = narrowed(search, one, other)
+  let [y0, f0] = [a.y, shoot(search, a.y, FINAL).excess ?? 0]
+  let [y1, f1] = [b.y, shoot(search, b.y, FINAL).excess ?? 0]
+  if (Math.abs(f0) < Math.abs(f1)) [y0, f0, y1, f1] = [y1, f1, y0, f0]
+  for (let i = 0; i < 12 && f1 !== 0 && f1 !== f0; i++) {
+    const step = (f1 * (y1 - y0)) / (f1 - f0)
+    if (Math.abs(step) <= 1e-16 * Math.max(1, y1)) break
+    const y = y1 - step
+    const f = shoot(search, y, FINAL).excess
+    if (f === null || Math.abs(f) >= Math.abs(f1)) break
+    ;[y0, f0, y1, f1] = [y1, f1, y, f]
+  }
+  return y1
+}
+
+function narrowed(search: Search, one: Shot, other: Shot): readonly [Shot, Shot] {
+  let [a, b] = [one, other]
+  let [fa, fb] = [a.excess ?? 0, b.excess ?? 0]
+  for (let i = 0; i < 60 && Math.abs(a.y - b.y) > 1e-4 && fa !== fb; i++) {
+    const y = b.y - (fb * (b.y - a.y)) / (fb - fa)
+    const c = shoot(search, y, COARSE)
+    const fc = c.excess ?? 0
+    if (fc < 0 !== fb < 0) [a, fa] = [b, fb]
+    else fa *= fb / (fb + fc)
+    ;[b, fb] = [c, fc]
+    if (Math.abs(fc) < 1e-5) break
+  }
+  return [a, b]
+}
+
+const scratch = new Float64Array(3)
+
+/** ln of the greatest height that is tried: the field at rest then weighs as much as all the rest at a = 10⁻⁶. */
+function highest({ background, target }: Search): number {
+  background.into(scratch, FROZEN)
+  // Alone it loses at most a factor a⁻⁶ = 10³⁶ until today.
+  return scratch[0] > 0 ? Math.log(Math.max(scratch[0] / target, 1e12)) : Math.log(1e37 * Math.max(1, 1 / target))
+}
+
+function unreachable(search: Search, best: number): Error {
+  const most = Number((search.target * (1 + best)).toPrecision(3))
+  if (best <= -1)
+    return unsolvable('With this field the universe does not grow to its present size, whatever the height of V.')
+  return unsolvable(
+    `This field reaches Ω_DE = ${most} today at most, and ${Number(search.target.toPrecision(6))} is wanted.`,
+  )
+}
