@@ -25,7 +25,7 @@ export default async function Page(props: Props) {
     <div className="page" data-theme={view.place.theme}>
       <Header themes={view.links.themes} theme={view.place.theme} />
       <main>
-        <h1>{view.title}</h1>
+        <h1 className={view.titled ? undefined : 'spoken'}>{view.title}</h1>
         {view.refusal && <Refusal refusal={view.refusal} />}
         <Verdicts scenarios={view.scenarios} focus={view.place.focus} />
         <Figure view={view.figure} />

@@ -1,7 +1,7 @@
 import type { Explorer } from '../../lib/answers/explorer'
 import type { FieldGroup } from '../../lib/words/fields'
 import { FieldRow } from './field'
-import { Symbols } from './symbol'
+import { Sentence, Symbols } from './symbol'
 
 /** The parameters of the scenario in focus as a plain form; the others travel along unseen. */
 export function Ingredients({ view }: { readonly view: Explorer }) {
@@ -86,7 +86,7 @@ function Group({ group }: { readonly group: FieldGroup }) {
           <span className="formula">
             <Symbols markup={family.formula} />
           </span>{' '}
-          {family.caution}
+          <Sentence text={family.caution} />
         </p>
       )}
     </fieldset>

@@ -1,4 +1,5 @@
 import type { Explorer } from '../../lib/answers/explorer'
+import { Sentence } from './symbol'
 
 export function Moments({ view }: { readonly view: Explorer }) {
   const scenario = view.scenarios[view.place.focus]
@@ -25,7 +26,9 @@ export function Moments({ view }: { readonly view: Explorer }) {
           ))}
         </tbody>
       </table>
-      <p className="because">{scenario?.because}</p>
+      <p className="because">
+        <Sentence text={scenario?.because ?? ''} />
+      </p>
     </section>
   )
 }

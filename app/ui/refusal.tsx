@@ -1,4 +1,5 @@
 import type { Refusal as Refused } from '../../lib/answers/explorer'
+import { Sentence } from './symbol'
 
 /** Names what is wrong with an address and says what is shown in its place. */
 export function Refusal({ refusal }: { readonly refusal: Refused }) {
@@ -9,8 +10,8 @@ export function Refusal({ refusal }: { readonly refusal: Refused }) {
       <ul>
         {problems.map(({ parameter, scenario, value, allowed, message }) => (
           <li key={`${scenario}${parameter}${message}`}>
-            <b>{parameter}</b> {value && <q>{value}</q>} {scenario !== null && `in scenario ${scenario + 1}`}: {message}{' '}
-            Allowed: {allowed}.
+            <b>{parameter}</b> {value && <q>{value}</q>} {scenario !== null && `in scenario ${scenario + 1}`}:{' '}
+            <Sentence text={message} /> Allowed: {allowed}.
           </li>
         ))}
       </ul>
@@ -18,7 +19,7 @@ export function Refusal({ refusal }: { readonly refusal: Refused }) {
         <p>Nothing of it could be kept; the examples are shown instead.</p>
       ) : (
         <p>
-          Shown is the nearest good reading: {changes.join(' ')} <a href={link}>Open that reading</a>
+          Shown is the nearest good reading: <Sentence text={changes.join(' ')} /> <a href={link}>Open that reading</a>
         </p>
       )}
     </aside>

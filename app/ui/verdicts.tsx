@@ -1,5 +1,6 @@
 import type { ScenarioView } from '../../lib/answers/explorer'
 import { Key } from './key'
+import { Sentence } from './symbol'
 
 interface Props {
   readonly scenarios: readonly ScenarioView[]
@@ -31,7 +32,7 @@ function VerdictOf({ scenario, current }: { readonly scenario: ScenarioView; rea
       {!proven && <p className="aside">The ending is found by sampling, not proven.</p>}
       {notices.map((notice) => (
         <p key={notice.message} className="aside notice">
-          {notice.message} {notice.link && <a href={notice.link}>Correct it</a>}
+          <Sentence text={notice.message} /> {notice.link && <a href={notice.link}>Correct it</a>}
         </p>
       ))}
     </article>

@@ -46,6 +46,8 @@ export interface Refusal {
 
 export interface Explorer {
   readonly title: string
+  /** True where the title says more than the names of the scenarios. */
+  readonly titled: boolean
   readonly place: Place
   readonly scenarios: readonly ScenarioView[]
   readonly figure: LongView
@@ -70,8 +72,10 @@ export function explorer(asked: Asked): Explorer {
   const scenarios = solutions.map(({ scenario }) => scenario)
   const place = readPlace(asked.focus, asked.theme, scenarios.length)
   const focus = solutions[place.focus] as Solution
+  const titled = asked.codes.length === 0
   return {
-    title: asked.codes.length === 0 ? DEMO.title : joined(solutions.map(({ label }) => label)),
+    titled,
+    title: titled ? DEMO.title : joined(solutions.map(({ label }) => label)),
     place,
     scenarios: solutions.map((solution, slot) => scenarioView(solution, slot, scenarios, place)),
     figure: longView(solutions.map(drawable)),

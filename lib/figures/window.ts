@@ -70,7 +70,8 @@ function lastEvent({ end }: Seen, limit: number): number | null {
 
 function topOf({ solution, scales }: Entry, to: number): number {
   const { end } = solution
-  if (end.turnaround !== null) return Math.min(TURNING_TOP, end.turnaround.scale * HEADROOM)
+  const turn = end.turnaround
+  if (turn !== null && turn.time <= to) return Math.min(TURNING_TOP, turn.scale * HEADROOM)
   const times = [0.25, 0.5, 0.75, 1].map((part) => part * Math.min(to, end.time ?? to))
   const reached = Math.max(...scales(times).map((scale) => scale ?? PLAIN_TOP), end.kind === 'rip' ? PLAIN_TOP : 0)
   return Math.min(PLAIN_TOP, reached * HEADROOM)

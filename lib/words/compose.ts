@@ -1,11 +1,12 @@
 /** From the fields of the form back to an address; whatever was typed arrives there, good or not, and the page judges it. */
-import { FAMILIES } from '../dark-energy'
 import * as own from '../scenario/parameters'
 import { MOST_SCENARIOS } from '../scenario/query'
 import { readScenario } from '../scenario/read'
 import { writeScenario } from '../scenario/write'
+import { familyTexts } from './compose-family'
 import { CLOSES, LIGHT } from './fields'
 import { placeKeys, readPlace } from './link'
+import { listText, numberText } from './typed'
 
 /** Fields by name; `s` holds every scenario of the page, that in focus included. */
 export interface Sent {
@@ -31,7 +32,7 @@ function addressed(code: string): string {
 
 /** A scenario code with the keys that the choices of the form leave in force; an empty field is its default. */
 export function codeOf(fields: ReadonlyMap<string, string>): string {
-  const texts = fields.get(LIGHT) === 'none' ? new Map([...fields, [own.CMB.key, '0']]) : fields
+  const texts = new Map([...fields, ...noLight(fields), ...familyTexts(fields)])
   const pairs = keysOf(fields).flatMap((key) => {
     const text = written(key, texts.get(key) ?? '')
     return text === '' ? [] : [`${key}:${text}`]
@@ -40,8 +41,6 @@ export function codeOf(fields: ReadonlyMap<string, string>): string {
 }
 
 function keysOf(fields: ReadonlyMap<string, string>): string[] {
-  const family = FAMILIES.find((one) => one.key === fields.get(own.EOS.key))
-  const keys = new Set((family?.parameters ?? []).map((one) => one.key))
   return [
     own.H0.key,
     own.MATTER.key,
@@ -49,10 +48,14 @@ function keysOf(fields: ReadonlyMap<string, string>): string[] {
     fields.get(CLOSES) === 'curvature' ? own.DARK.key : own.CURVATURE.key,
     ...lightKeys(fields.get(LIGHT)),
     own.EOS.key,
-    ...keys,
+    ...familyTexts(fields).keys(),
     own.BEYOND.key,
     own.AS.key,
   ]
+}
+
+function noLight(fields: ReadonlyMap<string, string>): [string, string][] {
+  return fields.get(LIGHT) === 'none' ? [[own.CMB.key, '0']] : []
 }
 
 function lightKeys(light: string | undefined): string[] {
@@ -60,27 +63,7 @@ function lightKeys(light: string | undefined): string[] {
   return light === 'none' ? [own.CMB.key] : [own.CMB.key, own.NU.key, own.MASSES.key]
 }
 
-function written(key: string, typed: string): string {
-  if (key === own.AS.key) return typed.trim().normalize('NFC')
-  if (key === own.MASSES.key) return lists(typed)
-  const list = FAMILIES.some((one) => one.parameters.some((p) => p.key === key && p.kind === 'list'))
-  return list ? lists(typed) : plain(typed)
-}
-
-/** A number as a person types it: decimal comma, true minus sign, blanks between thousands. No comma is left to end a pair. */
-function plain(typed: string): string {
-  return typed
-    .replace(/[\s\u2009\u202f\u00a0]/g, '')
-    .replaceAll('−', '-')
-    .replace(/^([^,]*),([^,]*)$/, '$1.$2')
-    .replaceAll(',', ';')
-}
-
-/** Numbers parted by blanks, semicolons or underscores. */
-function lists(typed: string): string {
-  return typed
-    .split(/[\s;_]+/)
-    .filter((part) => part !== '')
-    .map(plain)
-    .join('_')
+function written(key: string, text: string): string {
+  if (key === own.AS.key) return text.trim().normalize('NFC')
+  return key === own.MASSES.key ? listText(text) : numberText(text)
 }

@@ -47,6 +47,8 @@ export interface Form {
 /** Names of the form's own choices, which are not keys of the scenario code. */
 export const CLOSES = 'closes'
 export const LIGHT = 'light'
+/** The law before it was changed. */
+export const WAS = 'was'
 
 const CLOSING: readonly Choice[] = [
   { value: 'dark', label: 'dark energy' },
@@ -158,8 +160,9 @@ function choiceField(name: string, label: string, meaning: string, value: string
   return { kind: 'choice', name, symbol: '', label, meaning, value, choices }
 }
 
-function hiddenFields({ radiation }: Scenario, budget: Budget): Form['hidden'] {
-  if (radiation.kind === 'given') return []
+function hiddenFields({ radiation, eos }: Scenario, budget: Budget): Form['hidden'] {
+  const was = { name: WAS, value: eos }
+  if (radiation.kind === 'given') return [was]
   const massless = budget.photons + budget.masslessNeutrinos
-  return [{ name: own.RADIATION.key, value: String(Number(massless.toPrecision(4))) }]
+  return [was, { name: own.RADIATION.key, value: String(Number(massless.toPrecision(4))) }]
 }

@@ -33,6 +33,8 @@ describe('the shared window', () => {
   it('does not stretch to an ending that is too far', () => {
     const far = sinking(0.0001)
     expect(far.solution.end.time ?? 0).toBeGreaterThan(windowOf([far]).to)
+    // A turn that is not shown does not make the window high: the curve fills at least half of it.
+    expect(windowOf([far]).top).toBeLessThan(2 * (far.scales([windowOf([far]).to])[0] ?? 0))
     expect(longView([far]).curves[0]).toMatchObject({ note: expect.stringContaining('later: Big Crunch') })
   })
 

@@ -83,7 +83,12 @@ describe('choices of the form', () => {
   it('another law takes the keys that it shares and the defaults of the rest', () => {
     const fields = sent('eos:cpl,w0:-0.9,wa:0.4', { eos: 'constant' })
     expect(canonical(fields)).toBe('h0:67.66,matter:0.3111,eos:constant')
-    for (const { key } of FAMILIES) expect(canonical(sent('h0:70', { eos: key }))).toContain('h0:70')
+    expect(canonical(sent('eos:constant,w:-1.2', { eos: 'cpl' }))).toBe('h0:67.66,matter:0.3111,eos:cpl')
+  })
+
+  it.each(FAMILIES.flatMap(({ key }) => FAMILIES.map((other) => [other.key, key])))('%s can become %s', (from, to) => {
+    const before = canonical(sent('h0:70', { eos: from }))
+    expect(canonical(sent(before, { eos: to }))).toMatch(to === 'lambda' ? /^h0:70,matter:0\.3111$/ : `eos:${to}`)
   })
 
   it('another closing component leaves the universe as it is', () => {
