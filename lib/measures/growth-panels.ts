@@ -1,0 +1,113 @@
+/**
+ * The growth of a density contrast D over a zone, panel by panel. With dt = dN/E and q = a² dD/dt the equation of growth
+ *   D″ + (2 + (ln E)′) D′ = (3/2) Ω_s D,  Ω_s = ρ_s/ρ_c,  ρ_s the pressureless part of the density,
+ * is dD = a⁻² q dt, dq = (3/2) a² ρ_s D dt (Peebles 1980, The Large-Scale Structure of the Universe, section 10):
+ * regular where E vanishes, and a sum of positive terms, so that D and q both keep their relative accuracy.
+ */
+
+import type { Zone } from '../history/zone'
+import type { Model } from '../model'
+import { energyRatio, logSlope } from '../neutrinos/energy'
+import { evaluate, NODE_COUNT, sumAtOne } from '../numerics/chebyshev'
+import { solvePair } from '../numerics/linear-pair'
+
+/** D and q = a² dD/dt at one place, and a bound on the relative error that both have gathered. */
+export interface State {
+  readonly contrast: number
+  readonly flow: number
+  readonly error: number
+}
+
+interface GrowthPanel {
+  readonly from: number
+  readonly to: number
+  /** Chebyshev series of D and q. */
+  readonly contrast: Float64Array
+  readonly flow: Float64Array
+  /** At its end. */
+  readonly error: number
+}
+
+/** Panels in a variable that grows with time: the zone's own. */
+export interface Stretch {
+  readonly zone: Zone
+  readonly panels: readonly GrowthPanel[]
+  readonly end: State
+  /** False where the doubles ended before the zone. */
+  readonly whole: boolean
+}
+
+/** Last two coefficients over the value: what a panel may leave out. */
+const RESOLVED = 1e-13
+const NARROWEST = 1e-9
+const MOST_PANELS = 2000
+/** Tuned for few panels. */
+const WIDTH = 2
+const GROWTH = 1.7
+
+const samples = { time: new Float64Array(NODE_COUNT), conformal: new Float64Array(NODE_COUNT) }
+const [alpha, beta] = [new Float64Array(NODE_COUNT), new Float64Array(NODE_COUNT)]
+
+/** From the zone's beginning to its end, or as far as doubles reach. */
+export function growThrough(model: Model, zone: Zone, start: State): Stretch {
+  const panels: GrowthPanel[] = []
+  let state = start
+  let [from, width] = [zone.from, Math.min(WIDTH, zone.to - zone.from)]
+  for (let tried = 0; from < zone.to && tried < MOST_PANELS; tried++) {
+    const to = from + width >= zone.to - width * 0.05 ? zone.to : from + width
+    if (!sample(model, zone, from, to)) return { zone, panels, end: state, whole: false }
+    const rounding = roundingOver(zone, from, to)
+    const pair = solvePair(alpha, beta, (to - from) / 2, state.contrast, state.flow)
+    const worst = pair ? pair.left / Math.max(RESOLVED, rounding) : Number.POSITIVE_INFINITY
+    if (worst > 1 && to - from > NARROWEST) {
+      width = (to - from) * Math.max(0.35, Math.min(0.75, worst ** (-1 / 15)))
+      continue
+    }
+    if (!pair) break
+    const error = state.error + 2 * pair.left + 4 * rounding
+    panels.push({ from, to, contrast: pair.u, flow: pair.v, error })
+    state = { contrast: sumAtOne(pair.u), flow: sumAtOne(pair.v), error }
+    width = (to - from) * Math.min(GROWTH, Math.max(1, 0.95 * (worst + 1e-3) ** (-1 / 15)))
+    from = to
+  }
+  return { zone, panels, end: state, whole: from >= zone.to }
+}
+
+/** α = a⁻² dt/ds and β = (3/2) a² ρ_s dt/ds at the nodes; false where they leave the doubles. */
+function sample(model: Model, zone: Zone, from: number, to: number): boolean {
+  zone.sampleInto(samples, (from + to) / 2, (to - from) / 2)
+  for (let k = 0; k < NODE_COUNT; k++) {
+    const rate = samples.time[k]
+    // Where E² exceeds the doubles, no time is left for growth.
+    const inverseScale = rate > 0 ? samples.conformal[k] / rate : 0
+    alpha[k] = samples.conformal[k] * inverseScale
+    beta[k] = 1.5 * rate * sourceOver(model, inverseScale)
+    if (!(Number.isFinite(alpha[k]) && Number.isFinite(beta[k]))) return false
+  }
+  return true
+}
+
+/** a² ρ_s: what clusters, cold matter and the part ρ − 3p of massive neutrinos. */
+export function sourceOver({ budget }: Model, inverseScale: number): number {
+  let relativistic = 0
+  for (const { y, masslessDensity } of budget.states) {
+    const here = y / inverseScale
+    relativistic += masslessDensity * energyRatio(here) * logSlope(here)
+  }
+  return (budget.coldMatter + relativistic * inverseScale) * inverseScale
+}
+
+/** Rounding of the integrands, as E² carries it. */
+function roundingOver(zone: Zone, from: number, to: number): number {
+  const edge = 0.005 * (to - from)
+  const conditioning = [from + edge, (from + to) / 2, to - edge].map((s) => zone.conditioning(s))
+  return Number.EPSILON * (2 + Math.max(...conditioning))
+}
+
+/** D, q and the error at s; null beyond the panels. */
+export function stateIn({ panels }: Stretch, s: number): State | null {
+  const panel = panels.find((one) => s <= one.to)
+  if (!panel || s < panels[0].from) return null
+  const x = Math.max(-1, Math.min(1, (2 * (s - panel.from)) / (panel.to - panel.from) - 1))
+  return { contrast: evaluate(panel.contrast, x), flow: evaluate(panel.flow, x), error: panel.error }
+}
