@@ -8,24 +8,30 @@ import type { Window } from './window'
 
 type Told = Pick<Solution, 'scenario' | 'label' | 'origin' | 'end' | 'measures' | 'moments'>
 
-export function longViewCaption(solutions: readonly Told[], ribbons: boolean): string {
-  const parts = ['Scale factor a against time from now.', marksOf(solutions)]
-  if (ribbons) parts.push('Ribbons: what dominates; the line above them: the expansion accelerates.')
-  const followed = solutions.filter(({ scenario }) => extrapolates(scenario)).map(({ label }) => label)
-  if (followed.length > 0)
-    parts.push(
-      `Hatched: ${joined(followed)} ${followed.length > 1 ? 'follow' : 'follows'} a law of dark energy beyond the data it describes.`,
-    )
-  return parts.filter((part) => part !== '').join(' ')
+/** What a caption has to explain: the signs that are drawn. */
+interface Shown {
+  readonly marks: ReadonlySet<string>
+  readonly ribbons: boolean
 }
 
-function marksOf(solutions: readonly Told[]): string {
-  const begins = solutions.some(({ origin }) => origin.time !== null)
-  const ends = solutions.some(({ end }) => end.time !== null)
-  const signs = [begins ? 'ring: origin' : '', ends ? 'cross: ending' : '', 'arrow: goes on'].filter(
-    (sign) => sign !== '',
-  )
-  return `${capital(signs.join('; '))}.`
+const SIGNS = [
+  ['ring', 'ring: origin'],
+  ['cross', 'cross: ending'],
+  ['arrow', 'arrow: goes on'],
+] as const
+
+export function longViewCaption(solutions: readonly Told[], { marks, ribbons }: Shown): string {
+  const signs = SIGNS.filter(([kind]) => marks.has(kind)).map(([, words]) => words)
+  const parts = ['Scale factor a against time from now.', `${capital(signs.join('; '))}.`]
+  if (ribbons) parts.push('Ribbons: what dominates; the line above them: the expansion accelerates.')
+  const followed = solutions.filter(({ scenario }) => extrapolates(scenario)).map(({ label }) => label)
+  if (followed.length > 0) parts.push(hatching(followed))
+  return parts.join(' ')
+}
+
+function hatching(labels: readonly string[]): string {
+  const verb = labels.length > 1 ? 'follow' : 'follows'
+  return `Hatched: ${joined(labels)} ${verb} a law of dark energy beyond the data it describes.`
 }
 
 export function longViewText(solutions: readonly Told[], { from, to, top }: Window): string {

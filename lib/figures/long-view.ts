@@ -57,10 +57,10 @@ export function longView(entries: readonly Entry<Drawn>[]): LongView {
     window,
     curves,
     hatched: curves.some(({ extrapolated }) => extrapolated),
-    caption: longViewCaption(
-      solutions,
-      curves.some(({ eras }) => eras !== null),
-    ),
+    caption: longViewCaption(solutions, {
+      marks: new Set(curves.flatMap(({ marks }) => marks.map(({ kind }) => kind))),
+      ribbons: curves.some(({ eras }) => eras !== null),
+    }),
     alternative: longViewText(solutions, window),
   }
 }
