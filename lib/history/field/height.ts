@@ -12,12 +12,14 @@ import { overBudget, unsolvable } from './unsolvable'
 
 /** ln a until which the field is at rest. */
 export const FROZEN = Math.log(1e-6)
-const FINAL = 1e-12
+const FINAL = 3e-12
 const COARSE = 1e-6
 const MIDDLE = 1e-9
 /** Farthest apart looks lie in ln(height), and how many fall to half a swing of the field. */
 const WIDEST = 0.35
 const PER_SWING = 5
+/** Heights at which the field swings more often before today are not tried. */
+const MOST_SWINGS = 30
 /** Evaluations of the equation of motion for one search. */
 export const BUDGET = 200_000
 
@@ -98,36 +100,38 @@ function bracketOf(search: Search): readonly [Shot, Shot] {
   const top = highest(search)
   let before: Shot | null = null
   let last: Shot = shoot(search, 0, COARSE)
-  let best = last.excess ?? -1
-  const note = (shot: Shot) => {
-    best = Math.max(best, shot.excess ?? -1)
-  }
-  while (last.y < top) {
+  let best = last
+  while (last.y < top && last.swings < MOST_SWINGS) {
     const next = shoot(search, Math.min(top, last.y + strideAfter(last)), COARSE)
-    note(next)
-    const pair = crossing(search, before, last, next, note)
+    if (excessOf(next) > excessOf(best)) best = next
+    const pair = signChange(search, last, next)
     if (pair) return pair
+    if (before && mayRise(before, last, next, best)) {
+      best = peakOf(search, before.y, last, next.y)
+      if (excessOf(best) >= 0) return [before, best]
+    }
     ;[before, last] = [last, next]
   }
-  throw unreachable(search, best)
+  throw unreachable(search, best, last)
 }
 
-/** Where a sign change lies among three successive looks. */
-function crossing(
-  search: Search,
-  before: Shot | null,
-  last: Shot,
-  next: Shot,
-  note: (shot: Shot) => void,
-): readonly [Shot, Shot] | null {
+/** A universe that does not arrive has no Ω_DE at all. */
+const excessOf = (shot: Shot): number => shot.excess ?? -1
+
+function signChange(search: Search, last: Shot, next: Shot): readonly [Shot, Shot] | null {
   if (next.excess === null) return null
   if (last.excess === null) return next.excess > 0 ? pastTurning(search, last, next) : null
-  if (last.excess < 0 !== next.excess < 0) return [last, next]
-  if (before?.excess == null || last.excess >= 0) return null
-  if (!(before.excess < last.excess && next.excess < last.excess)) return null
-  const peak = peakOf(search, before.y, last, next.y)
-  note(peak)
-  return peak.excess !== null && peak.excess >= 0 ? [before, peak] : null
+  return last.excess < 0 === next.excess < 0 ? null : [last, next]
+}
+
+/** Whether the peak between three looks can be the highest so far: by the parabola through them, with as much again for its error. */
+function mayRise(before: Shot, last: Shot, next: Shot, best: Shot): boolean {
+  const [a, b, c] = [excessOf(before), excessOf(last), excessOf(next)]
+  if (!(a < b && c < b) || b >= 0) return false
+  const [p, q] = [(b - a) / (last.y - before.y), (c - b) / (next.y - last.y)]
+  const bend = (p - q) / (next.y - before.y)
+  const slope = p - bend * (last.y - before.y)
+  return b + (slope * slope) / (2 * bend) >= Math.min(0, excessOf(best))
 }
 
 /** Between a height with which the universe turns round too early and one with too much Ω_DE: a lower one that arrives. */
@@ -207,11 +211,15 @@ function highest({ background, target }: Search): number {
   return scratch[0] > 0 ? Math.log(Math.max(scratch[0] / target, 1e12)) : Math.log(1e37 * Math.max(1, 1 / target))
 }
 
-function unreachable(search: Search, best: number): Error {
-  const most = Number((search.target * (1 + best)).toPrecision(3))
-  if (best <= -1)
+function unreachable(search: Search, best: Shot, last: Shot): Error {
+  if (best.excess === null)
     return unsolvable('With this field the universe does not grow to its present size, whatever the height of V.')
+  const most = Number((search.target * (1 + best.excess)).toPrecision(3))
+  const far =
+    last.swings < MOST_SWINGS
+      ? ''
+      : ` Heights at which it swings more than ${MOST_SWINGS} times before today are not tried.`
   return unsolvable(
-    `This field reaches Ω_DE = ${most} today at most, and ${Number(search.target.toPrecision(6))} is wanted.`,
+    `This field reaches Ω_DE = ${most} today at most, and ${Number(search.target.toPrecision(6))} is wanted.${far}`,
   )
 }

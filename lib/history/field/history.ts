@@ -1,0 +1,116 @@
+/** The whole history of a scenario with a scalar field: the past as a law in N, the future as far as it is one, else by time. */
+import type { Potential } from '../../dark-energy/potential'
+import { powerLaw } from '../../dark-energy/power-law'
+import { type Model, modelOf } from '../../model'
+import type { Purse } from '../../numerics/ode'
+import type { Budget } from '../../scenario/budget'
+import { type Arm, armOf } from '../arm'
+import { endOf } from '../ending'
+import type { History } from '../history'
+import { originOf } from '../origin'
+import { lookAhead, type Outlook } from './ahead'
+import { backgroundOf } from './background'
+import { crunchAfter, endAhead } from './endings'
+import { BUDGET, fieldToday, passage } from './height'
+import { fieldLaw } from './law'
+import { energyOf } from './motion'
+import { type Route, restOf, timedArm } from './timed-arm'
+import { trailByScale } from './trail'
+import { overBudget, unsolvable } from './unsolvable'
+import { legsBetween, returnAfter, travelOn, type Voyage } from './voyage'
+
+type Ahead = Pick<History, 'future' | 'home' | 'descent' | 'unfollowed' | 'end'>
+
+/** The field as it is today. */
+interface Now extends Route {
+  readonly state: Float64Array
+  readonly past: Arm
+  readonly purse: Purse
+}
+
+export function fieldHistory(budget: Budget, potential: Potential, hold: boolean): History {
+  if (!(budget.dark > 0)) {
+    const given = Number(budget.dark.toPrecision(6))
+    throw unsolvable(
+      `A scalar field at rest needs a positive density, and Ω_DE is ${given}.`,
+      budget.closes === 'dark' ? 'matter' : 'dark',
+    )
+  }
+  const now = today(budget, potential)
+  const w = now.past.model.law.w(0)
+  const ahead = hold ? held(now, modelOf(budget, powerLaw(w))) : followed(now)
+  // Before a bounce in the frozen era the same universe came in, mirrored.
+  return { past: now.past, before: ahead.future, origin: originOf(now.past, ahead.future), ...ahead }
+}
+
+function today(budget: Budget, potential: Potential): Now {
+  const purse = { left: BUDGET }
+  const field = fieldToday({ potential, background: backgroundOf(budget), target: budget.dark, purse })
+  const { steps, state } = passage(field, purse)
+  const energy = energyOf(field, state[0], state[1])
+  const law = fieldLaw(trailByScale(field, steps, 0), energy, { before: 0, after: 0 })
+  return { field, budget, today: energy, state, purse, past: armOf(modelOf(budget, law), -1) }
+}
+
+/** w of today for ever: an explicit law, whose contraction mirrors its expansion. */
+function held(now: Now, model: Model): Ahead {
+  const future = armOf(model, 1)
+  const home = future.end.kind === 'none' ? now.past : armOf(model, -1)
+  return { future, home, descent: future, end: endOf(future, home) }
+}
+
+function followed(now: Now): Ahead {
+  const { field, state, purse } = now
+  // With V ≥ 0 in flat or open space E² is a sum of positive terms.
+  const mayTurn = !field.potential.positive || now.budget.curvature < 0
+  const outlook = lookAhead(field, state, purse, mayTurn)
+  if (outlook.kind !== 'shallow') return expanding(now, outlook)
+  const voyage = travelOn(field, state, purse)
+  if (voyage.end === 'expanding' && voyage.turns.length === 0)
+    return expanding(now, lookAhead(field, state, purse, false))
+  return turning(now, voyage)
+}
+
+function expanding(now: Now, outlook: Outlook): Ahead {
+  if (outlook.kind === 'spent' || outlook.kind === 'shallow')
+    throw overBudget('The future of this field takes too many steps.')
+  if (outlook.kind === 'swinging' && now.budget.curvature < 0)
+    throw overBudget('The field swings too often before this closed universe turns round.')
+  const trail = trailByScale(now.field, outlook.steps, outlook.end)
+  const law = fieldLaw(trail, now.today, { before: 0, after: outlook.exponent })
+  const future = armOf(modelOf(now.budget, law), 1)
+  return { future, home: now.past, descent: future, end: endAhead(now.field, outlook) }
+}
+
+function turning(now: Now, voyage: Voyage): Ahead {
+  const { steps, turns, end } = voyage
+  if (end === 'spent' || turns.length === 0) throw overBudget('The future of this field takes too many steps.')
+  if (end === 'expanding')
+    throw overBudget('This universe turns round, bounces and expands again, which is not followed.')
+  const turn = turns[0]
+  const last = steps[steps.length - 1].to
+  const future = timedArm(now, legsBetween(steps, 0, turn.tau), true, 1, { kind: 'root', N: turn.N, certain: false })
+  const back = turns.length === 1 && end === 'crunch' ? returnAfter(steps, turn.tau) : null
+  if (back === null) return unfollowed(now, voyage, future)
+  const descent = timedArm(now, legsBetween(steps, turn.tau, back), false, 1, future.end)
+  const home = timedArm(now, legsBetween(steps, back, last), true, -1, { kind: 'none', farRoot: null })
+  return { future, descent, home, end: crunchAfter(future, descent.time.total + home.time.total, 1) }
+}
+
+/** Where the contraction is no single way back to a = 0 in doubles, only its length is told. */
+function unfollowed(now: Now, { steps, turns, state, end }: Voyage, future: Arm): Ahead {
+  const rest = restOf(legsBetween(steps, turns[0].tau, steps[steps.length - 1].to), state)
+  const because =
+    turns.length > 1
+      ? 'the contraction is interrupted by another turning point, and is not followed scale factor by scale factor'
+      : end === 'overflow'
+        ? 'the densities of the contraction leave the range of floating-point numbers'
+        : 'the contraction is not followed'
+  return {
+    future,
+    descent: future,
+    home: now.past,
+    unfollowed: { ...rest, because },
+    end: crunchAfter(future, rest.time, turns.length),
+  }
+}

@@ -1,0 +1,82 @@
+/** Where the field is at each scale factor of one stretch of the history. */
+import { type Step, valueIn } from '../../numerics/ode'
+import { brent } from '../../numerics/roots'
+import { expansionOf, type Field, RATE, SCALE, TIMED_PHI, TIMED_SPEED } from './motion'
+
+/** Places in what `into` writes. */
+export const [AT_PHI, AT_SPEED, AT_RATE] = [0, 1, 2]
+
+export interface Trail {
+  readonly field: Field
+  /** Ascending values of N between which the trail is smooth; it holds from the first to the last. */
+  readonly edges: Float64Array
+  /** Writes φ, φ̇ and H (negative while contracting). */
+  into(out: Float64Array, N: number): void
+}
+
+/** Index of the interval of ascending edges that holds the value; the nearest one outside. */
+export function intervalOf(edges: Float64Array, value: number, guess: number): number {
+  const last = edges.length - 2
+  if (guess <= last && edges[guess] <= value && value <= edges[guess + 1]) return guess
+  let [low, high] = [0, last + 1]
+  while (high - low > 1) {
+    const middle = (low + high) >> 1
+    if (edges[middle] <= value) low = middle
+    else high = middle
+  }
+  return low
+}
+
+/** From steps in N, ascending, while the universe expands; `end` lies in the last of them. */
+export function trailByScale(field: Field, steps: readonly Step[], end: number): Trail {
+  const edges = Float64Array.from([...steps.map((one) => one.from), end])
+  let last = 0
+  return {
+    field,
+    edges,
+    into(out, N) {
+      last = intervalOf(edges, N, last)
+      const step = steps[last]
+      out[0] = valueIn(step, 0, N)
+      out[1] = valueIn(step, 1, N)
+      out[2] = Math.sqrt(expansionOf(field, N, out[0], out[1]))
+    },
+  }
+}
+
+/** Part of a step in τ on which N is monotonic. */
+export interface Leg {
+  readonly step: Step
+  readonly from: number
+  readonly to: number
+}
+
+/** N at τ. */
+export const scaleIn = (leg: Leg, tau: number): number => valueIn(leg.step, SCALE, tau)
+
+/** τ at N on a leg; its nearer end where N lies outside. */
+export function timeAt(leg: Leg, N: number): number {
+  const f = (tau: number) => scaleIn(leg, tau) - N
+  const [left, right] = [f(leg.from), f(leg.to)]
+  if (left === 0 || right === 0 || left > 0 === right > 0) return Math.abs(left) < Math.abs(right) ? leg.from : leg.to
+  return brent(f, leg.from, leg.to)
+}
+
+/** From legs in order of ascending N. */
+export function trailByTime(field: Field, legs: readonly Leg[]): Trail {
+  const ends = legs.map((leg) => [scaleIn(leg, leg.from), scaleIn(leg, leg.to)] as const)
+  const edges = Float64Array.from([...ends.map((pair) => Math.min(...pair)), Math.max(...ends[ends.length - 1])])
+  let last = 0
+  return {
+    field,
+    edges,
+    into(out, N) {
+      last = intervalOf(edges, N, last)
+      const { step } = legs[last]
+      const tau = timeAt(legs[last], N)
+      out[0] = valueIn(step, TIMED_PHI, tau)
+      out[1] = valueIn(step, TIMED_SPEED, tau)
+      out[2] = valueIn(step, RATE, tau)
+    },
+  }
+}
