@@ -19,6 +19,7 @@ export interface State {
 }
 
 interface GrowthPanel {
+  readonly zone: Zone
   readonly from: number
   readonly to: number
   /** Chebyshev series of D and q. */
@@ -28,19 +29,19 @@ interface GrowthPanel {
   readonly error: number
 }
 
-/** Panels in a variable that grows with time: the zone's own. */
-export interface Stretch {
-  readonly zone: Zone
-  readonly panels: readonly GrowthPanel[]
-  readonly end: State
-  /** False where the doubles ended before the zone. */
-  readonly whole: boolean
+/** Panels through zones that follow one another, in the variables of the zones, made as far as they have been asked for. */
+export interface Path {
+  readonly zones: readonly Zone[]
+  readonly panels: GrowthPanel[]
+  readonly rest: Iterator<GrowthPanel>
 }
 
 /** Last two coefficients over the value: what a panel may leave out. */
 const RESOLVED = 1e-13
 const NARROWEST = 1e-9
 const MOST_PANELS = 2000
+/** dt/ds beyond which E² is no longer a normal double. */
+const SLOWEST = 1e150
 /** Tuned for few panels. */
 const WIDTH = 2
 const GROWTH = 1.7
@@ -48,14 +49,28 @@ const GROWTH = 1.7
 const samples = { time: new Float64Array(NODE_COUNT), conformal: new Float64Array(NODE_COUNT) }
 const [alpha, beta] = [new Float64Array(NODE_COUNT), new Float64Array(NODE_COUNT)]
 
-/** From the zone's beginning to its end, or as far as doubles reach. */
-export function growThrough(model: Model, zone: Zone, start: State): Stretch {
-  const panels: GrowthPanel[] = []
+/** In zones whose variable grows with time. */
+export const pathOf = (model: Model, zones: readonly Zone[], start: State): Path => ({
+  zones,
+  panels: [],
+  rest: panelsAlong(model, zones, start),
+})
+
+function* panelsAlong(model: Model, zones: readonly Zone[], start: State): Generator<GrowthPanel> {
+  let state: State | null = start
+  for (const zone of zones) {
+    state = yield* panelsIn(model, zone, state)
+    if (state === null) return
+  }
+}
+
+/** From the zone's beginning to its end; null where doubles end before. */
+function* panelsIn(model: Model, zone: Zone, start: State): Generator<GrowthPanel, State | null> {
   let state = start
   let [from, width] = [zone.from, Math.min(WIDTH, zone.to - zone.from)]
   for (let tried = 0; from < zone.to && tried < MOST_PANELS; tried++) {
     const to = from + width >= zone.to - width * 0.05 ? zone.to : from + width
-    if (!sample(model, zone, from, to)) return { zone, panels, end: state, whole: false }
+    if (!sample(model, zone, from, to)) return null
     const rounding = roundingOver(zone, from, to)
     const pair = solvePair(alpha, beta, (to - from) / 2, state.contrast, state.flow)
     const worst = pair ? pair.left / Math.max(RESOLVED, rounding) : Number.POSITIVE_INFINITY
@@ -63,14 +78,32 @@ export function growThrough(model: Model, zone: Zone, start: State): Stretch {
       width = (to - from) * Math.max(0.35, Math.min(0.75, worst ** (-1 / 15)))
       continue
     }
-    if (!pair) break
+    if (!pair) return null
     const error = state.error + 2 * pair.left + 4 * rounding
-    panels.push({ from, to, contrast: pair.u, flow: pair.v, error })
+    yield { zone, from, to, contrast: pair.u, flow: pair.v, error }
     state = { contrast: sumAtOne(pair.u), flow: sumAtOne(pair.v), error }
     width = (to - from) * Math.min(GROWTH, Math.max(1, 0.95 * (worst + 1e-3) ** (-1 / 15)))
     from = to
   }
-  return { zone, panels, end: state, whole: from >= zone.to }
+  return from < zone.to ? null : state
+}
+
+/** D, q and the error at s in a zone, not before its beginning; null where doubles end before. */
+export function stateOn(path: Path, zone: Zone, s: number): State | null {
+  const holds = (one: GrowthPanel) => one.zone === zone && s <= one.to
+  const panel = path.panels.find(holds) ?? nextPanel(path, holds)
+  if (!panel) return null
+  const x = Math.max(-1, Math.min(1, (2 * (s - panel.from)) / (panel.to - panel.from) - 1))
+  return { contrast: evaluate(panel.contrast, x), flow: evaluate(panel.flow, x), error: panel.error }
+}
+
+/** Goes on until a panel holds what is asked for. */
+function nextPanel({ panels, rest }: Path, holds: (panel: GrowthPanel) => boolean): GrowthPanel | undefined {
+  for (let next = rest.next(); !next.done; next = rest.next()) {
+    panels.push(next.value)
+    if (holds(next.value)) return next.value
+  }
+  return undefined
 }
 
 /** α = a⁻² dt/ds and β = (3/2) a² ρ_s dt/ds at the nodes; false where they leave the doubles. */
@@ -82,7 +115,7 @@ function sample(model: Model, zone: Zone, from: number, to: number): boolean {
     const inverseScale = rate > 0 ? samples.conformal[k] / rate : 0
     alpha[k] = samples.conformal[k] * inverseScale
     beta[k] = 1.5 * rate * sourceOver(model, inverseScale)
-    if (!(Number.isFinite(alpha[k]) && Number.isFinite(beta[k]))) return false
+    if (!(rate < SLOWEST && Number.isFinite(alpha[k]) && Number.isFinite(beta[k]))) return false
   }
   return true
 }
@@ -102,12 +135,4 @@ function roundingOver(zone: Zone, from: number, to: number): number {
   const edge = 0.005 * (to - from)
   const conditioning = [from + edge, (from + to) / 2, to - edge].map((s) => zone.conditioning(s))
   return Number.EPSILON * (2 + Math.max(...conditioning))
-}
-
-/** D, q and the error at s; null beyond the panels. */
-export function stateIn({ panels }: Stretch, s: number): State | null {
-  const panel = panels.find((one) => s <= one.to)
-  if (!panel || s < panels[0].from) return null
-  const x = Math.max(-1, Math.min(1, (2 * (s - panel.from)) / (panel.to - panel.from) - 1))
-  return { contrast: evaluate(panel.contrast, x), flow: evaluate(panel.flow, x), error: panel.error }
 }

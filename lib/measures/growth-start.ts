@@ -28,6 +28,8 @@ export interface Start {
 const SMALL = 1e-8
 /** Where f₀ vanishes, f itself is a correction: this much earlier, its own corrections are below 1e-12. */
 const EARLIER = 9
+/** So that f before the panels is good to this part of itself. */
+export const START_ERROR = 1e-12
 /**
  * Where powers lie so close that no correction is small within the doubles, f starts as if the steepest were alone.
  * What is wrong with that dies out like a^(−5/2) in matter, and is as small as f itself where radiation or the like leads.

@@ -7,17 +7,16 @@ import { type Event, expansionAtEvent } from '../history/event'
 import type { History } from '../history/history'
 import type { Place } from '../history/place'
 import { explodes, leadingExponent } from '../history/tail'
-import { plainZone } from '../history/zone'
-import { growThrough, type State, type Stretch, stateIn } from './growth-panels'
-import { logContrastBefore, rateBefore, type Start, startOf } from './growth-start'
+import { plainZone, type Zone } from '../history/zone'
+import { type Path, pathOf, type State, stateOn } from './growth-panels'
+import { logContrastBefore, rateBefore, START_ERROR, type Start, startOf } from './growth-start'
 import { bounded, type Missing, missing, type Outcome } from './outcome'
 
 interface Growth {
   readonly start: Start
-  readonly past: readonly Stretch[]
+  readonly past: Path
   readonly today: State
-  /** Computed when first asked for. */
-  readonly future: () => readonly Stretch[]
+  readonly future: Path
 }
 
 const OUT_OF_RANGE = missing('growth there is outside the range of floating-point numbers')
@@ -27,35 +26,44 @@ const UNBOUNDED = missing('growth goes on without bound while the expansion come
 
 /** D over its value today. */
 export function growthAt(history: History, event: Event): Outcome {
-  const growth = growthOf(history)
+  const growth = growthFor(history, event)
   if ('because' in growth) return growth
-  if (event.sign < 0) return CONTRACTING
-  if (atRest(event.place) && event.place.arm.end.kind === 'double') return UNBOUNDED
   const { start, today } = growth
   const { N } = event.place
-  const early = N < start.N && start.goodFrom === start.N
-  const state = early ? beforePanels(start, N) : stateAt(growth, event)
-  if (state === null) return OUT_OF_RANGE
-  const value = state.contrast / today.contrast
-  return value > 0 && Number.isFinite(value)
-    ? bounded(value, value * Math.abs(state.error - today.error))
-    : OUT_OF_RANGE
+  const state = holdsBeforePanels(growth, N) ? null : stateAt(growth, event)
+  const contrast = holdsBeforePanels(growth, N) ? Math.exp(logContrastBefore(start, N)) : state?.contrast
+  const value = (contrast ?? Number.NaN) / today.contrast
+  if (!(value > 0 && Number.isFinite(value))) return OUT_OF_RANGE
+  // D changes by at most about eps |N| of itself where ln a is rounded.
+  const gathered = Math.abs((state ?? start.state).error - today.error) + Number.EPSILON * Math.abs(N)
+  return bounded(value, value * gathered)
 }
 
 /** f = d ln D/d ln a. */
 export function growthRateAt(history: History, event: Event): Outcome {
-  const growth = growthOf(history)
+  const growth = growthFor(history, event)
   if ('because' in growth) return growth
-  if (event.sign < 0) return CONTRACTING
-  const { start } = growth
   const { N } = event.place
-  if (N < start.N && start.goodFrom === start.N) return bounded(rateBefore(start, N), 1e-12 * rateBefore(start, N))
-  const state = stateAt(growth, event)
-  if (state === null) return OUT_OF_RANGE
+  if (holdsBeforePanels(growth, N)) return closedRate(growth.start, N)
   const e2 = expansionAtEvent(event)
   if (atRest(event.place) || !(e2 > 0)) return AT_REST
+  const state = stateAt(growth, event)
+  if (state === null) return OUT_OF_RANGE
   const value = (state.flow * Math.exp(-2 * N)) / (Math.sqrt(e2) * state.contrast)
   return Number.isFinite(value) ? bounded(value, value * (state.error + roundingOf(event.place))) : OUT_OF_RANGE
+}
+
+function closedRate(start: Start, N: number): Outcome {
+  const value = rateBefore(start, N)
+  return bounded(value, START_ERROR * value)
+}
+
+/** Growth where it is defined at this event. */
+function growthFor(history: History, event: Event): Growth | Missing {
+  if (event.sign < 0) return CONTRACTING
+  const { arm } = event.place
+  if (arm.end.kind === 'double' && atRest(event.place)) return UNBOUNDED
+  return growthOf(history)
 }
 
 const solved = new WeakMap<History, Growth | Missing>()
@@ -80,54 +88,34 @@ function obstacleTo({ past, origin }: History): Missing | null {
   return null
 }
 
-function grow({ past, future }: History): Growth {
+function grow({ past, future }: History): Growth | Missing {
   const start = startOf(past)
-  const before = throughPast(past, start)
-  const today = before[before.length - 1].end
-  let ahead: readonly Stretch[] | null = null
-  return { start, past: before, today, future: () => (ahead ??= throughFuture(future, today)) }
+  const zones = zonesSince(start, past)
+  const before = pathOf(past.model, zones, start.state)
+  const today = stateOn(before, zones[zones.length - 1], 0)
+  if (today === null) return OUT_OF_RANGE
+  const ahead = [...new Set(future.panels.map((one) => one.zone))]
+  return { start, past: before, today, future: pathOf(future.model, ahead, today) }
 }
 
 /** From the start to today, in ln a, broken where the law breaks. */
-function throughPast({ model }: Arm, start: Start): readonly Stretch[] {
-  const edges = [start.N, ...model.law.breaks.filter((N) => N > start.N && N < 0).sort((a, b) => a - b), 0]
-  const stretches: Stretch[] = []
-  let state = start.state
-  for (let i = 0; i + 1 < edges.length; i++) {
-    const stretch = growThrough(model, plainZone(model, 1, edges[i], edges[i + 1]), state)
-    stretches.push(stretch)
-    state = stretch.end
-  }
-  return stretches
+function zonesSince(start: Start, { model }: Arm): readonly Zone[] {
+  const breaks = model.law.breaks.filter((N) => N > start.N && N < 0).sort((one, other) => one - other)
+  const edges = [start.N, ...breaks, 0]
+  return edges.slice(1).map((to, i) => plainZone(model, 1, edges[i], to))
 }
 
-function throughFuture({ model, panels }: Arm, today: State): readonly Stretch[] {
-  const stretches: Stretch[] = []
-  let state = today
-  for (const zone of new Set(panels.map((one) => one.zone))) {
-    const stretch = growThrough(model, zone, state)
-    stretches.push(stretch)
-    if (!stretch.whole) break
-    state = stretch.end
-  }
-  return stretches
-}
+const holdsBeforePanels = ({ start }: Growth, N: number): boolean => N < start.N && start.goodFrom === start.N
 
-function beforePanels(start: Start, N: number): State {
-  return { ...start.state, contrast: Math.exp(logContrastBefore(start, N)) }
-}
-
-/** The state at an event, and the zone and variable in which it stands. */
-function stateAt(growth: Growth, { phase, place }: Event): State | null {
+/** D in the scale of its start, q and the error at an event on the expanding branch; null beyond the doubles. */
+function stateAt({ start, past, future }: Growth, { phase, place }: Event): State | null {
   if (phase === 'past') {
-    if (place.N < growth.start.goodFrom) return null
-    const stretch = growth.past.find((one) => place.N <= one.zone.to)
-    return stretch ? stateIn(stretch, place.N) : null
+    const zone = past.zones.find((one) => place.N <= one.to)
+    return zone && place.N >= start.goodFrom ? stateOn(past, zone, place.N) : null
   }
   const beyond = place.panel === place.arm.panels.length
   const { zone } = place.arm.panels[beyond ? place.panel - 1 : place.panel]
-  const stretch = growth.future().find((one) => one.zone === zone)
-  return stretch ? stateIn(stretch, beyond ? zone.variableAt(place.N) : place.s) : null
+  return stateOn(future, zone, beyond ? zone.variableAt(place.N) : place.s)
 }
 
 /** Relative rounding of 1/E at a place. */

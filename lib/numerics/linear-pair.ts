@@ -8,8 +8,8 @@ import { antiderivative, coefficientsInto, evaluate, NODE_COUNT, NODES, sumAtOne
 const INTEGRATION: Float64Array = integrationMatrix()
 /** Each step wins a factor of about (step)²/(width²): a panel that needs more is too wide. */
 const MOST_STEPS = 30
-/** The next change would be a small fraction of this. */
-const CONVERGED = 1e-15
+/** The next change would be below a fiftieth of this. */
+const CONVERGED = 1e-14
 
 export interface Pair {
   /** Chebyshev series on the panel. */
@@ -49,13 +49,24 @@ function multiply(out: Float64Array, one: Float64Array, other: Float64Array): vo
 
 /** out = start + half · ∫ rate; returns the largest change over the largest value. */
 function accumulate(out: Float64Array, start: number, half: number, rate: Float64Array): number {
-  let [change, largest] = [0, 0]
+  let change = 0
+  let largest = 0
   for (let k = 0, at = 0; k < NODE_COUNT; k++) {
-    let sum = 0
-    for (let j = 0; j < NODE_COUNT; j++, at++) sum += INTEGRATION[at] * rate[j]
-    const next = start + half * sum
-    change = Math.max(change, Math.abs(next - out[k]))
-    largest = Math.max(largest, Math.abs(next))
+    // Four sums that a processor works on side by side.
+    let s0 = 0
+    let s1 = 0
+    let s2 = 0
+    let s3 = 0
+    for (let j = 0; j < NODE_COUNT; j += 4, at += 4) {
+      s0 += INTEGRATION[at] * rate[j]
+      s1 += INTEGRATION[at + 1] * rate[j + 1]
+      s2 += INTEGRATION[at + 2] * rate[j + 2]
+      s3 += INTEGRATION[at + 3] * rate[j + 3]
+    }
+    const next = start + half * (s0 + s1 + (s2 + s3))
+    const moved = Math.abs(next - out[k])
+    if (!(moved <= change)) change = moved
+    if (next > largest) largest = next
     out[k] = next
   }
   return change === 0 ? 0 : change / largest

@@ -1,9 +1,10 @@
 /** Columns of the growth of structure. */
-import { missing } from '../measures/outcome'
+import { growthAt, growthRateAt } from '../measures/growth'
+import { isMissing, type Missing, type Outcome } from '../measures/outcome'
 import type { Column } from './column'
 import { fixed } from './quantity'
 
-const NOT_YET = missing('growth is not computed yet')
+const valueOf = (outcome: Outcome): number | Missing => (isMissing(outcome) ? outcome : outcome.value)
 const SOURCE = 'Peebles 1980, The Large-Scale Structure of the Universe, Princeton, sections 10 and 11'
 
 export const GROWTH_COLUMNS: readonly Column[] = [
@@ -13,10 +14,10 @@ export const GROWTH_COLUMNS: readonly Column[] = [
     label: 'growth',
     unit: '',
     digits: fixed(4),
-    meaning: 'Linear density contrast over that of today.',
+    meaning: 'Linear density contrast over that of today, with smooth dark energy.',
     formula: 'D″ + (2 + (ln E)′) D′ = (3/2) Ω_s D, primes by ln a, D = 1 today',
     source: SOURCE,
-    value: () => NOT_YET,
+    value: ({ history }, instant) => valueOf(growthAt(history, instant)),
   },
   {
     key: 'growthRate',
@@ -27,6 +28,6 @@ export const GROWTH_COLUMNS: readonly Column[] = [
     meaning: 'Logarithmic slope of growth by the scale factor.',
     formula: 'f = d ln D/d ln a',
     source: SOURCE,
-    value: () => NOT_YET,
+    value: ({ history }, instant) => valueOf(growthRateAt(history, instant)),
   },
 ]
