@@ -4,6 +4,7 @@ import { readQuery } from '../scenario/query'
 import type { Problem, Reading, Scenario } from '../scenario/scenario'
 import { writeScenario } from '../scenario/write'
 import { type Solution, solve } from '../solve'
+import { isSane } from './sane'
 
 export type Pairs = Iterable<readonly [string, string]>
 
@@ -27,12 +28,18 @@ export function solved<T>(scenarios: readonly Scenario[], use: (solution: Soluti
   const value: T[] = []
   scenarios.forEach((scenario, index) => {
     try {
-      value.push(use(solve(scenario)))
+      value.push(use(solvedSanely(scenario)))
     } catch (error) {
       problems.push(unsolved(scenario, index, error))
     }
   })
   return problems.length > 0 ? { ok: false, problems } : { ok: true, value }
+}
+
+function solvedSanely(scenario: Scenario): Solution {
+  const solution = solve(scenario)
+  if (!isSane(solution)) throw new RangeError('its numbers leave the range of floating-point numbers')
+  return solution
 }
 
 function unsolved(scenario: Scenario, index: number, error: unknown): Problem {

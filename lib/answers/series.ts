@@ -4,9 +4,8 @@
  * stretch in time, in scale factor and in its logarithm together, whichever of them bends.
  */
 import { type Arm, FARTHEST } from '../history/arm'
-import { type Event, type Phase, sinceNow } from '../history/event'
 import type { History } from '../history/history'
-import { fromToday, type Place, placeAt, placeElapsed, placeRemaining } from '../history/place'
+import { fromToday, placeAt, placeElapsed, placeRemaining } from '../history/place'
 import type { Solution } from '../solve'
 import { hubbleTimeGyr } from '../units'
 
@@ -18,8 +17,8 @@ const SMALLEST = -Math.log(1e-4)
 const LONGEST = 5
 /** A rip is followed until this part of the way to it is left. */
 const BEFORE_RIP = 1e-3
-/** Passes that even out the steps. */
-const PASSES = 2
+/** Places that are tried, to see where the steps have to be short. */
+const TRIED = 40
 const DIGITS = 7
 
 const COLUMNS = [
@@ -38,67 +37,81 @@ export function seriesOf({
   const gyr = hubbleTimeGyr(scenario.h0)
   const rows: Row[] = []
   const add = (time: number, scale: number) => {
-    const row = [rounded(time), rounded(scale)] as const
-    if (row[0] !== rows.at(-1)?.[0]) rows.push(row)
+    const shown = rounded(time)
+    if (rows.length === 0 || shown !== rows[rows.length - 1][0]) rows.push([shown, rounded(scale)])
   }
   if (origin.time !== null && origin.scale === 0) add(origin.time, 0)
-  for (const event of eventsOf(history)) add(sinceNow(history, event, 'time') * gyr, Math.exp(event.place.N))
-  if (end.time !== null && end.scale === 0) add(end.time, 0)
+  const stretches = stretchesOf(history)
+  const known = new Map<Arm, readonly Point[]>()
+  for (const { arm, mirror, sign, outwards } of stretches) {
+    const points = known.get(arm) ?? pointsAlong(arm, Math.floor(ROWS / stretches.length))
+    known.set(arm, points)
+    for (const { elapsed, scale } of outwards ? points : points.toReversed()) {
+      add(gyr * (mirror + sign * elapsed), scale)
+    }
+  }
+  if (end.time !== null && end.scale === 0) {
+    // The last points may lie so near to the end that rounding moves them upon it.
+    while (rows.length > 1 && rows[rows.length - 1][0] >= rounded(end.time)) rows.pop()
+    add(end.time, 0)
+  }
   return { columns: COLUMNS, rows }
 }
 
-/** One arm walked in one phase, away from today's size or back to it. */
+/** A stretch is one arm, or its mirror image: its times are `mirror` + `sign` × the time from today along the arm. */
 interface Stretch {
-  readonly phase: Phase
   readonly arm: Arm
+  readonly mirror: number
+  readonly sign: 1 | -1
+  /** Whether time runs along it away from today's size. */
   readonly outwards: boolean
 }
 
-/** In the order of time. */
+/** In the order of time; histories are symmetric about turning points. */
 function stretchesOf({ before, past, future, home }: History): readonly Stretch[] {
+  const [bounce, turn] = [-2 * past.time.total, 2 * future.time.total]
   const contraction: readonly Stretch[] = [
-    { phase: 'before', arm: before, outwards: false },
-    { phase: 'before', arm: past, outwards: true },
-  ]
-  const expansion: readonly Stretch[] = [
-    { phase: 'past', arm: past, outwards: false },
-    { phase: 'future', arm: future, outwards: true },
+    { arm: before, mirror: bounce, sign: -1, outwards: false },
+    { arm: past, mirror: bounce, sign: 1, outwards: true },
   ]
   const wayBack: readonly Stretch[] = [
-    { phase: 'home', arm: future, outwards: false },
-    { phase: 'home', arm: home, outwards: true },
+    { arm: future, mirror: turn, sign: -1, outwards: false },
+    { arm: home, mirror: turn, sign: 1, outwards: true },
   ]
   return [
     ...(past.end.kind === 'root' ? contraction : []),
-    ...expansion,
+    { arm: past, mirror: 0, sign: -1, outwards: false },
+    { arm: future, mirror: 0, sign: 1, outwards: true },
     ...(future.end.kind === 'root' ? wayBack : []),
   ]
 }
 
-function eventsOf(history: History): readonly Event[] {
-  const stretches = stretchesOf(history)
-  const known = new Map<Arm, readonly Place[]>()
-  return stretches.flatMap(({ phase, arm, outwards }) => {
-    const places = known.get(arm) ?? placesAlong(arm, Math.floor(ROWS / stretches.length))
-    known.set(arm, places)
-    const sign = phase === 'past' || phase === 'future' ? 1 : -1
-    return (outwards ? places : places.toReversed()).map((place) => ({ phase, place, sign, swings: 0 }))
-  })
+interface Point {
+  /** From today along the arm, in 1/H₀. */
+  readonly elapsed: number
+  readonly scale: number
 }
 
-/** Places from today to where the arm is followed no further. */
-function placesAlong(arm: Arm, count: number): readonly Place[] {
+/** Points from today to where the arm is followed no further. */
+function pointsAlong(arm: Arm, count: number): readonly Point[] {
   const reach = reachOf(arm)
-  // Towards a turning point the steps in ln a shrink as those of the time do not.
-  const distanceAt = (x: number) => reach * (arm.end.kind === 'root' ? x * (2 - x) : x)
-  let parts = Array.from({ length: count }, (_, i) => i / (count - 1))
-  for (let pass = 0; pass < PASSES; pass++)
-    parts = evened(parts, travelled(placesAt(arm, parts.map(distanceAt)), reach))
-  return placesAt(arm, parts.map(distanceAt))
+  const way = triedAlong(arm, reach)
+  const points: Point[] = []
+  let k = 0
+  for (let i = 0; i < count; i++) {
+    // The part of the arm at which this share of the way is done; the way is known at even parts.
+    const goal = (way[TRIED] * i) / (count - 1)
+    while (k < TRIED - 1 && way[k + 1] < goal) k++
+    const step = way[k + 1] - way[k]
+    const part = Math.min(1, (k + (step > 0 ? (goal - way[k]) / step : 0)) / TRIED)
+    const place = placeAt(arm, distanceAt(arm, reach, part))
+    if (place) points.push({ elapsed: fromToday(place, 'time'), scale: Math.exp(place.N) })
+  }
+  return points
 }
 
-const placesAt = (arm: Arm, distances: readonly number[]): readonly Place[] =>
-  distances.flatMap((m) => placeAt(arm, m) ?? [])
+/** |ln a| at the part x of an arm; towards a turning point, where time passes while a stands still, its steps shrink. */
+const distanceAt = ({ end }: Arm, reach: number, x: number): number => reach * (end.kind === 'root' ? x * (2 - x) : x)
 
 /** How far |ln a| goes. */
 function reachOf(arm: Arm): number {
@@ -110,30 +123,23 @@ function reachOf(arm: Arm): number {
   return arm.direction < 0 ? Math.min(reach, SMALLEST) : reach
 }
 
-/** At each place, how much of the way is done, by time, scale factor and its logarithm together. */
-function travelled(places: readonly Place[], reach: number): readonly number[] {
-  const last = places[places.length - 1]
+/** At even parts of an arm, how much of the way is done, by time, scale factor and its logarithm together. */
+function triedAlong(arm: Arm, reach: number): Float64Array {
+  const way = new Float64Array(TRIED + 1)
+  const last = placeAt(arm, reach)
+  if (!last) return way
   const [time, change] = [fromToday(last, 'time'), Math.expm1(last.N)]
-  return places.map((one) => fromToday(one, 'time') / time + Math.expm1(one.N) / change + Math.abs(one.N) / reach)
+  for (let i = 1; i <= TRIED; i++) {
+    const place = placeAt(arm, distanceAt(arm, reach, i / TRIED)) ?? last
+    way[i] = fromToday(place, 'time') / time + Math.expm1(place.N) / change + Math.abs(place.N) / reach
+  }
+  return way
 }
 
-/** Other parts, at even steps of what was travelled at the old ones. */
-function evened(parts: readonly number[], way: readonly number[]): number[] {
-  const count = parts.length
-  let k = 0
-  return parts.map((part, i) => {
-    if (i === 0 || i === count - 1) return part
-    const goal = (way[count - 1] * i) / (count - 1)
-    while (k < count - 2 && way[k + 1] < goal) k++
-    const step = way[k + 1] - way[k]
-    return parts[k] + (step > 0 ? ((goal - way[k]) / step) * (parts[k + 1] - parts[k]) : 0)
-  })
-}
+const POWERS = Array.from({ length: 23 }, (_, i) => 10 ** i)
 
-/** To a few significant digits, quickly: the factor is a power of ten that is a double. */
+/** To a few significant digits, quickly where the power of ten is a double. */
 function rounded(x: number): number {
-  const digits = DIGITS - Math.ceil(Math.log10(Math.abs(x)))
-  if (!(digits >= 0 && digits <= 22)) return Number(x.toPrecision(DIGITS))
-  const factor = 10 ** digits
-  return Math.round(x * factor) / factor
+  const power = POWERS[DIGITS - Math.ceil(Math.log10(Math.abs(x)))]
+  return power === undefined ? Number(x.toPrecision(DIGITS)) : Math.round(x * power) / power
 }

@@ -1,0 +1,29 @@
+import fc from 'fast-check'
+import { describe, expect, test } from 'vitest'
+import { COLUMN_KEYS } from '../../lib/quantities/column'
+import { SPACINGS, valueAt } from '../../lib/tables/spacing'
+
+test('logscale is the default', () => expect(SPACINGS[0].key).toBe('logscale'))
+
+describe.each(SPACINGS.map((one) => [one.key, one] as const))('%s', (_, spacing) => {
+  const end = fc.double({ min: Math.max(spacing.above, -1e308), minExcluded: true, max: 1e308, noNaN: true })
+  test('says what it means, with a column that repeats it', () => {
+    expect(spacing.meaning).toMatch(/^Equal steps in .*\.$/)
+    expect(COLUMN_KEYS).toContain(spacing.column)
+  })
+  test('ends are exact, and everything lies between them', () => {
+    fc.assert(
+      fc.property(end, end, fc.integer({ min: 2, max: 1e6 }), fc.nat(), (from, to, rows, some) => {
+        const at = (i: number) => valueAt(spacing, { from, to }, rows, i)
+        expect(at(0)).toBe(from)
+        expect(at(rows - 1)).toBe(to)
+        // A value may pass an end by rounding alone: of its logarithm, at most 745, for ratios.
+        const slack = spacing.even === 'ratios' ? 1 + 4 * 745 * Number.EPSILON : 1 + 4 * Number.EPSILON
+        const size = Math.max(Math.abs(from), Math.abs(to))
+        const between = at(some % rows)
+        expect(between).toBeLessThanOrEqual(Math.max(from, to) + (slack - 1) * size)
+        expect(between).toBeGreaterThanOrEqual(Math.min(from, to) - (slack - 1) * size)
+      }),
+    )
+  })
+})
