@@ -72,7 +72,9 @@ export function toEnd(place: Place, clock: Clock): number {
 export function placeElapsed(arm: Arm, clock: Clock, value: number): Place | null {
   const sums = arm[clock]
   if (!(value <= sums.total)) return null
-  const panel = indexBelow(sums.fromToday, value)
+  const holding = indexBelow(sums.fromToday, value)
+  const ends = arm.tail === null && arm.end.kind !== 'double'
+  const panel = ends ? Math.min(holding, arm.panels.length - 1) : holding
   if (panel === arm.panels.length) {
     return placeInTail(arm, (D) => elapsedBeyond(arm, clock, D) - (value - sums.fromToday[panel]))
   }
