@@ -111,10 +111,10 @@ function sample(model: Model, zone: Zone, from: number, to: number): boolean {
   zone.sampleInto(samples, (from + to) / 2, (to - from) / 2)
   for (let k = 0; k < NODE_COUNT; k++) {
     const rate = samples.time[k]
+    const inverseScale = samples.conformal[k] / rate
     // Where E² exceeds the doubles, no time is left for growth.
-    const inverseScale = rate > 0 ? samples.conformal[k] / rate : 0
-    alpha[k] = samples.conformal[k] * inverseScale
-    beta[k] = 1.5 * rate * sourceOver(model, inverseScale)
+    alpha[k] = rate === 0 ? 0 : samples.conformal[k] * inverseScale
+    beta[k] = rate === 0 ? 0 : 1.5 * rate * sourceOver(model, inverseScale)
     if (!(rate < SLOWEST && Number.isFinite(alpha[k]) && Number.isFinite(beta[k]))) return false
   }
   return true
@@ -130,9 +130,13 @@ export function sourceOver({ budget }: Model, inverseScale: number): number {
   return (budget.coldMatter + relativistic * inverseScale) * inverseScale
 }
 
-/** Rounding of the integrands, as E² carries it. */
+/** Relative rounding of 1/E at s; where E² exceeds the doubles, nothing is left that it could spoil. */
+export function roundingAt(zone: Zone, s: number): number {
+  const conditioning = zone.conditioning(s)
+  return Number.EPSILON * (2 + (Number.isFinite(conditioning) ? conditioning : 0))
+}
+
 function roundingOver(zone: Zone, from: number, to: number): number {
   const edge = 0.005 * (to - from)
-  const conditioning = [from + edge, (from + to) / 2, to - edge].map((s) => zone.conditioning(s))
-  return Number.EPSILON * (2 + Math.max(...conditioning))
+  return Math.max(roundingAt(zone, from + edge), roundingAt(zone, (from + to) / 2), roundingAt(zone, to - edge))
 }

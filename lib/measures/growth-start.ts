@@ -26,10 +26,8 @@ export interface Start {
 
 /** Corrections below this leave less than its square in D. */
 const SMALL = 1e-8
-/** Where f₀ vanishes, f itself is a correction: this much earlier, its own corrections are below 1e-12. */
+/** Where f₀ vanishes, f itself is a correction, and good to a few times the others: e⁻⁹ of what a tail allows is below 1e-12. */
 const EARLIER = 9
-/** So that f before the panels is good to this part of itself. */
-export const START_ERROR = 1e-12
 /**
  * Where powers lie so close that no correction is small within the doubles, f starts as if the steepest were alone.
  * What is wrong with that dies out like a^(−5/2) in matter, and is as small as f itself where radiation or the like leads.
@@ -45,8 +43,12 @@ export function startOf(past: Arm): Start {
   return small ? closedStart(past.model, tail, exponent) : balancedStart(past.model, exponent)
 }
 
-const earlierTail = (model: Model, tail: Tail, exponent: number): Tail =>
-  exponent > 3 ? (tailAt(model, -1, tail.N - EARLIER) ?? tail) : tail
+function earlierTail(model: Model, tail: Tail, exponent: number): Tail {
+  if (exponent === 3) return tail
+  const rates = tail.time.corrections.filter((one) => one.size !== 0).map((one) => one.rate)
+  const earlier = Math.max(FARTHEST + 1, tail.N - EARLIER / Math.min(1, exponent - 3, ...rates))
+  return earlier < tail.N ? (tailAt(model, -1, earlier) ?? tail) : tail
+}
 
 /** The root f ≥ 0 of f² + k f = source, for k ≥ 0. */
 const balanced = (k: number, source: number): number =>
@@ -69,26 +71,29 @@ function closedStart(model: Model, tail: Tail, n: number): Start {
     // ρ − 3p of neutrinos that are still fast goes like a⁻².
     terms.push(damped((1.5 * sourceOver(model, x) * x * x) / leading - cold, n - 2))
   }
-  return startAt(
-    tail.N,
-    tail.N,
-    rate,
-    terms.filter((one) => one.size !== 0),
-    expansion,
-  )
+  const doubt = n === 3 ? 0 : 4 * Math.max(0, ...corrections.map((one) => Math.abs(one.size)))
+  const present = terms.filter((one) => one.size !== 0)
+  return startAt(tail.N, tail.N, rate, present, expansion, doubt)
 }
 
 function balancedStart(model: Model, n: number): Start {
   const x = Math.exp(-FARTHEST)
   const expansion = model.expansion(FARTHEST, x)
   const source = (1.5 * sourceOver(model, x) * x * x) / expansion
-  return startAt(FARTHEST, FORGOTTEN, balanced(2 - n / 2, source), [], expansion)
+  return startAt(FARTHEST, FORGOTTEN, balanced(2 - n / 2, source), [], expansion, 0)
 }
 
-function startAt(N: number, goodFrom: number, rate: number, terms: readonly Term[], expansion: number): Start {
+function startAt(
+  N: number,
+  goodFrom: number,
+  rate: number,
+  terms: readonly Term[],
+  expansion: number,
+  doubt: number,
+): Start {
   const slope = terms.reduce((sum, one) => sum + one.size, rate)
-  const state = { contrast: 1, flow: slope * Math.exp(2 * N) * Math.sqrt(expansion), error: 4 * Number.EPSILON }
-  return { N, goodFrom, rate, terms, state }
+  const flow = slope * Math.exp(2 * N) * Math.sqrt(expansion)
+  return { N, goodFrom, rate, terms, state: { contrast: 1, flow, error: doubt + 4 * Number.EPSILON } }
 }
 
 /** ln D relative to where the panels start. */

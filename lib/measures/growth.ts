@@ -8,8 +8,8 @@ import type { History } from '../history/history'
 import type { Place } from '../history/place'
 import { explodes, leadingExponent } from '../history/tail'
 import { plainZone, type Zone } from '../history/zone'
-import { type Path, pathOf, type State, stateOn } from './growth-panels'
-import { logContrastBefore, rateBefore, START_ERROR, type Start, startOf } from './growth-start'
+import { type Path, pathOf, roundingAt, type State, stateOn } from './growth-panels'
+import { logContrastBefore, rateBefore, type Start, startOf } from './growth-start'
 import { bounded, type Missing, missing, type Outcome } from './outcome'
 
 interface Growth {
@@ -55,7 +55,7 @@ export function growthRateAt(history: History, event: Event): Outcome {
 
 function closedRate(start: Start, N: number): Outcome {
   const value = rateBefore(start, N)
-  return bounded(value, START_ERROR * value)
+  return bounded(value, start.state.error * value)
 }
 
 /** Growth where it is defined at this event. */
@@ -120,7 +120,7 @@ function stateAt({ start, past, future }: Growth, { phase, place }: Event): Stat
 
 /** Relative rounding of 1/E at a place. */
 const roundingOf = ({ arm, panel, s }: Place): number =>
-  panel < arm.panels.length ? Number.EPSILON * arm.panels[panel].zone.conditioning(s) : 2 * Number.EPSILON
+  panel < arm.panels.length ? roundingAt(arm.panels[panel].zone, s) : 2 * Number.EPSILON
 
 /** Does the arm come to rest here, at a turning point or a static state? */
 const atRest = ({ arm, panel }: Place): boolean => arm.end.kind !== 'none' && panel === arm.panels.length

@@ -4,7 +4,7 @@ import { isMissing, type Missing, type Outcome } from '../measures/outcome'
 import type { Column } from './column'
 import { fixed } from './quantity'
 
-const valueOf = (outcome: Outcome): number | Missing => (isMissing(outcome) ? outcome : outcome.value)
+const numberIn = (outcome: Outcome): number | Missing => (isMissing(outcome) ? outcome : outcome.value)
 const SOURCE = 'Peebles 1980, The Large-Scale Structure of the Universe, Princeton, sections 10 and 11'
 
 export const GROWTH_COLUMNS: readonly Column[] = [
@@ -17,7 +17,7 @@ export const GROWTH_COLUMNS: readonly Column[] = [
     meaning: 'Linear density contrast over that of today, with smooth dark energy.',
     formula: 'D″ + (2 + (ln E)′) D′ = (3/2) Ω_s D, primes by ln a, D = 1 today',
     source: SOURCE,
-    value: ({ history }, instant) => valueOf(growthAt(history, instant)),
+    value: ({ history }, instant) => numberIn(growthAt(history, instant)),
   },
   {
     key: 'growthRate',
@@ -28,6 +28,6 @@ export const GROWTH_COLUMNS: readonly Column[] = [
     meaning: 'Logarithmic slope of growth by the scale factor.',
     formula: 'f = d ln D/d ln a',
     source: SOURCE,
-    value: ({ history }, instant) => valueOf(growthRateAt(history, instant)),
+    value: ({ history }, instant) => numberIn(growthRateAt(history, instant)),
   },
 ]
