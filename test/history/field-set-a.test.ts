@@ -62,7 +62,7 @@ const theirPhi = (one: Case, phi: number): number => (isLinear(one) ? rest(one) 
 function phiAhead(one: Case, scale: number): number {
   const ahead = lookAhead(one.field, one.today, { left: BUDGET }, false)
   if (ahead.kind === 'shallow' || ahead.kind === 'spent') return phiBeforeTurning(one, scale)
-  const out = new Float64Array(3)
+  const out = new Float64Array(2)
   trailByScale(one.field, ahead.steps, ahead.end).into(out, Math.log(scale))
   return out[0]
 }

@@ -8,6 +8,9 @@ import { byScale, energyOf, expansionOf, type Field, SPEED } from './motion'
 /** Farthest ln a for which a and 1/a are doubles. */
 const FARTHEST = 700
 const TOLERANCE = 1e-11
+/** From this N on a field that still rolls slowly is followed at a looser tolerance: slow roll damps errors. */
+const LATE = 40
+const LATE_TOLERANCE = 1e-8
 /** Swings of the field that are followed; from then on it is dust on the average. */
 const MOST_SWINGS = 60
 /** n has come to rest at its last value. */
@@ -46,8 +49,10 @@ export function lookAhead(field: Field, today: Float64Array, purse: Purse, deep:
     return stop !== null
   }
   const state = today.slice()
-  const course = { from: 0, to: FARTHEST, state, tolerance: TOLERANCE, first: 0.1, after, dense: true, purse }
-  const arrival = travel(byScale(field), course)
+  const course = { from: 0, to: LATE, state, tolerance: TOLERANCE, first: 0.1, after, dense: true, purse }
+  const early = travel(byScale(field), course)
+  const late = { ...course, from: LATE, to: FARTHEST, tolerance: LATE_TOLERANCE }
+  const arrival = early === 'there' ? travel(byScale(field), late) : early
   if (arrival === 'stuck' || stop === 'shallow') return { kind: 'shallow' }
   if (arrival === 'spent') return { kind: 'spent' }
   const end = steps[steps.length - 1].to

@@ -11,18 +11,18 @@ export interface Outside {
   readonly after: number
 }
 
-/** Where ρ passes zero n has no bounds. Densities within e^±7 of others do not reach this one there. */
-const LARGEST_EXPONENT = 1000
+/** n on the way to ρ = 0, and for ρ < 0, where ln ρ counts as −∞. */
+const FALLING: readonly [number, number] = [1000, Number.POSITIVE_INFINITY]
 
 /** `today` is the field's energy today, the unit of the density. */
 export function fieldLaw(trail: Trail, today: number, outside: Outside): Law {
   const { field, edges } = trail
   const [first, last] = [edges[0], edges[edges.length - 1]]
-  const at = new Float64Array(3)
+  const at = new Float64Array(2)
   /** f, f′ and f″ on the trail. */
   const inside = (out: Float64Array, N: number) => {
     trail.into(at, N)
-    const [phi, speed, H] = [at[0], at[1], at[2]]
+    const [phi, speed, H] = [at[0], at[1], trail.rate(N)]
     const speedSlope = -3 * (speed + (field.height * field.potential.slope(phi)) / H)
     out[0] = energyOf(field, phi, speed) / today
     out[1] = (-speed * speed) / today
@@ -124,14 +124,15 @@ function rangesOf(edges: Float64Array, exponent: (N: number) => number, outside:
 const samples = new Float64Array(NODE_COUNT)
 const coefficients = new Float64Array(NODE_COUNT)
 
-/** c₀ ± Σ|c_j|: every value of the interpolant lies inside. */
+/** c₀ ± Σ|c_j| where ρ > 0: every value of the interpolant lies inside. */
 function rangeOver(f: (N: number) => number, from: number, to: number): readonly [number, number] {
   const [centre, half] = [(from + to) / 2, (to - from) / 2]
   for (let k = 0; k < NODE_COUNT; k++) samples[k] = f(centre + half * NODES[k])
   coefficientsInto(coefficients, samples)
   let spread = 1e-12
   for (let j = 1; j < NODE_COUNT; j++) spread += Math.abs(coefficients[j])
-  const [low, high] = [coefficients[0] - spread, coefficients[0] + spread]
-  if (!(high < LARGEST_EXPONENT && low > -LARGEST_EXPONENT)) return [-LARGEST_EXPONENT, LARGEST_EXPONENT]
-  return [low, high]
+  if (samples.every((n) => n >= 0 && n < FALLING[0])) return [coefficients[0] - spread, coefficients[0] + spread]
+  // ρ passes zero here, and n runs from its least value to infinity.
+  const least = samples.reduce((low, n) => (n >= 0 ? Math.min(low, n) : low), FALLING[0])
+  return [0.9 * least, FALLING[1]]
 }

@@ -18,6 +18,8 @@ export const energyOf = ({ potential, height }: Field, phi: number, speed: numbe
   (speed * speed) / 6 + height * potential.value(phi)
 
 const scratch = new Float64Array(3)
+/** v and dv/dφ. */
+const shape = new Float64Array(2)
 
 /** E² from Friedmann's equation. */
 export function expansionOf(field: Field, N: number, phi: number, speed: number): number {
@@ -30,13 +32,16 @@ export const [PHI, SPEED] = [0, 1]
 
 /** Unknowns φ and φ̇ as functions of N, with H from the constraint: while the universe expands. */
 export function byScale(field: Field): Motion {
-  const { potential, height } = field
+  const { potential, height, background } = field
   return {
     size: 2,
     slopeInto(out, N, y) {
-      const H = Math.sqrt(expansionOf(field, N, y[0], y[1]))
-      out[0] = y[1] / H
-      out[1] = -3 * (y[1] + (height * potential.slope(y[0])) / H)
+      const [phi, speed] = [y[0], y[1]]
+      background.into(scratch, N)
+      potential.bothInto(shape, phi)
+      const H = Math.sqrt(scratch[0] + (speed * speed) / 6 + height * shape[0])
+      out[0] = speed / H
+      out[1] = -3 * (speed + (height * shape[1]) / H)
     },
     weightsInto(out, _, y) {
       out[0] = potential.length(y[0])

@@ -55,13 +55,11 @@ export function timedArm(route: Route, legs: readonly Leg[], forward: boolean, d
 /** E² is that of the integration, which stays right where the sum of densities cancels. */
 function timedModel({ field, budget, today }: Route, ascending: readonly Leg[]): Model {
   const trail = trailByTime(field, ascending)
-  const at = new Float64Array(3)
   const model = modelOf(budget, fieldLaw(trail, today, { before: 6, after: 6 }))
   const first = trail.edges[0]
   const expansion = (N: number, inverseScale: number) => {
     if (N < first) return model.expansion(N, inverseScale)
-    trail.into(at, N)
-    return at[2] * at[2]
+    return trail.rate(N) ** 2
   }
   return { ...model, expansion, expansionFrom: (anchor, d) => expansion(anchor.N + d, Math.exp(-anchor.N - d)) }
 }

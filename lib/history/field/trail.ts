@@ -1,17 +1,16 @@
 /** Where the field is at each scale factor of one stretch of the history. */
 import { type Step, valueIn } from '../../numerics/ode'
 import { brent } from '../../numerics/roots'
-import { expansionOf, type Field, RATE, SCALE, TIMED_PHI, TIMED_SPEED } from './motion'
-
-/** Places in what `into` writes. */
-export const [AT_PHI, AT_SPEED, AT_RATE] = [0, 1, 2]
+import { expansionOf, type Field, PHI, RATE, SCALE, SPEED, TIMED_PHI, TIMED_SPEED } from './motion'
 
 export interface Trail {
   readonly field: Field
   /** Ascending values of N between which the trail is smooth; it holds from the first to the last. */
   readonly edges: Float64Array
-  /** Writes φ, φ̇ and H (negative while contracting). */
+  /** Writes φ and φ̇. */
   into(out: Float64Array, N: number): void
+  /** H, negative while contracting. */
+  rate(N: number): number
 }
 
 /** Index of the interval of ascending edges that holds the value; the nearest one outside. */
@@ -31,15 +30,21 @@ export function intervalOf(edges: Float64Array, value: number, guess: number): n
 export function trailByScale(field: Field, steps: readonly Step[], end: number): Trail {
   const edges = Float64Array.from([...steps.map((one) => one.from), end])
   let last = 0
+  const stepAt = (N: number) => {
+    last = intervalOf(edges, N, last)
+    return steps[last]
+  }
   return {
     field,
     edges,
     into(out, N) {
-      last = intervalOf(edges, N, last)
-      const step = steps[last]
-      out[0] = valueIn(step, 0, N)
-      out[1] = valueIn(step, 1, N)
-      out[2] = Math.sqrt(expansionOf(field, N, out[0], out[1]))
+      const step = stepAt(N)
+      out[0] = valueIn(step, PHI, N)
+      out[1] = valueIn(step, SPEED, N)
+    },
+    rate(N) {
+      const step = stepAt(N)
+      return Math.sqrt(expansionOf(field, N, valueIn(step, PHI, N), valueIn(step, SPEED, N)))
     },
   }
 }
@@ -66,17 +71,24 @@ export function timeAt(leg: Leg, N: number): number {
 export function trailByTime(field: Field, legs: readonly Leg[]): Trail {
   const ends = legs.map((leg) => [scaleIn(leg, leg.from), scaleIn(leg, leg.to)] as const)
   const edges = Float64Array.from([...ends.map((pair) => Math.min(...pair)), Math.max(...ends[ends.length - 1])])
-  let last = 0
+  let [last, place, tau] = [0, Number.NaN, 0]
+  const find = (N: number) => {
+    if (N === place) return
+    last = intervalOf(edges, N, last)
+    tau = timeAt(legs[last], N)
+    place = N
+  }
   return {
     field,
     edges,
     into(out, N) {
-      last = intervalOf(edges, N, last)
-      const { step } = legs[last]
-      const tau = timeAt(legs[last], N)
-      out[0] = valueIn(step, TIMED_PHI, tau)
-      out[1] = valueIn(step, TIMED_SPEED, tau)
-      out[2] = valueIn(step, RATE, tau)
+      find(N)
+      out[0] = valueIn(legs[last].step, TIMED_PHI, tau)
+      out[1] = valueIn(legs[last].step, TIMED_SPEED, tau)
+    },
+    rate(N) {
+      find(N)
+      return valueIn(legs[last].step, RATE, tau)
     },
   }
 }
