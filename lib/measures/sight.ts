@@ -1,7 +1,7 @@
 /** What a line of sight from here and now meets: comoving distance to an event, and horizons as seen from an event. */
 import { type Event, eventAtScale, isEvent, sinceNow, sinceOrigin, untilEnd } from '../history/event'
 import type { History } from '../history/history'
-import { type Place, placeElapsed } from '../history/place'
+import { type Place, placeElapsed, toEnd } from '../history/place'
 import { antipode } from './distances'
 import { bounded, type Missing, missing, type Outcome } from './outcome'
 
@@ -16,7 +16,9 @@ export function comovingDistance(history: History, event: Event): number | Missi
 export function particleHorizon(history: History, event: Event): number | Missing {
   const before = beforeExpansion(history)
   if (typeof before !== 'number') return before
-  const since = before + sinceOrigin(history, event, 'conformal')
+  // Far back in the contraction this is small beside the two whole sums, so it is taken from its own end.
+  const contracting = event.phase === 'before' && event.place.arm === history.before
+  const since = contracting ? toEnd(event.place, 'conformal') : before + sinceOrigin(history, event, 'conformal')
   return Number.isFinite(since) ? since : missing('light has had unlimited conformal time: the horizon is infinite')
 }
 
