@@ -48,7 +48,7 @@ const names = (list: string, tag: string): boolean =>
 function refused(status: 400 | 422, path: string, errors: readonly Problem[]): Response {
   const [first] = errors
   const where = first.scenario === null ? '' : ` (scenario ${first.scenario + 1})`
-  const more = errors.length > 1 ? ` ${errors.length - 1} more stand in errors.` : ''
+  const more = errors.length > 1 ? ` This is the first of ${errors.length} problems in errors.` : ''
   const detail = `${first.parameter}${where}: ${first.message}${more}`
   return new Response(problemBody({ status, detail, errors }, path), {
     status,
