@@ -11,26 +11,30 @@ const TOLERANCE = 1e-11
 /** From this N on a field that still rolls slowly is followed at a looser tolerance: slow roll damps errors. */
 const LATE = 40
 const LATE_TOLERANCE = 1e-8
-/** Swings of the field that are followed; from then on it is dust on the average. */
-const MOST_SWINGS = 60
-/** n has come to rest at its last value. */
-const SETTLED = 1e-11
-/** Share of E² in the sizes of its parts below which the way through a turning point is followed by time. */
-const SHALLOW = 0.05
+/** Relative error of ρ that the steps may add up to; ten times what the reference set shows. */
+const [ERROR, LATE_ERROR] = [1e-10, 1e-7]
+/** The same for integrals over the average of swings that are not followed, of the order of (H/m)². */
+const AVERAGED = 3e-5
+
+/** Relative error of ρ at N. */
+export function errorAhead(outlook: Ahead, N: number): number {
+  if (outlook.kind === 'swinging' && N > outlook.end) return AVERAGED
+  return N < LATE ? ERROR : LATE_ERROR
+}
 
 /** How the way ahead in N ended. */
 export type Outlook =
   /** At a turning point, or too near to one. */
-  | { readonly kind: 'shallow' }
-  /** In a power of a: `exponent` from the last step on. */
-  | {
-      readonly kind: 'settled' | 'swinging' | 'far'
-      readonly exponent: number
-      readonly steps: readonly Step[]
-      /** N where the steps are left. */
-      readonly end: number
-    }
-  | { readonly kind: 'spent' }
+  { readonly kind: 'shallow' } | Ahead | { readonly kind: 'spent' }
+
+/** In a power of a: `exponent` from the last step on. */
+export interface Ahead {
+  readonly kind: 'settled' | 'swinging' | 'far'
+  readonly exponent: number
+  readonly steps: readonly Step[]
+  /** N where the steps are left. */
+  readonly end: number
+}
 
 const scratch = new Float64Array(3)
 

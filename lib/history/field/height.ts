@@ -13,6 +13,8 @@ import { overBudget, unsolvable } from './unsolvable'
 /** ln a until which the field is at rest. */
 export const FROZEN = Math.log(1e-6)
 const FINAL = 3e-12
+/** Relative error of ρ that the steps of a passage may add up to; ten times what the reference set shows. */
+export const PASSAGE_ERROR = 3e-11
 const COARSE = 1e-6
 const MIDDLE = 1e-9
 /** Farthest apart looks lie in ln(height), and how many fall to half a swing of the field. */

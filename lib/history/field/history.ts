@@ -8,10 +8,10 @@ import { type Arm, armOf } from '../arm'
 import { endOf } from '../ending'
 import type { History } from '../history'
 import { originOf } from '../origin'
-import { lookAhead, type Outlook } from './ahead'
+import { errorAhead, lookAhead, type Outlook } from './ahead'
 import { backgroundOf } from './background'
 import { crunchAfter, endAhead } from './endings'
-import { BUDGET, fieldToday, passage } from './height'
+import { BUDGET, FROZEN, fieldToday, PASSAGE_ERROR, passage } from './height'
 import { fieldLaw } from './law'
 import { energyOf } from './motion'
 import { type Route, restOf, timedArm } from './timed-arm'
@@ -48,7 +48,12 @@ function today(budget: Budget, potential: Potential): Now {
   const field = fieldToday({ potential, background: backgroundOf(budget), target: budget.dark, purse })
   const { steps, state } = passage(field, purse)
   const energy = energyOf(field, state[0], state[1])
-  const law = fieldLaw(trailByScale(field, steps, 0), energy, { before: 0, after: 0 })
+  const law = fieldLaw(trailByScale(field, steps, 0), {
+    today: energy,
+    outside: { before: 0, after: 0 },
+    breaks: [FROZEN],
+    error: () => PASSAGE_ERROR,
+  })
   return { field, budget, today: energy, state, purse, past: armOf(modelOf(budget, law), -1) }
 }
 
@@ -77,7 +82,12 @@ function expanding(now: Now, outlook: Outlook): Ahead {
   if (outlook.kind === 'swinging' && now.budget.curvature < 0)
     throw overBudget('The field swings too often before this closed universe turns round.')
   const trail = trailByScale(now.field, outlook.steps, outlook.end)
-  const law = fieldLaw(trail, now.today, { before: 0, after: outlook.exponent })
+  const law = fieldLaw(trail, {
+    today: now.today,
+    outside: { before: 0, after: outlook.exponent },
+    breaks: [outlook.end],
+    error: (N) => errorAhead(outlook, N),
+  })
   const future = armOf(modelOf(now.budget, law), 1)
   return { future, home: now.past, descent: future, end: endAhead(now.field, outlook) }
 }

@@ -11,11 +11,21 @@ export interface Outside {
   readonly after: number
 }
 
+/** What a law is told beside its trail. */
+export interface Told {
+  /** The field's energy today, the unit of the density. */
+  readonly today: number
+  readonly outside: Outside
+  /** Where a derivative jumps. */
+  readonly breaks: readonly number[]
+  /** Relative error of ρ at N. */
+  error(N: number): number
+}
+
 /** n on the way to ρ = 0, and for ρ < 0, where ln ρ counts as −∞. */
 const FALLING: readonly [number, number] = [1000, Number.POSITIVE_INFINITY]
 
-/** `today` is the field's energy today, the unit of the density. */
-export function fieldLaw(trail: Trail, today: number, outside: Outside): Law {
+export function fieldLaw(trail: Trail, { today, outside, breaks, error }: Told): Law {
   const { field, edges } = trail
   const [first, last] = [edges[0], edges[edges.length - 1]]
   const at = new Float64Array(2)
@@ -80,7 +90,11 @@ export function fieldLaw(trail: Trail, today: number, outside: Outside): Law {
     exponentRange: rangesOf(edges, exponent, outside),
     past: asymptote(outside.before, logBefore, first),
     future: asymptote(outside.after, logAfter, last),
-    breaks: [...edges],
+    breaks,
+    noise: (N) => {
+      const place = Math.min(last, Math.max(first, N))
+      return (error(N) / Number.EPSILON) * Math.min(1, (Math.abs(density(place)) * today) / trail.rate(place) ** 2)
+    },
   }
 }
 

@@ -10,6 +10,7 @@ import type { Samples, Zone } from '../zone'
 import { fieldLaw } from './law'
 import { clockRate, type Field, RATE, SCALE } from './motion'
 import { type Leg, scaleIn, timeAt, trailByTime } from './trail'
+import { VOYAGE_ERROR } from './voyage'
 
 export interface Route {
   readonly field: Field
@@ -31,7 +32,7 @@ function timedZone({ step, from, to }: Leg, forward: boolean, direction: Directi
     distanceAt: (s) => direction * scaleIn(leg, tau(s)),
     variableAt: (m) => sign * (timeAt(leg, direction * m) - origin),
     expansion: (s) => valueIn(step, RATE, tau(s)) ** 2,
-    conditioning: () => 2,
+    conditioning: () => VOYAGE_ERROR / Number.EPSILON,
     sampleInto(out: Samples, centre, half) {
       for (let k = 0; k < NODE_COUNT; k++) {
         const at = tau(centre + half * NODES[k])
@@ -55,7 +56,10 @@ export function timedArm(route: Route, legs: readonly Leg[], forward: boolean, d
 /** E² is that of the integration, which stays right where the sum of densities cancels. */
 function timedModel({ field, budget, today }: Route, ascending: readonly Leg[]): Model {
   const trail = trailByTime(field, ascending)
-  const model = modelOf(budget, fieldLaw(trail, today, { before: 6, after: 6 }))
+  const model = modelOf(
+    budget,
+    fieldLaw(trail, { today, outside: { before: 6, after: 6 }, breaks: [], error: () => VOYAGE_ERROR }),
+  )
   const first = trail.edges[0]
   const expansion = (N: number, inverseScale: number) => {
     if (N < first) return model.expansion(N, inverseScale)

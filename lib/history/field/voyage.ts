@@ -5,6 +5,8 @@ import { byTime, type Field, project, RATE, SCALE, TIMED_PHI, TIMED_SPEED } from
 import type { Leg } from './trail'
 
 const TOLERANCE = 1e-11
+/** Relative error of E² that the steps may add up to; ten times what the reference set shows. */
+export const VOYAGE_ERROR = 1e-10
 /** Relative size of everything but φ̇²/6 in E² from which the way to the crunch is one power of a, good to 1e-17 with its corrections. */
 const SMALL = 2e-9
 /** E² beyond which the contraction is left to its power: squares are still doubles. */
