@@ -1,5 +1,4 @@
 /** The field after today while the universe only expands: step by step in N until its law is a power of a. */
-
 import { type Purse, type Step, travel, valueIn } from '../../numerics/ode'
 import { brent } from '../../numerics/roots'
 import type { Budget } from '../../scenario/budget'
@@ -15,6 +14,13 @@ const LATE_TOLERANCE = 1e-8
 const [ERROR, LATE_ERROR] = [1e-10, 1e-7]
 /** The same for integrals over the average of swings that are not followed, of the order of (H/m)². */
 const AVERAGED = 3e-5
+
+/** Swings of the field that are followed; from then on it is dust on the average. */
+const MOST_SWINGS = 60
+/** n has come to rest at its last value. */
+const SETTLED = 1e-11
+/** Share of E² in the sizes of its parts below which the way through a turning point is followed by time. */
+const SHALLOW = 0.05
 
 /** Relative error of ρ at N. */
 export function errorAhead(outlook: Ahead, N: number): number {
