@@ -20,10 +20,14 @@ const MIDDLE = 1e-9
 /** Farthest apart looks lie in ln(height), and how many fall to half a swing of the field. */
 const WIDEST = 0.35
 const PER_SWING = 5
+/** How far below the smallest conceivable height, in its logarithm, the largest Ω_DE is looked for. */
+const LOWEST = 15
 /** Heights at which the field swings more often before today are not tried. */
 const MOST_SWINGS = 30
 /** Evaluations of the equation of motion for one search. */
 export const BUDGET = 200_000
+
+const scratch = new Float64Array(3)
 
 /** A field on its way to today. */
 export interface Shot {
@@ -51,20 +55,32 @@ export const fieldOf = (search: Search, y: number): Field => ({
   height: lowestOf(search) * Math.exp(y),
 })
 
-/** Follows the field from rest to today. */
+/** Follows the field from rest to today; no farther than to where it is clear that it does not arrive with a positive energy. */
 function shoot(search: Search, y: number, tolerance: number): Shot {
   const field = fieldOf(search, y)
   const state = Float64Array.of(search.potential.start, 0)
-  let [swings, sign] = [0, 0]
-  const after = (_: number, { 1: speed }: Float64Array) => {
+  let [swings, sign, turns] = [0, 0, false]
+  const after = (N: number, { 0: phi, 1: speed }: Float64Array) => {
     if (sign * speed < 0) swings++
     sign = Math.sign(speed)
-    return false
+    turns = nearlyTurned(field, N, phi, speed)
+    return turns || energyOf(field, phi, speed) <= 0
   }
   const arrival = run(field, state, tolerance, search.purse, after, false)
-  if (arrival === 'spent') throw overBudget('The field swings too often before today to be followed.')
-  const excess = arrival === 'there' ? (energyOf(field, state[0], state[1]) - search.target) / search.target : null
+  if (arrival === 'spent') throw overBudget('The height of the potential is not found.')
+  if (arrival === 'stuck' || turns) return { y, excess: null, swings }
+  // The energy only falls: where it is used up before today, nothing is left today.
+  const excess = arrival === 'there' ? energyOf(field, state[0], state[1]) / search.target - 1 : -1
   return { y, excess, swings }
+}
+
+/** E² in its last digits beside its parts. */
+function nearlyTurned(field: Field, N: number, phi: number, speed: number): boolean {
+  const { background, potential, height } = field
+  if (potential.positive && background.budget.curvature >= 0) return false
+  background.into(scratch, N)
+  const sizes = scratch[2] + (speed * speed) / 6 + Math.abs(height * potential.value(phi))
+  return !(scratch[0] + energyOf(field, phi, speed) > 1e-6 * sizes)
 }
 
 function run(
@@ -117,8 +133,8 @@ function bracketOf(search: Search): readonly [Shot, Shot] {
   throw unreachable(search, best, last)
 }
 
-/** A universe that does not arrive has no Ω_DE at all. */
-const excessOf = (shot: Shot): number => shot.excess ?? -1
+/** A universe that does not arrive has less than any Ω_DE. */
+const excessOf = (shot: Shot): number => shot.excess ?? Number.NEGATIVE_INFINITY
 
 function signChange(search: Search, last: Shot, next: Shot): readonly [Shot, Shot] | null {
   if (next.excess === null) return null
@@ -130,6 +146,7 @@ function signChange(search: Search, last: Shot, next: Shot): readonly [Shot, Sho
 function mayRise(before: Shot, last: Shot, next: Shot, best: Shot): boolean {
   const [a, b, c] = [excessOf(before), excessOf(last), excessOf(next)]
   if (!(a < b && c < b) || b >= 0) return false
+  if (!Number.isFinite(a + c)) return true
   const [p, q] = [(b - a) / (last.y - before.y), (c - b) / (next.y - last.y)]
   const bend = (p - q) / (next.y - before.y)
   const slope = p - bend * (last.y - before.y)
@@ -162,7 +179,7 @@ function peakOf(search: Search, from: number, inner: Shot, to: number): Shot {
     const right = high - best.y > best.y - low
     const y = best.y + 0.381966 * (right ? high - best.y : low - best.y)
     const shot = shoot(search, y, MIDDLE)
-    if ((shot.excess ?? -1) > (best.excess ?? -1)) {
+    if (excessOf(shot) > excessOf(best)) {
       ;[low, high] = right ? [best.y, high] : [low, best.y]
       best = shot
     } else if (right) high = y
@@ -204,8 +221,6 @@ function narrowed(search: Search, one: Shot, other: Shot): readonly [Shot, Shot]
   return [a, b]
 }
 
-const scratch = new Float64Array(3)
-
 /** ln of the greatest height that is tried: the field at rest then weighs as much as all the rest at a = 10⁻⁶. */
 function highest({ background, target }: Search): number {
   background.into(scratch, FROZEN)
@@ -213,10 +228,23 @@ function highest({ background, target }: Search): number {
   return scratch[0] > 0 ? Math.log(Math.max(scratch[0] / target, 1e12)) : Math.log(1e37 * Math.max(1, 1 / target))
 }
 
+/** Heights below the smallest that could do are looked at only to say how much Ω_DE can be reached. */
+function largest(search: Search, best: Shot): Shot {
+  if (best.y > 0) return best
+  let [above, top] = [best, best]
+  for (let y = -WIDEST; y > -LOWEST; y -= WIDEST) {
+    const next = shoot(search, y, COARSE)
+    if (excessOf(next) < excessOf(top)) return peakOf(search, y, top, Math.max(above.y, top.y + 1e-4))
+    ;[above, top] = [top, next]
+  }
+  return top
+}
+
 function unreachable(search: Search, best: Shot, last: Shot): Error {
-  if (best.excess === null)
+  const { excess } = largest(search, best)
+  if (excess === null)
     return unsolvable('With this field the universe does not grow to its present size, whatever the height of V.')
-  const most = Number((search.target * (1 + best.excess)).toPrecision(3))
+  const most = Number((search.target * (1 + excess)).toPrecision(3))
   const far =
     last.swings < MOST_SWINGS
       ? ''

@@ -69,7 +69,9 @@ function followed(now: Now): Ahead {
   // With V ≥ 0 in flat or open space E² is a sum of positive terms.
   const mayTurn = !field.potential.positive || now.budget.curvature < 0
   const outlook = lookAhead(field, state, purse, mayTurn)
-  if (outlook.kind !== 'shallow') return expanding(now, outlook)
+  // Swings thin out like dust, which a closed universe does not outlast.
+  const turns = outlook.kind === 'shallow' || (outlook.kind === 'swinging' && now.budget.curvature < 0)
+  if (!turns) return expanding(now, outlook)
   const voyage = travelOn(field, state, purse)
   if (voyage.end === 'expanding' && voyage.turns.length === 0)
     return expanding(now, lookAhead(field, state, purse, false))
@@ -79,8 +81,6 @@ function followed(now: Now): Ahead {
 function expanding(now: Now, outlook: Outlook): Ahead {
   if (outlook.kind === 'spent' || outlook.kind === 'shallow')
     throw overBudget('The future of this field takes too many steps.')
-  if (outlook.kind === 'swinging' && now.budget.curvature < 0)
-    throw overBudget('The field swings too often before this closed universe turns round.')
   const trail = trailByScale(now.field, outlook.steps, outlook.end)
   const law = fieldLaw(trail, {
     today: now.today,

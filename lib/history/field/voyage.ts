@@ -82,9 +82,9 @@ function outcomeAt(field: Field, state: Float64Array, turns: number): Voyage['en
   return H * H > LARGEST && kinetic > 0.99 * H * H ? (N < -1 ? 'crunch' : 'overflow') : null
 }
 
-/** Nothing but the potential is left: no turning point is in sight. */
+/** Nothing but a potential is left that goes on for ever and falls no faster than it does here: no turning point is in sight. */
 function accelerates(field: Field, state: Float64Array): boolean {
-  if (!field.potential.positive) return false
+  if (field.potential.kind !== 'exponential' && field.potential.kind !== 'inverse') return false
   field.background.into(scratch, state[SCALE])
   const potential = field.height * field.potential.value(state[TIMED_PHI])
   return scratch[2] + state[TIMED_SPEED] ** 2 / 6 < 1e-3 * potential
