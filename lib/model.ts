@@ -3,10 +3,10 @@
  * Ω_r a⁻⁴ + Σ Ω_ν(a) + Ω_c a⁻³ + Ω_k a⁻² + Ω_DE f(a), with E(1) = 1.
  * Every component is Ω e^(−∫n dN); its derivatives follow from n and n′ (Friedmann's equation and the conservation of energy).
  */
-import type { Asymptote, Law } from './dark-energy/law'
+import type { Asymptote, Law, Logarithmic, Part } from './dark-energy/law'
 import { energyDerivatives, energyRatio, energyRatioChange, logSlope, logSlopeDerivative } from './neutrinos/energy'
+import { relativeBend } from './numerics/bend'
 import { expm2 } from './numerics/exponential'
-import { gaussLegendre } from './numerics/gauss-legendre'
 import type { Budget } from './scenario/budget'
 import type { MassiveState } from './scenario/radiation'
 
@@ -25,23 +25,32 @@ export interface Derivatives {
   second: number
 }
 
-/** One component of E², for arguments about signs and growth. */
-export interface Component {
-  readonly key: 'radiation' | 'matter' | 'neutrino' | 'curvature' | 'dark'
-  /** Ω today, with its sign. */
+/** A term of E² that keeps its sign. */
+export interface Term {
+  /** Carries the sign. */
   readonly omega: number
   /** ln |Ω f| at N. */
   logSize(N: number): number
   /** Bounds of the exponent n on [from, to]. */
   exponentRange(from: number, to: number): readonly [number, number]
-  /** (g(N + d) − g(N) − d g′(N))/g(N), without cancellation for small d. */
+}
+
+/** One component of E², for arguments about signs and growth. Its Ω today carries the sign unless it has terms of both. */
+export interface Component extends Term {
+  readonly key: 'radiation' | 'matter' | 'neutrino' | 'curvature' | 'dark'
+  /** Ω f at N. */
+  density(N: number): number
+  /** Ω f(N + d) − Ω f(N) − d Ω f′(N), without cancellation for small d. */
   bend(N: number, d: number): number
+  /** What it is the sum of where it changes sign outwards; null in a direction where it does not, absent where it never does. */
+  readonly terms?: (direction: 1 | -1) => readonly Term[] | null
   readonly past: Asymptote
   readonly future: Asymptote
 }
 
 /** Today: E² = 1 exactly. */
 export const TODAY: Anchor = { N: 0, value: 1 }
+const NEAR_TODAY = 0.7
 
 export interface Model {
   readonly budget: Budget
@@ -50,9 +59,11 @@ export interface Model {
   readonly components: readonly Component[]
   /** E² at N, with a⁻¹ = e^(−N) passed in by callers who know it more exactly. */
   expansion(N: number, inverseScale: number): number
+  /** E² at N where dark energy over its density today is known better than from N. */
+  expansionWith(N: number, density: number): number
   /** Do today's densities cancel to 1 from a sum of sizes above 4? */
   readonly cancels: boolean
-  /** Is any component negative? */
+  /** Is any component negative, now or ever? */
   readonly signed: boolean
   /** E²(anchor.N + d), without cancellation for small d. */
   expansionFrom(anchor: Anchor, d: number): number
@@ -72,18 +83,18 @@ export function modelOf(budget: Budget, law: Law): Model {
   const states = budget.states
 
   const expansion = (N: number, inverseScale: number): number => {
-    const x = inverseScale
+    const known = withoutDark(inverseScale)
+    return dark === 0 ? known : known + dark * law.density(N)
+  }
+  const withoutDark = (x: number): number => {
     let relativistic = radiation
     for (const state of states) relativistic += state.masslessDensity * energyRatio(state.y / x)
-    const known = ((relativistic * x + coldMatter) * x + curvature) * x * x
-    if (dark === 0) return known
-    const log = law.logDensity(N)
-    return known + (log === 0 ? dark : dark * Math.exp(log))
+    return ((relativistic * x + coldMatter) * x + curvature) * x * x
   }
 
   /** E²(anchor.N + d) − E²(anchor.N), and the sum of the sizes of its terms in `size`. */
   let size = 0
-  const changeFrom = (anchor: Anchor, d: number): number => {
+  const changeFrom = (anchor: Anchor, d: number, inDark = dark === 0 ? 0 : law.change(anchor.N, d)): number => {
     const x = Math.exp(-anchor.N)
     const e = Math.expm1(-d)
     const squared = e * (e + 2)
@@ -96,7 +107,7 @@ export function modelOf(budget: Budget, law: Law): Model {
       relativistic += state.masslessDensity * energyRatio(y) * (fourth + energyRatioChange(y, d) * (1 + fourth))
     }
     const r = relativistic * x * x * x * x
-    const de = dark === 0 ? 0 : dark * Math.exp(law.logDensity(anchor.N)) * Math.expm1(law.logChange(anchor.N, d))
+    const de = dark * inDark
     size = Math.abs(k) + Math.abs(m) + Math.abs(r) + Math.abs(de)
     return k + m + r + de
   }
@@ -116,20 +127,29 @@ export function modelOf(budget: Budget, law: Law): Model {
       energyDerivatives(y, energy)
       add(state.masslessDensity * energy[0] * x ** 4, 4 - energy[1], -energy[2])
     }
-    if (dark !== 0) add(dark * Math.exp(law.logDensity(N)), 3 * (1 + law.w(N)), 3 * law.wSlope(N))
-    return out
+    if (dark === 0) return out
+    law.derivativesInto(energy, N)
+    return {
+      value: out.value + dark * energy[0],
+      first: out.first + dark * energy[1],
+      second: out.second + dark * energy[2],
+    }
   }
 
   const components = componentsOf(budget, law)
+  const cancels = components.reduce((sum, one) => sum + Math.abs(one.omega), 0) > 4
   return {
     budget,
     law,
     components,
-    cancels: components.reduce((sum, one) => sum + Math.abs(one.omega), 0) > 4,
-    signed: components.some((one) => one.omega < 0),
+    cancels,
+    signed: components.some((one) => one.omega < 0 || one.terms !== undefined),
     expansion,
-    bendFrom: (N, d) =>
-      components.reduce((sum, one) => sum + Math.sign(one.omega) * Math.exp(one.logSize(N)) * one.bend(N, d), 0),
+    expansionWith: (N, density) =>
+      cancels && Math.abs(N) < NEAR_TODAY
+        ? 1 + changeFrom(TODAY, N, density - 1)
+        : withoutDark(Math.exp(-N)) + dark * density,
+    bendFrom: (N, d) => components.reduce((sum, one) => sum + one.bend(N, d), 0),
     expansionFrom: (anchor, d) => anchor.value + changeFrom(anchor, d),
     magnitudeFrom(anchor, d) {
       changeFrom(anchor, d)
@@ -142,7 +162,27 @@ export function modelOf(budget: Budget, law: Law): Model {
 
 /** E² at N by the form that rounds least: from today's E² = 1 nearby where large densities cancel, as the plain sum elsewhere. */
 export function expansionAt(model: Model, N: number, inverseScale: number): number {
-  return model.cancels && Math.abs(N) < 0.7 ? model.expansionFrom(TODAY, N) : model.expansion(N, inverseScale)
+  return model.cancels && Math.abs(N) < NEAR_TODAY ? model.expansionFrom(TODAY, N) : model.expansion(N, inverseScale)
+}
+
+export const asymptoteOf = (one: Component, direction: 1 | -1): Asymptote => (direction > 0 ? one.future : one.past)
+
+/** How dark energy varies in this direction where it goes like a power of ln a, else null. */
+export function logarithmicIn(model: Model, direction: 1 | -1): Logarithmic | null {
+  if (model.budget.dark === 0) return null
+  const asymptote = direction > 0 ? model.law.future : model.law.past
+  return asymptote.kind === 'logarithmic' ? asymptote : null
+}
+
+/** ln E² at N, also where E² itself leaves the doubles; for components that keep their signs. */
+export function logExpansion(model: Model, N: number): number {
+  const logs = model.components.map((one) => one.logSize(N))
+  const largest = Math.max(...logs)
+  const sum = model.components.reduce(
+    (total, one, i) => total + Math.sign(one.omega) * Math.exp((logs[i] ?? largest) - largest),
+    0,
+  )
+  return largest + Math.log(sum)
 }
 
 function componentsOf(budget: Budget, law: Law): readonly Component[] {
@@ -156,10 +196,6 @@ function componentsOf(budget: Budget, law: Law): readonly Component[] {
   return all.filter((one) => one.omega !== 0)
 }
 
-/** Bend of g from L = ln g(N + d)/g(N) and n′: expm2(L) + L + n d, where L + n d = −∫₀^d (d − t) n′(N + t) dt. */
-const bendOf = (logChange: number, d: number, exponentSlope: (t: number) => number): number =>
-  expm2(logChange) - gaussLegendre((t) => (d - t) * exponentSlope(t), 0, d)
-
 function powerComponent(key: Component['key'], omega: number, exponent: number): Component {
   const logCoefficient = Math.log(Math.abs(omega))
   const range = [exponent, exponent] as const
@@ -169,7 +205,8 @@ function powerComponent(key: Component['key'], omega: number, exponent: number):
     omega,
     logSize: (N) => logCoefficient - exponent * N,
     exponentRange: () => range,
-    bend: (_, d) => expm2(-exponent * d),
+    density: (N) => omega * Math.exp(-exponent * N),
+    bend: (N, d) => omega * Math.exp(-exponent * N) * expm2(-exponent * d),
     past: asymptote,
     future: asymptote,
   }
@@ -184,22 +221,34 @@ function darkComponent(omega: number, law: Law): Component {
     omega,
     logSize: (N) => log + law.logDensity(N),
     exponentRange: law.exponentRange,
-    bend: (N, d) => bendOf(law.logChange(N, d), d, (t) => 3 * law.wSlope(N + t)),
+    density: (N) => omega * law.density(N),
+    bend: (N, d) => omega * law.bend(N, d),
+    terms: law.parts && ((direction) => law.parts?.(direction)?.map((part) => termOf(omega, part)) ?? null),
     past: scaled(law.past),
     future: scaled(law.future),
   }
+}
+
+function termOf(darkEnergy: number, { factor, logDensity, exponentRange }: Part): Term {
+  const omega = darkEnergy * factor
+  const log = Math.log(Math.abs(omega))
+  return { omega, logSize: (N) => log + logDensity(N), exponentRange }
 }
 
 /** The exponent of a massive state falls from 4 to 3, since the logarithmic slope of its energy ratio rises from 0 to 1. */
 function neutrinoComponent(state: MassiveState): Component {
   const y = (N: number) => state.y * Math.exp(N)
   const logMassless = Math.log(state.masslessDensity)
+  const density = (N: number) => state.masslessDensity * energyRatio(y(N)) * Math.exp(-4 * N)
   // The energy ratio is 1 + 0.07 y² at small y and (y/3.15)(1 + 6.5/y²) at large y: settled where the corrections are below 1e-17.
   return {
     key: 'neutrino',
     omega: state.density,
     logSize: (N) => logMassless + Math.log(energyRatio(y(N))) - 4 * N,
-    bend: (N, d) => bendOf(Math.log1p(energyRatioChange(y(N), d)) - 4 * d, d, (t) => -logSlopeDerivative(y(N + t))),
+    density,
+    bend: (N, d) =>
+      density(N) *
+      relativeBend(Math.log1p(energyRatioChange(y(N), d)) - 4 * d, d, (t) => -logSlopeDerivative(y(N + t))),
     exponentRange: (from, to) => [4 - logSlope(y(to)), 4 - logSlope(y(from))],
     past: { kind: 'power', exponent: 4, logCoefficient: logMassless, settled: Math.log(1e-8 / state.y) },
     future: {

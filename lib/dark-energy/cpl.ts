@@ -1,5 +1,7 @@
 import { type Asymptote, type Family, type Law, numberOf } from './law'
 import { powerLaw } from './power-law'
+import { rangeBetween, smoothLaw } from './smooth-law'
+import { W_TODAY, wSlopeParameter } from './two-numbers'
 
 /** f = a^(−3(1+w0+wa)) e^(−3wa(1−a)): closed form of Linder 2003, Phys. Rev. Lett. 90, 091301, eq. 7. */
 function linearInScale(w0: number, wa: number): Law {
@@ -13,19 +15,15 @@ function linearInScale(w0: number, wa: number): Law {
     // |3 wa a| < 1e-17
     settled: Math.log(1e-17 / Math.abs(3 * wa)),
   }
-  return {
+  return smoothLaw({
     logDensity: (N) => -early * N + 3 * wa * Math.expm1(N),
     logChange: (N, d) => -early * d + 3 * wa * Math.exp(N) * Math.expm1(d),
     w,
     wSlope: (N) => -wa * Math.exp(N),
-    exponentRange: (from, to) => {
-      const [one, other] = [3 * (1 + w(from)), 3 * (1 + w(to))]
-      return one < other ? [one, other] : [other, one]
-    },
+    exponentRange: (from, to) => rangeBetween(w(from), w(to)),
     past,
     future: { kind: wa > 0 ? 'exploding' : 'vanishing' },
-    breaks: [],
-  }
+  })
 }
 
 export const cpl: Family = {
@@ -35,31 +33,6 @@ export const cpl: Family = {
   meaning: 'w moves from w_0 + w_a in the early universe through w_0 today, and on without bound in the future.',
   source: 'Chevallier & Polarski 2001, Int. J. Mod. Phys. D 10, 213; Linder 2003, Phys. Rev. Lett. 90, 091301',
   caution: 'The law describes the past; beyond today w runs away linearly in a, which no measurement supports.',
-  parameters: [
-    {
-      kind: 'number',
-      key: 'w0',
-      symbol: 'w_0',
-      label: 'w today',
-      unit: '',
-      meaning: 'Pressure over energy density of dark energy today.',
-      min: -20,
-      max: 20,
-      fallback: -1,
-      slider: { min: -2, max: 0.4, step: 0.01 },
-    },
-    {
-      kind: 'number',
-      key: 'wa',
-      symbol: 'w_a',
-      label: 'slope of w',
-      unit: '',
-      meaning: '−dw/da: by how much w was larger in the early universe than today.',
-      min: -20,
-      max: 20,
-      fallback: 0,
-      slider: { min: -3, max: 2, step: 0.01 },
-    },
-  ],
+  parameters: [W_TODAY, wSlopeParameter('−dw/da: by how much w was larger in the early universe than today.')],
   law: (values) => linearInScale(numberOf(values, 'w0'), numberOf(values, 'wa')),
 }

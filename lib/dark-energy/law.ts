@@ -3,6 +3,7 @@
  * n = 3(1 + w) = −d ln f/dN is the local exponent: f ∝ a^(−n).
  */
 import type { Parameter, ParameterValues } from '../parameter'
+import type { Potential } from './potential'
 
 /** What a law tends to as N → −∞ (past) or N → +∞ (future). */
 export type Asymptote =
@@ -12,22 +13,57 @@ export type Asymptote =
   | { readonly kind: 'vanishing' }
   /** Faster to infinity than every power of a. */
   | { readonly kind: 'exploding' }
+  | Logarithmic
+
+/** f = (1 + rate N)^power exactly: it varies like a power of ln a, more slowly than every power of a. */
+export interface Logarithmic {
+  readonly kind: 'logarithmic'
+  readonly rate: number
+  readonly power: number
+  /** power − 2, free of cancellation: above 0, all of time is finite where f grows. */
+  readonly overTwo: number
+  /** Where 1 + rate N reaches zero in this direction, and what that means; null where it never does. */
+  readonly edge: Edge | null
+}
+
+export interface Edge {
+  readonly N: number
+  /** The density or the pressure diverges and the law ends; or f = 0 from there on. */
+  readonly kind: 'singular' | 'empty'
+}
+
+/** A part of f that keeps its sign, for arguments about roots. */
+export interface Part {
+  /** With the sign of the part. */
+  readonly factor: number
+  /** ln of the part over its factor. */
+  logDensity(N: number): number
+  exponentRange(from: number, to: number): readonly [number, number]
+}
 
 export interface Law {
-  /** ln f(N) with f = ρ/ρ_today; f(0) = 1. */
+  /** f(N) = ρ/ρ_today; f(0) = 1. */
+  density(N: number): number
+  /** ln |f(N)|, −∞ where f = 0. */
   logDensity(N: number): number
-  /** ln f(N + d) − ln f(N), without cancellation for small d. */
-  logChange(N: number, d: number): number
+  /** f(N + d) − f(N), without cancellation for small d. */
+  change(N: number, d: number): number
+  /** f(N + d) − f(N) − d f′(N), without cancellation for small d. */
+  bend(N: number, d: number): number
+  /** f, f′ and f″ by N. */
+  derivativesInto(out: Float64Array, N: number): void
   /** w(N). */
   w(N: number): number
-  /** dw/dN. */
-  wSlope(N: number): number
   /** Bounds of n = 3(1 + w) over from ≤ N ≤ to; either end may be infinite. Every value lies inside. */
   exponentRange(from: number, to: number): readonly [number, number]
+  /** f as a sum of parts, where f itself changes sign outwards; absent where it never does. */
+  readonly parts?: (direction: 1 | -1) => readonly Part[] | null
   readonly past: Asymptote
   readonly future: Asymptote
   /** Values of N where a derivative of the law jumps; empty for an analytic law. */
   readonly breaks: readonly number[]
+  /** By how much the law's own error can move E², relative to it and in units of eps; absent where that is rounding. */
+  readonly noise?: (N: number) => number
 }
 
 /** A family of laws: one file, one line in the list (index.ts). Form, URL keys, method page and tests follow from it. */
@@ -47,12 +83,24 @@ export interface Family {
   readonly parameters: readonly Parameter[]
   /** Conditions that tie parameters together: the key at fault and what is allowed, or null. */
   readonly conflict?: (values: ParameterValues) => { readonly key: string; readonly allowed: string } | null
+  /** The law is defined for a positive density only. */
+  readonly positive?: true
+  /** Of a scalar field, `law` knows the bounds of n alone. */
   readonly law: (values: ParameterValues) => Law
+  /** Present where dark energy is a trajectory: the history follows the field on this potential instead of a law. */
+  readonly potential?: (values: ParameterValues) => Potential
 }
 
 /** A number among a family's values: the reader has checked kind and limits before. */
 export function numberOf(values: ParameterValues, key: string): number {
   const value = values[key]
   if (typeof value !== 'number') throw new TypeError(`the parameter ${key} is not a number`)
+  return value
+}
+
+/** A list among a family's values. */
+export function listOf(values: ParameterValues, key: string): readonly number[] {
+  const value = values[key]
+  if (!Array.isArray(value)) throw new TypeError(`the parameter ${key} is not a list`)
   return value
 }

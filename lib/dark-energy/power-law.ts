@@ -1,12 +1,13 @@
 /** f = a^(−n) with one exponent throughout: the law of a constant w, and what `beyond:hold` continues with. */
 import type { Law } from './law'
+import { smoothLaw } from './smooth-law'
 
 /** Law of constant w, any finite w; exact but for rounding. */
 export function powerLaw(w: number): Law {
   const n = 3 * (1 + w)
   const asymptote = { kind: 'power', exponent: n, logCoefficient: 0, settled: 0 } as const
   const range = [n, n] as const
-  return {
+  const law = smoothLaw({
     logDensity: n === 0 ? () => 0 : (N) => -n * N,
     logChange: n === 0 ? () => 0 : (_, d) => -n * d,
     w: () => w,
@@ -14,6 +15,6 @@ export function powerLaw(w: number): Law {
     exponentRange: () => range,
     past: asymptote,
     future: asymptote,
-    breaks: [],
-  }
+  })
+  return n === 0 ? { ...law, density: () => 1, change: () => 0, bend: () => 0 } : law
 }

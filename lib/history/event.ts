@@ -39,7 +39,10 @@ export function eventAtScale(history: History, N: number, branch: Branch): Found
     const place = placeAt(history[phase], Math.abs(N))
     return place ? event(phase, place) : missing('the expansion that holds today never has this scale factor')
   }
-  if (history.future.end.kind === 'root') return contracting('home', N > 0 ? history.future : history.home, N)
+  if (history.future.end.kind === 'root') {
+    if (history.unfollowed) return missing(history.unfollowed.because)
+    return contracting('home', N > 0 ? history.descent : history.home, N)
+  }
   if (history.past.end.kind === 'root') return contracting('before', N > 0 ? history.before : history.past, N)
   return missing('this universe has no contracting branch')
 }
@@ -64,6 +67,7 @@ export function eventAtAge(history: History, age: number): Found {
   return place ? event('past', place) : missing(OUT_OF_RANGE)
 }
 
+const AFTER_THE_END = 'this is after the end'
 const OUT_OF_RANGE = 'the scale factor there is outside the range of floating-point numbers'
 
 function pastEvent(history: History, elapsed: number): Found {
@@ -82,8 +86,10 @@ function futureEvent(history: History, elapsed: number): Found {
     const place = placeElapsed(future, 'time', elapsed)
     return place ? event('future', place) : missing(OUT_OF_RANGE)
   }
-  if (future.end.kind !== 'root') return missing('this is after the end')
-  return mirrored(history, 'home', elapsed - future.time.total, 'this is after the end')
+  if (future.end.kind !== 'root') return missing(AFTER_THE_END)
+  const since = elapsed - future.time.total
+  if (history.unfollowed) return missing(since > history.unfollowed.time ? AFTER_THE_END : history.unfollowed.because)
+  return mirrored(history, 'home', since, AFTER_THE_END)
 }
 
 const beforeBounce = (history: History, since: number): Found =>
@@ -91,7 +97,7 @@ const beforeBounce = (history: History, since: number): Found =>
 
 /** The two arms that lie beyond a turning point: first the one that leads back towards today's size, then the one beyond it. */
 const swing = (history: History, phase: 'home' | 'before'): readonly [Arm, Arm] =>
-  phase === 'home' ? [history.future, history.home] : [history.past, history.before]
+  phase === 'home' ? [history.descent, history.home] : [history.past, history.before]
 
 /** `since` a turning point, away from today: back along the near arm, on along the far one; from a second turning point to and fro. */
 function mirrored(history: History, phase: 'home' | 'before', since: number, beyond: string): Found {
@@ -100,7 +106,7 @@ function mirrored(history: History, phase: 'home' | 'before', since: number, bey
   if (since > whole && far.end.kind !== 'root') return missing(beyond)
   const swings = Number.isFinite(whole) ? Math.floor(since / whole) : 0
   const away = swings % 2 === 0
-  const left = away ? since - swings * whole : (swings + 1) * whole - since
+  const left = swings === 0 ? since : away ? since - swings * whole : (swings + 1) * whole - since
   const place =
     left <= near.time.total ? placeRemaining(near, 'time', left) : placeElapsed(far, 'time', left - near.time.total)
   if (!place) return missing(OUT_OF_RANGE)
@@ -140,15 +146,16 @@ export function sinceOrigin(history: History, one: Event, clock: Clock): number 
 
 /** Time or conformal time left to the end; Infinity where there is none. */
 export function untilEnd(history: History, one: Event, clock: Clock): number {
-  const { future, home } = history
+  const { future, descent, home, unfollowed } = history
   if (future.end.kind === 'double') return Number.POSITIVE_INFINITY
-  if (future.end.kind === 'none') {
+  if (future.end.kind === 'none' || future.end.kind === 'singular') {
     if (one.phase === 'future') return toEnd(one.place, clock)
     return future[clock].total - sinceNow(history, one, clock)
   }
-  if (home.end.kind !== 'none') return Number.POSITIVE_INFINITY
+  if (unfollowed) return future[clock].total + unfollowed[clock] - sinceNow(history, one, clock)
+  if (home.end.kind !== 'none' && home.end.kind !== 'singular') return Number.POSITIVE_INFINITY
   if (one.phase === 'home' && one.place.arm === home) return toEnd(one.place, clock)
-  return 2 * future[clock].total + home[clock].total - sinceNow(history, one, clock)
+  return future[clock].total + descent[clock].total + home[clock].total - sinceNow(history, one, clock)
 }
 
 /** E² at an event. */

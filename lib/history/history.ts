@@ -10,6 +10,7 @@ import type { Budget } from '../scenario/budget'
 import type { Scenario } from '../scenario/scenario'
 import { type Arm, armOf } from './arm'
 import { endOf } from './ending'
+import { fieldHistory } from './field/history'
 import { originOf } from './origin'
 import type { End, Origin } from './outcome'
 
@@ -20,15 +21,21 @@ export interface History {
   readonly future: Arm
   /** To larger a by the law of the past: the way in before a bounce, mirrored. */
   readonly before: Arm
-  /** To smaller a by the law of the future: the way back after a turnaround. */
+  /** From the turnaround back to today's size, told from there outwards: the future mirrored, unless dark energy has a memory. */
+  readonly descent: Arm
+  /** On from there to smaller a by the law of the future. */
   readonly home: Arm
+  /** What lies beyond the turnaround where it is no single way back to a = 0, and why it is not told further. */
+  readonly unfollowed?: { readonly time: number; readonly conformal: number; readonly because: string }
   readonly origin: Origin
   readonly end: End
 }
 
-/** All of it, in 1/H₀ and c/H₀. Explicit laws only; every time carries the error bound of its arm. */
+/** All of it, in 1/H₀ and c/H₀. Every time carries the error bound of its arm. */
 export function historyOf(scenario: Scenario, budget: Budget): History {
-  const followed = familyOf(scenario.eos).law(scenario.law)
+  const family = familyOf(scenario.eos)
+  if (family.potential) return fieldHistory(budget, family.potential(scenario.law), scenario.beyond === 'hold')
+  const followed = family.law(scenario.law)
   const past = modelOf(budget, followed)
   const held = scenario.beyond === 'hold' && budget.dark !== 0
   return assemble(past, held ? modelOf(budget, heldLaw(followed)) : past)
@@ -42,5 +49,12 @@ function assemble(pastLaw: Model, futureLaw: Model): History {
   const same = pastLaw === futureLaw
   const before = same || arms.past.end.kind === 'none' ? arms.future : armOf(pastLaw, 1)
   const home = same || arms.future.end.kind === 'none' ? arms.past : armOf(futureLaw, -1)
-  return { ...arms, before, home, origin: originOf(arms.past, before), end: endOf(arms.future, home) }
+  return {
+    ...arms,
+    descent: arms.future,
+    before,
+    home,
+    origin: originOf(arms.past, before),
+    end: endOf(arms.future, home),
+  }
 }

@@ -1,5 +1,7 @@
 /** Where a history comes from, decided by the first root of E² into the past or by the component that rules as a → 0. */
+import { logarithmicIn } from '../model'
 import type { Arm } from './arm'
+import { singularity } from './ending'
 import type { Origin } from './outcome'
 import { explodes, leadingExponent } from './tail'
 
@@ -7,11 +9,19 @@ import { explodes, leadingExponent } from './tail'
 export function originOf(past: Arm, back: Arm): Origin {
   if (past.end.kind === 'double') {
     const because = 'E² and its slope vanish together at this scale factor: the expansion emerges from a static state.'
-    return { kind: 'static', time: null, scale: Math.exp(past.end.N), proven: false, because }
+    const proven = past.model.components.length === 1
+    return { kind: 'static', time: null, scale: Math.exp(past.end.N), proven, because }
   }
-  if (past.end.kind === 'root') return turning(past, back, past.end.N, past.end.certain)
+  if (past.end.kind === 'singular') {
+    const at = { time: -past.time.total, scale: Math.exp(past.end.N) }
+    return { kind: 'singular', ...at, proven: true, because: singularity(past) }
+  }
+  const root = past.end.kind === 'root' ? past.end.N : past.end.farRoot
+  if (root !== null) return turning(past, back, root, past.end.kind !== 'root' || past.end.certain)
   const exponent = leadingExponent(past.model, past.direction)
-  const finite = explodes(past.model, past.direction) || (exponent !== null && exponent > 0)
+  // Something that varies like a power of ln a may still reach back to a = 0 in finite time.
+  const power = exponent === 0 ? (logarithmicIn(past.model, past.direction)?.overTwo ?? 0) : exponent
+  const finite = explodes(past.model, past.direction) || (power !== null && power > 0)
   return {
     kind: finite ? 'big-bang' : 'eternal',
     time: finite ? -past.time.total : null,

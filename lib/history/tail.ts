@@ -1,27 +1,41 @@
 /**
- * Beyond the last panel: E² is one power of a with small corrections, and the integrals are closed forms.
+ * Beyond the last panel: E² is one power of a with small corrections, or one power of ln a, and the integrals are closed forms.
  * With 1/E = e^(κ₀D)/E₁ · (1 − ½ Σ δ_i e^(−p_i D)), D the distance in ln a beyond the panel,
  * ∫ = 1/E₁ [I(κ) − ½ Σ δ_i I(κ + p_i)], I(κ) = (1 − e^(−κD))/κ. The next order is ⅜ δ² < 2e-18 of the leading one.
  */
-import type { Asymptote } from '../dark-energy/law'
-import type { Component, Model } from '../model'
+import type { Logarithmic } from '../dark-energy/law'
+import { asymptoteOf, type Component, logarithmicIn, type Model } from '../model'
+import { integralOfExp } from './far'
 import type { Direction } from './turning'
 
 export interface Tail {
   /** Where it begins. */
   readonly N: number
   readonly direction: Direction
-  readonly time: PowerIntegral
-  readonly conformal: PowerIntegral
+  readonly time: TailIntegral
+  readonly conformal: TailIntegral
   /** E² beyond, at distance D. */
   expansion(D: number): number
 }
 
+export type TailIntegral = PowerIntegral | SlowIntegral
+
 export interface PowerIntegral {
+  readonly kind: 'power'
   /** 1/E₁, times e^(−N) for η. */
   readonly scale: number
   /** Decay rate of the integrand per unit of D; not positive where the integral to infinity diverges. */
   readonly kappa: number
+  readonly corrections: readonly Correction[]
+}
+
+/** Of e^(−decay D) (1 + rate D)^(−1 − excess): E² goes like a power of ln a, and nothing else counts. */
+export interface SlowIntegral {
+  readonly kind: 'slow'
+  readonly scale: number
+  readonly decay: number
+  readonly rate: number
+  readonly excess: number
   readonly corrections: readonly Correction[]
 }
 
@@ -36,20 +50,25 @@ interface Correction {
 const SMALL = 2e-9
 const NEGLIGIBLE = 1e-19
 
-const asymptoteOf = (one: Component, direction: Direction): Asymptote => (direction > 0 ? one.future : one.past)
-
 /** Does a component outgrow every power in this direction? Then there is no closed tail, and no need of one. */
 export const explodes = (model: Model, direction: Direction): boolean =>
   model.components.some((one) => asymptoteOf(one, direction).kind === 'exploding')
 
+/** A power of ln a counts as exponent 0, unless it is used up at finite a. */
+export function exponentIn(one: Component, direction: Direction): number | null {
+  const asymptote = asymptoteOf(one, direction)
+  if (asymptote.kind === 'power') return asymptote.exponent
+  return asymptote.kind === 'logarithmic' && asymptote.edge?.kind !== 'empty' ? 0 : null
+}
+
 /** The exponent that wins in this direction, or null when no component follows a power. */
 export function leadingExponent(model: Model, direction: Direction): number | null {
-  const exponents = model.components.flatMap((one) => {
-    const asymptote = asymptoteOf(one, direction)
-    return asymptote.kind === 'power' ? [asymptote.exponent] : []
-  })
-  if (exponents.length === 0) return null
-  return direction > 0 ? Math.min(...exponents) : Math.max(...exponents)
+  let winner: number | null = null
+  for (const one of model.components) {
+    const exponent = exponentIn(one, direction)
+    if (exponent !== null && (winner === null || direction * exponent < direction * winner)) winner = exponent
+  }
+  return winner
 }
 
 /** The tail from N on, or null where corrections are still too large (or `anyway`, at the end of the doubles). */
@@ -60,14 +79,20 @@ export function tailAt(model: Model, direction: Direction, N: number, anyway = f
   const others: Component[] = []
   for (const one of model.components) {
     const asymptote = asymptoteOf(one, direction)
-    const leads = asymptote.kind === 'power' && asymptote.exponent === exponent
-    if (leads && !anyway && direction * (N - asymptote.settled) < 0) return null
+    const leads = exponentIn(one, direction) === exponent
+    if (leads && asymptote.kind === 'power' && !anyway && direction * (N - asymptote.settled) < 0) return null
     ;(leads ? leading : others).push(one)
   }
-  const density = leading.reduce((sum, one) => sum + Math.sign(one.omega) * Math.exp(one.logSize(N)), 0)
+  const density = leading.reduce((sum, one) => sum + one.density(N), 0)
+  if (!(density > 0)) return null
+  const slow = exponent === 0 ? logarithmicIn(model, direction) : null
+  if (slow)
+    return others.every((one) => Math.abs(one.density(N)) < NEGLIGIBLE * density)
+      ? slowTail(N, direction, density, slow)
+      : null
   const corrections = others.map((one) => correctionOf(one, direction, N, density, exponent))
   if (!anyway && corrections.some((one) => one === null || Math.abs(one.size) > SMALL)) return null
-  return assemble(
+  return powerTail(
     N,
     direction,
     exponent,
@@ -85,13 +110,13 @@ function correctionOf(
   exponent: number,
 ): Correction | null {
   const asymptote = asymptoteOf(one, direction)
-  const size = (Math.sign(one.omega) * Math.exp(one.logSize(N))) / density
+  const size = one.density(N) / density
   if (Math.abs(size) < NEGLIGIBLE) return { size: 0, rate: 1 }
   if (asymptote.kind !== 'power' || direction * (N - asymptote.settled) < 0) return null
   return { size, rate: direction * (asymptote.exponent - exponent) }
 }
 
-function assemble(
+function powerTail(
   N: number,
   direction: Direction,
   exponent: number,
@@ -103,8 +128,8 @@ function assemble(
   return {
     N,
     direction,
-    time: { scale, kappa, corrections },
-    conformal: { scale: scale * Math.exp(-N), kappa: kappa + direction, corrections },
+    time: { kind: 'power', scale, kappa, corrections },
+    conformal: { kind: 'power', scale: scale * Math.exp(-N), kappa: kappa + direction, corrections },
     expansion: (D) => {
       const sum = corrections.reduce((total, one) => total + one.size * Math.exp(-one.rate * D), 1)
       return density * Math.exp(-direction * exponent * D) * sum
@@ -112,8 +137,22 @@ function assemble(
   }
 }
 
+function slowTail(N: number, direction: Direction, density: number, law: Logarithmic): Tail {
+  const scale = 1 / Math.sqrt(density)
+  const rate = (direction * law.rate) / (1 + law.rate * N)
+  const shape = { kind: 'slow', rate, excess: law.overTwo / 2, corrections: [] } as const
+  return {
+    N,
+    direction,
+    time: { ...shape, scale, decay: 0 },
+    conformal: { ...shape, scale: scale * Math.exp(-N), decay: direction },
+    expansion: (D) => density * Math.exp(law.power * Math.log1p(rate * D)),
+  }
+}
+
 /** ∫ from the beginning of the tail out to D. */
-export function elapsedIn(integral: PowerIntegral, D: number): number {
+export function elapsedIn(integral: TailIntegral, D: number): number {
+  if (integral.kind === 'slow') return slowElapsed(integral, D)
   const term = (kappa: number) => (kappa === 0 ? D : -Math.expm1(-kappa * D) / kappa)
   return (
     integral.scale *
@@ -125,7 +164,8 @@ export function elapsedIn(integral: PowerIntegral, D: number): number {
 }
 
 /** ∫ from D out to infinity; Infinity where it diverges. */
-export function remainingIn(integral: PowerIntegral, D: number): number {
+export function remainingIn(integral: TailIntegral, D: number): number {
+  if (integral.kind === 'slow') return slowRemaining(integral, D)
   if (integral.kappa <= 0) return Number.POSITIVE_INFINITY
   const term = (kappa: number) => Math.exp(-kappa * D) / kappa
   return (
@@ -135,4 +175,25 @@ export function remainingIn(integral: PowerIntegral, D: number): number {
       term(integral.kappa),
     )
   )
+}
+
+const logSlow =
+  ({ decay, rate, excess }: SlowIntegral) =>
+  (D: number) =>
+    -decay * D - (1 + excess) * Math.log1p(rate * D)
+
+function slowElapsed(integral: SlowIntegral, D: number): number {
+  const { scale, decay, rate, excess } = integral
+  if (decay !== 0) return scale * integralOfExp(logSlow(integral), 0, D)
+  const growth = Math.log1p(rate * D)
+  return (scale / rate) * (excess === 0 ? growth : -Math.expm1(-excess * growth) / excess)
+}
+
+/** To infinity, or to where 1 + rate D vanishes and the law ends. */
+function slowRemaining(integral: SlowIntegral, D: number): number {
+  const { scale, decay, rate, excess } = integral
+  if (decay < 0 && rate > 0) return Number.POSITIVE_INFINITY
+  if (decay !== 0) return scale * integralOfExp(logSlow(integral), D, rate < 0 ? -1 / rate : Number.POSITIVE_INFINITY)
+  if (!(excess * rate > 0)) return Number.POSITIVE_INFINITY
+  return (scale * Math.exp(-excess * Math.log1p(rate * D))) / (rate * excess)
 }

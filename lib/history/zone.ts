@@ -2,7 +2,8 @@
  * The two integrands of every time and distance, dt = dN/E and dη = dN/(aE), in variables in which they are smooth.
  * A zone is a stretch of one direction from today; s grows outwards, and m = |N| is the distance from today in ln a.
  */
-import { type Anchor, expansionAt, type Model } from '../model'
+import type { Logarithmic } from '../dark-energy/law'
+import { type Anchor, expansionAt, logExpansion, type Model } from '../model'
 import { NODE_COUNT, NODES } from '../numerics/chebyshev'
 import type { Direction } from './turning'
 
@@ -26,6 +27,15 @@ export interface Zone {
   sampleInto(out: Samples, centre: number, half: number): void
 }
 
+/** Where E² and its reciprocal are doubles with all their digits. */
+const [SMALLEST, LARGEST] = [1e-290, 1e290]
+
+/** Rounding of a sum of this magnitude relative to its value; where both leave the doubles nothing cancels. */
+function conditioningOf(magnitude: number, value: number): number {
+  const ratio = magnitude / value
+  return ratio >= 0 && ratio < 1e16 ? 1 + ratio : 2
+}
+
 /** s = m: anywhere E² stays well above zero. */
 export function plainZone(model: Model, direction: Direction, from: number, to: number): Zone {
   return {
@@ -36,16 +46,21 @@ export function plainZone(model: Model, direction: Direction, from: number, to: 
     variableAt: (m) => m,
     expansion: (s) => expansionAt(model, direction * s, Math.exp(-direction * s)),
     conditioning: (s) =>
-      model.signed
-        ? 1 + model.magnitude(direction * s) / expansionAt(model, direction * s, Math.exp(-direction * s))
-        : 2,
+      (model.law.noise?.(direction * s) ?? 0) +
+      (model.signed
+        ? conditioningOf(model.magnitude(direction * s), expansionAt(model, direction * s, Math.exp(-direction * s)))
+        : 2),
     sampleInto(out, centre, half) {
       const central = Math.exp(-direction * centre)
       for (let k = 0; k < NODE_COUNT; k++) {
         const offset = half * NODES[k]
         // e^(−N) as a product: rounding N itself would cost eps |N|.
         const inverseScale = central * Math.exp(-direction * offset)
-        const rate = 1 / Math.sqrt(expansionAt(model, direction * (centre + offset), inverseScale))
+        const N = direction * (centre + offset)
+        const squared = expansionAt(model, N, inverseScale)
+        // E² leaves the doubles before 1/E does.
+        const rate =
+          squared > SMALLEST && squared < LARGEST ? 1 / Math.sqrt(squared) : Math.exp(-0.5 * logExpansion(model, N))
         out.time[k] = rate
         out.conformal[k] = inverseScale * rate
       }
@@ -54,7 +69,7 @@ export function plainZone(model: Model, direction: Direction, from: number, to: 
 }
 
 /** s = −√(m_t − m): up to a turning point at N, where E² goes to zero linearly and dN/E like d√(m_t − m). */
-export function turningZone(model: Model, direction: Direction, N: number, from: number): Zone {
+export function turningZone(model: Model, direction: Direction, N: number, from: number, to: number): Zone {
   const anchor: Anchor = { N, value: 0 }
   const inverseScale = Math.exp(-N)
   const offset = (s: number) => -direction * s * s
@@ -62,7 +77,7 @@ export function turningZone(model: Model, direction: Direction, N: number, from:
   const farthest = Math.abs(N)
   return {
     from: -Math.sqrt(farthest - from),
-    to: 0,
+    to: -Math.sqrt(farthest - to),
     width: 0.3,
     distanceAt: (s) => farthest - s * s,
     variableAt: (m) => -Math.sqrt(Math.max(0, farthest - m)),
@@ -79,17 +94,24 @@ export function turningZone(model: Model, direction: Direction, N: number, from:
   }
 }
 
+/** Where s = −ln(m_e − m) leads to a point at distance m_e that is reached only as s → ∞. */
+const approach = (farthest: number, nearest: number, from: number, to: number) => ({
+  from: -Math.log(farthest - from),
+  to: -Math.log(Math.max(nearest, farthest - to)),
+  distanceAt: (s: number) => farthest - Math.exp(-s),
+  variableAt: (m: number) => -Math.log(Math.max(nearest, farthest - m)),
+})
+
+/** Nearest approach in ln a to a static state that is followed; nearer, a is that of the static state to all its digits. */
+const STATIC_NEAREST = 1e-16
+
 /** s = −ln(m_s − m): up to a static state at N, which is reached only after infinite time, like dN/E ∝ ds. */
-export function staticZone(model: Model, direction: Direction, N: number, from: number, nearest: number): Zone {
-  const farthest = Math.abs(N)
+export function staticZone(model: Model, direction: Direction, N: number, from: number, to: number): Zone {
   const offset = (s: number) => -direction * Math.exp(-s)
   const expansion = (s: number) => model.bendFrom(N, offset(s))
   return {
-    from: -Math.log(farthest - from),
-    to: -Math.log(nearest),
+    ...approach(Math.abs(N), STATIC_NEAREST, from, to),
     width: 0.5,
-    distanceAt: (s) => farthest - Math.exp(-s),
-    variableAt: (m) => -Math.log(Math.max(nearest, farthest - m)),
     expansion,
     conditioning: (s) => 1 + (model.magnitude(N) * offset(s) ** 2) / expansion(s),
     sampleInto(out, centre, half) {
@@ -98,6 +120,37 @@ export function staticZone(model: Model, direction: Direction, N: number, from: 
         const rate = Math.exp(-s) / Math.sqrt(expansion(s))
         out.time[k] = rate
         out.conformal[k] = rate * Math.exp(-N - offset(s))
+      }
+    },
+  }
+}
+
+/** Far below anything that an integral up to an edge could still gain. */
+const EDGE_NEAREST = 1e-60
+
+/** s = −ln(m_e − m): up to the edge of a law, where f goes like a power of the distance that remains. */
+export function edgeZone(model: Model, direction: Direction, law: Logarithmic, from: number, to: number): Zone {
+  const N = law.edge?.N ?? 0
+  const scaleOf = (s: number) => N - direction * Math.exp(-s)
+  const density = (s: number) => (Math.abs(law.rate) * Math.exp(-s)) ** law.power
+  const others = model.components.filter((one) => one.key !== 'dark')
+  const { dark } = model.budget
+  // A turning point that doubles cannot tell from the edge would make E² negative on the last 1e-15 of the way.
+  const expansion = (s: number) => Math.max(model.expansionWith(scaleOf(s), density(s)), 0.5 * dark * density(s))
+  return {
+    ...approach(Math.abs(N), EDGE_NEAREST, from, to),
+    width: 0.5,
+    expansion,
+    conditioning: (s) => {
+      const sizes = others.reduce((sum, one) => sum + Math.abs(one.density(scaleOf(s))), Math.abs(dark) * density(s))
+      return conditioningOf(sizes, expansion(s))
+    },
+    sampleInto(out, centre, half) {
+      for (let k = 0; k < NODE_COUNT; k++) {
+        const s = centre + half * NODES[k]
+        const rate = Math.exp(-s) / Math.sqrt(expansion(s))
+        out.time[k] = rate
+        out.conformal[k] = rate * Math.exp(-scaleOf(s))
       }
     },
   }

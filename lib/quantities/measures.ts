@@ -59,8 +59,10 @@ const particle = (subject: Subject): Outcome => {
 }
 
 const event = (subject: Subject): Outcome => {
-  const { future, home, end } = subject.history
-  const error = end.turnaround ? 2 * future.conformal.error + home.conformal.error : future.conformal.error
+  const { future, descent, home, end } = subject.history
+  const error = end.turnaround
+    ? future.conformal.error + descent.conformal.error + home.conformal.error
+    : future.conformal.error
   return withError(eventHorizon(subject.history, today(subject)), error)
 }
 

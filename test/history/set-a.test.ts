@@ -61,7 +61,8 @@ const PLAIN: Readonly<Record<string, (one: Case) => number>> = {
   event_horizon: (one) => number(eventHorizon(one.history, at(one, 1))),
   particle_horizon: (one) => number(particleHorizon(one.history, at(one, 1))),
   chi_since_bounce: ({ history }) => history.past.conformal.total,
-  chi_to_crunch: ({ history }) => 2 * history.future.conformal.total + history.home.conformal.total,
+  chi_to_crunch: ({ history: { future, descent, home } }) =>
+    future.conformal.total + descent.conformal.total + home.conformal.total,
   z_reach: (one) => {
     const reach = redshiftAt(one.history, number(eventHorizon(one.history, at(one, 1))), 0)
     return isMissing(reach) ? Number.POSITIVE_INFINITY : reach.value

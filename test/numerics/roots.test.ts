@@ -1,5 +1,5 @@
 /** Bracketed roots of equations whose roots are closed forms. */
-import { describe, expect, test } from 'vitest'
+import { expect, test } from 'vitest'
 import { brent } from '../../lib/numerics/roots'
 
 const EPS = Number.EPSILON

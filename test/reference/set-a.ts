@@ -22,6 +22,9 @@ interface DarkEnergy {
   readonly w?: readonly number[]
   readonly As?: number
   readonly alpha?: number
+  /** Of a scalar field: its parameter and where it starts. */
+  readonly pv?: number
+  readonly phi_i?: number
 }
 
 export interface Reference {
@@ -52,11 +55,25 @@ const LAWS: Readonly<Record<string, (de: DarkEnergy) => readonly [string, Parame
   lambda: () => ['lambda', {}],
   w: (de) => ['constant', { w: de.w0 ?? -1 }],
   cpl: (de) => ['cpl', { w0: de.w0 ?? -1, wa: de.wa ?? 0 }],
+  jbp: (de) => ['jbp', { w0: de.w0 ?? -1, wa: de.wa ?? 0 }],
+  ba: (de) => ['ba', { w0: de.w0 ?? -1, wa: de.wa ?? 0 }],
+  log: (de) => ['log', { w0: de.w0 ?? -1, wa: de.wa ?? 0 }],
+  tab: (de) => ['nodes', { at: de.a ?? [], w: de.w ?? [] }],
+  gcg: (de) => ['chaplygin', { b: de.As ?? 1, alpha: de.alpha ?? 0 }],
+}
+
+/** Their potentials as ours. Their linear V = φ from φ_i is our V = 1 − slope φ from 0, less its factor φ_i, with slope = 1/φ_i. */
+const POTENTIALS: Readonly<Record<string, (de: DarkEnergy) => ParameterValues>> = {
+  exp: (de) => ({ v: 'exponential', slope: de.pv ?? 1 }),
+  ipl: (de) => ({ v: 'inverse', slope: de.pv ?? 1, start: de.phi_i ?? 1 }),
+  pngb: (de) => ({ v: 'cosine', width: de.pv ?? 1, start: de.phi_i ?? 1 }),
+  linear: (de) => ({ v: 'linear', slope: 1 / (de.phi_i ?? 1) }),
 }
 
 /** Scalar fields carry a `kind` in place of a `type`. */
 const lawOf = ({ params }: Reference): string => params.de?.type ?? params.de?.kind ?? 'lambda'
 export const lawIsKnown = (one: Reference): boolean => lawOf(one) in LAWS
+export const isField = (one: Reference): boolean => lawOf(one) in POTENTIALS
 
 function radiationOf({ params }: Reference): Radiation {
   if (params.Tcmb) {
@@ -79,7 +96,8 @@ export function scenarioOf(one: Reference): Scenario {
   const massive = radiationBudget(radiation, h0).states.reduce((sum, state) => sum + state.density, 0)
   const cold =
     params.closure === 'matter' ? 1 - (params.Or ?? 0) - (params.Ok ?? 0) - (params.Ode ?? 0) : (params.Om ?? 0)
-  const [eos, law] = LAWS[lawOf(one)](params.de ?? {})
+  const de = params.de ?? {}
+  const [eos, law] = isField(one) ? (['field', POTENTIALS[lawOf(one)](de)] as const) : LAWS[lawOf(one)](de)
   return {
     h0,
     matter: cold + massive,

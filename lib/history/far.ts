@@ -1,0 +1,36 @@
+/** Integrals over all that is left, of functions given by their logarithm: for what lies beyond the range of scale factors. */
+import { coefficientsInto, NODE_COUNT, NODES, relativeTail } from '../numerics/chebyshev'
+
+const samples = new Float64Array(NODE_COUNT)
+const coefficients = new Float64Array(NODE_COUNT)
+const MOST_PANELS = 4000
+
+/** ∫ e^(log) from x to `to`, or until nothing more is added; Infinity where the sum leaves the doubles. */
+export function integralOfExp(log: (x: number) => number, from: number, to = Number.POSITIVE_INFINITY): number {
+  let [x, width, sum] = [from, 1, 0]
+  for (let tried = 0; tried < MOST_PANELS && x < to; tried++) {
+    const half = Math.min(width, to - x) / 2
+    for (let k = 0; k < NODE_COUNT; k++) samples[k] = Math.exp(log(x + half * (1 + NODES[k])))
+    coefficientsInto(coefficients, samples)
+    const tail = relativeTail(coefficients)
+    if (tail > 1e-14 && half > 1e-9) {
+      width = half
+      continue
+    }
+    const added = half * mean(coefficients)
+    sum += added
+    if (!Number.isFinite(sum)) return Number.POSITIVE_INFINITY
+    // The first node is the farthest.
+    if (added < 1e-18 * sum && samples[0] <= samples[NODE_COUNT - 1]) return sum
+    x += 2 * half
+    width = 3.4 * half
+  }
+  return sum
+}
+
+/** ∫ over [−1, 1] of a Chebyshev series. */
+function mean(series: Float64Array): number {
+  let value = 0
+  for (let j = 0; j < NODE_COUNT; j += 2) value += (2 * series[j]) / (1 - j * j)
+  return value
+}
