@@ -121,8 +121,12 @@ function placeInTail(arm: Arm, f: (D: number) => number): Place | null {
   const panel = arm.panels.length
   if (arm.end.kind === 'double') return placeOf(arm, panel - 1, arm.panels[panel - 1].to)
   const farthest = FARTHEST - arm.edges[panel]
-  if (arm.tail === null || !(f(farthest) >= 0)) return null
-  const D = f(0) >= 0 ? 0 : brent(f, 0, farthest)
+  if (arm.tail === null) return null
+  // By doubling, since far out the terms of a tail leave the doubles and their sum is no number.
+  let reach = Math.min(1, farthest)
+  while (f(reach) < 0 && reach < farthest) reach = Math.min(2 * reach, farthest)
+  if (!(f(reach) >= 0)) return null
+  const D = f(0) >= 0 ? 0 : brent(f, 0, reach)
   return { arm, N: arm.direction * (arm.edges[panel] + D), panel, s: D }
 }
 
