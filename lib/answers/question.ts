@@ -1,4 +1,5 @@
 /** A request to the interface, read: what it asks in canonical form, and how to answer it. */
+import { isUnsolvable } from '../history/field/unsolvable'
 import { type Fault, problemsOf } from '../scenario/problems'
 import { readQuery } from '../scenario/query'
 import type { Problem, Reading, Scenario } from '../scenario/scenario'
@@ -43,15 +44,22 @@ function solvedSanely(scenario: Scenario): Solution {
 }
 
 function unsolved(scenario: Scenario, index: number, error: unknown): Problem {
-  const why = error instanceof RangeError ? error.message : 'the engine met a case that it does not handle'
-  return {
-    parameter: 's',
-    scenario: index,
-    value: writeScenario(scenario),
-    allowed: 'a scenario that the engine can solve',
-    message: `This scenario has no solution here: ${why}.`,
+  const code = writeScenario(scenario)
+  if (isUnsolvable(error)) {
+    const { parameter, message } = error
+    return { parameter, scenario: index, value: valueIn(code, parameter), allowed: 'what has a solution', message }
   }
+  const why = error instanceof RangeError ? error.message : 'the engine met a case that it does not handle'
+  const message = `This scenario has no solution here: ${why}.`
+  return { parameter: 's', scenario: index, value: code, allowed: 'what has a solution', message }
 }
+
+/** The text of a key in a code; empty where it has its default. */
+const valueIn = (code: string, key: string): string =>
+  code
+    .split(',')
+    .find((pair) => pair.startsWith(`${key}:`))
+    ?.slice(key.length + 1) ?? ''
 
 export const mapped = <T, U>(reading: Reading<T>, make: (value: T) => U): Reading<U> =>
   reading.ok ? { ok: true, value: make(reading.value) } : reading

@@ -67,22 +67,22 @@ interface Stretch {
   readonly outwards: boolean
 }
 
-/** In the order of time; histories are symmetric about turning points. */
-function stretchesOf({ before, past, future, home }: History): readonly Stretch[] {
-  const [bounce, turn] = [-2 * past.time.total, 2 * future.time.total]
+/** In the order of time. `back` is when the universe is of today's size again. */
+function stretchesOf({ before, past, future, descent, home, unfollowed }: History): readonly Stretch[] {
+  const [bounce, back] = [-2 * past.time.total, future.time.total + descent.time.total]
   const contraction: readonly Stretch[] = [
     { arm: before, mirror: bounce, sign: -1, outwards: false },
     { arm: past, mirror: bounce, sign: 1, outwards: true },
   ]
   const wayBack: readonly Stretch[] = [
-    { arm: future, mirror: turn, sign: -1, outwards: false },
-    { arm: home, mirror: turn, sign: 1, outwards: true },
+    { arm: descent, mirror: back, sign: -1, outwards: false },
+    { arm: home, mirror: back, sign: 1, outwards: true },
   ]
   return [
     ...(past.end.kind === 'root' ? contraction : []),
     { arm: past, mirror: 0, sign: -1, outwards: false },
     { arm: future, mirror: 0, sign: 1, outwards: true },
-    ...(future.end.kind === 'root' ? wayBack : []),
+    ...(future.end.kind === 'root' && !unfollowed ? wayBack : []),
   ]
 }
 
@@ -111,11 +111,11 @@ function pointsAlong(arm: Arm, count: number): readonly Point[] {
 }
 
 /** |ln a| at the part x of an arm; towards a turning point, where time passes while a stands still, its steps shrink. */
-const distanceAt = ({ end }: Arm, reach: number, x: number): number => reach * (end.kind === 'root' ? x * (2 - x) : x)
+const distanceAt = ({ end }: Arm, reach: number, x: number): number => reach * (end.kind === 'none' ? x : x * (2 - x))
 
 /** How far |ln a| goes. */
 function reachOf(arm: Arm): number {
-  if (arm.end.kind === 'root') return Math.abs(arm.end.N)
+  if (arm.end.kind !== 'none' && arm.end.kind !== 'double') return Math.min(FARTHEST, Math.abs(arm.end.N))
   const ends = Number.isFinite(arm.time.total)
   if (ends && arm.direction < 0) return SMALLEST
   const last = ends ? placeRemaining(arm, 'time', BEFORE_RIP * arm.time.total) : placeElapsed(arm, 'time', LONGEST)

@@ -33,7 +33,8 @@ test('nothing is made for those who know the tag', () => {
 })
 test('a legal scenario without an answer is a problem with status 422, is not kept, and has no tag', async () => {
   const answer = vi.fn(() => ({ ok: false as const, problems: [problem] }))
-  for (const headers of [{}, { 'If-None-Match': '*' }]) {
+  const both: Record<string, string>[] = [{}, { 'If-None-Match': '*' }]
+  for (const headers of both) {
     const response = reply(asked(headers), '/api/thing', question('unsolved', answer), remembered)
     expect(response.status).toBe(422)
     expect(response.headers.get('etag')).toBe(null)
