@@ -8,28 +8,13 @@ import { powerLaw } from '../dark-energy/power-law'
 import { type Model, modelOf } from '../model'
 import type { Budget } from '../scenario/budget'
 import type { Scenario } from '../scenario/scenario'
-import { type Arm, armOf } from './arm'
+import { armOf } from './arm'
 import { endOf } from './ending'
 import { fieldHistory } from './field/history'
 import { originOf } from './origin'
-import type { End, Origin } from './outcome'
+import type { History } from './whole'
 
-export interface History {
-  /** From today to smaller a, by the law of the past. */
-  readonly past: Arm
-  /** From today to larger a, by the law of the future. */
-  readonly future: Arm
-  /** To larger a by the law of the past: the way in before a bounce, mirrored. */
-  readonly before: Arm
-  /** From the turnaround back to today's size, told from there outwards: the future mirrored, unless dark energy has a memory. */
-  readonly descent: Arm
-  /** On from there to smaller a by the law of the future. */
-  readonly home: Arm
-  /** What lies beyond the turnaround where it is no single way back to a = 0, and why it is not told further. */
-  readonly unfollowed?: { readonly time: number; readonly conformal: number; readonly because: string }
-  readonly origin: Origin
-  readonly end: End
-}
+export type { History, Unfollowed } from './whole'
 
 /** All of it, in 1/H₀ and c/H₀. Every time carries the error bound of its arm. */
 export function historyOf(scenario: Scenario, budget: Budget): History {

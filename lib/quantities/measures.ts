@@ -1,5 +1,6 @@
 /** Every measure of a scenario once, in the order of the page; values in the units shown, with error bounds. */
 import { type Event, eventAtScale, isEvent } from '../history/event'
+import type { History } from '../history/history'
 import { leadingExponent } from '../history/tail'
 import { curvatureRadius } from '../measures/distances'
 import { type Crossing, nearestToNow } from '../measures/epochs'
@@ -49,7 +50,11 @@ const today = ({ history }: Subject): Event => {
 const withError = (value: number | Missing, error: number): Outcome =>
   typeof value === 'number' ? bounded(value, error) : value
 
-const rounding = (subject: Subject): number => 16 * Number.EPSILON * (1 + subject.history.past.model.magnitude(0))
+const rounding = ({ history }: Subject): number =>
+  16 * Number.EPSILON * (1 + history.past.model.magnitude(0)) + noise(history)
+
+/** Relative error of E² today that comes with the law of dark energy. */
+const noise = (history: History): number => Number.EPSILON * (history.past.model.law.noise?.(0) ?? 0)
 
 const particle = (subject: Subject): Outcome => {
   const { past, before, origin } = subject.history
@@ -59,16 +64,17 @@ const particle = (subject: Subject): Outcome => {
 }
 
 const event = (subject: Subject): Outcome => {
-  const { future, descent, home, end } = subject.history
-  const error = end.turnaround
-    ? future.conformal.error + descent.conformal.error + home.conformal.error
-    : future.conformal.error
+  const { future, descent, home, unfollowed, end } = subject.history
+  const back = unfollowed ? unfollowed.error : descent.conformal.error + home.conformal.error
+  const error = future.conformal.error + (end.turnaround ? back : 0)
   return withError(eventHorizon(subject.history, today(subject)), error)
 }
 
 /** z of a crossing; its error follows from the noise of the sums and is far below what the page shows. */
-const redshiftOf = (crossing: Crossing | null, because: string): Outcome =>
-  crossing === null ? missing(because) : bounded(Math.expm1(-crossing.N), 64 * Number.EPSILON * Math.exp(-crossing.N))
+const redshiftOf = ({ history }: Subject, crossing: Crossing | null, because: string): Outcome => {
+  if (crossing === null) return missing(because)
+  return bounded(Math.expm1(-crossing.N), (64 * Number.EPSILON + 4 * noise(history)) * Math.exp(-crossing.N))
+}
 
 const ALL: readonly MeasureQuantity[] = [
   {
@@ -203,9 +209,10 @@ const ALL: readonly MeasureQuantity[] = [
       'Redshift of the last change from deceleration to acceleration, or of the first one ahead (then negative).',
     formula: 'ä(z) = 0',
     source: FRIEDMANN,
-    value: ({ epochs }) =>
+    value: (subject) =>
       redshiftOf(
-        nearestToNow(epochs.acceleration.filter((one) => one.rising)),
+        subject,
+        nearestToNow(subject.epochs.acceleration.filter((one) => one.rising)),
         'the expansion never changes from deceleration to acceleration',
       ),
   },
@@ -218,12 +225,13 @@ const ALL: readonly MeasureQuantity[] = [
     meaning: 'Redshift at which cold matter equals photons and all neutrinos.',
     formula: 'ρ_c = ρ_γ + ρ_ν',
     source: FRIEDMANN,
-    value: ({ epochs, budget }) => {
+    value: (subject) => {
+      const { epochs, budget } = subject
       const none = 'cold matter and radiation are never equal on the expansion that holds today'
       if (!(budget.coldMatter > 0 && budget.photons + budget.masslessNeutrinos + budget.massiveNeutrinos > 0)) {
         return missing('there is no cold matter or no radiation in this scenario')
       }
-      return redshiftOf(nearestToNow(epochs.matterRadiation), none)
+      return redshiftOf(subject, nearestToNow(epochs.matterRadiation), none)
     },
   },
   {
@@ -235,11 +243,12 @@ const ALL: readonly MeasureQuantity[] = [
     meaning: 'Redshift at which cold matter equals dark energy.',
     formula: 'ρ_c = ρ_DE',
     source: FRIEDMANN,
-    value: ({ epochs, budget }) => {
+    value: (subject) => {
+      const { epochs, budget } = subject
       if (!(budget.dark > 0 && budget.coldMatter > 0))
         return missing('there is no cold matter or no positive dark energy')
       const none = 'cold matter and dark energy are never equal on the expansion that holds today'
-      return redshiftOf(nearestToNow(epochs.matterDark), none)
+      return redshiftOf(subject, nearestToNow(epochs.matterDark), none)
     },
   },
   {

@@ -24,8 +24,8 @@ const PER_SWING = 5
 const LOWEST = 15
 /** Heights at which the field swings more often before today are not tried. */
 const MOST_SWINGS = 30
-/** Evaluations of the equation of motion for one search. */
-export const BUDGET = 200_000
+/** Evaluations of the equation of motion for the search, and for the future. */
+export const BUDGET = 120_000
 
 const scratch = new Float64Array(3)
 

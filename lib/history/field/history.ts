@@ -2,12 +2,11 @@
 import type { Potential } from '../../dark-energy/potential'
 import { powerLaw } from '../../dark-energy/power-law'
 import { type Model, modelOf } from '../../model'
-import type { Purse } from '../../numerics/ode'
 import type { Budget } from '../../scenario/budget'
 import { type Arm, armOf } from '../arm'
 import { endOf } from '../ending'
-import type { History } from '../history'
 import { originOf } from '../origin'
+import type { History } from '../whole'
 import { errorAhead, lookAhead, type Outlook } from './ahead'
 import { backgroundOf } from './background'
 import { crunchAfter, endAhead } from './endings'
@@ -25,7 +24,6 @@ type Ahead = Pick<History, 'future' | 'home' | 'descent' | 'unfollowed' | 'end'>
 interface Now extends Route {
   readonly state: Float64Array
   readonly past: Arm
-  readonly purse: Purse
 }
 
 export function fieldHistory(budget: Budget, potential: Potential, hold: boolean): History {
@@ -54,7 +52,7 @@ function today(budget: Budget, potential: Potential): Now {
     breaks: [FROZEN],
     error: () => PASSAGE_ERROR,
   })
-  return { field, budget, today: energy, state, purse, past: armOf(modelOf(budget, law), -1) }
+  return { field, budget, today: energy, state, past: armOf(modelOf(budget, law), -1) }
 }
 
 /** w of today for ever: an explicit law, whose contraction mirrors its expansion. */
@@ -65,7 +63,8 @@ function held(now: Now, model: Model): Ahead {
 }
 
 function followed(now: Now): Ahead {
-  const { field, state, purse } = now
+  const { field, state } = now
+  const purse = { left: BUDGET }
   // With V ≥ 0 in flat or open space E² is a sum of positive terms.
   const mayTurn = !field.potential.positive || now.budget.curvature < 0
   const outlook = lookAhead(field, state, purse, mayTurn)

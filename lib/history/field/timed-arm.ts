@@ -6,6 +6,7 @@ import type { Budget } from '../../scenario/budget'
 import { type Arm, armFrom } from '../arm'
 import { panelsOf } from '../panels'
 import type { Direction, Search } from '../turning'
+import type { Unfollowed } from '../whole'
 import type { Samples, Zone } from '../zone'
 import { fieldLaw } from './law'
 import { clockRate, type Field, RATE, SCALE } from './motion'
@@ -69,17 +70,16 @@ function timedModel({ field, budget, today }: Route, ascending: readonly Leg[]):
 }
 
 /** Time and conformal time along legs and on in the power law of a crunch, E² ∝ a⁻⁶, from N and H in `state`. */
-export function restOf(
-  legs: readonly Leg[],
-  state: Float64Array,
-): { readonly time: number; readonly conformal: number } {
+export function restOf(legs: readonly Leg[], state: Float64Array): Omit<Unfollowed, 'because'> {
   let time = 1 / (3 * Math.abs(state[RATE]))
   let conformal = Math.exp(-state[SCALE]) / (2 * Math.abs(state[RATE]))
+  let error = VOYAGE_ERROR * conformal
   for (const leg of legs) {
     for (const panel of panelsOf(timedZone(leg, true, 1, leg.from), () => false)) {
       time += panel.time.total
       conformal += panel.conformal.total
+      error += panel.conformal.error
     }
   }
-  return { time, conformal }
+  return { time, conformal, error }
 }
