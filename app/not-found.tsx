@@ -1,3 +1,4 @@
+import { EDITION } from './edition'
 import { Footer } from './ui/footer'
 
 export const metadata = { title: 'No such page' }
@@ -17,7 +18,7 @@ export default function NotFound() {
           link was lost on the way.
         </p>
       </main>
-      <Footer data={null} />
+      <Footer data={null} edition={EDITION} />
     </div>
   )
 }

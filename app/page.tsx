@@ -1,14 +1,8 @@
 import type { Metadata } from 'next'
 import { cache } from 'react'
-import { type Explorer, explorer } from '../lib/answers/explorer'
-import { Figure } from './ui/figure'
-import { Footer } from './ui/footer'
-import { Header } from './ui/header'
-import { Ingredients } from './ui/ingredients'
-import { Measures } from './ui/measures'
-import { Moments } from './ui/moments'
-import { Refusal } from './ui/refusal'
-import { Verdicts } from './ui/verdicts'
+import { explorer, type Explorer as View } from '../lib/answers/explorer'
+import { EDITION } from './edition'
+import { Explorer } from './explorer'
 
 interface Props {
   readonly searchParams: Promise<Readonly<Record<string, string | string[] | undefined>>>
@@ -20,24 +14,7 @@ export async function generateMetadata(props: Props): Promise<Metadata> {
 }
 
 export default async function Page(props: Props) {
-  const view = await read(props)
-  return (
-    <div className="page" data-theme={view.place.theme}>
-      <Header themes={view.links.themes} theme={view.place.theme} />
-      <main>
-        <h1 className={view.titled ? undefined : 'spoken'}>{view.title}</h1>
-        {view.refusal && <Refusal refusal={view.refusal} />}
-        <Verdicts scenarios={view.scenarios} focus={view.place.focus} />
-        <Figure view={view.figure} />
-        <div className="columns">
-          <Ingredients view={view} />
-          <Moments view={view} />
-          <Measures view={view} />
-        </div>
-      </main>
-      <Footer data={view.links.data} />
-    </div>
-  )
+  return <Explorer initial={await read(props)} edition={EDITION} />
 }
 
 /** Once for a request: the page and its metadata read the same. */
@@ -45,7 +22,7 @@ const explorerOf = cache((codes: string, focus: string | undefined, theme: strin
   explorer({ codes: JSON.parse(codes), focus, theme }),
 )
 
-async function read({ searchParams }: Props): Promise<Explorer> {
+async function read({ searchParams }: Props): Promise<View> {
   const { s, focus, theme } = await searchParams
   return explorerOf(JSON.stringify(all(s)), all(focus)[0], all(theme)[0])
 }

@@ -1,9 +1,19 @@
+import type { Problem } from '../../lib/scenario/scenario'
 import type { Field } from '../../lib/words/fields'
+import type { Editing } from '../live/use-editing'
+import { Slider } from './slider'
 import { Symbols } from './symbol'
 
-/** One parameter: symbol, words, and where it is typed or chosen. */
-export function FieldRow({ field }: { readonly field: Field }) {
+interface Props {
+  readonly field: Field
+  readonly editing: Editing
+  readonly live: boolean
+}
+
+/** One parameter: symbol, words, where it is typed or chosen, and where it is dragged. */
+export function FieldRow({ field, editing, live }: Props) {
   const id = `field-${field.name}`
+  const problem = editing.problemOf(field.name)
   return (
     <div className={field.kind === 'closing' ? 'field closing' : 'field'}>
       <label htmlFor={id} title={field.meaning}>
@@ -15,12 +25,28 @@ export function FieldRow({ field }: { readonly field: Field }) {
           {field.kind === 'closing' && ', closes'}
         </span>
       </label>
-      <Control field={field} id={id} />
+      <Control field={field} id={id} editing={editing} />
+      {problem && <Complaint id={`${id}-problem`} problem={problem} />}
+      {field.kind === 'number' && <span className="track">{live && <Slider field={field} drag={editing.drag} />}</span>}
     </div>
   )
 }
 
-function Control({ field, id }: { readonly field: Field; readonly id: string }) {
+function Complaint({ id, problem }: { readonly id: string; readonly problem: Problem }) {
+  return (
+    <p id={id} className="complaint" role="alert">
+      {problem.message} Allowed: {problem.allowed}.
+    </p>
+  )
+}
+
+interface ControlProps {
+  readonly field: Field
+  readonly id: string
+  readonly editing: Editing
+}
+
+function Control({ field, id, editing }: ControlProps) {
   switch (field.kind) {
     case 'closing':
       return (
@@ -30,31 +56,50 @@ function Control({ field, id }: { readonly field: Field; readonly id: string }) 
         </span>
       )
     case 'choice':
-      return <Choices field={field} id={id} />
+      return <Choices field={field} id={id} choose={editing.choose} />
     case 'text':
-      return <input id={id} className="wide" name={field.name} defaultValue={field.value} maxLength={2 * field.most} />
+      return <input className="wide" maxLength={2 * field.most} {...typed(field, id, editing)} />
     default:
       return (
         <span className="entry">
-          <input
-            id={id}
-            name={field.name}
-            defaultValue={field.value}
-            inputMode="text"
-            title={`${field.meaning} ${field.allowed}`}
-          />
+          <input inputMode="text" title={`${field.meaning} ${field.allowed}`} {...typed(field, id, editing)} />
           <span className="unit">{field.unit}</span>
         </span>
       )
   }
 }
 
-function Choices({ field, id }: { readonly field: Extract<Field, { kind: 'choice' }>; readonly id: string }) {
+/** What is typed is taken over on Enter and on leaving the field; Escape takes it back. */
+function typed({ name, value }: Field, id: string, { textOf, problemOf, type, commit, drop }: Editing) {
+  const wrong = problemOf(name) !== null
+  return {
+    id,
+    name,
+    value: textOf(name, value),
+    'aria-invalid': wrong || undefined,
+    'aria-describedby': wrong ? `${id}-problem` : undefined,
+    onChange: ({ target }: { readonly target: HTMLInputElement }) => type(name, target.value),
+    onBlur: () => commit(name),
+    onKeyDown: ({ key }: { readonly key: string }) => {
+      if (key === 'Enter') commit(name)
+      if (key === 'Escape') drop(name)
+    },
+  }
+}
+
+interface ChoicesProps {
+  readonly field: Extract<Field, { kind: 'choice' }>
+  readonly id: string
+  readonly choose: Editing['choose']
+}
+
+function Choices({ field, id, choose }: ChoicesProps) {
+  const { name, value, choices } = field
   return (
-    <select id={id} name={field.name} defaultValue={field.value}>
-      {field.choices.map(({ value, label }) => (
-        <option key={value} value={value}>
-          {label}
+    <select id={id} name={name} value={value} onChange={({ target }) => choose(name, target.value)}>
+      {choices.map((one) => (
+        <option key={one.value} value={one.value}>
+          {one.label}
         </option>
       ))}
     </select>

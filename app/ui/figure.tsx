@@ -1,18 +1,81 @@
-import { drawLongView } from '../../lib/figures/draw-long-view'
+import { memo, useDeferredValue, useState, useSyncExternalStore } from 'react'
+import { drawLongView, heightOfView, plotOfView } from '../../lib/figures/draw-long-view'
 import type { LongView } from '../../lib/figures/long-view'
-import { FRAMES } from '../../lib/figures/plot'
+import { FRAMES, type Frame } from '../../lib/figures/plot'
+import { useSteadyHeight } from '../live/use-steady-height'
+import { Cursor } from './cursor'
 import { Drawing } from './drawing'
 
-/** The long view, drawn for three widths of which the page shows one. */
-export function Figure({ view }: { readonly view: LongView }) {
+interface Props {
+  readonly view: LongView
+  /** Chooses the scenario of each curve. */
+  readonly links: readonly string[]
+  readonly live: boolean
+}
+
+/** The long view, drawn for three widths of which the page shows one; the others follow when there is time. */
+export function Figure({ view, links, live }: Props) {
+  const later = useDeferredValue(view)
+  const shown = useShownFrame()
+  const caption = useSteadyHeight(String(view.curves.length))
   return (
     <figure className="long-view">
       {FRAMES.map((frame) => (
-        <div key={frame.id} className={`frame ${frame.id}`}>
-          <Drawing node={drawLongView(view, frame)} />
-        </div>
+        <Picture
+          key={frame.id}
+          view={shown === null || frame.id === shown ? view : later}
+          frame={frame}
+          links={live && frame.id === shown ? links : null}
+        />
       ))}
-      <figcaption>{view.caption}</figcaption>
+      <figcaption ref={caption}>{view.caption}</figcaption>
     </figure>
+  )
+}
+
+interface PictureProps {
+  readonly view: LongView
+  readonly frame: Frame
+  /** Null where nobody can point at it. */
+  readonly links: readonly string[] | null
+}
+
+const Picture = memo(function Picture({ view, frame, links }: PictureProps) {
+  const [lit, light] = useState<number | null>(null)
+  return (
+    <div className={`frame ${frame.id}`} data-lit={lit ?? undefined}>
+      <Drawn view={view} frame={frame} />
+      {links && (
+        <Cursor
+          view={view}
+          plot={plotOfView(view, frame)}
+          size={{ width: frame.width, height: heightOfView(view, frame) }}
+          links={links}
+          lit={lit}
+          light={light}
+        />
+      )}
+    </div>
+  )
+})
+
+const Drawn = memo(function Drawn({ view, frame }: Pick<PictureProps, 'view' | 'frame'>) {
+  return <Drawing node={drawLongView(view, frame)} />
+})
+
+/** As the style sheet chooses them; the first that matches. */
+const WIDEST = { narrow: '(max-width: 600px)', middle: '(max-width: 1020px)' }
+
+function useShownFrame(): string | null {
+  return useSyncExternalStore(
+    (changed) => {
+      const lists = Object.values(WIDEST).map((query) => matchMedia(query))
+      for (const list of lists) list.addEventListener('change', changed)
+      return () => {
+        for (const list of lists) list.removeEventListener('change', changed)
+      }
+    },
+    () => Object.entries(WIDEST).find(([, query]) => matchMedia(query).matches)?.[0] ?? 'wide',
+    () => null,
   )
 }

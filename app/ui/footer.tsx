@@ -1,7 +1,14 @@
-import { ENGINE } from '../../lib/solve'
-import { version } from '../../package.json'
+export interface Edition {
+  readonly version: string
+  readonly engine: number | string
+}
 
-export function Footer({ data }: { readonly data: string | null }) {
+interface Props {
+  readonly data: string | null
+  readonly edition: Edition
+}
+
+export function Footer({ data, edition }: Props) {
   return (
     <footer className="colophon">
       <p>
@@ -9,7 +16,7 @@ export function Footer({ data }: { readonly data: string | null }) {
         measurements it describes is an assumption, not a forecast.
       </p>
       <p>
-        Longhence {version}, engine {ENGINE}. MIT licence.
+        Longhence {edition.version}, engine {edition.engine}. MIT licence.
         {data && (
           <>
             {' '}

@@ -1,23 +1,34 @@
-import type { Explorer } from '../../lib/answers/explorer'
-import type { Theme } from '../../lib/words/link'
+import type { Desk } from '../../lib/words/desk'
+import { type Address, undo } from '../live/address'
+import { CopyLink } from './copy-link'
+import { Tables } from './tables'
 
 const NAMES = { paper: 'Paper', night: 'Night' } as const
 
 interface Props {
-  readonly themes: Explorer['links']['themes']
-  readonly theme: Theme | null
+  readonly desk: Desk
+  /** Null until the page is alive: what needs that keeps its room. */
+  readonly address: Address | null
 }
 
-export function Header({ themes, theme }: Props) {
+export function Header({ desk, address }: Props) {
+  const { place, links } = desk
   return (
     <header className="masthead">
       <a className="brand" href="/">
         Longhence
       </a>
+      <div className="acts-of-page">
+        <button type="button" className={address && address.depth > 0 ? 'act' : 'act absent'} onClick={undo}>
+          Undo
+        </button>
+        <CopyLink link={links.here} live={address !== null} />
+        <Tables links={links.tables} />
+      </div>
       <nav className="themes" aria-label="Theme">
-        {themes.map((one) => (
-          <a key={one.theme} href={one.link} rel="nofollow" aria-current={one.theme === theme ? 'true' : undefined}>
-            {one.theme === null ? 'System' : NAMES[one.theme]}
+        {links.themes.map(({ theme, link }) => (
+          <a key={theme} href={link} rel="nofollow" aria-current={theme === place.theme ? 'true' : undefined}>
+            {theme === null ? 'System' : NAMES[theme]}
           </a>
         ))}
       </nav>

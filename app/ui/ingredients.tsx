@@ -1,18 +1,32 @@
-import type { Explorer } from '../../lib/answers/explorer'
+import type { Desk } from '../../lib/words/desk'
 import type { FieldGroup } from '../../lib/words/fields'
+import { type Editing, useEditing } from '../live/use-editing'
 import { FieldRow } from './field'
 import { Sentence, Symbols } from './symbol'
 
-/** The parameters of the scenario in focus as a plain form; the others travel along unseen. */
-export function Ingredients({ view }: { readonly view: Explorer }) {
-  const { form, scenarios, place } = view
+interface Props {
+  readonly desk: Desk
+  /** Until then a plain form, which asks for the page that its fields spell. */
+  readonly live: boolean
+}
+
+/** The parameters of the scenario in focus; the others travel along unseen. */
+export function Ingredients({ desk, live }: Props) {
+  const { form, scenarios, place } = desk
+  const editing = useEditing(desk)
   return (
     <section className="ingredients" aria-labelledby="ingredients">
       <h2 id="ingredients" className="heading">
         Ingredients
       </h2>
-      <Tabs view={view} />
-      <form action="/compose" method="get" autoComplete="off">
+      <Tabs desk={desk} />
+      <form
+        action="/compose"
+        method="get"
+        autoComplete="off"
+        className={`slot-${place.focus}`}
+        onSubmit={(event) => event.preventDefault()}
+      >
         {scenarios.map((one) => (
           <input key={one.slot} type="hidden" name="s" value={one.plainCode} />
         ))}
@@ -22,16 +36,19 @@ export function Ingredients({ view }: { readonly view: Explorer }) {
           <input key={name} type="hidden" name={name} value={value} />
         ))}
         {form.groups.map((group) => (
-          <Group key={group.key} group={group} />
+          <Group key={group.key} group={group} editing={editing} live={live} />
         ))}
-        <button type="submit">Apply</button>
+        <button type="submit" className={live ? 'absent' : undefined}>
+          Apply
+        </button>
       </form>
     </section>
   )
 }
 
-function Tabs({ view }: { readonly view: Explorer }) {
-  const { scenarios, place, links } = view
+function Tabs({ desk }: { readonly desk: Desk }) {
+  const { scenarios, place, links } = desk
+  const acts = { Add: links.add, Copy: links.copy, Remove: links.remove }
   return (
     <nav className="tabs" aria-label="Scenarios">
       {scenarios.map(({ slot, name, link }) => (
@@ -46,29 +63,28 @@ function Tabs({ view }: { readonly view: Explorer }) {
         </a>
       ))}
       <span className="acts">
-        {links.add && (
-          <a href={links.add} rel="nofollow">
-            Add
-          </a>
-        )}
-        {links.copy && (
-          <a href={links.copy} rel="nofollow">
-            Copy
-          </a>
-        )}
-        {links.remove && (
-          <a href={links.remove} rel="nofollow">
-            Remove
-          </a>
+        {Object.entries(acts).map(
+          ([act, link]) =>
+            link && (
+              <a key={act} href={link} rel="nofollow">
+                {act}
+              </a>
+            ),
         )}
       </span>
     </nav>
   )
 }
 
-function Group({ group }: { readonly group: FieldGroup }) {
+interface GroupProps {
+  readonly group: FieldGroup
+  readonly editing: Editing
+  readonly live: boolean
+}
+
+function Group({ group, editing, live }: GroupProps) {
   const { key, title, folded, fields, family } = group
-  const rows = fields.map((field) => <FieldRow key={field.name} field={field} />)
+  const rows = fields.map((field) => <FieldRow key={field.name} field={field} editing={editing} live={live} />)
   if (folded) {
     return (
       <details className="group" id={key}>

@@ -19,10 +19,13 @@ function Scripts({ markup, plain }: { readonly markup: string; readonly plain: (
   })
 }
 
+/** Upright here: the slanted face draws it as ϑ. */
+const UPRIGHT = 'θ'
+
 function Slanted({ text }: { readonly text: string }) {
   const parts = text.split(/(?<!\p{L})(\p{L})(?!\p{L})/u)
   return parts.map((part, i) => {
     const key = `${i}${part}`
-    return i % 2 === 1 ? <i key={key}>{part}</i> : part
+    return i % 2 === 1 && part !== UPRIGHT ? <i key={key}>{part}</i> : part
   })
 }

@@ -1,4 +1,5 @@
 import type { ScenarioView } from '../../lib/answers/explorer'
+import { useSteadyHeight } from '../live/use-steady-height'
 import { Key } from './key'
 import { Sentence } from './symbol'
 
@@ -8,8 +9,9 @@ interface Props {
 }
 
 export function Verdicts({ scenarios, focus }: Props) {
+  const ref = useSteadyHeight(String(scenarios.length))
   return (
-    <section className="verdicts" aria-label="Verdict">
+    <section className="verdicts" aria-label="Verdict" ref={ref}>
       {scenarios.map((scenario) => (
         <VerdictOf key={scenario.slot} scenario={scenario} current={scenario.slot === focus} />
       ))}

@@ -13,13 +13,13 @@ import { textWidth } from './text-width'
 const SCALE_TITLE = 'scale factor a'
 
 export function drawLongView(view: LongView, frame: Frame): SvgNode {
-  const plot = plotOf(frame, marginsOf(view, frame), view.window)
+  const plot = plotOfView(view, frame)
   const free = plot.left + textWidth(SCALE_TITLE, frame.type * 0.9) + frame.type
   const labels = placeLabels(view, plot, frame, free)
   return svg(
     'svg',
     {
-      viewBox: `0 0 ${frame.width} ${px(frame.height + ribbonsHeight(view.curves, frame))}`,
+      viewBox: `0 0 ${frame.width} ${heightOfView(view, frame)}`,
       class: 'chart',
       role: 'img',
       'aria-label': view.alternative,
@@ -30,6 +30,16 @@ export function drawLongView(view: LongView, frame: Frame): SvgNode {
     ...drawRibbons(view.curves, plot, frame),
     ...labels.map((label) => drawLabel(label, frame)),
   )
+}
+
+/** Where the plot lies within the drawing. */
+export function plotOfView(view: LongView, frame: Frame): Plot {
+  return plotOf(frame, marginsOf(view, frame), view.window)
+}
+
+/** Of the whole drawing: the ribbons hang below the frame. */
+export function heightOfView(view: LongView, frame: Frame): number {
+  return px(frame.height + ribbonsHeight(view.curves, frame))
 }
 
 function marginsOf(view: LongView, frame: Frame): Margins {

@@ -4,6 +4,7 @@ import { extrapolates } from '../words/beyond'
 import { END_NAMES, endLabel, endsInTime } from '../words/ending'
 import { longViewCaption, longViewText } from './caption'
 import { type Eras, erasOf } from './eras'
+import { type Readings, readingsOf } from './readings'
 import { type Point, sampleCurve } from './sample'
 import { type Entry, type Window, windowOf } from './window'
 
@@ -43,6 +44,8 @@ export interface Curve {
 export interface LongView {
   readonly window: Window
   readonly curves: readonly Curve[]
+  /** For a cursor: it reads all curves at once. */
+  readonly readings: Readings
   /** True where a future is the extrapolation of a law fitted to the past. */
   readonly hatched: boolean
   readonly caption: string
@@ -56,6 +59,7 @@ export function longView(entries: readonly Entry<Drawn>[]): LongView {
   return {
     window,
     curves,
+    readings: readingsOf(entries, window),
     hatched: curves.some(({ extrapolated }) => extrapolated),
     caption: longViewCaption(solutions, {
       marks: new Set(curves.flatMap(({ marks }) => marks.map(({ kind }) => kind))),
@@ -74,7 +78,7 @@ function curveOf(entry: Entry<Drawn>, slot: number, window: Window): Curve {
     slot,
     code: solution.code,
     name: solution.label,
-    segments,
+    segments: segments.map((segment) => segment.map(rounded)),
     marks: [...startMarks(solution, segments, window), ...endMarks(solution, segments, window)],
     note: asymptote === null ? noteOf(solution, window) : '',
     finish,
@@ -83,6 +87,11 @@ function curveOf(entry: Entry<Drawn>, slot: number, window: Window): Curve {
     eras: entry.contents ? erasOf(entry.contents, window) : null,
     extrapolated: extrapolates(solution.scenario),
   }
+}
+
+/** Far finer than a screen, and half as long on its way there. */
+function rounded([time, scale]: Point): Point {
+  return [Number(time.toPrecision(6)), Number(scale.toPrecision(6))]
 }
 
 function noteOf({ end }: Drawn, { to }: Window): string {

@@ -1,7 +1,7 @@
 /** The form of a scenario: what a person may type, in groups, and what closes the budget. */
 import { FAMILIES, familyOf } from '../dark-energy'
 import type { Family } from '../dark-energy/law'
-import type { Parameter, ParameterValue } from '../parameter'
+import type { NumberParameter, Parameter, ParameterValue } from '../parameter'
 import type { Budget } from '../scenario/budget'
 import { isUsed } from '../scenario/family-keys'
 import * as own from '../scenario/parameters'
@@ -22,7 +22,13 @@ interface Described {
 }
 
 export type Field =
-  | (Described & { readonly kind: 'number' | 'list'; readonly unit: string; readonly allowed: string })
+  | (Described & {
+      readonly kind: 'number'
+      readonly unit: string
+      readonly allowed: string
+      readonly slider: NumberParameter['slider']
+    })
+  | (Described & { readonly kind: 'list'; readonly unit: string; readonly allowed: string })
   | (Described & { readonly kind: 'choice'; readonly choices: readonly Choice[] })
   | (Described & { readonly kind: 'text'; readonly most: number })
   /** Follows from the others: shown, and carried in full so that another choice of what closes changes nothing. */
@@ -62,10 +68,11 @@ const LIGHTS: readonly Choice[] = [
 
 export function formOf(scenario: Scenario, budget: Budget): Form {
   const family = familyOf(scenario.eos)
+  const { formula, meaning, caution, source } = family
   const groups = [
     group('densities', 'Densities today', densityFields(scenario, budget)),
     group('rate', 'Expansion rate', [numberField(own.H0, scenario.h0)]),
-    { ...group('dark', 'Dark energy', darkFields(scenario, family)), family },
+    { ...group('dark', 'Dark energy', darkFields(scenario, family)), family: { formula, meaning, caution, source } },
     { ...group('light', 'Radiation, neutrinos, baryons', lightFields(scenario)), folded: true },
     group('name', 'Name', [nameField(scenario)]),
   ]
@@ -132,23 +139,23 @@ function nameField({ name }: Scenario): Field {
 type Numeric = Pick<
   Exclude<Parameter, { kind: 'choice' }>,
   'key' | 'symbol' | 'label' | 'meaning' | 'unit' | 'min' | 'max'
-> & {
-  readonly kind: 'number' | 'list'
-}
+> &
+  ({ readonly kind: 'list' } | Pick<NumberParameter, 'kind' | 'slider'>)
 
 function numberField(parameter: Numeric, value: ParameterValue): Field {
-  const { kind, key, symbol, label, meaning, unit, min, max } = parameter
+  const { key, symbol, label, meaning, min, max } = parameter
+  const unit = unitText(parameter.unit)
   const text = typeof value === 'object' ? value.join('; ') : String(value)
-  return {
-    kind,
-    name: key,
-    symbol,
-    label,
-    meaning,
-    unit,
-    value: text,
-    allowed: `${min} to ${max}`.replaceAll('-', '−'),
-  }
+  const allowed = `${min} to ${max}`.replaceAll('-', '−')
+  const field = { name: key, symbol, label, meaning, unit, value: text, allowed }
+  return parameter.kind === 'number'
+    ? { ...field, kind: 'number', slider: parameter.slider }
+    : { ...field, kind: 'list' }
+}
+
+/** As the measures have it: `km s⁻¹ Mpc⁻¹` is `km/s/Mpc`. */
+function unitText(unit: string): string {
+  return unit.replace(/ (\p{L}+)⁻¹/gu, '/$1')
 }
 
 function closingField(parameter: Numeric, value: number): Field {

@@ -1,0 +1,71 @@
+'use client'
+
+import { QueryClient, QueryClientProvider } from '@tanstack/react-query'
+import { type MouseEvent, useEffect, useState } from 'react'
+import type { Explorer as View } from '../lib/answers/explorer'
+import { go, useAddress } from './live/address'
+import { useExplorer } from './live/use-explorer'
+import { Figure } from './ui/figure'
+import { type Edition, Footer } from './ui/footer'
+import { Header } from './ui/header'
+import { Ingredients } from './ui/ingredients'
+import { Measures } from './ui/measures'
+import { Moments } from './ui/moments'
+import { Refusal } from './ui/refusal'
+import { Status } from './ui/status'
+import { Verdicts } from './ui/verdicts'
+
+interface Props {
+  readonly initial: View
+  readonly edition: Edition
+}
+
+/** The page: complete as the server draws it, and alive from then on. */
+export function Explorer(props: Props) {
+  const [client] = useState(() => new QueryClient())
+  return (
+    <QueryClientProvider client={client}>
+      <Page {...props} />
+    </QueryClientProvider>
+  )
+}
+
+function Page({ initial, edition }: Props) {
+  const address = useAddress()
+  const { view, desk, waiting, trouble } = useExplorer(address, initial)
+  useTitle(view.title)
+  return (
+    // biome-ignore lint/a11y: links stay links; what is caught here is the click that they get
+    <div className="page" data-theme={desk.place.theme} onClick={address ? follow : undefined}>
+      <Header desk={desk} address={address} />
+      <main>
+        <h1 className={initial.titled ? undefined : 'spoken'}>{view.title}</h1>
+        {view.refusal && <Refusal refusal={view.refusal} />}
+        <Verdicts scenarios={view.scenarios} focus={view.place.focus} />
+        <Figure view={view.figure} links={view.scenarios.map(({ link }) => link)} live={address !== null} />
+        <div className="columns">
+          <Ingredients key={`${desk.place.focus} ${desk.scenarios.length}`} desk={desk} live={address !== null} />
+          <Moments view={view} />
+          <Measures view={view} />
+        </div>
+      </main>
+      <Footer data={desk.links.data} edition={edition} />
+      {address && <Status view={view} moving={address.moving} waiting={waiting} trouble={trouble} />}
+    </div>
+  )
+}
+
+/** Plain clicks on links of this page change it where it stands. */
+function follow(event: MouseEvent): void {
+  const link = event.target instanceof Element ? event.target.closest('a') : null
+  const plain = event.button === 0 && !(event.metaKey || event.ctrlKey || event.shiftKey || event.altKey)
+  if (!link || !plain || event.defaultPrevented || link.origin !== location.origin || link.pathname !== '/') return
+  event.preventDefault()
+  go(link.href)
+}
+
+function useTitle(title: string): void {
+  useEffect(() => {
+    document.title = `${title} · Longhence`
+  }, [title])
+}

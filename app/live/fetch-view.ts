@@ -1,0 +1,21 @@
+/** Asks the server for what an address shows. */
+import type { Explorer } from '../../lib/answers/explorer'
+
+/** What of an address the answer depends on. */
+export function askedOf(search: string): string {
+  const query = new URLSearchParams(search)
+  const asked = new URLSearchParams(query.getAll('s').map((code) => ['s', code]))
+  for (const key of ['focus', 'theme']) {
+    const value = query.get(key)
+    if (value !== null) asked.set(key, value)
+  }
+  return asked.toString()
+}
+
+export async function fetchView(asked: string, signal: AbortSignal): Promise<Explorer> {
+  const response = await fetch(`/api/explorer?${asked}`, { signal }).catch((error: unknown) => {
+    throw signal.aborted ? error : new Error('The server cannot be reached.')
+  })
+  if (!response.ok) throw new Error(`The server answered with ${response.status}.`)
+  return response.json()
+}

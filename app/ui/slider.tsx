@@ -1,0 +1,89 @@
+import { type KeyboardEvent, useRef } from 'react'
+import type { Field } from '../../lib/words/fields'
+import { settle } from '../live/address'
+import type { Editing } from '../live/use-editing'
+
+/** Steps of a key that still belong to one change, in milliseconds. */
+const PAUSE = 1000
+/** So many presses of an arrow key lead about from one end to the other. */
+const PRESSES = 250
+
+const ARROWS: Readonly<Record<string, number>> = { ArrowRight: 1, ArrowUp: 1, ArrowLeft: -1, ArrowDown: -1 }
+
+interface Props {
+  readonly field: Extract<Field, { kind: 'number' }>
+  readonly drag: Editing['drag']
+}
+
+/** Arrow keys go in steps that can be seen, with Shift in the smallest ones. */
+export function Slider({ field, drag }: Props) {
+  const { name, label, unit, slider, value } = field
+  const { min, max, step } = slider
+  const gesture = useGesture(name)
+  const move = (to: number) => drag(name, String(onStep(to, slider)), gesture.now())
+  const press = (event: KeyboardEvent) => {
+    const way = ARROWS[event.key]
+    if (way === undefined) return
+    event.preventDefault()
+    const size = event.shiftKey ? step : stride(slider)
+    move(Math.max(min, Math.min(max, Number(value) + way * size)))
+  }
+  const part = Math.max(0, Math.min(1, (Number(value) - min) / (max - min)))
+  return (
+    <input
+      type="range"
+      className="slider"
+      aria-label={label}
+      aria-valuetext={unit ? `${value} ${unit}` : value}
+      min={min}
+      max={max}
+      step={step}
+      value={value}
+      style={{ '--part': `${100 * part}%` } as Record<string, string>}
+      onChange={({ target }) => move(Number(target.value))}
+      onPointerDown={() => gesture.begin(true)}
+      onKeyDown={press}
+      onPointerUp={gesture.end}
+      onPointerCancel={gesture.end}
+      onKeyUp={gesture.end}
+      onBlur={gesture.end}
+    />
+  )
+}
+
+let gestures = 0
+
+/** A drag from pressing to letting go is one gesture, and so are steps of keys that follow each other quickly. */
+function useGesture(name: string) {
+  const state = useRef({ number: 0, last: 0, held: false })
+  const begin = (held: boolean) => {
+    gestures += 1
+    state.current = { number: gestures, last: performance.now(), held }
+  }
+  const now = () => {
+    if (!state.current.held && performance.now() - state.current.last > PAUSE) begin(false)
+    state.current.last = performance.now()
+    return `${name} ${state.current.number}`
+  }
+  const end = () => {
+    if (state.current.held) state.current = { ...state.current, held: false, last: 0 }
+    settle()
+  }
+  return { begin, now, end }
+}
+
+type Range = Props['field']['slider']
+
+/** Without the noise of binary fractions. */
+function onStep(value: number, { step }: Range): number {
+  const decimals = Math.max(0, Math.ceil(-Math.log10(step)))
+  return Number(value.toFixed(decimals))
+}
+
+/** A round number of steps. */
+function stride({ min, max, step }: Range): number {
+  const rough = (max - min) / PRESSES
+  const power = 10 ** Math.floor(Math.log10(rough))
+  const round = [1, 2, 5, 10].find((one) => one * power >= rough * 0.99) ?? 10
+  return Math.max(step, round * power)
+}

@@ -1,0 +1,42 @@
+import type { Explorer } from '../../lib/answers/explorer'
+import type { Trouble } from '../live/use-explorer'
+import { useLate } from '../live/use-late'
+
+/** Sooner nobody misses anything. Milliseconds. */
+const PATIENCE = 300
+
+interface Props {
+  readonly view: Explorer
+  readonly moving: boolean
+  readonly waiting: boolean
+  readonly trouble: Trouble | null
+}
+
+/** At the lower edge: that something is still on its way, or why it does not come. */
+export function Status({ view, moving, waiting, trouble }: Props) {
+  const late = useLate(waiting && !trouble, PATIENCE)
+  return (
+    <>
+      {trouble && (
+        <div className="state trouble" role="alert">
+          <span>{trouble.message}</span>
+          {trouble.again && (
+            <button type="button" className="act" onClick={trouble.again}>
+              Try again
+            </button>
+          )}
+        </div>
+      )}
+      {late && <p className="state">Calculating</p>}
+      <p className="spoken" role="status">
+        {moving || waiting ? '' : told(view)}
+      </p>
+    </>
+  )
+}
+
+/** For those who do not see the page change. */
+function told({ scenarios, place }: Explorer): string {
+  const scenario = scenarios[place.focus]
+  return scenario ? `${scenario.name}: ${scenario.verdict.sentences[0] ?? ''}` : ''
+}
