@@ -100,7 +100,7 @@ function logOf(model: Model, keys: readonly Component['key'][], N: number): numb
   let [largest, sum] = [Number.NEGATIVE_INFINITY, 0]
   for (const one of model.components) {
     if (!keys.includes(one.key)) continue
-    const log = one.logSize(N)
+    const log = one.terms && one.density(N) < 0 ? Number.NEGATIVE_INFINITY : one.logSize(N)
     sum = log > largest ? sum * Math.exp(largest - log) + 1 : sum + Math.exp(log - largest)
     largest = Math.max(largest, log)
   }

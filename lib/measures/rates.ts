@@ -37,9 +37,7 @@ export type Share = 'matter' | 'radiation' | 'neutrino' | 'curvature' | 'dark'
 /** Density of one component over the critical density at the event. */
 export function densityFraction(event: Event, share: Share): number | Missing {
   const { N, arm } = event.place
-  const density = arm.model.components
-    .filter((one) => one.key === share)
-    .reduce((sum, one) => sum + Math.sign(one.omega) * Math.exp(one.logSize(N)), 0)
+  const density = arm.model.components.filter((one) => one.key === share).reduce((sum, one) => sum + one.density(N), 0)
   return ratio(density, expansionAtEvent(event))
 }
 
@@ -47,5 +45,6 @@ export function densityFraction(event: Event, share: Share): number | Missing {
 export function equationOfState({ place }: Event): number | Missing {
   if (place.arm.model.budget.dark === 0) return missing('there is no dark energy in this scenario')
   const w = place.arm.model.law.w(place.N)
+  if (Number.isNaN(w)) return missing('dark energy is used up here')
   return Number.isFinite(w) ? w : OUT_OF_RANGE
 }

@@ -51,7 +51,8 @@ function firstAbove(excess: (N: number) => number): number | null {
 function logAcceleration(model: Model, N: number): number {
   const terms = model.components.map((one) => {
     const [low, high] = one.exponentRange(N, N)
-    return { log: one.logSize(N), weight: Math.sign(one.omega) * (1 - (low + high) / 4) }
+    const sign = one.terms ? Math.sign(one.density(N)) : Math.sign(one.omega)
+    return { log: one.logSize(N), weight: sign * (1 - (low + high) / 4) }
   })
   const largest = Math.max(...terms.map((one) => one.log))
   if (largest === Number.POSITIVE_INFINITY) return largest

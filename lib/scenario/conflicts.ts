@@ -2,7 +2,7 @@
 import type { Family } from '../dark-energy/law'
 import type { ParameterValues } from '../parameter'
 import type { Budget } from './budget'
-import { CMB, CURVATURE, DARK, MASSES, MATTER, NU, RADIATION } from './parameters'
+import { CMB, CURVATURE, DARK, EOS, MASSES, MATTER, NU, RADIATION } from './parameters'
 import { type Fault, fault } from './problems'
 import type { Scenario } from './scenario'
 
@@ -34,6 +34,14 @@ export function lawFaults(given: Given, family: Family, values: ParameterValues)
   if (conflict === null) return []
   const { key, allowed } = conflict
   return [fault(key, given.get(key) ?? '', allowed, `${key} does not fit the other parameters of eos:${family.key}.`)]
+}
+
+/** A law that is defined for a positive density only. */
+export function positiveFaults(given: Given, family: Family | undefined, budget: Budget): Fault[] {
+  if (!family?.positive || budget.dark > 0) return []
+  const density = String(Number(budget.dark.toPrecision(4)))
+  const message = `eos:${family.key} needs a positive density of dark energy today, and here it is ${density}.`
+  return [fault(EOS.key, given.get(EOS.key) ?? family.key, 'another law where dark energy is not positive', message)]
 }
 
 /** Massive neutrinos are part of `matter`: they cannot weigh more. */

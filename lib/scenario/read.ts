@@ -3,7 +3,7 @@ import { FAMILIES } from '../dark-energy'
 import type { Family } from '../dark-energy/law'
 import type { ParameterValues } from '../parameter'
 import { budgetOf } from './budget'
-import { closureFaults, lawFaults, radiationFaults, weightFaults } from './conflicts'
+import { closureFaults, lawFaults, positiveFaults, radiationFaults, weightFaults } from './conflicts'
 import { readLaw, unknownFaults } from './family-keys'
 import { readPairs } from './given'
 import { nameFault } from './name'
@@ -30,7 +30,11 @@ export function readScenario(
   const given = readPairs(text)
   const desk: Desk = { texts: given.texts, faults: [...given.faults] }
   const scenario = assemble(desk, families)
-  if (desk.faults.length === 0) desk.faults.push(...weightFaults(desk.texts, scenario, budgetOf(scenario)))
+  if (desk.faults.length === 0) {
+    const budget = budgetOf(scenario)
+    const family = families.find((one) => one.key === scenario.eos)
+    desk.faults.push(...weightFaults(desk.texts, scenario, budget), ...positiveFaults(desk.texts, family, budget))
+  }
   if (desk.faults.length > 0) return { ok: false, problems: problemsOf(desk.faults, index) }
   return { ok: true, value: scenario }
 }

@@ -48,6 +48,12 @@ function at({ history }: Case, scale: number, branch: Branch = 'expanding'): Eve
   return event
 }
 
+/** The set looks for equal densities of matter and dark energy from ln a = −30 on (refcore.py, analyse). */
+const darkEqualities = (history: History): number[] =>
+  overtakings(history, darkOverMatter)
+    .filter((one) => one.N > -30)
+    .map((one) => Math.exp(one.N))
+
 /** Values without an argument. */
 const PLAIN: Readonly<Record<string, (one: Case) => number>> = {
   Omega_k: ({ budget }) => budget.curvature,
@@ -76,8 +82,8 @@ const PLAIN: Readonly<Record<string, (one: Case) => number>> = {
   t_rip_from_now: ({ history }) => history.end.time ?? Number.NaN,
   lifetime: ({ history }) => history.past.time.total + (history.end.time ?? Number.NaN),
   a_eq_mr: ({ history }) => Math.exp(overtakings(history, matterOverRadiation)[0].N),
-  'a_eq_mde[0]': ({ history }) => Math.exp(overtakings(history, darkOverMatter)[0].N),
-  'a_eq_mde[1]': ({ history }) => Math.exp(overtakings(history, darkOverMatter)[1].N),
+  'a_eq_mde[0]': ({ history }) => darkEqualities(history)[0],
+  'a_eq_mde[1]': ({ history }) => darkEqualities(history)[1],
   'a_acc[0]': ({ history }) => Math.exp(accelerationChanges(history)[0].N),
   'a_acc[1]': ({ history }) => Math.exp(accelerationChanges(history)[1].N),
 }

@@ -256,7 +256,7 @@ describe('what a bad code is refused for', () => {
     expect(refused('matter:1e 2')[0].message).toContain('%2B')
     expect(refused('matter:0,3')[0].message).toContain('point')
     expect(refused('matter:0')[0].message).toMatch(/masses:0.*cmb:0/)
-    expect(refused('eos:lambda,w0:-1')[0].allowed).toBe('only with eos:cpl')
+    expect(refused('eos:lambda,w0:-1')[0].allowed).toBe('only with eos:cpl or eos:jbp or eos:ba or eos:log')
   })
   test('an answer stays small whatever is sent', () => {
     const long = refused(`h0:${'7'.repeat(20000)}`)
