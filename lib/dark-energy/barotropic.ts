@@ -76,7 +76,7 @@ function linear(rate: number): Law {
       const [one, other] = [-rate / low, -rate / high]
       return one < other ? [one, other] : [other, one]
     },
-    parts: (direction) => (direction * rate < 0 ? fallingParts(rate, direction) : null),
+    parts: (direction) => (direction * rate < 0 ? fallingParts(rate) : null),
     past: slow,
     future: slow,
     breaks: [],
@@ -84,17 +84,14 @@ function linear(rate: number): Law {
 }
 
 /** 1 − x = 2 − (1 + x), x = |rate N| outwards: two parts that keep their signs. */
-function fallingParts(rate: number, direction: 1 | -1): readonly Part[] {
+function fallingParts(rate: number): readonly Part[] {
   const grown = (N: number) => 1 - rate * N
   return [
     { factor: 2, logDensity: () => 0, exponentRange: () => [0, 0] },
     {
       factor: -1,
       logDensity: (N) => Math.log(grown(N)),
-      exponentRange: (from, to) => {
-        const [one, other] = [rate / grown(from), rate / grown(to)]
-        return direction > 0 ? [one, other] : [other, one]
-      },
+      exponentRange: (from, to) => [rate / grown(from), rate / grown(to)],
     },
   ]
 }

@@ -164,7 +164,8 @@ function beyond(model: Model, direction: Direction, end: Search, stopped: Stoppe
   const infinite = [Number.POSITIVE_INFINITY, 0] as const
   const nothing = [0, 0] as const
   if (end.kind === 'double' || stopped === 'for ever') return { tail: null, time: infinite, conformal: infinite }
-  if (end.kind === 'root' || stopped === 'end') return { tail: null, time: nothing, conformal: nothing }
+  const ends = end.kind === 'root' || (end.kind === 'singular' && Math.abs(end.N) <= FARTHEST)
+  if (ends || stopped === 'end') return { tail: null, time: nothing, conformal: nothing }
   if (explodes(model, direction)) return exploding(model, direction, stopped, edge)
   const tail = tailAt(model, direction, direction * edge, true)
   if (tail === null) {

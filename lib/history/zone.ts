@@ -36,6 +36,17 @@ function conditioningOf(magnitude: number, value: number): number {
   return ratio >= 0 && ratio < 1e16 ? 1 + ratio : 2
 }
 
+/** What rounding N and ln f does to f where it is far from 1, relative to E² in units of eps. */
+function darkNoise({ budget, law }: Model, N: number, squared: number): number {
+  if (budget.dark === 0) return 0
+  const log = Math.abs(law.logDensity(N))
+  if (!(log > 8)) return 0
+  const share = Math.abs(budget.dark * law.density(N)) / squared
+  const noise = log + Math.abs(3 * (1 + law.w(N)) * N)
+  if (!Number.isFinite(noise)) return 0
+  return share < 1 ? noise * share : noise
+}
+
 /** s = m: anywhere E² stays well above zero. */
 export function plainZone(model: Model, direction: Direction, from: number, to: number): Zone {
   return {
@@ -45,11 +56,12 @@ export function plainZone(model: Model, direction: Direction, from: number, to: 
     distanceAt: (s) => s,
     variableAt: (m) => m,
     expansion: (s) => expansionAt(model, direction * s, Math.exp(-direction * s)),
-    conditioning: (s) =>
-      (model.law.noise?.(direction * s) ?? 0) +
-      (model.signed
-        ? conditioningOf(model.magnitude(direction * s), expansionAt(model, direction * s, Math.exp(-direction * s)))
-        : 2),
+    conditioning: (s) => {
+      const N = direction * s
+      const squared = expansionAt(model, N, Math.exp(-N))
+      const sum = model.signed ? conditioningOf(model.magnitude(N), squared) : 2
+      return sum + darkNoise(model, N, squared) + (model.law.noise?.(N) ?? 0)
+    },
     sampleInto(out, centre, half) {
       const central = Math.exp(-direction * centre)
       for (let k = 0; k < NODE_COUNT; k++) {
