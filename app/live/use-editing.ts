@@ -1,19 +1,18 @@
 /** What a person types, chooses and drags in the form, and where it leads. */
 import { useState } from 'react'
-import type { Problem } from '../../lib/scenario/scenario'
 import type { Desk } from '../../lib/words/desk'
 import { edited } from '../../lib/words/edit'
 import { go } from './address'
 
 interface Draft {
   readonly text: string
-  readonly problem: Problem | null
+  readonly complaint: string | null
 }
 
 export interface Editing {
   /** What a field holds: as typed, until it is taken over. */
   readonly textOf: (name: string, value: string) => string
-  readonly problemOf: (name: string) => Problem | null
+  readonly complaintOf: (name: string) => string | null
   readonly type: (name: string, text: string) => void
   readonly drop: (name: string) => void
   /** Takes over what was typed. */
@@ -37,16 +36,16 @@ export function useEditing(desk: Desk): Editing {
     if (result.ok) {
       put(name, null)
       go(result.link, gesture)
-    } else put(name, { text, problem: result.problems[0] ?? null })
+    } else put(name, { text, complaint: result.complaint })
   }
   const commit = (name: string) => {
     const draft = drafts.get(name)
-    if (draft && draft.problem === null) take(name, draft.text, null)
+    if (draft && draft.complaint === null) take(name, draft.text, null)
   }
   return {
     textOf: (name, value) => drafts.get(name)?.text ?? value,
-    problemOf: (name) => drafts.get(name)?.problem ?? null,
-    type: (name, text) => put(name, { text, problem: null }),
+    complaintOf: (name) => drafts.get(name)?.complaint ?? null,
+    type: (name, text) => put(name, { text, complaint: null }),
     drop: (name) => put(name, null),
     commit,
     choose: (name, text) => take(name, text, null),

@@ -1,4 +1,3 @@
-import type { Problem } from '../../lib/scenario/scenario'
 import type { Field } from '../../lib/words/fields'
 import type { Editing } from '../live/use-editing'
 import { Slider } from './slider'
@@ -13,7 +12,7 @@ interface Props {
 /** One parameter: symbol, words, where it is typed or chosen, and where it is dragged. */
 export function FieldRow({ field, editing, live }: Props) {
   const id = `field-${field.name}`
-  const problem = editing.problemOf(field.name)
+  const complaint = editing.complaintOf(field.name)
   return (
     <div className={field.kind === 'closing' ? 'field closing' : 'field'}>
       <label htmlFor={id} title={field.meaning}>
@@ -26,17 +25,13 @@ export function FieldRow({ field, editing, live }: Props) {
         </span>
       </label>
       <Control field={field} id={id} editing={editing} />
-      {problem && <Complaint id={`${id}-problem`} problem={problem} />}
+      {complaint && (
+        <p id={`${id}-complaint`} className="complaint" role="alert">
+          {complaint}
+        </p>
+      )}
       {field.kind === 'number' && <span className="track">{live && <Slider field={field} drag={editing.drag} />}</span>}
     </div>
-  )
-}
-
-function Complaint({ id, problem }: { readonly id: string; readonly problem: Problem }) {
-  return (
-    <p id={id} className="complaint" role="alert">
-      {problem.message} Allowed: {problem.allowed}.
-    </p>
   )
 }
 
@@ -70,14 +65,14 @@ function Control({ field, id, editing }: ControlProps) {
 }
 
 /** What is typed is taken over on Enter and on leaving the field; Escape takes it back. */
-function typed({ name, value }: Field, id: string, { textOf, problemOf, type, commit, drop }: Editing) {
-  const wrong = problemOf(name) !== null
+function typed({ name, value }: Field, id: string, { textOf, complaintOf, type, commit, drop }: Editing) {
+  const wrong = complaintOf(name) !== null
   return {
     id,
     name,
     value: textOf(name, value),
     'aria-invalid': wrong || undefined,
-    'aria-describedby': wrong ? `${id}-problem` : undefined,
+    'aria-describedby': wrong ? `${id}-complaint` : undefined,
     onChange: ({ target }: { readonly target: HTMLInputElement }) => type(name, target.value),
     onBlur: () => commit(name),
     onKeyDown: ({ key }: { readonly key: string }) => {

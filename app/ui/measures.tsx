@@ -1,6 +1,6 @@
 import type { Explorer } from '../../lib/answers/explorer'
 import type { MeasureWords } from '../../lib/words/measures'
-import { Symbols } from './symbol'
+import { Sentence, Symbols } from './symbol'
 
 export function Measures({ view }: { readonly view: Explorer }) {
   return (
@@ -35,7 +35,11 @@ function Row({ measure }: { readonly measure: MeasureWords }) {
       </td>
       <th scope="row" title={meaning}>
         {label}
-        {because && <span className="reason">{because}</span>}
+        {because && (
+          <span className="reason">
+            <Sentence text={because} />
+          </span>
+        )}
       </th>
       <td className="value">{value === null ? '–' : <Value value={value} unit={unit} />}</td>
     </tr>

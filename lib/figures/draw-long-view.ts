@@ -3,8 +3,8 @@ import { axes, timeAxisTitle } from './draw-axes'
 import { drawCurve } from './draw-curve'
 import { drawLabel } from './draw-label'
 import { drawRibbons, ribbonsHeight } from './draw-ribbons'
-import { labelHeight, labelWidth, nameOf, placeLabels } from './labels'
-import type { LongView } from './long-view'
+import { labelHeight, labelWidth, namedAbove, nameOf, placeLabels } from './labels'
+import type { Curve, LongView } from './long-view'
 import { type Frame, type Margins, type Plot, plotOf } from './plot'
 import { px, type SvgNode, svg } from './svg'
 import { textWidth } from './text-width'
@@ -14,8 +14,7 @@ const SCALE_TITLE = 'scale factor a'
 
 export function drawLongView(view: LongView, frame: Frame): SvgNode {
   const plot = plotOfView(view, frame)
-  const free = plot.left + textWidth(SCALE_TITLE, frame.type * 0.9) + frame.type
-  const labels = placeLabels(view, plot, frame, free)
+  const labels = placeLabels(view, plot, frame, freeAbove(frame))
   return svg(
     'svg',
     {
@@ -42,14 +41,23 @@ export function heightOfView(view: LongView, frame: Frame): number {
   return px(frame.height + ribbonsHeight(view.curves, frame))
 }
 
+/** Left margin in units of the type. */
+const LEFT = 2.4
+
+/** Where the row above the plot begins to be free, right of the axis title. */
+function freeAbove({ type }: Frame): number {
+  return LEFT * type + textWidth(SCALE_TITLE, type * 0.9) + type
+}
+
 function marginsOf(view: LongView, frame: Frame): Margins {
   const { type, compact } = frame
-  const texts = view.curves.map((curve) => ({ name: nameOf(curve, frame), note: compact ? '' : curve.note }))
-  const beside = texts.filter((_, i) => view.curves[i]?.finish?.edge !== 'top').map((text) => labelWidth(text, type))
-  const above = texts.filter((_, i) => view.curves[i]?.finish?.edge === 'top').map((text) => labelHeight(text, type))
+  const textsOf = (curve: Curve) => ({ name: nameOf(curve, frame), note: compact ? '' : curve.note })
+  const others = view.curves.filter(({ finish }) => finish?.edge !== 'top')
+  const beside = others.map((curve) => labelWidth(textsOf(curve), type))
+  const above = namedAbove(view.curves, frame, freeAbove(frame)).map((curve) => labelHeight(textsOf(curve), type))
   const title = textWidth(timeAxisTitle(), type * 0.9)
   return {
-    left: 2.4 * type,
+    left: LEFT * type,
     right: compact ? 0.6 * type : Math.max(title, ...beside) + 1.4 * type,
     top: Math.max(1.5 * type, ...above.map((height) => height + 1.3 * type)),
     bottom: compact ? 3.2 * type : 2 * type,

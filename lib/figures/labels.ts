@@ -48,11 +48,22 @@ export function placeLabels(view: LongView, plot: Plot, frame: Frame, free: numb
   return placed
 }
 
+/** The curves that are named above the plot. On a phone that has no room for them all it is none: hue and dash are the key. */
+export function namedAbove(curves: readonly Curve[], frame: Frame, free: number): readonly Curve[] {
+  const ends = curves.filter((curve) => curve.finish?.edge === 'top')
+  return frame.compact && roomAbove(ends, frame, free) < Number.POSITIVE_INFINITY ? [] : ends
+}
+
+/** For each label, where not all can have what they need. */
+function roomAbove(ends: readonly Curve[], frame: Frame, free: number): number {
+  const widths = ends.map((curve) => labelWidth(textsOf(curve, frame), frame.type))
+  return sharedRoom(widths, frame.width - free - ends.length * GAP * frame.type)
+}
+
 function topLabels(curves: readonly Curve[], plot: Plot, frame: Frame, free: number): Label[] {
   const { type } = frame
-  const ends = curves.filter((curve) => curve.finish?.edge === 'top')
-  const widths = ends.map((curve) => labelWidth(textsOf(curve, frame), type))
-  const room = sharedRoom(widths, frame.width - free - ends.length * GAP * type)
+  const ends = namedAbove(curves, frame, free)
+  const room = roomAbove(ends, frame, free)
   const texts = ends.map((curve) => shortened(textsOf(curve, frame), room, type))
   const wishes = ends.map((curve, i) => ({
     middle: plot.x(curve.finish?.at[0] ?? 0),

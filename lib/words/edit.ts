@@ -3,23 +3,32 @@ import { readScenario } from '../scenario/read'
 import type { Problem } from '../scenario/scenario'
 import { codeOf, composedLink } from './compose'
 import type { Desk } from './desk'
+import { type Field, unitText } from './fields'
 
-export type Edited =
-  | { readonly ok: true; readonly link: string }
-  | { readonly ok: false; readonly problems: readonly Problem[] }
+export type Edited = { readonly ok: true; readonly link: string } | { readonly ok: false; readonly complaint: string }
 
 /** `name` is that of a field of the form, `text` as typed or chosen. */
 export function edited(desk: Desk, name: string, text: string): Edited {
   const fields = new Map([...fieldsOf(desk), [name, text]])
   const reading = readScenario(codeOf(fields), null)
-  if (!reading.ok) return reading
+  if (!reading.ok) return { ok: false, complaint: complaintOf(reading.problems[0] as Problem, shownFields(desk)) }
   const { place, scenarios } = desk
   const codes = scenarios.map(({ plainCode }) => plainCode)
   const focus = String(place.focus + 1)
   return { ok: true, link: composedLink({ codes, focus, theme: place.theme ?? undefined, fields }) }
 }
 
-function fieldsOf({ form }: Desk): [string, string][] {
-  const shown = form.groups.flatMap(({ fields }) => fields)
-  return [...form.hidden, ...shown].map(({ name, value }) => [name, value])
+function fieldsOf(desk: Desk): [string, string][] {
+  return [...desk.form.hidden, ...shownFields(desk)].map(({ name, value }) => [name, value])
+}
+
+function shownFields({ form }: Desk): readonly Field[] {
+  return form.groups.flatMap(({ fields }) => fields)
+}
+
+/** In the words of the form instead of those of the code. */
+function complaintOf({ parameter, message, allowed }: Problem, fields: readonly Field[]): string {
+  const label = fields.find(({ name }) => name === parameter)?.label
+  const said = label && message.startsWith(`${parameter} `) ? `${label}${message.slice(parameter.length)}` : message
+  return `${said.charAt(0).toUpperCase()}${said.slice(1)} Allowed: ${unitText(allowed).replace(' joined by _', '')}.`
 }

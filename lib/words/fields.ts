@@ -154,7 +154,7 @@ function numberField(parameter: Numeric, value: ParameterValue): Field {
 }
 
 /** As the measures have it: `km s⁻¹ Mpc⁻¹` is `km/s/Mpc`. */
-function unitText(unit: string): string {
+export function unitText(unit: string): string {
   return unit.replace(/ (\p{L}+)⁻¹/gu, '/$1')
 }
 
