@@ -3,9 +3,10 @@
  * Each stretch between today, a turning point and an end is walked so that every step moves by about the same part of the
  * stretch in time, in scale factor and in its logarithm together, whichever of them bends.
  */
-import { type Arm, FARTHEST } from '../history/arm'
+import type { Arm } from '../history/arm'
 import type { History } from '../history/history'
 import { fromToday, placeAt, placeElapsed, placeRemaining } from '../history/place'
+import { FARTHEST } from '../history/turning'
 import type { Solution } from '../solve'
 import { hubbleTimeGyr } from '../units'
 
@@ -37,6 +38,7 @@ export function seriesOf({
   const gyr = hubbleTimeGyr(scenario.h0)
   const rows: Row[] = []
   const add = (time: number, scale: number) => {
+    if (!Number.isFinite(time) || !Number.isFinite(scale)) return
     const shown = rounded(time)
     if (rows.length === 0 || shown !== rows[rows.length - 1][0]) rows.push([shown, rounded(scale)])
   }

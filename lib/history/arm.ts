@@ -2,14 +2,12 @@
  * One direction from today, into the past or into the future of the expansion: all times and distances along it,
  * measured from today and from its far end, so that each keeps its own relative accuracy.
  */
-import { logarithmicIn, logExpansion, type Model } from '../model'
-import { integralOfExp } from './far'
+import type { Model } from '../model'
+import { beyondPanels, type Stopped } from './beyond'
 import { type Panel, panelsOf } from './panels'
-import { explodes, remainingIn, type Tail, tailAt } from './tail'
-import { type Direction, type Search, searchTurning } from './turning'
-import { edgeZone, plainZone, staticZone, turningZone, type Zone } from './zone'
-
-export type Clock = 'time' | 'conformal'
+import { stretchesOf } from './stretches'
+import { type Clock, type Tail, tailAt } from './tail'
+import { type Direction, FARTHEST, type Search, searchTurning } from './turning'
 
 /** Sums at the inner edge of each panel, from today, and at its outer edge, to the end. */
 interface Sums {
@@ -32,13 +30,11 @@ export interface Arm {
   readonly conformal: Sums
 }
 
-/** Farthest |ln a| for which a and 1/a are doubles. */
-export const FARTHEST = 700
 const NEGLIGIBLE = 1e-18
 /** In 1/H₀: beyond this nobody asks, and E² nears the end of the doubles. */
 const FOR_EVER = 1e100
-/** Width in ln a of the zone around a turning point, a static state or an edge. */
-const NEAR = 0.7
+/** An integrand this far down comes from densities that are about to leave the doubles. */
+const NOTHING = 1e-200
 
 export function armOf(model: Model, direction: Direction): Arm {
   const end = searchTurning(model, direction)
@@ -55,7 +51,7 @@ export function armFrom(
   stopped: Stopped,
 ): Arm {
   const edges = Float64Array.from([...panels.map((one) => one.zone.distanceAt(one.from)), lastEdge(panels)])
-  const { tail, time, conformal } = beyond(model, direction, end, stopped, lastEdge(panels))
+  const { tail, time, conformal } = beyondPanels(model, direction, end, stopped, lastEdge(panels))
   return {
     model,
     direction,
@@ -73,67 +69,6 @@ const lastEdge = (panels: readonly Panel[]): number => {
   return last.zone.distanceAt(last.to)
 }
 
-/** A zone, and whether a history can run out within it: the law does not break farther out, and no turning point waits there. */
-interface Stretch {
-  readonly zone: Zone
-  /** `edge`: dark energy is used up at its end, and the rest goes on. */
-  readonly kind: 'inner' | 'last' | 'edge'
-}
-
-/** From where on, outwards, which kind of zone. */
-interface Beginning {
-  readonly from: number
-  readonly zone: (from: number, to: number) => Zone
-  readonly edge: boolean
-}
-
-function stretchesOf(model: Model, direction: Direction, end: Search): readonly Stretch[] {
-  const reach = end.kind === 'none' ? FARTHEST : Math.min(FARTHEST, Math.abs(end.N))
-  const beginnings = beginningsOf(model, direction, end, reach)
-  const breaks = model.law.breaks.map((N) => direction * N).filter((m) => m > 0 && m < reach)
-  const cuts = [...new Set([...breaks, ...beginnings.map((one) => one.from), reach])].sort((a, b) => a - b)
-  const runsOut = end.kind === 'none' || end.kind === 'singular'
-  const edge = beginnings.find((one) => one.edge)
-  const lastBreak = Math.max(0, ...(edge ? [] : breaks))
-  return cuts.slice(1).map((to, i) => {
-    const from = cuts[i] ?? 0
-    const begun = beginnings.findLast((one) => one.from <= from)
-    const zone = (begun ?? beginnings[0]).zone(from, to)
-    return { zone, kind: begun?.edge ? 'edge' : runsOut && from >= lastBreak ? 'last' : 'inner' }
-  })
-}
-
-/** In ascending order; the first begins today. */
-function beginningsOf(model: Model, direction: Direction, end: Search, reach: number): readonly Beginning[] {
-  const law = logarithmicIn(model, direction)
-  const edge = law?.edge ? Math.abs(law.edge.N) : Number.POSITIVE_INFINITY
-  const plain = (from: number): Beginning => ({
-    from,
-    zone: (one, other) => plainZone(model, direction, one, other),
-    edge: false,
-  })
-  const list = [plain(0)]
-  if (law && edge < reach) {
-    const zone = (from: number, to: number) => edgeZone(model, direction, law, from, to)
-    list.push({ from: nearEdge(edge), zone, edge: true }, plain(edge))
-  }
-  const least = edge < reach ? edge : 0
-  if (end.kind === 'none' || reach < Math.abs(end.N)) return list
-  if (law && (end.kind === 'singular' || (end.kind === 'root' && edge === reach))) {
-    const zone = (from: number, to: number) => edgeZone(model, direction, law, from, to)
-    return [...list, { from: nearEdge(reach), zone, edge: false }]
-  }
-  const zoneTo = end.kind === 'root' ? turningZone : staticZone
-  const zone = (from: number, to: number) => zoneTo(model, direction, end.N, from, to)
-  return [...list, { from: Math.max(least, reach - NEAR), zone, edge: false }]
-}
-
-/** Not farther from an edge than halfway, so that what is left of dark energy tells from its density today. */
-const nearEdge = (edge: number): number => Math.max(edge - NEAR, edge / 2)
-
-/** Why the panels stop: at the end itself, where a closed form takes over, or where nothing that a double can hold is left to add. */
-export type Stopped = 'end' | 'tail' | 'spent' | 'for ever' | 'far'
-
 function march(model: Model, direction: Direction, end: Search): { panels: readonly Panel[]; stopped: Stopped } {
   const panels: Panel[] = []
   let [time, conformal] = [0, 0]
@@ -142,9 +77,11 @@ function march(model: Model, direction: Direction, end: Search): { panels: reado
     const enough = (panel: Panel, edge: number): boolean => {
       time += panel.time.total
       conformal += panel.conformal.total
-      const spent = panel.time.total < NEGLIGIBLE * time && panel.conformal.total < NEGLIGIBLE * conformal
-      if (kind === 'edge') return spent && zone.distanceAt(edge + 1) === zone.distanceAt(zone.to)
-      if (kind === 'last' && spent) stopped = 'spent'
+      const adds = Math.max(panel.time.total / time, panel.conformal.total / conformal)
+      if (kind === 'edge') return adds < NEGLIGIBLE && zone.distanceAt(edge + 1) === zone.distanceAt(zone.to)
+      if (kind === 'final' && adds < NEGLIGIBLE) stopped = 'spent'
+      else if (kind === 'last' && adds < NEGLIGIBLE && (adds < NOTHING || lasts(model, direction, edge)))
+        stopped = 'spent'
       else if (end.kind !== 'root' && time > FOR_EVER) stopped = 'for ever'
       else if (zone.to === FARTHEST && tailAt(model, direction, direction * edge) !== null) stopped = 'tail'
       return stopped !== null
@@ -155,39 +92,15 @@ function march(model: Model, direction: Direction, end: Search): { panels: reado
   return { panels, stopped: lastEdge(panels) === FARTHEST ? 'far' : 'end' }
 }
 
-interface Beyond extends Record<Clock, readonly [number, number]> {
-  readonly tail: Tail | null
-}
-
-/** What lies beyond the last panel: the tail, and value and error of both integrals. */
-function beyond(model: Model, direction: Direction, end: Search, stopped: Stopped, edge: number): Beyond {
-  const infinite = [Number.POSITIVE_INFINITY, 0] as const
-  const nothing = [0, 0] as const
-  if (end.kind === 'double' || stopped === 'for ever') return { tail: null, time: infinite, conformal: infinite }
-  const ends = end.kind === 'root' || (end.kind === 'singular' && Math.abs(end.N) <= FARTHEST)
-  if (ends || stopped === 'end') return { tail: null, time: nothing, conformal: nothing }
-  if (explodes(model, direction)) return exploding(model, direction, stopped, edge)
-  const tail = tailAt(model, direction, direction * edge, true)
-  if (tail === null) {
-    const left = stopped === 'spent' ? nothing : infinite
-    return { tail, time: left, conformal: left }
-  }
-  const doubt = tail.time.corrections.reduce((sum, one) => sum + one.size ** 2, 4 * Number.EPSILON)
-  const of = (clock: Clock) => {
-    const value = remainingIn(tail[clock], 0)
-    return [value, Number.isFinite(value) ? doubt * value : 0] as const
-  }
-  return { tail, time: of('time'), conformal: of('conformal') }
-}
-
-/** Every integral is finite, but the doubles may end before it is complete. */
-function exploding(model: Model, direction: Direction, stopped: Stopped, edge: number): Beyond {
-  if (stopped === 'spent') return { tail: null, time: [0, 0], conformal: [0, 0] }
-  const of = (weight: number): readonly [number, number] => {
-    const value = integralOfExp((m) => -weight * direction * m - 0.5 * logExpansion(model, direction * m), edge)
-    return [value, Number.isFinite(value) ? 1e-12 * value : 0]
-  }
-  return { tail: null, time: of(0), conformal: of(1) }
+/** Is E² here made of what never thins out again farther on? Then what adds nothing now adds nothing later. */
+function lasts(model: Model, direction: Direction, edge: number): boolean {
+  const N = direction * edge
+  const lasting = model.components.reduce((sum, one) => {
+    const range =
+      direction > 0 ? one.exponentRange(N, Number.POSITIVE_INFINITY) : one.exponentRange(Number.NEGATIVE_INFINITY, N)
+    return (direction > 0 ? range[1] <= 0 : range[0] >= 0) ? sum + one.density(N) : sum
+  }, 0)
+  return !(lasting < 0.5 * model.expansion(N, Math.exp(-N)))
 }
 
 function sumsOf(panels: readonly Panel[], clock: Clock, [beyond, beyondError]: readonly [number, number]): Sums {

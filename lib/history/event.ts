@@ -2,9 +2,10 @@
  * An event of the history: where on which arm, when, and how far in conformal time.
  * Arms are symmetric in time about a turning point, so the contracting branches are mirrored arms.
  */
-import type { Arm, Clock } from './arm'
+import type { Arm } from './arm'
 import type { History } from './history'
 import { expansionAtPlace, fromToday, type Place, placeAt, placeElapsed, placeRemaining, toEnd } from './place'
+import type { Clock } from './tail'
 
 export type Branch = 'expanding' | 'contracting'
 /** before = before a bounce, contracting; past and future = the expansion that holds today; home = after a turnaround. */

@@ -26,6 +26,9 @@ const RESOLVED = 2e-14
 /** A panel this narrow (in s) is taken as it is; its error bound says so. */
 const NARROWEST = 1e-9
 const GROWTH = 1.7
+/** So many trials without getting better by half are noise, unless it is above NOISIEST times what is asked. */
+const NOISY_TRIALS = 4
+const NOISIEST = 1e4
 /** Panels tried in one zone before the scenario is given up. */
 const MOST_PANELS = 4000
 
@@ -37,24 +40,39 @@ export function panelsOf(zone: Zone, enough: (panel: Panel, edge: number) => boo
   const panels: Panel[] = []
   let [from, width] = [zone.from, zone.width]
   let tried = 0
+  let [floor, trials]: [number, readonly number[]] = [1, []]
   while (from < zone.to) {
     if (++tried > MOST_PANELS) throw new RangeError(`more than ${MOST_PANELS} panels would be needed`)
     const to = from + width >= zone.to - width * 0.05 ? zone.to : from + width
     const panel = panelOver(zone, from, to)
-    if (panel.worst > 1 && to - from > NARROWEST) {
-      width = (to - from) * Math.max(0.35, Math.min(0.75, panel.worst ** (-1 / 15)))
+    trials = [...trials, panel.worst]
+    floor = Math.max(floor, noiseIn(trials))
+    const excess = panel.worst / floor
+    if (excess > 1 && to - from > NARROWEST) {
+      width = (to - from) * Math.max(0.35, Math.min(0.75, excess ** (-1 / 15)))
       continue
     }
+    trials = []
     panels.push(panel)
     if (enough(panel, to)) break
-    width = (to - from) * Math.min(GROWTH, Math.max(1, 0.95 * (panel.worst + 1e-3) ** (-1 / 15)))
+    width = (to - from) * Math.min(GROWTH, Math.max(1, 0.95 * (excess + 1e-3) ** (-1 / 15)))
     from = to
   }
   return panels
 }
 
+/** What shrinking no longer betters is noise: how much of it there is, with a margin; 0 while there is no sign of it. */
+function noiseIn(trials: readonly number[]): number {
+  const last = trials.slice(-NOISY_TRIALS)
+  const stalled = last.length === NOISY_TRIALS && last.every((one, i) => i === 0 || one > 0.5 * last[i - 1])
+  const noise = 4 * Math.max(...last)
+  return stalled && noise < NOISIEST ? noise : 0
+}
+
 /** `worst` is the size of the last two coefficients over what is asked. */
-function panelOver(zone: Zone, from: number, to: number): Panel & { readonly worst: number } {
+type Trial = Panel & { readonly worst: number }
+
+function panelOver(zone: Zone, from: number, to: number): Trial {
   const [centre, half] = [(from + to) / 2, (to - from) / 2]
   zone.sampleInto(samples, centre, half)
   const conditioning = Math.max(

@@ -3,9 +3,10 @@ import { TODAY } from '../model'
 import { solveIncreasing } from '../numerics/chebyshev'
 import { gaussLegendre } from '../numerics/gauss-legendre'
 import { brent } from '../numerics/roots'
-import { type Arm, type Clock, FARTHEST } from './arm'
+import type { Arm } from './arm'
 import { within } from './panels'
-import { elapsedIn, remainingIn } from './tail'
+import { type Clock, elapsedIn, remainingIn } from './tail'
+import { FARTHEST } from './turning'
 
 /** A place on an arm: s is the variable of its panel's zone, or the distance into the tail beyond the last panel. */
 export interface Place {

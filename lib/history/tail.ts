@@ -8,6 +8,8 @@ import { asymptoteOf, type Component, logarithmicIn, type Model } from '../model
 import { integralOfExp } from './far'
 import type { Direction } from './turning'
 
+export type Clock = 'time' | 'conformal'
+
 export interface Tail {
   /** Where it begins. */
   readonly N: number
@@ -71,7 +73,17 @@ export function leadingExponent(model: Model, direction: Direction): number | nu
   return winner
 }
 
-/** The tail from N on, or null where corrections are still too large (or `anyway`, at the end of the doubles). */
+/** Whether the integral to the far end is finite, from what wins there. */
+export function converges(model: Model, direction: Direction, clock: Clock): boolean {
+  if (explodes(model, direction)) return true
+  const exponent = leadingExponent(model, direction)
+  if (exponent === null) return false
+  const slow = exponent === 0 ? logarithmicIn(model, direction) : null
+  if (slow && clock === 'time') return slow.overTwo * slow.rate * direction > 0
+  return -direction * exponent + (clock === 'conformal' ? 2 * direction : 0) > 0
+}
+
+/** The tail from N on, or null where corrections are still too large; `anyway`, at the end of the doubles, leaves them out. */
 export function tailAt(model: Model, direction: Direction, N: number, anyway = false): Tail | null {
   const exponent = leadingExponent(model, direction)
   if (exponent === null || explodes(model, direction)) return null
@@ -91,14 +103,16 @@ export function tailAt(model: Model, direction: Direction, N: number, anyway = f
       ? slowTail(N, direction, density, slow)
       : null
   const corrections = others.map((one) => correctionOf(one, direction, N, density, exponent))
-  if (!anyway && corrections.some((one) => one === null || Math.abs(one.size) > SMALL)) return null
-  return powerTail(
-    N,
-    direction,
-    exponent,
-    density,
-    corrections.filter((one) => one !== null && one.size !== 0) as Correction[],
-  )
+  if (corrections.every((one) => one !== null && Math.abs(one.size) <= SMALL)) {
+    return powerTail(
+      N,
+      direction,
+      exponent,
+      density,
+      corrections.filter((one) => one !== null && one.size !== 0) as Correction[],
+    )
+  }
+  return anyway ? powerTail(N, direction, exponent, density, []) : null
 }
 
 /** δ and p of one component, or null while it does not yet follow its power and still matters. */

@@ -27,8 +27,8 @@ const NOISE = 32 * Number.EPSILON
 const MOST_STEPS = 20000
 /** Newton's steps from where the search came to rest are far shorter than this in ln a. */
 const STRAY = 0.1
-/** Beyond e^±FARTHEST the scale factor is not a double. */
-const FARTHEST = 700
+/** Farthest |ln a| for which a and 1/a are doubles. */
+export const FARTHEST = 700
 
 const NONE: Search = { kind: 'none', farRoot: null }
 
@@ -50,7 +50,8 @@ export function searchTurning(model: Model, direction: Direction): Search {
 }
 
 /** The density diverges at N: with it goes E². */
-const endless = ({ budget }: Model, N: number): Search => (budget.dark > 0 ? { kind: 'singular', N } : rootAt(N, false))
+const endless = (model: Model, N: number): Search =>
+  model.budget.dark > 0 ? { kind: 'singular', N } : rootAt(model, N, false)
 
 function termsOf(model: Model, direction: Direction, withDark: boolean): Terms {
   const all = model.components
@@ -65,13 +66,17 @@ function atEdge(model: Model, edge: Edge, direction: Direction): Search {
   if (terms.plus.length + terms.minus.length === 0) {
     return edge.kind === 'singular' ? { kind: 'singular', N: edge.N } : { kind: 'double', N: edge.N }
   }
-  if (logSum(terms.plus, edge.N) - logSum(terms.minus, edge.N) <= NOISE) return rootAt(edge.N, false)
+  if (logSum(terms.plus, edge.N) - logSum(terms.minus, edge.N) <= NOISE) return rootAt(model, edge.N, false)
   if (edge.kind === 'singular') return { kind: 'singular', N: edge.N }
   return stepsFrom(model, terms, direction, edge.N, Number.POSITIVE_INFINITY) ?? NONE
 }
 
-const rootAt = (N: number, certain: boolean): Search =>
-  Math.abs(N) > FARTHEST ? { kind: 'none', farRoot: N } : { kind: 'root', N, certain }
+/** A root, if a and E² about it are doubles. */
+function rootAt(model: Model, N: number, certain: boolean): Search {
+  const size = model.magnitude(N)
+  const near = Math.abs(N) <= FARTHEST && size > 1e-290 && size < 1e290
+  return near ? { kind: 'root', N, certain } : { kind: 'none', farRoot: N }
+}
 
 /** Certified steps outwards, halving the way to a limit where exponents diverge; null where no root lies before the limit. */
 function stepsFrom(
@@ -135,7 +140,8 @@ function safeStep(
 
 /** The certified steps have come to rest at N: a simple root, or a double one, is here. */
 function settle(model: Model, start: number, direction: Direction): Search {
-  if (Math.abs(start) > FARTHEST) return rootAt(start, true)
+  const here = rootAt(model, start, true)
+  if (here.kind === 'none') return here
   let N = start
   for (let step = 0; step < 8; step++) {
     const { first } = model.derivatives(N)

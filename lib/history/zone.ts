@@ -36,15 +36,13 @@ function conditioningOf(magnitude: number, value: number): number {
   return ratio >= 0 && ratio < 1e16 ? 1 + ratio : 2
 }
 
-/** What rounding N and ln f does to f where it is far from 1, relative to E² in units of eps. */
+/** What rounding N and ln f does to f where exponents or densities are extreme, relative to E² in units of eps. */
 function darkNoise({ budget, law }: Model, N: number, squared: number): number {
-  if (budget.dark === 0) return 0
-  const log = Math.abs(law.logDensity(N))
-  if (!(log > 8)) return 0
+  if (budget.dark === 0 || Math.abs(N) < 1) return 0
+  const noise = Math.abs(law.logDensity(N)) + Math.abs(3 * (1 + law.w(N)) * N)
+  if (!(noise > 16 && noise < 1e16)) return 0
   const share = Math.abs(budget.dark * law.density(N)) / squared
-  const noise = log + Math.abs(3 * (1 + law.w(N)) * N)
-  if (!Number.isFinite(noise)) return 0
-  return share < 1 ? noise * share : noise
+  return share < 1e16 ? noise * share : noise
 }
 
 /** s = m: anywhere E² stays well above zero. */

@@ -35,7 +35,8 @@ export function overtakings(history: History, comparison: Comparison): readonly 
   ]
 }
 
-const reachOf = (arm: Arm): number => (arm.end.kind === 'none' ? arm.direction * FARTHEST : arm.end.N)
+const reachOf = ({ direction, end }: Arm): number =>
+  direction * (end.kind === 'none' ? FARTHEST : Math.min(FARTHEST, Math.abs(end.N)))
 
 /** Intervals where the slope keeps its sign hold one change at most; where |value| outweighs the slope there is none; others are halved. */
 function changesBetween(comparison: Comparison, model: Model, from: number, to: number): Crossing[] {

@@ -1,0 +1,69 @@
+/** Which zones an arm is made of. */
+import { logarithmicIn, type Model } from '../model'
+import { type Direction, FARTHEST, type Search } from './turning'
+import { edgeZone, plainZone, staticZone, turningZone, type Zone } from './zone'
+
+/** Width in ln a of the zone around a turning point, a static state or an edge. */
+const NEAR = 0.7
+
+export interface Stretch {
+  readonly zone: Zone
+  /**
+   * `inner`: it must be followed to its end. `last`: a history can run out within it, since the law does not break farther out and
+   * no turning point waits there. `edge`: dark energy is used up at its end, and the rest goes on. `final`: the law ends at its end.
+   */
+  readonly kind: 'inner' | 'last' | 'edge' | 'final'
+}
+
+/** From where on, outwards, which kind of zone. */
+interface Beginning {
+  readonly from: number
+  readonly zone: (from: number, to: number) => Zone
+  /** What leads up to an edge, where the law ends or goes on. */
+  readonly edge: 'edge' | 'final' | null
+}
+
+/** The zones of an arm, outwards from today, cut where the law breaks. */
+export function stretchesOf(model: Model, direction: Direction, end: Search): readonly Stretch[] {
+  const reach = end.kind === 'none' ? FARTHEST : Math.min(FARTHEST, Math.abs(end.N))
+  const beginnings = beginningsOf(model, direction, end, reach)
+  const breaks = model.law.breaks.map((N) => direction * N).filter((m) => m > 0 && m < reach)
+  const cuts = [...new Set([...breaks, ...beginnings.map((one) => one.from), reach])].sort((a, b) => a - b)
+  const runsOut = end.kind === 'none' || end.kind === 'singular'
+  const edge = beginnings.find((one) => one.edge === 'edge')
+  const lastBreak = Math.max(0, ...(edge ? [] : breaks))
+  return cuts.slice(1).map((to, i) => {
+    const from = cuts[i] ?? 0
+    const begun = beginnings.findLast((one) => one.from <= from)
+    const zone = (begun ?? beginnings[0]).zone(from, to)
+    return { zone, kind: begun?.edge ?? (runsOut && from >= lastBreak ? 'last' : 'inner') }
+  })
+}
+
+/** In ascending order; the first begins today. */
+function beginningsOf(model: Model, direction: Direction, end: Search, reach: number): readonly Beginning[] {
+  const law = logarithmicIn(model, direction)
+  const edge = law?.edge ? Math.abs(law.edge.N) : Number.POSITIVE_INFINITY
+  const plain = (from: number): Beginning => ({
+    from,
+    zone: (one, other) => plainZone(model, direction, one, other),
+    edge: null,
+  })
+  const list = [plain(0)]
+  if (law && edge < reach) {
+    const zone = (from: number, to: number) => edgeZone(model, direction, law, from, to)
+    list.push({ from: nearEdge(edge), zone, edge: 'edge' }, plain(edge))
+  }
+  const least = edge < reach ? edge : 0
+  if (end.kind === 'none' || reach < Math.abs(end.N)) return list
+  if (law && (end.kind === 'singular' || (end.kind === 'root' && edge === reach))) {
+    const zone = (from: number, to: number) => edgeZone(model, direction, law, from, to)
+    return [...list, { from: nearEdge(reach), zone, edge: 'final' }]
+  }
+  const zoneTo = end.kind === 'root' ? turningZone : staticZone
+  const zone = (from: number, to: number) => zoneTo(model, direction, end.N, from, to)
+  return [...list, { from: Math.max(least, reach - NEAR), zone, edge: null }]
+}
+
+/** Not farther from an edge than halfway, so that what is left of dark energy tells from its density today. */
+const nearEdge = (edge: number): number => Math.max(edge - NEAR, edge / 2)
