@@ -30,6 +30,8 @@ export interface Course {
   readonly tolerance: number
   /** First step to try, in the size of x. */
   readonly first: number
+  /** Widest step, for the sake of what lies between its stages. */
+  readonly widest?: number
   /** Called after each step; may change the state (a projection), and stops the run by returning true. */
   readonly after?: (x: number, state: Float64Array, step: Step | null) => boolean
   /** Whether steps carry their dense output; without it `after` gets null. */
@@ -68,7 +70,7 @@ const DENSE_ROWS = DENSE.map(rowOf)
 /** Runs the course. */
 export function travel(motion: Motion, course: Course): Arrival {
   const { size } = motion
-  const { state, tolerance, purse } = course
+  const { state, tolerance, purse, widest = Number.POSITIVE_INFINITY } = course
   const sign = course.to >= course.from ? 1 : -1
   const slopes = Array.from({ length: ALL_STAGES }, () => new Float64Array(size))
   const [trial, weights, next] = [new Float64Array(size), new Float64Array(size), new Float64Array(size)]
@@ -100,7 +102,7 @@ export function travel(motion: Motion, course: Course): Arrival {
     if (changed(state, next)) motion.slopeInto(slopes[0], x, state)
     else slopes[0].set(slopes[STAGES])
     const growth = Math.min(LARGEST, Math.max(SMALLEST, SAFETY * Math.max(error, 1e-10) ** (-1 / 8)))
-    width = Math.abs(h) * (rejected ? Math.min(1, growth) : growth)
+    width = Math.min(widest, Math.abs(h) * (rejected ? Math.min(1, growth) : growth))
     rejected = false
   }
   return 'there'

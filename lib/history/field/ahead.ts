@@ -17,8 +17,8 @@ const AVERAGED = 3e-5
 
 /** Swings of the field that are followed; from then on it is dust on the average. */
 const MOST_SWINGS = 60
-/** n has come to rest at its last value. */
-const SETTLED = 1e-11
+/** n has come to rest at its last value, as well as it is followed. */
+const [SETTLED, LATE_SETTLED] = [1e-11, 1e-8]
 /** Share of E² in the sizes of its parts below which the way through a turning point is followed by time. */
 const SHALLOW = 0.05
 
@@ -99,11 +99,12 @@ function slowestOf(budget: Budget): number {
 /** n and its slope are those of the last power. */
 function settledAt(field: Field, N: number, state: Float64Array, last: number): boolean {
   const n = exponentAt(field, state)
-  if (Math.abs(n - last) > SETTLED) return false
+  const settled = N < LATE ? SETTLED : LATE_SETTLED
+  if (Math.abs(n - last) > settled) return false
   const energy = energyOf(field, state[0], state[1])
   const H = Math.sqrt(expansionOf(field, N, state[0], state[1]))
   const push = (state[1] * field.height * field.potential.slope(state[0])) / (H * energy)
-  return Math.abs(n * n - 6 * n - 6 * push) <= SETTLED
+  return Math.abs(n * n - 6 * n - 6 * push) <= settled
 }
 
 /** The last moment at which φ̇ = 0: ρ is there what it is on the average. */

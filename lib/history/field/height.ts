@@ -15,17 +15,19 @@ export const FROZEN = Math.log(1e-6)
 const FINAL = 3e-12
 /** Relative error of ρ that the steps of a passage may add up to; ten times what the reference set shows. */
 export const PASSAGE_ERROR = 3e-11
-const COARSE = 1e-6
-const MIDDLE = 1e-9
+const COARSE = 1e-5
+const MIDDLE = 1e-7
 /** Farthest apart looks lie in ln(height), and how many fall to half a swing of the field. */
 const WIDEST = 0.35
 const PER_SWING = 5
 /** How far below the smallest conceivable height, in its logarithm, the largest Ω_DE is looked for. */
 const LOWEST = 15
 /** Heights at which the field swings more often before today are not tried. */
-const MOST_SWINGS = 30
+const MOST_SWINGS = 12
 /** Evaluations of the equation of motion for the search, and for the future. */
 export const BUDGET = 120_000
+/** Of these, what is kept for the largest Ω_DE, where the one wanted is not found. */
+const RESERVE = 30_000
 
 const scratch = new Float64Array(3)
 
@@ -46,6 +48,11 @@ export interface Search {
   readonly target: number
   readonly purse: Purse
 }
+
+/** The widest steps in N where E² might pass zero between them. */
+const WIDEST_STEP = 0.5
+
+const mayTurn = ({ potential, background }: Field): boolean => !potential.positive || background.budget.curvature < 0
 
 const lowestOf = ({ potential, target }: Search): number => target / potential.value(potential.start)
 
@@ -77,7 +84,7 @@ function shoot(search: Search, y: number, tolerance: number): Shot {
 /** E² in its last digits beside its parts. */
 function nearlyTurned(field: Field, N: number, phi: number, speed: number): boolean {
   const { background, potential, height } = field
-  if (potential.positive && background.budget.curvature >= 0) return false
+  if (!mayTurn(field)) return false
   background.into(scratch, N)
   const sizes = scratch[2] + (speed * speed) / 6 + Math.abs(height * potential.value(phi))
   return !(scratch[0] + energyOf(field, phi, speed) > 1e-6 * sizes)
@@ -91,7 +98,8 @@ function run(
   after: (x: number, state: Float64Array, step: Step | null) => boolean,
   dense: boolean,
 ): Arrival {
-  return travel(byScale(field), { from: FROZEN, to: 0, state, tolerance, first: 0.2, after, dense, purse })
+  const widest = mayTurn(field) ? WIDEST_STEP : Number.POSITIVE_INFINITY
+  return travel(byScale(field), { from: FROZEN, to: 0, state, tolerance, first: 0.2, widest, after, dense, purse })
 }
 
 /** The field's way from rest to today, step by step. */
@@ -102,8 +110,9 @@ export function passage(field: Field, purse: Purse): { readonly steps: readonly 
     if (step) steps.push(step)
     return false
   }
-  if (run(field, state, FINAL, purse, after, true) === 'spent')
-    throw overBudget('The field swings too often before today to be followed.')
+  const arrival = run(field, state, FINAL, purse, after, true)
+  if (arrival === 'spent') throw overBudget('The field swings too often before today to be followed.')
+  if (arrival !== 'there') throw tooNear()
   return { steps, state }
 }
 
@@ -119,7 +128,7 @@ function bracketOf(search: Search): readonly [Shot, Shot] {
   let before: Shot | null = null
   let last: Shot = shoot(search, 0, COARSE)
   let best = last
-  while (last.y < top && last.swings < MOST_SWINGS) {
+  while (last.y < top && last.swings < MOST_SWINGS && search.purse.left > RESERVE) {
     const next = shoot(search, Math.min(top, last.y + strideAfter(last)), COARSE)
     if (excessOf(next) > excessOf(best)) best = next
     const pair = signChange(search, last, next)
@@ -175,7 +184,7 @@ function strideAfter({ excess, swings, y }: Shot): number {
 /** Top of a peak inside (from, to), by golden sections (Kiefer 1953) from three looks. */
 function peakOf(search: Search, from: number, inner: Shot, to: number): Shot {
   let [low, high, best] = [from, to, inner]
-  for (let i = 0; i < 24 && high - low > 1e-5; i++) {
+  for (let i = 0; i < 16 && high - low > 1e-5; i++) {
     const right = high - best.y > best.y - low
     const y = best.y + 0.381966 * (right ? high - best.y : low - best.y)
     const shot = shoot(search, y, MIDDLE)
@@ -192,19 +201,23 @@ function peakOf(search: Search, from: number, inner: Shot, to: number): Shot {
 /** The root in a bracket: false position at coarse accuracy (Dowell & Jarratt 1971), secants at full accuracy. */
 function polished(search: Search, [one, other]: readonly [Shot, Shot]): number {
   const [a, b] = narrowed(search, one, other)
-  let [y0, f0] = [a.y, shoot(search, a.y, FINAL).excess ?? 0]
-  let [y1, f1] = [b.y, shoot(search, b.y, FINAL).excess ?? 0]
+  let [y0, f0] = [a.y, shoot(search, a.y, FINAL).excess]
+  let [y1, f1] = [b.y, shoot(search, b.y, FINAL).excess]
+  if (f0 === null || f1 === null) throw tooNear()
   if (Math.abs(f0) < Math.abs(f1)) [y0, f0, y1, f1] = [y1, f1, y0, f0]
   for (let i = 0; i < 12 && f1 !== 0 && f1 !== f0; i++) {
-    const step = (f1 * (y1 - y0)) / (f1 - f0)
+    const step: number = (f1 * (y1 - y0)) / (f1 - f0)
     if (Math.abs(step) <= 1e-16 * Math.max(1, y1)) break
-    const y = y1 - step
-    const f = shoot(search, y, FINAL).excess
+    const y: number = y1 - step
+    const f: number | null = shoot(search, y, FINAL).excess
     if (f === null || Math.abs(f) >= Math.abs(f1)) break
     ;[y0, f0, y1, f1] = [y1, f1, y, f]
   }
   return y1
 }
+
+const tooNear = (): Error =>
+  overBudget('The height sought lies too near to one with which the universe turns round before today.')
 
 function narrowed(search: Search, one: Shot, other: Shot): readonly [Shot, Shot] {
   let [a, b] = [one, other]
@@ -212,7 +225,8 @@ function narrowed(search: Search, one: Shot, other: Shot): readonly [Shot, Shot]
   for (let i = 0; i < 60 && Math.abs(a.y - b.y) > 1e-4 && fa !== fb; i++) {
     const y = b.y - (fb * (b.y - a.y)) / (fb - fa)
     const c = shoot(search, y, COARSE)
-    const fc = c.excess ?? 0
+    if (c.excess === null) throw tooNear()
+    const fc = c.excess
     if (fc < 0 !== fb < 0) [a, fa] = [b, fb]
     else fa *= fb / (fb + fc)
     ;[b, fb] = [c, fc]
@@ -242,14 +256,16 @@ function largest(search: Search, best: Shot): Shot {
 
 function unreachable(search: Search, best: Shot, last: Shot): Error {
   const { excess } = largest(search, best)
+  const wanted = Number(search.target.toPrecision(6))
+  if (excess !== null && excess > 0)
+    return unsolvable(
+      `With Ω_DE = ${wanted} the universe would turn round before today; this field needs more than that.`,
+    )
   if (excess === null)
     return unsolvable('With this field the universe does not grow to its present size, whatever the height of V.')
   const most = Number((search.target * (1 + excess)).toPrecision(3))
-  const far =
-    last.swings < MOST_SWINGS
-      ? ''
-      : ` Heights at which it swings more than ${MOST_SWINGS} times before today are not tried.`
-  return unsolvable(
-    `This field reaches Ω_DE = ${most} today at most, and ${Number(search.target.toPrecision(6))} is wanted.${far}`,
-  )
+  const swings = ` Heights at which it swings more than ${MOST_SWINGS} times before today are not tried.`
+  const costs = search.purse.left > RESERVE ? '' : ' Greater heights are over the budget of computation.'
+  const far = last.swings < MOST_SWINGS ? costs : swings
+  return unsolvable(`This field reaches Ω_DE = ${most} today at most, and ${wanted} is wanted.${far}`)
 }

@@ -51,7 +51,7 @@ export function timedArm(route: Route, legs: readonly Leg[], forward: boolean, d
   const origin = forward ? outwards[0].from : outwards[0].to
   const model = timedModel(route, direction > 0 ? outwards : outwards.toReversed())
   const panels = outwards.flatMap((leg) => panelsOf(timedZone(leg, forward, direction, origin), () => false))
-  return armFrom(model, direction, end, panels, end.kind === 'root' ? 'end' : 'tail')
+  return armFrom(model, direction, end, panels, end.kind === 'root' ? 'end' : 'far')
 }
 
 /** E² is that of the integration, which stays right where the sum of densities cancels. */
