@@ -38,7 +38,7 @@ function Page({ initial, edition }: Props) {
     // biome-ignore lint/a11y: links stay links; what is caught here is the click that they get
     <div className="page" data-theme={desk.place.theme} onClick={address ? follow : undefined}>
       <Header desk={desk} address={address} />
-      <main>
+      <main aria-busy={waiting || undefined}>
         <h1 className={initial.titled ? undefined : 'spoken'}>{view.title}</h1>
         {view.refusal && <Refusal refusal={view.refusal} />}
         <Verdicts scenarios={view.scenarios} focus={view.place.focus} />

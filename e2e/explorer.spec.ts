@@ -3,7 +3,6 @@ import { expect, type Page, test } from '@playwright/test'
 
 const verdict = (page: Page, name: string) => page.locator('.verdict', { hasText: name }).locator('.said')
 const measure = (page: Page, key: string) => page.locator(`[data-measure="${key}"] .value`)
-const plain = (text: string) => text.replace(/\s+/g, ' ')
 
 test.describe('without JavaScript', () => {
   test.use({ javaScriptEnabled: false })
@@ -61,25 +60,6 @@ test.describe('without JavaScript', () => {
     await expect(page).toHaveURL(/theme=night/)
     await expect.poll(ground).toBe(night)
   })
-})
-
-test('a link opened in a fresh context gives the same numbers', async ({ page, browser, baseURL }) => {
-  await page.goto('/')
-  await page.getByLabel('matter').fill('0.27')
-  await page.getByRole('button', { name: 'Apply' }).click()
-  await expect(page).toHaveURL(/matter:0.27/)
-  const read = async (from: Page) => ({
-    verdicts: (await from.locator('.said').allTextContents()).map(plain),
-    measures: (await from.locator('[data-measure]').allTextContents()).map(plain),
-    moments: (await from.locator('.moments tr').allTextContents()).map(plain),
-  })
-  const here = await read(page)
-  const fresh = await browser.newContext({ baseURL })
-  const other = await fresh.newPage()
-  await other.goto(page.url())
-  expect(await read(other)).toEqual(here)
-  expect(here.measures.length).toBeGreaterThan(10)
-  await fresh.close()
 })
 
 test('a bad link opens with a notice and the nearest good reading', async ({ page }) => {

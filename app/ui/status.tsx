@@ -1,6 +1,7 @@
 import type { Explorer } from '../../lib/answers/explorer'
 import type { Trouble } from '../live/use-explorer'
 import { useLate } from '../live/use-late'
+import { Sentence } from './symbol'
 
 /** Sooner nobody misses anything. Milliseconds. */
 const PATIENCE = 300
@@ -19,7 +20,9 @@ export function Status({ view, moving, waiting, trouble }: Props) {
     <>
       {trouble && (
         <div className="state trouble" role="alert">
-          <span>{trouble.message}</span>
+          <span>
+            <Sentence text={trouble.message} />
+          </span>
           {trouble.again && (
             <button type="button" className="act" onClick={trouble.again}>
               Try again

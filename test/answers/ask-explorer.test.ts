@@ -1,0 +1,39 @@
+import { describe, expect, it } from 'vitest'
+import { askExplorer } from '../../lib/answers/ask-explorer'
+import { explorer } from '../../lib/answers/explorer'
+
+const ask = (query: string) => askExplorer(new URLSearchParams(query))
+
+function question(query: string) {
+  const reading = ask(query)
+  if (!reading.ok) throw new Error('refused')
+  return reading.value
+}
+
+describe('/api/explorer', () => {
+  it.each(['', 's=h0:70,as:One&s=h0:71&focus=2&theme=night', 's=h0:7o', 's=', 's=h0:70&focus=9&theme=pink'])(
+    'answers as the page does: %s',
+    (query) => {
+      const pairs = new URLSearchParams(query)
+      const codes = pairs.getAll('s')
+      const [focus, theme] = [pairs.get('focus') ?? undefined, pairs.get('theme') ?? undefined]
+      expect(question(query).answer()).toEqual({ ok: true, value: explorer({ codes, focus, theme }) })
+    },
+  )
+
+  it('is the same question in other words', () => {
+    expect(question('s=matter:0.30,h0:70&focus=1').canonical).toBe(question('s=h0:70,matter:0.3&theme=pink').canonical)
+    expect(question('').canonical).not.toBe(question('s=h0:70').canonical)
+    expect(question('s=h0:7o').canonical).not.toBe(question('s=h0:7p').canonical)
+  })
+
+  it('refuses unknown and repeated keys', () => {
+    expect(ask('s=h0:70&z=1')).toMatchObject({ ok: false, problems: [{ parameter: 'z' }] })
+    expect(ask('focus=1&focus=2')).toMatchObject({ ok: false, problems: [{ parameter: 'focus' }] })
+  })
+
+  it('holds nothing that JSON would lose', () => {
+    const reading = question('s=h0:70,eos:cpl,wa:-1&s=matter:1,cmb:0').answer()
+    expect(reading.ok && JSON.parse(JSON.stringify(reading.value))).toEqual(reading.ok && reading.value)
+  })
+})

@@ -1,0 +1,40 @@
+import { describe, expect, it } from 'vitest'
+import { longView } from '../../lib/figures/long-view'
+import { bounce, deSitter, einsteinDeSitter, flatLambda, milne, phantom, sinking } from './universes'
+
+const SIX = [flatLambda(), sinking(), phantom(), bounce(), milne(), einsteinDeSitter()]
+
+describe('what the cursor reads', () => {
+  const { readings, window } = longView(SIX)
+
+  it('is at most 300 times in order, with now, both edges and every end within the window', () => {
+    const { times } = readings
+    expect(times.length).toBeLessThanOrEqual(300)
+    expect(times).toEqual([...new Set(times)].sort((one, other) => one - other))
+    expect(times).toContain(0)
+    expect(times[0]).toBeCloseTo(window.from, 4)
+    expect(times.at(-1)).toBeCloseTo(window.to, 4)
+    const crunch = sinking().solution.end
+    for (const time of [crunch.time, crunch.turnaround?.time]) expect(times).toContain(Number(time?.toPrecision(7)))
+  })
+
+  it.each(SIX.map(({ solution, scales }, slot) => [solution.label, slot, scales] as const))(
+    '%s is its closed form',
+    (_, slot, scales) => {
+      const exact = scales(readings.times)
+      readings.scales[slot]?.forEach((scale, i) => {
+        const value = exact[i] ?? null
+        // Seven digits are kept: half a unit of the last is 5e-7 of the smallest mantissa.
+        if (value === null) expect(scale).toBeNull()
+        else expect(Math.abs((scale ?? Number.NaN) - value)).toBeLessThanOrEqual(5.01e-7 * Math.abs(value))
+      })
+    },
+  )
+
+  it('reads 1 now', () => {
+    for (const view of [longView(SIX), longView([deSitter()])]) {
+      const now = view.readings.times.indexOf(0)
+      for (const scales of view.readings.scales) expect(scales[now]).toBe(1)
+    }
+  })
+})
