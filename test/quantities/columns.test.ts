@@ -1,5 +1,6 @@
 import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
+import { isUnsolvable } from '../../lib/history/field/unsolvable'
 import { historyOf } from '../../lib/history/history'
 import { isMissing } from '../../lib/measures/outcome'
 import { COLUMN_KEYS, type ColumnKey } from '../../lib/quantities/column'
@@ -223,7 +224,7 @@ function solvable(code: string): ReturnType<typeof subject> | null {
   try {
     return subject(code)
   } catch (error) {
-    if (error instanceof RangeError && error.message !== '') return null
+    if (isUnsolvable(error) || error instanceof RangeError) return null
     throw error
   }
 }
