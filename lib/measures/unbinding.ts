@@ -43,7 +43,7 @@ export function unbinding(history: History, h0: number, { period }: UnboundSyste
 
 /** Doubling steps until the system is unbound; null where ln a grows beyond all numbers that the law can be asked for. */
 function firstAbove(excess: (N: number) => number): number | null {
-  for (let N = 1; N < 1e12; N *= 2) if (excess(N) > 0) return N
+  for (let N = 1; N < 1e300; N *= 2) if (excess(N) > 0) return N
   return null
 }
 
