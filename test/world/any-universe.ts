@@ -30,15 +30,19 @@ const radiation = fc.oneof(
   fc.oneof(decimal(0, 1), anySize(-6, 3)).map((x) => `radiation:${x}`),
   decimal(0.001, 1).map((x) => `masses:${x}`),
 )
-/** `wild` spans the limits of the parameters; else what data and textbooks allow. */
+/** `wild` spans the limits of the parameters and all laws of w; else what data and textbooks allow of the simplest. */
 const law = (wild: boolean) => {
   const w = wild ? decimal(-20, 20) : decimal(-2, 0.5)
   const wa = wild ? decimal(-20, 20) : decimal(-1.5, 1)
-  return fc.oneof(
-    fc.constant(''),
-    w.map((x) => `eos:constant,w:${x}`),
-    fc.tuple(w, wa).map(([w0, slope]) => `eos:cpl,w0:${w0},wa:${slope}`),
-  )
+  const pair = (eos: string) => fc.tuple(w, wa).map(([w0, slope]) => `eos:${eos},w0:${w0},wa:${slope}`)
+  const simple = [fc.constant(''), w.map((x) => `eos:constant,w:${x}`), pair('cpl')]
+  if (!wild) return fc.oneof(...simple)
+  const barotropic = fc
+    .tuple(decimal(-2, 2), decimal(-2, 2))
+    .map(([excess, alpha]) => `eos:barotropic,excess:${excess},alpha:${alpha}`)
+  const gas = fc.tuple(decimal(0, 1), decimal(-0.9, 5)).map(([b, alpha]) => `eos:chaplygin,b:${b},alpha:${alpha}`)
+  const nodes = fc.tuple(decimal(-2, 1), decimal(-2, 1)).map(([one, two]) => `eos:nodes,at:0.3_2,w:${one}_${two}`)
+  return fc.oneof(...simple, pair('jbp'), pair('ba'), pair('log'), barotropic, gas, nodes)
 }
 const beyond = fc.constantFrom('', 'beyond:hold')
 
