@@ -69,15 +69,26 @@ function cosineEnd(curvature: number, outlook: Outlook): readonly [EndKind, stri
 
 /** The expansion stops at `future`'s end and turns into contraction. */
 export function crunchAfter(future: Arm, rest: number, turns: number): End {
-  const N = Math.abs(future.end.kind === 'root' ? future.end.N : 0)
-  const scale = Math.exp(N)
   const times = turns === 1 ? '' : ` H changes its sign ${turns} times before the end.`
-  return {
-    kind: 'crunch',
-    time: future.time.total + rest,
-    scale: 0,
-    turnaround: { time: future.time.total, scale },
-    proven: false,
-    because: `Followed by integration: H vanishes at a = ${scale.toPrecision(4)}, and the contraction is driven by the motion of the field down to a = 0.${times}`,
-  }
+  const scale = turnScale(future)
+  const because = `Followed by integration: H vanishes at a = ${scale.toPrecision(4)}, and the contraction is driven by the motion of the field down to a = 0.${times}`
+  return crunch(future, scale, rest, because)
 }
+
+/** The same, where the field swings as dust on the average. */
+export function averagedCrunch(future: Arm, rest: number): End {
+  const scale = turnScale(future)
+  const because = `The field swings too often to be followed and thins out like dust on the average: H vanishes about a = ${scale.toPrecision(4)}, and the contraction takes about as long as the expansion.`
+  return crunch(future, scale, rest, because)
+}
+
+const turnScale = ({ end }: Arm): number => Math.exp(end.kind === 'root' ? end.N : 0)
+
+const crunch = (future: Arm, scale: number, rest: number, because: string): End => ({
+  kind: 'crunch',
+  time: future.time.total + rest,
+  scale: 0,
+  turnaround: { time: future.time.total, scale },
+  proven: false,
+  because,
+})

@@ -9,7 +9,7 @@ import { originOf } from '../origin'
 import type { History } from '../whole'
 import { errorAhead, lookAhead, type Outlook } from './ahead'
 import { backgroundOf } from './background'
-import { crunchAfter, endAhead } from './endings'
+import { averagedCrunch, crunchAfter, endAhead } from './endings'
 import { BUDGET, FROZEN, fieldToday, PASSAGE_ERROR, passage } from './height'
 import { fieldLaw } from './law'
 import { energyOf } from './motion'
@@ -19,6 +19,9 @@ import { overBudget, unsolvable } from './unsolvable'
 import { legsBetween, returnAfter, travelOn, type Voyage } from './voyage'
 
 type Ahead = Pick<History, 'future' | 'home' | 'descent' | 'unfollowed' | 'end'>
+
+/** Evaluations for a way on which the field swings; where they do not suffice, averages are told. */
+const SWINGING_BUDGET = 40_000
 
 /** The field as it is today. */
 interface Now extends Route {
@@ -69,9 +72,11 @@ function followed(now: Now): Ahead {
   const mayTurn = !field.potential.positive || now.budget.curvature < 0
   const outlook = lookAhead(field, state, purse, mayTurn)
   // Swings thin out like dust, which a closed universe does not outlast.
-  const turns = outlook.kind === 'shallow' || (outlook.kind === 'swinging' && now.budget.curvature < 0)
-  if (!turns) return expanding(now, outlook)
+  const swings = outlook.kind === 'swinging' && now.budget.curvature < 0
+  if (outlook.kind !== 'shallow' && !swings) return expanding(now, outlook)
+  if (swings) purse.left = Math.min(purse.left, SWINGING_BUDGET)
   const voyage = travelOn(field, state, purse)
+  if (swings && voyage.end === 'spent') return expanding(now, outlook)
   if (voyage.end === 'expanding' && voyage.turns.length === 0)
     return expanding(now, lookAhead(field, state, purse, false))
   return turning(now, voyage)
@@ -88,7 +93,21 @@ function expanding(now: Now, outlook: Outlook): Ahead {
     error: (N) => errorAhead(outlook, N),
   })
   const future = armOf(modelOf(now.budget, law), 1)
+  if (future.end.kind === 'root') return averaged(now, future)
   return { future, home: now.past, descent: future, end: endAhead(now.field, outlook) }
+}
+
+/** Swings too many to be followed bring a closed universe back as dust does: on the average in the time that it took to grow. */
+function averaged(now: Now, future: Arm): Ahead {
+  const { time, conformal } = now.past
+  if (!Number.isFinite(time.total + conformal.total)) throw overBudget('The future of this field takes too many steps.')
+  const unfollowed = {
+    time: future.time.total + time.total,
+    conformal: future.conformal.total + conformal.total,
+    error: future.conformal.error + conformal.total,
+    because: 'the field swings too fast to be followed through the contraction',
+  }
+  return { future, home: now.past, descent: future, unfollowed, end: averagedCrunch(future, unfollowed.time) }
 }
 
 function turning(now: Now, voyage: Voyage): Ahead {
