@@ -51,6 +51,8 @@ export interface Component extends Term {
 /** Today: E² = 1 exactly. */
 export const TODAY: Anchor = { N: 0, value: 1 }
 const NEAR_TODAY = 0.7
+/** Below this a⁻¹ all that thins out like matter is nothing, and m c² a/k T is no double. */
+const NO_SCALE = 1e-290
 
 export interface Model {
   readonly budget: Budget
@@ -88,7 +90,7 @@ export function modelOf(budget: Budget, law: Law): Model {
   }
   const withoutDark = (x: number): number => {
     let relativistic = radiation
-    for (const state of states) relativistic += state.masslessDensity * energyRatio(state.y / x)
+    if (x > NO_SCALE) for (const state of states) relativistic += state.masslessDensity * energyRatio(state.y / x)
     return ((relativistic * x + coldMatter) * x + curvature) * x * x
   }
 
@@ -122,7 +124,7 @@ export function modelOf(budget: Budget, law: Law): Model {
       out.first -= n * density
       out.second += (n * n - slope) * density
     }
-    for (const state of states) {
+    for (const state of x > NO_SCALE ? states : []) {
       const y = state.y / x
       energyDerivatives(y, energy)
       add(state.masslessDensity * energy[0] * x ** 4, 4 - energy[1], -energy[2])
@@ -239,23 +241,22 @@ function termOf(darkEnergy: number, { factor, logDensity, exponentRange }: Part)
 function neutrinoComponent(state: MassiveState): Component {
   const y = (N: number) => state.y * Math.exp(N)
   const logMassless = Math.log(state.masslessDensity)
-  const density = (N: number) => state.masslessDensity * energyRatio(y(N)) * Math.exp(-4 * N)
+  const cold = Math.log(1e9 / state.y)
+  const logCold = logMassless + Math.log(energyRatio(1e20) * 1e-20 * state.y)
+  const density = (N: number): number =>
+    N > cold ? Math.exp(logCold - 3 * N) : state.masslessDensity * energyRatio(y(N)) * Math.exp(-4 * N)
   // The energy ratio is 1 + 0.07 y² at small y and (y/3.15)(1 + 6.5/y²) at large y: settled where the corrections are below 1e-17.
   return {
     key: 'neutrino',
     omega: state.density,
-    logSize: (N) => logMassless + Math.log(energyRatio(y(N))) - 4 * N,
+    // Also where y itself is no double any more.
+    logSize: (N) => (N > cold ? logCold - 3 * N : logMassless + Math.log(energyRatio(y(N))) - 4 * N),
     density,
     bend: (N, d) =>
       density(N) *
       relativeBend(Math.log1p(energyRatioChange(y(N), d)) - 4 * d, d, (t) => -logSlopeDerivative(y(N + t))),
     exponentRange: (from, to) => [4 - logSlope(y(to)), 4 - logSlope(y(from))],
     past: { kind: 'power', exponent: 4, logCoefficient: logMassless, settled: Math.log(1e-8 / state.y) },
-    future: {
-      kind: 'power',
-      exponent: 3,
-      logCoefficient: logMassless + Math.log(energyRatio(1e20) * 1e-20 * state.y),
-      settled: Math.log(1e9 / state.y),
-    },
+    future: { kind: 'power', exponent: 3, logCoefficient: logCold, settled: cold },
   }
 }
