@@ -10,7 +10,7 @@ import type { Unfollowed } from '../whole'
 import type { Samples, Zone } from '../zone'
 import { fieldLaw } from './law'
 import { clockRate, type Field, RATE, SCALE } from './motion'
-import { type Leg, scaleIn, timeAt, trailByTime } from './trail'
+import { intervalOf, type Leg, type TimedTrail, trailByTime } from './trail'
 import { VOYAGE_ERROR } from './voyage'
 
 export interface Route {
@@ -20,47 +20,59 @@ export interface Route {
   readonly today: number
 }
 
-/** s runs outwards from today's size, with or against τ. */
-function timedZone({ step, from, to }: Leg, forward: boolean, direction: Direction, origin: number): Zone {
-  const sign = forward ? 1 : -1
+/** Values along legs in order of τ. */
+function along(legs: readonly Leg[]): (unknown: number, tau: number) => number {
+  const edges = Float64Array.from([...legs.map((one) => one.from), legs[legs.length - 1].to])
+  let last = 0
+  return (unknown, tau) => {
+    last = intervalOf(edges, tau, last)
+    return valueIn(legs[last].step, unknown, tau)
+  }
+}
+
+/** Legs in order of τ; s runs outwards from today's size, with or against τ. */
+interface Course {
+  readonly legs: readonly Leg[]
+  readonly forward: boolean
+  readonly direction: Direction
+}
+
+function timedZone({ legs, forward, direction }: Course, time: (N: number) => number): Zone {
+  const [first, last] = [legs[0].from, legs[legs.length - 1].to]
+  const [origin, sign] = forward ? [first, 1] : [last, -1]
+  const at = along(legs)
   const tau = (s: number) => origin + sign * s
-  const edges = [sign * (from - origin), sign * (to - origin)]
-  const leg = { step, from, to }
   return {
-    from: Math.min(...edges),
-    to: Math.max(...edges),
-    width: to - from,
-    distanceAt: (s) => direction * scaleIn(leg, tau(s)),
-    variableAt: (m) => sign * (timeAt(leg, direction * m) - origin),
-    expansion: (s) => valueIn(step, RATE, tau(s)) ** 2,
+    from: 0,
+    to: last - first,
+    width: 0.3,
+    distanceAt: (s) => direction * at(SCALE, tau(s)),
+    variableAt: (m) => sign * (time(direction * m) - origin),
+    expansion: (s) => at(RATE, tau(s)) ** 2,
     conditioning: () => VOYAGE_ERROR / Number.EPSILON,
     sampleInto(out: Samples, centre, half) {
       for (let k = 0; k < NODE_COUNT; k++) {
-        const at = tau(centre + half * NODES[k])
-        const rate = clockRate(valueIn(step, RATE, at))
+        const moment = tau(centre + half * NODES[k])
+        const rate = clockRate(at(RATE, moment))
         out.time[k] = rate
-        out.conformal[k] = rate * Math.exp(-valueIn(step, SCALE, at))
+        out.conformal[k] = rate * Math.exp(-at(SCALE, moment))
       }
     },
   }
 }
 
-/** The arm along legs in order of τ, which lead outwards from today's size (`forward`) or back to it. */
-export function timedArm(route: Route, legs: readonly Leg[], forward: boolean, direction: Direction, end: Search): Arm {
-  const outwards = forward ? legs : legs.toReversed()
-  const origin = forward ? outwards[0].from : outwards[0].to
-  const model = timedModel(route, direction > 0 ? outwards : outwards.toReversed())
-  const panels = outwards.flatMap((leg) => panelsOf(timedZone(leg, forward, direction, origin), () => false))
-  return armFrom(model, direction, end, panels, end.kind === 'root' ? 'end' : 'far')
+/** The arm along a course that leads outwards from today's size (`forward`) or back to it. */
+export function timedArm(route: Route, course: Course, end: Search): Arm {
+  const { legs, forward, direction } = course
+  const trail = trailByTime(route.field, direction > 0 === forward ? legs : legs.toReversed())
+  const panels = panelsOf(timedZone(course, trail.time), () => false)
+  return armFrom(timedModel(route, trail), direction, end, panels, end.kind === 'root' ? 'end' : 'far')
 }
 
 /** E² is that of the integration, which stays right where the sum of densities cancels. */
-function timedModel({ field, budget, today }: Route, ascending: readonly Leg[]): Model {
-  const trail = trailByTime(field, ascending)
-  const model = modelOf(
-    budget,
-    fieldLaw(trail, { today, outside: { before: 6, after: 6 }, breaks: [], error: () => VOYAGE_ERROR }),
-  )
+function timedModel({ budget, today }: Route, trail: TimedTrail): Model {
+  const outside = { before: 6, after: 6 }
+  const model = modelOf(budget, fieldLaw(trail, { today, outside, breaks: [], error: () => VOYAGE_ERROR }))
   const first = trail.edges[0]
   const expansion = (N: number, inverseScale: number) => {
     if (N < first) return model.expansion(N, inverseScale)
@@ -74,12 +86,11 @@ export function restOf(legs: readonly Leg[], state: Float64Array): Omit<Unfollow
   let time = 1 / (3 * Math.abs(state[RATE]))
   let conformal = Math.exp(-state[SCALE]) / (2 * Math.abs(state[RATE]))
   let error = VOYAGE_ERROR * conformal
-  for (const leg of legs) {
-    for (const panel of panelsOf(timedZone(leg, true, 1, leg.from), () => false)) {
-      time += panel.time.total
-      conformal += panel.conformal.total
-      error += panel.conformal.error
-    }
+  const zone = timedZone({ legs, forward: true, direction: 1 }, () => Number.NaN)
+  for (const panel of panelsOf(zone, () => false)) {
+    time += panel.time.total
+    conformal += panel.conformal.total
+    error += panel.conformal.error
   }
   return { time, conformal, error }
 }

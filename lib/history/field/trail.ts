@@ -67,8 +67,13 @@ export function timeAt(leg: Leg, N: number): number {
   return brent(f, leg.from, leg.to)
 }
 
+export interface TimedTrail extends Trail {
+  /** τ at N. */
+  time(N: number): number
+}
+
 /** From legs in order of ascending N. */
-export function trailByTime(field: Field, legs: readonly Leg[]): Trail {
+export function trailByTime(field: Field, legs: readonly Leg[]): TimedTrail {
   const ends = legs.map((leg) => [scaleIn(leg, leg.from), scaleIn(leg, leg.to)] as const)
   const edges = Float64Array.from([...ends.map((pair) => Math.min(...pair)), Math.max(...ends[ends.length - 1])])
   let [last, place, tau] = [0, Number.NaN, 0]
@@ -89,6 +94,10 @@ export function trailByTime(field: Field, legs: readonly Leg[]): Trail {
     rate(N) {
       find(N)
       return valueIn(legs[last].step, RATE, tau)
+    },
+    time(N) {
+      find(N)
+      return tau
     },
   }
 }
