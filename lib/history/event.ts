@@ -1,6 +1,6 @@
 /**
  * An event of the history: where on which arm, when, and how far in conformal time.
- * Arms are symmetric in time about a turning point, so the contracting branches are mirrored arms.
+ * Explicit laws are symmetric in time about a turning point, so their contracting branches are mirrored arms; a field has its own descent.
  */
 import type { Arm } from './arm'
 import type { History } from './history'
