@@ -39,7 +39,7 @@ function Page({ initial, edition }: Props) {
     <div className="page" data-theme={desk.place.theme} onClick={address ? follow : undefined}>
       <Header desk={desk} address={address} />
       <main aria-busy={waiting || undefined}>
-        <h1 className={initial.titled ? undefined : 'spoken'}>{view.title}</h1>
+        <h1 className={initial.titled || view.titled ? undefined : 'spoken'}>{view.title}</h1>
         {view.refusal && <Refusal refusal={view.refusal} />}
         <Verdicts scenarios={view.scenarios} focus={view.place.focus} />
         <Figure view={view.figure} links={view.scenarios.map(({ link }) => link)} live={address !== null} />

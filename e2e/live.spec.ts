@@ -2,6 +2,9 @@
 import { expect, type Page, test } from '@playwright/test'
 import { clear, complaints, cursor, drag, field, measure, numbers, open, readout, said, settled, slider } from './live'
 
+/** Long pieces of work, and machines that have other things to do. */
+test.describe.configure({ timeout: 90_000 })
+
 const ONE = '/?s=h0:70,matter:0.3,as:One'
 
 test('set by mouse and by keyboard, undone and redone, handed over by a link', async ({ page, browser, baseURL }) => {
