@@ -168,3 +168,19 @@ describe('what cannot be', () => {
     )
   })
 })
+
+describe('the constraint holds at H = 0, where the integration does not use it', () => {
+  it.each([
+    'eos:field,v:linear',
+    'masses:0.3_0.3_0.3,eos:field,v:linear,slope:0.7',
+    'matter:0.4,curvature:-0.2,eos:field,v:linear',
+  ])('%s', (code) => {
+    const { history } = solved(`${code}`)
+    const { end, model } = history.future
+    if (end.kind !== 'root') throw new Error('it does not turn round')
+    const [sum, sizes] = model.components
+      .map((one) => one.density(end.N))
+      .reduce(([total, size], x) => [total + x, size + Math.abs(x)], [0, 0])
+    expect(Math.abs(sum)).toBeLessThan(1e-9 * sizes)
+  })
+})
