@@ -57,6 +57,8 @@ describe('what is refused', () => {
     ['a method that reflects the request', 405, 'TRACE / '],
     ['a method that would change something', 405, 'DELETE /api/history'],
     ['a method nobody knows', 405, 'FOO /'],
+    ['a key of every object', 400, 'GET /api/at?z=1&__proto__=2'],
+    ['a key of the framework', 400, 'GET /api/at?z=1&nxtPz=2'],
     ['a tunnel', 405, 'CONNECT x:443'],
     ['a target with a host', 400, 'GET http://x/'],
     ['a target that could be taken for a host', 400, 'GET //x/'],

@@ -54,11 +54,23 @@ export const OPTIONS_HEADERS = { Allow: ALLOW, 'Content-Length': '0' }
 function queryProblem(query) {
   const pairs = query.split('&').map((pair) => pair.split(/=(.*)/s))
   const at = pairs.findIndex((pair) => pair.some((part) => decode(part) === null))
-  if (at < 0) return null
+  if (at < 0) return hiddenKeyProblem(pairs)
   const [key, value = ''] = pairs[at]
   const scenario = key === 's' ? pairs.slice(0, at).filter(([earlier]) => earlier === 's').length : null
   const message = `The value of ${key} holds a percent sign that encodes no character; a percent sign itself is %25.`
   return { ...bad(message), errors: [{ parameter: key, scenario, value, allowed: 'percent-encoded UTF-8', message }] }
+}
+
+/**
+ * Next takes these keys out of the query before a route sees them, so a route could not refuse them as unknown.
+ * @param {string[][]} pairs
+ * @returns {Problem | null}
+ */
+function hiddenKeyProblem(pairs) {
+  const hidden = pairs.map(([key]) => decode(key) ?? key).find((key) => key === '__proto__' || /^nxt[IP]/.test(key))
+  if (hidden === undefined) return null
+  const message = `The interface has no parameter ${hidden}.`
+  return { ...bad(message), errors: [{ parameter: hidden, scenario: null, value: '', allowed: 'none', message }] }
 }
 
 /** @param {string} target */
