@@ -57,8 +57,10 @@ const NO_SCALE = 1e-290
 export interface Model {
   readonly budget: Budget
   readonly law: Law
-  /** The components that are not zero. */
+  /** The components that are not zero, as the budget names them. */
   readonly components: readonly Component[]
+  /** What acts on the expansion: the same, with those that thin out alike added up first, so that they can cancel exactly. */
+  readonly acting: readonly Component[]
   /** E² at N, with a⁻¹ = e^(−N) passed in by callers who know it more exactly. */
   expansion(N: number, inverseScale: number): number
   /** E² at N where dark energy over its density today is known better than from N. */
@@ -80,8 +82,9 @@ export interface Model {
 }
 
 export function modelOf(budget: Budget, law: Law): Model {
-  const { curvature, dark, coldMatter } = budget
-  const radiation = budget.photons + budget.masslessNeutrinos
+  const amounts = amountsOf(budget)
+  const acted = merged(amounts, law)
+  const { curvature, dark, matter: coldMatter, radiation } = acted
   const states = budget.states
 
   const expansion = (N: number, inverseScale: number): number => {
@@ -138,26 +141,27 @@ export function modelOf(budget: Budget, law: Law): Model {
     }
   }
 
-  const components = componentsOf(budget, law)
-  const cancels = components.reduce((sum, one) => sum + Math.abs(one.omega), 0) > 4
+  const acting = componentsOf(acted, budget, law)
+  const cancels = acting.reduce((sum, one) => sum + Math.abs(one.omega), 0) > 4
   return {
     budget,
     law,
-    components,
+    components: acted === amounts ? acting : componentsOf(amounts, budget, law),
+    acting,
     cancels,
-    signed: components.some((one) => one.omega < 0 || one.terms !== undefined),
+    signed: acting.some((one) => one.omega < 0 || one.terms !== undefined),
     expansion,
     expansionWith: (N, density) =>
       cancels && Math.abs(N) < NEAR_TODAY
         ? 1 + changeFrom(TODAY, N, density - 1)
         : withoutDark(Math.exp(-N)) + dark * density,
-    bendFrom: (N, d) => components.reduce((sum, one) => sum + one.bend(N, d), 0),
+    bendFrom: (N, d) => acting.reduce((sum, one) => sum + one.bend(N, d), 0),
     expansionFrom: (anchor, d) => anchor.value + changeFrom(anchor, d),
     magnitudeFrom(anchor, d) {
       changeFrom(anchor, d)
       return Math.abs(anchor.value) + size
     },
-    magnitude: (N) => components.reduce((sum, one) => sum + Math.exp(one.logSize(N)), 0),
+    magnitude: (N) => acting.reduce((sum, one) => sum + Math.exp(one.logSize(N)), 0),
     derivatives,
   }
 }
@@ -178,21 +182,45 @@ export function logarithmicIn(model: Model, direction: 1 | -1): Logarithmic | nu
 
 /** ln E² at N, also where E² itself leaves the doubles; for components that keep their signs. */
 export function logExpansion(model: Model, N: number): number {
-  const logs = model.components.map((one) => one.logSize(N))
+  const logs = model.acting.map((one) => one.logSize(N))
   const largest = Math.max(...logs)
-  const sum = model.components.reduce(
+  const sum = model.acting.reduce(
     (total, one, i) => total + Math.sign(one.omega) * Math.exp((logs[i] ?? largest) - largest),
     0,
   )
   return largest + Math.log(sum)
 }
 
-function componentsOf(budget: Budget, law: Law): readonly Component[] {
+/** Ω today of what thins out by one law each. */
+interface Amounts {
+  readonly radiation: number
+  readonly matter: number
+  readonly curvature: number
+  readonly dark: number
+}
+
+const amountsOf = (budget: Budget): Amounts => ({
+  radiation: budget.photons + budget.masslessNeutrinos,
+  matter: budget.coldMatter,
+  curvature: budget.curvature,
+  dark: budget.dark,
+})
+
+/** Dark energy that thins out exactly like radiation, matter or curvature counts as that. */
+function merged(amounts: Amounts, { exponent }: Law): Amounts {
+  const { radiation, matter, curvature, dark } = amounts
+  if (exponent === 4) return { radiation: radiation + dark, matter, curvature, dark: 0 }
+  if (exponent === 3) return { radiation, matter: matter + dark, curvature, dark: 0 }
+  if (exponent === 2) return { radiation, matter, curvature: curvature + dark, dark: 0 }
+  return amounts
+}
+
+function componentsOf(amounts: Amounts, budget: Budget, law: Law): readonly Component[] {
   const all: Component[] = [
-    powerComponent('radiation', budget.photons + budget.masslessNeutrinos, 4),
-    powerComponent('matter', budget.coldMatter, 3),
-    powerComponent('curvature', budget.curvature, 2),
-    darkComponent(budget.dark, law),
+    powerComponent('radiation', amounts.radiation, 4),
+    powerComponent('matter', amounts.matter, 3),
+    powerComponent('curvature', amounts.curvature, 2),
+    darkComponent(amounts.dark, law),
     ...budget.states.map(neutrinoComponent),
   ]
   return all.filter((one) => one.omega !== 0)

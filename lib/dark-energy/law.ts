@@ -52,6 +52,8 @@ export interface Law {
   bend(N: number, d: number): number
   /** f, f′ and f″ by N. */
   derivativesInto(out: Float64Array, N: number): void
+  /** Present where n is the same at all times. */
+  readonly exponent?: number
   /** w(N). */
   w(N: number): number
   /** Bounds of n = 3(1 + w) over from ≤ N ≤ to; either end may be infinite. Every value lies inside. */

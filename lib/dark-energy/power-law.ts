@@ -16,5 +16,5 @@ export function powerLaw(w: number): Law {
     past: asymptote,
     future: asymptote,
   })
-  return n === 0 ? { ...law, density: () => 1, change: () => 0, bend: () => 0 } : law
+  return n === 0 ? { ...law, exponent: n, density: () => 1, change: () => 0, bend: () => 0 } : { ...law, exponent: n }
 }

@@ -95,7 +95,7 @@ function march(model: Model, direction: Direction, end: Search): { panels: reado
 /** Is E² here made of what never thins out again farther on? Then what adds nothing now adds nothing later. */
 function lasts(model: Model, direction: Direction, edge: number): boolean {
   const N = direction * edge
-  const lasting = model.components.reduce((sum, one) => {
+  const lasting = model.acting.reduce((sum, one) => {
     const range =
       direction > 0 ? one.exponentRange(N, Number.POSITIVE_INFINITY) : one.exponentRange(Number.NEGATIVE_INFINITY, N)
     return (direction > 0 ? range[1] <= 0 : range[0] >= 0) ? sum + one.density(N) : sum

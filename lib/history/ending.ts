@@ -10,7 +10,7 @@ export function endOf(future: Arm, home: Arm): End {
   if (future.end.kind === 'root') return turned(future, home, future.end.N, future.end.certain)
   if (future.end.kind === 'double') {
     const because = 'E² and its slope vanish together at this scale factor: the expansion comes to rest there.'
-    const proven = future.model.components.length === 1
+    const proven = future.model.acting.length === 1
     return { kind: 'static', time: null, scale: scaleAt(future.end.N), turnaround: null, proven, because }
   }
   if (future.end.kind === 'singular') {
@@ -80,7 +80,7 @@ function expanding(future: Arm): readonly [EndKind, string] {
   }
   const n = leadingExponent(model, future.direction)
   if (n === null) return ['decelerating', 'All that is left thins out faster than any power of a.']
-  const rulers = model.components.filter((one) => exponentIn(one, 1) === n).map((one) => NAMES[one.key])
+  const rulers = model.acting.filter((one) => exponentIn(one, 1) === n).map((one) => NAMES[one.key])
   const who = [...new Set(rulers)].join(' and ')
   const slow = n === 0 ? logarithmicIn(model, 1) : null
   if (slow) return logarithmicEnding(slow)

@@ -9,7 +9,7 @@ import { explodes, leadingExponent } from './tail'
 export function originOf(past: Arm, back: Arm): Origin {
   if (past.end.kind === 'double') {
     const because = 'E² and its slope vanish together at this scale factor: the expansion emerges from a static state.'
-    const proven = past.model.components.length === 1
+    const proven = past.model.acting.length === 1
     return { kind: 'static', time: null, scale: Math.exp(past.end.N), proven, because }
   }
   if (past.end.kind === 'singular') {

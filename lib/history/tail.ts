@@ -54,7 +54,7 @@ const NEGLIGIBLE = 1e-19
 
 /** Does a component outgrow every power in this direction? Then there is no closed tail, and no need of one. */
 export const explodes = (model: Model, direction: Direction): boolean =>
-  model.components.some((one) => asymptoteOf(one, direction).kind === 'exploding')
+  model.acting.some((one) => asymptoteOf(one, direction).kind === 'exploding')
 
 /** A power of ln a counts as exponent 0, unless it is used up at finite a. */
 export function exponentIn(one: Component, direction: Direction): number | null {
@@ -66,7 +66,7 @@ export function exponentIn(one: Component, direction: Direction): number | null 
 /** The exponent that wins in this direction, or null when no component follows a power. */
 export function leadingExponent(model: Model, direction: Direction): number | null {
   let winner: number | null = null
-  for (const one of model.components) {
+  for (const one of model.acting) {
     const exponent = exponentIn(one, direction)
     if (exponent !== null && (winner === null || direction * exponent < direction * winner)) winner = exponent
   }
@@ -89,7 +89,7 @@ export function tailAt(model: Model, direction: Direction, N: number, anyway = f
   if (exponent === null || explodes(model, direction)) return null
   const leading: Component[] = []
   const others: Component[] = []
-  for (const one of model.components) {
+  for (const one of model.acting) {
     const asymptote = asymptoteOf(one, direction)
     const leads = exponentIn(one, direction) === exponent
     if (leads && asymptote.kind === 'power' && !anyway && direction * (N - asymptote.settled) < 0) return null

@@ -54,7 +54,7 @@ const endless = (model: Model, N: number): Search =>
   model.budget.dark > 0 ? { kind: 'singular', N } : rootAt(model, N, false)
 
 function termsOf(model: Model, direction: Direction, withDark: boolean): Terms {
-  const all = model.components
+  const all = model.acting
     .filter((one) => withDark || one.key !== 'dark')
     .flatMap((one): readonly Term[] => one.terms?.(direction) ?? [one])
   return { plus: all.filter((one) => one.omega > 0), minus: all.filter((one) => one.omega < 0) }

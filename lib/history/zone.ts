@@ -143,7 +143,7 @@ export function edgeZone(model: Model, direction: Direction, law: Logarithmic, f
   const N = law.edge?.N ?? 0
   const scaleOf = (s: number) => N - direction * Math.exp(-s)
   const density = (s: number) => (Math.abs(law.rate) * Math.exp(-s)) ** law.power
-  const others = model.components.filter((one) => one.key !== 'dark')
+  const others = model.acting.filter((one) => one.key !== 'dark')
   const { dark } = model.budget
   // A turning point that doubles cannot tell from the edge would make E² negative on the last 1e-15 of the way.
   const expansion = (s: number) => Math.max(model.expansionWith(scaleOf(s), density(s)), 0.5 * dark * density(s))

@@ -334,7 +334,7 @@ function finalRate({ history, scenario }: Subject): Outcome {
     return missing('the universe does not expand for ever')
   }
   if (leadingExponent(future.model, 1) !== 0) return { value: 0, error: 0 }
-  const constant = future.model.components.reduce((sum, one) => {
+  const constant = future.model.acting.reduce((sum, one) => {
     const constantTerm = one.future.kind === 'power' && one.future.exponent === 0
     return constantTerm
       ? sum + Math.sign(one.omega) * Math.exp(one.future.kind === 'power' ? one.future.logCoefficient : 0)
