@@ -1,21 +1,30 @@
 /**
  * The rate of `/api/history`, a scenario never asked before in each request, as a ratio to `/healthz`, which computes
- * nothing. Both are measured in turns, so that a slower or busier machine changes the ratio little.
+ * nothing. Both are measured in turns, so that a slower or busier machine changes the ratio little. Where the system tells it,
+ * the server's processor time per request stands beside: other processes do not count in it.
  */
 import { spawn } from 'node:child_process'
+import { readFileSync } from 'node:fs'
 import { setTimeout as wait } from 'node:timers/promises'
 import autocannon from 'autocannon'
 import { probePort } from '../setup/port.mjs'
 import { Refusal, ROOT } from '../setup/project.mjs'
+import { median } from './clock.mjs'
 
 const CONNECTIONS = 16
-const SECONDS = 4
-const ROUNDS = 3
+const SECONDS = 2
+const ROUNDS = 7
+/** Requests of each kind before the clock runs. */
+const WARM_UP = 1500
+const AIM = 0.45
 
 let asked = 0
 /** Matter from 0.3 up, in steps that leave every request its own. */
 const unseen = () => `/api/history?s=matter:${(0.3 + ++asked * 1e-8).toFixed(8)}`
 const health = () => '/healthz'
+
+/** @typedef {{readonly rate: number, readonly processor: number}} Turn rate in requests per second, processor in seconds per request */
+/** @typedef {{readonly url: string, readonly pid: number}} Server */
 
 export async function benchRequests() {
   const port = await probePort(0)
@@ -23,60 +32,86 @@ export async function benchRequests() {
   const server = spawn(process.execPath, ['scripts/start.mjs', '-p', String(port)], { cwd: ROOT, stdio: 'ignore' })
   try {
     await answering(url)
-    console.log(`\nrequests per second, ${CONNECTIONS} connections`)
-    const { status } = await fetch(`${url}${unseen()}`)
-    if (status === 200) await compare(url)
-    else console.log(`  /api/history answers ${status}, so there is no rate to measure.`)
+    await compare({ url, pid: server.pid ?? 0 })
   } finally {
     server.kill('SIGTERM')
   }
 }
 
-/** @param {string} url */
-async function compare(url) {
-  await rate(url, health, 1)
-  await rate(url, unseen, 2)
-  /** @type {{health: number, history: number}[]} */
+/** @param {Server} server */
+async function compare(server) {
+  for (const path of [health, unseen]) await turn(server, path, { amount: WARM_UP })
+  /** @type {{health: Turn, history: Turn}[]} */
   const rounds = []
   for (let i = 0; i < ROUNDS; i++) {
-    rounds.push({ health: await rate(url, health), history: await rate(url, unseen) })
+    rounds.push({
+      health: await turn(server, health, { duration: SECONDS }),
+      history: await turn(server, unseen, { duration: SECONDS }),
+    })
   }
-  const of = (/** @type {'health' | 'history'} */ key) => median(rounds.map((round) => round[key]))
-  console.log(`  /healthz                ${of('health').toFixed(0).padStart(6)}`)
-  console.log(`  /api/history, uncached  ${of('history').toFixed(0).padStart(6)}`)
-  console.log(
-    `  ratio                   ${median(rounds.map((r) => r.history / r.health))
-      .toFixed(2)
-      .padStart(6)}`,
+  const middle = (/** @type {(round: typeof rounds[number]) => number} */ of) => median(rounds.map(of))
+  const title = `requests, ${CONNECTIONS} connections`
+  console.log(`\n${title.padEnd(36)}per second   server's processor, µs`)
+  line(
+    '/healthz',
+    middle(({ health }) => health.rate),
+    middle(({ health }) => health.processor * 1e6),
+    0,
   )
+  line(
+    '/api/history, uncached',
+    middle(({ history }) => history.rate),
+    middle(({ history }) => history.processor * 1e6),
+    0,
+  )
+  const [rate, processor] = [
+    middle(({ health, history }) => history.rate / health.rate),
+    middle(({ health, history }) => health.processor / history.processor),
+  ]
+  line(`ratio (aim ${AIM})`, rate, processor, 2)
+}
+
+/** @param {string} name @param {number} rate @param {number} processor @param {number} decimals */
+function line(name, rate, processor, decimals) {
+  const shown = [rate, processor].map((value) => (Number.isFinite(value) ? value.toFixed(decimals) : 'unknown'))
+  console.log(`  ${name.padEnd(34)}${shown[0].padStart(10)}${shown[1].padStart(25)}`)
 }
 
 /**
- * Answers per second. Anything but 200 makes the number worthless, so it throws.
- * @param {string} url
+ * Anything but 200 makes the number worthless, so it throws.
+ * @param {Server} server
  * @param {() => string} path of each request
+ * @param {{amount: number} | {duration: number}} length
+ * @returns {Promise<Turn>}
  */
-async function rate(url, path, seconds = SECONDS) {
+async function turn({ url, pid }, path, length) {
+  const before = processorSeconds(pid)
   const result = await autocannon({
     url,
     connections: CONNECTIONS,
-    duration: seconds,
+    ...length,
     requests: [{ method: 'GET', setupRequest: (request) => ({ ...request, path: path() }) }],
   })
   if (result.non2xx + result.errors > 0) {
     throw new Refusal(`${result.non2xx} answers were errors and ${result.errors} never came.`)
   }
-  return result['2xx'] / result.duration
+  const answers = result['2xx']
+  return { rate: answers / result.duration, processor: (processorSeconds(pid) - before) / answers }
 }
 
-/** @param {readonly number[]} values an odd number of them */
-function median(values) {
-  return [...values].sort((one, other) => one - other)[(values.length - 1) / 2]
+/** Linux counts in hundredths of a second (proc(5), utime and stime); NaN on other systems. @param {number} pid */
+function processorSeconds(pid) {
+  try {
+    const fields = readFileSync(`/proc/${pid}/stat`, 'utf8').split(') ')[1].split(' ')
+    return (Number(fields[11]) + Number(fields[12])) / 100
+  } catch {
+    return Number.NaN
+  }
 }
 
 /** @param {string} url */
 async function answering(url) {
-  for (let i = 0; i < 200; i++) {
+  for (let i = 0; i < 400; i++) {
     if (await fetch(`${url}/healthz`).catch(() => false)) return
     await wait(50)
   }
