@@ -34,8 +34,8 @@ export interface Moment {
   readonly redshift: number | null
 }
 
-/** More changes of the sign of ä than this are told as an oscillation, not listed. */
-export const MOST_CHANGES = 20
+/** Changes of the sign of ä that are listed; from the last of them on, the scenario is said to oscillate. */
+const MOST_CHANGES = 20
 
 const ORIGINS: Readonly<Record<History['origin']['kind'], string>> = {
   'big-bang': 'Big Bang',
@@ -77,13 +77,7 @@ export function momentsOf(subject: Subject): readonly Moment[] {
     ...equalities(subject, crossing),
     ...fit('recombination', 'last scattering', recombinationRedshift(scenario)),
     ...fit('drag', 'end of the drag epoch', dragRedshift(scenario)),
-    ...changes(subject).flatMap((one) =>
-      crossing(
-        one.rising ? 'acceleration-start' : 'acceleration-end',
-        one.rising ? 'acceleration begins' : 'acceleration ends',
-        one,
-      ),
-    ),
+    ...changes(subject, crossing),
     { kind: 'now' as const, label: 'now', time: 0, scale: 1, redshift: 0 },
     ...turnaround(subject, gyr),
     ...unbindings(subject, gyr),
@@ -115,8 +109,17 @@ function equalities(
 }
 
 /** Changes of the sign of ä on the expansion that holds today. */
-const changes = ({ epochs }: Subject): readonly Crossing[] =>
-  epochs.acceleration.length > MOST_CHANGES ? [] : epochs.acceleration
+function changes(
+  { epochs: { acceleration } }: Subject,
+  crossing: (kind: MomentKind, label: string, one: Crossing | null) => Moment[],
+): Moment[] {
+  return acceleration.slice(0, MOST_CHANGES).flatMap((one, i) => {
+    const label = one.rising ? 'acceleration begins' : 'acceleration ends'
+    const oscillates = i === MOST_CHANGES - 1 && acceleration.length > MOST_CHANGES
+    const kind = one.rising ? 'acceleration-start' : 'acceleration-end'
+    return crossing(kind, oscillates ? `${label}; from here on the sign of ä oscillates` : label, one)
+  })
+}
 
 function turnaround({ history }: Subject, gyr: number): Moment[] {
   const { turnaround } = history.end
