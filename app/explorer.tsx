@@ -42,7 +42,7 @@ function Page({ initial, edition }: Props) {
         <h1 className={initial.titled || view.titled ? undefined : 'spoken'}>{view.title}</h1>
         {view.refusal && <Refusal refusal={view.refusal} />}
         <Verdicts scenarios={view.scenarios} focus={view.place.focus} />
-        <Figure view={view.figure} links={view.scenarios.map(({ link }) => link)} live={address !== null} />
+        <Figure view={view} live={address !== null} />
         <div className="columns">
           <Ingredients key={`${desk.place.focus} ${desk.scenarios.length}`} desk={desk} live={address !== null} />
           <Moments view={view} />

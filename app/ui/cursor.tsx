@@ -41,6 +41,8 @@ export function Cursor({ view, plot, size, links, lit, light }: Props) {
     setIndex(null)
     setByKeys(false)
     light(null)
+    // A chart that nobody looks at would be drawn again with every turn of a slider.
+    wake(false)
   }
   const press = (event: KeyboardEvent) => {
     const moved = keyed(event.key, at ?? now, last)
@@ -51,6 +53,7 @@ export function Cursor({ view, plot, size, links, lit, light }: Props) {
     else if (next !== undefined) light(next)
     else return
     event.preventDefault()
+    wake(event.key !== 'Escape')
     setByKeys(event.key !== 'Escape')
   }
   const area = scale && areaOf(plot, size, scale)

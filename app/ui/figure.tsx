@@ -1,4 +1,5 @@
-import { memo, useDeferredValue, useState, useSyncExternalStore } from 'react'
+import { memo, useDeferredValue, useMemo, useState, useSyncExternalStore } from 'react'
+import type { Explorer } from '../../lib/answers/explorer'
 import { drawLongView, heightOfView, plotOfView } from '../../lib/figures/draw-long-view'
 import type { LongView } from '../../lib/figures/long-view'
 import { FRAMES, type Frame } from '../../lib/figures/plot'
@@ -7,31 +8,31 @@ import { Cursor } from './cursor'
 import { Drawing } from './drawing'
 
 interface Props {
-  readonly view: LongView
-  /** Chooses the scenario of each curve. */
-  readonly links: readonly string[]
+  readonly view: Explorer
   readonly live: boolean
 }
 
 /** The long view, drawn for three widths of which the page shows one; the others follow when there is time. */
-export function Figure({ view, links, live }: Props) {
-  const later = useDeferredValue(view)
+export const Figure = memo(function Figure({ view, live }: Props) {
+  const { figure, scenarios } = view
+  const later = useDeferredValue(figure)
   const shown = useShownFrame()
-  const caption = useSteadyHeight(String(view.curves.length))
+  const caption = useSteadyHeight(String(figure.curves.length), figure)
+  const links = useMemo(() => scenarios.map(({ link }) => link), [scenarios])
   return (
     <figure className="long-view">
       {FRAMES.map((frame) => (
         <Picture
           key={frame.id}
-          view={shown === null || frame.id === shown ? view : later}
+          view={shown === null || frame.id === shown ? figure : later}
           frame={frame}
           links={live && frame.id === shown ? links : null}
         />
       ))}
-      <figcaption ref={caption}>{view.caption}</figcaption>
+      <figcaption ref={caption}>{figure.caption}</figcaption>
     </figure>
   )
-}
+})
 
 interface PictureProps {
   readonly view: LongView
@@ -68,14 +69,16 @@ const WIDEST = { narrow: '(max-width: 600px)', middle: '(max-width: 1020px)' }
 
 function useShownFrame(): string | null {
   return useSyncExternalStore(
-    (changed) => {
-      const lists = Object.values(WIDEST).map((query) => matchMedia(query))
-      for (const list of lists) list.addEventListener('change', changed)
-      return () => {
-        for (const list of lists) list.removeEventListener('change', changed)
-      }
-    },
+    watchWidth,
     () => Object.entries(WIDEST).find(([, query]) => matchMedia(query).matches)?.[0] ?? 'wide',
     () => null,
   )
+}
+
+function watchWidth(changed: () => void): () => void {
+  const lists = Object.values(WIDEST).map((query) => matchMedia(query))
+  for (const list of lists) list.addEventListener('change', changed)
+  return () => {
+    for (const list of lists) list.removeEventListener('change', changed)
+  }
 }

@@ -1,8 +1,9 @@
+import { memo } from 'react'
 import type { Explorer } from '../../lib/answers/explorer'
 import type { MeasureWords } from '../../lib/words/measures'
 import { Sentence, Symbols } from './symbol'
 
-export function Measures({ view }: { readonly view: Explorer }) {
+export const Measures = memo(function Measures({ view }: { readonly view: Explorer }) {
   return (
     <section aria-labelledby="measures">
       <h2 id="measures" className="heading">
@@ -24,7 +25,7 @@ export function Measures({ view }: { readonly view: Explorer }) {
       </table>
     </section>
   )
-}
+})
 
 function Row({ measure }: { readonly measure: MeasureWords }) {
   const { key, label, symbol, meaning, value, unit, because } = measure

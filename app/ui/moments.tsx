@@ -1,7 +1,8 @@
+import { memo } from 'react'
 import type { Explorer } from '../../lib/answers/explorer'
 import { Sentence } from './symbol'
 
-export function Moments({ view }: { readonly view: Explorer }) {
+export const Moments = memo(function Moments({ view }: { readonly view: Explorer }) {
   const scenario = view.scenarios[view.place.focus]
   return (
     <section aria-labelledby="moments">
@@ -31,4 +32,4 @@ export function Moments({ view }: { readonly view: Explorer }) {
       </p>
     </section>
   )
-}
+})

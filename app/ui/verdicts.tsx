@@ -1,3 +1,4 @@
+import { memo } from 'react'
 import type { ScenarioView } from '../../lib/answers/explorer'
 import { useSteadyHeight } from '../live/use-steady-height'
 import { Key } from './key'
@@ -8,8 +9,8 @@ interface Props {
   readonly focus: number
 }
 
-export function Verdicts({ scenarios, focus }: Props) {
-  const ref = useSteadyHeight(String(scenarios.length))
+export const Verdicts = memo(function Verdicts({ scenarios, focus }: Props) {
+  const ref = useSteadyHeight(String(scenarios.length), scenarios)
   return (
     <section className="verdicts" aria-label="Verdict" ref={ref}>
       {scenarios.map((scenario) => (
@@ -17,7 +18,7 @@ export function Verdicts({ scenarios, focus }: Props) {
       ))}
     </section>
   )
-}
+})
 
 function VerdictOf({ scenario, current }: { readonly scenario: ScenarioView; readonly current: boolean }) {
   const { slot, name, verdict, proven, notices } = scenario
