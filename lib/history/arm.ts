@@ -33,6 +33,7 @@ export interface Arm {
 const NEGLIGIBLE = 1e-18
 /** In 1/H₀: beyond this nobody asks, and E² nears the end of the doubles. */
 const FOR_EVER = 1e100
+const LARGEST = 1e250
 /** An integrand this far down comes from densities that are about to leave the doubles. */
 const NOTHING = 1e-200
 
@@ -82,7 +83,7 @@ function march(model: Model, direction: Direction, end: Search): { panels: reado
       if (kind === 'final' && adds < NEGLIGIBLE) stopped = 'spent'
       else if (kind === 'last' && adds < NEGLIGIBLE && (adds < NOTHING || lasts(model, direction, edge)))
         stopped = 'spent'
-      else if (end.kind !== 'root' && time > FOR_EVER) stopped = 'for ever'
+      else if (end.kind !== 'root' && (time > FOR_EVER || conformal > LARGEST)) stopped = 'for ever'
       else if (zone.to === FARTHEST && tailAt(model, direction, direction * edge) !== null) stopped = 'tail'
       return stopped !== null
     }

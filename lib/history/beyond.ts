@@ -18,10 +18,11 @@ export interface Beyond {
 export function beyondPanels(model: Model, direction: Direction, end: Search, stopped: Stopped, edge: number): Beyond {
   const infinite = [Number.POSITIVE_INFINITY, 0] as const
   const nothing = [0, 0] as const
-  if (end.kind === 'double' || stopped === 'for ever') return { tail: null, time: infinite, conformal: infinite }
+  if (end.kind === 'double') return { tail: null, time: infinite, conformal: infinite }
   const ends = end.kind === 'root' || (end.kind === 'singular' && Math.abs(end.N) <= FARTHEST)
   if (ends || stopped === 'end') return { tail: null, time: nothing, conformal: nothing }
   if (explodes(model, direction)) return exploding(model, direction, stopped, edge)
+  if (stopped === 'for ever') return { tail: null, time: infinite, conformal: infinite }
   const tail = tailAt(model, direction, direction * edge, stopped === 'far')
   if (tail === null) {
     const left = (clock: Clock) => (stopped === 'spent' && converges(model, direction, clock) ? nothing : infinite)

@@ -26,11 +26,13 @@ const RESOLVED = 2e-14
 /** A panel this narrow (in s) is taken as it is; its error bound says so. */
 const NARROWEST = 1e-9
 const GROWTH = 1.7
-/** So many trials without getting better by half are noise, unless it is above NOISIEST times what is asked. */
+/** So many trials, each narrower, that are not five times better in the end show noise, unless above NOISIEST times what is asked. */
 const NOISY_TRIALS = 4
 const NOISIEST = 1e4
 /** Panels tried in one zone before the scenario is given up. */
 const MOST_PANELS = 4000
+
+const SMALLEST = 1e-280
 
 const samples: Samples = { time: new Float64Array(NODE_COUNT), conformal: new Float64Array(NODE_COUNT) }
 const coefficients = new Float64Array(NODE_COUNT)
@@ -64,7 +66,7 @@ export function panelsOf(zone: Zone, enough: (panel: Panel, edge: number) => boo
 /** What shrinking no longer betters is noise: how much of it there is, with a margin; 0 while there is no sign of it. */
 function noiseIn(trials: readonly number[]): number {
   const last = trials.slice(-NOISY_TRIALS)
-  const stalled = last.length === NOISY_TRIALS && last.every((one, i) => i === 0 || one > 0.5 * last[i - 1])
+  const stalled = last.length === NOISY_TRIALS && last[NOISY_TRIALS - 1] > 0.2 * last[0]
   const noise = 4 * Math.max(...last)
   return stalled && noise < NOISIEST ? noise : 0
 }
@@ -90,7 +92,8 @@ function panelOver(zone: Zone, from: number, to: number): Trial {
 
 function stretchOf(values: Float64Array, half: number, rounding: number): readonly [Stretch, number] {
   coefficientsInto(coefficients, values)
-  const tail = relativeTail(coefficients)
+  // The last doubles have few digits, and nothing that is measured comes near them.
+  const tail = Math.max(values[0], values[NODE_COUNT - 1]) < SMALLEST ? 0 : relativeTail(coefficients)
   const left = Math.abs(coefficients[NODE_COUNT - 1]) + Math.abs(coefficients[NODE_COUNT - 2])
   const series = antiderivative(coefficients, half)
   const total = sumAtOne(series)

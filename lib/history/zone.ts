@@ -68,11 +68,16 @@ export function plainZone(model: Model, direction: Direction, from: number, to: 
         const inverseScale = central * Math.exp(-direction * offset)
         const N = direction * (centre + offset)
         const squared = expansionAt(model, N, inverseScale)
-        // E² leaves the doubles before 1/E does.
-        const rate =
-          squared > SMALLEST && squared < LARGEST ? 1 / Math.sqrt(squared) : Math.exp(-0.5 * logExpansion(model, N))
-        out.time[k] = rate
-        out.conformal[k] = inverseScale * rate
+        if (squared > SMALLEST && squared < LARGEST) {
+          const rate = 1 / Math.sqrt(squared)
+          out.time[k] = rate
+          out.conformal[k] = inverseScale * rate
+        } else {
+          // E² leaves the doubles before 1/E does, and 1/E before 1/(aE).
+          const log = -0.5 * logExpansion(model, N)
+          out.time[k] = Math.exp(log)
+          out.conformal[k] = Math.exp(log - N)
+        }
       }
     },
   }
@@ -92,11 +97,14 @@ export function turningZone(model: Model, direction: Direction, N: number, from:
     distanceAt: (s) => farthest - s * s,
     variableAt: (m) => -Math.sqrt(Math.max(0, farthest - m)),
     expansion,
-    conditioning: (s) => 1 + model.magnitudeFrom(anchor, offset(s)) / expansion(s),
+    // Four roundings in each term.
+    conditioning: (s) => conditioningOf(4 * model.magnitudeFrom(anchor, offset(s)), expansion(s)),
     sampleInto(out, centre, half) {
       for (let k = 0; k < NODE_COUNT; k++) {
         const s = centre + half * NODES[k]
-        const rate = (2 * Math.abs(s)) / Math.sqrt(expansion(s))
+        const squared = expansion(s)
+        const root = squared < LARGEST ? 1 / Math.sqrt(squared) : Math.exp(-0.5 * logExpansion(model, N + offset(s)))
+        const rate = 2 * Math.abs(s) * root
         out.time[k] = rate
         out.conformal[k] = rate * inverseScale * Math.exp(-offset(s))
       }

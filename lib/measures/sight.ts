@@ -35,6 +35,8 @@ export function eventHorizon(history: History, event: Event): number | Missing {
   return Number.isFinite(left) ? left : missing('light has unlimited conformal time ahead: there is no event horizon')
 }
 
+const OUT_OF_RANGE = 'the scale factor there, or the density, is outside the range of floating-point numbers'
+
 /**
  * Redshift of what lies at comoving distance χ and is seen today; missing beyond the origin of the expansion or the antipode.
  * `uncertainty` is the error of χ.
@@ -47,9 +49,9 @@ export function redshiftAt(history: History, chi: number, uncertainty: number): 
   if (!(chi + error < past.conformal.total))
     return missing('the distance reaches beyond all that light could cross since the origin of the expansion')
   const place: Place | null = placeElapsed(past, 'conformal', chi)
-  if (place === null) return missing('the scale factor there is outside the range of floating-point numbers')
+  if (place === null) return missing(OUT_OF_RANGE)
   const z = Math.expm1(-place.N)
   const found = eventAtScale(history, place.N, 'expanding')
   const rate = isEvent(found) ? Math.sqrt(past.model.expansion(place.N, Math.exp(-place.N))) : 0
-  return bounded(z, error * rate)
+  return Number.isFinite(rate) ? bounded(z, error * rate) : missing(OUT_OF_RANGE)
 }
