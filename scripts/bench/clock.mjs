@@ -4,8 +4,8 @@
  */
 
 /** Seconds. */
-const [WARM_UP, TURN] = [0.3, 0.01]
-const [LEAST_ROUNDS, MOST_ROUNDS] = [5, 100]
+const [WARM_UP, TURN] = [1, 0.01]
+const [LEAST_ROUNDS, MOST_ROUNDS] = [3, 100]
 /** Seconds for the turns of one function. */
 const BUDGET = 1
 

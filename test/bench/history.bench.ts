@@ -1,4 +1,5 @@
-/** From a scenario code to its history and measures. */
+/** From a scenario code to its history, its measures and the answer that a request gets. */
+import { historyAnswer } from '../../lib/answers/history'
 import { historyOf } from '../../lib/history/history'
 import { budgetOf } from '../../lib/scenario/budget'
 import type { Scenario } from '../../lib/scenario/scenario'
@@ -17,4 +18,7 @@ export const benches: Benches = {
   'history, one massive state': { run: inTurn(massive, history) },
   'history, measures, moments, massless neutrinos': { run: inTurn(massless, solve) },
   'history, measures, moments, one massive state': { run: inTurn(massive, solve) },
+  'answer of /api/history as text, one massive state': {
+    run: inTurn(massive, (scenario) => JSON.stringify(historyAnswer([solve(scenario)]))),
+  },
 }
