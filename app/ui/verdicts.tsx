@@ -32,7 +32,11 @@ function VerdictOf({ scenario, current }: { readonly scenario: ScenarioView; rea
       </h2>
       <p className="said">{verdict.sentences.join(' ')}</p>
       {verdict.aside && <p className="aside">{verdict.aside}</p>}
-      {!proven && <p className="aside">The ending is found by sampling, not proven.</p>}
+      {!proven && (
+        <p className="aside">
+          The ending is computed, not proven: it rests on digits or steps that rounding could change.
+        </p>
+      )}
       {notices.map((notice) => (
         <p key={notice.message} className="aside notice">
           <Sentence text={notice.message} /> {notice.link && <a href={notice.link}>Correct it</a>}
