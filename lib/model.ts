@@ -23,6 +23,8 @@ export interface Derivatives {
   first: number
   /** d²E²/dN². */
   second: number
+  /** ä/a in H₀²: E² + ½ dE²/dN, to which curvature adds exactly nothing. */
+  acceleration: number
 }
 
 /** A term of E² that keeps its sign. */
@@ -73,6 +75,8 @@ export interface Model {
   expansionFrom(anchor: Anchor, d: number): number
   /** E²(N + d) − E²(N) − d dE²/dN, without cancellation for small d: all of E² near a double root at N. */
   bendFrom(N: number, d: number): number
+  /** The same with the change of dark energy over its density today given. */
+  expansionFromWith(anchor: Anchor, d: number, inDark: number): number
   /** Sum of the sizes of the terms that expansionFrom adds: its rounding error is a few eps times this. */
   magnitudeFrom(anchor: Anchor, d: number): number
   /** Sum of the sizes of the components at N: the rounding error of expansion is a few eps times this. */
@@ -120,25 +124,33 @@ export function modelOf(budget: Budget, law: Law): Model {
   const energy = new Float64Array(3)
   const derivatives = (N: number): Derivatives => {
     const x = Math.exp(-N)
-    const [k, m, r] = [curvature * x * x, coldMatter * x ** 3, radiation * x ** 4]
-    const out = { value: k + m + r, first: -2 * k - 3 * m - 4 * r, second: 4 * k + 9 * m + 16 * r }
-    const add = (density: number, n: number, slope: number) => {
-      out.value += density
-      out.first -= n * density
-      out.second += (n * n - slope) * density
+    const square = x * x
+    const k = sized(curvature, square)
+    const m = sized(coldMatter, square * x)
+    const r = sized(radiation, square * square)
+    let value = k + m + r
+    let first = -2 * k - 3 * m - 4 * r
+    let second = 4 * k + 9 * m + 16 * r
+    let acceleration = -0.5 * m - r
+    if (x > NO_SCALE) {
+      for (const state of states) {
+        energyDerivatives(state.y / x, energy)
+        const density = state.masslessDensity * energy[0] * square * square
+        const n = 4 - energy[1]
+        value += density
+        first -= n * density
+        second += (n * n + energy[2]) * density
+        acceleration += (1 - 0.5 * n) * density
+      }
     }
-    for (const state of x > NO_SCALE ? states : []) {
-      const y = state.y / x
-      energyDerivatives(y, energy)
-      add(state.masslessDensity * energy[0] * x ** 4, 4 - energy[1], -energy[2])
+    if (dark !== 0) {
+      law.derivativesInto(energy, N)
+      value += dark * energy[0]
+      first += dark * energy[1]
+      second += dark * energy[2]
+      acceleration += dark * (energy[0] + 0.5 * energy[1])
     }
-    if (dark === 0) return out
-    law.derivativesInto(energy, N)
-    return {
-      value: out.value + dark * energy[0],
-      first: out.first + dark * energy[1],
-      second: out.second + dark * energy[2],
-    }
+    return { value, first, second, acceleration }
   }
 
   const acting = componentsOf(acted, budget, law)
@@ -157,6 +169,7 @@ export function modelOf(budget: Budget, law: Law): Model {
         : withoutDark(Math.exp(-N)) + dark * density,
     bendFrom: (N, d) => acting.reduce((sum, one) => sum + one.bend(N, d), 0),
     expansionFrom: (anchor, d) => anchor.value + changeFrom(anchor, d),
+    expansionFromWith: (anchor, d, inDark) => anchor.value + changeFrom(anchor, d, inDark),
     magnitudeFrom(anchor, d) {
       changeFrom(anchor, d)
       return Math.abs(anchor.value) + size
@@ -165,6 +178,9 @@ export function modelOf(budget: Budget, law: Law): Model {
     derivatives,
   }
 }
+
+/** Nothing stays nothing where the power leaves the doubles. */
+const sized = (omega: number, power: number): number => (omega === 0 ? 0 : omega * power)
 
 /** E² at N by the form that rounds least: from today's E² = 1 nearby where large densities cancel, as the plain sum elsewhere. */
 export function expansionAt(model: Model, N: number, inverseScale: number): number {

@@ -19,6 +19,7 @@ export function beyondPanels(model: Model, direction: Direction, end: Search, st
   const infinite = [Number.POSITIVE_INFINITY, 0] as const
   const nothing = [0, 0] as const
   if (end.kind === 'double') return { tail: null, time: infinite, conformal: infinite }
+  if (end.kind === 'none' && end.farRoot !== null && stopped !== 'tail') return turningFar(model, direction, edge)
   const ends = end.kind === 'root' || (end.kind === 'singular' && Math.abs(end.N) <= FARTHEST)
   if (ends || stopped === 'end') return { tail: null, time: nothing, conformal: nothing }
   if (explodes(model, direction)) return exploding(model, direction, stopped, edge)
@@ -34,6 +35,14 @@ export function beyondPanels(model: Model, direction: Direction, end: Search, st
     return [value, Number.isFinite(value) ? doubt * value : 0] as const
   }
   return { tail, time: of('time'), conformal: of('conformal') }
+}
+
+/** A turning point that the doubles do not hold: for ever ahead; behind, what is left is no more than the last e-fold. */
+function turningFar(model: Model, direction: Direction, edge: number): Beyond {
+  if (direction > 0)
+    return { tail: null, time: [Number.POSITIVE_INFINITY, 0], conformal: [Number.POSITIVE_INFINITY, 0] }
+  const log = -0.5 * logExpansion(model, -edge)
+  return { tail: null, time: [0, 4 * Math.exp(log)], conformal: [0, 4 * Math.exp(log + edge)] }
 }
 
 /** Every integral is finite, but the doubles may end before it is complete. */

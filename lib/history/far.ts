@@ -1,5 +1,5 @@
 /** Integrals over all that is left, of functions given by their logarithm: for what lies beyond the range of scale factors. */
-import { coefficientsInto, NODE_COUNT, NODES, relativeTail } from '../numerics/chebyshev'
+import { coefficientsInto, NODE_COUNT, NODES, relativeTail, type Series } from '../numerics/chebyshev'
 
 const samples = new Float64Array(NODE_COUNT)
 const coefficients = new Float64Array(NODE_COUNT)
@@ -29,7 +29,7 @@ export function integralOfExp(log: (x: number) => number, from: number, to = Num
 }
 
 /** ∫ over [−1, 1] of a Chebyshev series. */
-function mean(series: Float64Array): number {
+function mean(series: Series): number {
   let value = 0
   for (let j = 0; j < NODE_COUNT; j += 2) value += (2 * series[j]) / (1 - j * j)
   return value

@@ -2,13 +2,21 @@
  * Adaptive Chebyshev panels for the two integrals of a zone. A panel stands when its last two coefficients are below 2e-14 of the
  * largest; a rejected one shrinks, a good one lets the next grow. The factors are tuned for few evaluations.
  */
-import { antiderivative, coefficientsInto, evaluate, NODE_COUNT, relativeTail, sumAtOne } from '../numerics/chebyshev'
+import {
+  antiderivative,
+  coefficientsInto,
+  evaluate,
+  NODE_COUNT,
+  relativeTail,
+  type Series,
+  sumAtOne,
+} from '../numerics/chebyshev'
 import type { Samples, Zone } from './zone'
 
 /** One integral over a panel. */
 export interface Stretch {
   /** Antiderivative from the inner edge, as a Chebyshev series. */
-  readonly series: Float64Array
+  readonly series: Series
   readonly total: number
   /** Absolute error bound of the total: what the series leaves out, and rounding. */
   readonly error: number
@@ -26,12 +34,12 @@ const RESOLVED = 2e-14
 /** A panel this narrow (in s) is taken as it is; its error bound says so. */
 const NARROWEST = 1e-9
 const GROWTH = 1.7
-/** So many trials, each narrower, that are not five times better in the end show noise, unless above NOISIEST times what is asked. */
-const NOISY_TRIALS = 4
-const NOISIEST = 1e4
+/** A narrower trial that is not five times better shows noise, unless above NOISIEST times what is asked: it should be 60 times. */
+const NOISIEST = 1e3
 /** Panels tried in one zone before the scenario is given up. */
 const MOST_PANELS = 4000
 
+/** Integrands below this no longer have all their digits. */
 const SMALLEST = 1e-280
 
 const samples: Samples = { time: new Float64Array(NODE_COUNT), conformal: new Float64Array(NODE_COUNT) }
@@ -42,19 +50,19 @@ export function panelsOf(zone: Zone, enough: (panel: Panel, edge: number) => boo
   const panels: Panel[] = []
   let [from, width] = [zone.from, zone.width]
   let tried = 0
-  let [floor, trials]: [number, readonly number[]] = [1, []]
+  let [floor, before] = [1, Number.POSITIVE_INFINITY]
   while (from < zone.to) {
     if (++tried > MOST_PANELS) throw new RangeError(`more than ${MOST_PANELS} panels would be needed`)
     const to = from + width >= zone.to - width * 0.05 ? zone.to : from + width
     const panel = panelOver(zone, from, to)
-    trials = [...trials, panel.worst]
-    floor = Math.max(floor, noiseIn(trials))
+    floor = Math.max(floor, noiseIn(before, panel.worst))
     const excess = panel.worst / floor
     if (excess > 1 && to - from > NARROWEST) {
       width = (to - from) * Math.max(0.35, Math.min(0.75, excess ** (-1 / 15)))
+      before = panel.worst
       continue
     }
-    trials = []
+    before = Number.POSITIVE_INFINITY
     panels.push(panel)
     if (enough(panel, to)) break
     width = (to - from) * Math.min(GROWTH, Math.max(1, 0.95 * (excess + 1e-3) ** (-1 / 15)))
@@ -63,12 +71,10 @@ export function panelsOf(zone: Zone, enough: (panel: Panel, edge: number) => boo
   return panels
 }
 
-/** What shrinking no longer betters is noise: how much of it there is, with a margin; 0 while there is no sign of it. */
-function noiseIn(trials: readonly number[]): number {
-  const last = trials.slice(-NOISY_TRIALS)
-  const stalled = last.length === NOISY_TRIALS && last[NOISY_TRIALS - 1] > 0.2 * last[0]
-  const noise = 4 * Math.max(...last)
-  return stalled && noise < NOISIEST ? noise : 0
+/** What a narrower trial no longer betters is noise: how much of it there is, with a margin; 0 while there is no sign of it. */
+function noiseIn(before: number, now: number): number {
+  const noise = now > 0.2 * before ? 4 * Math.max(before, now) : 0
+  return noise < NOISIEST ? noise : 0
 }
 
 /** `worst` is the size of the last two coefficients over what is asked. */
@@ -92,7 +98,6 @@ function panelOver(zone: Zone, from: number, to: number): Trial {
 
 function stretchOf(values: Float64Array, half: number, rounding: number): readonly [Stretch, number] {
   coefficientsInto(coefficients, values)
-  // The last doubles have few digits, and nothing that is measured comes near them.
   const tail = Math.max(values[0], values[NODE_COUNT - 1]) < SMALLEST ? 0 : relativeTail(coefficients)
   const left = Math.abs(coefficients[NODE_COUNT - 1]) + Math.abs(coefficients[NODE_COUNT - 2])
   const series = antiderivative(coefficients, half)

@@ -1,10 +1,12 @@
 /** Which zones an arm is made of. */
 import { logarithmicIn, type Model } from '../model'
 import { type Direction, FARTHEST, type Search } from './turning'
-import { edgeZone, plainZone, staticZone, turningZone, type Zone } from './zone'
+import { edgeTurningZone, edgeZone, plainZone, staticZone, turningZone, type Zone } from './zone'
 
 /** Width in ln a of the zone around a turning point, a static state or an edge. */
 const NEAR = 0.7
+/** A turning point this near in ln a to the edge of a law is measured from the edge. */
+const AT_EDGE = 1e-3
 
 export interface Stretch {
   readonly zone: Zone
@@ -23,9 +25,17 @@ interface Beginning {
   readonly edge: 'edge' | 'final' | null
 }
 
+/** How far the panels may go; one e-fold before a turning point that the doubles do not hold. */
+function reachOf(end: Search): number {
+  if (end.kind !== 'none') return Math.min(FARTHEST, Math.abs(end.N))
+  return end.farRoot === null
+    ? FARTHEST
+    : Math.min(FARTHEST, Math.max(0.5 * Math.abs(end.farRoot), Math.abs(end.farRoot) - 1))
+}
+
 /** The zones of an arm, outwards from today, cut where the law breaks. */
 export function stretchesOf(model: Model, direction: Direction, end: Search): readonly Stretch[] {
-  const reach = end.kind === 'none' ? FARTHEST : Math.min(FARTHEST, Math.abs(end.N))
+  const reach = reachOf(end)
   const beginnings = beginningsOf(model, direction, end, reach)
   const breaks = model.law.breaks.map((N) => direction * N).filter((m) => m > 0 && m < reach)
   const cuts = [...new Set([...breaks, ...beginnings.map((one) => one.from), reach])].sort((a, b) => a - b)
@@ -56,9 +66,13 @@ function beginningsOf(model: Model, direction: Direction, end: Search, reach: nu
   }
   const least = edge < reach ? edge : 0
   if (end.kind === 'none' || reach < Math.abs(end.N)) return list
-  if (law && (end.kind === 'singular' || (end.kind === 'root' && edge === reach))) {
+  if (law && end.kind === 'singular') {
     const zone = (from: number, to: number) => edgeZone(model, direction, law, from, to)
     return [...list, { from: nearEdge(reach), zone, edge: 'final' }]
+  }
+  if (law && end.kind === 'root' && edge >= reach && edge - reach < AT_EDGE) {
+    const zone = (from: number) => edgeTurningZone(model, direction, law, from)
+    return [...list, { from: nearEdge(reach), zone, edge: null }]
   }
   const zoneTo = end.kind === 'root' ? turningZone : staticZone
   const zone = (from: number, to: number) => zoneTo(model, direction, end.N, from, to)

@@ -73,7 +73,8 @@ function atEdge(model: Model, edge: Edge, direction: Direction): Search {
 
 /** A root, if a and E² about it are doubles. */
 function rootAt(model: Model, N: number, certain: boolean): Search {
-  const size = model.magnitude(N)
+  // The slope too: a density that changes its sign has no size here.
+  const size = model.magnitude(N) + Math.abs(model.derivatives(N).first)
   const near = Math.abs(N) <= FARTHEST && size > 1e-290 && size < 1e290
   return near ? { kind: 'root', N, certain } : { kind: 'none', farRoot: N }
 }

@@ -153,8 +153,7 @@ export function edgeZone(model: Model, direction: Direction, law: Logarithmic, f
   const density = (s: number) => (Math.abs(law.rate) * Math.exp(-s)) ** law.power
   const others = model.acting.filter((one) => one.key !== 'dark')
   const { dark } = model.budget
-  // A turning point that doubles cannot tell from the edge would make E² negative on the last 1e-15 of the way.
-  const expansion = (s: number) => Math.max(model.expansionWith(scaleOf(s), density(s)), 0.5 * dark * density(s))
+  const expansion = (s: number) => model.expansionWith(scaleOf(s), density(s))
   return {
     ...approach(Math.abs(N), EDGE_NEAREST, from, to),
     width: 0.5,
@@ -172,4 +171,50 @@ export function edgeZone(model: Model, direction: Direction, law: Logarithmic, f
       }
     },
   }
+}
+
+/**
+ * Up to a turning point so near to the edge of a law that N alone tells them badly apart: s_t = −ln of the distance between them
+ * follows from Ω f = −(all else), and the variable is −√(s_t − s) with s as in edgeZone.
+ */
+export function edgeTurningZone(model: Model, direction: Direction, law: Logarithmic, from: number): Zone {
+  const edge = law.edge?.N ?? 0
+  const { density: least, distance } = nearestToEdge(model, direction, law, edge)
+  const [last, farthest] = [-Math.log(distance), Math.abs(edge)]
+  const anchor: Anchor = { N: edge - direction * distance, value: 0 }
+  const inverseScale = Math.exp(-anchor.N)
+  const offset = (x: number) => -direction * distance * Math.expm1(x * x)
+  const inDark = (x: number) => least * Math.expm1(law.power * x * x)
+  const expansion = (x: number) => model.expansionFromWith(anchor, offset(x), inDark(x))
+  const variableAt = (m: number) => -Math.sqrt(Math.max(0, last + Math.log(Math.max(farthest - m, distance))))
+  return {
+    from: variableAt(from),
+    to: 0,
+    width: 0.3,
+    distanceAt: (x) => farthest - distance * Math.exp(x * x),
+    variableAt,
+    expansion,
+    conditioning: (x) => conditioningOf(4 * model.magnitudeFrom(anchor, offset(x)), expansion(x)),
+    sampleInto(out, centre, half) {
+      for (let k = 0; k < NODE_COUNT; k++) {
+        const x = centre + half * NODES[k]
+        const rate = (2 * Math.abs(x) * distance * Math.exp(x * x)) / Math.sqrt(expansion(x))
+        out.time[k] = rate
+        out.conformal[k] = rate * inverseScale * Math.exp(-offset(x))
+      }
+    },
+  }
+}
+
+/** Nothing happens between here and a turning point that is still nearer. */
+const EDGE_LEAST = 1e-290
+
+/** The distance from the edge at which Ω f makes up for all else, which hardly varies there: a fixed point. */
+function nearestToEdge(model: Model, direction: Direction, law: Logarithmic, edge: number) {
+  let [density, distance] = [0, 0]
+  for (let step = 0; step < 20; step++) {
+    density = -model.expansionWith(edge - direction * distance, 0) / model.budget.dark
+    distance = Math.max(EDGE_LEAST, density ** (1 / law.power) / Math.abs(law.rate))
+  }
+  return { density: (Math.abs(law.rate) * distance) ** law.power, distance }
 }

@@ -1,6 +1,7 @@
 /** Moments when one thing overtakes another: sign changes of a function of ln a along the expansion that holds today. */
 import type { Arm } from '../history/arm'
 import type { History } from '../history/history'
+import { leadingExponent } from '../history/tail'
 import type { Component, Model } from '../model'
 import { brent } from '../numerics/roots'
 
@@ -11,9 +12,11 @@ export interface Crossing {
 }
 
 /** Looks per panel of the integrals, whose widths follow the bends of E². */
-const LOOKS = 4
-/** How far beyond the last panel, in ln a, to look. */
+const LOOKS = 3
+/** How far beyond the last panel, in ln a, to look where what rules there neither accelerates nor decelerates. */
 const BEYOND = 60
+/** Exponent of E² at which ä = 0. */
+const COASTING = 2
 /** Farthest ln a at which densities are still doubles. */
 const FARTHEST = 700
 
@@ -55,7 +58,7 @@ function changesBetween(comparison: Comparison, model: Model, from: number, to: 
 }
 
 /**
- * Changes of the sign of ä, in order of a, from looks at every quarter of a panel: a pair nearer together can be missed.
+ * Changes of the sign of ä, in order of a, from looks at every third of a panel: a pair nearer together can be missed.
  */
 export function accelerationChanges(history: History): readonly Crossing[] {
   const looks = [...looksAlong(history.past).reverse(), { arm: history.past, N: 0 }, ...looksAlong(history.future)]
@@ -82,15 +85,13 @@ function looksAlong(arm: Arm): { arm: Arm; N: number }[] {
       looks.push({ arm, N: arm.direction * zone.distanceAt(from + ((to - from) * k) / LOOKS) })
   }
   const last = arm.edges[arm.edges.length - 1]
-  if (arm.tail) for (let k = 1; k <= BEYOND; k++) looks.push({ arm, N: arm.direction * (last + k) })
+  const undecided = arm.tail !== null && leadingExponent(arm.model, arm.direction) === COASTING
+  if (undecided) for (let k = 1; k <= BEYOND; k++) looks.push({ arm, N: arm.direction * (last + k) })
   return looks
 }
 
 /** ä/a in H₀². */
-const acceleration = (model: Model, N: number): number => {
-  const { value, first } = model.derivatives(N)
-  return value + 0.5 * first
-}
+const acceleration = (model: Model, N: number): number => model.derivatives(N).acceleration
 
 const MATTER: readonly Component['key'][] = ['matter']
 const RADIATION: readonly Component['key'][] = ['radiation', 'neutrino']

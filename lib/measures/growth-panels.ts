@@ -8,7 +8,7 @@
 import type { Zone } from '../history/zone'
 import type { Model } from '../model'
 import { energyRatio, logSlope } from '../neutrinos/energy'
-import { evaluate, NODE_COUNT, sumAtOne } from '../numerics/chebyshev'
+import { evaluate, NODE_COUNT, type Series, sumAtOne } from '../numerics/chebyshev'
 import { solvePair } from '../numerics/linear-pair'
 
 /** D and q = a² dD/dt at one place, and a bound on the relative error that both have gathered. */
@@ -23,8 +23,8 @@ interface GrowthPanel {
   readonly from: number
   readonly to: number
   /** Chebyshev series of D and q. */
-  readonly contrast: Float64Array
-  readonly flow: Float64Array
+  readonly contrast: Series
+  readonly flow: Series
   /** At its end. */
   readonly error: number
 }

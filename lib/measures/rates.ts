@@ -23,8 +23,8 @@ export function jerk(event: Event): number | Missing {
 
 const derivatives = ({ place }: Event) => place.arm.model.derivatives(place.N)
 
-/** ä/a in H₀²: (E²)′/2 + E². */
-export const accelerationAt = (event: Event): number => expansionAtEvent(event) + 0.5 * derivatives(event).first
+/** ä/a in H₀². */
+export const accelerationAt = (event: Event): number => derivatives(event).acceleration
 
 function ratio(value: number, e2: number): number | Missing {
   if (!(e2 > 0)) return AT_REST
@@ -37,7 +37,8 @@ export type Share = 'matter' | 'radiation' | 'neutrino' | 'curvature' | 'dark'
 /** Density of one component over the critical density at the event. */
 export function densityFraction(event: Event, share: Share): number | Missing {
   const { N, arm } = event.place
-  const density = arm.model.components.filter((one) => one.key === share).reduce((sum, one) => sum + one.density(N), 0)
+  let density = 0
+  for (const one of arm.model.components) if (one.key === share) density += one.density(N)
   return ratio(density, expansionAtEvent(event))
 }
 

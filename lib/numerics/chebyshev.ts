@@ -10,6 +10,10 @@ export const NODES: Float64Array = Float64Array.from({ length: NODE_COUNT }, (_,
   Math.cos((Math.PI * (k + 0.5)) / NODE_COUNT),
 )
 
+/** Coefficients of a series. Plain arrays are made and dropped faster than typed ones of this length. */
+export type Series = ArrayLike<number>
+const BLANK: readonly number[] = Array.from({ length: NODE_COUNT + 1 }, () => 0.5)
+
 const HALF = NODE_COUNT / 2
 
 /** Row j holds the weights that turn eight sums (even j) or differences (odd j) of mirrored samples into the coefficient of T_j. */
@@ -41,8 +45,8 @@ export function coefficientsInto(out: Float64Array, samples: Float64Array): void
  * Coefficients (17) of scale · ∫_{−1}^{x} of the series, from b_j = (c_{j−1} − c_{j+1})/2j.
  * The value at x = −1 is zero by the choice of b_0.
  */
-export function antiderivative(coefficients: Float64Array, scale: number): Float64Array {
-  const out = new Float64Array(NODE_COUNT + 1)
+export function antiderivative(coefficients: Series, scale: number): number[] {
+  const out = BLANK.slice()
   let constant = 0
   for (let j = 1; j <= NODE_COUNT; j++) {
     const before = j === 1 ? 2 * coefficients[0] : coefficients[j - 1]
@@ -55,14 +59,14 @@ export function antiderivative(coefficients: Float64Array, scale: number): Float
 }
 
 /** Sum of the series at 1: the integral over the whole panel when the series is an antiderivative from −1. */
-export function sumAtOne(coefficients: Float64Array): number {
+export function sumAtOne(coefficients: Series): number {
   let sum = 0
   for (let j = coefficients.length - 1; j >= 0; j--) sum += coefficients[j]
   return sum
 }
 
 /** Value of Σ c_j T_j(x) by Clenshaw's recurrence (Clenshaw 1955, MTAC 9, 118). */
-export function evaluate(coefficients: Float64Array, x: number): number {
+export function evaluate(coefficients: Series, x: number): number {
   let [b1, b2] = [0, 0]
   for (let j = coefficients.length - 1; j > 0; j--) {
     const b = coefficients[j] + 2 * x * b1 - b2
@@ -76,7 +80,7 @@ export function evaluate(coefficients: Float64Array, x: number): number {
  * x in [−1, 1] at which an increasing series has the value `target`; the nearer end where it has not.
  * Newton's steps with value and slope from one recurrence, kept inside a shrinking bracket; to the rounding of the series.
  */
-export function solveIncreasing(coefficients: Float64Array, target: number): number {
+export function solveIncreasing(coefficients: Series, target: number): number {
   let [low, high] = [-1, 1]
   const total = sumAtOne(coefficients)
   let x = Math.max(-1, Math.min(1, total > 0 ? (2 * target) / total - 1 : 0))
@@ -99,7 +103,7 @@ export function solveIncreasing(coefficients: Float64Array, target: number): num
 }
 
 /** Size of the last two coefficients relative to the largest: the series is resolved when this is near eps. */
-export function relativeTail(coefficients: Float64Array): number {
+export function relativeTail(coefficients: Series): number {
   let largest = 0
   for (let j = 0; j < NODE_COUNT; j++) largest = Math.max(largest, Math.abs(coefficients[j]))
   const last = Math.abs(coefficients[NODE_COUNT - 1]) + Math.abs(coefficients[NODE_COUNT - 2])

@@ -2,7 +2,7 @@
  * u′ = α v, v′ = β u on one Chebyshev panel, by Picard's iteration with spectral integration
  * (Clenshaw & Norton 1963, Comput. J. 6, 88; Trefethen, Approximation Theory and Approximation Practice, 2013, ch. 19).
  */
-import { antiderivative, coefficientsInto, evaluate, NODE_COUNT, NODES, sumAtOne } from './chebyshev'
+import { antiderivative, coefficientsInto, evaluate, NODE_COUNT, NODES, type Series, sumAtOne } from './chebyshev'
 
 /** Row k: weights of the samples in ∫ from −1 to NODES[k]. */
 const INTEGRATION: Float64Array = integrationMatrix()
@@ -13,8 +13,8 @@ const CONVERGED = 1e-14
 
 export interface Pair {
   /** Chebyshev series on the panel. */
-  readonly u: Float64Array
-  readonly v: Float64Array
+  readonly u: Series
+  readonly v: Series
   /** Size of the last two coefficients of both slopes, times the half width, over the value at the end. */
   readonly left: number
 }
@@ -72,7 +72,7 @@ function accumulate(out: Float64Array, start: number, half: number, rate: Float6
   return change === 0 ? 0 : change / largest
 }
 
-function seriesOf(rate: Float64Array, half: number, start: number): { series: Float64Array; left: number } {
+function seriesOf(rate: Float64Array, half: number, start: number): { series: number[]; left: number } {
   coefficientsInto(coefficients, rate)
   const series = antiderivative(coefficients, half)
   series[0] += start

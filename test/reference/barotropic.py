@@ -86,7 +86,27 @@ def one(Om, A, alpha, past, future):
         values['eventHorizon'] = integral(E2, mpf(0), inf, edge, rate, 1)
     return {'matter': Om, 'excess': A, 'alpha': float(alpha), 'values': {k: mp.nstr(v, 25) for k, v in values.items()}}
 
+def closed(Om, Ode, A, alpha):
+    """closed universe that turns round next to the edge u = 0: x = ln u, dt = e^x dx/(|rate| E), x = root + y^2"""
+    mp.dps = 150
+    Om, Ode, A, al = mpf(Om), mpf(Ode), mpf(A), mpf(alpha)
+    rate, power = 3 * A * (1 - al), 1 / (1 - al)
+    N = lambda x: (exp(x) - 1) / rate
+    E2 = lambda x: Om * exp(-3 * N(x)) + (1 - Om - Ode) * exp(-2 * N(x)) + Ode * exp(power * x)
+    low, high = mpf(-400), mpf(0)
+    for _ in range(520):
+        middle = (low + high) / 2
+        low, high = (middle, high) if E2(middle) < 0 else (low, middle)
+    root = (low + high) / 2
+    edges = [mpf(0)] + [mpf(k) / 4 for k in range(1, int(4 * sqrt(-root)) + 1)] + [sqrt(-root)]
+    time = quad(lambda y: 2 * y * exp(root + y * y) / (abs(rate) * sqrt(E2(root + y * y))) if y else mpf(0), edges)
+    mp.dps = 40
+    values = {'turnaroundScale': mp.nstr(exp(N(root)), 25), 'timeToTurnaround': mp.nstr(mp.re(time), 25)}
+    return {'matter': float(Om), 'dark': float(Ode), 'excess': float(A), 'alpha': float(al), 'values': values}
+
+CLOSED = [(1.0, 17.6, -0.009661675237793292, 0.8506860467605293), (0.3, 0.9, -0.02, 0.7), (0.3, 1.5, -0.1, -5.0), (0.3, 1.5, -0.1, 0.3)]
+
 if __name__ == '__main__':
-    out = [one(*case) for case in CASES]
+    out = [one(*case) for case in CASES] + [closed(*case) for case in CLOSED]
     path = os.path.join(os.path.dirname(os.path.abspath(__file__)), 'barotropic.json')
     with open(path, 'w') as file: json.dump(out, file, indent=1); file.write('\n')
