@@ -2,7 +2,7 @@
  * From the engine's units (time in 1/H₀, length in c/H₀, rate in H₀) to those of the page.
  * Units enter the numbers here and in the quantities' list, nowhere else.
  */
-import { JULIAN_YEAR, LIGHT_YEAR, PARSEC, SPEED_OF_LIGHT } from './constants'
+import { JULIAN_YEAR, PARSEC, SPEED_OF_LIGHT } from './constants'
 
 const MEGAPARSEC = 1e6 * PARSEC
 
@@ -13,4 +13,4 @@ export const hubbleTimeGyr = (h0: number): number => 1 / perSecond(h0) / (1e9 * 
 /** c/H₀ in Mpc. */
 export const hubbleLengthMpc = (h0: number): number => SPEED_OF_LIGHT / 1e3 / h0
 /** c/H₀ in Gly (10⁹ Julian light years): the same number as 1/H₀ in Gyr. */
-export const hubbleLengthGly = (h0: number): number => SPEED_OF_LIGHT / perSecond(h0) / (1e9 * LIGHT_YEAR)
+export const hubbleLengthGly = hubbleTimeGyr
