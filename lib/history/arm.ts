@@ -79,11 +79,11 @@ function march(model: Model, direction: Direction, end: Search): { panels: reado
       time += panel.time.total
       conformal += panel.conformal.total
       const adds = Math.max(panel.time.total / time, panel.conformal.total / conformal)
-      if (kind === 'edge') return adds < NEGLIGIBLE && zone.distanceAt(edge + 1) === zone.distanceAt(zone.to)
-      if (kind === 'final' && adds < NEGLIGIBLE) stopped = 'spent'
-      else if (kind === 'last' && adds < NEGLIGIBLE && (adds < NOTHING || lasts(model, direction, edge)))
-        stopped = 'spent'
-      else if (end.kind !== 'root' && (time > FOR_EVER || conformal > LARGEST)) stopped = 'for ever'
+      const gone = adds < NEGLIGIBLE
+      if (end.kind !== 'root' && (time > FOR_EVER || conformal > LARGEST)) stopped = 'for ever'
+      else if (kind === 'edge') return gone && zone.distanceAt(edge + 1) === zone.distanceAt(zone.to)
+      else if (kind === 'final' && gone) stopped = 'spent'
+      else if (kind === 'last' && gone && (adds < NOTHING || lasts(model, direction, edge))) stopped = 'spent'
       else if (zone.to === FARTHEST && tailAt(model, direction, direction * edge) !== null) stopped = 'tail'
       return stopped !== null
     }

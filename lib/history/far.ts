@@ -10,10 +10,16 @@ export function integralOfExp(log: (x: number) => number, from: number, to = Num
   let [x, width, sum] = [from, 1, 0]
   for (let tried = 0; tried < MOST_PANELS && x < to; tried++) {
     const half = Math.min(width, to - x) / 2
-    for (let k = 0; k < NODE_COUNT; k++) samples[k] = Math.exp(log(x + half * (1 + NODES[k])))
+    let largest = 0
+    for (let k = 0; k < NODE_COUNT; k++) {
+      const exponent = log(x + half * (1 + NODES[k]))
+      samples[k] = Math.exp(exponent)
+      largest = Math.max(largest, Math.abs(exponent))
+    }
     coefficientsInto(coefficients, samples)
     const tail = relativeTail(coefficients)
-    if (tail > 1e-14 && half > 1e-9) {
+    // Rounding of the exponent shows in the last coefficients.
+    if (tail > 1e-14 + 8 * Number.EPSILON * largest && half > 1e-9) {
       width = half
       continue
     }

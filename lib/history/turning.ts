@@ -66,7 +66,10 @@ function atEdge(model: Model, edge: Edge, direction: Direction): Search {
   if (terms.plus.length + terms.minus.length === 0) {
     return edge.kind === 'singular' ? { kind: 'singular', N: edge.N } : { kind: 'double', N: edge.N }
   }
-  if (logSum(terms.plus, edge.N) - logSum(terms.minus, edge.N) <= NOISE) return rootAt(model, edge.N, false)
+  if (logSum(terms.plus, edge.N) - logSum(terms.minus, edge.N) <= NOISE) {
+    const lost = logSum(terms.minus, edge.N) < Math.log(1e-290)
+    return lost ? { kind: 'none', farRoot: edge.N } : rootAt(model, edge.N, false)
+  }
   if (edge.kind === 'singular') return { kind: 'singular', N: edge.N }
   return stepsFrom(model, terms, direction, edge.N, Number.POSITIVE_INFINITY) ?? NONE
 }
