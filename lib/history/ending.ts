@@ -20,7 +20,11 @@ export function endOf(future: Arm, home: Arm): End {
   }
   if (future.end.farRoot !== null) {
     const because = 'E² vanishes at a scale factor that is beyond the range of floating-point numbers.'
-    return { kind: 'crunch', time: null, scale: 0, turnaround: null, proven: true, because }
+    if (home.end.kind === 'none')
+      return { kind: 'crunch', time: null, scale: 0, turnaround: null, proven: true, because }
+    const kind = home.end.kind === 'root' ? 'oscillating' : home.end.kind === 'double' ? 'static' : 'singular'
+    const scale = kind === 'oscillating' ? null : scaleAt(home.end.N)
+    return { kind, time: null, scale, turnaround: null, proven: true, because }
   }
   const [kind, because] = expanding(future)
   const time = Number.isFinite(future.time.total) ? future.time.total : null

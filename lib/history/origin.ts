@@ -35,9 +35,10 @@ export function originOf(past: Arm, back: Arm): Origin {
 
 function turning(past: Arm, back: Arm, N: number, certain: boolean): Origin {
   const at = { time: -past.time.total, scale: Math.exp(N), proven: certain }
-  if (back.end.kind !== 'root') {
+  const swings = back.end.kind === 'root' || (back.end.kind === 'none' && back.end.farRoot !== null)
+  if (!swings) {
     return { kind: 'bounce', ...at, because: 'E² vanishes in the past: before that moment the universe contracted.' }
   }
   const because = 'E² vanishes at a smaller and at a larger scale factor, and the universe swings between them.'
-  return { kind: 'oscillating', ...at, proven: certain && back.end.certain, because }
+  return { kind: 'oscillating', ...at, proven: certain && (back.end.kind !== 'root' || back.end.certain), because }
 }
