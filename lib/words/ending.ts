@@ -15,7 +15,7 @@ export function endsInTime(kind: EndKind): boolean {
 
 export function endClause({ end }: Ended): string {
   const inTime = end.time === null ? 'in the infinite future' : `in ${duration(end.time)}`
-  const scale = end.scale === null ? '' : `${size(end.scale)} times today’s size`
+  const scale = end.scale === null ? 'a size beyond all numbers' : `${size(end.scale)} times today’s size`
   const turn = turnClause({ end })
   switch (end.kind) {
     case 'crunch':

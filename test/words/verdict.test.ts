@@ -22,6 +22,12 @@ describe('a verdict', () => {
     )
   })
 
+  it('leaves no gap where the size at the end is no double', () => {
+    expect(text({ end: { kind: 'static', time: null, scale: null } })).toContain(
+      'comes to rest at a size beyond all numbers',
+    )
+  })
+
   it('tells when galaxies come apart before a rip', () => {
     const end = { kind: 'rip', time: 40.4 } as const
     expect(text({ end, moments: [['unbinding-galaxy', 40.34]] })).toContain(
