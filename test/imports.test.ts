@@ -12,6 +12,7 @@ const ORDER = [
   'neutrinos',
   'dark-energy',
   'scenario',
+  'components',
   'model',
   'history',
   'measures',

@@ -1,6 +1,7 @@
 /** What a universe is made of at a time, and whether its expansion speeds up then. */
+
+import type { Component } from '../components'
 import { type Event, eventAtTime, isEvent } from '../history/event'
-import type { Component } from '../model'
 import type { Solution } from '../solve'
 import { hubbleTimeGyr } from '../units'
 

@@ -1,6 +1,8 @@
 /** Where a history goes, decided by the first root of E² ahead or by the component that rules as a → ∞. */
+
+import type { Component } from '../components'
 import type { Logarithmic } from '../dark-energy/law'
-import { type Component, logarithmicIn } from '../model'
+import { logarithmicIn } from '../model'
 import type { Arm } from './arm'
 import type { End, EndKind } from './outcome'
 import { explodes, exponentIn, leadingExponent } from './tail'

@@ -3,8 +3,10 @@
  * With 1/E = e^(κ₀D)/E₁ · (1 − ½ Σ δ_i e^(−p_i D)), D the distance in ln a beyond the panel,
  * ∫ = 1/E₁ [I(κ) − ½ Σ δ_i I(κ + p_i)], I(κ) = (1 − e^(−κD))/κ. The next order is ⅜ δ² < 2e-18 of the leading one.
  */
+
+import { asymptoteOf, type Component } from '../components'
 import type { Logarithmic } from '../dark-energy/law'
-import { asymptoteOf, type Component, logarithmicIn, type Model } from '../model'
+import { logarithmicIn, type Model } from '../model'
 import { integralOfExp } from './far'
 import type { Direction } from './turning'
 

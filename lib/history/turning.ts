@@ -7,8 +7,9 @@
  * and one negative term this is Newton's step on a convex function. Where D ≤ 0 on all that is left, there is no root.
  */
 
+import type { Term } from '../components'
 import type { Edge } from '../dark-energy/law'
-import { expansionAt, logarithmicIn, type Model, type Term } from '../model'
+import { expansionAt, logarithmicIn, type Model } from '../model'
 
 export type Direction = 1 | -1
 

@@ -1,8 +1,10 @@
 /** Moments when one thing overtakes another: sign changes of a function of ln a along the expansion that holds today. */
+
+import type { Component } from '../components'
 import type { Arm } from '../history/arm'
 import type { History } from '../history/history'
 import { leadingExponent } from '../history/tail'
-import type { Component, Model } from '../model'
+import type { Model } from '../model'
 import { brent } from '../numerics/roots'
 
 /** A sign change at N = ln a; `rising` when the function goes from negative to positive as a grows. */

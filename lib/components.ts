@@ -1,0 +1,132 @@
+/**
+ * The components of E²: what each is today, how it varies, and what it tends to. Every one is Ω e^(−∫n dN).
+ */
+import type { Asymptote, Law, Part } from './dark-energy/law'
+import { energyRatio, energyRatioChange, logSlope, logSlopeDerivative } from './neutrinos/energy'
+import { relativeBend } from './numerics/bend'
+import { expm2 } from './numerics/exponential'
+import type { Budget } from './scenario/budget'
+import type { MassiveState } from './scenario/radiation'
+
+/** A term of E² that keeps its sign. */
+export interface Term {
+  /** Carries the sign. */
+  readonly omega: number
+  /** ln |Ω f| at N. */
+  logSize(N: number): number
+  /** Bounds of the exponent n on [from, to]. */
+  exponentRange(from: number, to: number): readonly [number, number]
+}
+
+/** One component of E², for arguments about signs and growth. Its Ω today carries the sign unless it has terms of both. */
+export interface Component extends Term {
+  readonly key: 'radiation' | 'matter' | 'neutrino' | 'curvature' | 'dark'
+  /** Ω f at N. */
+  density(N: number): number
+  /** Ω f(N + d) − Ω f(N) − d Ω f′(N), without cancellation for small d. */
+  bend(N: number, d: number): number
+  /** What it is the sum of where it changes sign outwards; null in a direction where it does not, absent where it never does. */
+  readonly terms?: (direction: 1 | -1) => readonly Term[] | null
+  readonly past: Asymptote
+  readonly future: Asymptote
+}
+
+export const asymptoteOf = (one: Component, direction: 1 | -1): Asymptote => (direction > 0 ? one.future : one.past)
+
+/** Ω today of what thins out by one law each. */
+export interface Amounts {
+  readonly radiation: number
+  readonly matter: number
+  readonly curvature: number
+  readonly dark: number
+}
+
+export const amountsOf = (budget: Budget): Amounts => ({
+  radiation: budget.photons + budget.masslessNeutrinos,
+  matter: budget.coldMatter,
+  curvature: budget.curvature,
+  dark: budget.dark,
+})
+
+/** Dark energy that thins out exactly like radiation, matter or curvature counts as that. */
+export function merged(amounts: Amounts, { exponent }: Law): Amounts {
+  const { radiation, matter, curvature, dark } = amounts
+  if (exponent === 4) return { radiation: radiation + dark, matter, curvature, dark: 0 }
+  if (exponent === 3) return { radiation, matter: matter + dark, curvature, dark: 0 }
+  if (exponent === 2) return { radiation, matter, curvature: curvature + dark, dark: 0 }
+  return amounts
+}
+
+export function componentsOf(amounts: Amounts, budget: Budget, law: Law): readonly Component[] {
+  const all: Component[] = [
+    powerComponent('radiation', amounts.radiation, 4),
+    powerComponent('matter', amounts.matter, 3),
+    powerComponent('curvature', amounts.curvature, 2),
+    darkComponent(amounts.dark, law),
+    ...budget.states.map(neutrinoComponent),
+  ]
+  return all.filter((one) => one.omega !== 0)
+}
+
+function powerComponent(key: Component['key'], omega: number, exponent: number): Component {
+  const logCoefficient = Math.log(Math.abs(omega))
+  const range = [exponent, exponent] as const
+  const asymptote = { kind: 'power', exponent, logCoefficient, settled: 0 } as const
+  return {
+    key,
+    omega,
+    logSize: (N) => logCoefficient - exponent * N,
+    exponentRange: () => range,
+    density: (N) => omega * Math.exp(-exponent * N),
+    bend: (N, d) => omega * Math.exp(-exponent * N) * expm2(-exponent * d),
+    past: asymptote,
+    future: asymptote,
+  }
+}
+
+function darkComponent(omega: number, law: Law): Component {
+  const log = Math.log(Math.abs(omega))
+  const scaled = (one: Asymptote): Asymptote =>
+    one.kind === 'power' ? { ...one, logCoefficient: one.logCoefficient + log } : one
+  return {
+    key: 'dark',
+    omega,
+    logSize: (N) => log + law.logDensity(N),
+    exponentRange: law.exponentRange,
+    density: (N) => omega * law.density(N),
+    bend: (N, d) => omega * law.bend(N, d),
+    terms: law.parts && ((direction) => law.parts?.(direction)?.map((part) => termOf(omega, part)) ?? null),
+    past: scaled(law.past),
+    future: scaled(law.future),
+  }
+}
+
+function termOf(darkEnergy: number, { factor, logDensity, exponentRange }: Part): Term {
+  const omega = darkEnergy * factor
+  const log = Math.log(Math.abs(omega))
+  return { omega, logSize: (N) => log + logDensity(N), exponentRange }
+}
+
+/** The exponent of a massive state falls from 4 to 3, since the logarithmic slope of its energy ratio rises from 0 to 1. */
+function neutrinoComponent(state: MassiveState): Component {
+  const y = (N: number) => state.y * Math.exp(N)
+  const logMassless = Math.log(state.masslessDensity)
+  const cold = Math.log(1e9 / state.y)
+  const logCold = logMassless + Math.log(energyRatio(1e20) * 1e-20 * state.y)
+  const density = (N: number): number =>
+    N > cold ? Math.exp(logCold - 3 * N) : state.masslessDensity * energyRatio(y(N)) * Math.exp(-4 * N)
+  // The energy ratio is 1 + 0.07 y² at small y and (y/3.15)(1 + 6.5/y²) at large y: settled where the corrections are below 1e-17.
+  return {
+    key: 'neutrino',
+    omega: state.density,
+    // Also where y itself is no double any more.
+    logSize: (N) => (N > cold ? logCold - 3 * N : logMassless + Math.log(energyRatio(y(N))) - 4 * N),
+    density,
+    bend: (N, d) =>
+      density(N) *
+      relativeBend(Math.log1p(energyRatioChange(y(N), d)) - 4 * d, d, (t) => -logSlopeDerivative(y(N + t))),
+    exponentRange: (from, to) => [4 - logSlope(y(to)), 4 - logSlope(y(from))],
+    past: { kind: 'power', exponent: 4, logCoefficient: logMassless, settled: Math.log(1e-8 / state.y) },
+    future: { kind: 'power', exponent: 3, logCoefficient: logCold, settled: cold },
+  }
+}
