@@ -19,8 +19,9 @@ export function transverseDistance(chi: number, curvature: number): number {
 
 /** Comoving volume over the whole sky out to χ, in (c/H₀)³; in a closed universe it stops at the whole sphere 2π²R³. */
 export function comovingVolume(chi: number, curvature: number): number {
+  if (curvature === 0) return (4 * Math.PI * chi ** 3) / 3
   const reach = Math.min(chi, antipode(curvature))
-  const angle = curvature === 0 ? 0 : reach / curvatureRadius(curvature)
+  const angle = reach / curvatureRadius(curvature)
   const sign = Math.sign(-curvature)
   if (angle < 0.7) return 4 * Math.PI * reach ** 3 * smallAngleVolume(sign * angle * angle)
   const radius = curvatureRadius(curvature)

@@ -5,18 +5,17 @@ import { type Missing, missing } from './outcome'
 const AT_REST = missing('the expansion stands still here, so a ratio to H² is not defined')
 const OUT_OF_RANGE = missing('the densities here are outside the range of floating-point numbers')
 
-/** H/H₀, with its sign. */
-export const hubbleRate = (event: Event): number => event.sign * Math.sqrt(Math.max(0, expansionAtEvent(event)))
+/** H/H₀, with its sign. Here and below `e2` is E² at the event, for callers who know it already. */
+export const hubbleRate = (event: Event, e2 = expansionAtEvent(event)): number =>
+  event.sign * Math.sqrt(Math.max(0, e2))
 
 /** q = −ä a/ȧ². */
-export function deceleration(event: Event): number | Missing {
-  const e2 = expansionAtEvent(event)
+export function deceleration(event: Event, e2 = expansionAtEvent(event)): number | Missing {
   return ratio(-0.5 * derivatives(event).first - e2, e2)
 }
 
 /** j = a² (d³a/dt³)/ȧ³. */
-export function jerk(event: Event): number | Missing {
-  const e2 = expansionAtEvent(event)
+export function jerk(event: Event, e2 = expansionAtEvent(event)): number | Missing {
   const { first, second } = derivatives(event)
   return ratio(e2 + 1.5 * first + 0.5 * second, e2)
 }
@@ -35,11 +34,11 @@ function ratio(value: number, e2: number): number | Missing {
 export type Share = 'matter' | 'radiation' | 'neutrino' | 'curvature' | 'dark'
 
 /** Density of one component over the critical density at the event. */
-export function densityFraction(event: Event, share: Share): number | Missing {
+export function densityFraction(event: Event, share: Share, e2 = expansionAtEvent(event)): number | Missing {
   const { N, arm } = event.place
   let density = 0
   for (const one of arm.model.components) if (one.key === share) density += one.density(N)
-  return ratio(density, expansionAtEvent(event))
+  return ratio(density, e2)
 }
 
 /** w of dark energy at the event, by the law that rules there. */

@@ -13,7 +13,7 @@ const share = (key: ColumnKey, symbol: string, label: string, meaning: string, o
   meaning,
   formula: `${symbol} = ρ/ρ_c`,
   source: FRIEDMANN,
-  value: (_, instant) => densityFraction(instant, of),
+  value: (_, instant) => densityFraction(instant, of, instant.expansion),
 })
 
 export const CONTENT_COLUMNS: readonly Column[] = [

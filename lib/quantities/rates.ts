@@ -16,7 +16,7 @@ export const RATE_COLUMNS: readonly Column[] = [
     meaning: 'Rate of expansion; negative while the universe contracts.',
     formula: 'H = ȧ/a = H_0 E(a)',
     source: FRIEDMANN,
-    value: ({ scenario }, instant) => scenario.h0 * hubbleRate(instant),
+    value: ({ scenario }, instant) => scenario.h0 * hubbleRate(instant, instant.expansion),
   },
   {
     key: 'deceleration',
@@ -27,7 +27,7 @@ export const RATE_COLUMNS: readonly Column[] = [
     meaning: 'Deceleration parameter; negative while the expansion accelerates.',
     formula: 'q = −ä a/ȧ²',
     source: FRIEDMANN,
-    value: (_, instant) => deceleration(instant),
+    value: (_, instant) => deceleration(instant, instant.expansion),
   },
   {
     key: 'jerk',
@@ -38,7 +38,7 @@ export const RATE_COLUMNS: readonly Column[] = [
     meaning: 'Third derivative of the scale factor; 1 for matter and a cosmological constant in flat space.',
     formula: 'j = a² (d³a/dt³)/ȧ³',
     source: 'Visser 2004, Class. Quantum Grav. 21, 2603',
-    value: (_, instant) => jerk(instant),
+    value: (_, instant) => jerk(instant, instant.expansion),
   },
 ]
 
