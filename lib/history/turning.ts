@@ -93,16 +93,19 @@ function stepsFrom(
 ): Search | null {
   if (minus.length === 0) return null
   const nearest = Number.isFinite(limit) ? 4 * Number.EPSILON * Math.max(1, limit) : 0
+  const steady = [...plus, ...minus].every(isSteady)
   let [N, length] = [start, 1]
   for (let step = 0; step < MOST_STEPS; step++) {
-    const h = logSum(plus, N) - logSum(minus, N)
+    const total = logSum(plus, N)
+    const h = total - logSum(minus, N)
     if (Number.isNaN(h)) return null
     if (h <= NOISE) return settle(model, N, direction)
     const left = limit - Math.abs(N)
     if (left <= nearest) return null
-    if (safeStep(plus, minus, N, direction, h, left) >= left) return null
+    const whole = h / closingRate(plus, minus, N, direction, total, left)
+    if (whole >= left) return null
     length = Math.min(length, left / 2)
-    const advance = Math.min(safeStep(plus, minus, N, direction, h, length), length)
+    const advance = steady ? whole : Math.min(h / closingRate(plus, minus, N, direction, total, length), length)
     if (advance <= Number.EPSILON * Math.abs(N)) return settle(model, N, direction)
     N += direction * advance
     length = 2 * advance
@@ -110,37 +113,52 @@ function stepsFrom(
   return settle(model, N, direction)
 }
 
-const logSum = (terms: readonly Term[], N: number): number => {
-  const logs = terms.map((one) => one.logSize(N))
-  const largest = Math.max(...logs)
-  if (!Number.isFinite(largest)) return largest
-  return largest + Math.log(logs.reduce((sum, one) => sum + Math.exp(one - largest), 0))
+function logSum(terms: readonly Term[], N: number): number {
+  let [largest, sum] = [Number.NEGATIVE_INFINITY, 0]
+  for (const one of terms) {
+    const log = one.logSize(N)
+    if (log === Number.POSITIVE_INFINITY || Number.isNaN(log)) return log
+    if (log === Number.NEGATIVE_INFINITY) continue
+    sum = log > largest ? sum * Math.exp(largest - log) + 1 : sum + Math.exp(log - largest)
+    largest = Math.max(largest, log)
+  }
+  return largest === Number.NEGATIVE_INFINITY ? largest : largest + Math.log(sum)
 }
 
-/** A distance within which h cannot reach zero, given that exponents are bounded on the next `length`. */
-function safeStep(
+/** Is the exponent the same at all times, so that a certificate for any step is one for all? */
+function isSteady({ exponentRange }: Term): boolean {
+  const [low, high] = exponentRange(Number.NEGATIVE_INFINITY, Number.POSITIVE_INFINITY)
+  return low === high
+}
+
+/**
+ * The fastest that h = ln P − ln M can fall outwards, given that exponents are bounded on the next `length`: no root lies within
+ * h over this. Zero where none lies on all of it, Infinity where nothing is known.
+ */
+function closingRate(
   plus: readonly Term[],
   minus: readonly Term[],
   N: number,
   direction: Direction,
-  h: number,
+  total: number,
   length: number,
 ): number {
   const [from, to] = direction > 0 ? [N, N + length] : [N - length, N]
-  // Rate at which a term shrinks outwards: n going up, −n going down.
-  const shrink = (one: Term, worst: 'fastest' | 'slowest'): number => {
-    const [low, high] = one.exponentRange(from, to)
-    const [slow, fast] = direction > 0 ? [low, high] : [-high, -low]
-    return worst === 'fastest' ? fast : slow
-  }
-  const total = logSum(plus, N)
-  const fall = plus.reduce((sum, one) => {
+  // Rate at which a term shrinks outwards: n going up, −n going down; at its fastest for P, at its slowest for M.
+  let fall = 0
+  for (const one of plus) {
     const weight = Math.exp(one.logSize(N) - total)
-    return weight === 0 ? sum : sum + weight * shrink(one, 'fastest')
-  }, 0)
-  const rise = Math.max(...minus.map((one) => -shrink(one, 'slowest')))
+    if (weight === 0) continue
+    const [low, high] = one.exponentRange(from, to)
+    fall += weight * (direction > 0 ? high : -low)
+  }
+  let rise = Number.NEGATIVE_INFINITY
+  for (const one of minus) {
+    const [low, high] = one.exponentRange(from, to)
+    rise = Math.max(rise, direction > 0 ? -low : high)
+  }
   const closing = fall + rise
-  return closing <= 0 ? Number.POSITIVE_INFINITY : Number.isNaN(closing) ? 0 : h / closing
+  return Number.isNaN(closing) ? Number.POSITIVE_INFINITY : Math.max(0, closing)
 }
 
 /** The certified steps have come to rest at N: a simple root, or a double one, is here. */
