@@ -1,19 +1,6 @@
 /** The content policy: it stops what was not meant, and nothing that was. */
-import { expect, type Page, test } from '@playwright/test'
-
-/** Collects whatever the browser refuses or reports as an error from here on. */
-async function complaints(page: Page): Promise<string[]> {
-  const heard: string[] = []
-  page.on('console', (message) => message.type() === 'error' && heard.push(message.text()))
-  page.on('pageerror', (error) => heard.push(error.message))
-  await page.exposeFunction('refused', (what: string) => heard.push(what))
-  await page.addInitScript(() => {
-    document.addEventListener('securitypolicyviolation', ({ violatedDirective, blockedURI }) =>
-      (globalThis as unknown as { refused(what: string): void }).refused(`${violatedDirective} ${blockedURI}`),
-    )
-  })
-  return heard
-}
+import { expect, test } from '@playwright/test'
+import { complaints } from './live'
 
 for (const path of ['/', '/?s=matter:0.3,eos:constant,w:-1.2', '/?s=matter:none', '/nothing-here']) {
   test(`${path} runs its own scripts and is refused nothing`, async ({ page }) => {
