@@ -19,17 +19,20 @@ const { ensureBuilt } = await import('./setup/build.mjs')
 const { ensureChromium } = await import('./setup/chromium.mjs')
 const { probePort } = await import('./setup/port.mjs')
 const { atLeastOneFailed, closingLine, sum, tallyPlaywright, tallyVitest } = await import('./setup/tally.mjs')
+const { failuresOfPlaywright, failuresOfVitest } = await import('./setup/failures.mjs')
 
 /** @typedef {import('./setup/tally.mjs').Tally} Tally */
 
 const FAILED = { passed: 0, failed: 1, skipped: 0 }
 const NOTHING = { passed: 0, failed: 0, skipped: 0 }
+/** @type {string[]} */
+const failures = []
 const reports = mkdtempSync(join(tmpdir(), 'longhence-'))
 
 /** @returns {Tally} */
 function check() {
   const [command, ...args] = npmCommand(process.env)
-  return run(command, [...args, 'run', 'check']) === 0 ? NOTHING : FAILED
+  return run(command, [...args, 'run', 'check']) === 0 ? NOTHING : failed('failed: types, lint or format')
 }
 
 /** @returns {Tally} */
@@ -37,7 +40,7 @@ function unitTests() {
   const report = join(reports, 'unit.json')
   const args = ['run', '--config', 'test/vitest.config.ts', '--reporter=default', '--reporter=json']
   const code = runNode('vitest/vitest.mjs', [...args, `--outputFile.json=${report}`])
-  return atLeastOneFailed(code === 0, read(report, tallyVitest))
+  return atLeastOneFailed(code === 0, read(report, tallyVitest, failuresOfVitest))
 }
 
 /** @returns {Tally} */
@@ -47,8 +50,7 @@ function build() {
     return NOTHING
   } catch (error) {
     if (!(error instanceof Refusal)) throw error
-    console.error(error.message)
-    return FAILED
+    return failed(error.message)
   }
 }
 
@@ -63,20 +65,28 @@ async function browserTests(chromium) {
     PLAYWRIGHT_JSON_OUTPUT_FILE: report,
     PORT: String(await probePort(0)),
   })
-  return atLeastOneFailed(code === 0, read(report, tallyPlaywright))
+  return atLeastOneFailed(code === 0, read(report, tallyPlaywright, failuresOfPlaywright))
 }
 
 /**
  * @param {string} file
  * @param {(report: any) => Tally} tally
+ * @param {(report: any) => string[]} told
  */
-function read(file, tally) {
+function read(file, tally, told) {
   try {
-    return tally(JSON.parse(readFileSync(file, 'utf8')))
+    const report = JSON.parse(readFileSync(file, 'utf8'))
+    failures.push(...told(report))
+    return tally(report)
   } catch (error) {
-    console.error(`No report of the tests: ${error instanceof Error ? error.message : error}`)
-    return FAILED
+    return failed(`No report of the tests: ${error instanceof Error ? error.message : error}`)
   }
+}
+
+/** @param {string} why */
+function failed(why) {
+  failures.push(why)
+  return FAILED
 }
 
 try {
@@ -87,6 +97,8 @@ try {
   // Without a build there is nothing to browse, and the failed build is counted.
   tallies.push(built, built.failed > 0 ? NOTHING : await browserTests(chromium))
   const total = sum(tallies)
+  // Once more at the end, where the first look goes.
+  for (const failure of failures) console.log(failure)
   console.log(closingLine(total))
   process.exitCode = total.failed > 0 || total.passed === 0 ? 1 : 0
 } catch (error) {
