@@ -48,7 +48,7 @@ function download(scenarios: readonly Scenario[], tables: readonly Table[], orde
   }
   return {
     mediaType: format.mediaType,
-    fileName: fileName(names.length > 0 ? names : ['table'], format.key),
+    fileName: fileName(names.length > 0 ? names : ['table'], format.extension),
     pieces: () => format.pieces({ provenance, columns, tables }),
   }
 }

@@ -6,6 +6,7 @@ const END = '\r\n'
 
 export const CSV: Format = {
   key: 'csv',
+  extension: 'csv',
   label: 'CSV',
   mediaType: 'text/csv; charset=utf-8; header=present',
   mostRows: MOST_ROWS,

@@ -21,8 +21,10 @@ export interface Sheet {
 }
 
 export interface Format {
-  /** Name in addresses, and extension of the file. */
+  /** Name in addresses. */
   readonly key: string
+  /** Of the file. */
+  readonly extension: string
   readonly label: string
   readonly mediaType: string
   /** Most rows of a scenario. */

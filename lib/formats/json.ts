@@ -4,6 +4,7 @@ import { type Format, MOST_ROWS, type Sheet } from './format'
 
 export const JSON_FORMAT: Format = {
   key: 'json',
+  extension: 'json',
   label: 'JSON',
   mediaType: 'application/json',
   mostRows: MOST_ROWS,

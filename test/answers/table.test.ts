@@ -126,7 +126,7 @@ describe('what is refused', () => {
     expect(problemsOf(ask, `s=h0:70&${query}`)).toMatchObject([{ parameter, value, scenario: null }])
   })
   test('the formats that there are stand in the problem', () => {
-    expect(problemsOf(ask, 'format=xls')[0].allowed).toMatch(/^one of csv, json/)
+    expect(problemsOf(ask, 'format=xls')[0].allowed).toMatch(/^one of csv, json, votable, latex/)
   })
 })
 

@@ -2,6 +2,8 @@ import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
 import { CSV, textCell } from '../../lib/formats/csv'
 import type { Sheet } from '../../lib/formats/format'
+import { needs, run } from '../tools'
+import { anyRows } from './sheet'
 
 const provenance = { version: '1', engine: '1', page: '/', data: '/api/table' }
 const columns = [
@@ -50,4 +52,20 @@ test('numbers read back to the same doubles', () => {
       expect(Number(cell)).toBe(x + 0)
     }),
   )
+})
+
+const READ = `
+import csv, json
+with open('a.csv', newline='', encoding='utf-8') as file:
+    lines = [line for line in file if not line.startswith('#')]
+head, *rows = csv.reader(lines)
+assert head == ['x', 'y'], head
+print(json.dumps([[float(cell) if cell else None for cell in row] for row in rows]))
+`
+
+test("Python's csv module reads the same doubles", (context) => {
+  needs(context, 'python3')
+  const rows = fc.sample(anyRows, { numRuns: 20, seed: 2 }).flat()
+  const { said } = run('python3', ['-c', READ], { 'a.csv': written(sheet(rows)) })
+  expect(JSON.parse(said)).toEqual(rows)
 })
