@@ -6,6 +6,8 @@ const config = {
   // Types are held by `npm run check`, so that a mistake in a test keeps nobody from starting the server.
   typescript: { ignoreBuildErrors: true },
   reactStrictMode: true,
+  // They read files beside their own, and one is no JavaScript: not to be bundled.
+  serverExternalPackages: ['@resvg/resvg-js', 'pdfkit'],
   images: { unoptimized: true },
 }
 
