@@ -18,13 +18,14 @@ export default async function Page(props: Props) {
 }
 
 /** Once for a request: the page and its metadata read the same. */
-const explorerOf = cache((codes: string, focus: string | undefined, theme: string | undefined) =>
-  explorer({ codes: JSON.parse(codes), focus, theme }),
+const explorerOf = cache((codes: string, keys: string) =>
+  explorer({ codes: JSON.parse(codes), keys: new Map(JSON.parse(keys)) }),
 )
 
 async function read({ searchParams }: Props): Promise<View> {
-  const { s, focus, theme } = await searchParams
-  return explorerOf(JSON.stringify(all(s)), all(focus)[0], all(theme)[0])
+  const { s, ...others } = await searchParams
+  const keys = Object.entries(others).map(([key, value]) => [key, all(value)[0] ?? ''])
+  return explorerOf(JSON.stringify(all(s)), JSON.stringify(keys))
 }
 
 function all(value: string | string[] | undefined): readonly string[] {

@@ -1,11 +1,12 @@
 /** Asks the server for what an address shows. */
 import type { Explorer } from '../../lib/answers/explorer'
+import { PLACE_KEYS } from '../../lib/words/place'
 
 /** What of an address the answer depends on. */
 export function askedOf(search: string): string {
   const query = new URLSearchParams(search)
   const asked = new URLSearchParams(query.getAll('s').map((code) => ['s', code]))
-  for (const key of ['focus', 'theme']) {
+  for (const key of PLACE_KEYS) {
     const value = query.get(key)
     if (value !== null) asked.set(key, value)
   }

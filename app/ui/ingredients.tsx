@@ -12,7 +12,7 @@ interface Props {
 
 /** The parameters of the scenario in focus; the others travel along unseen. */
 export function Ingredients({ desk, live }: Props) {
-  const { form, scenarios, place } = desk
+  const { form, scenarios, place, placeFields } = desk
   const editing = useEditing(desk)
   return (
     <section className="ingredients" aria-labelledby="ingredients">
@@ -30,8 +30,9 @@ export function Ingredients({ desk, live }: Props) {
         {scenarios.map((one) => (
           <input key={one.slot} type="hidden" name="s" value={one.plainCode} />
         ))}
-        <input type="hidden" name="focus" value={place.focus + 1} />
-        {place.theme && <input type="hidden" name="theme" value={place.theme} />}
+        {placeFields.map(([key, value]) => (
+          <input key={key} type="hidden" name={key} value={value} />
+        ))}
         {form.hidden.map(({ name, value }) => (
           <input key={name} type="hidden" name={name} value={value} />
         ))}

@@ -4,25 +4,25 @@ import { problemsOf } from '../scenario/problems'
 import { readQuery } from '../scenario/query'
 import type { Reading } from '../scenario/scenario'
 import { linkQuery } from '../scenario/write'
-import { placeKeys, readPlace } from '../words/link'
-import { type Explorer, explorer } from './explorer'
+import { PLACE_KEYS, placeKeys, readPlace } from '../words/place'
+import { type Asked, type Explorer, explorer } from './explorer'
 import { readKeys, SCENARIO } from './keys'
 import type { Pairs, Question } from './question'
 
 export function askExplorer(pairs: Pairs): Reading<Question<Explorer>> {
-  const { codes, values, faults } = readKeys(pairs, ['focus', 'theme'])
+  const { codes, values, faults } = readKeys(pairs, PLACE_KEYS)
   if (faults.length > 0) return { ok: false, problems: problemsOf(faults, null) }
-  const asked = { codes, focus: values.get('focus'), theme: values.get('theme') }
+  const asked = { codes, keys: values }
   return { ok: true, value: { canonical: canonicalOf(asked), answer: () => ({ ok: true, value: explorer(asked) }) } }
 }
 
 /** No scenario at all stays apart from the scenarios of the demo: it has a title. */
-function canonicalOf({ codes, focus, theme }: Parameters<typeof explorer>[0]): string {
+function canonicalOf({ codes, keys }: Asked): string {
   const reading = readQuery(codes)
   const count = reading.ok ? reading.value.length : codes.length
   const queries =
     reading.ok && codes.length > 0
       ? [linkQuery(reading.value)]
       : codes.map((code) => `${SCENARIO}=${encodeURIComponent(code)}`)
-  return [...queries, ...placeKeys(readPlace(focus, theme, count))].join('&')
+  return [...queries, ...placeKeys(readPlace((key) => keys.get(key), count))].join('&')
 }

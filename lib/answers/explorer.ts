@@ -8,9 +8,10 @@ import type { Problem, Scenario } from '../scenario/scenario'
 import { type Solution, scalesAt } from '../solve'
 import { otherBeyond } from '../words/beyond'
 import { type Desk, deskOf, nameOf, type Tab } from '../words/desk'
-import { type Place, pageLink, readPlace } from '../words/link'
+import { pageLink } from '../words/link'
 import { type MeasureWords, measureWords } from '../words/measures'
 import { type MomentWords, momentWords } from '../words/moments'
+import { type Place, readPlace } from '../words/place'
 import { joined } from '../words/sentence'
 import { type Verdict, verdictOf } from '../words/verdict'
 import { type Opened, opened, solutionOf } from './opened'
@@ -18,8 +19,8 @@ import { type Opened, opened, solutionOf } from './opened'
 export interface Asked {
   /** Every `s`, decoded once. */
   readonly codes: readonly string[]
-  readonly focus: string | undefined
-  readonly theme: string | undefined
+  /** The other keys of the address, which are read leniently. */
+  readonly keys: ReadonlyMap<string, string>
 }
 
 export interface ScenarioView extends Tab {
@@ -52,7 +53,7 @@ export function explorer(asked: Asked): Explorer {
   const address = opened(asked.codes)
   const solutions = address.solutions.map(named)
   const scenarios = solutions.map(({ scenario }) => scenario)
-  const place = readPlace(asked.focus, asked.theme, scenarios.length)
+  const place = readPlace((key) => asked.keys.get(key), scenarios.length)
   const desk = deskOf(scenarios, place)
   const focus = solutions[place.focus] as Solution
   const titled = asked.codes.length === 0

@@ -5,20 +5,18 @@ import { readScenario } from '../scenario/read'
 import { writeScenario } from '../scenario/write'
 import { familyTexts } from './compose-family'
 import { CLOSES, LIGHT } from './fields'
-import { placeKeys, readPlace } from './link'
+import { type Place, placeKeys } from './place'
 import { listText, numberText } from './typed'
 
 /** Fields by name; `s` holds every scenario of the page, that in focus included. */
 export interface Sent {
   readonly codes: readonly string[]
-  readonly focus: string | undefined
-  readonly theme: string | undefined
+  readonly place: Place
   readonly fields: ReadonlyMap<string, string>
 }
 
-export function composedLink({ codes, focus, theme, fields }: Sent): string {
+export function composedLink({ codes, place, fields }: Sent): string {
   const kept = codes.length > 0 ? codes.slice(0, MOST_SCENARIOS) : ['']
-  const place = readPlace(focus, theme, kept.length)
   const queries = kept.map((code, i) => `s=${addressed(i === place.focus ? codeOf(fields) : code)}`)
   return `/?${[...queries, ...placeKeys(place)].join('&')}`
 }

@@ -5,7 +5,8 @@ import { readScenario } from '../scenario/read'
 import type { Scenario } from '../scenario/scenario'
 import { linkQuery, writeScenario } from '../scenario/write'
 import { type Form, formOf } from './fields'
-import { type Place, pageLink, readPlace, THEMES, type Theme } from './link'
+import { pageLink } from './link'
+import { type Place, placePairs, readPlace, THEMES, type Theme } from './place'
 
 export interface Tab {
   readonly slot: number
@@ -17,6 +18,8 @@ export interface Tab {
 
 export interface Desk {
   readonly place: Place
+  /** The same, for the unseen fields of a form. */
+  readonly placeFields: readonly (readonly [key: string, value: string])[]
   readonly scenarios: readonly Tab[]
   /** Of the scenario in focus. */
   readonly form: Form
@@ -38,6 +41,7 @@ export function deskOf(scenarios: readonly Scenario[], place: Place): Desk {
   const chosen = scenarios[place.focus] as Scenario
   return {
     place,
+    placeFields: placePairs(place),
     scenarios: scenarios.map((scenario, slot) => ({
       slot,
       name: nameOf(scenario, slot),
@@ -53,8 +57,10 @@ export function deskOf(scenarios: readonly Scenario[], place: Place): Desk {
 export function readDesk(query: URLSearchParams): Desk | null {
   const reading = readQuery(query.getAll('s'))
   if (!reading.ok) return null
-  const place = readPlace(query.get('focus') ?? undefined, query.get('theme') ?? undefined, reading.value.length)
-  return deskOf(reading.value, place)
+  return deskOf(
+    reading.value,
+    readPlace((key) => query.get(key), reading.value.length),
+  )
 }
 
 /** A scenario without a name is called by its place in the list. */
@@ -70,7 +76,7 @@ const TABLES = [
 ]
 
 function linksOf(scenarios: readonly Scenario[], place: Place): Desk['links'] {
-  const { focus, theme } = place
+  const { focus } = place
   const chosen = scenarios[focus] as Scenario
   const full = scenarios.length >= MOST_SCENARIOS
   const plain = readScenario(PLAIN_CODE, null)
@@ -78,10 +84,10 @@ function linksOf(scenarios: readonly Scenario[], place: Place): Desk['links'] {
   const copied = scenarios.toSpliced(focus + 1, 0, { ...chosen, name: copyName(chosen.name) })
   return {
     here: pageLink(scenarios, place),
-    add: full || !plain.ok ? null : pageLink([...scenarios, plain.value], { theme, focus: scenarios.length }),
-    copy: full ? null : pageLink(copied, { theme, focus: focus + 1 }),
-    remove: without.length === 0 ? null : pageLink(without, { theme, focus: Math.max(0, focus - 1) }),
-    themes: [null, ...THEMES].map((one) => ({ theme: one, link: pageLink(scenarios, { focus, theme: one }) })),
+    add: full || !plain.ok ? null : pageLink([...scenarios, plain.value], { ...place, focus: scenarios.length }),
+    copy: full ? null : pageLink(copied, { ...place, focus: focus + 1 }),
+    remove: without.length === 0 ? null : pageLink(without, { ...place, focus: Math.max(0, focus - 1) }),
+    themes: [null, ...THEMES].map((one) => ({ theme: one, link: pageLink(scenarios, { ...place, theme: one }) })),
     data: `/api/history?${linkQuery(scenarios)}`,
     tables: TABLES.map(({ format, key }) => ({ format, link: `/api/table?${linkQuery(scenarios)}&format=${key}` })),
   }

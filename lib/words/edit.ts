@@ -14,8 +14,7 @@ export function edited(desk: Desk, name: string, text: string): Edited {
   if (!reading.ok) return { ok: false, complaint: complaintOf(reading.problems[0] as Problem, shownFields(desk)) }
   const { place, scenarios } = desk
   const codes = scenarios.map(({ plainCode }) => plainCode)
-  const focus = String(place.focus + 1)
-  return { ok: true, link: composedLink({ codes, focus, theme: place.theme ?? undefined, fields }) }
+  return { ok: true, link: composedLink({ codes, place, fields }) }
 }
 
 function fieldsOf(desk: Desk): [string, string][] {

@@ -34,7 +34,7 @@ const code = fc
 it('shows every legal scenario', { timeout: 120_000 }, () => {
   fc.assert(
     fc.property(fc.array(code, { minLength: 1, maxLength: 3 }), (codes) => {
-      const view = explorer({ codes, focus: undefined, theme: undefined })
+      const view = explorer({ codes, keys: new Map() })
       for (const problem of view.refusal?.problems ?? []) expect(problem.message).toContain('no solution')
       const { figure, ...words } = view
       expect(JSON.stringify(words)).not.toMatch(/NaN|undefined|Infinity/)

@@ -16,8 +16,8 @@ describe('/api/explorer', () => {
     (query) => {
       const pairs = new URLSearchParams(query)
       const codes = pairs.getAll('s')
-      const [focus, theme] = [pairs.get('focus') ?? undefined, pairs.get('theme') ?? undefined]
-      expect(question(query).answer()).toEqual({ ok: true, value: explorer({ codes, focus, theme }) })
+      const keys = new Map([...pairs].filter(([key]) => key !== 's'))
+      expect(question(query).answer()).toEqual({ ok: true, value: explorer({ codes, keys }) })
     },
   )
 

@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest'
 import { explorer } from '../../lib/answers/explorer'
 import { DEMO } from '../../lib/scenario/demo'
 
-const open = (...codes: string[]) => explorer({ codes, focus: undefined, theme: undefined })
+const open = (...codes: string[]) => explorer({ codes, keys: new Map() })
 
 /** The codes that a link of the page opens. */
 function opens(link: string | null): string[] {
@@ -67,7 +67,7 @@ it('a legal scenario that the engine cannot solve is named, and the others are s
 
 describe('links of the page', () => {
   const three = ['h0:70,as:One', 'h0:71,as:Two', 'h0:72,as:Three 2']
-  const view = explorer({ codes: three, focus: '3', theme: 'night' })
+  const view = explorer({ codes: three, keys: new Map(Object.entries({ focus: '3', theme: 'night' })) })
 
   it('choose the focus and the theme', () => {
     expect(view.scenarios.map(({ link }) => link.replace(/^.*as:Three%202/, ''))).toEqual([

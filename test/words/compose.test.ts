@@ -7,7 +7,8 @@ import type { Scenario } from '../../lib/scenario/scenario'
 import { writeScenario } from '../../lib/scenario/write'
 import { codeOf, composedLink } from '../../lib/words/compose'
 import { CLOSES, formOf, LIGHT } from '../../lib/words/fields'
-import { pageLink, readPlace } from '../../lib/words/link'
+import { pageLink } from '../../lib/words/link'
+import { PLAIN_PLACE, placeKeys, readPlace } from '../../lib/words/place'
 
 function scenarioOf(code: string): Scenario {
   const reading = readScenario(code, null)
@@ -27,6 +28,7 @@ function sent(code: string, changes: Readonly<Record<string, string>> = {}): Map
   ])
 }
 
+const placeOf = (keys: Readonly<Record<string, string>>) => readPlace((key) => keys[key], 3)
 const canonical = (fields: Map<string, string>) => writeScenario(scenarioOf(codeOf(fields)))
 
 describe('a form sent as it is', () => {
@@ -106,7 +108,8 @@ describe('choices of the form', () => {
 })
 
 describe('the address', () => {
-  const base = { codes: ['h0:70,as:a,b', 'matter:0.2'], focus: '2', theme: 'night', fields: sent('h0:71') }
+  const place = { ...PLAIN_PLACE, focus: 1, theme: 'night' as const }
+  const base = { codes: ['h0:70,as:a,b', 'matter:0.2'], place, fields: sent('h0:71') }
 
   it('keeps the other scenarios, the focus and the theme', () => {
     expect(composedLink(base)).toBe('/?s=h0:70,matter:0.3111,as:a%2Cb&s=h0:71,matter:0.3111&focus=2&theme=night')
@@ -122,8 +125,15 @@ describe('the address', () => {
   })
 
   it('is read leniently in what is not a scenario', () => {
-    expect(readPlace('9', 'pink', 3)).toEqual({ focus: 0, theme: null })
-    expect(readPlace('3', 'night', 3)).toEqual({ focus: 2, theme: 'night' })
-    expect(pageLink([scenarioOf('h0:70')], { focus: 0, theme: null })).toBe('/?s=h0:70,matter:0.3111')
+    expect(placeOf({ focus: '9', theme: 'pink', from: '1e5', left: 'x', view: 'R/' })).toEqual(PLAIN_PLACE)
+    expect(placeOf({ focus: '3', theme: 'night' })).toEqual({ ...PLAIN_PLACE, focus: 2, theme: 'night' })
+  })
+
+  it('does not say what would hold anyway, and says everything else', () => {
+    expect(pageLink([scenarioOf('h0:70')], PLAIN_PLACE)).toBe('/?s=h0:70,matter:0.3111')
+    const query =
+      'focus=2&theme=night&view=rate&show=q&by=time&compare=ratio&galaxy=1.9&time=log&from=-13.8&to=40&left=0.1&right=6'
+    const place = placeOf(Object.fromEntries(new URLSearchParams(query)))
+    expect(placeKeys(place).join('&')).toBe(query)
   })
 })

@@ -1,0 +1,98 @@
+/** What an address says beside the scenarios: every key once. It is read leniently, and defaults are not written. */
+
+export const THEMES = ['paper', 'night'] as const
+export type Theme = (typeof THEMES)[number]
+
+/** Null wherever what would hold anyway holds. */
+export interface Place {
+  /** Which scenario is in focus, from 0. */
+  readonly focus: number
+  /** Null: as the reader's system has it. */
+  readonly theme: Theme | null
+  /** The view below the long one, what it shows, against what, and whether compared with the scenario in focus. */
+  readonly view: string | null
+  readonly show: string | null
+  readonly by: string | null
+  readonly compare: string | null
+  /** Redshift of the galaxy that the view of horizons follows. */
+  readonly galaxy: number | null
+  /** Time of the long view: linear where null. */
+  readonly time: 'log' | null
+  /** Range of the long view, Gyr from now. */
+  readonly from: number | null
+  readonly to: number | null
+  /** Range of the view below it, in the unit of its horizontal axis. */
+  readonly left: number | null
+  readonly right: number | null
+}
+
+interface Key<K extends keyof Place = keyof Place> {
+  readonly key: K
+  /** `count` is that of the scenarios. */
+  read(text: string, count: number): Place[K]
+  /** Null where the default holds. */
+  write(value: Place[K]): string | null
+}
+
+const KEYS = [
+  key('focus', focused, (focus) => (focus > 0 ? String(focus + 1) : null)),
+  key('theme', (text) => THEMES.find((one) => one === text) ?? null),
+  key('view', token),
+  key('show', token),
+  key('by', token),
+  key('compare', token),
+  key('galaxy', (text) => within(text, 0, 1e4)),
+  key('time', (text) => (text === 'log' ? text : null)),
+  key('from', (text) => within(text, -1e6, 1e6)),
+  key('to', (text) => within(text, -1e6, 1e6)),
+  key('left', (text) => within(text, -1e6, 1e6)),
+  key('right', (text) => within(text, -1e6, 1e6)),
+] as const
+
+/** In the order in which they are written. */
+export const PLACE_KEYS: readonly (keyof Place)[] = KEYS.map(({ key }) => key)
+
+/** Reads a place leniently: whatever is not understood is what would hold anyway. `focus` counts from 1 in addresses. */
+export function readPlace(textOf: (key: string) => string | null | undefined, count: number): Place {
+  const entries = (KEYS as readonly Key[]).map(({ key, read }) => [key, read(textOf(key) ?? '', count)])
+  return Object.fromEntries(entries) as unknown as Place
+}
+
+/** Where nothing but the scenarios is said. */
+export const PLAIN_PLACE: Place = readPlace(() => null, 1)
+
+/** The keys of a place with their values, without those that say what would hold anyway. */
+export function placePairs(place: Place): (readonly [key: string, value: string])[] {
+  return (KEYS as readonly Key[]).flatMap(({ key, write }) => {
+    const text = write(place[key])
+    return text === null ? [] : [[key, text] as const]
+  })
+}
+
+/** The same, ready for an address. */
+export function placeKeys(place: Place): string[] {
+  return placePairs(place).map(([key, value]) => `${key}=${value.replace('+', '%2B')}`)
+}
+
+function key<K extends keyof Place>(key: K, read: Key<K>['read'], write: Key<K>['write'] = plain): Key<K> {
+  return { key, read, write }
+}
+
+function plain(value: string | number | null): string | null {
+  return value === null ? null : String(value)
+}
+
+function focused(text: string, count: number): number {
+  const focus = /^[1-6]$/.test(text) ? Number(text) - 1 : 0
+  return focus < count ? focus : 0
+}
+
+/** A word whose meaning is that of the figures. */
+function token(text: string): string | null {
+  return /^[a-z]{1,20}$/.test(text) ? text : null
+}
+
+function within(text: string, least: number, most: number): number | null {
+  const value = /^-?\d{1,9}(\.\d{1,12})?$/.test(text) ? Number(text) : Number.NaN
+  return value >= least && value <= most ? value + 0 : null
+}
