@@ -6,6 +6,7 @@ export default defineConfig({
     root: fileURLToPath(new URL('..', import.meta.url)),
     include: ['test/**/*.test.{ts,tsx}'],
     environment: 'node',
+    setupFiles: ['test/chance.ts'],
     // Nothing here is timed: a slow machine is no failure.
     testTimeout: 120_000,
   },
