@@ -18,6 +18,7 @@ const ORDER = [
   'measures',
   'quantities',
   'solve',
+  'ruler',
   'words',
   'tables',
   'formats',
