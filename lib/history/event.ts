@@ -55,15 +55,24 @@ function contracting(phase: Phase, arm: Arm, N: number): Found {
 
 /** The event at a time from now, in 1/H₀. */
 export function eventAtTime(history: History, time: number): Found {
-  return time <= 0 ? pastEvent(history, -time) : futureEvent(history, time)
+  return eventAt(history, 'time', time)
 }
+
+/** The event at a conformal time from now, in 1/H₀. */
+export function eventAtConformal(history: History, conformal: number): Found {
+  return eventAt(history, 'conformal', conformal)
+}
+
+const eventAt = (history: History, clock: Clock, since: number): Found =>
+  since <= 0 ? pastEvent(history, clock, -since) : futureEvent(history, clock, since)
 
 /** The event at an age since the origin; negative ages lie before a bounce. */
 export function eventAtAge(history: History, age: number): Found {
   const { past, origin } = history
   if (origin.time === null) return missing('the past is infinite, so no age can be counted')
-  if (age < 0) return past.end.kind === 'root' ? beforeBounce(history, -age) : missing('nothing lies before the origin')
-  if (age > past.time.total) return futureEvent(history, age - past.time.total)
+  if (age < 0)
+    return past.end.kind === 'root' ? beforeBounce(history, 'time', -age) : missing('nothing lies before the origin')
+  if (age > past.time.total) return futureEvent(history, 'time', age - past.time.total)
   const place = placeRemaining(past, 'time', age)
   return place ? event('past', place) : missing(OUT_OF_RANGE)
 }
@@ -71,45 +80,45 @@ export function eventAtAge(history: History, age: number): Found {
 const AFTER_THE_END = 'this is after the end'
 const OUT_OF_RANGE = 'the scale factor there is outside the range of floating-point numbers'
 
-function pastEvent(history: History, elapsed: number): Found {
+function pastEvent(history: History, clock: Clock, elapsed: number): Found {
   const { past } = history
-  if (elapsed <= past.time.total) {
-    const place = placeElapsed(past, 'time', elapsed)
+  if (elapsed <= past[clock].total) {
+    const place = placeElapsed(past, clock, elapsed)
     return place ? event('past', place) : missing(OUT_OF_RANGE)
   }
   if (past.end.kind !== 'root') return missing('this is before the origin')
-  return beforeBounce(history, elapsed - past.time.total)
+  return beforeBounce(history, clock, elapsed - past[clock].total)
 }
 
-function futureEvent(history: History, elapsed: number): Found {
+function futureEvent(history: History, clock: Clock, elapsed: number): Found {
   const { future } = history
-  if (elapsed <= future.time.total) {
-    const place = placeElapsed(future, 'time', elapsed)
+  if (elapsed <= future[clock].total) {
+    const place = placeElapsed(future, clock, elapsed)
     return place ? event('future', place) : missing(OUT_OF_RANGE)
   }
   if (future.end.kind !== 'root') return missing(AFTER_THE_END)
-  const since = elapsed - future.time.total
-  if (history.unfollowed) return missing(since > history.unfollowed.time ? AFTER_THE_END : history.unfollowed.because)
-  return mirrored(history, 'home', since, AFTER_THE_END)
+  const since = elapsed - future[clock].total
+  if (history.unfollowed) return missing(since > history.unfollowed[clock] ? AFTER_THE_END : history.unfollowed.because)
+  return mirrored(history, 'home', clock, since, AFTER_THE_END)
 }
 
-const beforeBounce = (history: History, since: number): Found =>
-  mirrored(history, 'before', since, 'this is before the origin')
+const beforeBounce = (history: History, clock: Clock, since: number): Found =>
+  mirrored(history, 'before', clock, since, 'this is before the origin')
 
 /** The two arms that lie beyond a turning point: first the one that leads back towards today's size, then the one beyond it. */
 const swing = (history: History, phase: 'home' | 'before'): readonly [Arm, Arm] =>
   phase === 'home' ? [history.descent, history.home] : [history.past, history.before]
 
 /** `since` a turning point, away from today: back along the near arm, on along the far one; from a second turning point to and fro. */
-function mirrored(history: History, phase: 'home' | 'before', since: number, beyond: string): Found {
+function mirrored(history: History, phase: 'home' | 'before', clock: Clock, since: number, beyond: string): Found {
   const [near, far] = swing(history, phase)
-  const whole = near.time.total + far.time.total
+  const whole = near[clock].total + far[clock].total
   if (since > whole && far.end.kind !== 'root') return missing(beyond)
   const swings = Number.isFinite(whole) ? Math.floor(since / whole) : 0
   const away = swings % 2 === 0
   const left = swings === 0 ? since : away ? since - swings * whole : (swings + 1) * whole - since
   const place =
-    left <= near.time.total ? placeRemaining(near, 'time', left) : placeElapsed(far, 'time', left - near.time.total)
+    left <= near[clock].total ? placeRemaining(near, clock, left) : placeElapsed(far, clock, left - near[clock].total)
   if (!place) return missing(OUT_OF_RANGE)
   return { phase, place, sign: away ? -1 : 1, swings }
 }
