@@ -24,6 +24,7 @@ const ORDER = [
   'formats',
   'figures',
   'answers',
+  'interface',
 ]
 /** Entry points for threads of their own: these may take from anywhere. */
 const FREE = 'workers'

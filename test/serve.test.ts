@@ -89,6 +89,35 @@ describe('what is refused', () => {
     expect(handler).not.toHaveBeenCalled()
   })
 
+  test('the batch is posted and nothing else, and nothing else is posted', async () => {
+    const { port } = await start((_incoming, response) => response.end())
+    for (const method of ['GET', 'HEAD', 'PUT', 'DELETE']) {
+      const answer = await ask(port, `${method} /api/batch`)
+      expect(answer.status).toBe(405)
+      expect(answer.head).toContain('Allow: POST, OPTIONS')
+    }
+    expect((await ask(port, 'POST /api/batch')).status).toBe(200)
+    for (const path of ['/', '/api', '/api/batch/x', '/api/batches', '/api/history']) {
+      const answer = await ask(port, `POST ${path}`)
+      expect([answer.status, /Allow: ([A-Z, ]+)/.exec(answer.head)?.[1]]).toEqual([405, 'GET, HEAD, OPTIONS'])
+    }
+  })
+
+  test('pages of any site may ask the interface before they use it', async () => {
+    const { port } = await start(vi.fn())
+    const preflight = async (path: string) =>
+      (await get(port, path, { Origin: 'https://a.example' }, 'OPTIONS')).response
+    expect((await preflight('/api/at?z=1')).headers).toMatchObject({
+      'access-control-allow-origin': '*',
+      'access-control-allow-methods': 'GET, HEAD, OPTIONS',
+    })
+    expect((await preflight('/api/batch')).headers).toMatchObject({
+      'access-control-allow-methods': 'POST, OPTIONS',
+      'access-control-allow-headers': expect.stringContaining('Content-Type'),
+    })
+    expect((await preflight('/')).headers).not.toHaveProperty('access-control-allow-origin')
+  })
+
   test('a request without Host (RFC 9112, section 3.2), and one with an expectation', async () => {
     const { port } = await start(vi.fn())
     expect(await raw(port, 'GET / HTTP/1.1\r\nConnection: close\r\n\r\n')).toMatchObject({ status: 400 })

@@ -6,7 +6,7 @@ import { PROBLEM_TYPE, problemBody } from '../../scripts/front/problem.mjs'
 import { EDITION } from './home'
 
 /** A page of any site may read the answers; they hold nothing but what their address asks for. */
-const OPEN = { 'Access-Control-Allow-Origin': '*', 'Access-Control-Expose-Headers': 'ETag, Content-Disposition' }
+export const OPEN = { 'Access-Control-Allow-Origin': '*', 'Access-Control-Expose-Headers': 'ETag, Content-Disposition' }
 /** The same address gives the same answer until a new version is served. */
 const KEEP = 'public, max-age=3600'
 
@@ -45,13 +45,21 @@ export function reply<T>(
 const names = (list: string, tag: string): boolean =>
   list.split(',').some((one) => one.trim().replace(/^W\//, '') === tag.slice(2))
 
-function refused(status: 400 | 422, path: string, errors: readonly Problem[]): Response {
+/** The first of several problems stands for all. */
+export function detailOf(errors: readonly Problem[]): string {
   const [first] = errors
   const where = first.scenario === null ? '' : ` (scenario ${first.scenario + 1})`
   const more = errors.length > 1 ? ` This is the first of ${errors.length} problems in errors.` : ''
-  const detail = `${first.parameter}${where}: ${first.message}${more}`
-  return new Response(problemBody({ status, detail, errors }, path), {
-    status,
-    headers: { ...OPEN, 'Content-Type': PROBLEM_TYPE, 'Cache-Control': 'no-store' },
+  return `${first.parameter}${where}: ${first.message}${more}`
+}
+
+export function refused(status: 400 | 422, path: string, errors: readonly Problem[]): Response {
+  return problem({ status, detail: detailOf(errors), errors }, path)
+}
+
+export function problem(one: Parameters<typeof problemBody>[0], path: string): Response {
+  return new Response(problemBody(one, path), {
+    status: one.status,
+    headers: { ...OPEN, ...one.headers, 'Content-Type': PROBLEM_TYPE, 'Cache-Control': 'no-store' },
   })
 }

@@ -20,7 +20,8 @@ export const historyAnswer = (solutions: readonly Solution[]) => enclosed(soluti
 
 const enclosed = (scenarios: readonly ReturnType<typeof historyOfScenario>[]) => ({ engine: ENGINE, scenarios })
 
-function historyOfScenario(solution: Solution) {
+/** One scenario of the answer. */
+export function historyOfScenario(solution: Solution) {
   const { code, label, budget, origin, end, measures, moments } = solution
   const { photons, masslessNeutrinos, massiveNeutrinos, coldMatter, curvature, dark } = budget
   return {

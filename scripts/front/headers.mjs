@@ -5,7 +5,7 @@ import { randomBytes } from 'node:crypto'
 const FRAMED_ANYWHERE = /^\/embed(?=[/?]|$)/
 
 /** What is no page: files that run nothing by themselves, and answers of the interface, which may bring their own policy. */
-const NO_PAGE = /^\/(api|_next|healthz)(?=[/?]|$)/
+const NO_PAGE = /^\/(api\/|_next\/|healthz(?=[/?]|$))/
 
 /**
  * @param {import('node:http').IncomingMessage} request

@@ -19,14 +19,21 @@ export const PROBLEM_TYPE = 'application/problem+json'
  */
 
 /**
- * The body. `about:blank` says that the title is that of the status and means nothing more (section 4.2.1).
+ * `about:blank` says that the title is that of the status and means nothing more (section 4.2.1).
  * @param {Problem} problem
  * @param {string} instance path of the request
  */
-export function problemBody({ status, detail, errors = [] }, instance) {
+export function problemDocument({ status, detail, errors = [] }, instance) {
   const title = STATUS_CODES[status] ?? 'Error'
-  return JSON.stringify({ type: 'about:blank', title, status, detail, instance, errors })
+  return { type: 'about:blank', title, status, detail, instance, errors }
 }
+
+/**
+ * The body.
+ * @param {Problem} problem
+ * @param {string} instance
+ */
+export const problemBody = (problem, instance) => JSON.stringify(problemDocument(problem, instance))
 
 /**
  * @param {import('node:http').ServerResponse} response

@@ -4,7 +4,7 @@ import { compress } from './compress.mjs'
 import { setSecurityHeaders } from './headers.mjs'
 import { sendProblem, writeProblem } from './problem.mjs'
 import { LONGEST_STATE, routerStateProblem } from './router-state.mjs'
-import { LONGEST_TARGET, methodProblem, OPTIONS_HEADERS, targetProblem } from './target.mjs'
+import { LONGEST_TARGET, methodProblem, optionsHeaders, targetProblem } from './target.mjs'
 
 /** @typedef {(request: import('node:http').IncomingMessage, response: import('node:http').ServerResponse) => unknown} Handler */
 
@@ -31,12 +31,12 @@ export function createFront(handler, limits = {}) {
     const target = request.url ?? ''
     setSecurityHeaders(request, response)
     const problem =
-      methodProblem(request.method) ??
+      methodProblem(request.method, target) ??
       hostProblem(request) ??
       targetProblem(target) ??
       routerStateProblem(request.headers)
     if (problem) sendProblem(response, problem, target.split('?')[0].slice(0, 200))
-    else if (request.method === 'OPTIONS') response.writeHead(204, OPTIONS_HEADERS).end()
+    else if (request.method === 'OPTIONS') response.writeHead(204, optionsHeaders(target)).end()
     else compress(request, response, () => answer(handler, request, response))
   })
   server.setTimeout(SILENCE)

@@ -1,8 +1,9 @@
 /** What a request may ask for: refusals of methods and targets that no page or route should have to think about. */
 
-/** Nothing is changed by a request, so these are all. */
+/** Nothing is changed by a request, so these are all; what is too long for an address is posted. */
 const ALLOW = 'GET, HEAD, OPTIONS'
-const METHODS = new Set(ALLOW.split(', '))
+const POSTED = '/api/batch'
+const ALLOW_POSTED = 'POST, OPTIONS'
 
 /**
  * Room for six scenarios and a thousand full doubles, all percent-encoded (about 40 kB), and some more.
@@ -11,16 +12,21 @@ export const LONGEST_TARGET = 48 * 1024
 
 /** @typedef {import('./problem.mjs').Problem} Problem */
 
+/** @param {string} target */
+const allowedAt = (target) => (split(target).path === POSTED ? ALLOW_POSTED : ALLOW)
+
 /**
  * @param {string | undefined} method
+ * @param {string} [target]
  * @returns {Problem | null}
  */
-export function methodProblem(method = '') {
-  if (METHODS.has(method)) return null
+export function methodProblem(method = '', target = '/') {
+  const allow = allowedAt(target)
+  if (allow.split(', ').includes(method)) return null
   return {
     status: 405,
-    detail: `This server answers ${ALLOW}, not ${method || 'this method'}.`,
-    headers: { Allow: ALLOW },
+    detail: `This server answers ${allow}${allow === ALLOW ? '' : ` at ${POSTED}`}, not ${method || 'this method'}.`,
+    headers: { Allow: allow },
   }
 }
 
@@ -43,8 +49,22 @@ export function targetProblem(target) {
   return isApi(path) ? queryProblem(query) : null
 }
 
-/** The answer to OPTIONS. */
-export const OPTIONS_HEADERS = { Allow: ALLOW, 'Content-Length': '0' }
+/**
+ * The answer to OPTIONS. Pages of any site may use the interface: its answers hold nothing but what they are asked for.
+ * @param {string} target
+ */
+export function optionsHeaders(target) {
+  const allow = allowedAt(target)
+  const plain = { Allow: allow, 'Content-Length': '0' }
+  if (!isApi(split(target).path)) return plain
+  return {
+    ...plain,
+    'Access-Control-Allow-Origin': '*',
+    'Access-Control-Allow-Methods': allow,
+    'Access-Control-Allow-Headers': 'Content-Type, If-None-Match',
+    'Access-Control-Max-Age': '86400',
+  }
+}
 
 /**
  * Pages read a damaged query as well as they can and say so; the interface refuses it.

@@ -1,14 +1,12 @@
-import { PROBLEM_TYPE, problemBody } from '../../../scripts/front/problem.mjs'
+import { ROUTES } from '../../../lib/interface/routes'
+import { problem } from '../reply'
 
 /** Whatever no other route under /api takes. */
 export function GET(request: Request) {
   const { pathname } = new URL(request.url)
-  const body = problemBody(
-    {
-      status: 404,
-      detail: `There is nothing at ${pathname}. The interface has /api/history, /api/at, /api/table and /api/explorer.`,
-    },
+  const paths = ROUTES.map(({ path }) => path).join(', ')
+  return problem(
+    { status: 404, detail: `There is nothing at ${pathname}. The interface has ${paths}; /api tells of them.` },
     pathname,
   )
-  return new Response(body, { status: 404, headers: { 'Content-Type': PROBLEM_TYPE, 'Cache-Control': 'no-store' } })
 }

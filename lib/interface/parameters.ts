@@ -1,0 +1,61 @@
+/** Query keys of the routes, described by the very schemas that read them. */
+import { AT_FIELDS } from '../answers/epochs'
+import { TABLE_FIELDS } from '../answers/layout'
+import { FORMATS } from '../formats'
+import { COLUMNS } from '../quantities/columns'
+import { MOST_SCENARIOS } from '../scenario/query'
+import { SPACINGS } from '../tables/spacing'
+import type { RouteParameter } from './route'
+import { codeDescription } from './scenario-code'
+import type { Schema } from './schemas'
+
+export const SCENARIOS: RouteParameter = {
+  name: 's',
+  description: `${codeDescription()}\n\nUp to ${MOST_SCENARIOS} times. Where there is none, the scenarios of the demo.`,
+  schema: { type: 'array', items: { type: 'string' }, minItems: 1, maxItems: MOST_SCENARIOS },
+  example: 'h0:70,matter:0.3',
+}
+
+const numbers: Schema = { type: 'string', description: 'Plain decimal numbers joined by commas' }
+const columns: Schema = {
+  type: 'string',
+  description: `Some of ${COLUMNS.map(({ key }) => key).join(', ')}, joined by commas`,
+}
+const keysOf = (list: readonly { readonly key: string }[]): Schema => ({ enum: list.map(({ key }) => key) })
+
+const AT_SHAPES: Readonly<Record<keyof typeof AT_FIELDS, Schema>> = {
+  z: numbers,
+  scale: numbers,
+  time: numbers,
+  age: numbers,
+  branch: { enum: ['expanding', 'contracting'], default: 'expanding' },
+  columns,
+}
+
+const TABLE_SHAPES: Readonly<Record<keyof typeof TABLE_FIELDS, Schema>> = {
+  format: { ...keysOf(FORMATS), default: FORMATS[0].key },
+  by: { ...keysOf(SPACINGS), default: SPACINGS[0].key },
+  from: { type: 'number' },
+  to: { type: 'number' },
+  rows: { type: 'integer', minimum: 2, maximum: Math.max(...FORMATS.map(({ mostRows }) => mostRows)), default: 200 },
+  columns,
+}
+
+interface Described {
+  meta(): { readonly description?: string } | undefined
+}
+
+/** The fields of a route with their shapes. */
+export function parametersOf(
+  fields: Readonly<Record<string, Described>>,
+  shapes: Readonly<Record<string, Schema>>,
+): RouteParameter[] {
+  return Object.entries(fields).map(([name, field]) => ({
+    name,
+    description: field.meta()?.description ?? '',
+    schema: shapes[name] ?? {},
+  }))
+}
+
+export const AT_PARAMETERS = parametersOf(AT_FIELDS, AT_SHAPES)
+export const TABLE_PARAMETERS = parametersOf(TABLE_FIELDS, TABLE_SHAPES)

@@ -1,0 +1,74 @@
+/** Every route of the interface once; the document, the page about it and the tests follow from this list. */
+import { FORMATS } from '../formats'
+import { AT_PARAMETERS, SCENARIOS, TABLE_PARAMETERS } from './parameters'
+import { BYTES, type Route } from './route'
+import { refTo } from './schemas'
+
+const JSON_TYPE = 'application/json'
+export const LINES_TYPE = 'application/x-ndjson'
+
+const tableAnswers = Object.fromEntries(
+  FORMATS.map(({ key, mediaType }) => [mediaType.split(';')[0], key === 'json' ? refTo('Table') : BYTES]),
+)
+
+export const ROUTES: readonly Route[] = [
+  {
+    path: '/api/history',
+    method: 'get',
+    summary: 'Whole histories: origin, end with its reason, measures with error bounds, moments, a series to draw.',
+    parameters: [SCENARIOS],
+    answer: { [JSON_TYPE]: refTo('Histories') },
+    refusals: [422],
+    examples: [
+      { title: 'Age, horizons and ending of one scenario', query: 's=h0:70,matter:0.3' },
+      {
+        title: 'Two scenarios, one of which ends in a rip',
+        query: 's=h0:70,matter:0.3&s=h0:70,matter:0.3,eos:constant,w:-1.2',
+      },
+    ],
+  },
+  {
+    path: '/api/at',
+    method: 'get',
+    summary: 'All columns at given redshifts, scale factors, times or ages.',
+    parameters: [SCENARIOS, ...AT_PARAMETERS],
+    answer: { [JSON_TYPE]: refTo('Epochs') },
+    refusals: [422],
+    examples: [
+      { title: 'Distances at three redshifts', query: 's=h0:70,matter:0.3&z=0.5,1,2&columns=age,comoving,luminosity' },
+      { title: 'A time ahead', query: 's=h0:70,matter:0.3&time=10&columns=scale,hubble,eventHorizon' },
+    ],
+  },
+  {
+    path: '/api/table',
+    method: 'get',
+    summary: 'Evenly spaced rows as a file, streamed.',
+    parameters: [SCENARIOS, ...TABLE_PARAMETERS],
+    answer: tableAnswers,
+    refusals: [422],
+    examples: [
+      { title: 'A table for a spreadsheet', query: 's=h0:70,matter:0.3&by=redshift&from=0&to=10&rows=11' },
+      {
+        title: 'The same for a paper',
+        query: 's=h0:70,matter:0.3&by=redshift&from=0&to=10&rows=11&format=latex&columns=redshift,age,luminosity',
+      },
+      { title: 'And as data', query: 's=h0:70,matter:0.3&rows=3&format=json&columns=scale,age' },
+    ],
+  },
+  {
+    path: '/api/batch',
+    method: 'post',
+    summary:
+      'A history for each line of the body, in the same order, streamed. Up to 10,000 lines; a line at fault gives a problem and does not stop the rest.',
+    parameters: [],
+    body: { [LINES_TYPE]: refTo('BatchLine') },
+    answer: { [LINES_TYPE]: refTo('BatchResult') },
+    refusals: [413, 415],
+    examples: [
+      {
+        title: 'Three scenarios, one of them at fault',
+        body: '"h0:70,matter:0.3"\n"h0:70,matter:-1"\n{"s": "h0:60"}\n',
+      },
+    ],
+  },
+]

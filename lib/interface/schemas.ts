@@ -1,0 +1,137 @@
+/** The shapes of all answers as JSON Schema (draft 2020-12), filled from the lists of measures, columns and kinds. */
+import type { EndKind, OriginKind } from '../history/outcome'
+import { COLUMNS } from '../quantities/columns'
+import { MEASURES } from '../quantities/measures'
+import type { MomentKind } from '../quantities/moments'
+import { END_NAMES } from '../words/ending'
+
+export type Schema = Readonly<Record<string, unknown>>
+
+const number: Schema = { type: 'number' }
+const text: Schema = { type: 'string' }
+const maybeNumber: Schema = { type: ['number', 'null'] }
+const listOf = (items: Schema): Schema => ({ type: 'array', items })
+export const refTo = (name: string): Schema => ({ $ref: `#/components/schemas/${name}` })
+
+/** All properties are always there, and no others. */
+const closed = (properties: Readonly<Record<string, Schema>>, description?: string): Schema => ({
+  type: 'object',
+  ...(description ? { description } : {}),
+  properties,
+  required: Object.keys(properties),
+  additionalProperties: false,
+})
+
+const ORIGINS: Readonly<Record<OriginKind, string>> = {
+  'big-bang': 'a = 0 at a finite time',
+  bounce: 'contraction before expansion',
+  eternal: 'a → 0 only as t → −∞',
+  static: 'emerges from a static state',
+  oscillating: 'the last of many bounces',
+  singular: 'the density diverges at a finite a',
+}
+const MOMENTS: Readonly<Record<MomentKind, true>> = {
+  origin: true,
+  'matter-radiation-equality': true,
+  recombination: true,
+  drag: true,
+  'acceleration-start': true,
+  'acceleration-end': true,
+  'matter-dark-equality': true,
+  now: true,
+  turnaround: true,
+  'unbinding-cluster': true,
+  'unbinding-galaxy': true,
+  'unbinding-planet': true,
+  'unbinding-earth': true,
+  'unbinding-atom': true,
+  end: true,
+}
+const ENDS: readonly EndKind[] = Object.keys(END_NAMES) as EndKind[]
+
+const densities = ['photons', 'masslessNeutrinos', 'massiveNeutrinos', 'coldMatter', 'curvature', 'dark']
+
+const column = closed({ name: text, unit: text, label: text })
+
+const measure = (unit: string, description: string): Schema => ({
+  description,
+  oneOf: [
+    closed({ value: number, unit: { const: unit }, error: number, because: { type: 'null' } }),
+    closed({ value: { type: 'null' }, unit: { const: unit }, error: { type: 'null' }, because: text }),
+  ],
+})
+
+const end = closed({
+  kind: { enum: ENDS },
+  time: { ...maybeNumber, description: 'Gyr from now; null when infinite' },
+  scale: { ...maybeNumber, description: 'Limit of a; null when infinite' },
+  turnaround: { oneOf: [closed({ time: number, scale: number }), { type: 'null' }] },
+  proven: { type: 'boolean' },
+  because: text,
+})
+
+const history: Readonly<Record<string, Schema>> = {
+  code: { ...text, description: 'The canonical scenario code, ready to stand in an address' },
+  label: text,
+  densities: closed(Object.fromEntries(densities.map((key) => [key, number])), 'Ω today; the sum is 1'),
+  origin: closed({
+    kind: { enum: Object.keys(ORIGINS), description: list(ORIGINS) },
+    time: { ...maybeNumber, description: 'Gyr from now; null when infinite' },
+    scale: number,
+  }),
+  end,
+  measures: closed(
+    Object.fromEntries(MEASURES.map(({ key, unit, label, meaning }) => [key, measure(unit, `${label}: ${meaning}`)])),
+  ),
+  moments: listOf(
+    closed({
+      kind: { enum: Object.keys(MOMENTS) },
+      label: text,
+      time: maybeNumber,
+      scale: maybeNumber,
+      redshift: maybeNumber,
+    }),
+  ),
+  series: closed({ columns: listOf(column), rows: listOf(listOf(number)) }, 'Rounded points for drawing'),
+}
+
+function list(kinds: Readonly<Record<string, string>>): string {
+  return Object.entries(kinds)
+    .map(([kind, meaning]) => `${kind}: ${meaning}`)
+    .join('; ')
+}
+
+const scenarios = (scenario: Schema): Schema => closed({ engine: text, scenarios: listOf(scenario) })
+const rows = listOf(listOf(maybeNumber))
+const index: Schema = { type: 'integer', minimum: 0, description: 'The line of the request, counted from 0' }
+
+const problemProperties: Readonly<Record<string, Schema>> = {
+  type: text,
+  title: text,
+  status: { type: 'integer', minimum: 400, maximum: 599 },
+  detail: text,
+  instance: text,
+  errors: listOf(refTo('RefusedParameter')),
+}
+
+export const SCHEMAS: Readonly<Record<string, Schema>> = {
+  History: closed(history),
+  Histories: scenarios(refTo('History')),
+  Note: closed({ row: { type: 'integer' }, column: { type: ['string', 'null'] }, because: text }),
+  Epochs: scenarios(closed({ code: text, columns: listOf(refTo('Column')), rows, notes: listOf(refTo('Note')) })),
+  Table: scenarios(closed({ code: text, columns: listOf(refTo('Column')), rows })),
+  Column: closed({ name: { enum: COLUMNS.map(({ key }) => key) }, unit: text, label: text }),
+  BatchLine: {
+    oneOf: [text, closed({ s: text })],
+    description: 'A scenario code as plain text, nothing percent-encoded',
+  },
+  BatchResult: { oneOf: [closed({ index, ...history }), closed({ index, problem: refTo('Problem') })] },
+  RefusedParameter: closed({
+    parameter: text,
+    scenario: { type: ['integer', 'null'], description: 'The place of its s, counted from 0' },
+    value: { type: ['string', 'null'] },
+    allowed: text,
+    message: text,
+  }),
+  Problem: closed(problemProperties, 'Problem details, RFC 9457'),
+}
