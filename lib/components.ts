@@ -107,6 +107,16 @@ function termOf(darkEnergy: number, { factor, logDensity, exponentRange }: Part)
   return { omega, logSize: (N) => log + logDensity(N), exponentRange }
 }
 
+/** R(y) = 1 + 5y²/(7π²) to 1e-17 below this. */
+const HOT = 1e-4
+const HOT_SQUARE = 5 / (7 * Math.PI ** 2)
+/**
+ * R(y) ∝ y (1 + Σ c_k y^(−2k)) to 1e-17 above this: the root in the energy integral expanded in x/y, with the moments
+ * I_n = ∫ x^n/(eˣ + 1) dx = n! (1 − 2^(−n)) ζ(n + 1): c_k = binomial(½, k) I_(2k+2)/I_2.
+ */
+const COLD = 600
+const COLD_SERIES = [6.46970883252999, -49.54476700631098, 1394.940967821448]
+
 /** The exponent of a massive state falls from 4 to 3, since the logarithmic slope of its energy ratio rises from 0 to 1. */
 function neutrinoComponent(state: MassiveState): Component {
   const y = (N: number) => state.y * Math.exp(N)
@@ -115,7 +125,6 @@ function neutrinoComponent(state: MassiveState): Component {
   const logCold = logMassless + Math.log(energyRatio(1e20) * 1e-20 * state.y)
   const density = (N: number): number =>
     N > cold ? Math.exp(logCold - 3 * N) : state.masslessDensity * energyRatio(y(N)) * Math.exp(-4 * N)
-  // The energy ratio is 1 + 0.07 y² at small y and (y/3.15)(1 + 6.5/y²) at large y: settled where the corrections are below 1e-17.
   return {
     key: 'neutrino',
     omega: state.density,
@@ -126,7 +135,19 @@ function neutrinoComponent(state: MassiveState): Component {
       density(N) *
       relativeBend(Math.log1p(energyRatioChange(y(N), d)) - 4 * d, d, (t) => -logSlopeDerivative(y(N + t))),
     exponentRange: (from, to) => [4 - logSlope(y(to)), 4 - logSlope(y(from))],
-    past: { kind: 'power', exponent: 4, logCoefficient: logMassless, settled: Math.log(1e-8 / state.y) },
-    future: { kind: 'power', exponent: 3, logCoefficient: logCold, settled: cold },
+    past: {
+      kind: 'power',
+      exponent: 4,
+      logCoefficient: logMassless,
+      settled: Math.log(HOT / state.y),
+      corrections: [{ size: HOT_SQUARE * state.y ** 2, rate: 2 }],
+    },
+    future: {
+      kind: 'power',
+      exponent: 3,
+      logCoefficient: logCold,
+      settled: Math.log(COLD / state.y),
+      corrections: COLD_SERIES.map((one, k) => ({ size: one * state.y ** (-2 * (k + 1)), rate: 2 * (k + 1) })),
+    },
   }
 }

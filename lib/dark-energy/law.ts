@@ -7,13 +7,24 @@ import type { Potential } from './potential'
 
 /** What a law tends to as N → −∞ (past) or N → +∞ (future). */
 export type Asymptote =
-  /** f → coefficient · e^(−exponent·N); from `settled` on (outwards) the relative difference is below 1e-17. */
-  | { readonly kind: 'power'; readonly exponent: number; readonly logCoefficient: number; readonly settled: number }
+  | Power
   /** Faster to zero than every power of a. */
   | { readonly kind: 'vanishing' }
   /** Faster to infinity than every power of a. */
   | { readonly kind: 'exploding' }
   | Logarithmic
+
+/**
+ * f → coefficient · e^(−exponent·N), times 1 + Σ size e^(∓rate·N), − for the future and + for the past, where there are corrections;
+ * from `settled` on (outwards) the relative difference is below 1e-17.
+ */
+export interface Power {
+  readonly kind: 'power'
+  readonly exponent: number
+  readonly logCoefficient: number
+  readonly settled: number
+  readonly corrections?: readonly { readonly size: number; readonly rate: number }[]
+}
 
 /** f = (1 + rate N)^power exactly: it varies like a power of ln a, more slowly than every power of a. */
 export interface Logarithmic {

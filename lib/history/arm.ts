@@ -39,8 +39,8 @@ const NOTHING = 1e-200
 
 export function armOf(model: Model, direction: Direction): Arm {
   const end = searchTurning(model, direction)
-  const { panels, stopped } = march(model, direction, end)
-  return armFrom(model, direction, end, panels, stopped)
+  const { panels, stopped, tail } = march(model, direction, end)
+  return armFrom(model, direction, end, panels, stopped, tail)
 }
 
 /** The arm of panels that are there already. */
@@ -50,9 +50,14 @@ export function armFrom(
   end: Search,
   panels: readonly Panel[],
   stopped: Stopped,
+  begun: Tail | null = null,
 ): Arm {
-  const edges = Float64Array.from([...panels.map((one) => one.zone.distanceAt(one.from)), lastEdge(panels)])
-  const { tail, time, conformal } = beyondPanels(model, direction, end, stopped, lastEdge(panels))
+  const edges = new Float64Array(panels.length + 1)
+  panels.forEach((one, i) => {
+    edges[i] = one.zone.distanceAt(one.from)
+  })
+  edges[panels.length] = lastEdge(panels)
+  const { tail, time, conformal } = beyondPanels(model, direction, end, stopped, lastEdge(panels), begun)
   return {
     model,
     direction,
@@ -70,10 +75,17 @@ const lastEdge = (panels: readonly Panel[]): number => {
   return last.zone.distanceAt(last.to)
 }
 
-function march(model: Model, direction: Direction, end: Search): { panels: readonly Panel[]; stopped: Stopped } {
+interface March {
+  readonly panels: readonly Panel[]
+  readonly stopped: Stopped
+  readonly tail: Tail | null
+}
+
+function march(model: Model, direction: Direction, end: Search): March {
   const panels: Panel[] = []
   let [time, conformal] = [0, 0]
   let stopped: Stopped | null = null
+  let tail: Tail | null = null
   for (const { zone, kind } of stretchesOf(model, direction, end)) {
     const enough = (panel: Panel, edge: number): boolean => {
       time += panel.time.total
@@ -84,13 +96,14 @@ function march(model: Model, direction: Direction, end: Search): { panels: reado
       else if (kind === 'edge') return gone && zone.distanceAt(edge + 1) === zone.distanceAt(zone.to)
       else if (kind === 'final' && gone) stopped = 'spent'
       else if (kind === 'last' && gone && (adds < NOTHING || lasts(model, direction, edge))) stopped = 'spent'
-      else if (zone.to === FARTHEST && tailAt(model, direction, direction * edge) !== null) stopped = 'tail'
+      else if (zone.to === FARTHEST) tail = tailAt(model, direction, direction * edge)
+      if (tail !== null) stopped = 'tail'
       return stopped !== null
     }
     panels.push(...panelsOf(zone, enough))
-    if (stopped !== null) return { panels, stopped }
+    if (stopped !== null) return { panels, stopped, tail }
   }
-  return { panels, stopped: lastEdge(panels) === FARTHEST ? 'far' : 'end' }
+  return { panels, stopped: lastEdge(panels) === FARTHEST ? 'far' : 'end', tail }
 }
 
 /** Is E² here made of what never thins out again farther on? Then what adds nothing now adds nothing later. */

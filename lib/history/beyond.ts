@@ -14,8 +14,15 @@ export interface Beyond {
   readonly conformal: readonly [number, number]
 }
 
-/** What lies beyond the last panel. */
-export function beyondPanels(model: Model, direction: Direction, end: Search, stopped: Stopped, edge: number): Beyond {
+/** What lies beyond the last panel; `begun` is the tail where it is known already. */
+export function beyondPanels(
+  model: Model,
+  direction: Direction,
+  end: Search,
+  stopped: Stopped,
+  edge: number,
+  begun: Tail | null,
+): Beyond {
   const infinite = [Number.POSITIVE_INFINITY, 0] as const
   const nothing = [0, 0] as const
   if (end.kind === 'double') return { tail: null, time: infinite, conformal: infinite }
@@ -24,12 +31,12 @@ export function beyondPanels(model: Model, direction: Direction, end: Search, st
   if (ends || stopped === 'end') return { tail: null, time: nothing, conformal: nothing }
   if (explodes(model, direction)) return exploding(model, direction, stopped, edge)
   if (stopped === 'for ever') return { tail: null, time: infinite, conformal: infinite }
-  const tail = tailAt(model, direction, direction * edge, stopped === 'far')
+  const tail = begun ?? tailAt(model, direction, direction * edge, stopped === 'far')
   if (tail === null) {
     const left = (clock: Clock) => (stopped === 'spent' && converges(model, direction, clock) ? nothing : infinite)
     return { tail, time: left('time'), conformal: left('conformal') }
   }
-  const doubt = tail.time.corrections.reduce((sum, one) => sum + one.size ** 2, 4 * Number.EPSILON)
+  const doubt = tail.left + 4 * Number.EPSILON
   const of = (clock: Clock) => {
     const value = remainingIn(tail[clock], 0)
     return [value, Number.isFinite(value) ? doubt * value : 0] as const

@@ -1,11 +1,11 @@
 /**
  * Beyond the last panel: E² is one power of a with small corrections, or one power of ln a, and the integrals are closed forms.
- * With 1/E = e^(κ₀D)/E₁ · (1 − ½ Σ δ_i e^(−p_i D)), D the distance in ln a beyond the panel,
- * ∫ = 1/E₁ [I(κ) − ½ Σ δ_i I(κ + p_i)], I(κ) = (1 − e^(−κD))/κ. The next order is ⅜ δ² < 2e-18 of the leading one.
+ * With E² = E₁² e^(−2κ₀D) (1 + δ), δ = Σ δ_i e^(−p_i D), D the distance in ln a beyond the panel, 1/E is a sum of exponentials by
+ * the binomial series of (1 + δ)^(−½), and each is integrated by I(κ) = (1 − e^(−κD))/κ.
  */
 
 import { asymptoteOf, type Component } from '../components'
-import type { Logarithmic } from '../dark-energy/law'
+import type { Asymptote, Logarithmic } from '../dark-energy/law'
 import { logarithmicIn, type Model } from '../model'
 import { integralOfExp } from './far'
 import type { Direction } from './turning'
@@ -18,6 +18,10 @@ export interface Tail {
   readonly direction: Direction
   readonly time: TailIntegral
   readonly conformal: TailIntegral
+  /** Of E². */
+  readonly corrections: readonly Correction[]
+  /** Relative error of both integrands: what the series leaves out. */
+  readonly left: number
   /** E² beyond, at distance D. */
   expansion(D: number): number
 }
@@ -30,7 +34,8 @@ export interface PowerIntegral {
   readonly scale: number
   /** Decay rate of the integrand per unit of D; not positive where the integral to infinity diverges. */
   readonly kappa: number
-  readonly corrections: readonly Correction[]
+  /** Of (1 + δ)^(−½), without the leading 1. */
+  readonly terms: readonly Correction[]
 }
 
 /** Of e^(−decay D) (1 + rate D)^(−1 − excess): E² goes like a power of ln a, and nothing else counts. */
@@ -40,18 +45,20 @@ export interface SlowIntegral {
   readonly decay: number
   readonly rate: number
   readonly excess: number
-  readonly corrections: readonly Correction[]
 }
 
-interface Correction {
+export interface Correction {
   /** Size relative to the leading power where the tail begins. */
   readonly size: number
   /** Decay per unit of D relative to the leading power. */
   readonly rate: number
 }
 
-/** Relative size of corrections from which the closed form is good to 1e-17. */
-const SMALL = 2e-9
+/** (1 + δ)^(−½) = Σ c_k δ^k. */
+const BINOMIAL = [1, -1 / 2, 3 / 8, -5 / 16, 35 / 128, -63 / 256, 231 / 1024]
+const ORDERS = BINOMIAL.length - 2
+/** Sum of the sizes of all corrections from which the series leaves out less than 2e-17. */
+const SMALL = 2e-3
 const NEGLIGIBLE = 1e-19
 
 /** Does a component outgrow every power in this direction? Then there is no closed tail, and no need of one. */
@@ -89,47 +96,92 @@ export function converges(model: Model, direction: Direction, clock: Clock): boo
 export function tailAt(model: Model, direction: Direction, N: number, anyway = false): Tail | null {
   const exponent = leadingExponent(model, direction)
   if (exponent === null || explodes(model, direction)) return null
-  const leading: Component[] = []
-  const others: Component[] = []
-  for (const one of model.acting) {
-    const asymptote = asymptoteOf(one, direction)
-    const leads = exponentIn(one, direction) === exponent
-    if (leads && asymptote.kind === 'power' && !anyway && direction * (N - asymptote.settled) < 0) return null
-    ;(leads ? leading : others).push(one)
-  }
-  const density = leading.reduce((sum, one) => sum + one.density(N), 0)
+  const density = leadingDensity(model, direction, N, exponent, anyway)
   if (!(density > 0)) return null
   const slow = exponent === 0 ? logarithmicIn(model, direction) : null
-  if (slow)
-    return others.every((one) => Math.abs(one.density(N)) < NEGLIGIBLE * density)
-      ? slowTail(N, direction, density, slow)
-      : null
-  const corrections = others.map((one) => correctionOf(one, direction, N, density, exponent))
-  if (corrections.every((one) => one !== null && Math.abs(one.size) <= SMALL)) {
-    return powerTail(
-      N,
-      direction,
-      exponent,
-      density,
-      corrections.filter((one) => one !== null && one.size !== 0) as Correction[],
-    )
-  }
+  const corrections = correctionsAt(model, direction, N, exponent, density)
+  if (slow) return corrections?.length === 0 ? slowTail(N, direction, density, slow) : null
+  if (corrections && sumOfSizes(corrections) <= SMALL) return powerTail(N, direction, exponent, density, corrections)
   return anyway ? powerTail(N, direction, exponent, density, []) : null
 }
 
-/** δ and p of one component, or null while it does not yet follow its power and still matters. */
-function correctionOf(
-  one: Component,
+const sumOfSizes = (list: readonly Correction[]): number => list.reduce((sum, one) => sum + Math.abs(one.size), 0)
+
+/** Sum of the pure powers that win; 0 where one of them is not yet known as a power. */
+function leadingDensity(model: Model, direction: Direction, N: number, exponent: number, anyway: boolean): number {
+  let sum = 0
+  for (const one of model.acting) {
+    if (exponentIn(one, direction) !== exponent) continue
+    if (!anyway && !isSettled(asymptoteOf(one, direction), direction, N)) return 0
+    sum += powerPart(one, direction, N)
+  }
+  return sum
+}
+
+const isSettled = (asymptote: Asymptote, direction: Direction, N: number): boolean =>
+  asymptote.kind !== 'power' || direction * (N - asymptote.settled) >= 0
+
+/** Density at N over what the asymptote adds to its leading power. */
+function powerPart(one: Component, direction: Direction, N: number): number {
+  const density = one.density(N)
+  const asymptote = asymptoteOf(one, direction)
+  if (asymptote.kind !== 'power' || !asymptote.corrections) return density
+  return (
+    density / asymptote.corrections.reduce((sum, { size, rate }) => sum + size * Math.exp(-direction * rate * N), 1)
+  )
+}
+
+/** δ and p of all components, or null while one that matters does not yet follow its power, or is too large. */
+function correctionsAt(
+  model: Model,
   direction: Direction,
   N: number,
+  leading: number,
   density: number,
-  exponent: number,
-): Correction | null {
-  const asymptote = asymptoteOf(one, direction)
-  const size = one.density(N) / density
-  if (Math.abs(size) < NEGLIGIBLE) return { size: 0, rate: 1 }
-  if (asymptote.kind !== 'power' || direction * (N - asymptote.settled) < 0) return null
-  return { size, rate: direction * (asymptote.exponent - exponent) }
+): readonly Correction[] | null {
+  const list: Correction[] = []
+  for (const one of model.acting) {
+    const asymptote = asymptoteOf(one, direction)
+    const leads = exponentIn(one, direction) === leading
+    const size = powerPart(one, direction, N) / density
+    if (!leads && Math.abs(size) < NEGLIGIBLE) continue
+    if (!leads && (asymptote.kind !== 'power' || !isSettled(asymptote, direction, N) || Math.abs(size) > SMALL))
+      return null
+    if (asymptote.kind !== 'power') continue
+    const rate = direction * (asymptote.exponent - leading)
+    if (!leads) list.push({ size, rate })
+    for (const more of asymptote.corrections ?? [])
+      list.push({ size: size * more.size * Math.exp(-direction * more.rate * N), rate: rate + more.rate })
+  }
+  return merged(list)
+}
+
+/** Those of one rate added up. */
+function merged(list: readonly Correction[]): readonly Correction[] {
+  const sums: Correction[] = []
+  for (const { size, rate } of list) {
+    const at = sums.findIndex((one) => one.rate === rate)
+    if (at < 0) sums.push({ size, rate })
+    else sums[at] = { size: sums[at].size + size, rate }
+  }
+  return sums
+}
+
+/** (1 + δ)^(−½) − 1 as a sum of exponentials: products of up to five δ_i, each once, with its multinomial coefficient. */
+function inverseRoot(corrections: readonly Correction[]): readonly Correction[] {
+  const terms: Correction[] = []
+  const multiply = (order: number, size: number, rate: number, first: number, repeated: number): void => {
+    for (let i = first; i < corrections.length; i++) {
+      const times = i === first ? repeated + 1 : 1
+      const product = (size * corrections[i].size * order) / times
+      if (Math.abs(product) < NEGLIGIBLE) continue
+      const sum = rate + corrections[i].rate
+      terms.push({ size: BINOMIAL[order] * product, rate: sum })
+      if (order < ORDERS) multiply(order + 1, product, sum, i, times)
+    }
+  }
+  multiply(1, 1, 0, 0, 0)
+  return terms
 }
 
 function powerTail(
@@ -141,11 +193,14 @@ function powerTail(
 ): Tail {
   const scale = 1 / Math.sqrt(density)
   const kappa = (-direction * exponent) / 2
+  const terms = inverseRoot(corrections)
   return {
     N,
     direction,
-    time: { kind: 'power', scale, kappa, corrections },
-    conformal: { kind: 'power', scale: scale * Math.exp(-N), kappa: kappa + direction, corrections },
+    time: { kind: 'power', scale, kappa, terms },
+    conformal: { kind: 'power', scale: scale * Math.exp(-N), kappa: kappa + direction, terms },
+    corrections,
+    left: BINOMIAL[ORDERS + 1] * sumOfSizes(corrections) ** (ORDERS + 1),
     expansion: (D) => {
       const sum = corrections.reduce((total, one) => total + one.size * Math.exp(-one.rate * D), 1)
       return density * Math.exp(-direction * exponent * D) * sum
@@ -156,12 +211,14 @@ function powerTail(
 function slowTail(N: number, direction: Direction, density: number, law: Logarithmic): Tail {
   const scale = 1 / Math.sqrt(density)
   const rate = (direction * law.rate) / (1 + law.rate * N)
-  const shape = { kind: 'slow', rate, excess: law.overTwo / 2, corrections: [] } as const
+  const shape = { kind: 'slow', rate, excess: law.overTwo / 2 } as const
   return {
     N,
     direction,
     time: { ...shape, scale, decay: 0 },
     conformal: { ...shape, scale: scale * Math.exp(-N), decay: direction },
+    corrections: [],
+    left: 0,
     expansion: (D) => density * Math.exp(law.power * Math.log1p(rate * D)),
   }
 }
@@ -172,10 +229,7 @@ export function elapsedIn(integral: TailIntegral, D: number): number {
   const term = (kappa: number) => (kappa === 0 ? D : -Math.expm1(-kappa * D) / kappa)
   return (
     integral.scale *
-    integral.corrections.reduce(
-      (sum, one) => sum - 0.5 * one.size * term(integral.kappa + one.rate),
-      term(integral.kappa),
-    )
+    integral.terms.reduce((sum, { size, rate }) => sum + size * term(integral.kappa + rate), term(integral.kappa))
   )
 }
 
@@ -186,10 +240,7 @@ export function remainingIn(integral: TailIntegral, D: number): number {
   const term = (kappa: number) => Math.exp(-kappa * D) / kappa
   return (
     integral.scale *
-    integral.corrections.reduce(
-      (sum, one) => sum - 0.5 * one.size * term(integral.kappa + one.rate),
-      term(integral.kappa),
-    )
+    integral.terms.reduce((sum, { size, rate }) => sum + size * term(integral.kappa + rate), term(integral.kappa))
   )
 }
 

@@ -26,7 +26,8 @@ export interface Start {
 
 /** Corrections below this leave less than its square in D. */
 const SMALL = 1e-8
-/** Where f₀ vanishes, f itself is a correction, and good to a few times the others: e⁻⁹ of what a tail allows is below 1e-12. */
+const FAINT = 2e-9
+/** Where f₀ vanishes, f itself is a correction, and good to a few times the others: e⁻⁹ of what is faint is below 1e-12. */
 const EARLIER = 9
 /**
  * Where powers lie so close that no correction is small within the doubles, f starts as if the steepest were alone.
@@ -39,14 +40,17 @@ const FORGOTTEN = -150
 export function startOf(past: Arm): Start {
   const exponent = leadingExponent(past.model, -1) ?? 3
   const tail = past.tail && earlierTail(past.model, past.tail, exponent)
-  const small = tail && tail.N > FARTHEST && tail.time.corrections.every((one) => Math.abs(one.size) < SMALL)
+  const small = tail && tail.N > FARTHEST && tail.corrections.every((one) => Math.abs(one.size) < SMALL)
   return small ? closedStart(past.model, tail, exponent) : balancedStart(past.model, exponent)
 }
 
+/** Where the corrections have died out to a part of what `startOf` allows. */
 function earlierTail(model: Model, tail: Tail, exponent: number): Tail {
-  if (exponent === 3) return tail
-  const rates = tail.time.corrections.filter((one) => one.size !== 0).map((one) => one.rate)
-  const earlier = Math.max(FARTHEST + 1, tail.N - EARLIER / Math.min(1, exponent - 3, ...rates))
+  const least = exponent === 3 ? FAINT : FAINT * Math.exp(-EARLIER)
+  const ways = tail.corrections.map(
+    ({ size, rate }) => Math.log(Math.abs(size) / least) / Math.min(1, exponent - 3 || 1, rate),
+  )
+  const earlier = Math.max(FARTHEST + 1, tail.N - Math.max(0, ...ways))
   return earlier < tail.N ? (tailAt(model, -1, earlier) ?? tail) : tail
 }
 
@@ -56,7 +60,7 @@ const balanced = (k: number, source: number): number =>
 
 function closedStart(model: Model, tail: Tail, n: number): Start {
   const x = Math.exp(-tail.N)
-  const corrections = tail.time.corrections
+  const corrections = tail.corrections
   const expansion = tail.expansion(0)
   const leading = expansion / corrections.reduce((sum, one) => sum + one.size, 1)
   const k = 2 - n / 2
