@@ -14,6 +14,8 @@ export interface Term {
   readonly omega: number
   /** ln |Ω f| at N. */
   logSize(N: number): number
+  /** Bound of the rounding error of logSize at N, where it is `log`, in units of eps. */
+  rounding(N: number, log: number): number
   /** Bounds of the exponent n on [from, to]. */
   exponentRange(from: number, to: number): readonly [number, number]
 }
@@ -76,6 +78,7 @@ function powerComponent(key: Component['key'], omega: number, exponent: number):
     key,
     omega,
     logSize: (N) => logCoefficient - exponent * N,
+    rounding: (_, log) => roundingOf(logCoefficient, log, 0),
     exponentRange: () => range,
     density: (N) => omega * Math.exp(-exponent * N),
     bend: (N, d) => omega * Math.exp(-exponent * N) * expm2(-exponent * d),
@@ -92,6 +95,7 @@ function darkComponent(omega: number, law: Law): Component {
     key: 'dark',
     omega,
     logSize: (N) => log + law.logDensity(N),
+    rounding: (N, size) => roundingOf(log, size, law.roughness?.(N) ?? 0),
     exponentRange: law.exponentRange,
     density: (N) => omega * law.density(N),
     bend: (N, d) => omega * law.bend(N, d),
@@ -101,10 +105,19 @@ function darkComponent(omega: number, law: Law): Component {
   }
 }
 
-function termOf(darkEnergy: number, { factor, logDensity, exponentRange }: Part): Term {
+/** Of ln |Ω| + ln f: both are rounded, and ln f is four times its size or what its law says. */
+const roundingOf = (logCoefficient: number, log: number, roughness: number): number =>
+  2 + 2 * Math.abs(logCoefficient) + 4 * Math.abs(log - logCoefficient) + roughness
+
+function termOf(darkEnergy: number, { factor, logDensity, roughness, exponentRange }: Part): Term {
   const omega = darkEnergy * factor
   const log = Math.log(Math.abs(omega))
-  return { omega, logSize: (N) => log + logDensity(N), exponentRange }
+  return {
+    omega,
+    logSize: (N) => log + logDensity(N),
+    rounding: (N, size) => roundingOf(log, size, roughness?.(N) ?? 0),
+    exponentRange,
+  }
 }
 
 /** R(y) = 1 + 5y²/(7π²) to 1e-17 below this. */
@@ -130,6 +143,8 @@ function neutrinoComponent(state: MassiveState): Component {
     omega: state.density,
     // Also where y itself is no double any more.
     logSize: (N) => (N > cold ? logCold - 3 * N : logMassless + Math.log(energyRatio(y(N))) - 4 * N),
+    // The energy ratio is right to 4 eps, its argument to 4 more.
+    rounding: (N, log) => 10 + 2 * Math.abs(logMassless) + 4 * Math.abs(log) + 16 * Math.abs(N),
     density,
     bend: (N, d) =>
       density(N) *

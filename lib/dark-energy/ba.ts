@@ -1,3 +1,4 @@
+import { exponential, logarithm, minus, plus, times } from '../numerics/twofold'
 import { type Family, type Law, numberOf } from './law'
 import { powerLaw } from './power-law'
 import { rangeBetween, smoothLaw } from './smooth-law'
@@ -37,6 +38,13 @@ function boundedInRedshift(w0: number, wa: number): Law {
   const w = (N: number) => w0 + wa * shape(N)
   return smoothLaw({
     logDensity: (N) => -n * N + 1.5 * wa * logGrowth(N),
+    roughness: (N) =>
+      4 * (3 * (1 + Math.abs(w0)) * Math.abs(N) + Math.abs(1.5 * wa) * (1 + 2 * Math.abs(logGrowth(N)))),
+    preciseLogDensity: (N) => {
+      const z = minus(exponential([-N, 0]), [1, 0])
+      const slope = times([-3, 0], plus([1, 0], [w0, 0]))
+      return plus(times(slope, [N, 0]), times(times([1.5, 0], [wa, 0]), logarithm(plus([1, 0], times(z, z)))))
+    },
     logChange: (N, d) => -n * d + 1.5 * wa * logGrowthChange(N, d),
     w,
     wSlope: (N) => wa * shapeSlope(N),

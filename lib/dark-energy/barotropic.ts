@@ -1,3 +1,4 @@
+import { logarithm, minus, over, plus, times } from '../numerics/twofold'
 import { type Edge, type Family, type Law, type Logarithmic, numberOf, type Part } from './law'
 import { powerLaw } from './power-law'
 import { smoothLaw } from './smooth-law'
@@ -18,6 +19,12 @@ function powerOfLogarithm(excess: number, alpha: number, rate: number): Law {
   const u = (N: number) => 1 + rate * N
   const inside = smoothLaw({
     logDensity: (N) => power * Math.log1p(rate * N),
+    roughness: (N) => 4 * Math.abs(power) * (Math.abs((rate * N) / u(N)) + 2 * Math.abs(Math.log1p(rate * N))),
+    preciseLogDensity: (N) => {
+      const rest = minus([1, 0], [alpha, 0])
+      const exact = times(times([3, 0], [excess, 0]), rest)
+      return over(logarithm(plus([1, 0], times(exact, [N, 0]))), rest)
+    },
     logChange: (N, d) => power * Math.log1p((rate * d) / u(N)),
     w: (N) => -1 - excess / u(N),
     wSlope: (N) => (excess * rate) / u(N) ** 2,

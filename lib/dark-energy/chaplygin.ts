@@ -1,3 +1,4 @@
+import { exponential, logarithm, minus, over, plus, times } from '../numerics/twofold'
 import { type Family, type Law, numberOf } from './law'
 import { powerLaw } from './power-law'
 import { smoothLaw } from './smooth-law'
@@ -24,6 +25,12 @@ function generalisedChaplygin(b: number, alpha: number): Law {
   const settled = Math.log(1e-17 * Math.min(1, 1 + alpha))
   return smoothLaw({
     logDensity: (N) => bracketChange(0, N) / (1 + alpha),
+    roughness: (N) => (8 * (4 + Math.abs(k * N))) / (1 + alpha),
+    preciseLogDensity: (N) => {
+      const whole = plus([1, 0], [alpha, 0])
+      const dust = times(minus([1, 0], [b, 0]), exponential(times(times([-3, 0], whole), [N, 0])))
+      return over(logarithm(plus([b, 0], dust)), whole)
+    },
     logChange: (N, d) => bracketChange(N, d) / (1 + alpha),
     w: (N) => -constant(N),
     wSlope: (N) => -k * falling(N) * constant(N),

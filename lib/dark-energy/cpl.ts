@@ -1,3 +1,4 @@
+import { exponential, minus, plus, times } from '../numerics/twofold'
 import { type Asymptote, type Family, type Law, numberOf } from './law'
 import { powerLaw } from './power-law'
 import { rangeBetween, smoothLaw } from './smooth-law'
@@ -17,6 +18,12 @@ function linearInScale(w0: number, wa: number): Law {
   }
   return smoothLaw({
     logDensity: (N) => -early * N + 3 * wa * Math.expm1(N),
+    roughness: (N) => 4 * (3 * (1 + Math.abs(w0) + Math.abs(wa)) * Math.abs(N) + Math.abs(3 * wa * Math.expm1(N))),
+    preciseLogDensity: (N) => {
+      const early = times([-3, 0], plus([1, 0], plus([w0, 0], [wa, 0])))
+      const growth = minus(exponential([N, 0]), [1, 0])
+      return plus(times(early, [N, 0]), times(times([3, 0], [wa, 0]), growth))
+    },
     logChange: (N, d) => -early * d + 3 * wa * Math.exp(N) * Math.expm1(d),
     w,
     wSlope: (N) => -wa * Math.exp(N),

@@ -1,3 +1,4 @@
+import { exponential, minus, plus, times } from '../numerics/twofold'
 import { type Family, type Law, numberOf } from './law'
 import { powerLaw } from './power-law'
 import { rangeBetween, smoothLaw } from './smooth-law'
@@ -12,6 +13,12 @@ function quadraticInScale(w0: number, wa: number): Law {
   const w = (N: number) => w0 + wa * hump(N)
   return smoothLaw({
     logDensity: (N) => -n * N + 1.5 * wa * Math.expm1(N) ** 2,
+    roughness: (N) => 4 * (3 * (1 + Math.abs(w0)) * Math.abs(N) + Math.abs(1.5 * wa) * Math.expm1(N) ** 2),
+    preciseLogDensity: (N) => {
+      const growth = minus(exponential([N, 0]), [1, 0])
+      const slope = times([-3, 0], plus([1, 0], [w0, 0]))
+      return plus(times(slope, [N, 0]), times(times([1.5, 0], [wa, 0]), times(growth, growth)))
+    },
     logChange: (N, d) => {
       const [a, growth] = [Math.exp(N), Math.expm1(d)]
       return -n * d + 1.5 * wa * a * growth * (a * (growth + 2) - 2)

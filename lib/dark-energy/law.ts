@@ -2,6 +2,7 @@
  * A dark-energy law: density and equation of state as functions of N = ln a, with N = 0 today.
  * n = 3(1 + w) = −d ln f/dN is the local exponent: f ∝ a^(−n).
  */
+import type { Twofold } from '../numerics/twofold'
 import type { Parameter, ParameterValues } from '../parameter'
 import type { Potential } from './potential'
 
@@ -49,6 +50,8 @@ export interface Part {
   readonly factor: number
   /** ln of the part over its factor. */
   logDensity(N: number): number
+  /** As `roughness` of a law. */
+  roughness?(N: number): number
   exponentRange(from: number, to: number): readonly [number, number]
 }
 
@@ -57,6 +60,13 @@ export interface Law {
   density(N: number): number
   /** ln |f(N)|, −∞ where f = 0. */
   logDensity(N: number): number
+  /**
+   * Bound of the rounding error of logDensity in units of eps, beyond four times its own size: from the sizes of what it is the sum
+   * of, four each. Absent where nothing cancels.
+   */
+  roughness?(N: number): number
+  /** ln f(N) to twice the digits, for N inside the law; absent where only doubles are known. */
+  preciseLogDensity?(N: number): Twofold
   /** f(N + d) − f(N), without cancellation for small d. */
   change(N: number, d: number): number
   /** f(N + d) − f(N) − d f′(N), without cancellation for small d. */

@@ -1,3 +1,4 @@
+import { minus, plus, times } from '../numerics/twofold'
 import { type Asymptote, type Family, type Law, numberOf } from './law'
 import { powerLaw } from './power-law'
 import { rangeBetween, smoothLaw } from './smooth-law'
@@ -11,6 +12,11 @@ function linearInLogarithm(w0: number, wa: number): Law {
   const both: Asymptote = { kind: wa > 0 ? 'exploding' : 'vanishing' }
   return smoothLaw({
     logDensity: (N) => N * (1.5 * wa * N - n),
+    roughness: (N) => 4 * (Math.abs(1.5 * wa * N * N) + 3 * (1 + Math.abs(w0)) * Math.abs(N)),
+    preciseLogDensity: (N) => {
+      const bend = times(times([1.5, 0], [wa, 0]), [N, 0])
+      return times(minus(bend, times([3, 0], plus([1, 0], [w0, 0]))), [N, 0])
+    },
     logChange: (N, d) => d * (1.5 * wa * (2 * N + d) - n),
     w,
     wSlope: () => -wa,

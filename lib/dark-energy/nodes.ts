@@ -44,8 +44,11 @@ function interpolated(at: readonly number[], w: readonly number[]): Law {
     return piece.logDensity + logChangeWithin(piece.w, piece.w.origin, N - piece.w.origin)
   }
   const last = x.length - 1
+  // Every piece rounds its cubic and its place, and up to fourteen are added up.
+  const [steepest, farthest] = [Math.max(...w.map(Math.abs)), Math.max(...x.map(Math.abs))]
   return smoothLaw({
     logDensity,
+    roughness: (N) => 192 * (1 + steepest) * (Math.abs(N) + farthest),
     logChange: (N, d) => logChangeAcross(pieces, N, d),
     w: wAt,
     wSlope: (N) => cubicSlopeAt(pieceAt(N).w, N),

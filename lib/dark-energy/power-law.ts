@@ -1,4 +1,5 @@
 /** f = a^(−n) with one exponent throughout: the law of a constant w, and what `beyond:hold` continues with. */
+import { plus, times } from '../numerics/twofold'
 import type { Law } from './law'
 import { smoothLaw } from './smooth-law'
 
@@ -7,8 +8,10 @@ export function powerLaw(w: number): Law {
   const n = 3 * (1 + w)
   const asymptote = { kind: 'power', exponent: n, logCoefficient: 0, settled: 0 } as const
   const range = [n, n] as const
+  const precise = times([-3, 0], plus([1, 0], [w, 0]))
   const law = smoothLaw({
     logDensity: n === 0 ? () => 0 : (N) => -n * N,
+    preciseLogDensity: (N) => times(precise, [N, 0]),
     logChange: n === 0 ? () => 0 : (_, d) => -n * d,
     w: () => w,
     wSlope: () => 0,

@@ -1,9 +1,12 @@
 /** A law from its logarithm: all that follows from ln f, its differences, w and w′, for a density that never vanishes. */
 import { relativeBend } from '../numerics/bend'
+import type { Twofold } from '../numerics/twofold'
 import type { Asymptote, Law } from './law'
 
 export interface Logarithm {
   logDensity(N: number): number
+  roughness?(N: number): number
+  preciseLogDensity?(N: number): Twofold
   /** ln f(N + d) − ln f(N), without cancellation for small d. */
   logChange(N: number, d: number): number
   w(N: number): number
@@ -16,10 +19,23 @@ export interface Logarithm {
 }
 
 export function smoothLaw(log: Logarithm): Law {
-  const { logDensity, logChange, w, wSlope, exponentRange, past, future, breaks = [] } = log
+  const {
+    logDensity,
+    roughness,
+    preciseLogDensity,
+    logChange,
+    w,
+    wSlope,
+    exponentRange,
+    past,
+    future,
+    breaks = [],
+  } = log
   return {
     density: (N) => Math.exp(logDensity(N)),
     logDensity,
+    roughness,
+    preciseLogDensity,
     change: (N, d) => {
       const [log, change] = [logDensity(N), logChange(N, d)]
       // A density too small for doubles may grow into them.

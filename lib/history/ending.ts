@@ -2,35 +2,81 @@
 
 import type { Component } from '../components'
 import type { Logarithmic } from '../dark-energy/law'
-import { logarithmicIn } from '../model'
+import { logarithmicIn, type Model } from '../model'
 import type { Arm } from './arm'
 import type { End, EndKind } from './outcome'
+import type { Search } from './search'
 import { explodes, exponentIn, leadingExponent } from './tail'
+
+/** What the search ahead and, after a turnaround, the search back say of the end. */
+export interface Fate {
+  readonly kind: EndKind
+  readonly proven: boolean
+  /** One sentence, and another where it is not proven. */
+  readonly because: string
+}
+
+/** `home` is the search to smaller a by the law of the future. */
+export function fateOf(model: Model, future: Search, home: Search): Fate {
+  const told = (kind: EndKind, because: string, doubt: string | null): Fate => ({
+    kind,
+    proven: doubt === null,
+    because: doubt === null ? because : `${because} ${doubt}`,
+  })
+  if (future.kind === 'double') return told('static', AT_REST, future.doubt)
+  if (future.kind === 'singular') return told('singular', singularity(model, 1), future.doubt)
+  if (future.kind === 'none' && future.farRoot === null) return told(...expanding(model), future.doubt)
+  const size = future.kind === 'root' ? Math.exp(future.N).toPrecision(4) : null
+  return told(...afterTurning(model, size, home), future.doubt ?? home.doubt)
+}
+
+const AT_REST = 'E² and its slope vanish together at this scale factor: the expansion comes to rest there.'
+const FAR = 'E² vanishes at a scale factor that is beyond the range of floating-point numbers.'
+
+function afterTurning(model: Model, size: string | null, home: Search): readonly [EndKind, string] {
+  const turns = size === null ? FAR : 'The expansion turns round.'
+  switch (home.kind) {
+    case 'root':
+      return [
+        'oscillating',
+        size === null
+          ? FAR
+          : 'E² vanishes at a larger and at a smaller scale factor: expansion and contraction follow each other for ever.',
+      ]
+    case 'double':
+      return ['static', `${turns} The contraction comes to rest where E² and its slope vanish together.`]
+    case 'singular':
+      return ['singular', `${turns} ${singularity(model, -1)}`]
+    case 'none':
+      return [
+        'crunch',
+        size === null
+          ? FAR
+          : `E² vanishes at a = ${size}: the expansion stops there and turns into contraction, down to a = 0.`,
+      ]
+  }
+}
 
 /** `future` leads from today to larger a; `home` to smaller a by the same law: the way back after a turnaround. */
 export function endOf(future: Arm, home: Arm): End {
-  if (future.end.kind === 'root') return turned(future, home, future.end.N, future.end.certain)
-  if (future.end.kind === 'double') {
-    const because = 'E² and its slope vanish together at this scale factor: the expansion comes to rest there.'
-    const proven = future.model.acting.length === 1
-    return { kind: 'static', time: null, scale: scaleAt(future.end.N), turnaround: null, proven, because }
+  const fate = fateOf(future.model, future.end, home.end)
+  const total = future.time.total
+  if (future.end.kind === 'root') {
+    const turnaround = { time: total, scale: Math.exp(future.end.N) }
+    return { ...fate, ...whenBack(fate.kind, 2 * total + home.time.total, home.end), turnaround }
   }
-  if (future.end.kind === 'singular') {
-    const time = Number.isFinite(future.time.total) ? future.time.total : null
-    const scale = scaleAt(future.end.N)
-    return { kind: 'singular', time, scale, turnaround: null, proven: true, because: singularity(future) }
-  }
-  if (future.end.farRoot !== null) {
-    const because = 'E² vanishes at a scale factor that is beyond the range of floating-point numbers.'
-    if (home.end.kind === 'none')
-      return { kind: 'crunch', time: null, scale: 0, turnaround: null, proven: true, because }
-    const kind = home.end.kind === 'root' ? 'oscillating' : home.end.kind === 'double' ? 'static' : 'singular'
-    const scale = kind === 'oscillating' ? null : scaleAt(home.end.N)
-    return { kind, time: null, scale, turnaround: null, proven: true, because }
-  }
-  const [kind, because] = expanding(future)
-  const time = Number.isFinite(future.time.total) ? future.time.total : null
-  return { kind, time, scale: null, turnaround: null, proven: true, because }
+  const scale = future.end.kind === 'none' ? null : scaleAt(future.end.N)
+  if (future.end.kind === 'none' && future.end.farRoot !== null)
+    return { ...fate, ...whenBack(fate.kind, Number.POSITIVE_INFINITY, home.end), turnaround: null }
+  const time = future.end.kind !== 'double' && Number.isFinite(total) ? total : null
+  return { ...fate, time, scale, turnaround: null }
+}
+
+/** When and where a universe that turns round ends. */
+function whenBack(kind: EndKind, time: number, home: Search): Pick<End, 'time' | 'scale'> {
+  if (kind === 'oscillating') return { time: null, scale: null }
+  const scale = home.kind === 'none' ? 0 : scaleAt(home.N)
+  return { time: kind !== 'static' && Number.isFinite(time) ? time : null, scale }
 }
 
 /** e^N, or null where that is no double. */
@@ -40,32 +86,11 @@ function scaleAt(N: number): number | null {
 }
 
 /** What happens where the law of dark energy ends. */
-export function singularity({ model, direction }: Arm): string {
+export function singularity(model: Model, direction: 1 | -1): string {
   const diverges = (logarithmicIn(model, direction)?.power ?? 0) < 0
   return diverges
     ? 'The density of dark energy diverges at this scale factor, and E² with it.'
     : 'Dark energy is used up at this scale factor while its pressure, and with it ä, diverges.'
-}
-
-function turned(future: Arm, home: Arm, N: number, certain: boolean): End {
-  const turnaround = { time: future.time.total, scale: Math.exp(N) }
-  if (home.end.kind === 'root') {
-    const because =
-      'E² vanishes at a larger and at a smaller scale factor: expansion and contraction follow each other for ever.'
-    return { kind: 'oscillating', time: null, scale: null, turnaround, proven: certain && home.end.certain, because }
-  }
-  if (home.end.kind === 'double') {
-    const because =
-      'The expansion turns round, and the contraction comes to rest where E² and its slope vanish together.'
-    return { kind: 'static', time: null, scale: Math.exp(home.end.N), turnaround, proven: false, because }
-  }
-  const time = 2 * future.time.total + home.time.total
-  if (home.end.kind === 'singular') {
-    const because = `The expansion turns round. ${singularity(home)}`
-    return { kind: 'singular', time, scale: Math.exp(home.end.N), turnaround, proven: certain, because }
-  }
-  const because = `E² vanishes at a = ${Math.exp(N).toPrecision(4)}: the expansion stops there and turns into contraction, down to a = 0.`
-  return { kind: 'crunch', time: Number.isFinite(time) ? time : null, scale: 0, turnaround, proven: certain, because }
 }
 
 const NAMES: Readonly<Record<Component['key'], string>> = {
@@ -76,15 +101,14 @@ const NAMES: Readonly<Record<Component['key'], string>> = {
   dark: 'dark energy',
 }
 
-function expanding(future: Arm): readonly [EndKind, string] {
-  const { model } = future
-  if (explodes(model, future.direction)) {
+function expanding(model: Model): readonly [EndKind, string] {
+  if (explodes(model, 1)) {
     return [
       'rip',
       'The density of dark energy grows faster than any power of a, so that a becomes infinite in finite time.',
     ]
   }
-  const n = leadingExponent(model, future.direction)
+  const n = leadingExponent(model, 1)
   if (n === null) return ['decelerating', 'All that is left thins out faster than any power of a.']
   const rulers = model.acting.filter((one) => exponentIn(one, 1) === n).map((one) => NAMES[one.key])
   const who = [...new Set(rulers)].join(' and ')

@@ -1,44 +1,52 @@
 /** Where a history comes from, decided by the first root of E² into the past or by the component that rules as a → 0. */
-import { logarithmicIn } from '../model'
+import { logarithmicIn, type Model } from '../model'
 import type { Arm } from './arm'
 import { singularity } from './ending'
-import type { Origin } from './outcome'
+import type { Origin, OriginKind } from './outcome'
+import type { Search } from './search'
 import { explodes, leadingExponent } from './tail'
 
-/** `past` leads from today to smaller a, `back` to larger a by the same law: what a bounce came in from. */
-export function originOf(past: Arm, back: Arm): Origin {
-  if (past.end.kind === 'double') {
-    const because = 'E² and its slope vanish together at this scale factor: the expansion emerges from a static state.'
-    const proven = past.model.acting.length === 1
-    return { kind: 'static', time: null, scale: Math.exp(past.end.N), proven, because }
-  }
-  if (past.end.kind === 'singular') {
-    const at = { time: -past.time.total, scale: Math.exp(past.end.N) }
-    return { kind: 'singular', ...at, proven: true, because: singularity(past) }
-  }
-  const root = past.end.kind === 'root' ? past.end.N : past.end.farRoot
-  if (root !== null) return turning(past, back, root, past.end.kind !== 'root' || past.end.certain)
-  const exponent = leadingExponent(past.model, past.direction)
-  // Something that varies like a power of ln a may still reach back to a = 0 in finite time.
-  const power = exponent === 0 ? (logarithmicIn(past.model, past.direction)?.overTwo ?? 0) : exponent
-  const finite = explodes(past.model, past.direction) || (power !== null && power > 0)
-  return {
-    kind: finite ? 'big-bang' : 'eternal',
-    time: finite ? -past.time.total : null,
-    scale: 0,
-    proven: true,
-    because: finite
-      ? 'E² stays positive down to a = 0, where the density diverges.'
-      : 'E² stays positive down to a = 0, which lies infinitely far back.',
-  }
+/** What the search back and, before a bounce, the search to larger a by the same law say of the origin. */
+export interface Beginning {
+  readonly kind: OriginKind
+  readonly proven: boolean
+  readonly because: string
 }
 
-function turning(past: Arm, back: Arm, N: number, certain: boolean): Origin {
-  const at = { time: -past.time.total, scale: Math.exp(N), proven: certain }
-  const swings = back.end.kind === 'root' || (back.end.kind === 'none' && back.end.farRoot !== null)
-  if (!swings) {
-    return { kind: 'bounce', ...at, because: 'E² vanishes in the past: before that moment the universe contracted.' }
+export function beginningOf(model: Model, past: Search, before: Search): Beginning {
+  const told = (kind: OriginKind, because: string, doubt: string | null): Beginning => ({
+    kind,
+    proven: doubt === null,
+    because: doubt === null ? because : `${because} ${doubt}`,
+  })
+  if (past.kind === 'double') return told('static', AT_REST, past.doubt)
+  if (past.kind === 'singular') return told('singular', singularity(model, -1), past.doubt)
+  if (past.kind === 'root' || past.farRoot !== null) {
+    const swings = before.kind === 'root' || (before.kind === 'none' && before.farRoot !== null)
+    const doubt = past.doubt ?? before.doubt
+    return swings ? told('oscillating', SWINGS, doubt) : told('bounce', BOUNCE, doubt)
   }
-  const because = 'E² vanishes at a smaller and at a larger scale factor, and the universe swings between them.'
-  return { kind: 'oscillating', ...at, proven: certain && (back.end.kind !== 'root' || back.end.certain), because }
+  return reachesBack(model) ? told('big-bang', FINITE, past.doubt) : told('eternal', INFINITE, past.doubt)
+}
+
+const AT_REST = 'E² and its slope vanish together at this scale factor: the expansion emerges from a static state.'
+const BOUNCE = 'E² vanishes in the past: before that moment the universe contracted.'
+const SWINGS = 'E² vanishes at a smaller and at a larger scale factor, and the universe swings between them.'
+const FINITE = 'E² stays positive down to a = 0, where the density diverges.'
+const INFINITE = 'E² stays positive down to a = 0, which lies infinitely far back.'
+
+/** Is a = 0 only a finite time away? */
+function reachesBack(model: Model): boolean {
+  const exponent = leadingExponent(model, -1)
+  // Something that varies like a power of ln a may still reach back to a = 0 in finite time.
+  const power = exponent === 0 ? (logarithmicIn(model, -1)?.overTwo ?? 0) : exponent
+  return explodes(model, -1) || (power !== null && power > 0)
+}
+
+/** `past` leads from today to smaller a, `before` to larger a by the same law: what a bounce came in from. */
+export function originOf(past: Arm, before: Arm): Origin {
+  const beginning = beginningOf(past.model, past.end, before.end)
+  const infinite = beginning.kind === 'static' || beginning.kind === 'eternal'
+  const N = past.end.kind === 'none' ? (past.end.farRoot ?? Number.NEGATIVE_INFINITY) : past.end.N
+  return { ...beginning, time: infinite ? null : -past.time.total, scale: Math.exp(N) }
 }

@@ -1,7 +1,7 @@
 /** Which zones an arm is made of. */
 import { logarithmicIn, type Model } from '../model'
 import { type Direction, FARTHEST, type Search } from './turning'
-import { edgeTurningZone, edgeZone, plainZone, staticZone, turningZone, type Zone } from './zone'
+import { edgeTurningZone, edgeZone, narrowZone, plainZone, staticZone, turningZone, type Zone } from './zone'
 
 /** Width in ln a of the zone around a turning point, a static state or an edge. */
 const NEAR = 0.7
@@ -60,23 +60,33 @@ function beginningsOf(model: Model, direction: Direction, end: Search, reach: nu
     edge: null,
   })
   const list = [plain(0)]
+  let passed = 0
+  for (const narrow of end.narrows) {
+    const centre = Math.abs(narrow.N)
+    const half = Math.min(NEAR, centre - passed, Math.min(edge, reach) - centre) / 2
+    const zone = (from: number, to: number) => narrowZone(model, direction, narrow, from, to)
+    passed = centre + half
+    list.push({ from: centre - half, zone, edge: null }, plain(passed))
+  }
   if (law && edge < reach) {
     const zone = (from: number, to: number) => edgeZone(model, direction, law, from, to)
-    list.push({ from: nearEdge(edge), zone, edge: 'edge' }, plain(edge))
+    list.push({ from: Math.max(passed, nearEdge(edge)), zone, edge: 'edge' }, plain(edge))
   }
   const least = edge < reach ? edge : 0
   if (end.kind === 'none' || reach < Math.abs(end.N)) return list
   if (law && end.kind === 'singular') {
     const zone = (from: number, to: number) => edgeZone(model, direction, law, from, to)
-    return [...list, { from: nearEdge(reach), zone, edge: 'final' }]
+    return [...list, { from: Math.max(passed, nearEdge(reach)), zone, edge: 'final' }]
   }
   if (law && end.kind === 'root' && edge >= reach && edge - reach < AT_EDGE) {
     const zone = (from: number) => edgeTurningZone(model, direction, law, from)
-    return [...list, { from: nearEdge(reach), zone, edge: null }]
+    return [...list, { from: Math.max(passed, nearEdge(reach)), zone, edge: null }]
   }
-  const zoneTo = end.kind === 'root' ? turningZone : staticZone
-  const zone = (from: number, to: number) => zoneTo(model, direction, end.N, from, to)
-  return [...list, { from: Math.max(least, reach - NEAR), zone, edge: null }]
+  const zone = (from: number, to: number) =>
+    end.kind === 'root'
+      ? turningZone(model, direction, end.N, end.slope, from, to)
+      : staticZone(model, direction, end.N, from, to)
+  return [...list, { from: Math.max(least, passed, reach - NEAR), zone, edge: null }]
 }
 
 /** Not farther from an edge than halfway, so that what is left of dark energy tells from its density today. */

@@ -5,6 +5,7 @@
 import type { Logarithmic } from '../dark-energy/law'
 import { type Anchor, expansionAt, logExpansion, type Model } from '../model'
 import { NODE_COUNT, NODES } from '../numerics/chebyshev'
+import type { Narrow } from './search'
 import type { Direction } from './turning'
 
 export interface Samples {
@@ -83,12 +84,66 @@ export function plainZone(model: Model, direction: Direction, from: number, to: 
   }
 }
 
-/** s = −√(m_t − m): up to a turning point at N, where E² goes to zero linearly and dN/E like d√(m_t − m). */
-export function turningZone(model: Model, direction: Direction, N: number, from: number, to: number): Zone {
+/** Within this of a place where E² and its slope nearly vanish, its second differences tell it; farther off its first ones do as well. */
+const BENT = 0.05
+
+/** E² about an anchor at which its slope is known. */
+function expansionAbout(model: Model, anchor: Anchor, slope: number, d: number): number {
+  if (Math.abs(d) > BENT) return model.expansionFrom(anchor, d)
+  return anchor.value + slope * d + model.bendFrom(anchor.N, d)
+}
+
+/**
+ * d = √(2A/B) sinh s: past a minimum of E² that is A = `value` there, hardly above zero, so that E² = A + slope d + ½B d² + …
+ * and dN/E ∝ ds.
+ */
+export function narrowZone(model: Model, direction: Direction, narrow: Narrow, from: number, to: number): Zone {
+  const centre = Math.abs(narrow.N)
+  const inverseScale = Math.exp(-narrow.N)
+  const width = Math.sqrt((2 * narrow.value) / model.derivatives(narrow.N).second)
+  const variableAt = (m: number) => Math.asinh((m - centre) / width)
+  const offset = (s: number) => direction * width * Math.sinh(s)
+  const squared = (d: number) => expansionAbout(model, narrow, narrow.slope, d)
+  return {
+    from: variableAt(from),
+    to: variableAt(to),
+    width: 0.5,
+    distanceAt: (s) => centre + width * Math.sinh(s),
+    variableAt,
+    expansion: (s) => squared(offset(s)),
+    conditioning: (s) => 2 + (model.magnitude(narrow.N) * offset(s) ** 2) / squared(offset(s)),
+    sampleInto(out, middle, half) {
+      for (let k = 0; k < NODE_COUNT; k++) {
+        const s = middle + half * NODES[k]
+        const d = offset(s)
+        const rate = (width * Math.cosh(s)) / Math.sqrt(squared(d))
+        out.time[k] = rate
+        out.conformal[k] = rate * inverseScale * Math.exp(-d)
+      }
+    },
+  }
+}
+
+/**
+ * s = −√(m_t − m): up to a turning point at N, where E² goes to zero linearly and dN/E like d√(m_t − m). With its slope there given,
+ * next to a double root, from what E² bends.
+ */
+export function turningZone(
+  model: Model,
+  direction: Direction,
+  N: number,
+  slope: number | undefined,
+  from: number,
+  to: number,
+): Zone {
   const anchor: Anchor = { N, value: 0 }
   const inverseScale = Math.exp(-N)
   const offset = (s: number) => -direction * s * s
-  const expansion = (s: number) => model.expansionFrom(anchor, offset(s))
+  const expansion = (s: number) => {
+    const d = offset(s)
+    return slope === undefined ? model.expansionFrom(anchor, d) : expansionAbout(model, anchor, slope, d)
+  }
+  const size = slope === undefined ? null : model.magnitude(N)
   const farthest = Math.abs(N)
   return {
     from: -Math.sqrt(farthest - from),
@@ -98,7 +153,10 @@ export function turningZone(model: Model, direction: Direction, N: number, from:
     variableAt: (m) => -Math.sqrt(Math.max(0, farthest - m)),
     expansion,
     // Four roundings in each term.
-    conditioning: (s) => conditioningOf(4 * model.magnitudeFrom(anchor, offset(s)), expansion(s)),
+    conditioning: (s) =>
+      size === null
+        ? conditioningOf(4 * model.magnitudeFrom(anchor, offset(s)), expansion(s))
+        : 2 + (size * offset(s) ** 2) / expansion(s),
     sampleInto(out, centre, half) {
       for (let k = 0; k < NODE_COUNT; k++) {
         const s = centre + half * NODES[k]

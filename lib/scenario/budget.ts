@@ -20,6 +20,8 @@ export interface Budget {
   readonly closes: 'curvature' | 'dark'
   /** What rounding took from the closing density, as for cold matter. */
   readonly closingRemainder: number
+  /** Is every given density a number that somebody typed, none computed from a temperature? */
+  readonly typed: boolean
 }
 
 export function budgetOf(scenario: Scenario): Budget {
@@ -28,7 +30,8 @@ export function budgetOf(scenario: Scenario): Budget {
   const weights = states.map((one) => one.density)
   const cold = exactSum([scenario.matter, ...weights.map((one) => -one)])
   const terms = [photons, masslessNeutrinos, scenario.matter, value]
-  const closing = closingDensity(terms, scenario.radiation.kind !== 'thermal')
+  const typed = scenario.radiation.kind !== 'thermal'
+  const closing = closingDensity(terms, typed)
   return {
     photons,
     masslessNeutrinos,
@@ -40,6 +43,7 @@ export function budgetOf(scenario: Scenario): Budget {
     dark: given === 'curvature' ? closing.high : value,
     closes: given === 'curvature' ? 'dark' : 'curvature',
     closingRemainder: closing.low,
+    typed,
   }
 }
 

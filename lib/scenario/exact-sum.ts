@@ -33,10 +33,14 @@ function grow(parts: readonly number[], term: number): number[] {
 }
 
 /** Whether the shortest decimals of finite numbers, as people type them, add up to exactly zero. */
-export function decimalsCancel(terms: readonly number[]): boolean {
+export const decimalsCancel = (terms: readonly number[]): boolean =>
+  wholeMultiples(terms).reduce((sum, one) => sum + one, 0n) === 0n
+
+/** The shortest decimals of finite numbers as whole multiples of one power of ten. */
+export function wholeMultiples(terms: readonly number[]): readonly bigint[] {
   const decimals = terms.map(decimalOf)
   const finest = Math.min(...decimals.map((one) => one.exponent))
-  return decimals.reduce((sum, one) => sum + one.digits * 10n ** BigInt(one.exponent - finest), 0n) === 0n
+  return decimals.map((one) => one.digits * 10n ** BigInt(one.exponent - finest))
 }
 
 /** x = digits · 10^exponent, exactly as String(x) shows it. */

@@ -118,13 +118,13 @@ function turning(now: Now, voyage: Voyage): Ahead {
     throw overBudget('This universe turns round, bounces and expands again, which is not followed.')
   const turn = turns[0]
   const last = steps[steps.length - 1].to
-  const root = { kind: 'root', N: turn.N, certain: false } as const
+  const root = { kind: 'root', N: turn.N, narrows: [], doubt: null } as const
   const future = timedArm(now, { legs: legsBetween(steps, 0, turn.tau), forward: true, direction: 1 }, root)
   const back = turns.length === 1 && end === 'crunch' ? returnAfter(steps, turn.tau) : null
   if (back === null) return unfollowed(now, voyage, future)
   const descent = timedArm(now, { legs: legsBetween(steps, turn.tau, back), forward: false, direction: 1 }, root)
   const inwards = { legs: legsBetween(steps, back, last), forward: true, direction: -1 } as const
-  const home = timedArm(now, inwards, { kind: 'none', farRoot: null })
+  const home = timedArm(now, inwards, { kind: 'none', farRoot: null, narrows: [], doubt: null })
   return { future, descent, home, end: crunchAfter(future, descent.time.total + home.time.total, 1) }
 }
 

@@ -1,0 +1,134 @@
+/**
+ * Where the certified steps have come near to a zero of E²: is it passed, is it a turning point, or do E² and its slope vanish
+ * together? A turning point is proven by a place beyond it with E² < 0, a passage by steps on E² with twice the digits.
+ */
+import { expansionAt, type Model } from '../model'
+import type { Balance, Direction } from './balance'
+import { exactlyStatic } from './exactly-static'
+import { preciseExpansion, preciseSlope } from './precise'
+import type { Narrow } from './search'
+
+export type Encounter =
+  /** `slope` where it takes twice the digits. */
+  | { readonly kind: 'root'; readonly N: number; readonly slope: number | null; readonly doubt: string | null }
+  | { readonly kind: 'double'; readonly N: number; readonly doubt: string | null }
+  /** E² stays positive up to N, where doubles are enough again. */
+  | { readonly kind: 'passed'; readonly N: number; readonly narrow: Narrow }
+
+/** h from which on doubles are enough again, well above where they are left. */
+const CLEAR = 1e-9
+/** Rate of fall of h that is no matter of rounding. */
+const STEEP = 1e-4
+/** Newton's steps from where the search came to rest are far shorter than this in ln a. */
+const STRAY = 0.1
+const MOST_STEPS = 400
+
+/** Slope of E² over the sizes of its terms that tells a simple root. */
+const SLOPE = 1e-7
+const ROUNDED = 'Rounding could change whether E² becomes negative there.'
+const UNDECIDED =
+  'E² and its slope vanish together to all digits that are computed, and one more digit could change that.'
+
+/** What becomes of h, which the balance has just weighed at N. */
+export function meet(model: Model, balance: Balance, N: number, direction: Direction, left: number): Encounter {
+  return steepRoot(model, balance, N, direction, left) ?? stepsWithAllDigits(model, balance, N, direction, left)
+}
+
+/** A simple root that doubles can tell: h falls steeply here, and is negative a little farther on. */
+function steepRoot(
+  model: Model,
+  balance: Balance,
+  start: number,
+  direction: Direction,
+  left: number,
+): Encounter | null {
+  const span = Math.min(STEEP / 16, left / 2)
+  const least = balance.falling(span)
+  if (!(least > STEEP)) return null
+  const distance = (Math.max(0, balance.h) + 4 * balance.error) / least
+  balance.weigh(start + direction * distance)
+  const passed = balance.h < -balance.error && distance < span
+  balance.weigh(start)
+  return passed ? { kind: 'root', N: polished(model, start), slope: null, doubt: null } : null
+}
+
+/** Newton's method on E². */
+function polished(model: Model, start: number): number {
+  let N = start
+  // Next to the edge of a law it wins no more than a part in each step.
+  for (let step = 0; step < 64; step++) {
+    const change = expansionAt(model, N, Math.exp(-N)) / model.derivatives(N).first
+    if (!(Math.abs(change) < STRAY)) break
+    N -= change
+    if (Math.abs(change) <= 0.5 * Number.EPSILON * Math.abs(N)) break
+  }
+  return N
+}
+
+function stepsWithAllDigits(
+  model: Model,
+  balance: Balance,
+  start: number,
+  direction: Direction,
+  left: number,
+): Encounter {
+  let [N, length] = [start, STEEP]
+  for (let step = 0; step < MOST_STEPS; step++) {
+    const { value, error } = preciseExpansion(model, N)
+    const h = (value[0] - error) / model.magnitude(N)
+    if (!(h > 0)) break
+    if (h > CLEAR) return { kind: 'passed', N, narrow: narrowAt(model, N) }
+    // 2 E²/(P + M) ≤ ln P − ln M, of which a little is given up for rounding.
+    const sure = 1.99 * h
+    length = Math.min(length, (left - Math.abs(N - start)) / 2)
+    const advance = Math.min(length, sure / balance.closing(length))
+    if (!(advance > 2 * Number.EPSILON * Math.abs(N))) break
+    N += direction * advance
+    length = 2 * advance
+    balance.weigh(N)
+  }
+  return rootBeyond(model, N, direction) ?? touching(model, N, direction)
+}
+
+/** A turning point at N, where E² is nothing, if E² is certainly negative a little farther on. */
+function rootBeyond(model: Model, N: number, direction: Direction): Encounter | null {
+  const least = Number.EPSILON * Math.max(Math.abs(N), 2 ** -20)
+  for (let d = 2 * least; d < STEEP; d *= 2) {
+    const { value, error } = preciseExpansion(model, N + direction * d)
+    if (value[0] + error < 0) return { kind: 'root', ...simpleRoot(model, N), doubt: null }
+    if (value[0] - error > 0 && d > 64 * least) break
+  }
+  return null
+}
+
+/** The root, to the digits that its slope allows. */
+function simpleRoot(model: Model, N: number): { readonly N: number; readonly slope: number | null } {
+  const slope = preciseSlope(model, N)
+  const flat = Math.abs(slope) < STEEP * model.magnitude(N)
+  return flat ? { N, slope } : { N: polished(model, N), slope: null }
+}
+
+function touching(model: Model, N: number, direction: Direction): Encounter {
+  // A slope that rounding could not have made, where E² itself is lost in it.
+  if (direction * model.derivatives(N).first < -SLOPE * model.magnitude(N)) {
+    return { kind: 'root', N: polished(model, N), slope: null, doubt: ROUNDED }
+  }
+  const doubt = exactlyStatic(model.budget, model.law) ? null : UNDECIDED
+  return { kind: 'double', N: atRest(model, N), doubt }
+}
+
+function narrowAt(model: Model, start: number): Narrow {
+  const N = atRest(model, start)
+  return { N, value: preciseExpansion(model, N).value[0], slope: preciseSlope(model, N) }
+}
+
+/** The minimum of E² near N: where its slope vanishes. */
+function atRest(model: Model, start: number): number {
+  let N = start
+  for (let step = 0; step < 8; step++) {
+    const { first, second } = model.derivatives(N)
+    if (!(Math.abs(first / second) < STRAY)) break
+    N -= first / second
+  }
+  return N
+}
