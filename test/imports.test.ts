@@ -22,6 +22,7 @@ const ORDER = [
   'words',
   'tables',
   'formats',
+  'takeaway',
   'figures',
   'answers',
   'interface',

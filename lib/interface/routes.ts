@@ -71,4 +71,14 @@ export const ROUTES: readonly Route[] = [
       },
     ],
   },
+  {
+    path: '/api/words',
+    method: 'get',
+    summary:
+      'Caption, alternative text, methods, summary in plain language, press card, LaTeX macros and BibTeX, with numbers rounded to what is known.',
+    parameters: [SCENARIOS],
+    answer: { [JSON_TYPE]: refTo('Words') },
+    refusals: [422],
+    examples: [{ title: 'Words for one scenario', query: 's=h0:70,matter:0.3' }],
+  },
 ]

@@ -126,6 +126,23 @@ export const SCHEMAS: Readonly<Record<string, Schema>> = {
     description: 'A scenario code as plain text, nothing percent-encoded',
   },
   BatchResult: { oneOf: [closed({ index, ...history }), closed({ index, problem: refTo('Problem') })] },
+  Words: closed({
+    engine: text,
+    figure: closed({ caption: text, alternative: text }),
+    scenarios: listOf(
+      closed({
+        code: text,
+        label: text,
+        caption: text,
+        alternative: text,
+        summary: text,
+        methods: text,
+        press: closed({ facts: listOf(closed({ title: text, text })) }),
+      }),
+    ),
+    macros: { ...text, description: 'LaTeX' },
+    bibtex: text,
+  }),
   RefusedParameter: closed({
     parameter: text,
     scenario: { type: ['integer', 'null'], description: 'The place of its s, counted from 0' },

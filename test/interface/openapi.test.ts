@@ -8,6 +8,7 @@ import { AT_FIELDS } from '../../lib/answers/epochs'
 import { askHistory } from '../../lib/answers/history'
 import { TABLE_FIELDS } from '../../lib/answers/layout'
 import { askTable } from '../../lib/answers/table'
+import { askWords } from '../../lib/answers/words'
 import { openApi } from '../../lib/interface/openapi'
 import { ROUTES } from '../../lib/interface/routes'
 import type { SCHEMAS } from '../../lib/interface/schemas'
@@ -83,6 +84,14 @@ describe('answers are as it says', () => {
     const answer = answerOf(askAt, `${s([...DEMO.codes])}&time=-100,-5,0,40`)
     expect(answer.scenarios[0].notes.length).toBeGreaterThan(0)
     expect(complaints('Epochs', answer)).toBe('')
+  })
+  test('words', () => {
+    expect(
+      complaints(
+        'Words',
+        answerOf((pairs: URLSearchParams) => askWords(pairs, HOME), s([...DEMO.codes])),
+      ),
+    ).toBe('')
   })
   test('tables', () => {
     const { pieces } = answerOf((pairs: URLSearchParams) => askTable(pairs, HOME), `${s([...DEMO.codes])}&format=json`)
