@@ -1,8 +1,10 @@
 'use client'
 
 import { QueryClient, QueryClientProvider } from '@tanstack/react-query'
-import { type MouseEvent, useEffect, useState } from 'react'
+import { type MouseEvent, type ReactNode, useEffect, useState } from 'react'
 import type { Explorer as View } from '../lib/answers/explorer'
+import type { RulerView } from '../lib/answers/ruler-view'
+import type { Shelf } from '../lib/answers/shelf'
 import { go, useAddress } from './live/address'
 import { useExplorer } from './live/use-explorer'
 import { Figure } from './ui/figure'
@@ -12,12 +14,17 @@ import { Ingredients } from './ui/ingredients'
 import { Measures } from './ui/measures'
 import { Moments } from './ui/moments'
 import { Refusal } from './ui/refusal'
+import { RulerPlace } from './ui/ruler-place'
 import { Status } from './ui/status'
 import { Verdicts } from './ui/verdicts'
 
 interface Props {
   readonly initial: View
+  readonly ruler: RulerView
+  readonly shelf: Shelf
   readonly edition: Edition
+  /** The ruler as the server draws it. */
+  readonly children: ReactNode
 }
 
 /** The page: complete as the server draws it, and alive from then on. */
@@ -30,7 +37,7 @@ export function Explorer(props: Props) {
   )
 }
 
-function Page({ initial, edition }: Props) {
+function Page({ initial, ruler, shelf, edition, children }: Props) {
   const address = useAddress()
   const { view, desk, waiting, trouble } = useExplorer(address, initial)
   useTitle(view.title)
@@ -48,6 +55,9 @@ function Page({ initial, edition }: Props) {
           <Moments view={view} />
           <Measures view={view} />
         </div>
+        <RulerPlace desk={desk} address={address} initial={ruler} shelf={shelf}>
+          {children}
+        </RulerPlace>
       </main>
       <Footer data={desk.links.data} edition={edition} />
       {address && <Status view={view} moving={address.moving} waiting={waiting} trouble={trouble} />}

@@ -1,8 +1,11 @@
 import type { Metadata } from 'next'
 import { cache } from 'react'
 import { explorer, type Explorer as View } from '../lib/answers/explorer'
+import { rulerOf } from '../lib/answers/ruler-view'
+import { SHELF } from '../lib/answers/shelf'
 import { EDITION } from './edition'
 import { Explorer } from './explorer'
+import { Ruler } from './ui/ruler'
 
 interface Props {
   readonly searchParams: Promise<Readonly<Record<string, string | string[] | undefined>>>
@@ -14,7 +17,14 @@ export async function generateMetadata(props: Props): Promise<Metadata> {
 }
 
 export default async function Page(props: Props) {
-  return <Explorer initial={await read(props)} edition={EDITION} />
+  const { s, ...others } = await props.searchParams
+  const ruler = rulerOf(all(s), (key) => all(others[key])[0])
+  const view = await read(props)
+  return (
+    <Explorer initial={view} ruler={ruler} shelf={SHELF} edition={EDITION}>
+      <Ruler desk={view} view={ruler} shelf={SHELF} hand={null} />
+    </Explorer>
+  )
 }
 
 /** Once for a request: the page and its metadata read the same. */

@@ -1,12 +1,13 @@
 /** Asks the server for what an address shows. */
 import type { Explorer } from '../../lib/answers/explorer'
-import { PLACE_KEYS } from '../../lib/words/place'
+import { PLACE_KEYS, RULER_KEYS } from '../../lib/words/place'
 
 /** What of an address the answer depends on. */
 export function askedOf(search: string): string {
   const query = new URLSearchParams(search)
   const asked = new URLSearchParams(query.getAll('s').map((code) => ['s', code]))
-  for (const key of PLACE_KEYS) {
+  const apart: readonly string[] = RULER_KEYS
+  for (const key of PLACE_KEYS.filter((one) => !apart.includes(one))) {
     const value = query.get(key)
     if (value !== null) asked.set(key, value)
   }

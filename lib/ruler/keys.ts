@@ -26,16 +26,16 @@ export const BETWEEN_KEYS = [
 ] as const
 export type BetweenKey = (typeof BETWEEN_KEYS)[number]
 
-/** Read where nothing else is asked for. */
+/** Read where nothing else is asked for, in the order of the groups. */
 export const USUAL_READINGS = [
   'redshift',
   'age',
   'lookback',
-  'hubble',
   'comoving',
   'angular',
   'luminosity',
   'arcsecond',
   'skyVolume',
   'observedLine',
+  'hubble',
 ] as const

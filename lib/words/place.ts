@@ -24,6 +24,15 @@ export interface Place {
   /** Range of the view below it, in the unit of its horizontal axis. */
   readonly left: number | null
   readonly right: number | null
+  /** The ruler, as typed: its variable, its one or two epochs, what is read, a length, a line, an area, units with h. */
+  readonly epoch: string | null
+  readonly at: string | null
+  readonly until: string | null
+  readonly read: string | null
+  readonly length: string | null
+  readonly line: string | null
+  readonly sky: string | null
+  readonly units: 'h' | null
 }
 
 interface Key<K extends keyof Place = keyof Place> {
@@ -47,10 +56,22 @@ const KEYS = [
   key('to', (text) => within(text, -1e6, 1e6)),
   key('left', (text) => within(text, -1e6, 1e6)),
   key('right', (text) => within(text, -1e6, 1e6)),
+  key('epoch', token),
+  key('at', typed),
+  key('until', typed),
+  key('read', (text) => (/^[a-zA-Z,]{1,600}$/.test(text) ? text : null)),
+  key('length', typed),
+  key('line', typed),
+  key('sky', typed),
+  key('units', (text) => (text === 'h' ? text : null)),
 ] as const
 
 /** In the order in which they are written. */
 export const PLACE_KEYS: readonly (keyof Place)[] = KEYS.map(({ key }) => key)
+
+/** What only the ruler hangs on. */
+export const RULER_KEYS = ['epoch', 'at', 'until', 'read', 'length', 'line', 'sky', 'units'] as const
+export type RulerPlace = Pick<Place, (typeof RULER_KEYS)[number]>
 
 /** Reads a place leniently: whatever is not understood is what would hold anyway. `focus` counts from 1 in addresses. */
 export function readPlace(textOf: (key: string) => string | null | undefined, count: number): Place {
@@ -71,7 +92,7 @@ export function placePairs(place: Place): (readonly [key: string, value: string]
 
 /** The same, ready for an address. */
 export function placeKeys(place: Place): string[] {
-  return placePairs(place).map(([key, value]) => `${key}=${value.replace('+', '%2B')}`)
+  return placePairs(place).map(([key, value]) => `${key}=${encodeURIComponent(value).replaceAll('%2C', ',')}`)
 }
 
 function key<K extends keyof Place>(key: K, read: Key<K>['read'], write: Key<K>['write'] = plain): Key<K> {
@@ -90,6 +111,12 @@ function focused(text: string, count: number): number {
 /** A word whose meaning is that of the figures. */
 function token(text: string): string | null {
   return /^[a-z]{1,20}$/.test(text) ? text : null
+}
+
+/** Whatever a person typed: it is judged where it is used. */
+function typed(text: string): string | null {
+  const kept = text.replace(/[\p{C}\p{Zl}\p{Zp}]/gu, '').trim()
+  return kept === '' ? null : [...kept].slice(0, 40).join('')
 }
 
 function within(text: string, least: number, most: number): number | null {

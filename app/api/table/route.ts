@@ -1,8 +1,8 @@
 import { mapped } from '../../../lib/answers/question'
-import { askTable, type Download } from '../../../lib/answers/table'
+import { askTable } from '../../../lib/answers/table'
+import { streamed } from '../download'
 import { HOME } from '../home'
 import { pairsOf, reply } from '../reply'
-import { streamOf } from '../stream'
 
 export const dynamic = 'force-dynamic'
 
@@ -12,8 +12,3 @@ export function GET(request: Request): Response {
     mapped(question.answer(), streamed),
   )
 }
-
-const streamed = ({ mediaType, fileName, pieces }: Download) => ({
-  content: streamOf(pieces()),
-  headers: { 'Content-Type': mediaType, 'Content-Disposition': `attachment; filename="${fileName}"` },
-})

@@ -1,0 +1,30 @@
+/** The ruler of an address: the last one stays until the next is there. */
+import { useQuery } from '@tanstack/react-query'
+import type { RulerView } from '../../lib/answers/ruler-view'
+import { RULER_KEYS } from '../../lib/words/place'
+import type { Address } from './address'
+
+function askedOf(search: string): string {
+  const query = new URLSearchParams(search)
+  const keys: readonly string[] = ['s', ...RULER_KEYS]
+  return new URLSearchParams([...query].filter(([key]) => keys.includes(key))).toString()
+}
+
+export function useRuler(address: Address, initial: RulerView): RulerView {
+  const asked = askedOf(address.search)
+  const { data } = useQuery({
+    queryKey: ['ruler', asked],
+    queryFn: async ({ signal }): Promise<RulerView> => {
+      const response = await fetch(`/api/ruler?${asked}`, { signal })
+      if (!response.ok) throw new Error(`The server answered with ${response.status}.`)
+      return response.json()
+    },
+    // The address may have moved on since the server drew the page.
+    placeholderData: (previous) => previous ?? initial,
+    staleTime: Number.POSITIVE_INFINITY,
+    gcTime: 60_000,
+    networkMode: 'always',
+    refetchOnWindowFocus: false,
+  })
+  return data ?? initial
+}
