@@ -40,6 +40,8 @@ export interface Model {
   readonly acting: readonly Component[]
   /** E² at N, with a⁻¹ = e^(−N) passed in by callers who know it more exactly. */
   expansion(N: number, inverseScale: number): number
+  /** The same at many places, by the form that rounds least. */
+  expansionsInto(out: Float64Array, places: Float64Array, inverseScales: Float64Array, count: number): void
   /** E² at N where dark energy over its density today is known better than from N. */
   expansionWith(N: number, density: number): number
   /** Do today's densities cancel to 1 from a sum of sizes above 4? */
@@ -74,6 +76,23 @@ export function modelOf(budget: Budget, law: Law): Model {
     let relativistic = radiation
     if (x > NO_SCALE) for (const state of states) relativistic += state.masslessDensity * energyRatio(state.y / x)
     return ((relativistic * x + coldMatter) * x + curvature) * x * x
+  }
+
+  const expansionsInto: Model['expansionsInto'] = (out, places, inverseScales, count) => {
+    for (let i = 0; i < count; i++) {
+      const x = inverseScales[i]
+      out[i] = ((radiation * x + coldMatter) * x + curvature) * x * x
+    }
+    for (const { masslessDensity, y } of states) {
+      for (let i = 0; i < count; i++) {
+        const square = inverseScales[i] * inverseScales[i]
+        if (inverseScales[i] > NO_SCALE) out[i] += masslessDensity * energyRatio(y / inverseScales[i]) * square * square
+      }
+    }
+    if (dark !== 0 && law.exponent === 0) for (let i = 0; i < count; i++) out[i] += dark
+    else if (dark !== 0) for (let i = 0; i < count; i++) out[i] += dark * law.density(places[i])
+    if (!cancels) return
+    for (let i = 0; i < count; i++) if (Math.abs(places[i]) < NEAR_TODAY) out[i] = 1 + changeFrom(TODAY, places[i])
   }
 
   /** E²(anchor.N + d) − E²(anchor.N), and the sum of the sizes of its terms in `size`. */
@@ -138,6 +157,7 @@ export function modelOf(budget: Budget, law: Law): Model {
     cancels,
     signed: acting.some((one) => one.omega < 0 || one.terms !== undefined),
     expansion,
+    expansionsInto,
     expansionWith: (N, density) =>
       cancels && Math.abs(N) < NEAR_TODAY
         ? 1 + changeFrom(TODAY, N, density - 1)

@@ -3,7 +3,7 @@
  * A zone is a stretch of one direction from today; s grows outwards, and m = |N| is the distance from today in ln a.
  */
 import type { Logarithmic } from '../dark-energy/law'
-import { type Anchor, expansionAt, logExpansion, type Model } from '../model'
+import { type Anchor, logExpansion, type Model } from '../model'
 import { NODE_COUNT, NODES } from '../numerics/chebyshev'
 import type { Narrow } from './search'
 import type { Direction } from './turning'
@@ -16,6 +16,8 @@ export interface Samples {
 export interface Zone {
   readonly from: number
   readonly to: number
+  /** Is s the distance m itself, and E² what the model gives at N = ±m? */
+  readonly plain?: true
   /** First panel width to try. */
   readonly width: number
   distanceAt(s: number): number
@@ -29,59 +31,12 @@ export interface Zone {
 }
 
 /** Where E² and its reciprocal are doubles with all their digits. */
-const [SMALLEST, LARGEST] = [1e-290, 1e290]
+export const [SMALLEST, LARGEST] = [1e-290, 1e290]
 
 /** Rounding of a sum of this magnitude relative to its value; where both leave the doubles nothing cancels. */
-function conditioningOf(magnitude: number, value: number): number {
+export function conditioningOf(magnitude: number, value: number): number {
   const ratio = magnitude / value
   return ratio >= 0 && ratio < 1e16 ? 1 + ratio : 2
-}
-
-/** What rounding N and ln f does to f where exponents or densities are extreme, relative to E² in units of eps. */
-function darkNoise({ budget, law }: Model, N: number, squared: number): number {
-  if (budget.dark === 0 || Math.abs(N) < 1) return 0
-  const noise = Math.abs(law.logDensity(N)) + Math.abs(3 * (1 + law.w(N)) * N)
-  if (!(noise > 16 && noise < 1e16)) return 0
-  const share = Math.abs(budget.dark * law.density(N)) / squared
-  return share < 1e16 ? noise * share : noise
-}
-
-/** s = m: anywhere E² stays well above zero. */
-export function plainZone(model: Model, direction: Direction, from: number, to: number): Zone {
-  return {
-    from,
-    to,
-    width: 0.4,
-    distanceAt: (s) => s,
-    variableAt: (m) => m,
-    expansion: (s) => expansionAt(model, direction * s, Math.exp(-direction * s)),
-    conditioning: (s) => {
-      const N = direction * s
-      const squared = expansionAt(model, N, Math.exp(-N))
-      const sum = model.signed ? conditioningOf(model.magnitude(N), squared) : 2
-      return sum + darkNoise(model, N, squared) + (model.law.noise?.(N) ?? 0)
-    },
-    sampleInto(out, centre, half) {
-      const central = Math.exp(-direction * centre)
-      for (let k = 0; k < NODE_COUNT; k++) {
-        const offset = half * NODES[k]
-        // e^(−N) as a product: rounding N itself would cost eps |N|.
-        const inverseScale = central * Math.exp(-direction * offset)
-        const N = direction * (centre + offset)
-        const squared = expansionAt(model, N, inverseScale)
-        if (squared > SMALLEST && squared < LARGEST) {
-          const rate = 1 / Math.sqrt(squared)
-          out.time[k] = rate
-          out.conformal[k] = inverseScale * rate
-        } else {
-          // E² leaves the doubles before 1/E does, and 1/E before 1/(aE).
-          const log = -0.5 * logExpansion(model, N)
-          out.time[k] = Math.exp(log)
-          out.conformal[k] = Math.exp(log - N)
-        }
-      }
-    },
-  }
 }
 
 /** Within this of a place where E² and its slope nearly vanish, its second differences tell it; farther off its first ones do as well. */

@@ -5,9 +5,11 @@
 
 export const NODE_COUNT = 16
 
-/** x_k = cos(π(k + ½)/16), descending from just below 1. */
+/** x_k = cos(π(k + ½)/16), descending from just below 1, exactly mirrored about 0. */
 export const NODES: Float64Array = Float64Array.from({ length: NODE_COUNT }, (_, k) =>
-  Math.cos((Math.PI * (k + 0.5)) / NODE_COUNT),
+  k < NODE_COUNT / 2
+    ? Math.cos((Math.PI * (k + 0.5)) / NODE_COUNT)
+    : -Math.cos((Math.PI * (NODE_COUNT - k - 0.5)) / NODE_COUNT),
 )
 
 /** Coefficients of a series. Plain arrays are made and dropped faster than typed ones of this length. */

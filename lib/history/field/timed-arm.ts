@@ -78,7 +78,14 @@ function timedModel({ budget, today }: Route, trail: TimedTrail): Model {
     if (N < first) return model.expansion(N, inverseScale)
     return trail.rate(N) ** 2
   }
-  return { ...model, expansion, expansionFrom: (anchor, d) => expansion(anchor.N + d, Math.exp(-anchor.N - d)) }
+  return {
+    ...model,
+    expansion,
+    expansionsInto: (out, places, inverseScales, count) => {
+      for (let i = 0; i < count; i++) out[i] = expansion(places[i], inverseScales[i])
+    },
+    expansionFrom: (anchor, d) => expansion(anchor.N + d, Math.exp(-anchor.N - d)),
+  }
 }
 
 /** Time and conformal time along legs and on in the power law of a crunch, E² ∝ a⁻⁶, from N and H in `state`. */

@@ -1,0 +1,68 @@
+/** The zone in which ln a itself is the variable: anywhere E² stays well above zero. */
+import { expansionAt, logExpansion, type Model } from '../model'
+import { NODE_COUNT, NODES } from '../numerics/chebyshev'
+import type { Direction } from './turning'
+import { conditioningOf, LARGEST, SMALLEST, type Zone } from './zone'
+
+const [places, inverseScales, squares] = Array.from({ length: 3 }, () => new Float64Array(NODE_COUNT))
+
+/** s = m. */
+export function plainZone(model: Model, direction: Direction, from: number, to: number): Zone {
+  return {
+    plain: true,
+    from,
+    to,
+    width: WIDTH,
+    distanceAt: (s) => s,
+    variableAt: (m) => m,
+    expansion: (s) => expansionAt(model, direction * s, Math.exp(-direction * s)),
+    conditioning: (s) => {
+      const N = direction * s
+      const sum = model.signed ? conditioningOf(model.magnitude(N), expansionAt(model, N, Math.exp(-N))) : 2
+      return sum + darkNoise(model, N) + (model.law.noise?.(N) ?? 0)
+    },
+    sampleInto(out, centre, half) {
+      nodesInto(direction, centre, half)
+      model.expansionsInto(squares, places, inverseScales, NODE_COUNT)
+      for (let k = 0; k < NODE_COUNT; k++) {
+        const squared = squares[k]
+        if (squared > SMALLEST && squared < LARGEST) {
+          const rate = 1 / Math.sqrt(squared)
+          out.time[k] = rate
+          out.conformal[k] = inverseScales[k] * rate
+        } else {
+          // E² leaves the doubles before 1/E does, and 1/E before 1/(aE).
+          const log = -0.5 * logExpansion(model, places[k])
+          out.time[k] = Math.exp(log)
+          out.conformal[k] = Math.exp(log - places[k])
+        }
+      }
+    },
+  }
+}
+
+const WIDTH = 0.4
+
+/** N and a⁻¹ at the nodes: e^(−N) as a product, since rounding N itself would cost eps |N|; the nodes come in pairs ±x. */
+function nodesInto(direction: Direction, centre: number, half: number): void {
+  const central = Math.exp(-direction * centre)
+  for (let k = 0; k < NODE_COUNT / 2; k++) {
+    const offset = half * NODES[k]
+    const factor = Math.exp(-direction * offset)
+    const mirrored = NODE_COUNT - 1 - k
+    places[k] = direction * (centre + offset)
+    places[mirrored] = direction * (centre - offset)
+    inverseScales[k] = central * factor
+    inverseScales[mirrored] = central / factor
+  }
+}
+
+/** What rounding N and ln f does to f where exponents or densities are extreme, relative to E² in units of eps. */
+function darkNoise(model: Model, N: number): number {
+  const { budget, law } = model
+  if (budget.dark === 0 || Math.abs(N) < 1) return 0
+  const noise = Math.abs(law.logDensity(N)) + Math.abs(3 * (1 + law.w(N)) * N)
+  if (!(noise > 16 && noise < 1e16)) return 0
+  const share = Math.abs(budget.dark * law.density(N)) / expansionAt(model, N, Math.exp(-N))
+  return share < 1e16 ? noise * share : noise
+}
