@@ -1,6 +1,7 @@
 /** Columns that say of what: the share of each component, the law of dark energy, the temperature. */
 import { missing } from '../measures/outcome'
 import { densityFraction, equationOfState, type Share } from '../measures/rates'
+import { ROUNDING } from './accuracy'
 import type { Column, ColumnKey } from './column'
 import { FRIEDMANN, fixed, significant } from './quantity'
 
@@ -13,6 +14,7 @@ const share = (key: ColumnKey, symbol: string, label: string, meaning: string, o
   meaning,
   formula: `${symbol} = ρ/ρ_c`,
   source: FRIEDMANN,
+  accuracy: ROUNDING,
   value: (_, instant) => densityFraction(instant, of, instant.expansion),
 })
 
@@ -55,6 +57,7 @@ export const CONTENT_COLUMNS: readonly Column[] = [
     meaning: 'Pressure of dark energy over its energy density.',
     formula: 'w = p/(ρ c²)',
     source: 'Turner & White 1997, Phys. Rev. D 56, R4439',
+    accuracy: ROUNDING,
     value: (_, instant) => equationOfState(instant),
   },
 ]
@@ -68,6 +71,7 @@ export const TEMPERATURE: Column = {
   meaning: 'Temperature of the cosmic microwave background.',
   formula: 'T = T_0 (1 + z)',
   source: 'Tolman 1934, Relativity, Thermodynamics and Cosmology, Oxford',
+  accuracy: ROUNDING,
   value: ({ scenario }, { redshift }) =>
     scenario.radiation.kind === 'thermal'
       ? scenario.radiation.cmb * (1 + redshift)

@@ -3,6 +3,7 @@ import { JULIAN_YEAR, SPEED_OF_LIGHT } from '../constants'
 import { antipode, comovingVolume, transverseDistance } from '../measures/distances'
 import { isMissing, type Missing, missing } from '../measures/outcome'
 import { hubbleLengthMpc, perSecond } from '../units'
+import { INTEGRAL, ROUNDING } from './accuracy'
 import type { Column } from './column'
 import type { ColumnSubject, Instant } from './instant'
 import { fixed, HOGG, significant } from './quantity'
@@ -80,6 +81,7 @@ export const DISTANCE_COLUMNS: readonly Column[] = [
     meaning: 'Proper distance today to what is seen at this epoch.',
     formula: 'D_C = ∫ c dt/a, from then to today',
     source: `${HOGG}, eq. 15`,
+    accuracy: INTEGRAL,
     value: ({ scenario }, instant) => times(chiOf(instant), hubbleLengthMpc(scenario.h0)),
   },
   {
@@ -91,6 +93,7 @@ export const DISTANCE_COLUMNS: readonly Column[] = [
     meaning: 'Comoving length across the line of sight over the angle under which it is seen.',
     formula: 'D_M = |R sin(D_C/R)|, D_C or R sinh(D_C/R), with R = (c/H_0)/√|Ω_k|',
     source: `${HOGG}, eq. 16`,
+    accuracy: INTEGRAL,
     value: transverseOf,
     note: FOLDED,
   },
@@ -103,6 +106,7 @@ export const DISTANCE_COLUMNS: readonly Column[] = [
     meaning: 'Proper length across the line of sight over the angle under which it is seen.',
     formula: 'D_A = D_M/(1 + z)',
     source: `${HOGG}, eq. 18`,
+    accuracy: INTEGRAL,
     value: angularOf,
     note: FOLDED,
   },
@@ -115,6 +119,7 @@ export const DISTANCE_COLUMNS: readonly Column[] = [
     meaning: 'Distance by which the flux follows from the luminosity as in static flat space.',
     formula: 'D_L = (1 + z) D_M',
     source: `${HOGG}, eq. 21`,
+    accuracy: INTEGRAL,
     value: luminosityOf,
     note: FOLDED,
   },
@@ -127,6 +132,7 @@ export const DISTANCE_COLUMNS: readonly Column[] = [
     meaning: 'Apparent less absolute bolometric magnitude.',
     formula: 'μ = 5 log_10(D_L/Mpc) + 25',
     source: `${HOGG}, eq. 25`,
+    accuracy: INTEGRAL,
     value: modulusOf,
     note: FOLDED,
   },
@@ -139,6 +145,7 @@ export const DISTANCE_COLUMNS: readonly Column[] = [
     meaning: 'Proper length seen under one arcsecond.',
     formula: 'ℓ = D_A π/648000',
     source: `${HOGG}, eq. 18`,
+    accuracy: INTEGRAL,
     value: (subject, instant) => times(angularOf(subject, instant), (1e3 * Math.PI) / 648000),
     note: FOLDED,
   },
@@ -151,6 +158,7 @@ export const DISTANCE_COLUMNS: readonly Column[] = [
     meaning: 'Comoving volume over the whole sky out to here.',
     formula: 'V_C = 4π ∫ D_M² dD_C',
     source: `${HOGG}, eq. 29`,
+    accuracy: INTEGRAL,
     value: volumeOf,
     note: WHOLE,
   },
@@ -165,5 +173,6 @@ export const DRIFT: Column = {
   meaning: 'Change per year of observer of the velocity that a source seen at this epoch appears to have.',
   formula: 'v̇ = c [H_0 − H/(1 + z)]',
   source: 'Sandage 1962, ApJ 136, 319; Loeb 1998, ApJ 499, L111',
+  accuracy: ROUNDING,
   value: driftOf,
 }

@@ -1,6 +1,7 @@
 /** Columns of the growth of structure. */
 import { growthAt, growthRateAt } from '../measures/growth'
 import { isMissing, type Missing, type Outcome } from '../measures/outcome'
+import { GROWTH } from './accuracy'
 import type { Column } from './column'
 import { fixed } from './quantity'
 
@@ -17,6 +18,7 @@ export const GROWTH_COLUMNS: readonly Column[] = [
     meaning: 'Linear density contrast over that of today, with smooth dark energy.',
     formula: 'D″ + (2 + (ln E)′) D′ = (3/2) Ω_s D, primes by ln a, D = 1 today',
     source: SOURCE,
+    accuracy: GROWTH,
     value: ({ history }, instant) => numberIn(growthAt(history, instant)),
   },
   {
@@ -26,8 +28,9 @@ export const GROWTH_COLUMNS: readonly Column[] = [
     unit: '',
     digits: fixed(4),
     meaning: 'Logarithmic slope of growth by the scale factor.',
-    formula: 'f = d ln D/d ln a',
+    formula: 'f = (d ln D)/(d ln a)',
     source: SOURCE,
+    accuracy: GROWTH,
     value: ({ history }, instant) => numberIn(growthRateAt(history, instant)),
   },
 ]

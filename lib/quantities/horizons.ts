@@ -3,6 +3,7 @@ import { sinceOrigin } from '../history/event'
 import { isMissing, type Missing, missing } from '../measures/outcome'
 import { eventHorizon, particleHorizon } from '../measures/sight'
 import { hubbleLengthGly } from '../units'
+import { INTEGRAL } from './accuracy'
 import type { Column } from './column'
 import type { ColumnSubject } from './instant'
 import { HORIZONS, significant } from './quantity'
@@ -20,6 +21,7 @@ export const HORIZON_COLUMNS: readonly Column[] = [
     meaning: 'Comoving distance that light covers from the origin to this epoch; negative before a bounce.',
     formula: 'c η = ∫ c dt/a, from the origin',
     source: HORIZONS,
+    accuracy: INTEGRAL,
     value: (subject, instant) => {
       const since = sinceOrigin(subject.history, instant, 'conformal')
       return Number.isFinite(since)
@@ -36,6 +38,7 @@ export const HORIZON_COLUMNS: readonly Column[] = [
     meaning: 'Comoving distance to the farthest matter whose light has arrived by this epoch.',
     formula: 'χ_ph = ∫ c dt/a, from the beginning; after a bounce the contraction counts',
     source: HORIZONS,
+    accuracy: INTEGRAL,
     value: (subject, instant) => inGly(particleHorizon(subject.history, instant), subject),
   },
   {
@@ -47,6 +50,7 @@ export const HORIZON_COLUMNS: readonly Column[] = [
     meaning: 'Comoving distance that light sent at this epoch can still cover before the end.',
     formula: 'χ_eh = ∫ c dt/a, to the end',
     source: HORIZONS,
+    accuracy: INTEGRAL,
     value: (subject, instant) => inGly(eventHorizon(subject.history, instant), subject),
   },
 ]

@@ -9,6 +9,7 @@ import { deceleration, jerk } from '../measures/rates'
 import { eventHorizon, particleHorizon, redshiftAt } from '../measures/sight'
 import { acousticAngle, dragRedshift, recombinationRedshift, soundHorizon } from '../measures/sound'
 import { hubbleLengthGly, hubbleLengthMpc, hubbleTimeGyr } from '../units'
+import { DRAG_EPOCH, FROM_DRAG_FIT, FROM_SCATTERING_FIT, INTEGRAL, LAST_SCATTERING, ROOT, ROUNDING } from './accuracy'
 import { FRIEDMANN, fixed, HORIZONS, type Quantity, type Subject, significant } from './quantity'
 
 export const MEASURE_KEYS = [
@@ -86,6 +87,7 @@ const ALL: readonly MeasureQuantity[] = [
     meaning: 'Time since the origin: the big bang, or the bounce.',
     formula: 't_0 = ∫ da/(a H), from the origin to today',
     source: FRIEDMANN,
+    accuracy: INTEGRAL,
     value: ({ history, scenario }) =>
       scaled(
         finiteOr(history.past.time.total, history.past.time.error, 'the past is infinite'),
@@ -101,6 +103,7 @@ const ALL: readonly MeasureQuantity[] = [
     meaning: 'The age that a universe of constant expansion speed would have.',
     formula: '1/H_0',
     source: FRIEDMANN,
+    accuracy: ROUNDING,
     value: ({ scenario }) => bounded(hubbleTimeGyr(scenario.h0)),
   },
   {
@@ -112,6 +115,7 @@ const ALL: readonly MeasureQuantity[] = [
     meaning: 'Proper distance at which recession today equals the speed of light.',
     formula: 'c/H_0',
     source: HORIZONS,
+    accuracy: ROUNDING,
     value: ({ scenario }) => bounded(hubbleLengthGly(scenario.h0)),
   },
   {
@@ -123,6 +127,7 @@ const ALL: readonly MeasureQuantity[] = [
     meaning: 'Comoving distance to the farthest matter whose light can have reached us.',
     formula: 'χ_ph = ∫ c dt/a, from the beginning to today',
     source: HORIZONS,
+    accuracy: INTEGRAL,
     value: (subject) => inGly(particle(subject), subject),
   },
   {
@@ -134,6 +139,7 @@ const ALL: readonly MeasureQuantity[] = [
     meaning: 'Comoving distance that light sent today can cover before the end: what can still be reached.',
     formula: 'χ_eh = ∫ c dt/a, from today to the end',
     source: HORIZONS,
+    accuracy: INTEGRAL,
     value: (subject) => inGly(event(subject), subject),
   },
   {
@@ -145,6 +151,7 @@ const ALL: readonly MeasureQuantity[] = [
     meaning: 'Redshift of the farthest galaxies that a signal sent today can ever reach.',
     formula: 'χ(z) = χ_eh',
     source: HORIZONS,
+    accuracy: ROOT,
     value: (subject) => {
       const horizon = event(subject)
       return isMissing(horizon) ? horizon : redshiftAt(subject.history, horizon.value, horizon.error)
@@ -159,6 +166,7 @@ const ALL: readonly MeasureQuantity[] = [
     meaning: 'Redshift beyond which galaxies recede faster than light today.',
     formula: 'χ(z) = c/H_0',
     source: HORIZONS,
+    accuracy: ROOT,
     value: (subject) => redshiftAt(subject.history, 1, 0),
   },
   {
@@ -170,6 +178,7 @@ const ALL: readonly MeasureQuantity[] = [
     meaning: 'Comoving distance to the farthest matter that will ever be seen from here.',
     formula: 'χ_vis = χ_ph + χ_eh',
     source: HORIZONS,
+    accuracy: INTEGRAL,
     value: (subject) => {
       const [behind, ahead] = [particle(subject), event(subject)]
       if (isMissing(behind)) return behind
@@ -184,8 +193,9 @@ const ALL: readonly MeasureQuantity[] = [
     unit: '',
     digits: fixed(3),
     meaning: 'Deceleration parameter today; negative while the expansion accelerates.',
-    formula: 'q = −ä a/ȧ²',
+    formula: 'q = −(ä a)/ȧ²',
     source: FRIEDMANN,
+    accuracy: ROUNDING,
     value: (subject) => withError(deceleration(today(subject)), rounding(subject)),
   },
   {
@@ -197,6 +207,7 @@ const ALL: readonly MeasureQuantity[] = [
     meaning: 'Third derivative of the scale factor today; 1 for matter and a cosmological constant in flat space.',
     formula: 'j = a² (d³a/dt³)/ȧ³',
     source: 'Visser 2004, Class. Quantum Grav. 21, 2603',
+    accuracy: ROUNDING,
     value: (subject) => withError(jerk(today(subject)), 8 * rounding(subject)),
   },
   {
@@ -209,6 +220,7 @@ const ALL: readonly MeasureQuantity[] = [
       'Redshift of the last change from deceleration to acceleration, or of the first one ahead (then negative).',
     formula: 'ä(z) = 0',
     source: FRIEDMANN,
+    accuracy: ROOT,
     value: (subject) =>
       redshiftOf(
         subject,
@@ -225,6 +237,7 @@ const ALL: readonly MeasureQuantity[] = [
     meaning: 'Redshift at which cold matter equals photons and all neutrinos.',
     formula: 'ρ_c = ρ_γ + ρ_ν',
     source: FRIEDMANN,
+    accuracy: ROOT,
     value: (subject) => {
       const { epochs, budget } = subject
       const none = 'cold matter and radiation are never equal on the expansion that holds today'
@@ -243,6 +256,7 @@ const ALL: readonly MeasureQuantity[] = [
     meaning: 'Redshift at which cold matter equals dark energy.',
     formula: 'ρ_c = ρ_DE',
     source: FRIEDMANN,
+    accuracy: ROOT,
     value: (subject) => {
       const { epochs, budget } = subject
       if (!(budget.dark > 0 && budget.coldMatter > 0))
@@ -260,6 +274,7 @@ const ALL: readonly MeasureQuantity[] = [
     meaning: 'Radius of curvature of space today.',
     formula: 'R_k = (c/H_0)/√|Ω_k|',
     source: FRIEDMANN,
+    accuracy: ROUNDING,
     value: (subject) =>
       subject.budget.curvature === 0
         ? missing('space is flat')
@@ -274,6 +289,7 @@ const ALL: readonly MeasureQuantity[] = [
     meaning: 'Redshift at which photons were last scattered.',
     formula: 'fit in Ω_b h² and Ω_m h²',
     source: 'Hu & Sugiyama 1996, ApJ 471, 542, eq. E-1, times 0.99818 to meet Planck 2018, arXiv:1807.06209',
+    accuracy: LAST_SCATTERING,
     value: ({ scenario }) => recombinationRedshift(scenario),
   },
   {
@@ -285,6 +301,7 @@ const ALL: readonly MeasureQuantity[] = [
     meaning: 'Redshift at which baryons were released from the photons.',
     formula: 'fit in Ω_b h² and Ω_m h²',
     source: 'Aizpuru, Arjona & Nesseris 2021, Phys. Rev. D 104, 043521, eq. A2',
+    accuracy: DRAG_EPOCH,
     value: ({ scenario }) => dragRedshift(scenario),
   },
   {
@@ -296,6 +313,7 @@ const ALL: readonly MeasureQuantity[] = [
     meaning: 'Comoving distance that sound covered until the end of the drag epoch.',
     formula: 'r_d = ∫ c_s dt/a, c_s = c/√(3 (1 + 3ρ_b/4ρ_γ))',
     source: 'Eisenstein & Hu 1998, ApJ 496, 605',
+    accuracy: FROM_DRAG_FIT,
     value: ({ history, scenario }) => {
       const z = dragRedshift(scenario)
       return isMissing(z) ? z : scaled(soundHorizon(history, scenario, z), hubbleLengthMpc(scenario.h0))
@@ -310,6 +328,7 @@ const ALL: readonly MeasureQuantity[] = [
     meaning: 'Angle under which the sound horizon at last scattering is seen.',
     formula: 'θ_* = r_s(z_*)/D_M(z_*)',
     source: 'Planck Collaboration 2020, A&A 641, A6, arXiv:1807.06209',
+    accuracy: FROM_SCATTERING_FIT,
     value: ({ history, scenario }) => acousticAngle(history, scenario),
   },
   {
@@ -321,6 +340,7 @@ const ALL: readonly MeasureQuantity[] = [
     meaning: 'What H tends to when the universe expands for ever.',
     formula: 'H_∞ = lim H(t), t → ∞',
     source: FRIEDMANN,
+    accuracy: ROUNDING,
     value: finalRate,
   },
 ]

@@ -24,6 +24,8 @@ export interface Quantity {
   readonly meaning: string
   readonly formula: string
   readonly source: string
+  /** How good the number is, in a sentence. */
+  readonly accuracy: string
 }
 
 /** What quantities are read from. */

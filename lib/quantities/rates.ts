@@ -3,6 +3,7 @@ import { GRAVITATION } from '../constants'
 import { missing } from '../measures/outcome'
 import { deceleration, hubbleRate, jerk } from '../measures/rates'
 import { hubbleLengthGly, perSecond } from '../units'
+import { ROUNDING } from './accuracy'
 import type { Column } from './column'
 import { FRIEDMANN, fixed, significant } from './quantity'
 
@@ -16,6 +17,7 @@ export const RATE_COLUMNS: readonly Column[] = [
     meaning: 'Rate of expansion; negative while the universe contracts.',
     formula: 'H = ȧ/a = H_0 E(a)',
     source: FRIEDMANN,
+    accuracy: ROUNDING,
     value: ({ scenario }, instant) => scenario.h0 * hubbleRate(instant, instant.expansion),
   },
   {
@@ -25,8 +27,9 @@ export const RATE_COLUMNS: readonly Column[] = [
     unit: '',
     digits: fixed(4),
     meaning: 'Deceleration parameter; negative while the expansion accelerates.',
-    formula: 'q = −ä a/ȧ²',
+    formula: 'q = −(ä a)/ȧ²',
     source: FRIEDMANN,
+    accuracy: ROUNDING,
     value: (_, instant) => deceleration(instant, instant.expansion),
   },
   {
@@ -38,6 +41,7 @@ export const RATE_COLUMNS: readonly Column[] = [
     meaning: 'Third derivative of the scale factor; 1 for matter and a cosmological constant in flat space.',
     formula: 'j = a² (d³a/dt³)/ȧ³',
     source: 'Visser 2004, Class. Quantum Grav. 21, 2603',
+    accuracy: ROUNDING,
     value: (_, instant) => jerk(instant, instant.expansion),
   },
 ]
@@ -51,6 +55,7 @@ export const HUBBLE_RADIUS: Column = {
   meaning: 'Proper distance at which recession reaches the speed of light.',
   formula: 'c/|H|',
   source: 'Harrison 1993, ApJ 403, 28',
+  accuracy: ROUNDING,
   value: ({ scenario }, { expansion }) =>
     expansion > 0
       ? hubbleLengthGly(scenario.h0) / Math.sqrt(expansion)
@@ -66,6 +71,7 @@ export const CRITICAL_DENSITY: Column = {
   meaning: 'Density of a flat universe with this expansion rate.',
   formula: 'ρ_c = 3H²/(8πG)',
   source: FRIEDMANN,
+  accuracy: ROUNDING,
   value: ({ scenario }, { expansion }) =>
     (3 * perSecond(scenario.h0) ** 2 * Math.max(0, expansion)) / (8 * Math.PI * GRAVITATION),
 }

@@ -1,5 +1,6 @@
 /** Columns that say when: times, and the size of the universe. */
 import { missing } from '../measures/outcome'
+import { INTEGRAL, ROOT } from './accuracy'
 import type { Column } from './column'
 import { FRIEDMANN, fixed, HOGG, significant } from './quantity'
 
@@ -13,6 +14,7 @@ export const TIME_COLUMNS: readonly Column[] = [
     meaning: 'Cosmic time from now; the past is negative.',
     formula: 't − t_0 = ∫ da/(a H), from today',
     source: FRIEDMANN,
+    accuracy: INTEGRAL,
     value: (_, { time }) => time,
   },
   {
@@ -24,6 +26,7 @@ export const TIME_COLUMNS: readonly Column[] = [
     meaning: 'Cosmic time since the origin, the big bang or the last bounce; negative before a bounce.',
     formula: 't = ∫ da/(a H), from the origin',
     source: FRIEDMANN,
+    accuracy: INTEGRAL,
     value: (_, { age }) => (Number.isFinite(age) ? age : missing('the past is infinite, so no age can be counted')),
   },
   {
@@ -35,6 +38,7 @@ export const TIME_COLUMNS: readonly Column[] = [
     meaning: 'How long ago; negative in the future.',
     formula: 't_L = t_0 − t',
     source: `${HOGG}, eq. 30`,
+    accuracy: INTEGRAL,
     value: (_, { time }) => -time,
   },
   {
@@ -46,6 +50,7 @@ export const TIME_COLUMNS: readonly Column[] = [
     meaning: 'Size of all cosmic distances over their size today.',
     formula: 'a = 1/(1 + z)',
     source: FRIEDMANN,
+    accuracy: ROOT,
     value: (_, { scale }) => scale,
   },
   {
@@ -57,6 +62,7 @@ export const TIME_COLUMNS: readonly Column[] = [
     meaning: 'Stretching since then of light that arrives today, less one; negative where space is larger than today.',
     formula: 'z = 1/a − 1',
     source: `${HOGG}, eq. 11`,
+    accuracy: ROOT,
     value: (_, { redshift }) => redshift,
   },
 ]

@@ -2,6 +2,7 @@
 import { PARSEC, SPEED_OF_LIGHT } from '../constants'
 import { transverseDistance } from '../measures/distances'
 import { isMissing, type Missing, missing } from '../measures/outcome'
+import { DIFFERENCE } from '../quantities/accuracy'
 import type { ColumnSubject, Instant } from '../quantities/instant'
 import { FRIEDMANN, HOGG, type Quantity, significant } from '../quantities/quantity'
 import { hubbleLengthMpc } from '../units'
@@ -83,6 +84,7 @@ export const BETWEEN: readonly Between[] = [
     meaning: 'Cosmic time between the two epochs.',
     formula: 'Δt = |t_1 − t_2|',
     source: FRIEDMANN,
+    accuracy: DIFFERENCE,
     value: ({ one, other }) => Math.abs(one.time - other.time),
   },
   {
@@ -94,6 +96,7 @@ export const BETWEEN: readonly Between[] = [
     meaning: 'Comoving distance along the line of sight from one to the other.',
     formula: 'D_{C,12} = D_{C,2} − D_{C,1}',
     source: `${HOGG}, eq. 15`,
+    accuracy: DIFFERENCE,
     value: seen(({ near, far }) => far - near),
   },
   {
@@ -105,6 +108,7 @@ export const BETWEEN: readonly Between[] = [
     meaning: 'Angular diameter distance of the farther as seen from the nearer, as lensing needs it.',
     formula: 'D_{A,12} = S(D_{C,2} − D_{C,1})/(1 + z_2), with S the sine, the line or the hyperbolic sine of D_M',
     source: `${HOGG}, eq. 19`,
+    accuracy: DIFFERENCE,
     value: seen(({ near, far, redshift }, { subject }) => across(subject, far - near) / (1 + redshift)),
   },
   {
@@ -116,6 +120,7 @@ export const BETWEEN: readonly Between[] = [
     meaning: 'Comoving volume between the two epochs over the sky area.',
     formula: 'V_12 = (V_{C,2} − V_{C,1}) Ω/4π',
     source: `${HOGG}, eq. 29`,
+    accuracy: DIFFERENCE,
     value: seen(shell),
   },
   {
@@ -127,6 +132,7 @@ export const BETWEEN: readonly Between[] = [
     meaning: 'Surface density of a lens at the nearer that can make several images of a source at the farther.',
     formula: 'Σ_cr = (c²/4πG) D_{A,2}/(D_{A,1} D_{A,12})',
     source: 'Schneider, Ehlers & Falco 1992, Gravitational Lenses, Springer, eq. 5.5 (equation number from memory)',
+    accuracy: DIFFERENCE,
     value: seen(criticalSurfaceDensity),
   },
 ]

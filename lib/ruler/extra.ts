@@ -1,5 +1,6 @@
 /** Readings at one epoch that need more than the epoch, or say of a distance what a column does not. */
 import { isMissing, type Missing, missing } from '../measures/outcome'
+import { INTEGRAL, ROUNDING } from '../quantities/accuracy'
 import type { ColumnKey } from '../quantities/column'
 import { columnNamed } from '../quantities/columns'
 import { HOGG, HORIZONS, significant } from '../quantities/quantity'
@@ -43,6 +44,7 @@ const ALL: readonly (Reading & { readonly key: ExtraKey })[] = [
     meaning: 'Rate at which a proper length grows with the expansion at this epoch.',
     formula: 'v = H L',
     source: 'Harrison 1993, ApJ 403, 28',
+    accuracy: ROUNDING,
     value: (epoch) => through(columnAt('hubble', epoch), (rate) => rate * epoch.given.length),
   },
   {
@@ -54,6 +56,7 @@ const ALL: readonly (Reading & { readonly key: ExtraKey })[] = [
     meaning: 'Recession velocity today of what is seen at this epoch, over the speed of light.',
     formula: 'v_0 = H_0 D_C',
     source: HORIZONS,
+    accuracy: INTEGRAL,
     value: (epoch) =>
       through(columnAt('comoving', epoch), (distance) => distance / hubbleLengthMpc(epoch.subject.scenario.h0)),
   },
@@ -66,6 +69,7 @@ const ALL: readonly (Reading & { readonly key: ExtraKey })[] = [
     meaning: 'Recession velocity that what is seen at this epoch had then, over the speed of light.',
     formula: 'v_em = H D_C/(1 + z)',
     source: HORIZONS,
+    accuracy: INTEGRAL,
     value: (epoch) =>
       through(columnAt('comoving', epoch), (distance) =>
         through(
@@ -83,6 +87,7 @@ const ALL: readonly (Reading & { readonly key: ExtraKey })[] = [
     meaning: 'Angle under which a proper length across the line of sight is seen.',
     formula: 'θ = L/D_A',
     source: `${HOGG}, eq. 18`,
+    accuracy: INTEGRAL,
     value: angleAt('angular'),
   },
   {
@@ -94,6 +99,7 @@ const ALL: readonly (Reading & { readonly key: ExtraKey })[] = [
     meaning: 'Angle under which a comoving length across the line of sight is seen.',
     formula: 'θ_C = L/D_M',
     source: `${HOGG}, eq. 16`,
+    accuracy: INTEGRAL,
     value: angleAt('transverse'),
   },
   {
@@ -105,6 +111,7 @@ const ALL: readonly (Reading & { readonly key: ExtraKey })[] = [
     meaning: 'Wavelength, or frequency, at which a line emitted at this epoch is observed today.',
     formula: 'λ_obs = (1 + z) λ_rest',
     source: HOGG,
+    accuracy: ROUNDING,
     unitOf: ({ line }) => line.unit,
     value: ({ instant, given }) =>
       instant.phase === 'past'
@@ -120,6 +127,7 @@ const ALL: readonly (Reading & { readonly key: ExtraKey })[] = [
     meaning: 'Comoving volume over the sky area, from here out to this epoch.',
     formula: 'V = V_C Ω/4π',
     source: `${HOGG}, eq. 29`,
+    accuracy: INTEGRAL,
     value: (epoch) => through(columnAt('volume', epoch), (volume) => (volume * epoch.given.sky) / WHOLE_SKY),
   },
   {
@@ -131,6 +139,7 @@ const ALL: readonly (Reading & { readonly key: ExtraKey })[] = [
     meaning: 'Comoving volume per unit redshift over the sky area at this epoch.',
     formula: 'dV/dz = Ω D_M^2 c/H',
     source: `${HOGG}, eq. 28`,
+    accuracy: INTEGRAL,
     value: (epoch) =>
       through(columnAt('transverse', epoch), (across) =>
         through(columnAt('hubble', epoch), (rate) =>
