@@ -7,7 +7,7 @@ const config = {
   typescript: { ignoreBuildErrors: true },
   reactStrictMode: true,
   // They read files beside their own, and one is no JavaScript: not to be bundled.
-  serverExternalPackages: ['@resvg/resvg-js', 'pdfkit'],
+  serverExternalPackages: ['@resvg/resvg-js', 'fontkit', 'pdfkit'],
   images: { unoptimized: true },
 }
 

@@ -24,6 +24,7 @@ const ORDER = [
   'formats',
   'takeaway',
   'figures',
+  'print',
   'answers',
   'interface',
 ]

@@ -1,7 +1,10 @@
 /** Query keys of the routes, described by the very schemas that read them. */
 import { AT_FIELDS } from '../answers/epochs'
+import { FIGURE_FIELDS, FIGURE_FORMATS, LEAST_DPI, MOST_DPI, VIEWS } from '../answers/figure'
 import { TABLE_FIELDS } from '../answers/layout'
 import { FORMATS } from '../formats'
+import { SIZES } from '../print/sizes'
+import { THEME_KEYS } from '../print/theme'
 import { COLUMNS } from '../quantities/columns'
 import { MOST_SCENARIOS } from '../scenario/query'
 import { SPACINGS } from '../tables/spacing'
@@ -41,6 +44,14 @@ const TABLE_SHAPES: Readonly<Record<keyof typeof TABLE_FIELDS, Schema>> = {
   columns,
 }
 
+const FIGURE_SHAPES: Readonly<Record<keyof typeof FIGURE_FIELDS, Schema>> = {
+  view: { ...keysOf(VIEWS), default: VIEWS[0].key },
+  format: { ...keysOf(FIGURE_FORMATS), default: FIGURE_FORMATS[0].key },
+  size: { ...keysOf(SIZES), default: SIZES[0].key },
+  theme: { enum: THEME_KEYS, default: THEME_KEYS[0] },
+  dpi: { type: 'integer', minimum: LEAST_DPI, maximum: MOST_DPI },
+}
+
 interface Described {
   meta(): { readonly description?: string } | undefined
 }
@@ -59,3 +70,4 @@ export function parametersOf(
 
 export const AT_PARAMETERS = parametersOf(AT_FIELDS, AT_SHAPES)
 export const TABLE_PARAMETERS = parametersOf(TABLE_FIELDS, TABLE_SHAPES)
+export const FIGURE_PARAMETERS = parametersOf(FIGURE_FIELDS, FIGURE_SHAPES)

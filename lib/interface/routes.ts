@@ -1,6 +1,8 @@
 /** Every route of the interface once; the document, the page about it and the tests follow from this list. */
+
+import { FIGURE_FORMATS } from '../answers/figure'
 import { FORMATS } from '../formats'
-import { AT_PARAMETERS, SCENARIOS, TABLE_PARAMETERS } from './parameters'
+import { AT_PARAMETERS, FIGURE_PARAMETERS, SCENARIOS, TABLE_PARAMETERS } from './parameters'
 import { BYTES, type Route } from './route'
 import { refTo } from './schemas'
 
@@ -69,6 +71,18 @@ export const ROUTES: readonly Route[] = [
         title: 'Three scenarios, one of them at fault',
         body: '"h0:70,matter:0.3"\n"h0:70,matter:-1"\n{"s": "h0:60"}\n',
       },
+    ],
+  },
+  {
+    path: '/api/figure',
+    method: 'get',
+    summary: 'A figure as a file for a place: slide, journal, poster or preview card.',
+    parameters: [SCENARIOS, ...FIGURE_PARAMETERS],
+    answer: Object.fromEntries(FIGURE_FORMATS.map(({ mediaType }) => [mediaType, BYTES])),
+    refusals: [422],
+    examples: [
+      { title: 'For a column of a journal, with embedded fonts', query: 's=h0:70,matter:0.3&format=pdf&size=column' },
+      { title: 'For a slide on a dark ground', query: 's=h0:70,matter:0.3&format=png&size=slide&theme=night' },
     ],
   },
   {

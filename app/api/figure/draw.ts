@@ -1,0 +1,25 @@
+/** From a sheet to the bytes of a file. */
+import { renderAsync } from '@resvg/resvg-js'
+import type { FigureFile } from '../../../lib/answers/figure'
+import { withWords } from '../../../lib/print/png'
+import { toPdf } from '../../../lib/print/to-pdf'
+import { toSvg } from '../../../lib/print/to-svg'
+import { typeface } from './faces'
+
+/** Of the first version: the same figure has the same bytes whenever it is made. */
+const DATE = new Date(Date.UTC(2026, 11, 1))
+
+export async function drawn(file: FigureFile): Promise<Uint8Array<ArrayBuffer>> {
+  const { sheet, about, format } = file
+  const { faces, files } = typeface()
+  if (format.key === 'pdf') return toPdf(sheet, { faces, files, about, date: DATE })
+  const svg = toSvg(sheet, faces, about)
+  return format.key === 'svg' ? new TextEncoder().encode(svg) : png(svg, file)
+}
+
+/** Letters are outlines already, so no font is looked for. */
+async function png(svg: string, { sheet, dpi, about }: FigureFile): Promise<Uint8Array<ArrayBuffer>> {
+  const value = Math.round((sheet.width * sheet.scale * dpi) / 72)
+  const image = await renderAsync(svg, { fitTo: { mode: 'width', value }, font: { loadSystemFonts: false } })
+  return withWords(image.asPng(), dpi, { Title: about.title, Description: about.description, Software: 'Longhence' })
+}

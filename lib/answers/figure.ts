@@ -1,0 +1,158 @@
+/** `/api/figure`: a view of scenarios as a file for a place. */
+import { drawLongView, heightOfView } from '../figures/draw-long-view'
+import type { LongView } from '../figures/long-view'
+import { fileName } from '../formats/file-name'
+import { type Picture, type Sheet, sheetOf } from '../print/sheet'
+import { SIZES, type Size } from '../print/sizes'
+import { paletteOf, THEME_KEYS, type ThemeKey } from '../print/theme'
+import type { About } from '../print/to-svg'
+import { type Fault, fault } from '../scenario/problems'
+import type { Reading, Scenario } from '../scenario/scenario'
+import { linkQuery } from '../scenario/write'
+import { ENGINE, type Solution } from '../solve'
+import { nameOf } from '../words/desk'
+import { joined } from '../words/sentence'
+import { verdictOf } from '../words/verdict'
+import { count, oneOf, take } from './fields'
+import { readKeys } from './keys'
+import { mapped, type Pairs, type Question, scenariosOf, solved } from './question'
+import type { Home } from './table'
+import { figureOf } from './words'
+
+/** A view of solved scenarios, with what says the same in words. */
+interface View {
+  readonly key: string
+  readonly of: (solutions: readonly Solution[]) => Picture & { readonly caption: string; readonly alternative: string }
+}
+
+/** All views that can be had as files, the default first. */
+export const VIEWS: readonly View[] = [
+  {
+    key: 'long',
+    of: (solutions) => {
+      const view = figureOf(solutions)
+      const { caption, alternative, curves } = view
+      const lean = longPicture({ ...view, curves: curves.map((curve) => ({ ...curve, eras: null })) })
+      return { caption, alternative, ...longPicture(view), lean }
+    },
+  },
+]
+
+const longPicture = (view: LongView): Picture => ({
+  draw: (frame) => drawLongView(view, frame),
+  heightOf: (frame) => heightOfView(view, frame),
+})
+
+export const FIGURE_FORMATS = [
+  { key: 'svg', mediaType: 'image/svg+xml' },
+  { key: 'png', mediaType: 'image/png' },
+  { key: 'pdf', mediaType: 'application/pdf' },
+] as const
+export type FigureFormat = (typeof FIGURE_FORMATS)[number]
+
+const THEMES = THEME_KEYS.map((key) => ({ key }))
+export const LEAST_DPI = 96
+export const MOST_DPI = 600
+export const MOST_PIXELS = 40e6
+
+export const FIGURE_FIELDS = {
+  view: oneOf('view', VIEWS, 'What is drawn: long, the scale factor against time.'),
+  format: oneOf('format', FIGURE_FORMATS, 'The format of the file.'),
+  size: oneOf('size', SIZES, SIZES.map(({ key, label, source }) => `${key}: ${label} (${source}).`).join(' ')),
+  theme: oneOf('theme', THEMES, 'Dark on light, or light on dark.'),
+  dpi: count('dpi', LEAST_DPI, MOST_DPI, `Dots an inch of a PNG of at most ${MOST_PIXELS / 1e6} megapixels.`),
+}
+
+export interface FigureFile {
+  readonly format: FigureFormat
+  readonly fileName: string
+  readonly sheet: Sheet
+  readonly about: About
+  /** Of a PNG. */
+  readonly dpi: number
+}
+
+interface Order {
+  readonly view: View
+  readonly format: FigureFormat
+  readonly size: Size
+  readonly theme: ThemeKey
+  readonly dpi: number
+}
+
+export function askFigure(pairs: Pairs, home: Home): Reading<Question<FigureFile>> {
+  const keys = readKeys(pairs, Object.keys(FIGURE_FIELDS))
+  const faults: Fault[] = [...keys.faults]
+  const order = readOrder(keys.values, faults, Math.max(1, keys.codes.length))
+  return mapped(scenariosOf(keys.codes, faults), (scenarios) => ({
+    canonical: `${linkQuery(scenarios)}&${orderText(order)}`,
+    answer: () =>
+      mapped(
+        solved(scenarios, (one) => one),
+        (solutions) => figureFile(scenarios, solutions, order, home),
+      ),
+  }))
+}
+
+function readOrder(values: ReadonlyMap<string, string>, faults: Fault[], scenarios: number): Order {
+  const view = take(values, 'view', FIGURE_FIELDS.view, faults) ?? VIEWS[0]
+  const format = take(values, 'format', FIGURE_FIELDS.format, faults) ?? FIGURE_FORMATS[0]
+  const size = take(values, 'size', FIGURE_FIELDS.size, faults) ?? SIZES[0]
+  const theme = take(values, 'theme', FIGURE_FIELDS.theme, faults)?.key ?? THEME_KEYS[0]
+  const asked = take(values, 'dpi', FIGURE_FIELDS.dpi, faults)
+  if (asked !== undefined && format.key !== 'png') {
+    faults.push(fault('dpi', String(asked), 'only with format=png', `A file of format ${format.key} has no dots.`))
+  }
+  const dpi = asked ?? size.dpi
+  const most = mostDpi(size, scenarios)
+  if (format.key === 'png' && dpi > most) {
+    const message = `The picture would have ${(pixelsOf(size, scenarios, dpi) / 1e6).toFixed(0)} megapixels.`
+    faults.push(fault('dpi', String(dpi), `up to ${most} with size=${size.key}`, message))
+  }
+  return { view, format, size, theme, dpi }
+}
+
+/** At most: each scenario has a ribbon below the plot. In units of the type. */
+const RIBBON = 2
+const FRAME = 5
+
+function pixelsOf({ width, height, fixed, type }: Size, scenarios: number, dpi: number): number {
+  const highest = fixed ? height : height + (scenarios * RIBBON + FRAME) * type
+  return (width / 72) * dpi * (highest / 72) * dpi
+}
+
+const mostDpi = (size: Size, scenarios: number): number =>
+  Math.min(MOST_DPI, Math.floor(Math.sqrt(MOST_PIXELS / pixelsOf(size, scenarios, 1))))
+
+function orderText({ view, format, size, theme, dpi }: Order): string {
+  const dots = format.key === 'png' ? `&dpi=${dpi}` : ''
+  return `view=${view.key}&format=${format.key}&size=${size.key}&theme=${theme}${dots}`
+}
+
+function figureFile(
+  scenarios: readonly Scenario[],
+  solutions: readonly Solution[],
+  { view, format, size, theme, dpi }: Order,
+  home: Home,
+): FigureFile {
+  const named = solutions.map((one, slot) => ({ ...one, label: nameOf(one.scenario, slot) }))
+  const picture = view.of(named)
+  const title = joined(named.map(({ label }) => label))
+  const edition = `Longhence ${home.version}, engine ${ENGINE}`
+  const codes = named.map(({ code }) => decodeURIComponent(code))
+  const link = `${home.base}/?${linkQuery(scenarios)}&engine=${ENGINE}`
+  const names = scenarios.flatMap(({ name }) => name ?? [])
+  return {
+    format,
+    dpi,
+    fileName: fileName([...(names.length > 0 ? names : ['figure']), view.key, size.key], format.key),
+    sheet: sheetOf(picture, size, paletteOf(theme), {
+      heading: [title, verdictOf(named[0], null).sentences[0] ?? ''],
+      foot: `${edition}: ${codes.join('; ')}`,
+    }),
+    about: {
+      title,
+      description: `${picture.caption} ${picture.alternative} Scenarios: ${codes.join('; ')}. ${edition}. ${link}`,
+    },
+  }
+}

@@ -1,0 +1,98 @@
+/** A figure upon its sheet: ground, heading, drawing and the line that says where it comes from. */
+import type { Frame } from '../figures/plot'
+import { px, type SvgNode, svg } from '../figures/svg'
+import { fitted } from '../figures/text-width'
+import type { Size } from './sizes'
+import { styled } from './style'
+import type { Palette } from './theme'
+
+/** A view that can be drawn into a frame. */
+export interface Picture {
+  readonly draw: (frame: Frame) => SvgNode
+  /** Of the whole drawing, which may be higher than its frame. */
+  readonly heightOf: (frame: Frame) => number
+  /** The same without what hangs below, for where that would leave too little room. */
+  readonly lean?: Picture
+}
+
+export interface Origin {
+  /** Above the drawing, where the size has a heading. */
+  readonly heading: readonly string[]
+  /** Under it. */
+  readonly foot: string
+}
+
+/** The drawing in its own units, `scale` points each. */
+export interface Sheet {
+  readonly node: SvgNode
+  readonly width: number
+  readonly height: number
+  readonly scale: number
+}
+
+/** Drawings are made for type of this size; sheets scale them as a whole. */
+const TYPE = 15
+/** In units of the type. */
+const MARGIN = 0.9
+const FOOT = 1.5
+const HEADING = 1.7
+/** Sizes of letters over that of the type. */
+const FOOT_SIZE = 0.78
+const HEADING_SIZES = [1.3, 1]
+
+export function sheetOf(picture: Picture, size: Size, palette: Palette, { heading, foot }: Origin): Sheet {
+  const scale = size.type / TYPE
+  const width = px(size.width / scale)
+  const margin = MARGIN * TYPE
+  const inner = px(width - 2 * margin)
+  const lines = size.headed ? heading : []
+  const top = margin + lines.length * HEADING * TYPE
+  const bottom = margin + FOOT * TYPE
+  const { drawing, height } = drawnIn(picture, size, { width: inner, height: size.height / scale, taken: top + bottom })
+  const node = svg(
+    'g',
+    {},
+    svg('rect', { x: 0, y: 0, width, height, fill: palette('ground') }),
+    ...lines.map((line, i) => headline(line, i, margin, inner)),
+    svg('g', { transform: `translate(${px(margin)} ${px(top)})` }, ...drawing.children),
+    text(foot, { x: margin, y: height - 0.75 * margin, size: FOOT_SIZE, width: inner }, 'foot'),
+  )
+  return { node: styled(node, palette), width, height, scale }
+}
+
+interface Room {
+  readonly width: number
+  readonly height: number
+  /** By margins, heading and foot. */
+  readonly taken: number
+}
+
+/** The plot gets at least so much of the room. */
+const LEAST_PLOT = 0.5
+
+/** The drawing, and the height of the sheet that it asks for. */
+function drawnIn(picture: Picture, size: Size, { width, height, taken }: Room): { drawing: SvgNode; height: number } {
+  const frame = { width, height: px(height), type: TYPE, compact: size.compact, id: 'figure' }
+  if (!size.fixed) return { drawing: picture.draw(frame), height: px(picture.heightOf(frame) + taken) }
+  const room = height - taken
+  const fit = (one: Picture) => ({ ...frame, height: px(room - (one.heightOf(frame) - frame.height)) })
+  const chosen = picture.lean && fit(picture).height < LEAST_PLOT * room ? picture.lean : picture
+  return { drawing: chosen.draw(fit(chosen)), height: px(height) }
+}
+
+function headline(line: string, i: number, margin: number, width: number): SvgNode {
+  const place = { x: margin, y: margin + (0.9 + i * HEADING) * TYPE, size: HEADING_SIZES[Math.min(i, 1)], width }
+  return text(line, place, i === 0 ? 'heading' : 'axis')
+}
+
+interface Place {
+  readonly x: number
+  readonly y: number
+  readonly size: number
+  readonly width: number
+}
+
+function text(words: string, { x, y, size, width }: Place, kind: string): SvgNode {
+  const type = size * TYPE
+  return svg('text', { x: px(x), y: px(y), 'font-size': px(type), class: kind }, fitted(words, type, width))
+}
