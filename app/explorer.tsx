@@ -41,6 +41,7 @@ function Page({ initial, ruler, shelf, edition, children }: Props) {
   const address = useAddress()
   const { view, desk, waiting, trouble } = useExplorer(address, initial)
   useTitle(view.title)
+  useMeanings()
   return (
     // biome-ignore lint/a11y: links stay links; what is caught here is the click that they get
     <div className="page" data-theme={desk.place.theme} onClick={address ? follow : undefined}>
@@ -72,6 +73,13 @@ function follow(event: MouseEvent): void {
   if (!link || !plain || event.defaultPrevented || link.origin !== location.origin || link.pathname !== '/') return
   event.preventDefault()
   go(link.href)
+}
+
+/** What names and numbers mean, once there is time. */
+function useMeanings(): void {
+  useEffect(() => {
+    import('./live/meanings').then(({ watchMeanings }) => watchMeanings()).catch(() => undefined)
+  }, [])
 }
 
 function useTitle(title: string): void {

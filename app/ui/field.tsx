@@ -1,5 +1,6 @@
 import type { Field } from '../../lib/words/fields'
 import type { Editing } from '../live/use-editing'
+import { Means } from './means'
 import { Slider } from './slider'
 import { Symbols } from './symbol'
 
@@ -15,15 +16,23 @@ export function FieldRow({ field, editing, live }: Props) {
   const complaint = editing.complaintOf(field.name)
   return (
     <div className={field.kind === 'closing' ? 'field closing' : 'field'}>
-      <label htmlFor={id} title={field.meaning}>
-        <span className="symbol">
-          <Symbols markup={field.symbol} />
-        </span>
-        <span>
+      <span className="named">
+        {field.symbol && (
+          <span className="symbol">
+            {field.means ? (
+              <Means of={field.means}>
+                <Symbols markup={field.symbol} />
+              </Means>
+            ) : (
+              <Symbols markup={field.symbol} />
+            )}
+          </span>
+        )}
+        <label htmlFor={id} data-means={field.means ?? undefined}>
           {field.label}
           {field.kind === 'closing' && ', closes'}
-        </span>
-      </label>
+        </label>
+      </span>
       <Control field={field} id={id} editing={editing} />
       {complaint && (
         <p id={`${id}-complaint`} className="complaint" role="alert">
@@ -57,7 +66,7 @@ function Control({ field, id, editing }: ControlProps) {
     default:
       return (
         <span className="entry">
-          <input inputMode="text" title={`${field.meaning} ${field.allowed}`} {...typed(field, id, editing)} />
+          <input inputMode="text" title={field.allowed} {...typed(field, id, editing)} />
           <span className="unit">{field.unit}</span>
         </span>
       )

@@ -16,7 +16,7 @@ export function Footer({ data, edition }: Props) {
         measurements it describes is an assumption, not a forecast.
       </p>
       <p>
-        Longhence {edition.version}, engine {edition.engine}. MIT licence.
+        Longhence {edition.version}, engine {edition.engine}. MIT licence. <a href="/method">Methods and sources</a>
         {data && (
           <>
             {' '}

@@ -2,6 +2,7 @@ import type { Desk } from '../../lib/words/desk'
 import type { FieldGroup } from '../../lib/words/fields'
 import { type Editing, useEditing } from '../live/use-editing'
 import { FieldRow } from './field'
+import { Means } from './means'
 import { Sentence, Symbols } from './symbol'
 
 interface Props {
@@ -101,7 +102,9 @@ function Group({ group, editing, live }: GroupProps) {
       {family && (
         <p className="law">
           <span className="formula">
-            <Symbols markup={family.formula} />
+            <Means of={`law-${family.key}`}>
+              <Symbols markup={family.formula} />
+            </Means>
           </span>{' '}
           <Sentence text={family.caution} />
         </p>

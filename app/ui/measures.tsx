@@ -1,6 +1,7 @@
 import { memo } from 'react'
 import type { Explorer } from '../../lib/answers/explorer'
 import type { MeasureWords } from '../../lib/words/measures'
+import { Means } from './means'
 import { Sentence, Symbols } from './symbol'
 
 export const Measures = memo(function Measures({ view }: { readonly view: Explorer }) {
@@ -28,21 +29,24 @@ export const Measures = memo(function Measures({ view }: { readonly view: Explor
 })
 
 function Row({ measure }: { readonly measure: MeasureWords }) {
-  const { key, label, symbol, meaning, value, unit, because } = measure
+  const { key, label, symbol, value, unit, because } = measure
+  const entry = `measure-${key}`
   return (
     <tr data-measure={key}>
-      <td className="symbol">
+      <td className="symbol" data-means={entry}>
         <Symbols markup={symbol} />
       </td>
-      <th scope="row" title={meaning}>
-        {label}
+      <th scope="row">
+        <Means of={entry}>{label}</Means>
         {because && (
           <span className="reason">
             <Sentence text={because} />
           </span>
         )}
       </th>
-      <td className="value">{value === null ? '–' : <Value value={value} unit={unit} />}</td>
+      <td className="value" data-means={entry}>
+        {value === null ? '–' : <Value value={value} unit={unit} />}
+      </td>
     </tr>
   )
 }

@@ -1,5 +1,6 @@
 import { memo } from 'react'
 import type { Explorer } from '../../lib/answers/explorer'
+import { Means } from './means'
 import { Sentence } from './symbol'
 
 export const Moments = memo(function Moments({ view }: { readonly view: Explorer }) {
@@ -20,9 +21,15 @@ export const Moments = memo(function Moments({ view }: { readonly view: Explorer
         <tbody>
           {view.moments.map(({ kind, label, when, where }) => (
             <tr key={`${kind}${when}${label}`} className={kind === 'now' ? 'present' : undefined}>
-              <td className="when">{when}</td>
-              <th scope="row">{label}</th>
-              <td className="where">{where}</td>
+              <td className="when" data-means={`moment-${kind}`}>
+                {when}
+              </td>
+              <th scope="row">
+                <Means of={`moment-${kind}`}>{label}</Means>
+              </th>
+              <td className="where" data-means={`moment-${kind}`}>
+                {where}
+              </td>
             </tr>
           ))}
         </tbody>

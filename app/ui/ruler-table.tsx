@@ -7,7 +7,7 @@ interface Props {
   readonly view: RulerView
   readonly rows: readonly RulerRow[]
   /** The kind of entry that the page of methods has for a row. */
-  readonly of: 'column' | 'between'
+  readonly of: 'reading' | 'between'
   readonly caption: string
 }
 
@@ -42,17 +42,18 @@ export function RulerTable({ view, rows, of, caption }: Props) {
 
 function Row({ row, of }: { readonly row: RulerRow; readonly of: Props['of'] }) {
   const { key, symbol, label, unit, cells } = row
+  const entry = `${of}-${key}`
   return (
     <tr data-reading={key}>
-      <td className="symbol">
-        <Means of={`${of}-${key}`}>
-          <Symbols markup={symbol} />
-        </Means>
+      <td className="symbol" data-means={entry}>
+        <Symbols markup={symbol} />
       </td>
-      <th scope="row">{label}</th>
+      <th scope="row">
+        <Means of={entry}>{label}</Means>
+      </th>
       {cells.map((cell, slot) => (
         // biome-ignore lint/suspicious/noArrayIndexKey: the column of a scenario is its place
-        <td key={slot} className="value">
+        <td key={slot} className="value" data-means={entry}>
           {cell === null ? '–' : <b>{cell}</b>}
         </td>
       ))}

@@ -65,7 +65,7 @@ function Readings({ view, second }: { readonly view: RulerView; readonly second:
   }
   return (
     <div className="readings">
-      {at.length > 0 && <RulerTable view={view} rows={at} of="column" caption="At this epoch" />}
+      {at.length > 0 && <RulerTable view={view} rows={at} of="reading" caption="At this epoch" />}
       {between.length > 0 && (
         <RulerTable view={view} rows={between} of="between" caption={`Between this epoch and ${second}`} />
       )}

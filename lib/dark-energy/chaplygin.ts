@@ -77,7 +77,7 @@ export const chaplygin: Family = {
       symbol: 'α',
       label: 'exponent',
       unit: '',
-      meaning: 'Pressure goes like −ρ^(−α): 1 is the Chaplygin gas proper, 0 a cosmological constant with dust.',
+      meaning: 'Pressure goes like −ρ^{−α}: 1 is the Chaplygin gas proper, 0 a cosmological constant with dust.',
       min: -0.99,
       max: 20,
       fallback: 0,

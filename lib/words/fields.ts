@@ -19,6 +19,8 @@ interface Described {
   readonly label: string
   readonly meaning: string
   readonly value: string
+  /** Its entry on the page of methods. */
+  readonly means: string | null
 }
 
 export type Field =
@@ -41,7 +43,7 @@ export interface FieldGroup {
   readonly folded: boolean
   readonly fields: readonly Field[]
   /** Beside the group: the law in a formula, and how far it can be trusted. */
-  readonly family: Pick<Family, 'formula' | 'meaning' | 'caution' | 'source'> | null
+  readonly family: Pick<Family, 'key' | 'formula' | 'meaning' | 'caution' | 'source'> | null
 }
 
 export interface Form {
@@ -68,11 +70,14 @@ const LIGHTS: readonly Choice[] = [
 
 export function formOf(scenario: Scenario, budget: Budget): Form {
   const family = familyOf(scenario.eos)
-  const { formula, meaning, caution, source } = family
+  const { key, formula, meaning, caution, source } = family
   const groups = [
     group('densities', 'Densities today', densityFields(scenario, budget)),
     group('rate', 'Expansion rate', [numberField(own.H0, scenario.h0)]),
-    { ...group('dark', 'Dark energy', darkFields(scenario, family)), family: { formula, meaning, caution, source } },
+    {
+      ...group('dark', 'Dark energy', darkFields(scenario, family)),
+      family: { key, formula, meaning, caution, source },
+    },
     { ...group('light', 'Radiation, neutrinos, baryons', lightFields(scenario)), folded: true },
     group('name', 'Name', [nameField(scenario)]),
   ]
@@ -94,7 +99,14 @@ function densityFields({ matter, closure }: Scenario, budget: Budget): Field[] {
     numberField(own.MATTER, matter),
     dark,
     curvature,
-    choiceField(CLOSES, 'closes the budget', 'What is left to make the densities add up to 1.', closes, CLOSING),
+    choiceField(
+      CLOSES,
+      'closes the budget',
+      'What is left to make the densities add up to 1.',
+      closes,
+      CLOSING,
+      'caution-closing',
+    ),
   ]
 }
 
@@ -102,11 +114,20 @@ function darkFields(scenario: Scenario, family: Family): Field[] {
   const choices = FAMILIES.map(({ key, label }) => ({ value: key, label }))
   const used = family.parameters.filter((one) => isUsed(one, scenario.law) === true)
   return [
-    choiceField(own.EOS.key, own.EOS.label, own.EOS.meaning, scenario.eos, choices),
-    ...used.map((one) => familyField(one, scenario.law[one.key])),
+    choiceField(own.EOS.key, own.EOS.label, own.EOS.meaning, scenario.eos, choices, 'parameter-eos'),
+    ...used.map((one) => ({ ...familyField(one, scenario.law[one.key]), means: `law-${family.key}-${one.key}` })),
     ...(family.parameters.length === 0
       ? []
-      : [choiceField(own.BEYOND.key, own.BEYOND.label, own.BEYOND.meaning, scenario.beyond, own.BEYOND.choices)]),
+      : [
+          choiceField(
+            own.BEYOND.key,
+            own.BEYOND.label,
+            own.BEYOND.meaning,
+            scenario.beyond,
+            own.BEYOND.choices,
+            'parameter-beyond',
+          ),
+        ]),
   ]
 }
 
@@ -133,7 +154,7 @@ function radiationFields(radiation: Scenario['radiation']): Field[] {
 
 function nameField({ name }: Scenario): Field {
   const { key, symbol, label, meaning, most } = own.AS
-  return { kind: 'text', name: key, symbol, label, meaning, value: name ?? '', most }
+  return { kind: 'text', name: key, symbol, label, meaning, value: name ?? '', most, means: `parameter-${key}` }
 }
 
 type Numeric = Pick<
@@ -147,7 +168,7 @@ function numberField(parameter: Numeric, value: ParameterValue): Field {
   const unit = unitText(parameter.unit)
   const text = typeof value === 'object' ? value.join('; ') : String(value)
   const allowed = `${min} to ${max}`.replaceAll('-', '−')
-  const field = { name: key, symbol, label, meaning, unit, value: text, allowed }
+  const field = { name: key, symbol, label, meaning, unit, value: text, allowed, means: `parameter-${key}` }
   return parameter.kind === 'number'
     ? { ...field, kind: 'number', slider: parameter.slider }
     : { ...field, kind: 'list' }
@@ -160,11 +181,19 @@ export function unitText(unit: string): string {
 
 function closingField(parameter: Numeric, value: number): Field {
   const { key, symbol, label, meaning } = parameter
-  return { kind: 'closing', name: key, symbol, label, meaning, value: String(value), shown: significant(value, 4) }
+  const shown = significant(value, 4)
+  return { kind: 'closing', name: key, symbol, label, meaning, value: String(value), shown, means: `parameter-${key}` }
 }
 
-function choiceField(name: string, label: string, meaning: string, value: string, choices: readonly Choice[]): Field {
-  return { kind: 'choice', name, symbol: '', label, meaning, value, choices }
+function choiceField(
+  name: string,
+  label: string,
+  meaning: string,
+  value: string,
+  choices: readonly Choice[],
+  means: string | null = null,
+): Field {
+  return { kind: 'choice', name, symbol: '', label, meaning, value, choices, means }
 }
 
 function hiddenFields({ radiation, eos }: Scenario, budget: Budget): Form['hidden'] {

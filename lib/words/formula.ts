@@ -50,7 +50,19 @@ const rowOf = (nodes: readonly MathNode[]): MathNode =>
 
 export function formulaTree(text: string): MathNode {
   const reader = { tokens: tokensOf(text), at: 0 }
-  return rowOf(rowUntil(reader, null).map((one) => one.node))
+  return inRow(rowUntil(reader, null))
+}
+
+/** Words that follow each other are one text. */
+function inRow(items: readonly Item[]): MathNode {
+  const nodes: MathNode[] = []
+  for (const { node: one } of items) {
+    const before = nodes.at(-1)
+    if (one.tag === 'mtext' && before?.tag === 'mtext') {
+      nodes[nodes.length - 1] = node('mtext', `${before.children[0]}${one.children[0]}`.replace(/\u00a0+/g, '\u00a0'))
+    } else nodes.push(one)
+  }
+  return rowOf(nodes)
 }
 
 interface Reader {
@@ -120,7 +132,11 @@ function baseOf(reader: Reader, token: Token, before: Item | undefined): Item {
     return UPRIGHT.has(text) ? upright(token) : wordItem(token)
   }
   if (text === ',')
-    return { node: { tag: 'mo', attributes: { separator: 'true' }, children: [','] }, operand: false, apart }
+    return {
+      node: { tag: 'mo', attributes: { separator: 'true', rspace: '0.45em' }, children: [','] },
+      operand: false,
+      apart,
+    }
   return plain('mo', false)
 }
 
@@ -147,7 +163,7 @@ const wordItem = ({ text, apart }: Token): Item => ({
 
 function bracketed(reader: Reader, { text, apart }: Token): Item {
   const close = BRACKETS[text] ?? ')'
-  const inside = rowOf(rowUntil(reader, close).map((one) => one.node))
+  const inside = inRow(rowUntil(reader, close))
   const fence = (sign: string): MathNode => ({ tag: 'mo', attributes: { fence: 'true' }, children: [sign] })
   return { node: node('mrow', fence(text), inside, fence(close)), operand: true, apart, inside }
 }

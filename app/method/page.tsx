@@ -1,0 +1,48 @@
+import type { Metadata } from 'next'
+import { method } from '../../lib/answers/method'
+import { THEMES } from '../../lib/words/place'
+import { EDITION } from '../edition'
+import { Footer } from '../ui/footer'
+import { EntryOfMethod } from './entry'
+
+export const metadata: Metadata = {
+  title: 'Methods',
+  description: 'Every quantity, law and parameter with symbol, formula, unit, meaning, accuracy and source.',
+}
+
+interface Props {
+  readonly searchParams: Promise<Readonly<Record<string, string | string[] | undefined>>>
+}
+
+export default async function Method({ searchParams }: Props) {
+  const { theme } = await searchParams
+  const sections = method()
+  return (
+    <div className="page" data-theme={THEMES.find((one) => one === theme)}>
+      <header className="masthead">
+        <a className="brand" href="/">
+          Longhence
+        </a>
+      </header>
+      <main className="methods">
+        <h1>Methods</h1>
+        <nav aria-label="Sections">
+          {sections.map(({ anchor, title }) => (
+            <a key={anchor} href={`#${anchor}`}>
+              {title}
+            </a>
+          ))}
+        </nav>
+        {sections.map(({ anchor, title, entries }) => (
+          <section key={anchor} aria-labelledby={anchor}>
+            <h2 id={anchor}>{title}</h2>
+            {entries.map((one) => (
+              <EntryOfMethod key={one.anchor} entry={one} level={3} />
+            ))}
+          </section>
+        ))}
+      </main>
+      <Footer data={null} edition={EDITION} />
+    </div>
+  )
+}
