@@ -10,6 +10,7 @@ export type Direction = 1 | -1
 const MOST_TERMS = 12
 /** Logarithms of the terms that were added up last. */
 const logs = new Float64Array(MOST_TERMS)
+const rates = new Float64Array(MOST_TERMS)
 
 export class Balance {
   /** ln P − ln M at N: Infinity where M is nothing. */
@@ -23,8 +24,18 @@ export class Balance {
   readonly #direction: Direction
   /** Share of each positive term in P. */
   readonly #weights: number[] = []
+  /** Share of each negative term in M. */
+  readonly #minusWeights: number[] = []
   /** Relative rounding of the weights, in units of eps. */
   #rounding = 0
+  // What `#rates` found: of ln P its fall, of ln M its rise, and what rounding may have moved them by.
+  #fall = 0
+  /** Share in P of what falls no faster than M can rise. */
+  #lasting = 0
+  #meanRise = 0
+  #leastRise = 0
+  #mostRise = 0
+  #slack = 0
   #N = Number.NaN
 
   constructor(terms: readonly Term[], direction: Direction) {
@@ -44,15 +55,17 @@ export class Balance {
     this.#N = N
     const minus = this.#logSum(this.#minus)
     const minusRounding = this.#rounding
+    for (let i = 0; i < this.#minus.length; i++) this.#minusWeights[i] = Math.exp(logs[i] - minus)
     const plus = this.#logSum(this.#plus)
     for (let i = 0; i < this.#plus.length; i++) this.#weights[i] = Math.exp(logs[i] - plus)
     this.h = plus - minus
+    this.#rounding = Math.max(this.#rounding, minusRounding)
     if (!Number.isFinite(this.h)) {
       this.error = 0
       return
     }
     // The error in nearly equal sums is that of their largest terms; each of the logarithms rounds once more.
-    this.error = Number.EPSILON * (this.#rounding + minusRounding + 2 * Math.abs(plus) + 2 * Math.abs(minus) + 4)
+    this.error = Number.EPSILON * (2 * this.#rounding + 2 * Math.abs(plus) + 2 * Math.abs(minus) + 4)
   }
 
   /** ln of the sum of terms, with the rounding of its terms in `#rounding` and their logarithms in `logs`. */
@@ -81,47 +94,64 @@ export class Balance {
   }
 
   /**
-   * The fastest that h can fall outwards, given that exponents are bounded on the next `length`: no root lies within h over this.
-   * Zero where none lies on all of it, Infinity where nothing is known. ln P falls by at most s · ⟨n⟩_P over a step s (Jensen: P is
-   * a sum of exponentials), ln M rises by at most s times its largest growth.
+   * How far on h, known to be at least `h`, stays above zero, given that exponents are bounded on the next `length`; Infinity where
+   * that is all of it. Over a step s, ln P falls by at most s ⟨n⟩_P (Jensen: P is a sum of exponentials). ln M rises by at most s
+   * times its largest growth g, and by at most s ⟨g⟩_M + s² (g_max − g_min)²/8 (Hoeffding 1963, J. Am. Stat. Assoc. 58, 13, eq. 4.16).
    */
-  closing(length: number): number {
-    return this.#change(length, true)
+  reach(h: number, length: number): number {
+    this.#rates(length, true)
+    // What of P thins out no faster than any negative term outweighs M for ever, if it does so here.
+    if (this.#lasting > 0 && h + Math.log(this.#lasting) > this.error) return Number.POSITIVE_INFINITY
+    const plain = h / Math.max(0, this.#fall + this.#mostRise + this.#slack)
+    const spread = this.#mostRise - this.#leastRise
+    if (this.#minus.length < 2 || !Number.isFinite(spread)) return Number.isNaN(plain) ? 0 : plain
+    const closing = this.#fall + this.#meanRise + this.#slack
+    const bent = (2 * h) / (closing + Math.sqrt(closing * closing + 0.5 * h * spread * spread))
+    return Math.max(plain, bent) || 0
   }
 
   /** The slowest that h falls outwards on the next `length`: above zero, h falls on all of it. For short steps only. */
   falling(length: number): number {
-    return this.#change(length, false)
+    this.#rates(length, false)
+    return this.#fall + this.#leastRise - this.#slack
   }
 
-  #change(length: number, fastest: boolean): number {
+  /** Bounds of the rates on the next `length`: the fastest that h could fall, or the slowest. */
+  #rates(length: number, fastest: boolean): void {
     const outwards = this.#direction > 0
     const [from, to] = outwards ? [this.#N, this.#N + length] : [this.#N - length, this.#N]
     const high = fastest === outwards
-    let [fall, sizes, steepest] = [0, 0, Number.NEGATIVE_INFINITY]
+    let fall = 0
+    let sizes = 0
     for (let i = 0; i < this.#plus.length; i++) {
-      const weight = this.#weights[i]
       const range = this.#plus[i].exponentRange(from, to)
       const n = high ? range[1] : range[0]
       const rate = outwards ? n : -n
-      if (rate > steepest) steepest = rate
+      rates[i] = rate
+      const weight = this.#weights[i]
       if (weight === 0) continue
       fall += weight * rate
       sizes += weight * Math.abs(rate)
     }
-    let rise = fastest ? Number.NEGATIVE_INFINITY : Number.POSITIVE_INFINITY
-    for (const one of this.#minus) {
-      const range = one.exponentRange(from, to)
+    let mean = 0
+    let least = Number.POSITIVE_INFINITY
+    let most = Number.NEGATIVE_INFINITY
+    for (let i = 0; i < this.#minus.length; i++) {
+      const range = this.#minus[i].exponentRange(from, to)
       const n = high ? range[0] : range[1]
       const rate = outwards ? -n : n
-      rise = fastest ? Math.max(rise, rate) : Math.min(rise, rate)
+      if (rate < least) least = rate
+      if (rate > most) most = rate
+      if (this.#minusWeights[i] !== 0) mean += this.#minusWeights[i] * rate
     }
-    // Where no positive term thins out faster than a negative one, h cannot fall, whatever the weights.
-    if (fastest && steepest + rise <= 0) return 0
-    const slack = Number.EPSILON * (2 * this.#rounding + 16) * (sizes + Math.abs(rise))
-    const closing = fastest ? fall + rise + slack : fall + rise - slack
-    if (!fastest) return closing
-    return Number.isNaN(closing) ? Number.POSITIVE_INFINITY : Math.max(0, closing)
+    let lasting = 0
+    for (let i = 0; i < this.#plus.length; i++) if (rates[i] + most <= 0) lasting += this.#weights[i]
+    this.#fall = fall
+    this.#lasting = lasting
+    this.#meanRise = mean
+    this.#leastRise = least
+    this.#mostRise = most
+    this.#slack = Number.EPSILON * (2 * this.#rounding + 16) * (sizes + Math.max(Math.abs(most), Math.abs(least)))
   }
 }
 

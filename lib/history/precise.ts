@@ -10,7 +10,7 @@ export interface Precise {
 }
 
 /** Farther out powers of a leave what twofold numbers hold, and nothing is as close as that there. */
-const FARTHEST = 60
+const FARTHEST = 150
 const UNKNOWN: Precise = { value: [Number.NaN, 0], error: Number.POSITIVE_INFINITY }
 const ROUNDINGS = 256
 

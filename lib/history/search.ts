@@ -1,5 +1,8 @@
 /** What a search for turning points finds. */
 
+/** Farthest |ln a| for which a and 1/a are doubles. */
+export const FARTHEST = 700
+
 /** Where E² passes a minimum that doubles hardly tell from zero: E²(N + d) = value + slope d + what bends. */
 export interface Narrow {
   readonly N: number

@@ -6,7 +6,7 @@ import { expansionAt, type Model } from '../model'
 import type { Balance, Direction } from './balance'
 import { exactlyStatic } from './exactly-static'
 import { preciseExpansion, preciseSlope } from './precise'
-import type { Narrow } from './search'
+import { FARTHEST, type Narrow } from './search'
 
 export type Encounter =
   /** `slope` where it takes twice the digits. */
@@ -25,13 +25,26 @@ const MOST_STEPS = 400
 
 /** Slope of E² over the sizes of its terms that tells a simple root. */
 const SLOPE = 1e-7
+const UNRESOLVED = 'Whether E² vanishes there is beyond the digits of a scale factor.'
 const ROUNDED = 'Rounding could change whether E² becomes negative there.'
 const UNDECIDED =
   'E² and its slope vanish together to all digits that are computed, and one more digit could change that.'
 
-/** What becomes of h, which the balance has just weighed at N. */
-export function meet(model: Model, balance: Balance, N: number, direction: Direction, left: number): Encounter {
-  return steepRoot(model, balance, N, direction, left) ?? stepsWithAllDigits(model, balance, N, direction, left)
+/** What becomes of h, which the balance has just weighed at N; `fast`: it is not small, but falls within a digit of N. */
+export function meet(
+  model: Model,
+  balance: Balance,
+  N: number,
+  direction: Direction,
+  left: number,
+  fast: boolean,
+): Encounter {
+  const simple = steepRoot(model, balance, N, direction, left)
+  if (simple) return simple
+  if (fast || Math.abs(N) > FARTHEST) return { kind: 'root', N, slope: null, doubt: UNRESOLVED }
+  // Decimals that touch exactly do so, though the doubles that they are read as may not.
+  if (exactlyStatic(model.budget, model.law)) return { kind: 'double', N: atRest(model, N), doubt: null }
+  return stepsWithAllDigits(model, balance, N, direction, left)
 }
 
 /** A simple root that doubles can tell: h falls steeply here, and is negative a little farther on. */
@@ -81,7 +94,7 @@ function stepsWithAllDigits(
     // 2 E²/(P + M) ≤ ln P − ln M, of which a little is given up for rounding.
     const sure = 1.99 * h
     length = Math.min(length, (left - Math.abs(N - start)) / 2)
-    const advance = Math.min(length, sure / balance.closing(length))
+    const advance = Math.min(length, balance.reach(sure, length))
     if (!(advance > 2 * Number.EPSILON * Math.abs(N))) break
     N += direction * advance
     length = 2 * advance
@@ -113,8 +126,7 @@ function touching(model: Model, N: number, direction: Direction): Encounter {
   if (direction * model.derivatives(N).first < -SLOPE * model.magnitude(N)) {
     return { kind: 'root', N: polished(model, N), slope: null, doubt: ROUNDED }
   }
-  const doubt = exactlyStatic(model.budget, model.law) ? null : UNDECIDED
-  return { kind: 'double', N: atRest(model, N), doubt }
+  return { kind: 'double', N: atRest(model, N), doubt: UNDECIDED }
 }
 
 function narrowAt(model: Model, start: number): Narrow {

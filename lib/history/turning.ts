@@ -11,11 +11,11 @@ import type { Term } from '../components'
 import type { Edge } from '../dark-energy/law'
 import { logarithmicIn, type Model } from '../model'
 import { Balance, type Direction } from './balance'
-import type { Narrow, Search } from './search'
+import { FARTHEST, type Narrow, type Search } from './search'
 import { type Encounter, meet } from './tangency'
 
 export type { Direction } from './balance'
-export type { Narrow, Search } from './search'
+export { FARTHEST, type Narrow, type Search } from './search'
 
 /** h from which on the steps are left to twice the digits: E² is then no longer known to more than five digits in doubles. */
 const NEAR = 1e-10
@@ -23,11 +23,8 @@ const NEAR = 1e-10
 const MOST_STEPS = 4000
 /** Distance to the edge of a law, relative to its ln a, that is as good as none. */
 const EDGE_NEAREST = 256 * Number.EPSILON
-/** Farthest |ln a| for which a and 1/a are doubles. */
-export const FARTHEST = 700
 
 const OUT_OF_STEPS = 'The search for turning points farther out is over its budget of steps.'
-const UNRESOLVED = 'Whether E² vanishes there is beyond the digits of a scale factor.'
 const AT_THE_EDGE = 'Rounding could change whether E² vanishes where dark energy ends.'
 const NO_NUMBERS = 'The densities farther out leave the range of floating-point numbers.'
 
@@ -104,8 +101,7 @@ function stepsFrom(model: Model, terms: readonly Term[], direction: Direction, s
     }
     // So near to an edge that N tells no difference any more: the edge decides.
     if (h > NEAR && left <= EDGE_NEAREST * limit) return nothing(narrows, null)
-    if (h > NEAR || Math.abs(N) > FARTHEST) return rootAt(model, N, narrows, UNRESOLVED)
-    const met: Encounter = meet(model, balance, N, direction, left)
+    const met: Encounter = meet(model, balance, N, direction, left, h > NEAR)
     if (met.kind === 'root') {
       const found = rootAt(model, met.N, narrows, met.doubt)
       return met.slope === null || found.kind !== 'root' ? found : { ...found, slope: met.slope }
@@ -119,8 +115,8 @@ function stepsFrom(model: Model, terms: readonly Term[], direction: Direction, s
 
 /** How far on there is certainly no root, by a bound that holds for all that is left or for a stretch about `length`. */
 function certifiedStep(balance: Balance, h: number, left: number, length: number): number {
-  const whole = h / balance.closing(left)
+  const whole = balance.reach(h, left)
   if (balance.steady || whole >= left) return whole
   const stretch = Math.min(length, left / 2)
-  return Math.min(h / balance.closing(stretch), stretch)
+  return Math.min(balance.reach(h, stretch), stretch)
 }

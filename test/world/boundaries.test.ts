@@ -58,10 +58,12 @@ describe.each(MATTERS)('Ω_m = %s', (matter) => {
 })
 
 describe('static states', () => {
-  // Exact double roots in doubles: a³ = Ω_m/2Ω_Λ.
+  // Exact double roots in decimals, and the first two in doubles: a³ = Ω_m/2Ω_Λ, Ω_Λ = 1/((1 − a)² (1 + 2a)).
   test.each([
     [0.5, 2, 0.5],
     [6.75, 1, 1.5],
+    [5.4, 6.4, 0.75],
+    [3.2, 0.2, 2],
   ])('Ω_m = %s, Ω_Λ = %s rests at a = %s', (matter, lambda, scale) => {
     const { origin, end, budget } = dust(matter, lambda)
     expect(scale < 1 ? origin.kind : end.kind).toBe('static')
@@ -84,6 +86,7 @@ describe('static states', () => {
     // E² = (√Ω_r a⁻² − √Ω_Λ)²: a double root, exact in doubles.
     const { origin, end } = universe(`matter:0,radiation:${radiation},dark:${lambda}`)
     const scale = (radiation / lambda) ** 0.25
+    expect(end.proven).toBe(true)
     expect(scale < 1 ? origin.kind : end.kind).toBe('static')
     expectRelative(scale < 1 ? origin.scale : (end.scale ?? Number.NaN), scale, 1e-14)
   })
