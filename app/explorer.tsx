@@ -1,15 +1,16 @@
 'use client'
 
-import { QueryClient, QueryClientProvider } from '@tanstack/react-query'
-import { type MouseEvent, type ReactNode, useEffect, useState } from 'react'
+import { type MouseEvent, type ReactNode, useDeferredValue, useEffect } from 'react'
 import type { Explorer as View } from '../lib/answers/explorer'
 import type { RulerView } from '../lib/answers/ruler-view'
 import type { Shelf } from '../lib/answers/shelf'
 import { go, useAddress } from './live/address'
 import { useExplorer } from './live/use-explorer'
+import { useStill } from './live/use-still'
 import { Figure } from './ui/figure'
 import { type Edition, Footer } from './ui/footer'
 import { Header } from './ui/header'
+import { InSight } from './ui/in-sight'
 import { Ingredients } from './ui/ingredients'
 import { Measures } from './ui/measures'
 import { Moments } from './ui/moments'
@@ -20,6 +21,8 @@ import { Verdicts } from './ui/verdicts'
 
 interface Props {
   readonly initial: View
+  /** The question that `initial` answers. */
+  readonly asked: string
   readonly ruler: RulerView
   readonly shelf: Shelf
   readonly edition: Edition
@@ -28,40 +31,43 @@ interface Props {
 }
 
 /** The page: complete as the server draws it, and alive from then on. */
-export function Explorer(props: Props) {
-  const [client] = useState(() => new QueryClient())
-  return (
-    <QueryClientProvider client={client}>
-      <Page {...props} />
-    </QueryClientProvider>
-  )
-}
-
-function Page({ initial, ruler, shelf, edition, children }: Props) {
+export function Explorer({ initial, asked, ruler, shelf, edition, children }: Props) {
   const address = useAddress()
-  const { view, desk, waiting, trouble } = useExplorer(address, initial)
+  const { view, desk, waiting, busy, trouble } = useExplorer(address, initial, asked)
+  // The figure follows a hand at once, the rest as soon as there is time.
+  const later = useDeferredValue(view)
+  const moving = address?.moving ?? false
+  // The ruler follows its own fields at once, and scenarios when the hand lets go.
+  const dragged = useStill(desk.links.data, moving) !== desk.links.data
+  const ruled = { desk: useStill(desk, dragged), address: useStill(address, dragged) }
   useTitle(view.title)
   useMeanings()
   return (
     // biome-ignore lint/a11y: links stay links; what is caught here is the click that they get
     <div className="page" data-theme={desk.place.theme} onClick={address ? follow : undefined}>
       <Header desk={desk} address={address} />
-      <main aria-busy={waiting || undefined}>
+      <main aria-busy={busy || later !== view || undefined} data-shown={view.links.here}>
         <h1 className={initial.titled || view.titled ? undefined : 'spoken'}>{view.title}</h1>
         {view.refusal && <Refusal refusal={view.refusal} />}
-        <Verdicts scenarios={view.scenarios} focus={view.place.focus} />
-        <Figure view={view} live={address !== null} />
+        <InSight of={later} moving={moving} className="first-words">
+          {({ scenarios, place }) => <Verdicts scenarios={scenarios} focus={place.focus} />}
+        </InSight>
+        <Figure view={view} live={address !== null} moving={moving} />
         <div className="columns">
           <Ingredients key={`${desk.place.focus} ${desk.scenarios.length}`} desk={desk} live={address !== null} />
-          <Moments view={view} />
-          <Measures view={view} />
+          <InSight of={later} moving={moving}>
+            {(shown) => <Moments view={shown} />}
+          </InSight>
+          <InSight of={later} moving={moving}>
+            {(shown) => <Measures view={shown} />}
+          </InSight>
         </div>
-        <RulerPlace desk={desk} address={address} initial={ruler} shelf={shelf}>
+        <RulerPlace {...ruled} initial={ruler} shelf={shelf}>
           {children}
         </RulerPlace>
       </main>
       <Footer data={desk.links.data} edition={edition} />
-      {address && <Status view={view} moving={address.moving} waiting={waiting} trouble={trouble} />}
+      {address && <Status view={view} moving={moving} waiting={waiting} trouble={trouble} />}
     </div>
   )
 }

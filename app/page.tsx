@@ -5,6 +5,7 @@ import { rulerOf } from '../lib/answers/ruler-view'
 import { SHELF } from '../lib/answers/shelf'
 import { EDITION } from './edition'
 import { Explorer } from './explorer'
+import { askedOf } from './live/fetch-view'
 import { Ruler } from './ui/ruler'
 
 interface Props {
@@ -20,8 +21,9 @@ export default async function Page(props: Props) {
   const { s, ...others } = await props.searchParams
   const ruler = rulerOf(all(s), (key) => all(others[key])[0])
   const view = await read(props)
+  const asked = askedOf(await queryOf(props))
   return (
-    <Explorer initial={view} ruler={ruler} shelf={SHELF} edition={EDITION}>
+    <Explorer initial={view} asked={asked} ruler={ruler} shelf={SHELF} edition={EDITION}>
       <Ruler desk={view} view={ruler} shelf={SHELF} hand={null} />
     </Explorer>
   )
@@ -36,6 +38,11 @@ async function read({ searchParams }: Props): Promise<View> {
   const { s, ...others } = await searchParams
   const keys = Object.entries(others).map(([key, value]) => [key, all(value)[0] ?? ''])
   return explorerOf(JSON.stringify(all(s)), JSON.stringify(keys))
+}
+
+async function queryOf({ searchParams }: Props): Promise<string> {
+  const pairs = Object.entries(await searchParams).flatMap(([key, value]) => all(value).map((one) => [key, one]))
+  return new URLSearchParams(pairs).toString()
 }
 
 function all(value: string | string[] | undefined): readonly string[] {

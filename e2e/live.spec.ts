@@ -276,18 +276,40 @@ test.describe('slow and broken lines', () => {
     ['fails', 'status'],
     ['cannot be reached', 'abort'],
   ] as const) {
-    test(`where the server ${name} the last picture stays, and a way on`, async ({ page }) => {
-      await open(page, ONE)
-      const before = await numbers(page)
-      await page.route('**/api/explorer**', (route) =>
+    const breakServer = (page: Page) =>
+      page.route('**/api/explorer**', (route) =>
         breakIt === 'abort' ? route.abort() : route.fulfill({ status: 500, body: '' }),
       )
+
+    test(`where the server ${name} the page computes by itself and says so`, async ({ page }) => {
+      await open(page, ONE)
+      const before = await numbers(page)
+      await breakServer(page)
       await field(page, 'matter').fill('0.4')
       await page.keyboard.press('Enter')
-      const alert = page.getByRole('alert').filter({ hasText: 'server' })
-      await expect(alert).toContainText('Shown is the last picture')
+      const note = page.getByRole('status').filter({ hasText: 'This page computes in your browser' })
+      await expect(note).toContainText('The server', { timeout: 15_000 })
+      await expect.poll(() => numbers(page)).not.toEqual(before)
+      const here = await numbers(page)
+      await page.unroute('**/api/explorer**')
+      await note.getByRole('button', { name: 'Try again' }).click()
+      await expect(note).toHaveCount(0)
+      await settled(page)
+      expect(await numbers(page)).toEqual(here)
+    })
+
+    test(`where the server ${name} and nothing can be computed, the last picture stays`, async ({ page }) => {
+      await open(page, ONE)
+      const before = await numbers(page)
+      await breakServer(page)
+      await page.route('**/turbopack-worker*', (route) => route.abort())
+      await field(page, 'matter').fill('0.4')
+      await page.keyboard.press('Enter')
+      const alert = page.getByRole('alert').filter({ hasText: 'The server' })
+      await expect(alert).toContainText('Shown is the last picture', { timeout: 15_000 })
       expect(await numbers(page)).toEqual(before)
       await expect(field(page, 'matter')).toHaveValue('0.4')
+      await page.unroute('**/turbopack-worker*')
       await page.unroute('**/api/explorer**')
       await alert.getByRole('button', { name: 'Try again' }).click()
       await expect(alert).toHaveCount(0)

@@ -14,6 +14,8 @@ export default defineConfig({
   reporter: process.env.PLAYWRIGHT_JSON_OUTPUT_FILE ? [['list'], ['json']] : [['list']],
   use: {
     baseURL,
+    // What is kept for use without a network would answer in place of what a test says; offline.spec.ts is about it.
+    serviceWorkers: 'block',
     trace: 'retain-on-failure',
     launchOptions: {
       executablePath: findChromium(process.env),

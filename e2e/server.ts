@@ -13,8 +13,8 @@ export interface Running {
 }
 
 /** As a user would: `npm start` with a port. Settles at the first answer. */
-export async function npmStart(): Promise<Running> {
-  const port = await probePort(0)
+export async function npmStart(wanted?: number): Promise<Running> {
+  const port = wanted ?? (await probePort(0))
   const url = `http://localhost:${port}`
   const begin = performance.now()
   const child = spawn('npm', ['start'], { cwd: ROOT, env: { ...process.env, PORT: String(port) }, stdio: 'ignore' })

@@ -27,6 +27,13 @@ export function useAddress(): Address | null {
   return useSyncExternalStore(subscribe, read, () => null)
 }
 
+/** Tells now and at every change. Returns how to stop it. */
+export function watchAddress(listener: (address: Address) => void): () => void {
+  const told = () => listener(read())
+  told()
+  return subscribe(told)
+}
+
 /** Opens a link of the page. Calls with the same `by` in a row count as one change. */
 export function go(link: string, by: string | null = null): void {
   const { search, depth } = read()

@@ -1,4 +1,5 @@
 /** The ruler, once it is alive. */
+import { QueryClient, QueryClientProvider } from '@tanstack/react-query'
 import { useState } from 'react'
 import type { RulerView } from '../../lib/answers/ruler-view'
 import type { Shelf } from '../../lib/answers/shelf'
@@ -17,7 +18,16 @@ export interface LiveRulerProps {
   readonly shelf: Shelf
 }
 
-export default function LiveRuler({ desk, address, initial, shelf }: LiveRulerProps) {
+export default function LiveRuler(props: LiveRulerProps) {
+  const [client] = useState(() => new QueryClient())
+  return (
+    <QueryClientProvider client={client}>
+      <RulerOf {...props} />
+    </QueryClientProvider>
+  )
+}
+
+function RulerOf({ desk, address, initial, shelf }: LiveRulerProps) {
   const view = useRuler(address, initial)
   return <Ruler desk={desk} view={view} shelf={shelf} hand={useHand(desk, view)} />
 }

@@ -1,71 +1,75 @@
-/** The view of an address: the last one stays until the next is there, one request at a time, the newest wins. */
-import { keepPreviousData, useQuery } from '@tanstack/react-query'
-import { useState } from 'react'
+/** The view of an address: the last one stays until the next is there. */
+import { useEffect, useMemo, useState, useSyncExternalStore } from 'react'
 import type { Explorer } from '../../lib/answers/explorer'
 import { type Desk, readDesk } from '../../lib/words/desk'
-import type { Address } from './address'
-import { askedOf, fetchView } from './fetch-view'
-
-/** Milliseconds: between two tries of one request, and until a failed one is made again unasked. */
-const RETRY = 500
-const RECOVER = 5000
+import { type Address, watchAddress } from './address'
+import { type Answers, createAnswers } from './answers'
+import { askedOf } from './fetch-view'
+import { compute, isAwake, onComputed } from './here'
+import { useOffline } from './use-offline'
 
 export interface Live {
   readonly view: Explorer
   /** Of the address, at once: the view may still be on its way. */
   readonly desk: Desk
+  /** True until the view is that of the address. */
   readonly waiting: boolean
+  /** True until the server has answered as well. */
+  readonly busy: boolean
   readonly trouble: Trouble | null
 }
 
 export interface Trouble {
   readonly message: string
+  /** True where what is shown is not what the address says. */
+  readonly grave: boolean
   /** Null where asking again would change nothing. */
   readonly again: (() => void) | null
 }
 
-export function useExplorer(address: Address | null, initial: Explorer): Live {
-  const wanted = address === null ? null : askedOf(address.search)
-  const { first, asked, ask } = useAsked(wanted)
-  const { data, error, isFetching, isPlaceholderData, refetch } = useQuery({
-    queryKey: ['explorer', asked],
-    queryFn: ({ signal }) => fetchView(asked ?? '', signal),
-    enabled: asked !== null,
-    initialData: asked === first ? initial : undefined,
-    placeholderData: keepPreviousData,
-    staleTime: Number.POSITIVE_INFINITY,
-    gcTime: 60_000,
-    networkMode: 'always',
-    retry: 2,
-    retryDelay: RETRY,
-    refetchOnWindowFocus: false,
-    refetchInterval: ({ state }) => (state.status === 'error' ? RECOVER : false),
-  })
-  // In the middle of a gesture the request under way is let finish: something is then always drawn.
-  const late = wanted !== null && wanted !== asked
-  if (late && !(address?.moving && isFetching)) ask(wanted)
-
-  const own = address === null ? null : readDesk(new URLSearchParams(address.search))
+/** `asked` is the question that `initial` answers: a page that was kept for use without a network may answer another. */
+export function useExplorer(address: Address | null, initial: Explorer, asked: string): Live {
+  const answers = useAnswers(initial, asked)
+  const { answer, wanted, fetching, computing, error } = useSyncExternalStore(
+    answers.subscribe,
+    answers.read,
+    answers.read,
+  )
+  const own = useDesk(address)
   // A code that is well written and has no solution: the last picture stays, with the reason.
-  const refused = data !== initial && own !== null ? (data?.refusal ?? null) : null
-  const view = useLast(data && !refused && !isPlaceholderData ? data : null, initial)
+  const refused = answer.view !== initial && own !== null ? answer.view.refusal : null
+  const view = useLast(refused ? null : answer.view, initial)
+  const waiting = answer.asked !== wanted
+  const showsFirst = view === initial && wanted === asked
   return {
     view,
-    desk: own !== null && !(view === initial && wanted === first && initial.refusal) ? own : view,
-    waiting: late || isFetching,
-    trouble: troubleOf(error, refused, () => void refetch()),
+    desk: own !== null && !(showsFirst && initial.refusal) ? own : view,
+    waiting,
+    busy: waiting || fetching,
+    trouble: troubleOf(computing ? null : error, waiting, answers.again) ?? refusalOf(refused),
   }
 }
 
-/** What is asked of the server; the view that came with the page answers the first question. */
-function useAsked(wanted: string | null) {
-  const [first, setFirst] = useState<string | null>(null)
-  const [asked, ask] = useState<string | null>(null)
-  if (first === null && wanted !== null) {
-    setFirst(wanted)
-    ask(wanted)
-  }
-  return { first, asked, ask }
+function useAnswers(initial: Explorer, asked: string) {
+  const [answers] = useState(() => createAnswers({ asked, view: initial, here: false }, MEANS))
+  useEffect(() => {
+    onComputed(answers.computed)
+    return watchAddress(({ search, moving }) => answers.want(askedOf(search), moving))
+  }, [answers])
+  useOffline(answers.again)
+  return answers
+}
+
+const MEANS = {
+  isAwake,
+  compute,
+  load: async (told: Parameters<Parameters<typeof createAnswers>[1]['load']>[0]) =>
+    (await import('./asking')).startAsking(told),
+}
+
+function useDesk(address: Address | null): Desk | null {
+  const search = address?.search
+  return useMemo(() => (search === undefined ? null : readDesk(new URLSearchParams(search))), [search])
 }
 
 function useLast<T>(value: T | null, initial: T): T {
@@ -74,8 +78,13 @@ function useLast<T>(value: T | null, initial: T): T {
   return value ?? last
 }
 
-function troubleOf(error: Error | null, refused: Explorer['refusal'], again: () => void): Trouble | null {
-  if (error) return { message: `${error.message} Shown is the last picture.`, again }
+function troubleOf(error: Answers['error'], waiting: boolean, again: () => void): Trouble | null {
+  if (!error) return null
+  const shown = waiting ? 'Shown is the last picture.' : 'This page computes in your browser.'
+  return { message: `${error.message} ${shown}`, grave: waiting, again }
+}
+
+function refusalOf(refused: Explorer['refusal']): Trouble | null {
   const [problem] = refused?.problems ?? []
-  return problem ? { message: `${problem.message} Shown is the last picture.`, again: null } : null
+  return problem ? { message: `${problem.message} Shown is the last picture.`, grave: true, again: null } : null
 }

@@ -4,18 +4,21 @@ import { drawLongView, heightOfView, plotOfView } from '../../lib/figures/draw-l
 import type { LongView } from '../../lib/figures/long-view'
 import { FRAMES, type Frame } from '../../lib/figures/plot'
 import { useSteadyHeight } from '../live/use-steady-height'
+import { useStill } from '../live/use-still'
 import { Cursor } from './cursor'
 import { Drawing } from './drawing'
 
 interface Props {
   readonly view: Explorer
   readonly live: boolean
+  /** In the middle of a gesture. */
+  readonly moving: boolean
 }
 
-/** The long view, drawn for three widths of which the page shows one; the others follow when there is time. */
-export const Figure = memo(function Figure({ view, live }: Props) {
+/** The long view, drawn for three widths of which the page shows one; the others follow after a gesture, when there is time. */
+export const Figure = memo(function Figure({ view, live, moving }: Props) {
   const { figure, scenarios } = view
-  const later = useDeferredValue(figure)
+  const later = useDeferredValue(useStill(figure, moving))
   const shown = useShownFrame()
   const caption = useSteadyHeight(String(figure.curves.length), figure)
   const links = useMemo(() => scenarios.map(({ link }) => link), [scenarios])

@@ -1,4 +1,4 @@
-import { type ComponentType, type ReactNode, useEffect, useState } from 'react'
+import { type ComponentType, memo, type ReactNode, useEffect, useState } from 'react'
 import type { LiveRulerProps } from '../live/ruler'
 
 interface Props extends Omit<LiveRulerProps, 'address'> {
@@ -8,10 +8,10 @@ interface Props extends Omit<LiveRulerProps, 'address'> {
 }
 
 /** What the server drew stands until the live ruler has come, after the rest of the page. */
-export function RulerPlace({ address, children, ...rest }: Props) {
+export const RulerPlace = memo(function RulerPlace({ address, children, ...rest }: Props) {
   const [Live, setLive] = useState<ComponentType<LiveRulerProps> | null>(null)
   useEffect(() => {
     import('../live/ruler').then((module) => setLive(() => module.default)).catch(() => undefined)
   }, [])
   return Live && address ? <Live address={address} {...rest} /> : children
-}
+})

@@ -1,6 +1,7 @@
 import { type KeyboardEvent, useRef } from 'react'
 import type { Field } from '../../lib/words/fields'
 import { settle } from '../live/address'
+import { wake } from '../live/here'
 import type { Editing } from '../live/use-editing'
 
 /** Steps of a key that still belong to one change, in milliseconds. */
@@ -41,6 +42,8 @@ export function Slider({ field, drag }: Props) {
       value={value}
       style={{ '--part': `${100 * part}%` } as Record<string, string>}
       onChange={({ target }) => move(Number(target.value))}
+      onPointerEnter={wake}
+      onFocus={wake}
       onPointerDown={() => gesture.begin(true)}
       onKeyDown={press}
       onPointerUp={gesture.end}

@@ -19,7 +19,7 @@ export function Status({ view, moving, waiting, trouble }: Props) {
   return (
     <>
       {trouble && (
-        <div className="state trouble" role="alert">
+        <div className={trouble.grave ? 'state trouble' : 'state'} role={trouble.grave ? 'alert' : 'status'}>
           <span>
             <Sentence text={trouble.message} />
           </span>

@@ -34,7 +34,12 @@ export function ensureBuilt() {
   clearStamp(STAMP)
   // Types left by the development server describe pages that may be gone.
   rmSync(join(OUTPUT, 'dev'), { recursive: true, force: true })
-  const code = runNode('next/dist/bin/next', ['build'], { NODE_ENV: 'production', NEXT_TELEMETRY_DISABLED: '1' })
+  const code = runNode('next/dist/bin/next', ['build'], {
+    NODE_ENV: 'production',
+    NEXT_TELEMETRY_DISABLED: '1',
+    // What a browser kept of one build is not used for another.
+    NEXT_PUBLIC_BUILD: hash.slice(0, 12),
+  })
   if (code !== 0) throw new Refusal('The build failed; its messages stand above.')
   setStamp(STAMP, hash)
 }

@@ -1,0 +1,59 @@
+/** The engine in this browser: a worker, loaded when it is first needed. It gets one question at a time, the newest next. */
+import type { Explorer } from '../../lib/answers/explorer'
+import type { Computed } from './worker'
+
+/** Told of every answer; null where there is none. */
+type Listener = (asked: string, view: Explorer | null) => void
+
+let worker: Worker | null = null
+let ready = false
+let underWay: string | null = null
+let next: string | null = null
+let listener: Listener = () => {}
+
+/** True once it computes without delay. */
+export const isAwake = (): boolean => ready
+
+export function onComputed(told: Listener): void {
+  listener = told
+}
+
+/** Loads it, unless that has been done. */
+export function wake(): void {
+  if (worker) return
+  worker = new Worker(new URL('./worker.ts', import.meta.url))
+  worker.addEventListener('message', heard)
+  worker.addEventListener('error', lost)
+}
+
+/** Takes the place of a question that waits. */
+export function compute(asked: string): void {
+  wake()
+  next = asked === underWay ? null : asked
+  goOn()
+}
+
+function goOn(): void {
+  if (!ready || underWay !== null || next === null) return
+  underWay = next
+  next = null
+  worker?.postMessage(underWay)
+}
+
+/** Null says that it is ready. */
+function heard({ data }: MessageEvent<Computed | null>): void {
+  ready = true
+  underWay = null
+  // First the next question: it is worked on while this answer is drawn.
+  goOn()
+  if (data !== null) listener(data.asked, data.text === null ? null : JSON.parse(data.text))
+}
+
+/** It could not be loaded, or broke down; the next question tries again. */
+function lost(): void {
+  const asked = next ?? underWay
+  worker?.terminate()
+  worker = underWay = next = null
+  ready = false
+  if (asked !== null) listener(asked, null)
+}
