@@ -14,6 +14,8 @@ const DEADLINE = 10_000
  * @param {number} port 0 takes any free one
  */
 export async function serve(port) {
+  // Routes find the files that they read, such as fonts, from here.
+  process.chdir(ROOT)
   // Next would take over upgrades on the server it is given; there are none, so it is given one that never listens.
   const app = next({ dev: false, dir: ROOT, httpServer: createServer() })
   await app.prepare()

@@ -1,4 +1,4 @@
-"""Makes the two fonts of the pages from the npm package `source-sans` (Source Sans 3 by Adobe, SIL Open Font License 1.1).
+"""Makes the two fonts of the pages, and the three of figures as files, from the npm package `source-sans` (Source Sans 3 by Adobe, SIL Open Font License 1.1).
 
 Only Latin and Greek letters, the signs of formulas, and the weights 400 to 700 are kept, which makes a fifth of the size.
 The licence reserves the name "Source" for unchanged fonts, so the results are called Longhence Sans; their licence stands in NOTICE.
@@ -64,3 +64,22 @@ def make(source, target, codes, weight):
 
 make('SourceSans3VF-Upright.ttf.woff2', 'app/fonts/longhence-sans.woff2', UPRIGHT, (400, 700))
 make('SourceSans3VF-Italic.ttf.woff2', 'app/fonts/longhence-sans-italic.woff2', ITALIC, 400)
+
+
+# Figures as files need single weights without compression, and no features but those that every program applies by itself.
+def make_plain(source, target, codes):
+    font = TTFont('node_modules/source-sans/TTF/' + source)
+    options = subset.Options()
+    options.layout_features = ['kern', 'mark', 'mkmk', 'ccmp']
+    options.notdef_outline = True
+    options.hinting = False
+    subsetter = subset.Subsetter(options)
+    subsetter.populate(unicodes=codes)
+    subsetter.subset(font)
+    rename(font)
+    font.save(target)
+
+
+make_plain('SourceSans3-Regular.ttf', 'app/fonts/longhence-sans-regular.ttf', UPRIGHT)
+make_plain('SourceSans3-Semibold.ttf', 'app/fonts/longhence-sans-semibold.ttf', UPRIGHT)
+make_plain('SourceSans3-It.ttf', 'app/fonts/longhence-sans-italic.ttf', ITALIC)

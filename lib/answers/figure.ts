@@ -6,6 +6,7 @@ import { type Picture, type Sheet, sheetOf } from '../print/sheet'
 import { SIZES, type Size } from '../print/sizes'
 import { paletteOf, THEME_KEYS, type ThemeKey } from '../print/theme'
 import type { About } from '../print/to-svg'
+import { DEMO } from '../scenario/demo'
 import { type Fault, fault } from '../scenario/problems'
 import type { Reading, Scenario } from '../scenario/scenario'
 import { linkQuery } from '../scenario/write'
@@ -83,7 +84,7 @@ interface Order {
 export function askFigure(pairs: Pairs, home: Home): Reading<Question<FigureFile>> {
   const keys = readKeys(pairs, Object.keys(FIGURE_FIELDS))
   const faults: Fault[] = [...keys.faults]
-  const order = readOrder(keys.values, faults, Math.max(1, keys.codes.length))
+  const order = readOrder(keys.values, faults, keys.codes.length || DEMO.codes.length)
   return mapped(scenariosOf(keys.codes, faults), (scenarios) => ({
     canonical: `${linkQuery(scenarios)}&${orderText(order)}`,
     answer: () =>

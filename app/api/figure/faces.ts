@@ -1,14 +1,14 @@
-/** The typeface of figures as files: Source Sans 3, unchanged, as its package brings it. Read when a figure is first asked for. */
+/** The typeface of figures as files, read when one is first asked for. */
 import { readFileSync } from 'node:fs'
 import { join } from 'node:path'
 import * as fontkit from 'fontkit'
 import type { FaceKey, Faces } from '../../../lib/print/face'
 
-const FOLDER = join(process.cwd(), 'node_modules/source-sans/TTF')
+const FOLDER = join(process.cwd(), 'app/fonts')
 const NAMES: Readonly<Record<FaceKey, string>> = {
-  regular: 'SourceSans3-Regular.ttf',
-  semibold: 'SourceSans3-Semibold.ttf',
-  italic: 'SourceSans3-It.ttf',
+  regular: 'longhence-sans-regular.ttf',
+  semibold: 'longhence-sans-semibold.ttf',
+  italic: 'longhence-sans-italic.ttf',
 }
 
 interface Typeface {

@@ -1,0 +1,167 @@
+/** Figures as files: the same bytes each time, nothing but what they bring along, no letter too small; read by other programs. */
+import { readFileSync } from 'node:fs'
+import { join } from 'node:path'
+import { Resvg } from '@resvg/resvg-js'
+import { describe, expect, test } from 'vitest'
+import { drawn } from '../../app/api/figure/draw'
+import { askFigure, MOST_PIXELS } from '../../lib/answers/figure'
+import { drawLongView } from '../../lib/figures/draw-long-view'
+import { longView } from '../../lib/figures/long-view'
+import type { SvgNode } from '../../lib/figures/svg'
+import { crc32 } from '../../lib/print/png'
+import { SIZES } from '../../lib/print/sizes'
+import { plainClasses } from '../../lib/print/style'
+import { COLOUR_NAMES, paletteOf, THEME_KEYS } from '../../lib/print/theme'
+import { answerOf, problemsOf } from '../answers/ask'
+import { bounce, einsteinDeSitter, flatLambda, milne, phantom, sinking } from '../figures/universes'
+import { needs, run } from '../tools'
+
+const ask = (pairs: URLSearchParams) => askFigure(pairs, { version: '9.8.7', base: 'https://a.example' })
+const fileOf = (query: string) => answerOf(ask, query)
+const bytesOf = async (query: string) => Buffer.from(await drawn(fileOf(query)))
+const HARD = `s=${encodeURIComponent('h0:70,as:<b>&"Ω – 宇宙 🌌')}&s=h0:70,matter:0.3,eos:constant,w:-1.2&s=h0:70,matter:0.4,dark:0.85,eos:cpl,w0:-0.6,wa:-1.6&s=h0:70,matter:0.1,dark:1.7,cmb:0&s=h0:70,matter:1,cmb:0&s=eos:field,v:linear`
+const CASES = SIZES.flatMap(({ key }) => THEME_KEYS.map((theme) => [key, theme] as const))
+
+describe('colours', () => {
+  const css = readFileSync(new URL('../../app/styles/theme.css', import.meta.url), 'utf8')
+  test.each(COLOUR_NAMES)('%s is that of the page', (name) => {
+    const pair = `--${name}: light-dark(${paletteOf('paper')(name)}, ${paletteOf('night')(name)})`
+    expect(css).toContain(pair)
+  })
+  test('every class of a drawing has its look', () => {
+    const view = longView([flatLambda(), phantom(), sinking(), bounce(), milne(), einsteinDeSitter()])
+    for (const compact of [true, false]) {
+      const node = drawLongView(view, { width: 900, height: 400, type: 15, compact, id: 'a' })
+      expect(plainClasses(node)).toEqual([])
+    }
+  })
+})
+
+describe.each(CASES)('%s on %s', (size, theme) => {
+  const query = (format: string) => `${HARD}&size=${size}&theme=${theme}&format=${format}`
+
+  test('no letter is smaller than the place allows', () => {
+    const { least } = SIZES.find(({ key }) => key === size) ?? { least: 0 }
+    const { sheet } = fileOf(query('svg'))
+    const sizes = letterSizes(sheet.node).map((one) => one * sheet.scale)
+    expect(sizes.length).toBeGreaterThan(10)
+    expect(Math.min(...sizes)).toBeGreaterThanOrEqual(least)
+  })
+  test('the same bytes each time', async () => {
+    for (const format of ['svg', 'pdf', 'png&dpi=96']) {
+      expect((await bytesOf(query(format))).equals(await bytesOf(query(format))), format).toBe(true)
+    }
+  })
+  test('SVG: no class, no style, no letters that need a font, and well formed', async (context) => {
+    const text = (await bytesOf(query('svg'))).toString()
+    expect(text).not.toMatch(/ class=|<style|<text|<script|undefined|NaN/)
+    expect(text).toContain('<title id="title">&lt;b&gt;&amp;&quot;Ω')
+    expect(text).toContain('https://a.example/?s=')
+    needs(context, 'xmllint')
+    expect(run('xmllint', ['--noout', '--nonet', 'a.svg'], { 'a.svg': text })).toMatchObject({ status: 0 })
+  })
+  test('PDF: fonts embedded, real text', async (context) => {
+    const pdf = await bytesOf(query('pdf'))
+    needs(context, 'pdffonts', ['-v'])
+    const fonts = run('pdffonts', ['a.pdf'], { 'a.pdf': pdf }).said.trim().split('\n').slice(2)
+    expect(fonts.length).toBeGreaterThanOrEqual(2)
+    for (const font of fonts) expect(font).toMatch(/LonghenceSans.* yes yes yes /)
+    const text = run('pdftotext', ['a.pdf', '-'], { 'a.pdf': pdf })
+    expect(text.said).toContain('time from now, Gyr')
+    expect(text.complaint).toBe('')
+    expect(run('pdfinfo', ['a.pdf'], { 'a.pdf': pdf }).said).toMatch(/Title: +<b>&"Ω/)
+  })
+  test('PNG: the size in pixels, the density, the words', async () => {
+    const { sheet } = fileOf(query('png'))
+    const png = await bytesOf(`${query('png')}&dpi=96`)
+    const [width, height] = [png.readUInt32BE(16), png.readUInt32BE(20)]
+    expect(Math.abs(width - (sheet.width * sheet.scale * 96) / 72)).toBeLessThanOrEqual(1)
+    expect(Math.abs(height - (sheet.height * sheet.scale * 96) / 72)).toBeLessThanOrEqual(1)
+    const chunks = chunksOf(png)
+    expect(chunks.get('pHYs')?.readUInt32BE(0)).toBe(Math.round(96 / 0.0254))
+    expect(chunks.get('iTXt')?.toString()).toContain('Longhence')
+  })
+})
+
+/** Every chunk by its type; those with a wrong check value are left out. */
+function chunksOf(png: Buffer): Map<string, Buffer> {
+  const found = new Map<string, Buffer>()
+  for (let at = 8; at < png.length; ) {
+    const length = png.readUInt32BE(at)
+    const body = png.subarray(at + 4, at + 8 + length)
+    if (crc32(body) === png.readUInt32BE(at + 8 + length)) found.set(body.toString('latin1', 0, 4), body.subarray(4))
+    at += 12 + length
+  }
+  return found
+}
+
+function letterSizes(node: SvgNode): number[] {
+  const own = node.tag === 'text' ? [Number(node.attributes['font-size'])] : []
+  return [...own, ...node.children.flatMap((child) => (typeof child === 'string' ? [] : letterSizes(child)))]
+}
+
+test('the check value of PNG (W3C, Portable Network Graphics, annex D; that of an empty IEND is AE 42 60 82)', () => {
+  expect(crc32(Buffer.from('IEND'))).toBe(0xae426082)
+})
+
+test('the preview card has 1200 × 630 pixels', async () => {
+  const png = await bytesOf('size=card&format=png')
+  expect([png.readUInt32BE(16), png.readUInt32BE(20)]).toEqual([1200, 630])
+})
+
+test('a PDF looks like the SVG of the same figure', async (context) => {
+  needs(context, 'pdftoppm', ['-v'])
+  const pdf = await bytesOf(`${HARD}&format=pdf`)
+  let page = Buffer.alloc(0)
+  run('pdftoppm', ['-r', '72', '-singlefile', 'a.pdf', 'page'], { 'a.pdf': pdf }, (folder) => {
+    page = readFileSync(join(folder, 'page.ppm'))
+  })
+  const seen = async (theme: string) => {
+    const svg = (await bytesOf(`${HARD}&format=svg&theme=${theme}`)).toString()
+    return new Resvg(svg, { fitTo: { mode: 'width', value: 960 }, font: { loadSystemFonts: false } }).render()
+  }
+  // Other programs smooth edges otherwise: those differ, areas do not.
+  expect(difference(page, await seen('paper'))).toBeLessThan(0.02)
+  expect(difference(page, await seen('night'))).toBeGreaterThan(0.3)
+})
+
+/** Mean difference of colours, from 0 to 1, of a PPM (three bytes a pixel after three lines) and a picture (four bytes). */
+function difference(ppm: Buffer, { pixels, width, height }: { pixels: Buffer; width: number; height: number }): number {
+  const [, w, h] = /^P6\s+(\d+)\s+(\d+)\s+255\s/.exec(ppm.toString('latin1', 0, 40)) ?? []
+  expect(Math.abs(Number(w) - width) + Math.abs(Number(h) - height)).toBeLessThanOrEqual(2)
+  const start = ppm.length - 3 * Number(w) * Number(h)
+  let sum = 0
+  const [columns, rows] = [Math.min(width, Number(w)), Math.min(height, Number(h))]
+  for (let y = 0; y < rows; y++) {
+    for (let x = 0; x < columns; x++) {
+      for (let c = 0; c < 3; c++)
+        sum += Math.abs(ppm[start + 3 * (y * Number(w) + x) + c] - pixels[4 * (y * width + x) + c])
+    }
+  }
+  return sum / (255 * 3 * columns * rows)
+}
+
+describe('what is refused', () => {
+  test.each([
+    ['view=tall', 'view', 'tall'],
+    ['format=gif', 'format', 'gif'],
+    ['size=stamp', 'size', 'stamp'],
+    ['theme=blue', 'theme', 'blue'],
+    ['format=png&dpi=95', 'dpi', '95'],
+    ['format=png&dpi=601', 'dpi', '601'],
+    ['format=svg&dpi=300', 'dpi', '300'],
+    ['size=poster&format=png&dpi=600', 'dpi', '600'],
+    ['width=3', 'width', '3'],
+  ])('%s', (query, parameter, value) => {
+    expect(problemsOf(ask, query)).toMatchObject([{ parameter, value, scenario: null }])
+  })
+  test.each([HARD, '', 's=h0:70'])('the largest that is allowed has no more pixels than allowed: %s', (codes) => {
+    const query = (dpi: number) => `${codes}&size=poster&format=png&dpi=${dpi}`
+    const [{ allowed }] = problemsOf(ask, query(600))
+    const most = Number(/up to (\d+)/.exec(allowed)?.[1])
+    const { sheet, dpi } = fileOf(query(most))
+    expect(dpi).toBe(most)
+    expect(sheet.width * sheet.height * ((sheet.scale * most) / 72) ** 2).toBeLessThanOrEqual(MOST_PIXELS)
+    expect(problemsOf(ask, query(most + 1))).toHaveLength(1)
+  })
+})
