@@ -1,10 +1,11 @@
 'use client'
 
-import { type MouseEvent, type ReactNode, useDeferredValue, useEffect } from 'react'
+import { type ReactNode, useDeferredValue, useEffect } from 'react'
 import type { Explorer as View } from '../lib/answers/explorer'
 import type { RulerView } from '../lib/answers/ruler-view'
 import type { Shelf } from '../lib/answers/shelf'
-import { go, useAddress } from './live/address'
+import { useAddress } from './live/address'
+import { follow } from './live/follow'
 import { useExplorer } from './live/use-explorer'
 import { useStill } from './live/use-still'
 import { Figure } from './ui/figure'
@@ -54,7 +55,12 @@ export function Explorer({ initial, asked, ruler, shelf, edition, children }: Pr
         </InSight>
         <Figure view={view} live={address !== null} moving={moving} />
         <div className="columns">
-          <Ingredients key={`${desk.place.focus} ${desk.scenarios.length}`} desk={desk} live={address !== null} />
+          <Ingredients
+            key={`${desk.place.focus} ${desk.scenarios.length}`}
+            desk={desk}
+            sets={shelf.sets}
+            live={address !== null}
+          />
           <InSight of={later} moving={moving}>
             {(shown) => <Moments view={shown} />}
           </InSight>
@@ -70,15 +76,6 @@ export function Explorer({ initial, asked, ruler, shelf, edition, children }: Pr
       {address && <Status view={view} moving={moving} waiting={waiting} trouble={trouble} />}
     </div>
   )
-}
-
-/** Plain clicks on links of this page change it where it stands. */
-function follow(event: MouseEvent): void {
-  const link = event.target instanceof Element ? event.target.closest('a') : null
-  const plain = event.button === 0 && !(event.metaKey || event.ctrlKey || event.shiftKey || event.altKey)
-  if (!link || !plain || event.defaultPrevented || link.origin !== location.origin || link.pathname !== '/') return
-  event.preventDefault()
-  go(link.href)
 }
 
 /** What names and numbers mean, once there is time. */

@@ -1,18 +1,22 @@
+import type { ReactNode } from 'react'
+import type { ShelvedSet } from '../../lib/answers/shelf'
 import type { Desk } from '../../lib/words/desk'
 import type { FieldGroup } from '../../lib/words/fields'
 import { type Editing, useEditing } from '../live/use-editing'
 import { FieldRow } from './field'
+import { Published, Retune } from './ingredients-published'
 import { Means } from './means'
 import { Sentence, Symbols } from './symbol'
 
 interface Props {
   readonly desk: Desk
+  readonly sets: readonly ShelvedSet[]
   /** Until then a plain form, which asks for the page that its fields spell. */
   readonly live: boolean
 }
 
 /** The parameters of the scenario in focus; the others travel along unseen. */
-export function Ingredients({ desk, live }: Props) {
+export function Ingredients({ desk, sets, live }: Props) {
   const { form, scenarios, place, placeFields } = desk
   const editing = useEditing(desk)
   return (
@@ -21,6 +25,7 @@ export function Ingredients({ desk, live }: Props) {
         Ingredients
       </h2>
       <Tabs desk={desk} />
+      <Published desk={desk} sets={sets} />
       <form
         action="/compose"
         method="get"
@@ -38,7 +43,9 @@ export function Ingredients({ desk, live }: Props) {
           <input key={name} type="hidden" name={name} value={value} />
         ))}
         {form.groups.map((group) => (
-          <Group key={group.key} group={group} editing={editing} live={live} />
+          <Group key={group.key} group={group} editing={editing} live={live}>
+            {group.key === 'rate' && <Retune desk={desk} sets={sets} />}
+          </Group>
         ))}
         <button type="submit" className={live ? 'absent' : undefined}>
           Apply
@@ -50,7 +57,8 @@ export function Ingredients({ desk, live }: Props) {
 
 function Tabs({ desk }: { readonly desk: Desk }) {
   const { scenarios, place, links } = desk
-  const acts = { Add: links.add, Copy: links.copy, Remove: links.remove }
+  const reset = `/compose/preset?${links.here.replace(/^\/\?/, '')}&set=defaults`
+  const acts = { Add: links.add, Copy: links.copy, Remove: links.remove, Reset: reset }
   return (
     <nav className="tabs" aria-label="Scenarios">
       {scenarios.map(({ slot, name, link }) => (
@@ -82,9 +90,11 @@ interface GroupProps {
   readonly group: FieldGroup
   readonly editing: Editing
   readonly live: boolean
+  /** Below the fields. */
+  readonly children: ReactNode
 }
 
-function Group({ group, editing, live }: GroupProps) {
+function Group({ group, editing, live, children }: GroupProps) {
   const { key, title, folded, fields, family } = group
   const rows = fields.map((field) => <FieldRow key={field.name} field={field} editing={editing} live={live} />)
   if (folded) {
@@ -99,6 +109,7 @@ function Group({ group, editing, live }: GroupProps) {
     <fieldset className="group">
       <legend>{title}</legend>
       {rows}
+      {children}
       {family && (
         <p className="law">
           <span className="formula">

@@ -1,7 +1,8 @@
-/** What of the page is the same for every address: what the ruler can read. */
+/** What of the page is the same for every address: what the ruler can read, and published parameter sets. */
 import { EPOCH_VARIABLES } from '../ruler/epochs'
 import { READING_GROUPS } from '../ruler/groups'
 import { readingNamed } from '../ruler/readings'
+import { PUBLISHED_SETS, type PublishedSet } from '../scenario/presets'
 
 export interface Shelf {
   readonly epochs: readonly { readonly key: string; readonly label: string; readonly unit: string }[]
@@ -9,6 +10,19 @@ export interface Shelf {
     readonly title: string
     readonly choices: readonly { readonly key: string; readonly label: string }[]
   }[]
+  readonly sets: readonly ShelvedSet[]
+}
+
+export interface ShelvedSet {
+  readonly key: string
+  readonly title: string
+  /** The code without a name, by which a scenario is known to be as published; null for a single parameter. */
+  readonly plain: string | null
+  /** In the markup of labels. */
+  readonly values: string
+  readonly cited: string
+  /** Whether H₀ can be retuned to what it says of the acoustic angle and the age. */
+  readonly retunes: boolean
 }
 
 export const SHELF: Shelf = {
@@ -17,4 +31,17 @@ export const SHELF: Shelf = {
     title,
     choices: keys.map((key) => ({ key, label: readingNamed(key)?.label ?? key })),
   })),
+  sets: PUBLISHED_SETS.map(shelved),
+}
+
+function shelved({ key, title, code, values, citation, confidence, note, kept }: PublishedSet): ShelvedSet {
+  const errors = confidence === 'best fit' ? 'best fit' : `errors ${confidence}`
+  return {
+    key,
+    title,
+    plain: code?.replace(/,as:.*$/, '') ?? null,
+    values: values.map(({ symbol, value, error }) => `${symbol} ${value} ${error}`.trim()).join(', '),
+    cited: `${citation}; ${errors}. ${note}`,
+    retunes: kept !== null,
+  }
 }
