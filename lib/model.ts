@@ -7,6 +7,7 @@ import { amountsOf, type Component, componentsOf, merged } from './components'
 import type { Law, Logarithmic } from './dark-energy/law'
 import { energyDerivatives, energyRatio, energyRatioChange } from './neutrinos/energy'
 import type { Budget } from './scenario/budget'
+import type { MassiveState } from './scenario/radiation'
 
 /** E² at an anchor N, where it is known without rounding: 1 today, 0 at a turning point. */
 export interface Anchor {
@@ -41,7 +42,23 @@ export interface Model {
   /** E² at N, with a⁻¹ = e^(−N) passed in by callers who know it more exactly. */
   expansion(N: number, inverseScale: number): number
   /** The same at many places, by the form that rounds least. */
-  expansionsInto(out: Float64Array, places: Float64Array, inverseScales: Float64Array, count: number): void
+  expansionsInto(out: Float64Array, places: Float64Array, inverseScales: Float64Array, from: number, to: number): void
+  /** Ω f of one component, as the budget names it, at many places. */
+  densitiesInto(
+    out: Float64Array,
+    key: Component['key'],
+    places: Float64Array,
+    inverseScales: Float64Array,
+    count: number,
+  ): void
+  /** dE²/dN and d²E²/dN² at many places. */
+  slopesInto(
+    first: Float64Array,
+    second: Float64Array,
+    places: Float64Array,
+    inverseScales: Float64Array,
+    count: number,
+  ): void
   /** E² at N where dark energy over its density today is known better than from N. */
   expansionWith(N: number, density: number): number
   /** Do today's densities cancel to 1 from a sum of sizes above 4? */
@@ -78,21 +95,64 @@ export function modelOf(budget: Budget, law: Law): Model {
     return ((relativistic * x + coldMatter) * x + curvature) * x * x
   }
 
-  const expansionsInto: Model['expansionsInto'] = (out, places, inverseScales, count) => {
-    for (let i = 0; i < count; i++) {
+  const energy = new Float64Array(3)
+  const expansionsInto: Model['expansionsInto'] = (out, places, inverseScales, from, to) => {
+    for (let i = from; i < to; i++) {
       const x = inverseScales[i]
       out[i] = ((radiation * x + coldMatter) * x + curvature) * x * x
     }
-    for (const { masslessDensity, y } of states) {
+    for (const state of states) for (let i = from; i < to; i++) out[i] += densityOf(state, inverseScales[i])
+    if (dark !== 0 && law.exponent === 0) for (let i = from; i < to; i++) out[i] += dark
+    else if (dark !== 0) for (let i = from; i < to; i++) out[i] += dark * law.density(places[i])
+    if (!cancels) return
+    for (let i = from; i < to; i++) if (Math.abs(places[i]) < NEAR_TODAY) out[i] = 1 + changeFrom(TODAY, places[i])
+  }
+
+  const densitiesInto: Model['densitiesInto'] = (out, key, places, inverseScales, count) => {
+    out.fill(0, 0, count)
+    if (key === 'neutrino') {
+      for (const state of states) for (let i = 0; i < count; i++) out[i] += densityOf(state, inverseScales[i])
+    } else if (key === 'dark') {
+      const steady = law.exponent === 0
+      if (amounts.dark !== 0)
+        for (let i = 0; i < count; i++) out[i] = amounts.dark * (steady ? 1 : law.density(places[i]))
+    } else {
+      const [amount, cubed, fourth] = [amounts[key], key !== 'curvature', key === 'radiation']
+      if (amount === 0) return
       for (let i = 0; i < count; i++) {
-        const square = inverseScales[i] * inverseScales[i]
-        if (inverseScales[i] > NO_SCALE) out[i] += masslessDensity * energyRatio(y / inverseScales[i]) * square * square
+        const x = inverseScales[i]
+        out[i] = amount * x * x * (cubed ? x : 1) * (fourth ? x : 1)
       }
     }
-    if (dark !== 0 && law.exponent === 0) for (let i = 0; i < count; i++) out[i] += dark
-    else if (dark !== 0) for (let i = 0; i < count; i++) out[i] += dark * law.density(places[i])
-    if (!cancels) return
-    for (let i = 0; i < count; i++) if (Math.abs(places[i]) < NEAR_TODAY) out[i] = 1 + changeFrom(TODAY, places[i])
+  }
+
+  const slopesInto: Model['slopesInto'] = (first, second, places, inverseScales, count) => {
+    for (let i = 0; i < count; i++) {
+      const x = inverseScales[i]
+      const square = x * x
+      const k = sized(curvature, square)
+      const m = sized(coldMatter, square * x)
+      const r = sized(radiation, square * square)
+      first[i] = -2 * k - 3 * m - 4 * r
+      second[i] = 4 * k + 9 * m + 16 * r
+    }
+    for (const state of states) {
+      for (let i = 0; i < count; i++) {
+        if (!(inverseScales[i] > NO_SCALE)) continue
+        energyDerivatives(state.y / inverseScales[i], energy)
+        const square = inverseScales[i] * inverseScales[i]
+        const density = state.masslessDensity * energy[0] * square * square
+        const n = 4 - energy[1]
+        first[i] -= n * density
+        second[i] += (n * n + energy[2]) * density
+      }
+    }
+    if (dark === 0 || law.exponent === 0) return
+    for (let i = 0; i < count; i++) {
+      law.derivativesInto(energy, places[i])
+      first[i] += dark * energy[1]
+      second[i] += dark * energy[2]
+    }
   }
 
   /** E²(anchor.N + d) − E²(anchor.N), and the sum of the sizes of its terms in `size`. */
@@ -115,7 +175,6 @@ export function modelOf(budget: Budget, law: Law): Model {
     return k + m + r + de
   }
 
-  const energy = new Float64Array(3)
   const derivatives = (N: number): Derivatives => {
     const x = Math.exp(-N)
     const square = x * x
@@ -158,6 +217,8 @@ export function modelOf(budget: Budget, law: Law): Model {
     signed: acting.some((one) => one.omega < 0 || one.terms !== undefined),
     expansion,
     expansionsInto,
+    densitiesInto,
+    slopesInto,
     expansionWith: (N, density) =>
       cancels && Math.abs(N) < NEAR_TODAY
         ? 1 + changeFrom(TODAY, N, density - 1)
@@ -172,6 +233,13 @@ export function modelOf(budget: Budget, law: Law): Model {
     magnitude: (N) => acting.reduce((sum, one) => sum + Math.exp(one.logSize(N)), 0),
     derivatives,
   }
+}
+
+/** Density of a state of massive neutrinos at 1/a. */
+function densityOf({ masslessDensity, y }: MassiveState, x: number): number {
+  if (!(x > NO_SCALE)) return 0
+  const square = x * x
+  return masslessDensity * energyRatio(y / x) * square * square
 }
 
 /** Nothing stays nothing where the power leaves the doubles. */

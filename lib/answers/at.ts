@@ -60,7 +60,7 @@ function cellsAt(
 ): (number | null)[] {
   return columns.map((column) => {
     const value = column.value(solution, instant)
-    const because = isMissing(value) ? value.because : column.note?.(solution, instant)
+    const because = isMissing(value) ? value.because : column.note(solution, instant)
     if (because) notes.push({ row, column: column.key, because })
     return isMissing(value) ? null : value
   })

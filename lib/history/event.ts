@@ -123,50 +123,85 @@ function mirrored(history: History, phase: 'home' | 'before', clock: Clock, sinc
   return { phase, place, sign: away ? -1 : 1, swings }
 }
 
-/** Time or conformal time between an event beyond a turning point and that point. */
-function sinceTurning(history: History, one: Event, phase: 'home' | 'before', clock: Clock): number {
-  const [near, far] = swing(history, phase)
-  const along = one.place.arm === near ? toEnd(one.place, clock) : near[clock].total + fromToday(one.place, clock)
-  if (one.swings === 0) return along
-  const whole = near[clock].total + far[clock].total
-  return one.swings % 2 === 0 ? one.swings * whole + along : (one.swings + 1) * whole - along
+/** Where an event lies, but for its place on the arm. */
+export interface Position {
+  readonly phase: Phase
+  readonly arm: Arm
+  readonly swings: number
 }
 
-/** Time or conformal time from now to the event; past negative. */
-export function sinceNow(history: History, one: Event, clock: Clock): number {
+/** A time or conformal time of any event at a position: a constant, and an integral along the arm with its sign. */
+export interface Span {
+  readonly offset: number
+  readonly sign: 1 | -1
+  readonly of: 'fromToday' | 'toEnd'
+}
+
+const span = (offset: number, sign: Span['sign'], of: Span['of']): Span => ({ offset, sign, of })
+const after = (offset: number, one: Span): Span => span(offset + one.offset, one.sign, one.of)
+const before = (offset: number, one: Span): Span => span(offset - one.offset, one.sign > 0 ? -1 : 1, one.of)
+
+/** Between an event beyond a turning point and that point. */
+function sinceTurning(history: History, { arm, swings }: Position, phase: 'home' | 'before', clock: Clock): Span {
+  const [near, far] = swing(history, phase)
+  const along = arm === near ? span(0, 1, 'toEnd') : span(near[clock].total, 1, 'fromToday')
+  if (swings === 0) return along
+  const whole = near[clock].total + far[clock].total
+  return swings % 2 === 0 ? after(swings * whole, along) : before((swings + 1) * whole, along)
+}
+
+/** From now to the event; past negative. */
+export function spanSinceNow(history: History, one: Position, clock: Clock): Span {
   switch (one.phase) {
     case 'past':
-      return -fromToday(one.place, clock)
+      return span(0, -1, 'fromToday')
     case 'future':
-      return fromToday(one.place, clock)
+      return span(0, 1, 'fromToday')
     case 'home':
-      return history.future[clock].total + sinceTurning(history, one, 'home', clock)
+      return after(history.future[clock].total, sinceTurning(history, one, 'home', clock))
     case 'before':
-      return -history.past[clock].total - sinceTurning(history, one, 'before', clock)
+      return before(-history.past[clock].total, sinceTurning(history, one, 'before', clock))
   }
 }
 
-/** Time or conformal time since the origin: the big bang, or the last bounce. Infinity where the past is infinite. */
-export function sinceOrigin(history: History, one: Event, clock: Clock): number {
-  const { past } = history
-  if (one.phase === 'past') return toEnd(one.place, clock)
-  if (one.phase === 'before') return -sinceTurning(history, one, 'before', clock)
-  return past[clock].total + sinceNow(history, one, clock)
+/** Since the origin: the big bang, or the last bounce. Infinity where the past is infinite. */
+export function spanSinceOrigin(history: History, one: Position, clock: Clock): Span {
+  if (one.phase === 'past') return span(0, 1, 'toEnd')
+  if (one.phase === 'before') return before(0, sinceTurning(history, one, 'before', clock))
+  return after(history.past[clock].total, spanSinceNow(history, one, clock))
 }
 
-/** Time or conformal time left to the end; Infinity where there is none. */
-export function untilEnd(history: History, one: Event, clock: Clock): number {
+/** Left to the end; Infinity where there is none. */
+export function spanUntilEnd(history: History, one: Position, clock: Clock): Span {
   const { future, descent, home, unfollowed } = history
-  if (future.end.kind === 'double') return Number.POSITIVE_INFINITY
-  if (future.end.kind === 'none' || future.end.kind === 'singular') {
-    if (one.phase === 'future') return toEnd(one.place, clock)
-    return future[clock].total - sinceNow(history, one, clock)
-  }
-  if (unfollowed) return future[clock].total + unfollowed[clock] - sinceNow(history, one, clock)
-  if (home.end.kind !== 'none' && home.end.kind !== 'singular') return Number.POSITIVE_INFINITY
-  if (one.phase === 'home' && one.place.arm === home) return toEnd(one.place, clock)
-  return future[clock].total + descent[clock].total + home[clock].total - sinceNow(history, one, clock)
+  const never = span(Number.POSITIVE_INFINITY, 1, 'fromToday')
+  const until = (end: number) => before(end, spanSinceNow(history, one, clock))
+  if (future.end.kind === 'double') return never
+  if (future.end.kind === 'none' || future.end.kind === 'singular')
+    return one.phase === 'future' ? span(0, 1, 'toEnd') : until(future[clock].total)
+  if (unfollowed) return until(future[clock].total + unfollowed[clock])
+  if (home.end.kind !== 'none' && home.end.kind !== 'singular') return never
+  if (one.phase === 'home' && one.arm === home) return span(0, 1, 'toEnd')
+  return until(future[clock].total + descent[clock].total + home[clock].total)
 }
+
+export const positionOf = ({ phase, place, swings }: Event): Position => ({ phase, arm: place.arm, swings })
+
+/** The value of a span at a place. */
+export const spanAt = ({ offset, sign, of }: Span, place: Place, clock: Clock): number =>
+  offset + sign * (of === 'fromToday' ? fromToday(place, clock) : toEnd(place, clock))
+
+/** Time or conformal time from now to the event; past negative. */
+export const sinceNow = (history: History, one: Event, clock: Clock): number =>
+  spanAt(spanSinceNow(history, positionOf(one), clock), one.place, clock)
+
+/** Time or conformal time since the origin. */
+export const sinceOrigin = (history: History, one: Event, clock: Clock): number =>
+  spanAt(spanSinceOrigin(history, positionOf(one), clock), one.place, clock)
+
+/** Time or conformal time left to the end. */
+export const untilEnd = (history: History, one: Event, clock: Clock): number =>
+  spanAt(spanUntilEnd(history, positionOf(one), clock), one.place, clock)
 
 /** E² at an event. */
 export const expansionAtEvent = ({ place }: Event): number => expansionAtPlace(place)

@@ -17,7 +17,7 @@ export interface Place {
 }
 
 /** On this part of the first panel an integral from today is taken directly, to keep its relative accuracy. */
-const NEAR_TODAY = 0.15
+export const NEAR_TODAY = 0.15
 
 /** The place at distance m = |ln a| from today, or null beyond a turning point. */
 export function placeAt(arm: Arm, m: number): Place | null {
@@ -29,7 +29,7 @@ export function placeAt(arm: Arm, m: number): Place | null {
 }
 
 /** Index of the last entry of an ascending list that is not above the value. */
-function indexBelow(list: Float64Array, value: number): number {
+export function indexBelow(list: Float64Array, value: number): number {
   let [low, high] = [0, list.length]
   while (high - low > 1) {
     const middle = (low + high) >> 1
@@ -50,7 +50,8 @@ export function fromToday(place: Place, clock: Clock): number {
 }
 
 /** The same by Gauss's rule on [0, m], where E² is formed from today's exact 1. */
-function nearToday(arm: Arm, m: number, clock: Clock): number {
+export function nearToday(arm: Arm, m: number, clock: Clock): number {
+  if (m === 0) return 0
   const integrand = (s: number) => {
     const N = arm.direction * s
     return (clock === 'time' ? 1 : Math.exp(-N)) / Math.sqrt(arm.model.expansionFrom(TODAY, N))

@@ -23,7 +23,7 @@ export function plainZone(model: Model, direction: Direction, from: number, to: 
     },
     sampleInto(out, centre, half) {
       nodesInto(direction, centre, half)
-      model.expansionsInto(squares, places, inverseScales, NODE_COUNT)
+      model.expansionsInto(squares, places, inverseScales, 0, NODE_COUNT)
       for (let k = 0; k < NODE_COUNT; k++) {
         const squared = squares[k]
         if (squared > SMALLEST && squared < LARGEST) {

@@ -2,7 +2,7 @@
 import { type Event, expansionAtEvent } from '../history/event'
 import { type Missing, missing } from './outcome'
 
-const AT_REST = missing('the expansion stands still here, so a ratio to H² is not defined')
+export const AT_REST = missing('the expansion stands still here, so a ratio to H² is not defined')
 const OUT_OF_RANGE = missing('the densities here are outside the range of floating-point numbers')
 
 /** H/H₀, with its sign. Here and below `e2` is E² at the event, for callers who know it already. */

@@ -1,7 +1,18 @@
 /** What a line of sight from here and now meets: comoving distance to an event, and horizons as seen from an event. */
-import { type Event, eventAtScale, isEvent, sinceNow, sinceOrigin, untilEnd } from '../history/event'
+import {
+  type Event,
+  eventAtScale,
+  isEvent,
+  type Position,
+  positionOf,
+  type Span,
+  sinceNow,
+  spanAt,
+  spanSinceOrigin,
+  untilEnd,
+} from '../history/event'
 import type { History } from '../history/history'
-import { type Place, placeElapsed, toEnd } from '../history/place'
+import { type Place, placeElapsed } from '../history/place'
 import { antipode } from './distances'
 import { bounded, type Missing, missing, type Outcome } from './outcome'
 
@@ -12,14 +23,24 @@ export function comovingDistance(history: History, event: Event): number | Missi
   return -sinceNow(history, event, 'conformal')
 }
 
-/** Comoving distance that light has covered since the beginning, to the event; the contraction before a bounce counts. */
-export function particleHorizon(history: History, event: Event): number | Missing {
+export const NO_PARTICLE_HORIZON = missing('light has had unlimited conformal time: the horizon is infinite')
+export const NO_EVENT_HORIZON = missing('light has unlimited conformal time ahead: there is no event horizon')
+
+/** Comoving distance that light has covered since the beginning, to an event; the contraction before a bounce counts. */
+export function particleHorizonSpan(history: History, one: Position): Span | Missing {
   const before = beforeExpansion(history)
   if (typeof before !== 'number') return before
   // Far back in the contraction this is small beside the two whole sums, so it is taken from its own end.
-  const contracting = event.phase === 'before' && event.place.arm === history.before
-  const since = contracting ? toEnd(event.place, 'conformal') : before + sinceOrigin(history, event, 'conformal')
-  return Number.isFinite(since) ? since : missing('light has had unlimited conformal time: the horizon is infinite')
+  if (one.phase === 'before' && one.arm === history.before) return { offset: 0, sign: 1, of: 'toEnd' }
+  const since = spanSinceOrigin(history, one, 'conformal')
+  return { ...since, offset: before + since.offset }
+}
+
+export function particleHorizon(history: History, event: Event): number | Missing {
+  const span = particleHorizonSpan(history, positionOf(event))
+  if ('because' in span) return span
+  const value = spanAt(span, event.place, 'conformal')
+  return Number.isFinite(value) ? value : NO_PARTICLE_HORIZON
 }
 
 /** Conformal time before the origin of the expansion: zero after a big bang. */
@@ -32,7 +53,7 @@ function beforeExpansion(history: History): number | Missing {
 /** Comoving distance that light sent at the event can still cover before the end. */
 export function eventHorizon(history: History, event: Event): number | Missing {
   const left = untilEnd(history, event, 'conformal')
-  return Number.isFinite(left) ? left : missing('light has unlimited conformal time ahead: there is no event horizon')
+  return Number.isFinite(left) ? left : NO_EVENT_HORIZON
 }
 
 const OUT_OF_RANGE = 'the scale factor there, or the density, is outside the range of floating-point numbers'

@@ -38,7 +38,8 @@ export function unbinding(history: History, h0: number, { period }: UnboundSyste
   if (far === null) return null
   const N = brent(excess, 0, far)
   const place = placeAt(future, N)
-  return place === null ? null : { time: fromToday(place, 'time'), N }
+  // Rounding alone must not put it behind the end.
+  return place === null ? null : { time: Math.min(fromToday(place, 'time'), future.time.total), N }
 }
 
 /** Doubling steps until the system is unbound; null where ln a grows beyond all numbers that the law can be asked for. */

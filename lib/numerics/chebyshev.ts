@@ -79,6 +79,59 @@ export function evaluate(coefficients: Series, x: number): number {
 }
 
 /**
+ * Values of two series of one length at many places x = (s − from)·scale − 1, written from `first` up to `last`. Two places at a
+ * time, since a processor works on independent recurrences side by side.
+ */
+export function evaluatePairs(
+  outA: Float64Array,
+  outB: Float64Array,
+  a: Series,
+  b: Series,
+  s: Float64Array,
+  from: number,
+  scale: number,
+  first: number,
+  last: number,
+): void {
+  const [a0, b0] = [a[0], b[0]]
+  for (let i = first; i < last; i += 2) {
+    const j = i + 1 < last ? i + 1 : i
+    const x = (s[i] - from) * scale - 1
+    const y = (s[j] - from) * scale - 1
+    const twoX = 2 * x
+    const twoY = 2 * y
+    let ax1 = 0
+    let ax2 = 0
+    let bx1 = 0
+    let bx2 = 0
+    let ay1 = 0
+    let ay2 = 0
+    let by1 = 0
+    let by2 = 0
+    for (let k = a.length - 1; k > 0; k--) {
+      const ca = a[k]
+      const cb = b[k]
+      const ax = twoX * ax1 + (ca - ax2)
+      const bx = twoX * bx1 + (cb - bx2)
+      const ay = twoY * ay1 + (ca - ay2)
+      const by = twoY * by1 + (cb - by2)
+      ax2 = ax1
+      ax1 = ax
+      bx2 = bx1
+      bx1 = bx
+      ay2 = ay1
+      ay1 = ay
+      by2 = by1
+      by1 = by
+    }
+    outA[i] = x * ax1 + (a0 - ax2)
+    outB[i] = x * bx1 + (b0 - bx2)
+    outA[j] = y * ay1 + (a0 - ay2)
+    outB[j] = y * by1 + (b0 - by2)
+  }
+}
+
+/**
  * x in [−1, 1] at which an increasing series has the value `target`; the nearer end where it has not.
  * Newton's steps with value and slope from one recurrence, kept inside a shrinking bracket; to the rounding of the series.
  */

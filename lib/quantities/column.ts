@@ -1,5 +1,6 @@
-/** What a column of numbers along a history says about itself, and how its value is read. */
+/** What a column of numbers along a history says about itself, and how its values are made. */
 import { type Missing, missing } from '../measures/outcome'
+import { type Block, blockOf } from './block'
 import type { ColumnSubject, Instant } from './instant'
 import type { Quantity } from './quantity'
 
@@ -40,19 +41,33 @@ export type ColumnKey = (typeof COLUMN_KEYS)[number]
 
 export interface Column extends Quantity {
   readonly key: ColumnKey
-  /** A finite number in the unit of the column, or the reason why there is none. */
+  /** A number for each instant of a block in the unit of the column; where it is not finite there is none. */
+  values(block: Block): Float64Array
+  /** A finite number, or the reason why there is none. */
   value(subject: ColumnSubject, instant: Instant): number | Missing
   /** What has to be said beside a value; null where nothing has. */
-  note?(subject: ColumnSubject, instant: Instant): string | null
+  note(subject: ColumnSubject, instant: Instant): string | null
+}
+
+/** A column as it is written down. */
+export interface Definition extends Quantity {
+  readonly key: ColumnKey
+  values(block: Block): Float64Array
+  /** Why there is no value at place i; null, as where this is not given, when it leaves the doubles. */
+  why?(block: Block, i: number): Missing | null
+  /** What has to be said beside the value at place i. */
+  remark?(block: Block, i: number): string | null
 }
 
 const OUT_OF_RANGE = missing('the value is outside the range of floating-point numbers')
 
-/** The same column, which never gives NaN, an infinity or −0. */
-export const guarded = (column: Column): Column => ({
-  ...column,
+export const columnFrom = (definition: Definition): Column => ({
+  ...definition,
   value: (subject, instant) => {
-    const value = column.value(subject, instant)
-    return typeof value !== 'number' ? value : Number.isFinite(value) ? value + 0 : OUT_OF_RANGE
+    const block = blockOf(subject, instant)
+    const [value] = definition.values(block)
+    // Never −0.
+    return Number.isFinite(value) ? value + 0 : (definition.why?.(block, 0) ?? OUT_OF_RANGE)
   },
+  note: (subject, instant) => definition.remark?.(blockOf(subject, instant), 0) ?? null,
 })

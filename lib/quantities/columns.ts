@@ -1,5 +1,5 @@
 /** Every column of numbers along a history once, in the order of answers and tables. */
-import { type Column, type ColumnKey, guarded } from './column'
+import { type Column, type ColumnKey, columnFrom } from './column'
 import { CONTENT_COLUMNS, TEMPERATURE } from './contents'
 import { DISTANCE_COLUMNS, DRIFT } from './distances'
 import { GROWTH_COLUMNS } from './growth'
@@ -18,7 +18,7 @@ export const COLUMNS: readonly Column[] = [
   CRITICAL_DENSITY,
   DRIFT,
   ...GROWTH_COLUMNS,
-].map(guarded)
+].map(columnFrom)
 
 const byKey: ReadonlyMap<string, Column> = new Map(COLUMNS.map((one) => [one.key, one]))
 

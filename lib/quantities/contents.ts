@@ -1,11 +1,13 @@
 /** Columns that say of what: the share of each component, the law of dark energy, the temperature. */
+import type { Component } from '../components'
 import { missing } from '../measures/outcome'
-import { densityFraction, equationOfState, type Share } from '../measures/rates'
+import { AT_REST } from '../measures/rates'
 import { ROUNDING } from './accuracy'
-import type { Column, ColumnKey } from './column'
+import { type Block, expansionIn, nothing } from './block'
+import type { ColumnKey, Definition } from './column'
 import { FRIEDMANN, fixed, significant } from './quantity'
 
-const share = (key: ColumnKey, symbol: string, label: string, meaning: string, of: Share): Column => ({
+const share = (key: ColumnKey, symbol: string, label: string, meaning: string, of: Component['key']): Definition => ({
   key,
   symbol,
   label,
@@ -15,10 +17,25 @@ const share = (key: ColumnKey, symbol: string, label: string, meaning: string, o
   formula: `${symbol} = ρ/ρ_c`,
   source: FRIEDMANN,
   accuracy: ROUNDING,
-  value: (_, instant) => densityFraction(instant, of, instant.expansion),
+  values: (block) => {
+    const [out, squared] = [block.take(), expansionIn(block)]
+    block.arm.model.densitiesInto(out, of, block.N, block.inverseScale, block.count)
+    for (let i = 0; i < block.count; i++) out[i] = squared[i] > 0 ? out[i] / squared[i] : Number.NaN
+    return out
+  },
+  why: (block, i) => (expansionIn(block)[i] > 0 ? null : AT_REST),
 })
 
-export const CONTENT_COLUMNS: readonly Column[] = [
+/** By the law that rules there. */
+function equationsOfState(block: Block): Float64Array {
+  const { budget, law } = block.arm.model
+  if (budget.dark === 0) return nothing(block)
+  const out = block.take()
+  for (let i = 0; i < block.count; i++) out[i] = law.w(block.N[i])
+  return out
+}
+
+export const CONTENT_COLUMNS: readonly Definition[] = [
   share(
     'omegaMatter',
     'Ω_c',
@@ -58,11 +75,15 @@ export const CONTENT_COLUMNS: readonly Column[] = [
     formula: 'w = p/(ρ c²)',
     source: 'Turner & White 1997, Phys. Rev. D 56, R4439',
     accuracy: ROUNDING,
-    value: (_, instant) => equationOfState(instant),
+    values: equationsOfState,
+    why: ({ arm, N }, i) => {
+      if (arm.model.budget.dark === 0) return missing('there is no dark energy in this scenario')
+      return Number.isNaN(arm.model.law.w(N[i])) ? missing('dark energy is used up here') : null
+    },
   },
 ]
 
-export const TEMPERATURE: Column = {
+export const TEMPERATURE: Definition = {
   key: 'temperature',
   symbol: 'T',
   label: 'photon temperature',
@@ -72,8 +93,13 @@ export const TEMPERATURE: Column = {
   formula: 'T = T_0 (1 + z)',
   source: 'Tolman 1934, Relativity, Thermodynamics and Cosmology, Oxford',
   accuracy: ROUNDING,
-  value: ({ scenario }, { redshift }) =>
-    scenario.radiation.kind === 'thermal'
-      ? scenario.radiation.cmb * (1 + redshift)
-      : missing('the scenario gives no photon temperature'),
+  values: (block) => {
+    const { radiation } = block.subject.scenario
+    if (radiation.kind !== 'thermal') return nothing(block)
+    const out = block.take()
+    for (let i = 0; i < block.count; i++) out[i] = radiation.cmb * (1 + block.redshift[i])
+    return out
+  },
+  why: ({ subject }) =>
+    subject.scenario.radiation.kind === 'thermal' ? null : missing('the scenario gives no photon temperature'),
 }

@@ -1,45 +1,56 @@
 /** Columns along our line of sight: distances, angles, volume, drift. All follow light through the expansion that holds today. */
 import { JULIAN_YEAR, SPEED_OF_LIGHT } from '../constants'
 import { antipode, comovingVolume, transverseDistance } from '../measures/distances'
-import { isMissing, type Missing, missing } from '../measures/outcome'
+import { type Missing, missing } from '../measures/outcome'
+import type { Model } from '../model'
 import { hubbleLengthMpc, perSecond } from '../units'
 import { INTEGRAL, ROUNDING } from './accuracy'
-import type { Column } from './column'
-import type { ColumnSubject, Instant } from './instant'
+import { type Block, expansionIn, nothing, shared, sightIn, times } from './block'
+import type { Definition } from './column'
 import { fixed, HOGG, significant } from './quantity'
 
 const IN_THE_FUTURE = missing('it lies in the future: no line of sight leads there')
 const CONTRACTING = missing('lines of sight are followed only through the expansion that holds today')
 
-/** χ in c/H₀. */
-function chiOf({ phase, conformal }: Instant): number | Missing {
-  if (phase === 'future') return IN_THE_FUTURE
-  return phase === 'past' ? -conformal : CONTRACTING
-}
+/** No line of sight leads there. */
+const unseen = ({ phase }: Block): Missing | null =>
+  phase === 'past' ? null : phase === 'future' ? IN_THE_FUTURE : CONTRACTING
+
+/** D_C in Mpc. */
+const comovingIn = shared((block) => times(block, sightIn(block), hubbleLengthMpc(block.subject.scenario.h0)))
 
 /** D_M in Mpc. */
-function transverseOf({ scenario, budget }: ColumnSubject, instant: Instant): number | Missing {
-  const chi = chiOf(instant)
-  return isMissing(chi) ? chi : transverseDistance(chi, budget.curvature) * hubbleLengthMpc(scenario.h0)
+const transverseIn = shared((block) => {
+  const { scenario, budget } = block.subject
+  if (budget.curvature === 0) return comovingIn(block)
+  const [out, chi, mpc] = [block.take(), sightIn(block), hubbleLengthMpc(scenario.h0)]
+  for (let i = 0; i < block.count; i++) out[i] = transverseDistance(chi[i], budget.curvature) * mpc
+  return out
+})
+
+const angularIn = shared((block) => {
+  const [out, distance] = [block.take(), transverseIn(block)]
+  for (let i = 0; i < block.count; i++) out[i] = distance[i] / (1 + block.redshift[i])
+  return out
+})
+
+const luminosityIn = shared((block) => {
+  const [out, distance] = [block.take(), transverseIn(block)]
+  for (let i = 0; i < block.count; i++) out[i] = distance[i] * (1 + block.redshift[i])
+  return out
+})
+
+function modulusIn(block: Block): Float64Array {
+  const [out, distance] = [block.take(), luminosityIn(block)]
+  for (let i = 0; i < block.count; i++) out[i] = 5 * Math.log10(distance[i]) + 25
+  return out
 }
 
-const times = (value: number | Missing, factor: number): number | Missing => (isMissing(value) ? value : value * factor)
-
-const angularOf = (subject: ColumnSubject, instant: Instant): number | Missing =>
-  times(transverseOf(subject, instant), 1 / (1 + instant.redshift))
-
-const luminosityOf = (subject: ColumnSubject, instant: Instant): number | Missing =>
-  times(transverseOf(subject, instant), 1 + instant.redshift)
-
-function modulusOf(subject: ColumnSubject, instant: Instant): number | Missing {
-  const distance = luminosityOf(subject, instant)
-  if (isMissing(distance)) return distance
-  return distance > 0 ? 5 * Math.log10(distance) + 25 : missing('the distance is 0, which has no logarithm')
-}
-
-function volumeOf({ scenario, budget }: ColumnSubject, instant: Instant): number | Missing {
-  const chi = chiOf(instant)
-  return times(isMissing(chi) ? chi : comovingVolume(chi, budget.curvature), (hubbleLengthMpc(scenario.h0) / 1e3) ** 3)
+function volumeIn(block: Block): Float64Array {
+  const { scenario, budget } = block.subject
+  const [out, chi, unit] = [block.take(), sightIn(block), (hubbleLengthMpc(scenario.h0) / 1e3) ** 3]
+  for (let i = 0; i < block.count; i++) out[i] = comovingVolume(chi[i], budget.curvature) * unit
+  return out
 }
 
 /** Near today 1 − aE is formed from E² − 1 and a² − 1, which are known without cancellation there. */
@@ -47,31 +58,36 @@ const NEAR_TODAY = 0.7
 const NOTHING_TODAY = { N: 0, value: 0 } as const
 
 /** c H₀ (1 − E/(1 + z)) in cm/s per Julian year. */
-function driftOf({ scenario }: ColumnSubject, instant: Instant): number | Missing {
-  const chi = chiOf(instant)
-  if (isMissing(chi)) return chi
-  const rate = Math.sqrt(Math.max(0, instant.expansion)) / (1 + instant.redshift)
-  const { N, arm } = instant.place
-  const excess = Math.exp(2 * N) * arm.model.expansionFrom(NOTHING_TODAY, N) + Math.expm1(2 * N)
-  const lag = Math.abs(N) < NEAR_TODAY ? -excess / (1 + rate) : 1 - rate
-  return 100 * SPEED_OF_LIGHT * perSecond(scenario.h0) * JULIAN_YEAR * lag
+function driftIn(block: Block): Float64Array {
+  if (unseen(block)) return nothing(block)
+  const { arm, N, scale, redshift } = block
+  const [out, squared] = [block.take(), expansionIn(block)]
+  const unit = 100 * SPEED_OF_LIGHT * perSecond(block.subject.scenario.h0) * JULIAN_YEAR
+  for (let i = 0; i < block.count; i++) {
+    const rate = Math.sqrt(Math.max(0, squared[i])) / (1 + redshift[i])
+    out[i] =
+      unit * (Math.abs(N[i]) < NEAR_TODAY ? lagNearToday(arm.model, N[i], scale[i], redshift[i], rate) : 1 - rate)
+  }
+  return out
 }
+
+/** 1 − aE = (1 − a²E²)/(1 + aE), with a²E² − 1 = a²(E² − 1) + a² − 1 and a² − 1 = −a z (1 + a). */
+const lagNearToday = (model: Model, N: number, a: number, z: number, rate: number): number =>
+  -(a * a * model.expansionFrom(NOTHING_TODAY, N) - a * z * (1 + a)) / (1 + rate)
 
 /** Whether light from there has passed the point opposite to us in a closed space. */
-const pastAntipode = ({ budget }: ColumnSubject, instant: Instant): boolean => {
-  const chi = chiOf(instant)
-  return !isMissing(chi) && chi > antipode(budget.curvature)
-}
+const pastAntipode = (block: Block, i: number): boolean =>
+  block.phase === 'past' && sightIn(block)[i] > antipode(block.subject.budget.curvature)
 
-const noteOn =
-  (text: string): Column['note'] =>
-  (subject, instant) =>
-    pastAntipode(subject, instant) ? text : null
+const remarkOf =
+  (text: string): Definition['remark'] =>
+  (block, i) =>
+    pastAntipode(block, i) ? text : null
 
-const FOLDED = noteOn('the light comes from beyond the antipode of the closed space, whose distances shrink again')
-const WHOLE = noteOn('the light comes from beyond the antipode of the closed space; the volume is that of all space')
+const FOLDED = remarkOf('the light comes from beyond the antipode of the closed space, whose distances shrink again')
+const WHOLE = remarkOf('the light comes from beyond the antipode of the closed space; the volume is that of all space')
 
-export const DISTANCE_COLUMNS: readonly Column[] = [
+export const DISTANCE_COLUMNS: readonly Definition[] = [
   {
     key: 'comoving',
     symbol: 'D_C',
@@ -82,7 +98,8 @@ export const DISTANCE_COLUMNS: readonly Column[] = [
     formula: 'D_C = ∫ c dt/a, from then to today',
     source: `${HOGG}, eq. 15`,
     accuracy: INTEGRAL,
-    value: ({ scenario }, instant) => times(chiOf(instant), hubbleLengthMpc(scenario.h0)),
+    values: comovingIn,
+    why: unseen,
   },
   {
     key: 'transverse',
@@ -94,8 +111,9 @@ export const DISTANCE_COLUMNS: readonly Column[] = [
     formula: 'D_M = |R sin(D_C/R)|, D_C or R sinh(D_C/R), with R = (c/H_0)/√|Ω_k|',
     source: `${HOGG}, eq. 16`,
     accuracy: INTEGRAL,
-    value: transverseOf,
-    note: FOLDED,
+    values: transverseIn,
+    why: unseen,
+    remark: FOLDED,
   },
   {
     key: 'angular',
@@ -107,8 +125,9 @@ export const DISTANCE_COLUMNS: readonly Column[] = [
     formula: 'D_A = D_M/(1 + z)',
     source: `${HOGG}, eq. 18`,
     accuracy: INTEGRAL,
-    value: angularOf,
-    note: FOLDED,
+    values: angularIn,
+    why: unseen,
+    remark: FOLDED,
   },
   {
     key: 'luminosity',
@@ -120,8 +139,9 @@ export const DISTANCE_COLUMNS: readonly Column[] = [
     formula: 'D_L = (1 + z) D_M',
     source: `${HOGG}, eq. 21`,
     accuracy: INTEGRAL,
-    value: luminosityOf,
-    note: FOLDED,
+    values: luminosityIn,
+    why: unseen,
+    remark: FOLDED,
   },
   {
     key: 'modulus',
@@ -133,8 +153,10 @@ export const DISTANCE_COLUMNS: readonly Column[] = [
     formula: 'μ = 5 log_10(D_L/Mpc) + 25',
     source: `${HOGG}, eq. 25`,
     accuracy: INTEGRAL,
-    value: modulusOf,
-    note: FOLDED,
+    values: modulusIn,
+    why: (block, i) =>
+      unseen(block) ?? (luminosityIn(block)[i] > 0 ? null : missing('the distance is 0, which has no logarithm')),
+    remark: FOLDED,
   },
   {
     key: 'arcsecond',
@@ -146,8 +168,9 @@ export const DISTANCE_COLUMNS: readonly Column[] = [
     formula: 'ℓ = D_A π/648000',
     source: `${HOGG}, eq. 18`,
     accuracy: INTEGRAL,
-    value: (subject, instant) => times(angularOf(subject, instant), (1e3 * Math.PI) / 648000),
-    note: FOLDED,
+    values: (block) => times(block, angularIn(block), (1e3 * Math.PI) / 648000),
+    why: unseen,
+    remark: FOLDED,
   },
   {
     key: 'volume',
@@ -159,12 +182,13 @@ export const DISTANCE_COLUMNS: readonly Column[] = [
     formula: 'V_C = 4π ∫ D_M² dD_C',
     source: `${HOGG}, eq. 29`,
     accuracy: INTEGRAL,
-    value: volumeOf,
-    note: WHOLE,
+    values: volumeIn,
+    why: unseen,
+    remark: WHOLE,
   },
 ]
 
-export const DRIFT: Column = {
+export const DRIFT: Definition = {
   key: 'drift',
   symbol: 'v̇',
   label: 'redshift drift',
@@ -174,5 +198,6 @@ export const DRIFT: Column = {
   formula: 'v̇ = c [H_0 − H/(1 + z)]',
   source: 'Sandage 1962, ApJ 136, 319; Loeb 1998, ApJ 499, L111',
   accuracy: ROUNDING,
-  value: driftOf,
+  values: driftIn,
+  why: unseen,
 }

@@ -1,14 +1,36 @@
 /** Columns of the growth of structure. */
+import type { Event } from '../history/event'
+import type { History } from '../history/history'
 import { growthAt, growthRateAt } from '../measures/growth'
 import { isMissing, type Missing, type Outcome } from '../measures/outcome'
 import { GROWTH } from './accuracy'
-import type { Column } from './column'
+import { type Block, eventIn } from './block'
+import type { Definition } from './column'
 import { fixed } from './quantity'
 
-const numberIn = (outcome: Outcome): number | Missing => (isMissing(outcome) ? outcome : outcome.value)
+type Reading = (history: History, event: Event) => Outcome
+
+const readings =
+  (read: Reading) =>
+  (block: Block): Float64Array => {
+    const out = block.take()
+    for (let i = 0; i < block.count; i++) {
+      const one = read(block.subject.history, eventIn(block, i))
+      out[i] = isMissing(one) ? Number.NaN : one.value
+    }
+    return out
+  }
+
+const reason =
+  (read: Reading) =>
+  (block: Block, i: number): Missing | null => {
+    const one = read(block.subject.history, eventIn(block, i))
+    return isMissing(one) ? one : null
+  }
+
 const SOURCE = 'Peebles 1980, The Large-Scale Structure of the Universe, Princeton, sections 10 and 11'
 
-export const GROWTH_COLUMNS: readonly Column[] = [
+export const GROWTH_COLUMNS: readonly Definition[] = [
   {
     key: 'growth',
     symbol: 'D',
@@ -19,7 +41,8 @@ export const GROWTH_COLUMNS: readonly Column[] = [
     formula: 'D″ + (2 + (ln E)′) D′ = (3/2) Ω_s D, primes by ln a, D = 1 today',
     source: SOURCE,
     accuracy: GROWTH,
-    value: ({ history }, instant) => numberIn(growthAt(history, instant)),
+    values: readings(growthAt),
+    why: reason(growthAt),
   },
   {
     key: 'growthRate',
@@ -31,6 +54,7 @@ export const GROWTH_COLUMNS: readonly Column[] = [
     formula: 'f = (d ln D)/(d ln a)',
     source: SOURCE,
     accuracy: GROWTH,
-    value: ({ history }, instant) => numberIn(growthRateAt(history, instant)),
+    values: readings(growthRateAt),
+    why: reason(growthRateAt),
   },
 ]

@@ -1,17 +1,25 @@
 /** Columns of conformal time and of what light can reach, as seen from the epoch. */
-import { sinceOrigin } from '../history/event'
-import { isMissing, type Missing, missing } from '../measures/outcome'
-import { eventHorizon, particleHorizon } from '../measures/sight'
+import { type Span, spanSinceOrigin, spanUntilEnd } from '../history/event'
+import { missing } from '../measures/outcome'
+import { NO_EVENT_HORIZON, NO_PARTICLE_HORIZON, particleHorizonSpan } from '../measures/sight'
 import { hubbleLengthGly } from '../units'
 import { INTEGRAL } from './accuracy'
-import type { Column } from './column'
-import type { ColumnSubject } from './instant'
+import { type Block, nothing, spanIn, times } from './block'
+import type { Definition } from './column'
 import { HORIZONS, significant } from './quantity'
 
-const inGly = (value: number | Missing, { scenario }: ColumnSubject): number | Missing =>
-  isMissing(value) ? value : value * hubbleLengthGly(scenario.h0)
+const inGly = (block: Block, span: Span): Float64Array =>
+  times(block, spanIn(block, span, 'conformal'), hubbleLengthGly(block.subject.scenario.h0))
 
-export const HORIZON_COLUMNS: readonly Column[] = [
+const conformalIn = (block: Block): Float64Array =>
+  inGly(block, spanSinceOrigin(block.subject.history, block, 'conformal'))
+
+function particleHorizonIn(block: Block): Float64Array {
+  const span = particleHorizonSpan(block.subject.history, block)
+  return 'because' in span ? nothing(block) : inGly(block, span)
+}
+
+export const HORIZON_COLUMNS: readonly Definition[] = [
   {
     key: 'conformal',
     symbol: 'c η',
@@ -22,12 +30,8 @@ export const HORIZON_COLUMNS: readonly Column[] = [
     formula: 'c η = ∫ c dt/a, from the origin',
     source: HORIZONS,
     accuracy: INTEGRAL,
-    value: (subject, instant) => {
-      const since = sinceOrigin(subject.history, instant, 'conformal')
-      return Number.isFinite(since)
-        ? inGly(since, subject)
-        : missing('light has had unlimited conformal time since the origin')
-    },
+    values: conformalIn,
+    why: () => missing('light has had unlimited conformal time since the origin'),
   },
   {
     key: 'particleHorizon',
@@ -39,7 +43,11 @@ export const HORIZON_COLUMNS: readonly Column[] = [
     formula: 'χ_ph = ∫ c dt/a, from the beginning; after a bounce the contraction counts',
     source: HORIZONS,
     accuracy: INTEGRAL,
-    value: (subject, instant) => inGly(particleHorizon(subject.history, instant), subject),
+    values: particleHorizonIn,
+    why: (block) => {
+      const span = particleHorizonSpan(block.subject.history, block)
+      return 'because' in span ? span : NO_PARTICLE_HORIZON
+    },
   },
   {
     key: 'eventHorizon',
@@ -51,6 +59,7 @@ export const HORIZON_COLUMNS: readonly Column[] = [
     formula: 'χ_eh = ∫ c dt/a, to the end',
     source: HORIZONS,
     accuracy: INTEGRAL,
-    value: (subject, instant) => inGly(eventHorizon(subject.history, instant), subject),
+    values: (block) => inGly(block, spanUntilEnd(block.subject.history, block, 'conformal')),
+    why: () => NO_EVENT_HORIZON,
   },
 ]

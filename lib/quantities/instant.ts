@@ -51,7 +51,12 @@ export function instantAt(
   return isEvent(event) ? instantOf(subject, event, asGiven(variable, value)) : event
 }
 
-function eventAt({ scenario, history }: ColumnSubject, variable: Variable, value: number, branch: Branch): Found {
+export function eventAt(
+  { scenario, history }: ColumnSubject,
+  variable: Variable,
+  value: number,
+  branch: Branch,
+): Found {
   switch (variable) {
     case 'z':
       return eventAtScale(history, -Math.log1p(value), branch)

@@ -1,13 +1,40 @@
 /** Columns that say how fast: the expansion rate, its changes, and the scales of length and density that it sets. */
 import { GRAVITATION } from '../constants'
-import { missing } from '../measures/outcome'
-import { deceleration, hubbleRate, jerk } from '../measures/rates'
+import { type Missing, missing } from '../measures/outcome'
+import { AT_REST } from '../measures/rates'
 import { hubbleLengthGly, perSecond } from '../units'
 import { ROUNDING } from './accuracy'
-import type { Column } from './column'
+import { type Block, expansionIn, shared, slopesIn, times } from './block'
+import type { Definition } from './column'
 import { FRIEDMANN, fixed, significant } from './quantity'
 
-export const RATE_COLUMNS: readonly Column[] = [
+/** |H|/H₀. */
+const rateIn = shared((block) => {
+  const [out, squared] = [block.take(), expansionIn(block)]
+  for (let i = 0; i < block.count; i++) out[i] = Math.sqrt(Math.max(0, squared[i]))
+  return out
+})
+
+/** Ratios to H² have no value where the expansion stands still. */
+const atRest = (block: Block, i: number): Missing | null => (expansionIn(block)[i] > 0 ? null : AT_REST)
+
+/** −1 − ½ (E²)′/E², primes by ln a. */
+function decelerations(block: Block): Float64Array {
+  const [out, squared, { first }] = [block.take(), expansionIn(block), slopesIn(block)]
+  for (let i = 0; i < block.count; i++) out[i] = ratio(-0.5 * first[i] - squared[i], squared[i])
+  return out
+}
+
+/** 1 + (3/2)(E²)′/E² + ½ (E²)″/E². */
+function jerks(block: Block): Float64Array {
+  const [out, squared, { first, second }] = [block.take(), expansionIn(block), slopesIn(block)]
+  for (let i = 0; i < block.count; i++) out[i] = ratio(squared[i] + 1.5 * first[i] + 0.5 * second[i], squared[i])
+  return out
+}
+
+const ratio = (value: number, squared: number): number => (squared > 0 ? value / squared : Number.NaN)
+
+export const RATE_COLUMNS: readonly Definition[] = [
   {
     key: 'hubble',
     symbol: 'H',
@@ -18,7 +45,7 @@ export const RATE_COLUMNS: readonly Column[] = [
     formula: 'H = ȧ/a = H_0 E(a)',
     source: FRIEDMANN,
     accuracy: ROUNDING,
-    value: ({ scenario }, instant) => scenario.h0 * hubbleRate(instant, instant.expansion),
+    values: (block) => times(block, rateIn(block), block.sign * block.subject.scenario.h0),
   },
   {
     key: 'deceleration',
@@ -30,7 +57,8 @@ export const RATE_COLUMNS: readonly Column[] = [
     formula: 'q = −(ä a)/ȧ²',
     source: FRIEDMANN,
     accuracy: ROUNDING,
-    value: (_, instant) => deceleration(instant, instant.expansion),
+    values: decelerations,
+    why: atRest,
   },
   {
     key: 'jerk',
@@ -42,11 +70,12 @@ export const RATE_COLUMNS: readonly Column[] = [
     formula: 'j = a² (d³a/dt³)/ȧ³',
     source: 'Visser 2004, Class. Quantum Grav. 21, 2603',
     accuracy: ROUNDING,
-    value: (_, instant) => jerk(instant, instant.expansion),
+    values: jerks,
+    why: atRest,
   },
 ]
 
-export const HUBBLE_RADIUS: Column = {
+export const HUBBLE_RADIUS: Definition = {
   key: 'hubbleRadius',
   symbol: 'c/|H|',
   label: 'Hubble radius',
@@ -56,13 +85,16 @@ export const HUBBLE_RADIUS: Column = {
   formula: 'c/|H|',
   source: 'Harrison 1993, ApJ 403, 28',
   accuracy: ROUNDING,
-  value: ({ scenario }, { expansion }) =>
-    expansion > 0
-      ? hubbleLengthGly(scenario.h0) / Math.sqrt(expansion)
-      : missing('the expansion stands still here, so the Hubble radius is infinite'),
+  values: (block) => {
+    const [out, rate, length] = [block.take(), rateIn(block), hubbleLengthGly(block.subject.scenario.h0)]
+    for (let i = 0; i < block.count; i++) out[i] = length / rate[i]
+    return out
+  },
+  why: (block, i) =>
+    expansionIn(block)[i] > 0 ? null : missing('the expansion stands still here, so the Hubble radius is infinite'),
 }
 
-export const CRITICAL_DENSITY: Column = {
+export const CRITICAL_DENSITY: Definition = {
   key: 'criticalDensity',
   symbol: 'ρ_c',
   label: 'critical density',
@@ -72,6 +104,10 @@ export const CRITICAL_DENSITY: Column = {
   formula: 'ρ_c = 3H²/(8πG)',
   source: FRIEDMANN,
   accuracy: ROUNDING,
-  value: ({ scenario }, { expansion }) =>
-    (3 * perSecond(scenario.h0) ** 2 * Math.max(0, expansion)) / (8 * Math.PI * GRAVITATION),
+  values: (block) => {
+    const [out, squared] = [block.take(), expansionIn(block)]
+    const today = (3 * perSecond(block.subject.scenario.h0) ** 2) / (8 * Math.PI * GRAVITATION)
+    for (let i = 0; i < block.count; i++) out[i] = today * Math.max(0, squared[i])
+    return out
+  },
 }

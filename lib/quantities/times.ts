@@ -1,10 +1,11 @@
 /** Columns that say when: times, and the size of the universe. */
 import { missing } from '../measures/outcome'
 import { INTEGRAL, ROOT } from './accuracy'
-import type { Column } from './column'
+import { ageIn, timeIn, times } from './block'
+import type { Definition } from './column'
 import { FRIEDMANN, fixed, HOGG, significant } from './quantity'
 
-export const TIME_COLUMNS: readonly Column[] = [
+export const TIME_COLUMNS: readonly Definition[] = [
   {
     key: 'time',
     symbol: 't − t_0',
@@ -15,7 +16,7 @@ export const TIME_COLUMNS: readonly Column[] = [
     formula: 't − t_0 = ∫ da/(a H), from today',
     source: FRIEDMANN,
     accuracy: INTEGRAL,
-    value: (_, { time }) => time,
+    values: timeIn,
   },
   {
     key: 'age',
@@ -27,7 +28,8 @@ export const TIME_COLUMNS: readonly Column[] = [
     formula: 't = ∫ da/(a H), from the origin',
     source: FRIEDMANN,
     accuracy: INTEGRAL,
-    value: (_, { age }) => (Number.isFinite(age) ? age : missing('the past is infinite, so no age can be counted')),
+    values: ageIn,
+    why: () => missing('the past is infinite, so no age can be counted'),
   },
   {
     key: 'lookback',
@@ -39,7 +41,7 @@ export const TIME_COLUMNS: readonly Column[] = [
     formula: 't_L = t_0 − t',
     source: `${HOGG}, eq. 30`,
     accuracy: INTEGRAL,
-    value: (_, { time }) => -time,
+    values: (block) => times(block, timeIn(block), -1),
   },
   {
     key: 'scale',
@@ -51,7 +53,7 @@ export const TIME_COLUMNS: readonly Column[] = [
     formula: 'a = 1/(1 + z)',
     source: FRIEDMANN,
     accuracy: ROOT,
-    value: (_, { scale }) => scale,
+    values: ({ scale }) => scale,
   },
   {
     key: 'redshift',
@@ -63,6 +65,6 @@ export const TIME_COLUMNS: readonly Column[] = [
     formula: 'z = 1/a − 1',
     source: `${HOGG}, eq. 11`,
     accuracy: ROOT,
-    value: (_, { redshift }) => redshift,
+    values: ({ redshift }) => redshift,
   },
 ]

@@ -7,7 +7,7 @@ import type { Reading } from './reading'
 const fromColumn = (column: Column): Reading => ({
   ...column,
   value: ({ subject, instant }) => column.value(subject, instant),
-  note: ({ subject, instant }) => column.note?.(subject, instant) ?? null,
+  note: ({ subject, instant }) => column.note(subject, instant),
 })
 
 export const READINGS: readonly Reading[] = [...COLUMNS.map(fromColumn), ...EXTRA_READINGS]

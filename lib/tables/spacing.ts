@@ -70,10 +70,22 @@ function firstTime({ scenario, history }: ColumnSubject, rows: number, to: numbe
   return time === null ? -HUBBLE_TIMES * gyr : time * gyr + (to - time * gyr) / rows
 }
 
-/** The value of row `i` of `rows`; the first and the last are the ends themselves. */
-export function valueAt({ even }: Spacing, { from, to }: Ends, rows: number, i: number): number {
-  if (i === 0) return from
-  if (i === rows - 1) return to
-  const part = i / (rows - 1)
-  return even === 'steps' ? from * (1 - part) + to * part : Math.exp(Math.log(from) * (1 - part) + Math.log(to) * part)
+/** The values of `count` rows from row `first` on; the first and the last of all rows are the ends themselves. */
+export function valuesInto(
+  out: Float64Array,
+  { even }: Spacing,
+  { from, to }: Ends,
+  rows: number,
+  first: number,
+  count: number,
+): void {
+  const ratios = even === 'ratios'
+  const [low, high] = ratios ? [Math.log(from), Math.log(to)] : [from, to]
+  for (let i = 0; i < count; i++) {
+    const part = (first + i) / (rows - 1)
+    out[i] = low * (1 - part) + high * part
+  }
+  if (ratios) for (let i = 0; i < count; i++) out[i] = Math.exp(out[i])
+  if (first === 0) out[0] = from
+  if (first + count === rows) out[count - 1] = to
 }

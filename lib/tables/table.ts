@@ -1,16 +1,28 @@
-/** Rows of a scenario at evenly spaced values of a variable, made one at a time while they are read. */
-import { isMissing } from '../measures/outcome'
+/** Rows of a scenario at evenly spaced values of a variable, made page by page while they are read. */
+import type { Block } from '../quantities/block'
+import { isBlock, type Run, runsAlong } from '../quantities/blocks'
 import type { Column } from '../quantities/column'
-import { type ColumnSubject, instantAt, isInstant } from '../quantities/instant'
-import { type Ends, type Spacing, valueAt } from './spacing'
+import type { ColumnSubject } from '../quantities/instant'
+import { BLOCK_SIZE, borrowWorkspace, returnWorkspace, type Workspace } from '../quantities/workspace'
+import { type Ends, type Spacing, valuesInto } from './spacing'
 
 /** A number for each column, null where there is none. */
 export type Cells = readonly (number | null)[]
+
+/** Some rows, as an array for each column: what is not finite is no value. Overwritten when the next page is asked for. */
+export interface Page {
+  readonly count: number
+  readonly columns: readonly Float64Array[]
+}
 
 export interface Table {
   /** Canonical scenario code. */
   readonly code: string
   rows(): Iterable<Cells>
+}
+
+export interface PagedTable extends Table {
+  pages(): Iterable<Page>
 }
 
 export interface Layout {
@@ -20,22 +32,47 @@ export interface Layout {
   readonly columns: readonly Column[]
 }
 
-export function tableOf(subject: ColumnSubject, code: string, layout: Layout): Table {
-  return { code, rows: () => rowsOf(subject, layout) }
+export function tableOf(subject: ColumnSubject, code: string, layout: Layout): PagedTable {
+  const pages = () => pagesOf(subject, layout)
+  return { code, pages, rows: () => rowsOf(pages()) }
 }
 
-function* rowsOf(subject: ColumnSubject, layout: Layout): Generator<Cells> {
-  const { spacing, given, rows } = layout
+function* pagesOf(subject: ColumnSubject, layout: Layout): Generator<Page> {
+  const { spacing, given, rows, columns } = layout
   const ends = spacing.ends(subject, rows, given)
-  for (let i = 0; i < rows; i++) yield rowAt(subject, layout, valueAt(spacing, ends, rows, i))
+  const workspace = borrowWorkspace()
+  try {
+    const values = new Float64Array(Math.min(rows, BLOCK_SIZE))
+    for (let first = 0; first < rows; first += BLOCK_SIZE) {
+      const count = Math.min(BLOCK_SIZE, rows - first)
+      valuesInto(values, spacing, ends, rows, first, count)
+      let done = 0
+      for (const run of runsAlong({ subject, variable: spacing.variable, values, count, workspace })) {
+        yield isBlock(run) ? pageOf(run, columns) : emptyPage(layout, run, values.subarray(done), workspace)
+        done += run.count
+      }
+    }
+  } finally {
+    returnWorkspace(workspace)
+  }
 }
 
-function rowAt(subject: ColumnSubject, { spacing, columns }: Layout, value: number): Cells {
-  const instant = instantAt(subject, spacing.variable, value)
-  // Outside the history the row says at least where it would have been.
-  if (!isInstant(instant)) return columns.map(({ key }) => (key === spacing.column ? value : null))
-  return columns.map((column) => {
-    const cell = column.value(subject, instant)
-    return isMissing(cell) ? null : cell
-  })
+const pageOf = (block: Block, columns: readonly Column[]): Page => ({
+  count: block.count,
+  columns: columns.map((column) => column.values(block)),
+})
+
+/** Outside the history the rows say at least where they would have been. */
+function emptyPage({ spacing, columns }: Layout, { count }: Run, values: Float64Array, workspace: Workspace): Page {
+  const empty = workspace.take().fill(Number.NaN)
+  return { count, columns: columns.map(({ key }) => (key === spacing.column ? values : empty)) }
+}
+
+function* rowsOf(pages: Iterable<Page>): Generator<Cells> {
+  for (const { count, columns } of pages) {
+    for (let i = 0; i < count; i++) {
+      // Never −0.
+      yield columns.map((values) => (Number.isFinite(values[i]) ? values[i] + 0 : null))
+    }
+  }
 }

@@ -6,7 +6,7 @@ import type { ColumnSubject } from '../../lib/quantities/instant'
 import { budgetOf } from '../../lib/scenario/budget'
 import type { Scenario } from '../../lib/scenario/scenario'
 import { SPACINGS } from '../../lib/tables/spacing'
-import { type Cells, tableOf } from '../../lib/tables/table'
+import { tableOf } from '../../lib/tables/table'
 import { hubbleLengthGly, hubbleLengthMpc, hubbleTimeGyr } from '../../lib/units'
 import { inTurn, MASSLESS, variants } from './scenarios'
 
@@ -20,26 +20,34 @@ export const FIVE: readonly Column[] = FIVE_KEYS.flatMap((key) => COLUMNS.filter
 
 const spacing = SPACINGS.find(({ key }) => key === 'logscale') ?? SPACINGS[0]
 
-export const rowsOf = (subject: ColumnSubject, columns: readonly Column[]): readonly Cells[] => [
-  ...tableOf(subject, '', { spacing, given: { from: FROM, to: 1 }, rows: ROWS, columns }).rows(),
-]
+const tableFor = (subject: ColumnSubject, columns: readonly Column[]) =>
+  tableOf(subject, '', { spacing, given: { from: FROM, to: 1 }, rows: ROWS, columns })
 
-/** The five columns from a scenario alone: its history is not known yet. */
-function fiveColumns(scenario: Scenario): readonly Cells[] {
+/** All pages of the table, read through once: what a writer of a format goes by. */
+export function pagesOf(subject: ColumnSubject, columns: readonly Column[]): number {
+  let count = 0
+  for (const page of tableFor(subject, columns).pages()) count += page.count
+  return count
+}
+
+/** A scenario alone: its history is not known yet. */
+function subjectOf(scenario: Scenario): ColumnSubject {
   const budget = budgetOf(scenario)
-  return rowsOf({ scenario, budget, history: historyOf(scenario, budget) }, FIVE)
+  return { scenario, budget, history: historyOf(scenario, budget) }
 }
 
 const scenarios = variants(MASSLESS)
 const [scenario] = scenarios
 
-export const make = inTurn(scenarios, fiveColumns)
+export const make = inTurn(scenarios, (scenario) => pagesOf(subjectOf(scenario), FIVE))
 
 /** The rows of one scenario, in 1/H₀, c/H₀ and H₀. */
 export function rows(): readonly (readonly number[])[] {
   const { h0 } = scenario
   const units = [hubbleTimeGyr(h0), hubbleLengthMpc(h0), hubbleLengthGly(h0), h0, 1]
-  return fiveColumns(scenario).map((cells) => cells.map((cell, i) => (cell ?? Number.NaN) / units[i]))
+  return [...tableFor(subjectOf(scenario), FIVE).rows()].map((cells) =>
+    cells.map((cell, i) => (cell ?? Number.NaN) / units[i]),
+  )
 }
 
 /** The densities today of the same scenario: radiation, matter, curvature, dark energy. */

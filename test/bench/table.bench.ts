@@ -2,7 +2,7 @@
 import { COLUMNS } from '../../lib/quantities/columns'
 import { subjectOf } from '../../lib/quantities/quantity'
 import type { Benches } from './bench'
-import { FIVE, rowsOf } from './rows'
+import { FIVE, pagesOf } from './rows'
 import { inTurn, MASSLESS, STANDARD, variants } from './scenarios'
 
 const columns = COLUMNS.filter(({ key }) => key !== 'growth' && key !== 'growthRate')
@@ -10,20 +10,20 @@ const [massless, massive] = [variants(MASSLESS), variants(STANDARD)]
 
 export const benches: Benches = {
   '512 rows, all columns but growth, massless neutrinos': {
-    run: inTurn(massless.map(subjectOf), (subject) => rowsOf(subject, columns)),
+    run: inTurn(massless.map(subjectOf), (subject) => pagesOf(subject, columns)),
   },
   '512 rows, all columns but growth, one massive state': {
-    run: inTurn(massive.map(subjectOf), (subject) => rowsOf(subject, columns)),
+    run: inTurn(massive.map(subjectOf), (subject) => pagesOf(subject, columns)),
   },
   '512 rows, five columns, massless neutrinos': {
-    run: inTurn(massless.map(subjectOf), (subject) => rowsOf(subject, FIVE)),
+    run: inTurn(massless.map(subjectOf), (subject) => pagesOf(subject, FIVE)),
   },
   'history and 512 rows, massless neutrinos': {
-    run: inTurn(massless, (scenario) => rowsOf(subjectOf(scenario), columns)),
+    run: inTurn(massless, (scenario) => pagesOf(subjectOf(scenario), columns)),
     aim: 150e-6,
   },
   'history and 512 rows, one massive state': {
-    run: inTurn(massive, (scenario) => rowsOf(subjectOf(scenario), columns)),
+    run: inTurn(massive, (scenario) => pagesOf(subjectOf(scenario), columns)),
     aim: 250e-6,
   },
 }

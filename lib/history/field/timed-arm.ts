@@ -81,8 +81,8 @@ function timedModel({ budget, today }: Route, trail: TimedTrail): Model {
   return {
     ...model,
     expansion,
-    expansionsInto: (out, places, inverseScales, count) => {
-      for (let i = 0; i < count; i++) out[i] = expansion(places[i], inverseScales[i])
+    expansionsInto: (out, places, inverseScales, from, to) => {
+      for (let i = from; i < to; i++) out[i] = expansion(places[i], inverseScales[i])
     },
     expansionFrom: (anchor, d) => expansion(anchor.N + d, Math.exp(-anchor.N - d)),
   }

@@ -1,0 +1,93 @@
+/** Many places along one arm at once: the integrals to and from them, and E² there, as in place.ts. */
+import { evaluatePairs } from '../numerics/chebyshev'
+import type { Arm } from './arm'
+import type { Span } from './event'
+import { NEAR_TODAY, nearToday } from './place'
+import { type Clock, elapsedIn, remainingIn } from './tail'
+
+export interface Places {
+  readonly arm: Arm
+  readonly count: number
+  readonly N: Float64Array
+  readonly inverseScale: Float64Array
+  /** Index of the panel; their number for what lies in the tail. */
+  readonly panel: Float64Array
+  readonly s: Float64Array
+}
+
+/** Integrals from the inner edges of the panels, or from the beginning of the tail. */
+export type Within = Readonly<Record<Clock, Float64Array>>
+
+/** Calls back for every run of places in one panel. */
+function forPanels({ count, panel }: Places, use: (panel: number, from: number, to: number) => void): void {
+  for (let from = 0, to = 0; from < count; from = to) {
+    while (to < count && panel[to] === panel[from]) to++
+    use(panel[from], from, to)
+  }
+}
+
+export function withinInto(out: Within, places: Places): void {
+  const { arm, s } = places
+  forPanels(places, (index, from, to) => {
+    if (index < arm.panels.length) {
+      const panel = arm.panels[index]
+      const scale = 2 / (panel.to - panel.from)
+      evaluatePairs(out.time, out.conformal, panel.time.series, panel.conformal.series, s, panel.from, scale, from, to)
+    } else {
+      for (const clock of ['time', 'conformal'] as const)
+        for (let i = from; i < to; i++) out[clock][i] = arm.tail ? elapsedIn(arm.tail[clock], s[i]) : 0
+    }
+  })
+}
+
+/** offset ± the integral from today, or to the end. */
+export function spanInto(out: Float64Array, span: Span, places: Places, within: Within, clock: Clock): void {
+  if (span.of === 'fromToday') fromTodayInto(out, span, places, within[clock], clock)
+  else toEndInto(out, span, places, within[clock], clock)
+}
+
+function fromTodayInto(
+  out: Float64Array,
+  { offset, sign }: Span,
+  { arm, count, panel, N }: Places,
+  within: Float64Array,
+  clock: Clock,
+): void {
+  const sums = arm[clock].fromToday
+  const near = NEAR_TODAY * arm.edges[1]
+  for (let i = 0; i < count; i++) {
+    const m = Math.abs(N[i])
+    out[i] = offset + sign * (m < near ? nearToday(arm, m, clock) : sums[panel[i]] + within[i])
+  }
+}
+
+function toEndInto(
+  out: Float64Array,
+  { offset, sign }: Span,
+  places: Places,
+  within: Float64Array,
+  clock: Clock,
+): void {
+  const { arm, s } = places
+  const { toEnd, total } = arm[clock]
+  forPanels(places, (index, from, to) => {
+    if (index < arm.panels.length) {
+      const [left, whole] = [toEnd[index], arm.panels[index][clock].total]
+      for (let i = from; i < to; i++) out[i] = offset + sign * (left + (whole - within[i]))
+    } else {
+      const none = total === Number.POSITIVE_INFINITY ? total : 0
+      for (let i = from; i < to; i++) out[i] = offset + sign * (arm.tail ? remainingIn(arm.tail[clock], s[i]) : none)
+    }
+  })
+}
+
+/** E² by the form that rounds least. */
+export function expansionsAt(out: Float64Array, places: Places): void {
+  const { arm, N, inverseScale, s } = places
+  forPanels(places, (index, from, to) => {
+    const zone = index < arm.panels.length ? arm.panels[index].zone : null
+    if (zone?.plain || (zone === null && arm.tail === null)) arm.model.expansionsInto(out, N, inverseScale, from, to)
+    else
+      for (let i = from; i < to; i++) out[i] = zone ? zone.expansion(s[i]) : (arm.tail?.expansion(s[i]) ?? Number.NaN)
+  })
+}
