@@ -4,6 +4,7 @@ import { type ReactNode, useDeferredValue, useEffect } from 'react'
 import type { Explorer as View } from '../lib/answers/explorer'
 import type { RulerView } from '../lib/answers/ruler-view'
 import type { Shelf } from '../lib/answers/shelf'
+import type { TakeAwayLists } from '../lib/answers/take-away'
 import { useAddress } from './live/address'
 import { follow } from './live/follow'
 import { useExplorer } from './live/use-explorer'
@@ -18,6 +19,7 @@ import { Moments } from './ui/moments'
 import { Refusal } from './ui/refusal'
 import { RulerPlace } from './ui/ruler-place'
 import { Status } from './ui/status'
+import { TakeAway } from './ui/take-away'
 import { Verdicts } from './ui/verdicts'
 
 interface Props {
@@ -26,13 +28,14 @@ interface Props {
   readonly asked: string
   readonly ruler: RulerView
   readonly shelf: Shelf
+  readonly lists: TakeAwayLists
   readonly edition: Edition
   /** The ruler as the server draws it. */
   readonly children: ReactNode
 }
 
 /** The page: complete as the server draws it, and alive from then on. */
-export function Explorer({ initial, asked, ruler, shelf, edition, children }: Props) {
+export function Explorer({ initial, asked, ruler, shelf, lists, edition, children }: Props) {
   const address = useAddress()
   const { view, desk, waiting, busy, trouble } = useExplorer(address, initial, asked)
   // The figure follows a hand at once, the rest as soon as there is time.
@@ -71,6 +74,7 @@ export function Explorer({ initial, asked, ruler, shelf, edition, children }: Pr
         <RulerPlace {...ruled} initial={ruler} shelf={shelf}>
           {children}
         </RulerPlace>
+        <TakeAway desk={ruled.desk} lists={lists} live={address !== null} />
       </main>
       <Footer data={desk.links.data} edition={edition} />
       {address && <Status view={view} moving={moving} waiting={waiting} trouble={trouble} />}

@@ -3,10 +3,16 @@ import { cache } from 'react'
 import { explorer, type Explorer as View } from '../lib/answers/explorer'
 import { rulerOf } from '../lib/answers/ruler-view'
 import { SHELF } from '../lib/answers/shelf'
+import { takeAwayLists } from '../lib/answers/take-away'
+import { HOME } from './api/home'
 import { EDITION } from './edition'
 import { Explorer } from './explorer'
+import { linkCard } from './link-card'
 import { askedOf } from './live/fetch-view'
+import { OlderEngine } from './ui/older-engine'
 import { Ruler } from './ui/ruler'
+
+const LISTS = takeAwayLists(HOME.base)
 
 interface Props {
   readonly searchParams: Promise<Readonly<Record<string, string | string[] | undefined>>>
@@ -14,7 +20,7 @@ interface Props {
 
 export async function generateMetadata(props: Props): Promise<Metadata> {
   const view = await read(props)
-  return { title: { absolute: `${view.title} · Longhence` }, description: view.figure.alternative }
+  return { title: { absolute: `${view.title} · Longhence` }, description: view.figure.alternative, ...linkCard(view) }
 }
 
 export default async function Page(props: Props) {
@@ -23,9 +29,12 @@ export default async function Page(props: Props) {
   const view = await read(props)
   const asked = askedOf(await queryOf(props))
   return (
-    <Explorer initial={view} asked={asked} ruler={ruler} shelf={SHELF} edition={EDITION}>
-      <Ruler desk={view} view={ruler} shelf={SHELF} hand={null} />
-    </Explorer>
+    <>
+      <OlderEngine asked={all(others.engine)[0]} today={EDITION.engine} />
+      <Explorer initial={view} asked={asked} ruler={ruler} shelf={SHELF} lists={LISTS} edition={EDITION}>
+        <Ruler desk={view} view={ruler} shelf={SHELF} hand={null} />
+      </Explorer>
+    </>
   )
 }
 

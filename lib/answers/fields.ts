@@ -116,3 +116,19 @@ export function take<T>(
   for (const issue of parsed.error.issues) if (issue.code === 'custom') faults.push(issue.params as Fault)
   return undefined
 }
+
+const LONGEST_SITE = 200
+
+/** The address of a site, without a path or a slash at its end. */
+export const site = (key: string, meaning: string) =>
+  field<string>(meaning, (text) => {
+    if (text.length <= LONGEST_SITE && /^https?:\/\/[a-z0-9.-]+(:\d{1,5})?$/i.test(text)) return { value: text }
+    const message = `${key} is not the address of a site.`
+    return { faults: [fault(key, text, 'http:// or https://, a host, and perhaps a port', message)] }
+  })
+
+/** Any text. */
+export const text = (key: string, meaning: string) =>
+  field<string>(meaning, (value) =>
+    value === '' ? { faults: [fault(key, value, 'a text', `${key} has no value.`)] } : { value },
+  )

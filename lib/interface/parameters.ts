@@ -2,6 +2,8 @@
 import { AT_FIELDS } from '../answers/epochs'
 import { FIGURE_FIELDS, FIGURE_FORMATS, LEAST_DPI, MOST_DPI, VIEWS } from '../answers/figure'
 import { TABLE_FIELDS } from '../answers/layout'
+import { OEMBED_FIELDS } from '../answers/oembed'
+import { QR_FIELDS, QR_FORMATS } from '../answers/qr'
 import { FORMATS } from '../formats'
 import { SIZES } from '../print/sizes'
 import { THEME_KEYS } from '../print/theme'
@@ -52,6 +54,19 @@ const FIGURE_SHAPES: Readonly<Record<keyof typeof FIGURE_FIELDS, Schema>> = {
   dpi: { type: 'integer', minimum: LEAST_DPI, maximum: MOST_DPI },
 }
 
+const QR_SHAPES: Readonly<Record<keyof typeof QR_FIELDS, Schema>> = {
+  format: { ...keysOf(QR_FORMATS), default: QR_FORMATS[0].key },
+  base: { type: 'string', format: 'uri' },
+}
+
+const pixels: Schema = { type: 'integer', minimum: 1 }
+const OEMBED_SHAPES: Readonly<Record<keyof typeof OEMBED_FIELDS, Schema>> = {
+  url: { type: 'string', format: 'uri' },
+  maxwidth: pixels,
+  maxheight: pixels,
+  format: { enum: ['json'], default: 'json' },
+}
+
 interface Described {
   meta(): { readonly description?: string } | undefined
 }
@@ -71,3 +86,5 @@ export function parametersOf(
 export const AT_PARAMETERS = parametersOf(AT_FIELDS, AT_SHAPES)
 export const TABLE_PARAMETERS = parametersOf(TABLE_FIELDS, TABLE_SHAPES)
 export const FIGURE_PARAMETERS = parametersOf(FIGURE_FIELDS, FIGURE_SHAPES)
+export const QR_PARAMETERS = parametersOf(QR_FIELDS, QR_SHAPES)
+export const OEMBED_PARAMETERS = parametersOf(OEMBED_FIELDS, OEMBED_SHAPES)

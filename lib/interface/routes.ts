@@ -1,8 +1,16 @@
 /** Every route of the interface once; the document, the page about it and the tests follow from this list. */
 
 import { FIGURE_FORMATS } from '../answers/figure'
+import { QR_FORMATS } from '../answers/qr'
 import { FORMATS } from '../formats'
-import { AT_PARAMETERS, FIGURE_PARAMETERS, SCENARIOS, TABLE_PARAMETERS } from './parameters'
+import {
+  AT_PARAMETERS,
+  FIGURE_PARAMETERS,
+  OEMBED_PARAMETERS,
+  QR_PARAMETERS,
+  SCENARIOS,
+  TABLE_PARAMETERS,
+} from './parameters'
 import { BYTES, type Route } from './route'
 import { refTo } from './schemas'
 
@@ -94,5 +102,24 @@ export const ROUTES: readonly Route[] = [
     answer: { [JSON_TYPE]: refTo('Words') },
     refusals: [422],
     examples: [{ title: 'Words for one scenario', query: 's=h0:70,matter:0.3' }],
+  },
+  {
+    path: '/api/qr',
+    method: 'get',
+    summary: 'The link of scenarios as a QR code. A link of more characters than a code holds is refused.',
+    parameters: [SCENARIOS, ...QR_PARAMETERS],
+    answer: Object.fromEntries(QR_FORMATS.map(({ mediaType }) => [mediaType, BYTES])),
+    refusals: [],
+    examples: [{ title: 'For the last slide', query: 's=h0:70,matter:0.3&base=https://a.example' }],
+  },
+  {
+    path: '/api/oembed',
+    method: 'get',
+    summary:
+      'How a site that is given a link of ours shows it (oEmbed 1.0); only where the server knows its own address.',
+    parameters: OEMBED_PARAMETERS,
+    answer: { [JSON_TYPE]: refTo('OEmbed') },
+    refusals: [],
+    examples: [],
   },
 ]

@@ -1,0 +1,41 @@
+import '../styles/embed.css'
+import type { Metadata } from 'next'
+import { opened } from '../../lib/answers/opened'
+import { figureOf } from '../../lib/answers/words'
+import { drawLongView } from '../../lib/figures/draw-long-view'
+import { FRAMES } from '../../lib/figures/plot'
+import { linkQuery } from '../../lib/scenario/write'
+import { ENGINE } from '../../lib/solve'
+import { nameOf } from '../../lib/words/desk'
+import { THEMES } from '../../lib/words/place'
+import { Drawing } from '../ui/drawing'
+
+interface Props {
+  readonly searchParams: Promise<Readonly<Record<string, string | string[] | undefined>>>
+}
+
+export const metadata: Metadata = { title: 'Figure', robots: { index: false } }
+
+/** The figure alone, for a frame in somebody else's page. */
+export default async function Embed({ searchParams }: Props) {
+  const { s, theme } = await searchParams
+  const { solutions, problems } = opened(s === undefined ? [] : [s].flat())
+  const figure = figureOf(solutions.map((one, slot) => ({ ...one, label: nameOf(one.scenario, slot) })))
+  const home = `/?${linkQuery(solutions.map(({ scenario }) => scenario))}&engine=${ENGINE}`
+  return (
+    <main className="embed" data-theme={THEMES.find((one) => one === theme)}>
+      <h1 className="spoken">Scale factor against time</h1>
+      {FRAMES.map((frame) => (
+        <div key={frame.id} className={`frame ${frame.id}`}>
+          <Drawing node={drawLongView(figure, frame)} />
+        </div>
+      ))}
+      <p className="origin">
+        {problems.length > 0 && 'The link could not be read as written. '}
+        <a href={home} target="_blank" rel="noopener">
+          Longhence
+        </a>
+      </p>
+    </main>
+  )
+}

@@ -1,0 +1,24 @@
+/** What other sites show of a pasted link: title, verdict and the figure. Only where the server knows its own address. */
+import type { Metadata } from 'next'
+import type { Explorer } from '../lib/answers/explorer'
+import { HOME } from './api/home'
+
+export function linkCard({ title, scenarios, links, place, figure }: Explorer): Metadata {
+  const { base } = HOME
+  if (base === '') return {}
+  const query = links.data.split('?')[1]
+  const theme = place.theme === 'night' ? '&theme=night' : ''
+  const image = {
+    url: `${base}/api/figure?${query}&size=card&format=png${theme}`,
+    width: 1200,
+    height: 630,
+    alt: figure.alternative,
+  }
+  const description = scenarios[place.focus]?.verdict.sentences.join(' ') ?? ''
+  const page = `${base}/?${query}`
+  return {
+    openGraph: { type: 'website', siteName: 'Longhence', title, description, url: page, images: [image] },
+    twitter: { card: 'summary_large_image', title, description, images: [image] },
+    alternates: { types: { 'application/json+oembed': `${base}/api/oembed?url=${encodeURIComponent(page)}` } },
+  }
+}

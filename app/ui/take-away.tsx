@@ -1,0 +1,117 @@
+import { lazy, Suspense, useState } from 'react'
+import type { Choice, TakeAwayLists } from '../../lib/answers/take-away'
+import { frameHtml } from '../../lib/formats/frame'
+import type { Desk } from '../../lib/words/desk'
+import { CopyText } from './copy-text'
+
+interface Props {
+  readonly desk: Pick<Desk, 'links' | 'place' | 'scenarios'>
+  readonly lists: TakeAwayLists
+  readonly live: boolean
+}
+
+/** Read when somebody opens it. */
+const Words = lazy(() => import('./take-away-fetched'))
+
+/** Files, links and words of what is shown. Without scripts all of it is links. */
+export function TakeAway({ desk, lists, live }: Props) {
+  const query = queryOf(desk)
+  const theme = desk.place.theme === 'night' ? '&theme=night' : ''
+  const [open, setOpen] = useState(false)
+  return (
+    <section className="take-away" aria-labelledby="take-away">
+      <h2 id="take-away" className="heading">
+        Take away
+      </h2>
+      <table>
+        <tbody>
+          {lists.sizes.map(({ key, label }) => (
+            <Row
+              key={key}
+              label={`Figure, ${label}`}
+              choices={lists.figures}
+              href={(format) => `/api/figure?${query}&size=${key}&format=${format}${theme}`}
+            />
+          ))}
+          <Row label="Table" choices={lists.tables} href={(format) => `/api/table?${query}&format=${format}`} />
+          <Codes query={query} lists={lists} live={live} />
+          <FrameRow query={`${query}${theme}`} title={titleOf(desk)} lists={lists} live={live} />
+          <tr>
+            <th scope="row">For programs</th>
+            <td>
+              <a href="/api">Interface for scripts</a>
+            </td>
+          </tr>
+        </tbody>
+      </table>
+      <details onToggle={({ currentTarget }) => setOpen(currentTarget.open)}>
+        <summary>Words: captions, methods, summary, press card, macros, references</summary>
+        {open && live ? (
+          <Suspense fallback={null}>
+            <Words query={query} />
+          </Suspense>
+        ) : (
+          <p>
+            <a href={`/words?${query}`}>All of them on a page of their own</a>
+          </p>
+        )}
+      </details>
+    </section>
+  )
+}
+
+/** What a page of somebody else pastes to show the figure. */
+function FrameRow({
+  query,
+  title,
+  lists,
+  live,
+}: Omit<Props, 'desk'> & { readonly query: string; readonly title: string }) {
+  const base = lists.base === '' && live ? location.origin : lists.base
+  const html = frameHtml(`${base}/embed?${query}`, title)
+  return (
+    <tr>
+      <th scope="row">Frame for other pages</th>
+      <td className="text">
+        <a href={`/embed?${query}`} rel="nofollow">
+          Open
+        </a>
+        <CopyText title="HTML of the frame" text={html} />
+        <pre className="code">{html}</pre>
+      </td>
+    </tr>
+  )
+}
+
+const titleOf = ({ scenarios }: Props['desk']): string => scenarios.map(({ name }) => name).join(', ')
+const queryOf = ({ links }: Props['desk']): string => links.data.split('?')[1] ?? ''
+
+interface RowProps {
+  readonly label: string
+  readonly choices: readonly Choice[]
+  readonly href: (key: string) => string
+}
+
+function Row({ label, choices, href }: RowProps) {
+  return (
+    <tr>
+      <th scope="row">{label}</th>
+      <td>
+        {choices.map(({ key, label: name }) => (
+          <a key={key} href={href(key)} rel="nofollow" download aria-label={`${label} as ${name}`}>
+            {name}
+          </a>
+        ))}
+      </td>
+    </tr>
+  )
+}
+
+/** A code has to lead somewhere: where the server does not know its own address, the browser does. */
+function Codes({ query, lists, live }: Omit<Props, 'desk'> & { readonly query: string }) {
+  if (lists.base === '' && !live) return null
+  const base = lists.base === '' ? `&base=${encodeURIComponent(location.origin)}` : ''
+  return (
+    <Row label="Link as QR code" choices={lists.codes} href={(format) => `/api/qr?${query}&format=${format}${base}`} />
+  )
+}

@@ -1,0 +1,48 @@
+import type { Metadata } from 'next'
+import { opened } from '../../lib/answers/opened'
+import { wordsOf } from '../../lib/answers/words'
+import { linkQuery } from '../../lib/scenario/write'
+import { ENGINE } from '../../lib/solve'
+import { THEMES } from '../../lib/words/place'
+import { HOME } from '../api/home'
+import { EDITION } from '../edition'
+import { Footer } from '../ui/footer'
+import { TakeAwayWords } from '../ui/take-away-words'
+
+interface Props {
+  readonly searchParams: Promise<Readonly<Record<string, string | string[] | undefined>>>
+}
+
+export const metadata: Metadata = {
+  title: 'Words to take away',
+  description: 'Captions, methods, summaries, press cards, LaTeX macros and references of scenarios.',
+  robots: { index: false },
+}
+
+/** The words of scenarios, complete without scripts. */
+export default async function Page({ searchParams }: Props) {
+  const { s, theme } = await searchParams
+  const { solutions, problems } = opened(s === undefined ? [] : [s].flat())
+  const query = linkQuery(solutions.map(({ scenario }) => scenario))
+  const edition = { version: HOME.version, engine: ENGINE, link: `${HOME.base}/?${query}&engine=${ENGINE}` }
+  return (
+    <div className="page" data-theme={THEMES.find((one) => one === theme)}>
+      <header className="masthead">
+        <a className="brand" href="/">
+          Longhence
+        </a>
+      </header>
+      <main className="take-away alone">
+        <h1>Words to take away</h1>
+        {problems.length > 0 && (
+          <p role="alert">The link could not be read as written; these are the words of what could.</p>
+        )}
+        <p>
+          <a href={`/?${query}`}>Open in the explorer</a>
+        </p>
+        <TakeAwayWords words={wordsOf(solutions, edition)} />
+      </main>
+      <Footer data={null} edition={EDITION} />
+    </div>
+  )
+}
