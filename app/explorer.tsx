@@ -8,6 +8,7 @@ import type { TakeAwayLists } from '../lib/answers/take-away'
 import { useAddress } from './live/address'
 import { follow } from './live/follow'
 import { useExplorer } from './live/use-explorer'
+import { useShownFrame } from './live/use-shown-frame'
 import { useStill } from './live/use-still'
 import { Figure } from './ui/figure'
 import { type Edition, Footer } from './ui/footer'
@@ -21,6 +22,7 @@ import { RulerPlace } from './ui/ruler-place'
 import { Status } from './ui/status'
 import { TakeAway } from './ui/take-away'
 import { Verdicts } from './ui/verdicts'
+import { Views } from './ui/views'
 
 interface Props {
   readonly initial: View
@@ -37,7 +39,8 @@ interface Props {
 /** The page: complete as the server draws it, and alive from then on. */
 export function Explorer({ initial, asked, ruler, shelf, lists, edition, children }: Props) {
   const address = useAddress()
-  const { view, desk, waiting, busy, trouble } = useExplorer(address, initial, asked)
+  const frame = useShownFrame()
+  const { view, desk, waiting, busy, trouble } = useExplorer(address, initial, asked, frame)
   // The figure follows a hand at once, the rest as soon as there is time.
   const later = useDeferredValue(view)
   const moving = address?.moving ?? false
@@ -53,24 +56,29 @@ export function Explorer({ initial, asked, ruler, shelf, lists, edition, childre
       <main aria-busy={busy || later !== view || undefined} data-shown={view.links.here}>
         <h1 className={initial.titled || view.titled ? undefined : 'spoken'}>{view.title}</h1>
         {view.refusal && <Refusal refusal={view.refusal} />}
-        <InSight of={later} moving={moving} className="first-words">
-          {({ scenarios, place }) => <Verdicts scenarios={scenarios} focus={place.focus} />}
-        </InSight>
-        <Figure view={view} live={address !== null} moving={moving} />
-        <div className="columns">
-          <Ingredients
-            key={`${desk.place.focus} ${desk.scenarios.length}`}
-            desk={desk}
-            sets={shelf.sets}
-            live={address !== null}
-          />
-          <InSight of={later} moving={moving}>
-            {(shown) => <Moments view={shown} />}
+        <div className="workbench">
+          <InSight of={later} moving={moving} className="first-words">
+            {({ scenarios, place }) => <Verdicts scenarios={scenarios} focus={place.focus} />}
           </InSight>
-          <InSight of={later} moving={moving}>
-            {(shown) => <Measures view={shown} />}
-          </InSight>
+          <Figure view={view} shown={address && frame} />
+          <div className="columns">
+            <Ingredients
+              key={`${desk.place.focus} ${desk.scenarios.length}`}
+              desk={desk}
+              sets={shelf.sets}
+              live={address !== null}
+            />
+            <InSight of={later} moving={moving}>
+              {(shown) => <Moments view={shown} />}
+            </InSight>
+            <InSight of={later} moving={moving}>
+              {(shown) => <Measures view={shown} />}
+            </InSight>
+          </div>
         </div>
+        <InSight of={later} moving={moving}>
+          {(shown) => <Views view={shown} shown={address && frame} />}
+        </InSight>
         <RulerPlace {...ruled} initial={ruler} shelf={shelf}>
           {children}
         </RulerPlace>

@@ -20,14 +20,14 @@ interface Props {
 
 export async function generateMetadata(props: Props): Promise<Metadata> {
   const view = await read(props)
-  return { title: { absolute: `${view.title} · Longhence` }, description: view.figure.alternative, ...linkCard(view) }
+  return { title: { absolute: `${view.title} · Longhence` }, description: view.long.figure.alternative, ...linkCard(view) }
 }
 
 export default async function Page(props: Props) {
   const { s, ...others } = await props.searchParams
   const ruler = rulerOf(all(s), (key) => all(others[key])[0])
   const view = await read(props)
-  const asked = askedOf(await queryOf(props))
+  const asked = askedOf(await queryOf(props), null)
   return (
     <>
       <OlderEngine asked={all(others.engine)[0]} today={EDITION.engine} />

@@ -2,8 +2,8 @@
 import type { Explorer } from '../../lib/answers/explorer'
 import { PLACE_KEYS, RULER_KEYS } from '../../lib/words/place'
 
-/** What of an address the answer depends on. */
-export function askedOf(search: string): string {
+/** What of an address the answer depends on; figures are drawn for one frame. */
+export function askedOf(search: string, frame: string | null): string {
   const query = new URLSearchParams(search)
   const asked = new URLSearchParams(query.getAll('s').map((code) => ['s', code]))
   const apart: readonly string[] = RULER_KEYS
@@ -11,6 +11,7 @@ export function askedOf(search: string): string {
     const value = query.get(key)
     if (value !== null) asked.set(key, value)
   }
+  if (frame !== null) asked.set('frame', frame)
   return asked.toString()
 }
 

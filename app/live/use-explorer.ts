@@ -28,8 +28,13 @@ export interface Trouble {
 }
 
 /** `asked` is the question that `initial` answers: a page that was kept for use without a network may answer another. */
-export function useExplorer(address: Address | null, initial: Explorer, asked: string): Live {
-  const answers = useAnswers(initial, asked)
+export function useExplorer(
+  address: Address | null,
+  initial: Explorer,
+  asked: string,
+  frame: string | null,
+): Live {
+  const answers = useAnswers(initial, asked, frame)
   const { answer, wanted, fetching, computing, error } = useSyncExternalStore(
     answers.subscribe,
     answers.read,
@@ -50,12 +55,16 @@ export function useExplorer(address: Address | null, initial: Explorer, asked: s
   }
 }
 
-function useAnswers(initial: Explorer, asked: string) {
+/** What came with the page is drawn for every frame; later answers for the one that is seen. */
+function useAnswers(initial: Explorer, asked: string, frame: string | null) {
   const [answers] = useState(() => createAnswers({ asked, view: initial, here: false }, MEANS))
   useEffect(() => {
     onComputed(answers.computed)
-    return watchAddress(({ search, moving }) => answers.want(askedOf(search), moving))
-  }, [answers])
+    return watchAddress(({ search, moving }) => {
+      const plain = askedOf(search, null)
+      answers.want(plain === asked ? asked : askedOf(search, frame), moving)
+    })
+  }, [answers, asked, frame])
   useOffline(answers.again)
   return answers
 }

@@ -1,4 +1,4 @@
-import { dashOf } from '../../lib/figures/draw-curve'
+import { dashOf } from '../../lib/figures/dash'
 
 const WIDTH = 3
 

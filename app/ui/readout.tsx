@@ -1,8 +1,10 @@
-import type { LongView } from '../../lib/figures/long-view'
-import { readingsAt, timeText } from './reading-text'
+import type { Shown } from '../../lib/figures/picture'
+import { fractionOf } from '../../lib/figures/scale'
+import { placeText, readingsAt } from './reading-text'
+import { Symbols } from './symbol'
 
 interface Props {
-  readonly view: LongView
+  readonly figure: Shown
   readonly index: number
   readonly lit: number | null
   /** Of the plot on the screen. */
@@ -13,32 +15,36 @@ interface Props {
 const GAP = 12
 
 /** Stands beside the cursor, on the side that has more room. */
-export function Readout({ view, index, lit, width }: Props) {
-  const { times } = view.readings
-  const { from, to } = view.window
-  const time = times[index] ?? 0
-  const x = ((time - from) / (to - from)) * width
-  const place = x < width / 2 ? { left: x + GAP } : { right: width - x + GAP }
+export function Readout({ figure, index, lit, width }: Props) {
+  const { x, y, readings } = figure
+  const at = readings.places[index] ?? 0
+  const left = fractionOf(x, at) * width
+  const place = left < width / 2 ? { left: left + GAP } : { right: width - left + GAP }
+  const scale = y.quantity === 'scale'
   return (
     <div className="readout" style={place} aria-hidden="true">
       <table>
         <thead>
           <tr>
-            <th>{time === 0 ? 'now' : timeText(time)}</th>
+            <th>{placeText(x, at)}</th>
             <th>
-              <i>a</i>
+              <Symbols markup={y.symbol} />
+              {y.symbol && y.unit ? ', ' : ''}
+              {y.unit}
             </th>
-            <th>
-              <i>z</i>
-            </th>
+            {scale && (
+              <th>
+                <i>z</i>
+              </th>
+            )}
           </tr>
         </thead>
         <tbody>
-          {readingsAt(view, index).map(({ slot, name, scale, redshift }) => (
-            <tr key={slot} className={`slot-${slot}`} data-quiet={lit !== null && lit !== slot ? '' : undefined}>
+          {readingsAt(figure, index).map(({ tone, name, value, redshift }, i) => (
+            <tr key={tone} className={tone} data-quiet={lit !== null && lit !== i ? '' : undefined}>
               <th>{name}</th>
-              <td>{scale ?? '–'}</td>
-              <td>{redshift ?? '–'}</td>
+              <td>{value ?? '–'}</td>
+              {scale && <td>{redshift ?? '–'}</td>}
             </tr>
           ))}
         </tbody>

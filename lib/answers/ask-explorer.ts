@@ -1,5 +1,6 @@
 /** `/api/explorer`: what the page shows, as data. Like the page it reads leniently what stands behind `s`. */
 
+import { LONG_FRAMES } from '../figures/plot'
 import { problemsOf } from '../scenario/problems'
 import { readQuery } from '../scenario/query'
 import type { Reading } from '../scenario/scenario'
@@ -9,20 +10,24 @@ import { type Asked, type Explorer, explorer } from './explorer'
 import { readKeys, SCENARIO } from './keys'
 import type { Pairs, Question } from './question'
 
+/** The live page asks for the drawings that it shows. */
+const FRAME = 'frame'
+
 export function askExplorer(pairs: Pairs): Reading<Question<Explorer>> {
-  const { codes, values, faults } = readKeys(pairs, PLACE_KEYS)
+  const { codes, values, faults } = readKeys(pairs, [...PLACE_KEYS, FRAME])
   if (faults.length > 0) return { ok: false, problems: problemsOf(faults, null) }
-  const asked = { codes, keys: values }
+  const asked = { codes, keys: values, frame: values.get(FRAME) }
   return { ok: true, value: { canonical: canonicalOf(asked), answer: () => ({ ok: true, value: explorer(asked) }) } }
 }
 
 /** No scenario at all stays apart from the scenarios of the demo: it has a title. */
-function canonicalOf({ codes, keys }: Asked): string {
+function canonicalOf({ codes, keys, frame }: Asked): string {
   const reading = readQuery(codes)
   const count = reading.ok ? reading.value.length : codes.length
   const queries =
     reading.ok && codes.length > 0
       ? [linkQuery(reading.value)]
       : codes.map((code) => `${SCENARIO}=${encodeURIComponent(code)}`)
-  return [...queries, ...placeKeys(readPlace((key) => keys.get(key), count))].join('&')
+  const drawn = LONG_FRAMES.some(({ id }) => id === frame) ? [`${FRAME}=${frame}`] : []
+  return [...queries, ...placeKeys(readPlace((key) => keys.get(key), count)), ...drawn].join('&')
 }

@@ -1,11 +1,8 @@
 /** Everything the explorer shows, from the texts of an address: what a page needs and nothing to compute. */
-import { contentsAt } from '../figures/contents'
-import { type LongView, longView } from '../figures/long-view'
-import type { Entry } from '../figures/window'
 import { DEMO } from '../scenario/demo'
 import { readScenario } from '../scenario/read'
 import type { Problem, Scenario } from '../scenario/scenario'
-import { type Solution, scalesAt } from '../solve'
+import type { Solution } from '../solve'
 import { otherBeyond } from '../words/beyond'
 import { type Desk, deskOf, nameOf, type Tab } from '../words/desk'
 import { pageLink } from '../words/link'
@@ -14,13 +11,17 @@ import { type MomentWords, momentWords } from '../words/moments'
 import { type Place, readPlace } from '../words/place'
 import { joined } from '../words/sentence'
 import { type Verdict, verdictOf } from '../words/verdict'
+import { type LongPanel, longPanel } from './long-panel'
 import { type Opened, opened, solutionOf } from './opened'
+import { type Panel, panelOf, settled } from './panel'
 
 export interface Asked {
   /** Every `s`, decoded once. */
   readonly codes: readonly string[]
   /** The other keys of the address, which are read leniently. */
   readonly keys: ReadonlyMap<string, string>
+  /** Id of the one frame that figures are drawn for; for all where absent. */
+  readonly frame?: string | undefined
 }
 
 export interface ScenarioView extends Tab {
@@ -43,7 +44,8 @@ export interface Explorer extends Desk {
   /** True where the title says more than the names of the scenarios. */
   readonly titled: boolean
   readonly scenarios: readonly ScenarioView[]
-  readonly figure: LongView
+  readonly long: LongPanel
+  readonly panel: Panel
   readonly moments: readonly MomentWords[]
   readonly measures: readonly MeasureWords[]
   readonly refusal: Refusal | null
@@ -53,7 +55,11 @@ export function explorer(asked: Asked): Explorer {
   const address = opened(asked.codes)
   const solutions = address.solutions.map(named)
   const scenarios = solutions.map(({ scenario }) => scenario)
-  const place = readPlace((key) => asked.keys.get(key), scenarios.length)
+  const place = settled(
+    readPlace((key) => asked.keys.get(key), scenarios.length),
+    solutions,
+  )
+  const subject = { solutions, scenarios, place, frame: asked.frame ?? null }
   const desk = deskOf(scenarios, place)
   const focus = solutions[place.focus] as Solution
   const titled = asked.codes.length === 0
@@ -65,7 +71,8 @@ export function explorer(asked: Asked): Explorer {
       ...tab,
       ...told(solutions[tab.slot] as Solution, tab.slot, scenarios, place),
     })),
-    figure: longView(solutions.map(drawable)),
+    long: longPanel(subject),
+    panel: panelOf(subject),
     moments: momentWords(focus),
     measures: measureWords(focus.measures),
     refusal: address.problems.length === 0 ? null : refusalOf(address, desk.links.here),
@@ -74,14 +81,6 @@ export function explorer(asked: Asked): Explorer {
 
 function refusalOf({ problems, changes, kept }: Opened, link: string): Refusal {
   return { problems, changes, link: kept ? link : null }
-}
-
-function drawable(solution: Solution): Entry<Solution> {
-  return {
-    solution,
-    scales: (times) => scalesAt(solution, times),
-    contents: (time) => contentsAt(solution, time),
-  }
 }
 
 function named(solution: Solution, slot: number): Solution {

@@ -1,7 +1,7 @@
 /** Words under a figure and in place of it. */
 import type { Solution } from '../solve'
 import { extrapolates } from '../words/beyond'
-import { fixed, significant } from '../words/number'
+import { fixed, signed, significant } from '../words/number'
 import { capital, joined } from '../words/sentence'
 import { verdictOf } from '../words/verdict'
 import type { Window } from './window'
@@ -12,6 +12,9 @@ type Told = Pick<Solution, 'scenario' | 'label' | 'origin' | 'end' | 'measures' 
 interface Shown {
   readonly marks: ReadonlySet<string>
   readonly ribbons: boolean
+  readonly logarithmic: boolean
+  /** False where nothing of the future is seen. */
+  readonly future: boolean
 }
 
 const SIGNS = [
@@ -20,12 +23,14 @@ const SIGNS = [
   ['arrow', 'arrow: goes on'],
 ] as const
 
-export function longViewCaption(solutions: readonly Told[], { marks, ribbons }: Shown): string {
+export function longViewCaption(solutions: readonly Told[], { marks, ribbons, logarithmic, future }: Shown): string {
   const signs = SIGNS.filter(([kind]) => marks.has(kind)).map(([, words]) => words)
-  const parts = ['Scale factor a against time from now.', `${capital(signs.join('; '))}.`]
+  const time = logarithmic ? 'time from now, logarithmic both ways' : 'time from now'
+  const parts = [`Scale factor a against ${time}.`]
+  if (signs.length > 0) parts.push(`${capital(signs.join('; '))}.`)
   if (ribbons) parts.push('Ribbons: what dominates; the line above them: the expansion accelerates.')
   const followed = solutions.filter(({ scenario }) => extrapolates(scenario)).map(({ label }) => label)
-  if (followed.length > 0) parts.push(hatching(followed))
+  if (future && followed.length > 0) parts.push(hatching(followed))
   return parts.join(' ')
 }
 
@@ -35,9 +40,13 @@ function hatching(labels: readonly string[]): string {
 }
 
 export function longViewText(solutions: readonly Told[], { from, to, top }: Window): string {
-  const frame = `Line chart of the scale factor from 0 to ${significant(top, 2)} (1 today) against time from ${fixed(from, 0)} to +${fixed(to, 0)} Gyr.`
+  const frame = `Line chart of the scale factor from 0 to ${significant(top, 2)} (1 today) against time from ${timeText(from)} to ${timeText(to)} Gyr.`
   const curves = solutions.map((one) => `${one.label}: ${lowered(verdictOf(one, null).sentences[0] ?? '')}`)
   return [frame, ...curves].join(' ')
+}
+
+function timeText(time: number): string {
+  return signed(Math.abs(time) < 10 ? significant(time, 2) : fixed(time, 0))
 }
 
 function lowered(text: string): string {

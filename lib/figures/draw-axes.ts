@@ -1,86 +1,119 @@
-/** Both axes, the grid, and the line of now. */
-import { ticks } from 'd3-array'
-import { fixed, signed } from '../words/number'
+/** Both axes, the grid, lines of reference, and the line of now. */
+import type { Axis, Chart, Reference } from './chart'
+import { titleOf } from './draw-text'
 import type { Frame, Plot } from './plot'
+import { fractionOf } from './scale'
 import { px, type SvgNode, svg } from './svg'
-import type { Window } from './window'
+import { textWidth } from './text-width'
+import { type Tick, ticksOf } from './ticks'
 
 /** About so many units of type per tick. */
-const TIME_TICK = { wide: 8, compact: 6 }
-const SCALE_TICK = 4
+const ACROSS = { wide: 8, compact: 6 }
+const UP = 4
+/** Least room between the texts of two ticks, in units of the type. */
+const APART = 1
 /** Size of axis text in units of the type. */
-const SMALL = 0.9
+export const SMALL = 0.9
 
-export function timeAxisTitle(): string {
-  return 'time from now, Gyr'
-}
+type Axes = Pick<Chart, 'x' | 'y' | 'now' | 'references'>
 
-export function axes(window: Window, plot: Plot, frame: Frame, scaleTitle: string): SvgNode[] {
+/** `inRow`: the title of the horizontal axis stands beside the ticks, else below them. */
+export function drawAxes(chart: Axes, plot: Plot, frame: Frame, inRow: boolean): SvgNode[] {
   const size = px(frame.type * SMALL)
   return [
-    ...scaleAxis(window, plot, frame, size),
-    ...timeAxis(window, plot, frame, size),
+    ...upright(chart.y, plot, frame, size),
+    ...chart.references.flatMap((one) => reference(one, plot, frame)),
+    ...level(chart, plot, frame, size),
     svg(
       'text',
       { x: frame.compact ? 0 : plot.left, y: px(plot.top - 0.55 * frame.type), 'font-size': size, class: 'axis' },
-      ...italicEnd(scaleTitle),
+      ...titleOf(chart.y, size),
     ),
+    title(chart.x, plot, frame, size, inRow),
+    ...today(chart.now, chart.x, plot),
   ]
 }
 
-/** The symbol at the end of an axis title stands in italics. */
-function italicEnd(title: string): (SvgNode | string)[] {
-  const cut = title.lastIndexOf(' ') + 1
-  return [title.slice(0, cut), svg('tspan', { class: 'symbol' }, title.slice(cut))]
+/** Ticks of the vertical axis, also for those who ask how wide they are. */
+export function uprightTicks(y: Axis, height: number, { type }: Pick<Frame, 'type'>): Tick[] {
+  const count = Math.max(2, Math.round(height / (UP * type)))
+  return ticksOf(y, null, count, () => (1.5 * type) / height)
 }
 
-function scaleAxis({ top }: Window, plot: Plot, { type }: Frame, size: number): SvgNode[] {
-  const count = Math.max(2, Math.round((plot.bottom - plot.top) / (SCALE_TICK * type)))
-  return ticks(0, top, count).flatMap((a) => {
-    const y = plot.y(a)
-    const line = svg('line', { x1: plot.left, x2: plot.right, y1: y, y2: y, class: a === 0 ? 'base' : 'grid' })
+function upright(y: Axis, plot: Plot, frame: Frame, size: number): SvgNode[] {
+  const { type } = frame
+  return uprightTicks(y, plot.bottom - plot.top, frame).flatMap(({ at, text }) => {
+    const height = plot.y(at)
+    const base = at === 0 && y.from === 0
+    const line = svg('line', {
+      x1: plot.left,
+      x2: plot.right,
+      y1: height,
+      y2: height,
+      class: base ? 'base' : 'grid',
+    })
     const place = {
       x: px(plot.left - 0.7 * type),
-      y: px(y + 0.32 * size),
+      y: px(height + 0.32 * size),
       'font-size': size,
       'text-anchor': 'end',
       class: 'axis',
     }
-    return [line, svg('text', place, a === 0 ? '0' : String(a))]
+    return [line, svg('text', place, text)]
   })
 }
 
-function timeAxis({ from, to }: Window, plot: Plot, frame: Frame, size: number): SvgNode[] {
+function level({ x, y, now }: Axes, plot: Plot, frame: Frame, size: number): SvgNode[] {
   const { type, compact } = frame
-  const count = Math.max(
-    2,
-    Math.round((plot.right - plot.left) / ((compact ? TIME_TICK.compact : TIME_TICK.wide) * type)),
-  )
-  const step = ticks(from, to, count)
-  const decimals = step.some((time) => !Number.isInteger(time)) ? 1 : 0
-  const y = px(plot.bottom + 1.35 * type)
-  const near = 2.6 * type
-  const shown = step.filter((time) => time === 0 || Math.abs(plot.x(time) - plot.x(0)) > near)
-  const texts = shown.flatMap((time) => {
-    const x = plot.x(time)
-    const tick = svg('line', { x1: x, x2: x, y1: plot.bottom, y2: px(plot.bottom + 0.3 * type), class: 'tick' })
-    const label = time === 0 ? 'now' : signed(fixed(time, decimals))
-    return [
-      tick,
-      svg(
-        'text',
-        { x, y, 'font-size': size, 'text-anchor': 'middle', class: time === 0 ? 'axis now-text' : 'axis' },
-        label,
-      ),
-    ]
+  const width = plot.right - plot.left
+  const count = Math.max(2, Math.round(width / ((compact ? ACROSS.compact : ACROSS.wide) * type)))
+  const gap = (one: Tick, other: Tick) =>
+    ((textWidth(one.text, size) + textWidth(other.text, size)) / 2 + APART * type) / width
+  const line = px(plot.bottom + 1.35 * type)
+  const marks = ticksOf(x, now, count, gap).flatMap(({ at, text }) => {
+    const place = plot.x(at)
+    const tick = svg('line', {
+      x1: place,
+      x2: place,
+      y1: plot.bottom,
+      y2: px(plot.bottom + 0.3 * type),
+      class: 'tick',
+    })
+    const look = { 'font-size': size, 'text-anchor': 'middle', class: text === 'now' ? 'axis now-text' : 'axis' }
+    return [tick, svg('text', { x: kept(place, textWidth(text, size), frame), y: line, ...look }, text)]
   })
-  const title = compact
-    ? svg(
-        'text',
-        { x: plot.right, y: px(y + 1.2 * type), 'font-size': size, 'text-anchor': 'end', class: 'axis' },
-        timeAxisTitle(),
-      )
-    : svg('text', { x: frame.width, y, 'font-size': size, 'text-anchor': 'end', class: 'axis' }, timeAxisTitle())
-  const now = svg('line', { x1: plot.x(0), x2: plot.x(0), y1: plot.top, y2: plot.bottom, class: 'now' })
-  return [...texts, title, now]
+  const floor = { x1: plot.left, x2: plot.right, y1: plot.bottom, y2: plot.bottom, class: 'base' }
+  return y.from === 0 && y.scaling === 'linear' ? marks : [svg('line', floor), ...marks]
+}
+
+/** The last tick of a phone must not run over the edge. */
+function kept(place: number, width: number, frame: Frame): number {
+  return px(Math.max(width / 2, Math.min(frame.width - width / 2, place)))
+}
+
+function title(x: Axis, plot: Plot, frame: Frame, size: number, inRow: boolean): SvgNode {
+  const [place, row] = inRow ? [frame.width, 1.35] : [plot.right, 2.6]
+  const look = { 'font-size': size, 'text-anchor': 'end', class: 'axis' }
+  return svg('text', { x: place, y: px(plot.bottom + row * frame.type), ...look }, ...titleOf(x, size))
+}
+
+function today(now: number | null, x: Axis, plot: Plot): SvgNode[] {
+  if (now === null || !within(x, now)) return []
+  return [svg('line', { x1: plot.x(now), x2: plot.x(now), y1: plot.top, y2: plot.bottom, class: 'now' })]
+}
+
+export function within(axis: Axis, at: number): boolean {
+  const part = fractionOf(axis, at)
+  return part >= 0 && part <= 1
+}
+
+function reference({ axis, at, label }: Reference, plot: Plot, { type }: Frame): SvgNode[] {
+  const size = px(0.8 * type)
+  if (axis === 'x') {
+    const x = plot.x(at)
+    return [svg('line', { x1: x, x2: x, y1: plot.top, y2: plot.bottom, class: 'reference' })]
+  }
+  const y = plot.y(at)
+  const place = { x: px(plot.left + 0.4 * type), y: px(y - 0.35 * type), 'font-size': size, class: 'axis' }
+  return [svg('line', { x1: plot.left, x2: plot.right, y1: y, y2: y, class: 'reference' }), svg('text', place, label)]
 }

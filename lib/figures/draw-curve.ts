@@ -1,54 +1,42 @@
 /** A curve with its marks. Hue comes by class, dash by the place in the list: a reader without colours can tell them apart. */
-import type { Curve, Mark } from './long-view'
+import type { Curve, Mark } from './chart'
+import { dashOf } from './dash'
 import type { Frame, Plot } from './plot'
 import type { Point } from './sample'
 import { px, type SvgNode, svg } from './svg'
 
 /** Line width and marks in units of the type. */
-const LINE = 0.17
+const LINE = { strong: 0.2, quiet: 0.13 }
 const RING = 0.32
 const CROSS = 0.36
 const ARROW = 0.62
 
-/** Dashes in units of the line width; round ends make short ones dots. */
-const DASHES = ['', '3.4 2.4', '0 2.2', '5 2.2 0 2.2', '1.6 2.4', '7 2.4']
-
-export function dashOf(slot: number, width: number): string | null {
-  const dash = DASHES[slot % DASHES.length]
-  if (!dash) return null
-  return dash
-    .split(' ')
-    .map((part) => px(Number(part) * width))
-    .join(' ')
-}
-
 export function drawCurve(curve: Curve, plot: Plot, { type }: Frame): SvgNode {
-  const width = px(LINE * type)
-  const dash = dashOf(curve.slot, width)
+  const width = px((curve.strong ? LINE.strong : LINE.quiet) * type)
+  const dash = dashOf(curve.dash, width)
   const stroke = { class: 'curve', 'stroke-width': width, ...(dash === null ? {} : { 'stroke-dasharray': dash }) }
   return svg(
     'g',
-    { class: `slot-${curve.slot}` },
+    { class: curve.tone },
     ...asymptote(curve, plot, type),
     svg('path', { d: curve.segments.map((segment) => pathOf(segment, plot)).join(''), ...stroke }),
-    ...curve.marks.map((mark) => drawMark(mark, plot, type)),
+    ...curve.marks.map((mark) => drawMark(mark, plot, type, width)),
   )
 }
 
 function pathOf(points: readonly Point[], plot: Plot): string {
-  return points.map(([time, scale], i) => `${i === 0 ? 'M' : 'L'}${plot.x(time)} ${plot.y(scale)}`).join('')
+  return points.map(([x, y], i) => `${i === 0 ? 'M' : 'L'}${plot.x(x)} ${plot.y(y)}`).join('')
 }
 
-function asymptote({ asymptote: time }: Curve, plot: Plot, type: number): SvgNode[] {
-  if (time === null) return []
-  const x = plot.x(time)
+function asymptote({ asymptote }: Curve, plot: Plot, type: number): SvgNode[] {
+  if (asymptote === null) return []
+  const x = plot.x(asymptote.at)
   const dash = `${px(0.1 * type)} ${px(0.3 * type)}`
   return [svg('line', { x1: x, x2: x, y1: plot.top, y2: plot.bottom, class: 'asymptote', 'stroke-dasharray': dash })]
 }
 
-function drawMark(mark: Mark, plot: Plot, type: number): SvgNode {
+function drawMark(mark: Mark, plot: Plot, type: number, width: number): SvgNode {
   const [x, y] = [plot.x(mark.at[0]), plot.y(mark.at[1])]
-  const width = px(LINE * type)
   if (mark.kind === 'ring')
     return svg('circle', { cx: x, cy: y, r: px(RING * type), class: 'ring', 'stroke-width': px(0.8 * width) })
   if (mark.kind === 'arrow') return arrow([plot.x(mark.from[0]), plot.y(mark.from[1])], [x, y], ARROW * type)

@@ -3,7 +3,7 @@ import { type Label, NAME_LINE, NOTE_LINE, NOTE_SIZE } from './labels'
 import type { Frame } from './plot'
 import { px, type SvgNode, svg } from './svg'
 
-export function drawLabel(label: Label, { type }: Frame): SvgNode {
+export function drawLabel(label: Label, { type }: Pick<Frame, 'type'>): SvgNode {
   const place = { x: px(label.x), 'text-anchor': label.anchor }
   const children: SvgNode[] = []
   let y = label.y
@@ -17,7 +17,7 @@ export function drawLabel(label: Label, { type }: Frame): SvgNode {
     children.push(svg('text', { ...place, y: px(y + 0.82 * type), 'font-size': size, class: 'note' }, label.note))
     y += NOTE_LINE * type
   }
-  return svg('g', { class: `slot-${label.slot}` }, ...children)
+  return svg('g', { class: label.tone }, ...children)
 }
 
 function leader([x1, y1, x2, y2]: readonly [number, number, number, number]): SvgNode {

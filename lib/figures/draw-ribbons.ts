@@ -1,9 +1,10 @@
 /** Era ribbons on the time axis of the long view: one per scenario, named where a word fits. */
 
+import type { Chart, Ribbon } from './chart'
 import type { Era } from './contents'
-import { dashOf } from './draw-curve'
+import { dashOf } from './dash'
+import { within } from './draw-axes'
 import type { Stretch } from './eras'
-import type { Curve } from './long-view'
 import type { Frame, Plot } from './plot'
 import { px, type SvgNode, svg } from './svg'
 import { textWidth } from './text-width'
@@ -14,44 +15,48 @@ const BAR = 1.08
 const ABOVE = 0.16
 const WORD = 0.78
 
-export function ribbonsHeight(curves: readonly Curve[], { type, compact }: Frame): number {
-  const rows = curves.filter(({ eras }) => eras !== null).length
+export function ribbonsHeight({ length: rows }: readonly Ribbon[], { type, compact }: Frame): number {
   return rows === 0 ? 0 : (rows * (compact ? PITCH.compact : PITCH.wide) + 0.5) * type
 }
 
 /** The ribbons hang below the frame's own height. */
-export function drawRibbons(curves: readonly Curve[], plot: Plot, frame: Frame): SvgNode[] {
-  const rows = curves.filter(({ eras }) => eras !== null)
-  if (rows.length === 0) return []
+export function drawRibbons({ ribbons, now, x: axis }: Chart, plot: Plot, frame: Frame): SvgNode[] {
   const pitch = (frame.compact ? PITCH.compact : PITCH.wide) * frame.type
-  const ribbons = rows.map((curve, i) => drawRibbon(curve, frame.height + 0.3 * frame.type + i * pitch, plot, frame))
-  const x = plot.x(0)
-  const now = svg('line', {
+  const drawn = ribbons.map((one, i) => drawRibbon(one, frame.height + 0.3 * frame.type + i * pitch, plot, frame))
+  if (ribbons.length === 0 || now === null || !within(axis, now)) return drawn
+  const x = plot.x(now)
+  const line = svg('line', {
     x1: x,
     x2: x,
     y1: frame.height,
-    y2: px(frame.height + ribbonsHeight(curves, frame)),
+    y2: px(frame.height + ribbonsHeight(ribbons, frame)),
     class: 'now',
   })
-  return [...ribbons, now]
+  return [...drawn, line]
 }
 
-function drawRibbon({ slot, eras, extrapolated }: Curve, y: number, plot: Plot, frame: Frame): SvgNode {
+function drawRibbon({ tone, dash, eras, extrapolated }: Ribbon, y: number, plot: Plot, frame: Frame): SvgNode {
   const { type, id } = frame
   const line = px(ABOVE * type)
   const bar = { y: px(y + 2 * line), height: px(BAR * type) }
-  const spans = eras?.dominant ?? []
+  const spans = eras.dominant
   const last = spans.at(-1)
   const hatched = extrapolated && last && last.to > 0
   return svg(
     'g',
-    { class: `slot-${slot}` },
-    key(slot, bar.y + bar.height / 2, plot, type),
-    ...(eras?.accelerating ?? []).map((span) =>
-      svg('rect', { ...extent(span, plot), y: px(y), height: line, class: 'faster' }),
-    ),
+    { class: tone },
+    key(dash, bar.y + bar.height / 2, plot, type),
+    ...eras.accelerating.map((span) => svg('rect', { ...extent(span, plot), y: px(y), height: line, class: 'faster' })),
     ...spans.map((span) => svg('rect', { ...extent(span, plot), ...bar, class: classOf(span.value) })),
-    ...(hatched ? [svg('rect', { ...extent({ from: 0, to: last.to }, plot), ...bar, fill: `url(#${id}-veil)` })] : []),
+    ...(hatched
+      ? [
+          svg('rect', {
+            ...extent({ from: Math.max(0, spans[0]?.from ?? 0), to: last.to }, plot),
+            ...bar,
+            fill: `url(#${id}-veil)`,
+          }),
+        ]
+      : []),
     ...spans.flatMap((span) => word(span, bar.y, plot, type)),
   )
 }
@@ -66,12 +71,12 @@ function classOf(era: Era): string {
 }
 
 /** The scenario's line in the margin. */
-function key(slot: number, y: number, plot: Plot, type: number): SvgNode {
+function key(place: number, y: number, plot: Plot, type: number): SvgNode {
   const width = px(0.17 * type)
-  const dash = dashOf(slot, width)
-  const place = { x1: px(0.2 * type), x2: px(plot.left - 0.7 * type), y1: px(y), y2: px(y) }
+  const dash = dashOf(place, width)
+  const ends = { x1: px(0.2 * type), x2: px(plot.left - 0.7 * type), y1: px(y), y2: px(y) }
   return svg('line', {
-    ...place,
+    ...ends,
     class: 'curve',
     'stroke-width': width,
     ...(dash === null ? {} : { 'stroke-dasharray': dash }),

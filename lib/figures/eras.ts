@@ -1,6 +1,7 @@
 /** Which component dominates when, and when the expansion accelerates: stretches of time within a window. */
 import type { Contents, Era } from './contents'
-import type { Window } from './window'
+import { remembered } from './remembered'
+import { type Range, valueAt } from './scale'
 
 export interface Stretch<T> {
   readonly from: number
@@ -18,8 +19,9 @@ const SAMPLES = 480
 /** Halvings until a boundary is finer than a hundredth of a pixel. */
 const HALVINGS = 12
 
-export function erasOf(contents: (time: number) => Contents | null, { from, to }: Window): Eras {
-  const times = Array.from({ length: SAMPLES + 1 }, (_, i) => from + ((to - from) * i) / SAMPLES)
+export function erasOf(asked: (time: number) => Contents | null, x: Range): Eras {
+  const contents = remembered(asked)
+  const times = Array.from({ length: SAMPLES + 1 }, (_, i) => valueAt(x, i / SAMPLES))
   const dominant = stretches(times, (time) => contents(time)?.dominant ?? null)
   const accelerating = stretches(times, (time) => (contents(time)?.accelerating ? true : null))
   return { dominant, accelerating }

@@ -1,12 +1,13 @@
-/** Labels at the ends of curves: above the plot, beside it, or next to a cross within it, never one over another. */
-import type { Curve, LongView } from './long-view'
-import { type Box, clearest, obstaclesOf } from './obstacles'
+/** Labels at the ends of curves: above the plot, beside it, or next to a mark within it, never one over another. */
+import type { Chart, Curve } from './chart'
+import { alongLine, type Box, clearest, obstaclesOf, type Spot } from './obstacles'
 import type { Frame, Plot } from './plot'
+import type { Point } from './sample'
 import { spread } from './spread'
 import { fitted, textWidth } from './text-width'
 
 export interface Label {
-  readonly slot: number
+  readonly tone: string
   /** Empty where only the note is set. */
   readonly name: string
   readonly note: string
@@ -24,7 +25,7 @@ export const NOTE_LINE = 1.1
 export const NOTE_SIZE = 0.86
 const GAP = 0.9
 /** A phone has room for so much of a name. */
-const LONGEST_NAME = { wide: 12, compact: 6.5 }
+const LONGEST_NAME = { wide: 13, compact: 6.5 }
 
 export function nameOf(curve: Curve, frame: Frame): string {
   return fitted(curve.name, frame.type, frame.type * (frame.compact ? LONGEST_NAME.compact : LONGEST_NAME.wide))
@@ -38,13 +39,19 @@ export function labelWidth(label: Pick<Label, 'name' | 'note'>, type: number): n
   return Math.max(textWidth(label.name, type), textWidth(label.note, type * NOTE_SIZE))
 }
 
+type Drawn = Pick<Chart, 'curves' | 'spots' | 'now' | 'x'>
+
 /** `free` is where the row above the plot begins, right of the axis title. */
-export function placeLabels(view: LongView, plot: Plot, frame: Frame, free: number): readonly Label[] {
-  const above = topLabels(view.curves, plot, frame, free)
-  const beside = frame.compact ? [] : rightLabels(view.curves, plot, frame)
+export function placeLabels(chart: Drawn, plot: Plot, frame: Frame, free: number): readonly Label[] {
+  const above = topLabels(chart.curves, plot, frame, free)
+  const beside = frame.compact ? [] : rightLabels(chart.curves, plot, frame)
   const placed = [...above, ...beside]
-  const inside = view.curves.flatMap((curve) => insideWishes(curve, frame))
-  for (const wish of inside) placed.push(placeInside(wish, view, plot, frame, placed))
+  const inside = [
+    ...spotWishes(chart, plot, frame),
+    ...chart.curves.flatMap((curve) => insideWishes(curve, plot, frame)),
+  ]
+  const spots = inside.length > 0 ? obstaclesOf(chart, plot) : []
+  for (const wish of inside) placed.push(placeInside(wish, spots, plot, frame, placed))
   return placed
 }
 
@@ -77,7 +84,7 @@ function topLabels(curves: readonly Curve[], plot: Plot, frame: Frame, free: num
     const y = plot.top - 0.9 * type - labelHeight(texts[i] ?? EMPTY, type)
     const foot = plot.top - 0.9 * type + 2
     const leader = [Math.max(x - half, Math.min(x + half, target)), foot, target, plot.top - 2] as const
-    return { slot: curve.slot, ...(texts[i] ?? EMPTY), anchor: 'middle' as const, x, y, leader }
+    return { tone: toneOf(curve), ...(texts[i] ?? EMPTY), anchor: 'middle' as const, x, y, leader }
   })
 }
 
@@ -94,6 +101,8 @@ function sharedRoom(widths: readonly number[], total: number): number {
 }
 
 const EMPTY = { name: '', note: '' }
+
+const toneOf = ({ tone, strong }: Curve): string => (strong ? tone : `${tone} quiet`)
 
 function textsOf(curve: Curve, frame: Frame): { readonly name: string; readonly note: string } {
   return { name: nameOf(curve, frame), note: frame.compact ? '' : curve.note }
@@ -116,56 +125,103 @@ function rightLabels(curves: readonly Curve[], plot: Plot, frame: Frame): Label[
     const [middle, target] = [middles[i] ?? 0, wishes[i]?.middle ?? 0]
     const x = plot.right + 0.9 * frame.type
     const leader = Math.abs(middle - target) > length / 3 ? ([x - 3, middle, plot.right + 2, target] as const) : null
-    return { slot: curve.slot, ...(texts[i] ?? EMPTY), anchor: 'start' as const, x, y: middle - length / 2 + 2, leader }
+    const texted = texts[i] ?? EMPTY
+    return { tone: toneOf(curve), ...texted, anchor: 'start' as const, x, y: middle - length / 2 + 2, leader }
   })
 }
 
 interface InsideWish {
-  readonly slot: number
+  readonly tone: string
   readonly name: string
   readonly note: string
-  readonly time: number
-  readonly scale: number
+  /** Where the label may be, the best places first; `of` is where its curve is. */
+  readonly places: (width: number, height: number) => readonly Place[]
+  /** The point from which a line leads to a label that has no room beside it. */
+  readonly from?: Spot
 }
 
-/** Ends within the plot, and the line of a rip; on a phone also what leaves on the right. */
-function insideWishes(curve: Curve, frame: Frame): InsideWish[] {
+interface Place extends Box {
+  readonly of: number
+}
+
+/** Ends within the plot, the line of a rip, and what is named along its way; on a phone also what leaves on the right. */
+function insideWishes(curve: Curve, plot: Plot, frame: Frame): InsideWish[] {
+  const { finish, asymptote } = curve
+  const [tone, texts] = [toneOf(curve), textsOf(curve, frame)]
   const wishes: InsideWish[] = []
-  const { finish, slot } = curve
-  const own = finish?.edge === 'inside' || (frame.compact && finish?.edge === 'right')
-  if (finish && own) wishes.push({ slot, ...textsOf(curve, frame), time: finish.at[0], scale: finish.at[1] })
-  if (curve.asymptote !== null) {
-    wishes.push({ slot, name: '', note: curve.ending, time: curve.asymptote, scale: Number.POSITIVE_INFINITY })
+  if (finish?.edge === 'along') wishes.push({ tone, ...texts, places: alongCurve(curve, plot, frame) })
+  else if (finish?.edge === 'inside' || (frame.compact && finish?.edge === 'right'))
+    wishes.push({ tone, ...texts, places: besidePoint(finish.at, plot, frame) })
+  if (asymptote !== null) {
+    const places = besidePoint([asymptote.at, Number.POSITIVE_INFINITY], plot, frame)
+    wishes.push({ tone, name: '', note: asymptote.label, places })
   }
   return wishes
 }
 
-function placeInside(wish: InsideWish, view: LongView, plot: Plot, frame: Frame, placed: readonly Label[]): Label {
-  const { type } = frame
-  const [width, height] = [labelWidth(wish, type), labelHeight(wish, type)]
-  const x = plot.x(wish.time)
-  const y = wish.scale === Number.POSITIVE_INFINITY ? plot.top + 0.4 * type : plot.y(wish.scale) - height - 0.3 * type
-  const boxes = candidates(x, y, width, height, type)
-  const taken = placed.map((label) => boxOf(label, type))
-  const best = clearest(boxes, obstaclesOf(view, plot), taken, { ...plot, right: frame.width })
-  return {
-    ...wish,
-    anchor: best.x < x ? 'end' : 'start',
-    x: best.x < x ? best.x + width : best.x,
-    y: best.y,
-    leader: null,
-  }
+function spotWishes({ spots }: Drawn, plot: Plot, frame: Frame): InsideWish[] {
+  const named = spots.filter(({ label }) => label !== '')
+  return named.map(({ tone, at, label }) => {
+    const from = [plot.x(at[0]), plot.y(at[1])] as const
+    return { tone, name: '', note: label, places: besidePoint(at, plot, frame), from }
+  })
+}
+
+function placeInside(wish: InsideWish, spots: readonly Spot[], plot: Plot, frame: Frame, placed: readonly Label[]) {
+  const { tone, name, note } = wish
+  const places = wish.places(labelWidth(wish, frame.type), labelHeight(wish, frame.type))
+  const taken = placed.map((label) => boxOf(label, frame.type))
+  const best = clearest(places, spots, taken, { ...plot, right: frame.width })
+  const anchor: Label['anchor'] = best.x + best.width / 2 < best.of ? 'end' : 'start'
+  const leader = wish.from ? leaderOf(wish.from, best, frame.type) : null
+  return { tone, name, note, anchor, x: anchor === 'end' ? best.x + best.width : best.x, y: best.y, leader }
+}
+
+/** Farther away than this many units of type nobody would know what a label is of. */
+const APART = 1
+
+function leaderOf([x, y]: Spot, box: Box, type: number): Label['leader'] {
+  const nearX = Math.max(box.x, Math.min(box.x + box.width, x))
+  const nearY = Math.max(box.y, Math.min(box.y + box.height, y))
+  return Math.hypot(nearX - x, nearY - y) > APART * type ? [nearX, nearY, x, y] : null
 }
 
 /** A label may be so many steps from its end. */
 const FARTHEST_STEP = 14
 
 /** To the right and to the left of the end, at ever larger distances up or down. */
-function candidates(x: number, y: number, width: number, height: number, type: number): Box[] {
+function besidePoint(at: Point, plot: Plot, { type }: Frame): InsideWish['places'] {
   const steps = Array.from({ length: 2 * FARTHEST_STEP + 1 }, (_, i) => (i % 2 === 0 ? i / 2 : -(i + 1) / 2))
-  return steps.flatMap((step) =>
-    [x + 0.7 * type, x - 0.7 * type - width].map((left) => ({ x: left, y: y - step * 0.8 * type, width, height })),
-  )
+  const of = plot.x(at[0])
+  return (width, height) => {
+    const y = at[1] === Number.POSITIVE_INFINITY ? plot.top + 0.4 * type : plot.y(at[1]) - height - 0.3 * type
+    return steps.flatMap((step) =>
+      [of + 0.7 * type, of - 0.7 * type - width, of - width / 2].map((x) => ({
+        x,
+        y: y - step * 0.8 * type,
+        width,
+        height,
+        of,
+      })),
+    )
+  }
+}
+
+/** Parts of the visible curve at which it may be named, the best first. */
+const PARTS = [0.6, 0.7, 0.5, 0.8, 0.4, 0.3, 0.9, 0.2, 0.1]
+
+/** Close above or below the curve. */
+function alongCurve({ segments }: Curve, plot: Plot, { type }: Frame): InsideWish['places'] {
+  const way = alongLine(segments.flat().map(([x, y]) => [plot.x(x), plot.y(y)] as const))
+  const gap = 0.35 * type
+  return (width, height) =>
+    PARTS.flatMap((part) => {
+      const [of, y] = way[Math.floor(part * (way.length - 1))] ?? [0, 0]
+      const rows = [y - height - gap, y + gap]
+      return rows.flatMap((top) =>
+        [of - width / 2, of + gap, of - width - gap].map((x) => ({ x, y: top, width, height, of: x + width / 2 })),
+      )
+    })
 }
 
 function boxOf(label: Label, type: number): Box {

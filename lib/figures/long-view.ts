@@ -1,118 +1,121 @@
-/** The long view: scale factor against cosmic time, as plain data. Whoever draws it chooses sizes and colours. */
+/** The long view: scale factor against cosmic time, with the eras of each scenario. */
 import type { Solution } from '../solve'
 import { extrapolates } from '../words/beyond'
 import { END_NAMES, endLabel, endsInTime } from '../words/ending'
 import { longViewCaption, longViewText } from './caption'
-import { type Eras, erasOf } from './eras'
-import { type Readings, readingsOf } from './readings'
-import { type Point, sampleCurve } from './sample'
-import { type Entry, type Window, windowOf } from './window'
+import type { Chart, Curve, Mark, Ribbon } from './chart'
+import { erasOf } from './eras'
+import { readingsOf } from './readings'
+import { placesAlong, type Ranges, rounded, type Source, sampleCurve } from './sample'
+import { linearRange } from './scale'
+import { type Entry, type Wanted, type Window, windowOf } from './window'
 
 export type Drawn = Pick<Solution, 'scenario' | 'code' | 'label' | 'origin' | 'end' | 'measures' | 'moments'>
 
-/** What is put where a curve stops. */
-export type Mark =
-  /** Where a history begins or turns: a ring. */
-  | { readonly kind: 'ring'; readonly at: Point }
-  /** Where a history ends: a cross. */
-  | { readonly kind: 'cross'; readonly at: Point }
-  /** Where it leaves the window: an arrow along the curve. */
-  | { readonly kind: 'arrow'; readonly at: Point; readonly from: Point }
+const TIME = { quantity: 'time', label: 'time from now', symbol: '', unit: 'Gyr' }
+const SCALE = { quantity: 'scale', label: 'scale factor', symbol: 'a', unit: '' }
 
-export interface Curve {
-  /** Place in the list of scenarios: hue and dash follow from it. */
-  readonly slot: number
-  readonly code: string
-  readonly name: string
-  /** The visible parts in the order of time. */
-  readonly segments: readonly (readonly Point[])[]
-  readonly marks: readonly Mark[]
-  /** Beside the name: what becomes of it. */
-  readonly note: string
-  /** Where the label belongs; null where nothing of the curve is in the window. */
-  readonly finish: { readonly at: Point; readonly edge: 'top' | 'right' | 'inside' } | null
-  /** The time of a rip within the window, which the curve approaches. */
-  readonly asymptote: number | null
-  /** The ending by name, and its time where it has one. */
-  readonly ending: string
-  /** Null where the contents are not known. */
-  readonly eras: Eras | null
-  /** True where the future is the extrapolation of a law fitted to the past. */
-  readonly extrapolated: boolean
-}
-
-export interface LongView {
-  readonly window: Window
-  readonly curves: readonly Curve[]
-  /** For a cursor: it reads all curves at once. */
-  readonly readings: Readings
-  /** True where a future is the extrapolation of a law fitted to the past. */
-  readonly hatched: boolean
-  readonly caption: string
-  readonly alternative: string
-}
-
-export function longView(entries: readonly Entry<Drawn>[]): LongView {
-  const window = windowOf(entries)
+/** `focus` is the scenario that is drawn strong. */
+export function longView(entries: readonly Entry<Drawn>[], focus = 0, wanted?: Wanted): Chart {
+  const window = windowOf(entries, wanted)
+  const { top, ...range } = window
+  const ranges = { x: range, y: linearRange(0, top) }
   const solutions = entries.map(({ solution }) => solution)
-  const curves = entries.map((entry, slot) => curveOf(entry, slot, window))
+  const curves = entries.map((entry, slot) => curveOf(entry, slot, slot === focus, ranges))
+  const ribbons = entries.flatMap((entry, slot) => ribbonOf(entry, slot, window))
+  const hatched = solutions.some(({ scenario }) => extrapolates(scenario))
   return {
-    window,
+    title: 'The long view',
+    x: { ...TIME, ...range },
+    y: { ...SCALE, ...ranges.y },
     curves,
-    readings: readingsOf(entries, window),
-    hatched: curves.some(({ extrapolated }) => extrapolated),
+    references: [],
+    spots: [],
+    ribbons,
+    now: 0,
+    future: hatched ? 'hatched' : 'tint',
+    readings: readingsOf(
+      entries.map(({ scales }) => scales),
+      range,
+      [0, ...entries.flatMap(({ solution }) => specialTimes(solution))],
+    ),
     caption: longViewCaption(solutions, {
       marks: new Set(curves.flatMap(({ marks }) => marks.map(({ kind }) => kind))),
-      ribbons: curves.some(({ eras }) => eras !== null),
+      ribbons: ribbons.length > 0,
+      logarithmic: range.scaling !== 'linear',
+      future: window.to > 0,
     }),
     alternative: longViewText(solutions, window),
   }
 }
 
-function curveOf(entry: Entry<Drawn>, slot: number, window: Window): Curve {
-  const { solution } = entry
-  const segments = sampleCurve(entry, window)
-  const finish = finishOf(segments, window)
-  const asymptote = asymptoteOf(solution, window)
+function specialTimes({ origin, end }: Pick<Drawn, 'origin' | 'end'>): number[] {
+  return [origin.time, end.time, end.turnaround?.time ?? null].filter((time) => time !== null)
+}
+
+/** Samples of a history; where it begins and ends the scale factor is known without asking. */
+export function sourceOf({ solution, scales }: Entry, x: Ranges['x']): Source {
+  const known = new Map(boundary(solution))
   return {
-    slot,
-    code: solution.code,
-    name: solution.label,
-    segments: segments.map((segment) => segment.map(rounded)),
-    marks: [...startMarks(solution, segments, window), ...endMarks(solution, segments, window)],
-    note: asymptote === null ? noteOf(solution, window) : '',
-    finish,
-    asymptote,
-    ending: endLabel(solution),
-    eras: entry.contents ? erasOf(entry.contents, window) : null,
-    extrapolated: extrapolates(solution.scenario),
+    places: placesAlong(x, [0, ...specialTimes(solution)]),
+    values: (times) => {
+      const found = scales(times)
+      return times.map((time, i) => known.get(time) ?? found[i] ?? null)
+    },
   }
 }
 
-/** Far finer than a screen, and half as long on its way there. */
-function rounded([time, scale]: Point): Point {
-  return [Number(time.toPrecision(6)), Number(scale.toPrecision(6))]
+/** Limits that the history itself may not include. */
+function boundary({ origin, end }: Pick<Drawn, 'origin' | 'end'>): [number, number][] {
+  const points: [number, number][] = []
+  if (origin.time !== null) points.push([origin.time, origin.scale])
+  if (end.time !== null && end.scale !== null) points.push([end.time, end.scale])
+  return points
 }
 
-function noteOf({ end }: Drawn, { to }: Window): string {
+function ribbonOf({ contents, solution }: Entry<Drawn>, slot: number, window: Window): Ribbon[] {
+  if (!contents) return []
+  const extrapolated = extrapolates(solution.scenario)
+  return [{ tone: `slot-${slot}`, dash: slot, eras: erasOf(contents, window), extrapolated }]
+}
+
+function curveOf(entry: Entry<Drawn>, slot: number, strong: boolean, ranges: Ranges): Curve {
+  const { solution } = entry
+  const segments = sampleCurve(sourceOf(entry, ranges.x), ranges)
+  const asymptote = asymptoteOf(solution, ranges)
+  return {
+    tone: `slot-${slot}`,
+    dash: slot,
+    name: solution.label,
+    strong,
+    segments: segments.map((segment) => segment.map(rounded)),
+    marks: [...startMarks(solution, segments, ranges), ...endMarks(solution, segments, ranges)],
+    note: asymptote === null ? noteOf(solution, ranges) : '',
+    finish: finishOf(segments, ranges),
+    asymptote,
+  }
+}
+
+function noteOf({ end }: Drawn, { x }: Ranges): string {
   if (end.kind === 'oscillating' || !endsInTime(end.kind)) return END_NAMES[end.kind]
-  return end.time !== null && end.time <= to ? endLabel({ end }) : `later: ${endLabel({ end })}`
+  return end.time !== null && end.time <= x.to ? endLabel({ end }) : `later: ${endLabel({ end })}`
 }
 
-function asymptoteOf({ end }: Pick<Drawn, 'end'>, { to }: Window): number | null {
-  return end.kind === 'rip' && end.time !== null && end.time <= to ? end.time : null
+function asymptoteOf({ end }: Pick<Drawn, 'end'>, { x }: Ranges): Curve['asymptote'] {
+  const seen = end.kind === 'rip' && end.time !== null && end.time >= x.from && end.time <= x.to
+  return seen ? { at: end.time, label: endLabel({ end }) } : null
 }
 
-function finishOf(segments: Curve['segments'], { to, top }: Window): Curve['finish'] {
+export function finishOf(segments: Curve['segments'], { x, y }: Ranges): Curve['finish'] {
   const at = segments.at(-1)?.at(-1)
   if (!at) return null
-  if (at[1] >= top) return { at, edge: 'top' }
-  return { at, edge: at[0] >= to ? 'right' : 'inside' }
+  if (at[1] >= y.to) return { at, edge: 'top' }
+  return { at, edge: at[0] >= x.to ? 'right' : 'inside' }
 }
 
-function startMarks({ origin }: Drawn, segments: Curve['segments'], window: Window): Mark[] {
+function startMarks({ origin }: Drawn, segments: Curve['segments'], { x, y }: Ranges): Mark[] {
   const marks: Mark[] = []
-  if (origin.time !== null && origin.time >= window.from && origin.scale <= window.top) {
+  if (origin.time !== null && origin.time >= x.from && origin.time <= x.to && origin.scale <= y.to) {
     marks.push({ kind: 'ring', at: [origin.time, origin.scale] })
   }
   const [at, from] = segments[0] ?? []
@@ -121,15 +124,12 @@ function startMarks({ origin }: Drawn, segments: Curve['segments'], window: Wind
   return marks
 }
 
-function endMarks({ end }: Drawn, segments: Curve['segments'], window: Window): Mark[] {
+function endMarks({ end }: Drawn, segments: Curve['segments'], ranges: Ranges): Mark[] {
+  const { x, y } = ranges
   const [from, at] = segments.at(-1)?.slice(-2) ?? []
-  if (!at || !from) return []
-  const asymptote = asymptoteOf({ end }, window)
-  if (asymptote !== null)
-    return [
-      { kind: 'arrow', at, from },
-      { kind: 'cross', at: [asymptote, window.top] },
-    ]
-  const inside = endsInTime(end.kind) && end.time !== null && end.time <= window.to
-  return [inside ? { kind: 'cross', at } : { kind: 'arrow', at, from }]
+  const asymptote = asymptoteOf({ end }, ranges)
+  const cross: Mark[] = asymptote === null ? [] : [{ kind: 'cross', at: [asymptote.at, y.to] }]
+  if (!at || !from) return cross
+  const inside = endsInTime(end.kind) && end.kind !== 'rip' && end.time !== null && end.time <= x.to
+  return [inside ? { kind: 'cross', at } : { kind: 'arrow', at, from }, ...cross]
 }

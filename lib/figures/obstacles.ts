@@ -1,6 +1,7 @@
 /** What a label within the plot must keep clear of. */
-import type { LongView } from './long-view'
-import type { Plot } from './plot'
+import type { Chart } from './chart'
+import { within } from './draw-axes'
+import type { Edges, Plot } from './plot'
 
 export interface Box {
   readonly x: number
@@ -9,22 +10,30 @@ export interface Box {
   readonly height: number
 }
 
-type Spot = readonly [x: number, y: number]
-type Edges = Pick<Plot, 'left' | 'right' | 'top' | 'bottom'>
+export type Spot = readonly [x: number, y: number]
 
 /** Every so many pixels a curve counts as an obstacle. */
 const STEP = 5
 /** Worth of a covered spot of a curve, of another label, of the edge, and of one more pixel away. Tuned by eye. */
 const COST = { curve: 10, label: 400, edge: 800, away: 0.2 }
 
-export function obstaclesOf(view: LongView, plot: Plot): readonly Spot[] {
-  return view.curves.flatMap(({ segments, asymptote }) => [
-    ...segments.flatMap((segment) => along(segment.map(([time, scale]) => [plot.x(time), plot.y(scale)] as const))),
-    ...(asymptote === null ? [] : along([[plot.x(asymptote), plot.top] as const, [plot.x(asymptote), plot.bottom]])),
-  ])
+export function obstaclesOf(
+  { curves, spots, now, x }: Pick<Chart, 'curves' | 'spots' | 'now' | 'x'>,
+  plot: Plot,
+): readonly Spot[] {
+  const uprights = curves.flatMap(({ asymptote }) => (asymptote === null ? [] : [asymptote.at]))
+  if (now !== null && within(x, now)) uprights.push(now)
+  return [
+    ...curves.flatMap(({ segments }) =>
+      segments.flatMap((segment) => alongLine(segment.map(([one, other]) => [plot.x(one), plot.y(other)] as const))),
+    ),
+    ...uprights.flatMap((at) => alongLine([[plot.x(at), plot.top] as const, [plot.x(at), plot.bottom]])),
+    ...spots.map(({ at }) => [plot.x(at[0]), plot.y(at[1])] as const),
+  ]
 }
 
-function along(line: readonly Spot[]): Spot[] {
+/** Points every few pixels. */
+export function alongLine(line: readonly Spot[]): Spot[] {
   return line.flatMap(([x, y], i) => {
     const [nextX, nextY] = line[i + 1] ?? [x, y]
     const steps = Math.max(1, Math.ceil(Math.hypot(nextX - x, nextY - y) / STEP))
@@ -36,18 +45,35 @@ function along(line: readonly Spot[]): Spot[] {
 }
 
 /** The candidate that hides least; of equals the first. */
-export function clearest(boxes: readonly Box[], spots: readonly Spot[], taken: readonly Box[], edges: Edges): Box {
-  const first = boxes[0] as Box
-  const costs = boxes.map((box) => {
-    const covered = spots.filter(([x, y]) => within(box, x, y)).length
+export function clearest<B extends Box>(
+  boxes: readonly B[],
+  spots: readonly Spot[],
+  taken: readonly Box[],
+  edges: Edges,
+): B {
+  const first = boxes[0] as B
+  let [best, least] = [first, Number.POSITIVE_INFINITY]
+  for (const box of boxes) {
     const away = Math.hypot(box.x - first.x, box.y - first.y)
     const overlaps = taken.filter((other) => overlap(box, other)).length
-    return COST.curve * covered + COST.label * overlaps + (outside(box, edges) ? COST.edge : 0) + COST.away * away
-  })
-  return boxes[costs.indexOf(Math.min(...costs))] ?? first
+    const start = COST.label * overlaps + (outside(box, edges) ? COST.edge : 0) + COST.away * away
+    const cost = withCovered(box, spots, start, least)
+    if (cost < least) [best, least] = [box, cost]
+  }
+  return best
 }
 
-function within({ x, y, width, height }: Box, px: number, py: number): boolean {
+/** Adds what a box covers, until that is more than `least` anyway. */
+function withCovered(box: Box, spots: readonly Spot[], start: number, least: number): number {
+  let cost = start
+  for (const [x, y] of spots) {
+    if (cost >= least) return cost
+    if (holds(box, x, y)) cost += COST.curve
+  }
+  return cost
+}
+
+function holds({ x, y, width, height }: Box, px: number, py: number): boolean {
   return px >= x - 2 && px <= x + width + 2 && py >= y - 2 && py <= y + height + 2
 }
 

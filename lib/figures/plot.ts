@@ -1,6 +1,6 @@
 /** From the quantities of a figure to pixels. */
+import { fractionOf, type Range } from './scale'
 import { px } from './svg'
-import type { Window } from './window'
 
 /** What the place of a figure asks for: a wide page, a phone, a slide. */
 export interface Frame {
@@ -15,23 +15,26 @@ export interface Frame {
 }
 
 /** The plot's edges, in pixels from the upper left corner. */
-export interface Plot {
-  readonly left: number
-  readonly right: number
-  readonly top: number
-  readonly bottom: number
-  readonly x: (time: number) => number
-  readonly y: (scale: number) => number
-}
-
-export interface Margins {
+export interface Edges {
   readonly left: number
   readonly right: number
   readonly top: number
   readonly bottom: number
 }
 
-export function plotOf(frame: Frame, margins: Margins, { from, to, top: a }: Window): Plot {
+export interface Plot extends Edges {
+  readonly x: (value: number) => number
+  readonly y: (value: number) => number
+}
+
+/** How much of a frame lies outside the plot, on each side. */
+export type Margins = Edges
+
+export function plotOf(
+  frame: Pick<Frame, 'width' | 'height'>,
+  margins: Margins,
+  axes: { readonly x: Range; readonly y: Range },
+): Plot {
   const [left, top] = [px(margins.left), px(margins.top)]
   const right = px(frame.width - margins.right)
   const bottom = px(frame.height - margins.bottom)
@@ -40,14 +43,20 @@ export function plotOf(frame: Frame, margins: Margins, { from, to, top: a }: Win
     right,
     top,
     bottom,
-    x: (time) => px(left + ((time - from) / (to - from)) * (right - left)),
-    y: (scale) => px(bottom - (scale / a) * (bottom - top)),
+    x: (value) => px(left + fractionOf(axes.x, value) * (right - left)),
+    y: (value) => px(bottom - fractionOf(axes.y, value) * (bottom - top)),
   }
 }
 
-/** The page's widths: a phone, a tablet, a desk or a hall. */
-export const FRAMES: readonly Frame[] = [
+/** The page's widths: a phone, a tablet, a desk or a hall. The long view is low, since it stays in sight. */
+export const LONG_FRAMES: readonly Frame[] = [
   { id: 'narrow', width: 370, height: 262, type: 13, compact: true },
   { id: 'middle', width: 800, height: 330, type: 15, compact: false },
   { id: 'wide', width: 1240, height: 365, type: 15, compact: false },
+]
+
+export const VIEW_FRAMES: readonly Frame[] = [
+  { id: 'narrow', width: 370, height: 310, type: 13, compact: true },
+  { id: 'middle', width: 800, height: 400, type: 15, compact: false },
+  { id: 'wide', width: 1240, height: 460, type: 15, compact: false },
 ]

@@ -1,38 +1,31 @@
-/** What a cursor over the long view reads: every scale factor at the same times across the window. */
-import type { Entry, Window } from './window'
+/** What a cursor over a figure reads: every curve at the same places along the horizontal axis. */
+import { type Range, valueAt } from './scale'
 
 export interface Readings {
-  /** Gyr from now, ascending. */
-  readonly times: readonly number[]
-  /** For each curve its scale factors at these times, null where it is not there; they may lie above the window. */
-  readonly scales: readonly (readonly (number | null)[])[]
+  /** Values of the horizontal quantity, ascending. */
+  readonly places: readonly number[]
+  /** For each curve its values there, null where it has none; they may lie outside the figure. */
+  readonly values: readonly (readonly (number | null)[])[]
 }
 
-/** Together with now, three special times of each of six scenarios, and both edges: 300 at most. */
+type Values = (places: readonly number[]) => readonly (number | null)[]
+
+/** Together with now and three special places of each of six scenarios: 300 at most. */
 const STEPS = 279
 
-export function readingsOf(entries: readonly Entry[], window: Window): Readings {
-  const times = timesOf(entries, window)
+export function readingsOf(curves: readonly Values[], x: Range, special: readonly number[], steps = STEPS): Readings {
+  const even = Array.from({ length: steps + 1 }, (_, i) => valueAt(x, i / steps))
+  const inside = [...even, ...special].filter((place) => place >= x.from && place <= x.to)
+  const places = [...new Set(inside.map((place) => digits(place, 7)))].sort((one, other) => one - other)
   return {
-    times,
-    scales: entries.map(({ scales }) => scales(times).map((scale) => (known(scale) ? digits(scale) : null))),
+    places,
+    values: curves.map((values) => values(places).map((value) => (known(value) ? digits(value, 5) : null))),
   }
 }
 
-function timesOf(entries: readonly Entry[], { from, to }: Window): number[] {
-  const even = Array.from({ length: STEPS + 1 }, (_, i) => from + ((to - from) * i) / STEPS)
-  const special = entries.flatMap(({ solution: { origin, end } }) => [
-    origin.time,
-    end.time,
-    end.turnaround?.time ?? null,
-  ])
-  const inside = [...even, 0, ...special].filter((time) => time !== null && time >= from && time <= to) as number[]
-  return [...new Set(inside.map(digits))].sort((one, other) => one - other)
-}
-
-const known = (scale: number | null): scale is number => scale !== null && Number.isFinite(scale)
+const known = (value: number | null): value is number => value !== null && Number.isFinite(value)
 
 /** As many as a screen can show and a read-out can use. */
-function digits(value: number): number {
-  return Number(value.toPrecision(7))
+function digits(value: number, count: number): number {
+  return Number(value.toPrecision(count))
 }

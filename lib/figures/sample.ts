@@ -1,116 +1,135 @@
-/** Points of a curve where it bends, cut at the edges of the window and thinned to what an eye can see. */
-import type { Entry, Window } from './window'
+/** Points of a curve where it bends, cut at the edges of the figure and thinned to what an eye can see. */
+import { fractionOf, type Range, valueAt } from './scale'
 
-export type Point = readonly [time: number, scale: number]
+export type Point = readonly [x: number, y: number]
+
+export interface Source {
+  /** Values of the horizontal quantity, ascending. */
+  readonly places: readonly number[]
+  /** The vertical quantity there; null where it has no value. */
+  readonly values: (places: readonly number[]) => readonly (number | null)[]
+}
+
+/** The two axes of a figure. */
+export interface Ranges {
+  readonly x: Range
+  readonly y: Range
+}
 
 const EVEN = 200
 const CROWDED = 28
-/** Part of the window over which points crowd towards an origin or an ending. */
+/** Part of the figure over which points crowd towards an origin or an ending. */
 const CROWD = 0.1
-/** Points added where a curve leaves through the upper edge. */
+/** Points added where a curve leaves through an edge. */
 const REFINED = 12
-/** Largest departure of the drawn line from the sampled one, in parts of the window: a fifth of a pixel of a thousand. */
+/** Largest departure of the drawn line from the sampled one, in parts of the figure: a fifth of a pixel of a thousand. */
 const TOLERANCE = 2e-4
 
 /** The visible parts of a curve, each a line without a gap. */
-export function sampleCurve(entry: Entry, window: Window): readonly (readonly Point[])[] {
-  const times = timesOf(entry, window)
-  const first = pointsAt(entry, times)
-  const refined = pointsAt(entry, refine(first, window.top))
-  return cut(merge(first, refined), window.top).map((segment) => thin(segment, window))
+export function sampleCurve({ places, values }: Source, ranges: Ranges): readonly (readonly Point[])[] {
+  const first = samples(places, values)
+  const refined = samples(refine(first, ranges.y), values)
+  return cut(merge(first, refined), ranges.y).map((segment) => thin(segment, ranges))
 }
 
-function timesOf({ solution }: Entry, { from, to }: Window): number[] {
-  const span = to - from
-  const even = Array.from({ length: EVEN + 1 }, (_, i) => from + (span * i) / EVEN)
-  const special = [solution.origin.time, solution.end.time, solution.end.turnaround?.time ?? null]
-  const crowded = special.flatMap((time) => (time === null ? [] : around(time, CROWD * span)))
-  const all = [...even, ...crowded, 0].filter((time) => time >= from && time <= to)
-  return [...new Set(all)].sort((one, other) => one - other)
+/** Even steps along the axis, crowded about the special places, those included. */
+export function placesAlong(x: Range, special: readonly number[]): readonly number[] {
+  const even = Array.from({ length: EVEN + 1 }, (_, i) => i / EVEN)
+  const crowded = special.flatMap((place) => around(fractionOf(x, place)))
+  const fractions = [...even, ...crowded].filter((part) => part >= 0 && part <= 1)
+  const places = [...fractions.map((part) => valueAt(x, part)), ...special]
+  return [...new Set(places)].filter((place) => place >= x.from && place <= x.to).sort((one, other) => one - other)
 }
 
 /** Cubic steps: even steps of a where a goes like a root of the time. */
-function around(time: number, reach: number): number[] {
-  const steps = Array.from({ length: CROWDED }, (_, i) => reach * ((i + 1) / CROWDED) ** 3)
-  return [time, ...steps.flatMap((step) => [time - step, time + step])]
+function around(part: number): number[] {
+  const steps = Array.from({ length: CROWDED }, (_, i) => CROWD * ((i + 1) / CROWDED) ** 3)
+  return steps.flatMap((step) => [part - step, part + step])
 }
 
-function pointsAt({ solution, scales }: Entry, times: readonly number[]): Sample[] {
-  const values = scales(times)
-  const known = new Map(boundary(solution))
-  return times.map((time, i) => [time, known.get(time) ?? finite(values[i])])
+type Sample = readonly [x: number, y: number | null]
+
+function samples(places: readonly number[], values: Source['values']): Sample[] {
+  const found = values(places)
+  return places.map((place, i) => [place, finite(found[i])])
 }
 
-const finite = (scale: number | null | undefined) => (Number.isFinite(scale) ? (scale ?? null) : null)
+const finite = (value: number | null | undefined) => (Number.isFinite(value) ? (value ?? null) : null)
 
-/** Where the scale factor is known without asking: a limit that the history itself may not include. */
-function boundary({ origin, end }: Entry['solution']): Point[] {
-  const points: Point[] = []
-  if (origin.time !== null) points.push([origin.time, origin.scale])
-  if (end.time !== null && end.scale !== null) points.push([end.time, end.scale])
-  return points
+/** Below the figure, within it, above it; none where there is no value. */
+type Side = -1 | 0 | 1 | null
+
+function sideOf(value: number | null, y: Range): Side {
+  if (value === null) return null
+  if (y.scaling === 'log' && value <= 0) return -1
+  return value > y.to ? 1 : value < y.from ? -1 : 0
 }
 
-type Sample = readonly [time: number, scale: number | null]
-
-function refine(samples: readonly Sample[], top: number): number[] {
-  return samples.flatMap(([time, scale], i) => {
-    const next = samples[i + 1]
-    if (!next || above(scale, top) === above(next[1], top)) return []
-    return Array.from({ length: REFINED }, (_, k) => time + ((next[0] - time) * (k + 1)) / (REFINED + 1))
+function refine(found: readonly Sample[], y: Range): number[] {
+  return found.flatMap(([place, value], i) => {
+    const next = found[i + 1]
+    if (!next || sideOf(value, y) === sideOf(next[1], y)) return []
+    return Array.from({ length: REFINED }, (_, k) => place + ((next[0] - place) * (k + 1)) / (REFINED + 1))
   })
-}
-
-function above(scale: number | null, top: number): boolean {
-  return scale === null || scale > top
 }
 
 function merge(one: readonly Sample[], other: readonly Sample[]): Sample[] {
   return [...one, ...other].sort((left, right) => left[0] - right[0])
 }
 
-/** Splits where the curve is above the window or not there; a part that leaves through the upper edge ends upon it. */
-function cut(samples: readonly Sample[], top: number): Point[][] {
+/** Splits where the curve is outside or not there; a part that leaves through an edge ends upon it. */
+function cut(found: readonly Sample[], y: Range): Point[][] {
   const segments: Point[][] = []
   let open: Point[] = []
   let before: Sample | undefined
-  for (const sample of samples) {
-    const [time, scale] = sample
-    const crossing = before && edge(before, sample, top)
+  for (const sample of found) {
+    const crossing = before && edge(before, sample, y)
     if (crossing) open.push(crossing)
-    if (above(scale, top)) {
+    if (sideOf(sample[1], y) === 0) open.push(sample as Point)
+    else {
       if (open.length > 1) segments.push(open)
       open = []
-    } else open.push([time, scale as number])
+    }
     before = sample
   }
   if (open.length > 1) segments.push(open)
   return segments
 }
 
-function edge([t1, a1]: Sample, [t2, a2]: Sample, top: number): Point | null {
-  if (a1 === null || a2 === null || a1 > top === a2 > top) return null
-  return [t1 + ((t2 - t1) * (top - a1)) / (a2 - a1), top]
+/** Where the line between two samples, one of them inside, meets an edge. */
+function edge([x1, y1]: Sample, [x2, y2]: Sample, y: Range): Point | null {
+  const [one, other] = [sideOf(y1, y), sideOf(y2, y)]
+  if (y1 === null || y2 === null || one === other || (one !== 0 && other !== 0)) return null
+  const at = (one === 0 ? other : one) === 1 ? y.to : y.from
+  const [low, high] = [fractionOf(y, y1), fractionOf(y, y2)]
+  const part = (fractionOf(y, at) - low) / (high - low)
+  return [x1 + (x2 - x1) * (Number.isFinite(part) ? part : one === 0 ? 0 : 1), at]
 }
 
 /** Douglas & Peucker 1973, Cartographica 10, 112: drops points that lie on the line through their neighbours. */
-function thin(points: readonly Point[], window: Window): Point[] {
-  const [first, last] = [points[0], points.at(-1)]
-  if (!first || !last || points.length < 3) return [...points]
-  const distances = points.map((point) => distance(point, first, last, window))
-  const worst = distances.indexOf(Math.max(...distances))
-  if ((distances[worst] ?? 0) <= TOLERANCE) return [first, last]
-  return [...thin(points.slice(0, worst + 1), window).slice(0, -1), ...thin(points.slice(worst), window)]
+function thin(points: readonly Point[], { x, y }: Ranges): Point[] {
+  const parts = points.map(([one, other]) => [fractionOf(x, one), fractionOf(y, other)] as const)
+  const kept = (from: number, to: number): number[] => {
+    const chord = [parts[from], parts[to]] as const
+    let [worst, most] = [from, TOLERANCE]
+    for (let i = from + 1; i < to; i++) {
+      const off = distance(parts[i] as Point, chord[0] as Point, chord[1] as Point)
+      if (off > most) [worst, most] = [i, off]
+    }
+    return worst === from ? [from] : [...kept(from, worst), ...kept(worst, to)]
+  }
+  const last = points.length - 1
+  return [...kept(0, last), last].map((i) => points[i] as Point)
 }
 
-/** From the point to the chord, both axes in parts of the window. */
-function distance(point: Point, first: Point, last: Point, { from, to, top }: Window): number {
-  const [x, y, dx, dy] = [
-    (point[0] - first[0]) / (to - from),
-    (point[1] - first[1]) / top,
-    (last[0] - first[0]) / (to - from),
-    (last[1] - first[1]) / top,
-  ]
+/** From a point to a chord. */
+function distance(point: Point, first: Point, last: Point): number {
+  const [x, y, dx, dy] = [point[0] - first[0], point[1] - first[1], last[0] - first[0], last[1] - first[1]]
   const length = Math.hypot(dx, dy)
   return length === 0 ? Math.hypot(x, y) : Math.abs(x * dy - y * dx) / length
+}
+
+/** Far finer than a screen, and half as long on its way there. */
+export function rounded([x, y]: Point): Point {
+  return [Number(x.toPrecision(6)), Number(y.toPrecision(6))]
 }

@@ -37,6 +37,11 @@ export function signed(text: string): string {
   return text.startsWith(MINUS) || /^[0.]+$/.test(text) ? text : `+${text}`
 }
 
+/** A power of ten, or a few of them, to one digit. */
+export function powerOfTen(value: number): string {
+  return scientific(value, 1).replace(`1${THIN}×${THIN}`, '')
+}
+
 function scientific(value: number, digits: number): string {
   const [mantissa, exponent] = value.toExponential(digits - 1).split('e') as [string, string]
   const power = [...exponent.replace('+', '')].map((sign) => SUPERSCRIPTS[sign]).join('')

@@ -2,9 +2,8 @@
 import fc from 'fast-check'
 import { expect, it } from 'vitest'
 import { explorer } from '../../lib/answers/explorer'
-import { drawLongView } from '../../lib/figures/draw-long-view'
-import { FRAMES } from '../../lib/figures/plot'
 import { serialize } from '../../lib/figures/svg'
+import { VIEWS } from '../../lib/figures/views'
 
 /** As people type them: six decimals. */
 const between = (min: number, max: number) => fc.double({ min, max, noNaN: true }).map((x) => Number(x.toFixed(6)))
@@ -31,16 +30,36 @@ const code = fc
   )
   .map(([h0, matter, closure, light, eos]) => `h0:${h0},matter:${matter}${closure}${light}${eos}`)
 
-it('shows every legal scenario', { timeout: 120_000 }, () => {
+/** Every view, in all that it shows, against all that it knows. */
+const place = fc
+  .constantFrom(
+    ...VIEWS.flatMap(({ key: view, shows }) =>
+      shows.flatMap(({ key: show, by, compare }) =>
+        by.flatMap((axis) => ['value', ...compare].map((how) => ({ view, show, by: axis, compare: how }))),
+      ),
+    ),
+  )
+  .chain((view) =>
+    fc.record({ time: fc.constantFrom('log', ''), galaxy: wild(0, 1e4, [0.1, 4]).map(String) }).map((more) => ({
+      ...view,
+      ...more,
+    })),
+  )
+
+it('shows every legal scenario in every view', { timeout: 240_000 }, () => {
   fc.assert(
-    fc.property(fc.array(code, { minLength: 1, maxLength: 3 }), (codes) => {
-      const view = explorer({ codes, keys: new Map() })
+    fc.property(fc.array(code, { minLength: 1, maxLength: 3 }), place, (codes, keys) => {
+      const view = explorer({ codes, keys: new Map(Object.entries(keys)) })
       for (const problem of view.refusal?.problems ?? []) expect(problem.message).toContain('no solution')
-      const { figure, ...words } = view
+      const { long, panel, ...words } = view
       expect(JSON.stringify(words)).not.toMatch(/NaN|undefined|Infinity/)
-      for (const frame of FRAMES) expect(serialize(drawLongView(figure, frame))).not.toMatch(/NaN|undefined|Infinity/)
-      expect(figure.curves.every(({ segments }) => segments.length > 0)).toBe(true)
+      expect(JSON.stringify([panel.notes, panel.tabs, panel.choices])).not.toMatch(/NaN|undefined|Infinity/)
+      for (const { pictures } of [long.figure, panel.figure])
+        for (const { node } of pictures) expect(serialize(node)).not.toMatch(/NaN|undefined|Infinity/)
+      for (const { x, y } of [long.figure, panel.figure])
+        for (const { from, to } of [x, y]) expect(to).toBeGreaterThan(from)
+      expect(long.figure.curves).toHaveLength(view.scenarios.length)
     }),
-    { numRuns: 40 },
+    { numRuns: 60 },
   )
 })

@@ -14,7 +14,8 @@ describe('the explorer', () => {
     const view = open()
     expect(view).toMatchObject({ title: DEMO.title, refusal: null, place: { focus: 0, theme: null } })
     expect(view.scenarios).toHaveLength(DEMO.codes.length)
-    expect(view.figure.curves.every(({ eras }) => eras !== null)).toBe(true)
+    expect(view.long.figure.curves).toHaveLength(DEMO.codes.length)
+    expect(view.long.figure.pictures).toHaveLength(3)
   })
 
   it('tells ages to two decimals', () => {

@@ -1,11 +1,12 @@
 import { describe, expect, it } from 'vitest'
-import { drawLongView } from '../../lib/figures/draw-long-view'
+import { drawChart } from '../../lib/figures/draw-chart'
 import { type Label, labelHeight, labelWidth, placeLabels } from '../../lib/figures/labels'
-import { longView } from '../../lib/figures/long-view'
-import { FRAMES, type Frame, plotOf } from '../../lib/figures/plot'
+import { longView, sourceOf } from '../../lib/figures/long-view'
+import { LONG_FRAMES as FRAMES, type Frame, plotOf } from '../../lib/figures/plot'
 import { sampleCurve } from '../../lib/figures/sample'
+import { linearRange } from '../../lib/figures/scale'
 import { serialize } from '../../lib/figures/svg'
-import { windowOf } from '../../lib/figures/window'
+import { type Entry, type Window, windowOf } from '../../lib/figures/window'
 import * as universes from './universes'
 
 const { bounce, deSitter, einsteinDeSitter, flatLambda, milne, phantom, sinking } = universes
@@ -17,6 +18,11 @@ const SETS = {
   crunches: [0.1, 0.12, 0.5, 0.7, 1, 2].map((sink) => sinking(sink, `Sink ${sink}`)),
   'one of a thousand Gyr beside one of one': [flatLambda(0.3, 'slow', 1000), flatLambda(0.3, 'fast', 1)],
   'without a beginning': [deSitter()],
+}
+
+/** The visible parts of a curve. */
+function partsOf(entry: Entry, { top, ...x }: Window) {
+  return sampleCurve(sourceOf(entry, x), { x, y: linearRange(0, top) })
 }
 
 describe('the shared window', () => {
@@ -47,7 +53,7 @@ describe('the shared window', () => {
 describe('a sampled curve', () => {
   it.each(SIX.map((entry) => [entry.solution.label, entry] as const))('%s lies on its closed form', (_, entry) => {
     const window = windowOf(SIX)
-    const points = sampleCurve(entry, window).flat()
+    const points = partsOf(entry, window).flat()
     const exact = entry.scales(points.map(([time]) => time))
     points.forEach(([time, scale], i) => {
       const limit = [entry.solution.origin.time, entry.solution.end.time].includes(time)
@@ -60,7 +66,7 @@ describe('a sampled curve', () => {
     '%s follows it between points too',
     (_, entry) => {
       const window = windowOf(SIX)
-      for (const segment of sampleCurve(entry, window)) {
+      for (const segment of partsOf(entry, window)) {
         segment.slice(1).forEach(([to, high], i) => {
           const [from, low] = segment[i] ?? [to, high]
           const time = (from + to) / 2
@@ -75,16 +81,44 @@ describe('a sampled curve', () => {
   )
 
   it('comes in parts where it leaves through the top and returns', () => {
-    const parts = sampleCurve(sinking(), { from: -10, to: 60, top: 1.3 })
+    const parts = partsOf(sinking(), { ...linearRange(-10, 60), top: 1.3 })
     expect(parts).toHaveLength(2)
     expect(parts.map((part) => part.at(0)?.[1])).toEqual([0, 1.3])
     expect(parts.map((part) => part.at(-1)?.[1])).toEqual([1.3, 0])
   })
 
   it('draws the contraction before a bounce', () => {
-    const [first] = sampleCurve(bounce(), windowOf([bounce()]))[0] ?? []
+    const [first] = partsOf(bounce(), windowOf([bounce()]))[0] ?? []
     expect(first?.[0]).toBeLessThan(-10)
     expect(first?.[1]).toBeGreaterThan(bounce().solution.origin.scale)
+  })
+})
+
+describe('a range of one’s own', () => {
+  const three = [flatLambda(), sinking(), phantom()]
+
+  it('shows what lies in it, with marks of that alone', () => {
+    const view = longView(three, 0, { time: null, from: -5, to: 8 })
+    expect([view.x.from, view.x.to]).toEqual([-5, 8])
+    for (const { segments, marks } of view.curves) {
+      for (const [time] of segments.flat()) expect(time >= -5 && time <= 8).toBe(true)
+      expect(marks.map(({ kind }) => kind)).toEqual(['arrow', 'arrow'])
+    }
+    expect(view.y.to).toBeLessThan(5)
+  })
+
+  it('may lie where nothing is left', () => {
+    const text = serialize(drawChart(longView([sinking()], 0, { time: null, from: 900, to: 1000 }), FRAMES[0] as Frame))
+    expect(text).not.toMatch(/NaN|Infinity|undefined/)
+  })
+
+  it('has time run logarithmically both ways, with now and every ending in it', () => {
+    const { x, ribbons, curves } = longView(three, 0, { time: 'log', from: null, to: null })
+    expect(x.scaling).toBe('signed-log')
+    expect(x.from).toBeLessThan(flatLambda().solution.origin.time ?? 0)
+    for (const { solution } of [sinking(), phantom()]) expect(x.to).toBeGreaterThan(solution.end.time ?? 0)
+    expect(curves.map(({ strong }) => strong)).toEqual([true, false, false])
+    expect(ribbons).toEqual([])
   })
 })
 
@@ -107,7 +141,7 @@ describe('labels', () => {
 
   it.each(cases)('do not collide and stay on the sheet: %s, %s', (_, __, set, frame) => {
     const view = longView(set)
-    const plot = plotOf(frame, { left: 36, right: frame.compact ? 8 : 140, top: 55, bottom: 42 }, view.window)
+    const plot = plotOf(frame, { left: 36, right: frame.compact ? 8 : 140, top: 55, bottom: 42 }, view)
     const boxes = placeLabels(view, plot, frame, plot.left + 100).map((label) => boxOf(label, frame))
     boxes.forEach((one, i) => {
       expect(one.left).toBeGreaterThanOrEqual(0)
@@ -131,7 +165,7 @@ describe('the drawing', () => {
   it('has no inline styles, no NaN, and says what it shows', () => {
     for (const frame of FRAMES) {
       const view = longView(SETS.demo)
-      const text = serialize(drawLongView(view, frame))
+      const text = serialize(drawChart(view, frame))
       expect(text).not.toMatch(/style=|NaN|Infinity|undefined/)
       expect(text).toContain('role="img"')
       expect(view.alternative).toContain('Steady light: begins in a Big Bang')
@@ -139,7 +173,7 @@ describe('the drawing', () => {
   })
 
   it('escapes what a person typed', () => {
-    const text = serialize(drawLongView(longView([flatLambda(0.3, '<b>"&')]), FRAMES[2] as Frame))
+    const text = serialize(drawChart(longView([flatLambda(0.3, '<b>"&')]), FRAMES[2] as Frame))
     expect(text).not.toContain('<b>')
     expect(text).toContain('&lt;b&gt;')
   })
@@ -148,9 +182,9 @@ describe('the drawing', () => {
     const followed = sinking(0.2, 'one', { eos: 'cpl', law: { w0: -0.6, wa: -1.6 } })
     const held = sinking(0.2, 'one', { eos: 'cpl', law: { w0: -0.6, wa: -1.6 }, beyond: 'hold' })
     expect(longView([followed])).toMatchObject({
-      hatched: true,
+      future: 'hatched',
       caption: expect.stringContaining('Hatched: one follows'),
     })
-    expect([longView([held]).hatched, longView([flatLambda()]).hatched]).toEqual([false, false])
+    expect([longView([held]).future, longView([flatLambda()]).future]).toEqual(['tint', 'tint'])
   })
 })

@@ -1,0 +1,181 @@
+/** The horizontal axes of views: every quantity against which the others can be drawn. */
+
+import { eventAtConformal, isEvent } from '../history/event'
+import { type Missing, missing } from '../measures/outcome'
+import { columnNamed } from '../quantities/columns'
+import { type Instant, instantAt, instantOf, type Variable } from '../quantities/instant'
+import type { Solution } from '../solve'
+import { hubbleLengthGly } from '../units'
+import type { Axis } from './chart'
+import type { Range } from './scale'
+
+export interface Horizontal {
+  readonly key: string
+  /** In a choice. */
+  readonly word: string
+  readonly quantity: Pick<Axis, 'quantity' | 'label' | 'symbol' | 'unit'>
+  /** Where today lies. */
+  readonly now: number
+  /** Which way the future lies. */
+  readonly future: 'right' | 'none'
+  instant(solution: Solution, value: number): Instant | Missing
+  /** Where an instant lies on the axis. */
+  place(solution: Solution, instant: Instant): number
+  /** What is shown of it unless someone asks for a range: the past alone, or the future too. */
+  range(solutions: readonly Solution[], whole: boolean): Range
+}
+
+// Numbers of ranges are tuned by eye.
+/** Future in units of the past, along even and along logarithmic axes. */
+const FUTURE = { linear: 1.6, log: 100 }
+const ETERNAL_PAST = 1.4
+const MARGIN = 1.02
+
+const columnOf = (key: string, symbol?: string): Horizontal['quantity'] => {
+  const column = columnNamed(key)
+  if (!column) throw new Error(`there is no column ${key}`)
+  return { quantity: key, label: column.label, symbol: symbol ?? column.symbol, unit: column.unit }
+}
+
+const by =
+  (variable: Variable, sign = 1) =>
+  (solution: Solution, value: number) =>
+    sign * value > LEAST[variable] ? instantAt(solution, variable, sign * value) : missing('there is no such instant')
+
+/** What must lie below a value. */
+const LEAST: Readonly<Record<Variable, number>> = {
+  z: -1,
+  scale: 0,
+  time: Number.NEGATIVE_INFINITY,
+  age: Number.NEGATIVE_INFINITY,
+}
+const timeOf = (_: Solution, { time }: Instant) => time
+const scaleOf = (_: Solution, { scale }: Instant) => scale
+const redshiftOf = (_: Solution, { redshift }: Instant) => redshift
+
+const linear = (from: number, to: number): Range => ({ scaling: 'linear', from, to, linear: 1 })
+const log = (from: number, to: number): Range => ({ scaling: 'log', from, to, linear: 1 })
+const signedLog = (from: number, to: number, even: number): Range => ({ scaling: 'signed-log', from, to, linear: even })
+
+const pastOf = (solutions: readonly Solution[]): number =>
+  Math.max(
+    ...solutions.map(({ origin, measures }) =>
+      origin.time === null ? ETERNAL_PAST * (measures.hubbleTime.value ?? 1) : -origin.time,
+    ),
+  )
+
+/** The last ending, where it comes soon enough to be seen. */
+function futureOf(solutions: readonly Solution[], past: number, share: number): number {
+  const ends = solutions.map(({ end }) => end.time ?? Number.POSITIVE_INFINITY)
+  const last = Math.max(...ends) * MARGIN
+  return last < 2 * share * past ? last : share * past
+}
+
+const timeRange = (solutions: readonly Solution[], whole: boolean): Range => {
+  const past = pastOf(solutions)
+  return linear(-past * (whole ? MARGIN : 1), whole ? futureOf(solutions, past, FUTURE.linear) : 0)
+}
+
+const logTimeRange = (solutions: readonly Solution[], whole: boolean): Range => {
+  const past = pastOf(solutions)
+  const even = 10 ** Math.round(Math.log10(0.07 * past))
+  return signedLog(-past * MARGIN, whole ? futureOf(solutions, past, FUTURE.log) : 0, even)
+}
+
+/** All of conformal time where it is finite. */
+function conformalRange(solutions: readonly Solution[]): Range {
+  const gly = ({ scenario }: Solution) => hubbleLengthGly(scenario.h0)
+  const pasts = solutions.map((one) => one.history.past.conformal.total * gly(one))
+  const past = Math.max(...pasts.map((total) => (Number.isFinite(total) ? total : 40)))
+  const futures = solutions.map(({ measures }) => measures.eventHorizon.value ?? Number.POSITIVE_INFINITY)
+  return linear(-past * MARGIN, Math.min(2 * past, Math.max(...futures) * MARGIN))
+}
+
+export const HORIZONTALS: readonly Horizontal[] = [
+  {
+    key: 'time',
+    word: 'time',
+    quantity: columnOf('time', ''),
+    now: 0,
+    future: 'right',
+    instant: by('time'),
+    place: timeOf,
+    range: timeRange,
+  },
+  {
+    key: 'logtime',
+    word: 'time, logarithmic',
+    quantity: columnOf('time', ''),
+    now: 0,
+    future: 'right',
+    instant: by('time'),
+    place: timeOf,
+    range: logTimeRange,
+  },
+  {
+    key: 'lookback',
+    word: 'lookback time',
+    quantity: columnOf('lookback'),
+    now: 0,
+    future: 'none',
+    instant: by('time', -1),
+    place: (_, { time }) => -time,
+    range: (solutions) => linear(0, pastOf(solutions)),
+  },
+  {
+    key: 'scale',
+    word: 'scale factor',
+    quantity: columnOf('scale'),
+    now: 1,
+    future: 'right',
+    instant: by('scale'),
+    place: scaleOf,
+    range: (_, whole) => linear(0, whole ? 3 : 1),
+  },
+  {
+    key: 'logscale',
+    word: 'scale factor, logarithmic',
+    quantity: columnOf('scale'),
+    now: 1,
+    future: 'right',
+    instant: by('scale'),
+    place: scaleOf,
+    range: (_, whole) => (whole ? log(1e-5, 100) : log(1e-3, 1)),
+  },
+  {
+    key: 'redshift',
+    word: 'redshift',
+    quantity: columnOf('redshift'),
+    now: 0,
+    future: 'none',
+    instant: by('z'),
+    place: redshiftOf,
+    range: () => linear(0, 6),
+  },
+  {
+    key: 'logredshift',
+    word: 'redshift, logarithmic in 1 + z',
+    quantity: columnOf('redshift'),
+    now: 0,
+    future: 'none',
+    instant: by('z'),
+    place: redshiftOf,
+    // ln(1 + z) is the signed logarithm with a linear part of 1.
+    range: () => signedLog(0, 1100, 1),
+  },
+  {
+    key: 'conformal',
+    word: 'conformal time',
+    quantity: { quantity: 'conformal', label: 'conformal time from now', symbol: 'c (η − η_0)', unit: 'Gly' },
+    now: 0,
+    future: 'right',
+    instant: (solution, value) => {
+      const event = eventAtConformal(solution.history, value / hubbleLengthGly(solution.scenario.h0))
+      return isEvent(event) ? instantOf(solution, event) : missing(event.because)
+    },
+    place: ({ scenario }, { conformal }) => conformal * hubbleLengthGly(scenario.h0),
+    range: conformalRange,
+  },
+]
+
+export const horizontalNamed = (key: string): Horizontal | undefined => HORIZONTALS.find((one) => one.key === key)

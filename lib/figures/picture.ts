@@ -1,0 +1,55 @@
+/** A figure as the page gets it: drawn for its widths, and what a cursor over it needs. */
+import type { Axis, Chart } from './chart'
+import { drawChart, heightOfChart, plotOfChart } from './draw-chart'
+import type { Edges, Frame } from './plot'
+import type { Readings } from './readings'
+import type { SvgNode } from './svg'
+
+export interface Picture {
+  /** Id of the frame. */
+  readonly frame: string
+  readonly width: number
+  readonly height: number
+  /** Of the plot within the drawing. */
+  readonly plot: Edges
+  readonly node: SvgNode
+}
+
+export interface Shown {
+  readonly title: string
+  readonly x: Axis
+  readonly y: Axis
+  readonly now: number | null
+  readonly curves: readonly { readonly tone: string; readonly name: string }[]
+  readonly readings: Readings
+  readonly pictures: readonly Picture[]
+  readonly caption: string
+  readonly alternative: string
+}
+
+/** `prefix` keeps the ids of several figures on one page apart. */
+export function shownOf(chart: Chart, frames: readonly Frame[], prefix: string, className = ''): Shown {
+  const { title, x, y, now, curves, readings, caption, alternative } = chart
+  return {
+    title,
+    x,
+    y,
+    now,
+    curves: curves.map(({ tone, name }) => ({ tone, name })),
+    readings,
+    pictures: frames.map((frame) => pictureOf(chart, frame, prefix, className)),
+    caption,
+    alternative,
+  }
+}
+
+function pictureOf(chart: Chart, frame: Frame, prefix: string, className: string): Picture {
+  const { left, right, top, bottom } = plotOfChart(chart, frame)
+  return {
+    frame: frame.id,
+    width: frame.width,
+    height: heightOfChart(chart, frame),
+    plot: { left, right, top, bottom },
+    node: drawChart(chart, { ...frame, id: `${prefix}-${frame.id}` }, className),
+  }
+}

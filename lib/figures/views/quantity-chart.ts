@@ -1,0 +1,141 @@
+/** One quantity of every scenario against another: as it is, or compared with the scenario in focus. */
+import { isMissing, type Missing } from '../../measures/outcome'
+import { type Instant, isInstant } from '../../quantities/instant'
+import type { Solution } from '../../solve'
+import { extrapolates } from '../../words/beyond'
+import { capital } from '../../words/sentence'
+import type { Axis, Chart, Curve, Reference } from '../chart'
+import { finishOf } from '../long-view'
+import { readingsOf } from '../readings'
+import { placesAlong, type Ranges, rounded, sampleCurve } from '../sample'
+import type { Range } from '../scale'
+import { spanOf } from '../span'
+import { fitted } from '../text-width'
+import { alternativeOf, futureOf } from './describe'
+import { type Asked, focusOf, rangeOf } from './view'
+
+/** A vertical quantity. */
+export interface Vertical {
+  readonly quantity: string
+  readonly label: string
+  readonly symbol: string
+  readonly unit: string
+  readonly value: (solution: Solution, instant: Instant) => number | Missing
+  /** Seen only along a line of sight: the horizontal axis stops today. */
+  readonly past: boolean
+  /** A value that divides, as q = 0. */
+  readonly divide?: Reference
+  /** False where a logarithm would make no sense. */
+  readonly logarithmic: boolean
+}
+
+export type Values = (places: readonly number[]) => readonly (number | null)[]
+
+const STEPS = 240
+
+export function quantityChart(asked: Asked, vertical: Vertical): Chart {
+  const { solutions, by, focus, compare } = asked
+  const x = rangeOf(asked, !vertical.past)
+  const all = solutions.map((one) => compared(asked, vertical, one))
+  const readings = readingsOf(all, x, [by.now], STEPS)
+  const divide = dividerOf(asked, vertical)
+  const today = all.flatMap((values) => values([by.now]))
+  const log = compare === 'value' && vertical.logarithmic && x.scaling !== 'linear'
+  const y = spanOf(readings.values.flat(), steadyOf(by.now >= x.from && by.now <= x.to ? today : [], divide), log)
+  const axes = { x: { ...by.quantity, ...x }, y: { ...titled(asked, vertical), ...y } }
+  const curves = all.map((values, slot) =>
+    curveOf(
+      values,
+      { x, y },
+      { tone: `slot-${slot}`, dash: slot, name: solutions[slot]?.label ?? '', strong: slot === focus },
+    ),
+  )
+  return {
+    title: capital(vertical.label),
+    ...axes,
+    curves,
+    references: divide && divide.at > y.from && divide.at < y.to ? [divide] : [],
+    spots: [],
+    ribbons: [],
+    now: by.now,
+    future: futureOf(
+      by,
+      solutions.some(({ scenario }) => extrapolates(scenario)),
+    ),
+    readings,
+    caption: captionOf(asked, axes.x, axes.y),
+    alternative: alternativeOf(axes.x, axes.y, curves, readings),
+  }
+}
+
+function compared(asked: Asked, vertical: Vertical, solution: Solution): Values {
+  const own = valuesOf(asked, vertical, solution)
+  const { compare } = asked
+  if (compare === 'value') return own
+  const reference = valuesOf(asked, vertical, focusOf(asked))
+  return (places) => {
+    const base = reference(places)
+    return own(places).map((value, i) => {
+      const other = base[i] ?? null
+      if (value === null || other === null) return null
+      if (compare === 'difference') return value - other
+      return other === 0 ? null : value / other
+    })
+  }
+}
+
+function valuesOf({ by }: Asked, { value }: Vertical, solution: Solution): Values {
+  return (places) =>
+    places.map((place) => {
+      const instant = by.instant(solution, place)
+      if (!isInstant(instant)) return null
+      const found = value(solution, instant)
+      return isMissing(found) ? null : found
+    })
+}
+
+/** Today's values are seen whatever is cut, where today is seen, and so is what divides. */
+function steadyOf(today: readonly (number | null)[], divide: Reference | null): number[] {
+  return [...today.filter((value) => value !== null), ...(divide ? [divide.at] : [])]
+}
+
+function dividerOf(asked: Asked, { divide }: Vertical): Reference | null {
+  const { compare } = asked
+  if (compare === 'value') return divide ?? null
+  return { axis: 'y', at: compare === 'ratio' ? 1 : 0, label: '' }
+}
+
+function titled(asked: Asked, { quantity, label, symbol, unit }: Vertical): Omit<Axis, keyof Range> {
+  const { compare } = asked
+  if (compare === 'value') return { quantity, label, symbol, unit }
+  const name = fitted(focusOf(asked).label, 1, 14)
+  const how = compare === 'ratio' ? 'ratio to' : 'less that of'
+  return { quantity: compare, label: `${label}, ${how} ${name}`, symbol: '', unit: compare === 'ratio' ? '' : unit }
+}
+
+interface Look {
+  readonly tone: string
+  readonly dash: number
+  readonly name: string
+  readonly strong: boolean
+  readonly special?: readonly number[]
+}
+
+export function curveOf(values: Values, ranges: Ranges, { special = [], ...look }: Look): Curve {
+  const segments = sampleCurve({ places: placesAlong(ranges.x, special), values }, ranges)
+  return {
+    ...look,
+    segments: segments.map((segment) => segment.map(rounded)),
+    marks: [],
+    note: '',
+    finish: finishOf(segments, ranges),
+    asymptote: null,
+  }
+}
+
+function captionOf({ compare, solutions, focus }: Asked, x: Axis, y: Axis): string {
+  const against = `${x.label}${x.scaling === 'linear' ? '' : ', logarithmic'}`
+  const what = compare === 'value' ? `${y.label} ${y.symbol}` : y.label.split(', ')[0]
+  const how = { value: '', ratio: ', as a ratio to', difference: ', less that of' }[compare]
+  return `${capital(what ?? '')}${how && `${how} ${solutions[focus]?.label}`} against ${against}.`
+}
