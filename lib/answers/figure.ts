@@ -1,6 +1,6 @@
 /** `/api/figure`: a view of scenarios as a file for a place. */
-import { drawLongView, heightOfView } from '../figures/draw-long-view'
-import type { LongView } from '../figures/long-view'
+import type { Chart } from '../figures/chart'
+import { drawChart, heightOfChart } from '../figures/draw-chart'
 import { fileName } from '../formats/file-name'
 import { type Picture, type Sheet, sheetOf } from '../print/sheet'
 import { SIZES, type Size } from '../print/sizes'
@@ -31,17 +31,16 @@ export const VIEWS: readonly View[] = [
   {
     key: 'long',
     of: (solutions) => {
-      const view = figureOf(solutions)
-      const { caption, alternative, curves } = view
-      const lean = longPicture({ ...view, curves: curves.map((curve) => ({ ...curve, eras: null })) })
-      return { caption, alternative, ...longPicture(view), lean }
+      const chart = figureOf(solutions)
+      const { caption, alternative } = chart
+      return { caption, alternative, ...pictureOf(chart), lean: pictureOf({ ...chart, ribbons: [] }) }
     },
   },
 ]
 
-const longPicture = (view: LongView): Picture => ({
-  draw: (frame) => drawLongView(view, frame),
-  heightOf: (frame) => heightOfView(view, frame),
+const pictureOf = (chart: Chart): Picture => ({
+  draw: (frame) => drawChart(chart, frame),
+  heightOf: (frame) => heightOfChart(chart, frame),
 })
 
 export const FIGURE_FORMATS = [

@@ -1,6 +1,8 @@
 /** `/api/words`: sentences, macros and references to paste, for scenarios and their figure. */
+
+import type { Chart } from '../figures/chart'
 import { contentsAt } from '../figures/contents'
-import { type LongView, longView } from '../figures/long-view'
+import { longView } from '../figures/long-view'
 import type { Reading } from '../scenario/scenario'
 import { linkQuery } from '../scenario/write'
 import { ENGINE, type Solution, scalesAt } from '../solve'
@@ -74,7 +76,7 @@ export function wordsOf(solutions: readonly Solution[], edition: Edition): Words
 }
 
 /** The long view of these scenarios. */
-export const figureOf = (solutions: readonly Solution[]): LongView =>
+export const figureOf = (solutions: readonly Solution[]): Chart =>
   longView(
     solutions.map((solution) => ({
       solution,
@@ -84,7 +86,7 @@ export const figureOf = (solutions: readonly Solution[]): LongView =>
   )
 
 /** A caption that stands on its own: which scenarios, and who computed them. */
-function withOrigin({ caption }: LongView, solutions: readonly Solution[], { version, engine }: Edition): string {
+function withOrigin({ caption }: Chart, solutions: readonly Solution[], { version, engine }: Edition): string {
   const names = solutions.map(({ label, code, scenario }) =>
     scenario.name === null ? code : `${label} (${code.replace(/,as:.*/, '')})`,
   )

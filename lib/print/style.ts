@@ -35,12 +35,28 @@ const STYLES: readonly (readonly [classes: string, style: Style])[] = [
   ['arrow', { fill: 'hue' }],
   ['name', { fill: 'hue', 'font-weight': 600, halo: 'ground' }],
   ['note', { fill: 'hue', halo: 'ground' }],
+  ['reference', { stroke: 'edge', 'stroke-dasharray': '2 3' }],
+  ['spot', { fill: 'hue', stroke: 'ground', 'stroke-width': 1.5 }],
   ['heading', { fill: 'ink', 'font-weight': 600 }],
   ['foot', { fill: 'soft' }],
 ]
 const SCENARIO = /^(?:slot|ink)-(\d)$/
+/** What is no scenario has a hue too, as in app/styles/views.css. */
+const PARTS: Readonly<Record<string, string>> = {
+  'part-cone': 'ink',
+  'part-galaxy': 'soft',
+  'part-event': 'hue-1',
+  'part-particle': 'hue-2',
+  'part-hubble': 'hue-3',
+  'part-sent': 'hue-4',
+  'part-dark': 'hue-4',
+  'part-matter': 'ink',
+  'part-radiation': 'hue-3',
+  'part-neutrino': 'hue-5',
+  'part-curvature': 'soft',
+}
 /** Marks of the drawing as such, which look like nothing. */
-const BARE = new Set(['chart'])
+const BARE = new Set(['drawn', 'chart', 'quiet'])
 const COLOURED = new Set(['fill', 'stroke', 'halo'])
 
 export function styled(node: SvgNode, palette: Palette, hue = 'hue-0'): SvgNode {
@@ -48,12 +64,16 @@ export function styled(node: SvgNode, palette: Palette, hue = 'hue-0'): SvgNode 
   const classes = String(names)
     .split(' ')
     .filter((one) => one !== '' && !BARE.has(one))
-  const slot = classes.map((one) => SCENARIO.exec(one)?.[1]).find((one) => one !== undefined)
-  const own = slot === undefined ? hue : `hue-${slot}`
-  const looks = classes.filter((one) => !SCENARIO.test(one))
+  const own = classes.map(hueOf).find((one) => one !== undefined) ?? hue
+  const looks = classes.filter((one) => hueOf(one) === undefined)
   const style = looks.length > 0 ? coloured(styleOf(looks), palette, own) : {}
   const children = node.children.map((child) => (typeof child === 'string' ? child : styled(child, palette, own)))
   return svg(node.tag, { ...style, ...others }, ...children)
+}
+
+function hueOf(name: string): string | undefined {
+  const slot = SCENARIO.exec(name)?.[1]
+  return slot === undefined ? PARTS[name] : `hue-${slot}`
 }
 
 const matching = (classes: readonly string[]) =>
@@ -65,7 +85,7 @@ const styleOf = (classes: readonly string[]): Style => Object.assign({}, ...matc
 export function plainClasses(node: SvgNode): readonly string[] {
   const classes = String(node.attributes.class ?? '').split(' ')
   const known = new Set(matching(classes).flatMap(([names]) => names.split(' ')))
-  const own = classes.filter((one) => one !== '' && !BARE.has(one) && !SCENARIO.test(one) && !known.has(one))
+  const own = classes.filter((one) => one !== '' && !BARE.has(one) && hueOf(one) === undefined && !known.has(one))
   return [...own, ...node.children.flatMap((child) => (typeof child === 'string' ? [] : plainClasses(child)))]
 }
 
