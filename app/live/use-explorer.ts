@@ -28,12 +28,7 @@ export interface Trouble {
 }
 
 /** `asked` is the question that `initial` answers: a page that was kept for use without a network may answer another. */
-export function useExplorer(
-  address: Address | null,
-  initial: Explorer,
-  asked: string,
-  frame: string | null,
-): Live {
+export function useExplorer(address: Address | null, initial: Explorer, asked: string, frame: string | null): Live {
   const answers = useAnswers(initial, asked, frame)
   const { answer, wanted, fetching, computing, error } = useSyncExternalStore(
     answers.subscribe,
