@@ -5,7 +5,7 @@ import { Resvg } from '@resvg/resvg-js'
 import { describe, expect, test } from 'vitest'
 import { drawn } from '../../app/api/figure/draw'
 import { askFigure, MOST_PIXELS } from '../../lib/answers/figure'
-import { drawLongView } from '../../lib/figures/draw-long-view'
+import { drawChart } from '../../lib/figures/draw-chart'
 import { longView } from '../../lib/figures/long-view'
 import type { SvgNode } from '../../lib/figures/svg'
 import { crc32 } from '../../lib/print/png'
@@ -31,7 +31,7 @@ describe('colours', () => {
   test('every class of a drawing has its look', () => {
     const view = longView([flatLambda(), phantom(), sinking(), bounce(), milne(), einsteinDeSitter()])
     for (const compact of [true, false]) {
-      const node = drawLongView(view, { width: 900, height: 400, type: 15, compact, id: 'a' })
+      const node = drawChart(view, { width: 900, height: 400, type: 15, compact, id: 'a' })
       expect(plainClasses(node)).toEqual([])
     }
   })
