@@ -3,7 +3,7 @@ import type { Metadata } from 'next'
 import type { Explorer } from '../lib/answers/explorer'
 import { HOME } from './api/home'
 
-export function linkCard({ title, scenarios, links, place, figure }: Explorer): Metadata {
+export function linkCard({ title, scenarios, links, place, long }: Explorer): Metadata {
   const { base } = HOME
   if (base === '') return {}
   const query = links.data.split('?')[1]
@@ -12,7 +12,7 @@ export function linkCard({ title, scenarios, links, place, figure }: Explorer): 
     url: `${base}/api/figure?${query}&size=card&format=png${theme}`,
     width: 1200,
     height: 630,
-    alt: figure.alternative,
+    alt: long.figure.alternative,
   }
   const description = scenarios[place.focus]?.verdict.sentences.join(' ') ?? ''
   const page = `${base}/?${query}`

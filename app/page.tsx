@@ -20,7 +20,11 @@ interface Props {
 
 export async function generateMetadata(props: Props): Promise<Metadata> {
   const view = await read(props)
-  return { title: { absolute: `${view.title} · Longhence` }, description: view.long.figure.alternative, ...linkCard(view) }
+  return {
+    title: { absolute: `${view.title} · Longhence` },
+    description: view.long.figure.alternative,
+    ...linkCard(view),
+  }
 }
 
 export default async function Page(props: Props) {

@@ -2,8 +2,8 @@ import '../styles/embed.css'
 import type { Metadata } from 'next'
 import { opened } from '../../lib/answers/opened'
 import { figureOf } from '../../lib/answers/words'
-import { drawLongView } from '../../lib/figures/draw-long-view'
-import { FRAMES } from '../../lib/figures/plot'
+import { drawChart } from '../../lib/figures/draw-chart'
+import { LONG_FRAMES } from '../../lib/figures/plot'
 import { linkQuery } from '../../lib/scenario/write'
 import { ENGINE } from '../../lib/solve'
 import { nameOf } from '../../lib/words/desk'
@@ -25,9 +25,9 @@ export default async function Embed({ searchParams }: Props) {
   return (
     <main className="embed" data-theme={THEMES.find((one) => one === theme)}>
       <h1 className="spoken">Scale factor against time</h1>
-      {FRAMES.map((frame) => (
+      {LONG_FRAMES.map((frame) => (
         <div key={frame.id} className={`frame ${frame.id}`}>
-          <Drawing node={drawLongView(figure, frame)} />
+          <Drawing node={drawChart(figure, frame, 'chart')} />
         </div>
       ))}
       <p className="origin">
