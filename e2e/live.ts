@@ -43,10 +43,15 @@ export async function clear(what: Locator) {
   return box
 }
 
+/** Our own setting of the tests. */
+const BLOCKED = 'Service Worker registration blocked by Playwright'
+
 /** Whatever the browser refuses, reports as an error, or moves without being asked. */
 export async function complaints(page: Page): Promise<string[]> {
   const heard: string[] = []
-  page.on('console', (message) => ['error', 'warning'].includes(message.type()) && heard.push(message.text()))
+  page.on('console', (message) => {
+    if (['error', 'warning'].includes(message.type()) && message.text() !== BLOCKED) heard.push(message.text())
+  })
   page.on('pageerror', (error) => heard.push(error.message))
   await page.exposeFunction('refused', (what: string) => heard.push(what))
   await page.addInitScript(() => {

@@ -13,8 +13,8 @@ export interface Address {
   readonly depth: number
 }
 
-/** Browsers refuse more than a hundred changes of the address in half a minute. */
-const WRITE_EVERY = 350
+/** Milliseconds: a hand that rests for so long is followed by the bar of the browser, which is slow to be told. */
+const REST = 350
 
 const listeners = new Set<() => void>()
 let current: Address | null = null
@@ -43,7 +43,8 @@ export function go(link: string, by: string | null = null): void {
   gesture = by
   if (continued) {
     set({ search: next, moving: true, depth })
-    timer ??= setTimeout(flush, WRITE_EVERY)
+    clearTimeout(timer)
+    timer = setTimeout(flush, REST)
     return
   }
   flush()

@@ -15,7 +15,7 @@ interface Props {
 export const Figure = memo(function Figure({ view, shown }: Props) {
   const { long, scenarios } = view
   const { figure, zoom, clocks } = long
-  const caption = useSteadyHeight(String(figure.curves.length), figure)
+  const caption = useSteadyHeight(String(figure.curves.length))
   const links = useMemo(() => scenarios.map(({ link }) => link), [scenarios])
   return (
     <figure className="long-view">

@@ -10,7 +10,7 @@ interface Props {
 }
 
 export const Verdicts = memo(function Verdicts({ scenarios, focus }: Props) {
-  const ref = useSteadyHeight(String(scenarios.length), scenarios)
+  const ref = useSteadyHeight(String(scenarios.length))
   return (
     <section className="verdicts" aria-label="Verdict" ref={ref}>
       {scenarios.map((scenario) => (

@@ -16,7 +16,7 @@ interface Props {
 export const Views = memo(function Views({ view, shown }: Props) {
   const { key, tabs, choices, notes, galaxy, zoom, figure } = view.panel
   // A view of fewer choices must not pull up what stands below it while someone goes through them.
-  const section = useSteadyHeight('', figure)
+  const section = useSteadyHeight('')
   return (
     <section className="views" id="view" ref={section} aria-labelledby="views">
       <h2 id="views" className="spoken">

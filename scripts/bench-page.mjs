@@ -1,0 +1,111 @@
+/**
+ * `npm run bench:page`: how soon the figure follows a hand on a slider, far from the server. Three scenarios, every request
+ * takes 150 ms longer; once as fast as the machine is, once slowed down four times. From the event of an input to the paint
+ * that shows it or a newer one, and the longest task of the page's thread.
+ */
+import { spawn } from 'node:child_process'
+import { availableParallelism, loadavg } from 'node:os'
+import { setTimeout as wait } from 'node:timers/promises'
+import { chromium } from '@playwright/test'
+import { record, results } from './bench/drag-record.mjs'
+import { ensureBuilt } from './setup/build.mjs'
+import { ensureChromium } from './setup/chromium.mjs'
+import { ensureInstalled } from './setup/install.mjs'
+import { probePort } from './setup/port.mjs'
+import { fail, Refusal, ROOT } from './setup/project.mjs'
+
+/** Milliseconds, but for the number of moves. */
+const [ROUND_TRIP, MOVES, BETWEEN] = [150, 150, 16]
+const SIZES = [
+  { width: 1280, height: 800 },
+  { width: 390, height: 844 },
+]
+const AIMS = { paint: 50, task: 100 }
+const FLAGS = ['--no-sandbox', '--disable-gpu', '--disable-quic', '--no-first-run', '--disable-background-networking']
+
+/** @param {string} url */
+async function answering(url) {
+  for (let i = 0; i < 400; i++) {
+    if (await fetch(`${url}/healthz`).catch(() => false)) return
+    await wait(50)
+  }
+  throw new Refusal('The server did not start.')
+}
+
+/**
+ * @param {import('@playwright/test').Browser} browser
+ * @param {string} url
+ * @param {{width: number, height: number}} viewport
+ * @param {number} slowdown
+ */
+async function measure(browser, url, viewport, slowdown) {
+  const context = await browser.newContext({ viewport, baseURL: url, serviceWorkers: 'block' })
+  await context.route('**/*', async (route) => {
+    await wait(ROUND_TRIP)
+    await route.continue().catch(() => undefined)
+  })
+  const page = await context.newPage()
+  await page.addInitScript(record)
+  await page.goto('/', { waitUntil: 'networkidle' })
+  const session = await context.newCDPSession(page)
+  await session.send('Emulation.setCPUThrottlingRate', { rate: slowdown })
+  // The first drag loads and warms up what the second one, which counts, uses.
+  await drag(page, 40)
+  await page.waitForFunction(() => !document.querySelector('main')?.ariaBusy)
+  await wait(1500)
+  await page.evaluate(() => Reflect.get(globalThis, 'startRecord')())
+  await drag(page, MOVES)
+  await wait(600)
+  const found = results(await page.evaluate(() => Reflect.get(globalThis, 'stopRecord')()))
+  await context.close()
+  return found
+}
+
+/** @param {import('@playwright/test').Page} page @param {number} moves */
+async function drag(page, moves) {
+  const slider = page.getByRole('slider', { name: 'matter', exact: true })
+  await slider.evaluate((element) => element.scrollIntoView({ block: 'end' }))
+  const box = await slider.boundingBox()
+  if (!box) throw new Refusal('There is no slider to drag.')
+  const y = box.y + box.height / 2
+  await page.mouse.move(box.x + 0.15 * box.width, y)
+  await page.mouse.down()
+  for (let i = 1; i <= moves; i++) {
+    const next = wait(BETWEEN)
+    await page.mouse.move(box.x + (0.15 + (0.5 * i) / moves) * box.width, y)
+    await next
+  }
+  await page.mouse.up()
+}
+
+/** @param {number} value @param {number} aim */
+const judged = (value, aim) => `${value.toFixed(0).padStart(4)} ms (aim ${aim}${value > aim ? ', missed' : ''})`
+
+try {
+  ensureInstalled()
+  const executablePath = ensureChromium()
+  ensureBuilt()
+  const port = await probePort(0)
+  const server = spawn(process.execPath, ['scripts/start.mjs', '-p', String(port)], { cwd: ROOT, stdio: 'ignore' })
+  const browser = await chromium.launch({ executablePath, args: FLAGS })
+  try {
+    await answering(`http://localhost:${port}`)
+    console.log(`Three scenarios, ${MOVES} moves of a slider, ${ROUND_TRIP} ms of added round trip.`)
+    // Times by the clock: other programs are in them.
+    console.log(`Load of the machine: ${loadavg()[0].toFixed(1)} on ${availableParallelism()} processors.`)
+    for (const size of SIZES) {
+      for (const slowdown of [1, 4]) {
+        const { count, half, most, longest } = await measure(browser, `http://localhost:${port}`, size, slowdown)
+        const paint = slowdown === 1 ? judged(most, AIMS.paint) : `${most.toFixed(0)} ms`
+        const task = slowdown === 4 ? judged(longest, AIMS.task) : `${longest.toFixed(0)} ms`
+        console.log(`${size.width} px, slowed down ${slowdown} times: ${count} inputs`)
+        console.log(`  input to paint p50 ${half.toFixed(0)} ms, p95 ${paint}; longest task ${task}`)
+      }
+    }
+  } finally {
+    await browser.close()
+    server.kill('SIGTERM')
+  }
+} catch (error) {
+  fail(error)
+}
