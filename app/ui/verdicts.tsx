@@ -32,6 +32,11 @@ function VerdictOf({ scenario, current }: { readonly scenario: ScenarioView; rea
       </h2>
       <p className="said">{verdict.sentences.join(' ')}</p>
       {verdict.aside && <p className="aside">{verdict.aside}</p>}
+      {verdict.nearest && (
+        <p className="aside">
+          <Sentence text={verdict.nearest} />
+        </p>
+      )}
       {!proven && (
         <p className="aside">
           The ending is computed, not proven: it rests on digits or steps that rounding could change.

@@ -1,4 +1,5 @@
 /** Everything the explorer shows, from the texts of an address: what a page needs and nothing to compute. */
+import { nearestOf } from '../neighbours/nearest'
 import { DEMO } from '../scenario/demo'
 import { readScenario } from '../scenario/read'
 import type { Problem, Scenario } from '../scenario/scenario'
@@ -95,7 +96,7 @@ function told(
 ): Omit<ScenarioView, keyof Tab> {
   const other = otherBeyond(solution.scenario)
   return {
-    verdict: verdictOf(solution, other && solutionOf(other)),
+    verdict: verdictOf(solution, other && solutionOf(other), nearestOf(solution.scenario)),
     because: solution.end.because,
     proven: solution.end.proven,
     notices: solution.notices.map(({ message, code }) => ({

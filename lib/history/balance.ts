@@ -123,6 +123,7 @@ export class Balance {
     const high = fastest === outwards
     let fall = 0
     let sizes = 0
+    let [slowest, steepest] = [Number.POSITIVE_INFINITY, Number.NEGATIVE_INFINITY]
     for (let i = 0; i < this.#plus.length; i++) {
       const range = this.#plus[i].exponentRange(from, to)
       const n = high ? range[1] : range[0]
@@ -132,6 +133,8 @@ export class Balance {
       if (weight === 0) continue
       fall += weight * rate
       sizes += weight * Math.abs(rate)
+      if (rate < slowest) slowest = rate
+      if (rate > steepest) steepest = rate
     }
     let mean = 0
     let least = Number.POSITIVE_INFINITY
@@ -151,7 +154,10 @@ export class Balance {
     this.#meanRise = mean
     this.#leastRise = least
     this.#mostRise = most
-    this.#slack = Number.EPSILON * (2 * this.#rounding + 16) * (sizes + Math.max(Math.abs(most), Math.abs(least)))
+    // Weights add up to 1, so that their errors move a mean by no more than the rates differ.
+    const spread = (steepest > slowest ? steepest - slowest : 0) + (most > least ? most - least : 0)
+    const rounded = sizes + Math.max(Math.abs(most), Math.abs(least))
+    this.#slack = Number.EPSILON * (2 * this.#rounding * spread + 16 * rounded)
   }
 }
 

@@ -13,10 +13,12 @@ export type Encounter =
   | { readonly kind: 'root'; readonly N: number; readonly slope: number | null; readonly doubt: string | null }
   | { readonly kind: 'double'; readonly N: number; readonly doubt: string | null }
   /** E² stays positive up to N, where doubles are enough again. */
-  | { readonly kind: 'passed'; readonly N: number; readonly narrow: Narrow }
+  | { readonly kind: 'passed'; readonly N: number; readonly narrow: Narrow | null }
 
 /** h from which on doubles are enough again, well above where they are left. */
 const CLEAR = 1e-9
+/** Share of E² in its terms from which on doubles have digits enough for integrals. */
+const NARROW = 1e-8
 /** Rate of fall of h that is no matter of rounding. */
 const STEEP = 1e-4
 /** Newton's steps from where the search came to rest are far shorter than this in ln a. */
@@ -55,14 +57,16 @@ function steepRoot(
   direction: Direction,
   left: number,
 ): Encounter | null {
-  const span = Math.min(STEEP / 16, left / 2)
+  const far = Math.abs(start) > FARTHEST
+  const span = Math.min((STEEP / 16) * Math.max(1, Math.abs(start)), left / 2)
   const least = balance.falling(span)
-  if (!(least > STEEP)) return null
+  // Beyond the doubles there is no closer look, but a slow fall is as good as a steep one.
+  if (!(least > (far ? 0 : STEEP))) return null
   const distance = (Math.max(0, balance.h) + 4 * balance.error) / least
   balance.weigh(start + direction * distance)
   const passed = balance.h < -balance.error && distance < span
   balance.weigh(start)
-  return passed ? { kind: 'root', N: polished(model, start), slope: null, doubt: null } : null
+  return passed ? { kind: 'root', N: far ? start : polished(model, start), slope: null, doubt: null } : null
 }
 
 /** Newton's method on E². */
@@ -90,7 +94,7 @@ function stepsWithAllDigits(
     const { value, error } = preciseExpansion(model, N)
     const h = (value[0] - error) / model.magnitude(N)
     if (!(h > 0)) break
-    if (h > CLEAR) return { kind: 'passed', N, narrow: narrowAt(model, N) }
+    if (h > CLEAR && h > 8 * balance.error) return { kind: 'passed', N, narrow: narrowAt(model, N) }
     // 2 E²/(P + M) ≤ ln P − ln M, of which a little is given up for rounding.
     const sure = 1.99 * h
     length = Math.min(length, (left - Math.abs(N - start)) / 2)
@@ -129,9 +133,12 @@ function touching(model: Model, N: number, direction: Direction): Encounter {
   return { kind: 'double', N: atRest(model, N), doubt: UNDECIDED }
 }
 
-function narrowAt(model: Model, start: number): Narrow {
+/** The minimum that was passed, where it is one that doubles would lose. */
+function narrowAt(model: Model, start: number): Narrow | null {
   const N = atRest(model, start)
-  return { N, value: preciseExpansion(model, N).value[0], slope: preciseSlope(model, N) }
+  const value = preciseExpansion(model, N).value[0]
+  const narrow = value > 0 && value < NARROW * model.magnitude(N) && model.derivatives(N).second > 0
+  return narrow && Math.abs(N - start) < STRAY ? { N, value, slope: preciseSlope(model, N) } : null
 }
 
 /** The minimum of E² near N: where its slope vanishes. */

@@ -19,8 +19,8 @@ export { FARTHEST, type Narrow, type Search } from './search'
 
 /** h from which on the steps are left to twice the digits: E² is then no longer known to more than five digits in doubles. */
 const NEAR = 1e-10
-/** Steps of one search; what needs more is not proven. The hunt for misses has met no more than some hundreds. */
-const MOST_STEPS = 4000
+/** Steps of one search; what needs more is not proven. The hunt for misses has met no more than 128. */
+const MOST_STEPS = 1000
 /** Distance to the edge of a law, relative to its ln a, that is as good as none. */
 const EDGE_NEAREST = 256 * Number.EPSILON
 
@@ -92,7 +92,8 @@ function stepsFrom(model: Model, terms: readonly Term[], direction: Direction, s
     const h = balance.h - balance.error
     if (Number.isNaN(h)) return nothing(narrows, NO_NUMBERS)
     const left = limit - Math.abs(N)
-    const advance = h > NEAR ? certifiedStep(balance, h, left, length) : 0
+    const clear = h > NEAR && h > 4 * balance.error
+    const advance = clear ? certifiedStep(balance, h, left, length) : 0
     if (advance >= left || left <= nearest) return nothing(narrows, null)
     if (advance > Number.EPSILON * Math.abs(N)) {
       N += direction * advance
@@ -100,15 +101,15 @@ function stepsFrom(model: Model, terms: readonly Term[], direction: Direction, s
       continue
     }
     // So near to an edge that N tells no difference any more: the edge decides.
-    if (h > NEAR && left <= EDGE_NEAREST * limit) return nothing(narrows, null)
-    const met: Encounter = meet(model, balance, N, direction, left, h > NEAR)
+    if (Number.isFinite(left) && left <= EDGE_NEAREST * limit) return nothing(narrows, null)
+    const met: Encounter = meet(model, balance, N, direction, left, clear)
     if (met.kind === 'root') {
       const found = rootAt(model, met.N, narrows, met.doubt)
       return met.slope === null || found.kind !== 'root' ? found : { ...found, slope: met.slope }
     }
     if (met.kind === 'double') return { kind: 'double', N: met.N, narrows, doubt: met.doubt }
-    narrows.push(met.narrow)
-    ;[N, length] = [met.N, 2 * Math.abs(met.N - met.narrow.N)]
+    if (met.narrow) narrows.push(met.narrow)
+    ;[N, length] = [met.N, 2 * Math.abs(met.N - N)]
   }
   return nothing(narrows, OUT_OF_STEPS)
 }

@@ -66,6 +66,16 @@ export const ROUTES: readonly Route[] = [
     ],
   },
   {
+    path: '/api/neighbours',
+    method: 'get',
+    summary:
+      'For each number of a scenario the smallest change up or down that makes another origin or ending of it, with what it becomes. All other numbers stay, and one density closes the budget.',
+    parameters: [SCENARIOS],
+    answer: { [JSON_TYPE]: refTo('Neighbourhoods') },
+    refusals: [422],
+    examples: [{ title: 'How far the standard model is from a crunch', query: 's=h0:70,matter:0.3' }],
+  },
+  {
     path: '/api/batch',
     method: 'post',
     summary:

@@ -101,6 +101,10 @@ function list(kinds: Readonly<Record<string, string>>): string {
     .join('; ')
 }
 
+const changeBetween = (kinds: readonly string[]): Schema => ({
+  oneOf: [closed({ from: { enum: kinds }, to: { enum: kinds } }), { type: 'null' }],
+})
+
 const scenarios = (scenario: Schema): Schema => closed({ engine: text, scenarios: listOf(scenario) })
 const rows = listOf(listOf(maybeNumber))
 const index: Schema = { type: 'integer', minimum: 0, description: 'The line of the request, counted from 0' }
@@ -117,6 +121,27 @@ const problemProperties: Readonly<Record<string, Schema>> = {
 export const SCHEMAS: Readonly<Record<string, Schema>> = {
   History: closed(history),
   Histories: scenarios(refTo('History')),
+  Neighbourhoods: scenarios(
+    closed({
+      code: text,
+      closes: { enum: ['curvature', 'dark'], description: 'The density that closes the budget' },
+      origin: { enum: Object.keys(ORIGINS) },
+      end: { enum: ENDS },
+      neighbours: listOf(refTo('Neighbour')),
+      leftOut: listOf(closed({ parameter: text, because: text })),
+    }),
+  ),
+  Neighbour: closed({
+    parameter: { ...text, description: 'Key of the scenario code' },
+    index: { type: ['integer', 'null'], description: 'Place in a list of numbers, counted from 0' },
+    symbol: text,
+    value: { ...number, description: 'Where the kind changes, to 2e-10 of itself' },
+    change: { ...number, description: 'The same less the value given; 0 where any change will do' },
+    direction: { enum: ['up', 'down'] },
+    end: changeBetween(ENDS),
+    origin: changeBetween(Object.keys(ORIGINS)),
+    because: { ...text, description: 'Why it begins or ends so beyond the boundary' },
+  }),
   Note: closed({ row: { type: 'integer' }, column: { type: ['string', 'null'] }, because: text }),
   Epochs: scenarios(closed({ code: text, columns: listOf(refTo('Column')), rows, notes: listOf(refTo('Note')) })),
   Table: scenarios(closed({ code: text, columns: listOf(refTo('Column')), rows })),

@@ -31,13 +31,13 @@ export function shareOf({ photons, masslessNeutrinos, coldMatter, curvature, dar
 }
 
 const POINTS = 50_000
-/** Evenly up to this ln a, then by equal factors. */
-const [EVEN, FARTHEST] = [30, 690]
-const STEP = EVEN / (0.96 * POINTS)
+/** Evenly up to this ln a, then by equal factors: what turns round at scale factors that no double holds turns round too. */
+const [EVEN, FARTHEST] = [30, 1e7]
+const EVENLY = 0.9 * POINTS
 
 /** Distance in ln a of the k-th place from today. */
 const distance = (k: number): number =>
-  k <= 0.96 * POINTS ? k * STEP : EVEN * (FARTHEST / EVEN) ** ((k - 0.96 * POINTS) / (0.04 * POINTS))
+  k <= EVENLY ? (k * EVEN) / EVENLY : EVEN * (FARTHEST / EVEN) ** ((k - EVENLY) / (POINTS - EVENLY))
 
 /** The first place where E² is negative beyond rounding, or null; no farther than `limit`. */
 export function firstNegative(budget: Budget, law: OtherLaw, direction: 1 | -1, limit: number): number | null {

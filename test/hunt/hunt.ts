@@ -43,7 +43,7 @@ export function huntRandom(seed: number): {
   const share = shareOf(model.budget, law)
   const found = DIRECTIONS.map((direction) => searchTurning(model, direction))
   const complaints = DIRECTIONS.map((direction, i) => {
-    const edge = law.edge !== null && direction * law.edge > 0 ? Math.abs(law.edge) : DISTANT
+    const edge = law.edge !== null && direction * law.edge > 0 ? Math.abs(law.edge) : Number.POSITIVE_INFINITY
     return complaint(found[i], edge, firstNegative(model.budget, law, direction, edge * (1 - 1e-9)), share, direction)
   })
   const because = complaints.find((one) => one !== null) ?? null

@@ -7,6 +7,7 @@ import { answerLine, linesOf } from '../../lib/answers/batch'
 import { AT_FIELDS } from '../../lib/answers/epochs'
 import { askHistory } from '../../lib/answers/history'
 import { TABLE_FIELDS } from '../../lib/answers/layout'
+import { askNeighbours } from '../../lib/answers/neighbours'
 import { askTable } from '../../lib/answers/table'
 import { askWords } from '../../lib/answers/words'
 import { openApi } from '../../lib/interface/openapi'
@@ -79,6 +80,9 @@ describe('answers are as it says', () => {
   const s = (codes: readonly string[]) => codes.map((code) => `s=${encodeURIComponent(code)}`).join('&')
   test.each([...DEMO.codes, ...CODES])('history of %s', (code) => {
     expect(complaints('Histories', answerOf(askHistory, s([code])))).toBe('')
+  })
+  test.each([...DEMO.codes, ...CODES])('neighbours of %s', (code) => {
+    expect(complaints('Neighbourhoods', answerOf(askNeighbours, s([code])))).toBe('')
   })
   test('epochs, with notes', () => {
     const answer = answerOf(askAt, `${s([...DEMO.codes])}&time=-100,-5,0,40`)

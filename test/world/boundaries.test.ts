@@ -3,21 +3,9 @@
  * (CPT1, CPT2), and the static states on the boundaries (EINST, LOITER of published.json).
  */
 import { describe, expect, test } from 'vitest'
+import { noBigBang, recollapse } from './dust-boundaries'
 import { expectNear, expectPrinted, expectRelative, PUBLISHED, printed } from './published'
 import { measure, universe } from './universe'
-
-/** At and above this Ω_Λ there was no big bang. cosh where its argument is imaginary: Ω_m below 1/2. */
-function noBigBang(matter: number): number {
-  const x = (1 - matter) / matter
-  const root = matter < 0.5 ? Math.cosh(Math.acosh(x) / 3) : Math.cos(Math.acos(x) / 3)
-  return 4 * matter * root ** 3
-}
-
-/** At and below this Ω_Λ the universe collapses again. */
-function recollapse(matter: number): number {
-  if (matter <= 1) return 0
-  return 4 * matter * Math.cos(Math.acos((1 - matter) / matter) / 3 + (4 * Math.PI) / 3) ** 3
-}
 
 const dust = (matter: number, lambda: number) => universe(`matter:${matter},cmb:0,dark:${lambda}`)
 const MATTERS = [0.1, 0.3, 0.45, 0.499, 0.5, 0.501, 0.7, 1, 1.0625, 1.5, 2, 3, 4.2, 5]
