@@ -1,16 +1,22 @@
-import { useQuery } from '@tanstack/react-query'
+import { useEffect, useState } from 'react'
 import type { Words } from '../../lib/answers/words'
 import { TakeAwayWords } from './take-away-words'
 
+type State = { readonly words: Words } | { readonly trouble: string } | null
+
 /** The words of what is shown, asked for when they are opened; the last ones stay until the next have come. */
 export default function Fetched({ query }: { readonly query: string }) {
-  const { data, error } = useQuery({
-    queryKey: ['words', query],
-    queryFn: ({ signal }) => fetchWords(query, signal),
-    placeholderData: (last) => last,
-  })
-  if (error) return <p role="alert">{error.message}</p>
-  return data ? <TakeAwayWords words={data} /> : null
+  const [state, setState] = useState<State>(null)
+  useEffect(() => {
+    const controller = new AbortController()
+    fetchWords(query, controller.signal).then(
+      (words) => setState({ words }),
+      (error: Error) => controller.signal.aborted || setState({ trouble: error.message }),
+    )
+    return () => controller.abort()
+  }, [query])
+  if (state === null) return null
+  return 'words' in state ? <TakeAwayWords words={state.words} /> : <p role="alert">{state.trouble}</p>
 }
 
 async function fetchWords(query: string, signal: AbortSignal): Promise<Words> {

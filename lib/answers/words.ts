@@ -11,7 +11,7 @@ import { methodsOf } from '../takeaway/methods'
 import { type PressCard, pressOf } from '../takeaway/press'
 import { bibtex, type Edition } from '../takeaway/sources'
 import { summaryOf } from '../takeaway/summary'
-import { knownOf } from '../takeaway/told'
+import { type Known, knownOf } from '../takeaway/told'
 import { nameOf } from '../words/desk'
 import { readKeys } from './keys'
 import { mapped, type Pairs, type Question, scenariosOf, solved } from './question'
@@ -57,14 +57,14 @@ export function wordsOf(solutions: readonly Solution[], edition: Edition): Words
   const figure = figureOf(named)
   return {
     engine: ENGINE,
-    figure: { caption: withOrigin(figure, named, edition), alternative: figure.alternative },
+    figure: { caption: withOrigin(figure, named, edition), alternative: alternativeOf(figure, known) },
     scenarios: known.map((one) => {
       const alone = named.length === 1 ? figure : figureOf([one.solution])
       return {
         code: one.solution.code,
         label: one.solution.label,
         caption: withOrigin(alone, [one.solution], edition),
-        alternative: alone.alternative,
+        alternative: alternativeOf(alone, [one]),
         summary: summaryOf(one),
         methods: methodsOf(one.solution, edition),
         press: pressOf(one),
@@ -84,6 +84,12 @@ export const figureOf = (solutions: readonly Solution[]): Chart =>
       contents: (time) => contentsAt(solution, time),
     })),
   )
+
+/** The frame of the figure in its own words, and each curve in numbers that are known. */
+function alternativeOf({ alternative }: Chart, known: readonly Known[]): string {
+  const [frame = ''] = alternative.split(/(?<=\.) /)
+  return [frame, ...known.map((one) => `${one.solution.label}: ${summaryOf(one)}`)].join(' ')
+}
 
 /** A caption that stands on its own: which scenarios, and who computed them. */
 function withOrigin({ caption }: Chart, solutions: readonly Solution[], { version, engine }: Edition): string {
