@@ -102,10 +102,19 @@ export function modelOf(budget: Budget, law: Law): Model {
       out[i] = ((radiation * x + coldMatter) * x + curvature) * x * x
     }
     for (const state of states) for (let i = from; i < to; i++) out[i] += densityOf(state, inverseScales[i])
-    if (dark !== 0 && law.exponent === 0) for (let i = from; i < to; i++) out[i] += dark
-    else if (dark !== 0) for (let i = from; i < to; i++) out[i] += dark * law.density(places[i])
+    if (dark !== 0) addDark(out, places, inverseScales, from, to)
     if (!cancels) return
     for (let i = from; i < to; i++) if (Math.abs(places[i]) < NEAR_TODAY) out[i] = 1 + changeFrom(TODAY, places[i])
+  }
+
+  let laws = new Float64Array(0)
+  const addDark: Model['expansionsInto'] = (out, places, inverseScales, from, to) => {
+    if (law.exponent === 0) for (let i = from; i < to; i++) out[i] += dark
+    else if (law.densitiesInto) {
+      if (laws.length < out.length) laws = new Float64Array(out.length)
+      law.densitiesInto(laws, places, inverseScales, from, to)
+      for (let i = from; i < to; i++) out[i] += dark * laws[i]
+    } else for (let i = from; i < to; i++) out[i] += dark * law.density(places[i])
   }
 
   const densitiesInto: Model['densitiesInto'] = (out, key, places, inverseScales, count) => {

@@ -18,6 +18,9 @@ function linearInScale(w0: number, wa: number): Law {
   }
   return smoothLaw({
     logDensity: (N) => -early * N + 3 * wa * Math.expm1(N),
+    densitiesInto(out, places, inverseScales, from, to) {
+      for (let i = from; i < to; i++) out[i] = Math.exp(3 * wa * (1 / inverseScales[i] - 1) - early * places[i])
+    },
     roughness: (N) => 4 * (3 * (1 + Math.abs(w0) + Math.abs(wa)) * Math.abs(N) + Math.abs(3 * wa * Math.expm1(N))),
     preciseLogDensity: (N) => {
       const early = times([-3, 0], plus([1, 0], plus([w0, 0], [wa, 0])))

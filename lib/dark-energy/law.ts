@@ -58,6 +58,8 @@ export interface Part {
 export interface Law {
   /** f(N) = ρ/ρ_today; f(0) = 1. */
   density(N: number): number
+  /** f at many places with a⁻¹ given, where that is quicker than one by one. */
+  densitiesInto?(out: Float64Array, places: Float64Array, inverseScales: Float64Array, from: number, to: number): void
   /** ln |f(N)|, −∞ where f = 0. */
   logDensity(N: number): number
   /**

@@ -3,7 +3,7 @@ import { relativeBend } from '../numerics/bend'
 import type { Twofold } from '../numerics/twofold'
 import type { Asymptote, Law } from './law'
 
-export interface Logarithm {
+export interface Logarithm extends Pick<Law, 'densitiesInto'> {
   logDensity(N: number): number
   roughness?(N: number): number
   preciseLogDensity?(N: number): Twofold
@@ -20,6 +20,7 @@ export interface Logarithm {
 
 export function smoothLaw(log: Logarithm): Law {
   const {
+    densitiesInto,
     logDensity,
     roughness,
     preciseLogDensity,
@@ -33,6 +34,7 @@ export function smoothLaw(log: Logarithm): Law {
   } = log
   return {
     density: (N) => Math.exp(logDensity(N)),
+    densitiesInto,
     logDensity,
     roughness,
     preciseLogDensity,

@@ -43,7 +43,8 @@ const MOST_PANELS = 4000
 const SMALLEST = 1e-280
 
 const samples: Samples = { time: new Float64Array(NODE_COUNT), conformal: new Float64Array(NODE_COUNT) }
-const coefficients = new Float64Array(NODE_COUNT)
+const coefficients = { time: new Float64Array(NODE_COUNT), conformal: new Float64Array(NODE_COUNT) }
+type Clock = keyof Samples
 
 /** Panels that cover [zone.from, zone.to], outwards; an infinite zone ends where `enough` says so after a panel. */
 export function panelsOf(zone: Zone, enough: (panel: Panel, edge: number) => boolean): readonly Panel[] {
@@ -54,15 +55,16 @@ export function panelsOf(zone: Zone, enough: (panel: Panel, edge: number) => boo
   while (from < zone.to) {
     if (++tried > MOST_PANELS) throw new RangeError(`more than ${MOST_PANELS} panels would be needed`)
     const to = from + width >= zone.to - width * 0.05 ? zone.to : from + width
-    const panel = panelOver(zone, from, to)
-    floor = Math.max(floor, noiseIn(before, panel.worst))
-    const excess = panel.worst / floor
+    const trial = attempt(zone, from, to)
+    floor = Math.max(floor, noiseIn(before, trial.worst))
+    const excess = trial.worst / floor
     if (excess > 1 && to - from > NARROWEST) {
       width = (to - from) * Math.max(0.35, Math.min(0.75, excess ** (-1 / 15)))
-      before = panel.worst
+      before = trial.worst
       continue
     }
     before = Number.POSITIVE_INFINITY
+    const panel = panelFrom(zone, from, to, trial)
     panels.push(panel)
     if (enough(panel, to)) break
     width = (to - from) * Math.min(GROWTH, Math.max(1, 0.95 * (excess + 1e-3) ** (-1 / 15)))
@@ -77,32 +79,47 @@ function noiseIn(before: number, now: number): number {
   return noise < NOISIEST ? noise : 0
 }
 
-/** `worst` is the size of the last two coefficients over what is asked. */
-type Trial = Panel & { readonly worst: number }
+/** A panel that is tried. `worst` is the size of the last two coefficients over what is asked; its series wait in the scratch. */
+interface Trial {
+  readonly worst: number
+  readonly rounding: number
+}
 
-function panelOver(zone: Zone, from: number, to: number): Trial {
+function attempt(zone: Zone, from: number, to: number): Trial {
   const [centre, half] = [(from + to) / 2, (to - from) / 2]
   zone.sampleInto(samples, centre, half)
+  coefficientsInto(coefficients.time, samples.time)
+  coefficientsInto(coefficients.conformal, samples.conformal)
   const conditioning = Math.max(
     zone.conditioning(from + half * 0.01),
     zone.conditioning(centre),
     zone.conditioning(to - half * 0.01),
   )
   const rounding = Number.EPSILON * (2 + conditioning)
-  const [time, timeTail] = stretchOf(samples.time, half, rounding)
-  const [conformal, conformalTail] = stretchOf(samples.conformal, half, rounding)
   // Where E² is small beside its terms, rounding shows in the last coefficients and no narrower panel would lower it.
-  const resolved = Math.max(RESOLVED, rounding)
-  return { zone, from, to, time, conformal, worst: Math.max(timeTail, conformalTail) / resolved }
+  return { worst: Math.max(tailOf('time'), tailOf('conformal')) / Math.max(RESOLVED, rounding), rounding }
 }
 
-function stretchOf(values: Float64Array, half: number, rounding: number): readonly [Stretch, number] {
-  coefficientsInto(coefficients, values)
-  const tail = Math.max(values[0], values[NODE_COUNT - 1]) < SMALLEST ? 0 : relativeTail(coefficients)
-  const left = Math.abs(coefficients[NODE_COUNT - 1]) + Math.abs(coefficients[NODE_COUNT - 2])
-  const series = antiderivative(coefficients, half)
-  const total = sumAtOne(series)
-  return [{ series, total, error: left * half + rounding * Math.abs(total) }, tail]
+const tailOf = (clock: Clock): number =>
+  Math.max(samples[clock][0], samples[clock][NODE_COUNT - 1]) < SMALLEST ? 0 : relativeTail(coefficients[clock])
+
+/** The panel that was tried last. */
+function panelFrom(zone: Zone, from: number, to: number, { rounding }: Trial): Panel {
+  const half = (to - from) / 2
+  return {
+    zone,
+    from,
+    to,
+    time: stretchOf(coefficients.time, half, rounding),
+    conformal: stretchOf(coefficients.conformal, half, rounding),
+  }
+}
+
+function stretchOf(series: Float64Array, half: number, rounding: number): Stretch {
+  const left = Math.abs(series[NODE_COUNT - 1]) + Math.abs(series[NODE_COUNT - 2])
+  const integral = antiderivative(series, half)
+  const total = sumAtOne(integral)
+  return { series: integral, total, error: left * half + rounding * Math.abs(total) }
 }
 
 /** The integral from the panel's inner edge to s. */

@@ -4,6 +4,7 @@
 import { eventAtScale, isEvent } from '../history/event'
 import type { History } from '../history/history'
 import { integrate } from '../numerics/integrate'
+import type { Budget } from '../scenario/budget'
 import type { Scenario } from '../scenario/scenario'
 import { transverseDistance } from './distances'
 import { type Bounded, bounded, isMissing, type Missing, missing, type Outcome } from './outcome'
@@ -54,14 +55,22 @@ export function dragRedshift(scenario: Scenario): Outcome {
   return { value, error: DRAG_FIT_ERROR }
 }
 
+/** Of cold matter: with less the variable is as good. */
+const LEAST = 1e-6
+/** a at which all radiation, early, equals cold matter: with v = √(1 + a/a_eq) − 1, a²H of both is linear in v. */
+const equality = ({ photons, masslessNeutrinos, coldMatter, states }: Budget): number =>
+  states.reduce((sum, one) => sum + one.masslessDensity, photons + masslessNeutrinos) / Math.max(coldMatter, LEAST)
+
 /** Comoving sound horizon at z in c/H₀: ∫ c_s da/(a² H) with c_s = c/√(3(1 + R)), R = 3ρ_b/4ρ_γ. */
 export function soundHorizon(history: History, scenario: Scenario, z: Bounded): Outcome {
   const { model, end } = history.past
   if (end.kind !== 'none') return missing('the expansion did not begin at a = 0')
   const load = (0.75 * scenario.baryons) / ((scenario.h0 / 100) ** 2 * model.budget.photons)
-  const integrand = (a: number) => 1 / Math.sqrt(3 * (1 + load * a) * a ** 4 * model.expansion(Math.log(a), 1 / a))
+  const integrand = (a: number) => 1 / (a * a * Math.sqrt(3 * (1 + load * a) * model.expansion(Math.log(a), 1 / a)))
   const scale = 1 / (1 + z.value)
-  const { value, error } = integrate(integrand, 0, scale)
+  const equal = equality(model.budget)
+  const last = scale / equal / (1 + Math.sqrt(1 + scale / equal))
+  const { value, error } = integrate((v) => 2 * equal * (1 + v) * integrand(equal * v * (2 + v)), 0, last)
   return bounded(value, error + (integrand(scale) * z.error) / (1 + z.value) ** 2)
 }
 
