@@ -33,7 +33,7 @@ export function FieldRow({ field, editing, live }: Props) {
           {field.kind === 'closing' && ', closes'}
         </label>
       </span>
-      <Control field={field} id={id} editing={editing} />
+      <Control field={field} id={id} editing={editing} live={live} />
       {complaint && (
         <p id={`${id}-complaint`} className="complaint" role="alert">
           {complaint}
@@ -48,9 +48,10 @@ interface ControlProps {
   readonly field: Field
   readonly id: string
   readonly editing: Editing
+  readonly live: boolean
 }
 
-function Control({ field, id, editing }: ControlProps) {
+function Control({ field, id, editing, live }: ControlProps) {
   switch (field.kind) {
     case 'closing':
       return (
@@ -67,10 +68,28 @@ function Control({ field, id, editing }: ControlProps) {
       return (
         <span className="entry">
           <input inputMode="text" title={field.allowed} {...typed(field, id, editing)} />
-          <span className="unit">{field.unit}</span>
+          <span className="unit">
+            {field.unit}
+            {live && field.kind === 'number' && <Reset field={field} choose={editing.choose} />}
+          </span>
         </span>
       )
   }
+}
+
+interface ResetProps {
+  readonly field: Extract<Field, { kind: 'number' }>
+  readonly choose: Editing['choose']
+}
+
+/** Back to what holds where nothing is typed. */
+function Reset({ field: { name, label, value, usual }, choose }: ResetProps) {
+  if (usual === null || usual === value) return null
+  return (
+    <button type="button" className="reset" aria-label={`Reset ${label} to ${usual}`} onClick={() => choose(name, '')}>
+      reset
+    </button>
+  )
 }
 
 /** What is typed is taken over on Enter and on leaving the field; Escape takes it back. */

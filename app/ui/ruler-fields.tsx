@@ -43,7 +43,7 @@ export function RulerFields({ ask, shelf, complaints, hand }: Props) {
       {field('until', 'second epoch, if any', unit)}
       {field('sky', 'sky area', 'deg²')}
       {field('line', 'line at rest', '')}
-      {field('length', 'length', lengths)}
+      {field('length', 'length, for angles and recession', lengths)}
       <Tick
         name="units"
         value="h"

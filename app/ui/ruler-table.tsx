@@ -50,6 +50,12 @@ function Row({ row, of }: { readonly row: RulerRow; readonly of: Props['of'] }) 
       </td>
       <th scope="row">
         <Means of={entry}>{label}</Means>
+        {unit && (
+          <span className="unit beside">
+            {' '}
+            <Sentence text={unit} />
+          </span>
+        )}
       </th>
       {cells.map((cell, slot) => (
         // biome-ignore lint/suspicious/noArrayIndexKey: the column of a scenario is its place

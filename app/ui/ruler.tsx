@@ -53,22 +53,36 @@ export function Ruler({ desk, view, shelf, hand }: Props) {
         <ReadingChoices ask={ask} shelf={shelf} hand={hand} />
         {!hand && <button type="submit">Read</button>}
       </form>
-      <Readings view={view} second={ask.until} />
+      <Readings view={view} {...captionsOf(ask, shelf)} />
     </section>
   )
 }
 
-function Readings({ view, second }: { readonly view: RulerView; readonly second: string }) {
+interface Captions {
+  readonly here: string
+  readonly there: string
+}
+
+/** `At redshift 1.9`, `Between redshift 1.9 and 2.1`. */
+function captionsOf({ variable, at, until, hubble }: RulerAsk, { epochs }: Shelf): Captions {
+  const { label = '', unit = '' } = epochs.find(({ key }) => key === variable) ?? {}
+  const units = unit && ` ${hubble && unit === 'Mpc' ? 'h⁻¹ ' : ''}${unit}`
+  const shown = (text: string) => text.replace(/^-/, '−')
+  return {
+    here: `At ${label} ${shown(at)}${units}`,
+    there: `Between ${label} ${shown(at)} and ${shown(until)}${units}`,
+  }
+}
+
+function Readings({ view, here, there }: Captions & { readonly view: RulerView }) {
   const { at, between, notes, downloads } = view
   if (at.length === 0 && between.length === 0) {
     return <p className="readings because">Nothing is read: choose readings, or correct the field that is marked.</p>
   }
   return (
     <div className="readings">
-      {at.length > 0 && <RulerTable view={view} rows={at} of="reading" caption="At this epoch" />}
-      {between.length > 0 && (
-        <RulerTable view={view} rows={between} of="between" caption={`Between this epoch and ${second}`} />
-      )}
+      {at.length > 0 && <RulerTable view={view} rows={at} of="reading" caption={here} />}
+      {between.length > 0 && <RulerTable view={view} rows={between} of="between" caption={there} />}
       {notes.map((note) => (
         <p key={note} className="because">
           <Sentence text={note} />

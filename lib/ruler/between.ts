@@ -127,7 +127,7 @@ export const BETWEEN: readonly Between[] = [
     key: 'criticalSurfaceDensity',
     symbol: 'Σ_cr',
     label: 'lensing critical density',
-    unit: 'M_{☉}/pc²',
+    unit: 'M☉/pc²',
     digits: significant(5),
     meaning: 'Surface density of a lens at the nearer that can make several images of a source at the farther.',
     formula: 'Σ_cr = (c²/4πG) D_{A,2}/(D_{A,1} D_{A,12})',

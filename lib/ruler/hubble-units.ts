@@ -1,7 +1,7 @@
 /** Lengths and what is made of them in units with h⁻¹, h = H₀/(100 km/s/Mpc). */
 
 /** Powers of h in the units that carry one. */
-const POWERS: Readonly<Record<string, number>> = { Mpc: -1, kpc: -1, Gly: -1, 'Gpc³': -3, 'M_{☉}/pc²': 1 }
+const POWERS: Readonly<Record<string, number>> = { Mpc: -1, kpc: -1, Gly: -1, 'Gpc³': -3, 'M☉/pc²': 1 }
 const WRITTEN: Readonly<Record<number, string>> = { [-1]: 'h⁻¹ ', [-3]: 'h⁻³ ', 1: 'h ' }
 
 export function unitWithHubble(unit: string): string {

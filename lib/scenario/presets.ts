@@ -126,7 +126,7 @@ export const PUBLISHED_SETS: readonly PublishedSet[] = [
     kept: null,
     confidence: '68%',
     citation: 'DESI Collaboration 2025, arXiv:2503.14738, Table V',
-    note: 'Ω_b h² and neutrinos are not part of the set and stand at the values used elsewhere here.',
+    note: 'Ω_b h² and neutrinos at their defaults.',
   },
   {
     key: 'desi_dr2_LCDM_DESI_BBN',
@@ -140,7 +140,7 @@ export const PUBLISHED_SETS: readonly PublishedSet[] = [
     kept: null,
     confidence: '68%',
     citation: 'DESI Collaboration 2025, arXiv:2503.14738, Table V',
-    note: 'Ω_b h² and neutrinos are not part of the set and stand at the values used elsewhere here.',
+    note: 'Ω_b h² and neutrinos at their defaults.',
   },
   {
     key: 'desi_dr2_oLCDM_DESI_CMB',
@@ -155,7 +155,7 @@ export const PUBLISHED_SETS: readonly PublishedSet[] = [
     kept: null,
     confidence: '68%',
     citation: 'DESI Collaboration 2025, arXiv:2503.14738, Table V',
-    note: 'Ω_b h² and neutrinos are not part of the set and stand at the values used elsewhere here.',
+    note: 'Ω_b h² and neutrinos at their defaults.',
   },
   {
     key: 'desi_dr2_w0wa_DESI_CMB',
@@ -171,7 +171,7 @@ export const PUBLISHED_SETS: readonly PublishedSet[] = [
     kept: null,
     confidence: '68%',
     citation: 'DESI Collaboration 2025, arXiv:2503.14738, Table V',
-    note: 'Ω_b h² and neutrinos are not part of the set and stand at the values used elsewhere here.',
+    note: 'Ω_b h² and neutrinos at their defaults.',
   },
   {
     key: 'desi_dr2_w0wa_DESI_CMB_PantheonPlus',
@@ -187,7 +187,7 @@ export const PUBLISHED_SETS: readonly PublishedSet[] = [
     kept: null,
     confidence: '68%',
     citation: 'DESI Collaboration 2025, arXiv:2503.14738, Table V',
-    note: 'Ω_b h² and neutrinos are not part of the set and stand at the values used elsewhere here.',
+    note: 'Ω_b h² and neutrinos at their defaults.',
   },
   {
     key: 'desi_dr2_w0wa_DESI_CMB_DESY5',
@@ -203,7 +203,7 @@ export const PUBLISHED_SETS: readonly PublishedSet[] = [
     kept: null,
     confidence: '68%',
     citation: 'DESI Collaboration 2025, arXiv:2503.14738, Table V',
-    note: 'Ω_b h² and neutrinos are not part of the set and stand at the values used elsewhere here.',
+    note: 'Ω_b h² and neutrinos at their defaults.',
   },
   {
     key: 'sh0es_2022',

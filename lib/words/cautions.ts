@@ -60,6 +60,6 @@ export const CAUTIONS: readonly Caution[] = [
   {
     key: 'units',
     title: 'Units and constants',
-    text: 'A year is the Julian year, a light year is made of it, a parsec is that of the IAU (2015); the speed of light is exact, other constants are CODATA 2018, the mass of the sun is the nominal G M_{☉} of the IAU (2015).',
+    text: 'A year is the Julian year, a light year is made of it, a parsec is that of the IAU (2015); the speed of light is exact, other constants are CODATA 2018, the mass of the sun is the nominal G M☉ of the IAU (2015).',
   },
 ]

@@ -29,6 +29,8 @@ export type Field =
       readonly unit: string
       readonly allowed: string
       readonly slider: NumberParameter['slider']
+      /** What holds where nothing is typed; null where that follows from the other fields. */
+      readonly usual: string | null
     })
   | (Described & { readonly kind: 'list'; readonly unit: string; readonly allowed: string })
   | (Described & { readonly kind: 'choice'; readonly choices: readonly Choice[] })
@@ -161,7 +163,10 @@ type Numeric = Pick<
   Exclude<Parameter, { kind: 'choice' }>,
   'key' | 'symbol' | 'label' | 'meaning' | 'unit' | 'min' | 'max'
 > &
-  ({ readonly kind: 'list' } | Pick<NumberParameter, 'kind' | 'slider'>)
+  (
+    | { readonly kind: 'list' }
+    | (Pick<NumberParameter, 'kind' | 'slider'> & { readonly fallback: NumberParameter['fallback'] | null })
+  )
 
 function numberField(parameter: Numeric, value: ParameterValue): Field {
   const { key, symbol, label, meaning, min, max } = parameter
@@ -170,7 +175,12 @@ function numberField(parameter: Numeric, value: ParameterValue): Field {
   const allowed = `${min} to ${max}`.replaceAll('-', '−')
   const field = { name: key, symbol, label, meaning, unit, value: text, allowed, means: `parameter-${key}` }
   return parameter.kind === 'number'
-    ? { ...field, kind: 'number', slider: parameter.slider }
+    ? {
+        ...field,
+        kind: 'number',
+        slider: parameter.slider,
+        usual: parameter.fallback === null ? null : String(parameter.fallback),
+      }
     : { ...field, kind: 'list' }
 }
 
