@@ -25,8 +25,11 @@ export function drawCurve(curve: Curve, plot: Plot, { type }: Frame): SvgNode {
 }
 
 function pathOf(points: readonly Point[], plot: Plot): string {
-  return points.map(([x, y], i) => `${i === 0 ? 'M' : 'L'}${plot.x(x)} ${plot.y(y)}`).join('')
+  return points.map(([x, y], i) => `${i === 0 ? 'M' : 'L'}${fine(plot.x(x))} ${fine(plot.y(y))}`).join('')
 }
+
+/** A tenth of a unit cannot be seen, and paths are most of what a drawing weighs. */
+const fine = (value: number): number => Math.round(value * 10) / 10
 
 function asymptote({ asymptote }: Curve, plot: Plot, type: number): SvgNode[] {
   if (asymptote === null) return []

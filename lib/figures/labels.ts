@@ -28,7 +28,8 @@ const GAP = 0.9
 const LONGEST_NAME = { wide: 13, compact: 6.5 }
 
 export function nameOf(curve: Curve, frame: Frame): string {
-  return fitted(curve.name, frame.type, frame.type * (frame.compact ? LONGEST_NAME.compact : LONGEST_NAME.wide))
+  const short = frame.compact && curve.finish?.edge !== 'along'
+  return fitted(curve.name, frame.type, frame.type * (short ? LONGEST_NAME.compact : LONGEST_NAME.wide))
 }
 
 export function labelHeight(label: Pick<Label, 'name' | 'note'>, type: number): number {

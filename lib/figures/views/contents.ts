@@ -23,6 +23,7 @@ const PARTS: readonly { readonly key: ColumnKey; readonly tone: string; readonly
   { key: 'omegaCurvature', tone: 'part-curvature', name: 'curvature' },
 ]
 
+const STEPS = 160
 /** A share that never reaches this is not drawn. */
 const NOTHING = 5e-4
 /** Near a turning point the shares have no bounds. */
@@ -47,7 +48,7 @@ function shares(asked: Asked): Chart {
     all.map(({ values }) => values),
     x,
     [asked.by.now],
-    240,
+    STEPS,
   )
   const seen = all.filter((_, i) => first.values[i]?.some((value) => value !== null && Math.abs(value) >= NOTHING))
   const readings = {

@@ -31,7 +31,7 @@ export interface Vertical {
 
 export type Values = (places: readonly number[]) => readonly (number | null)[]
 
-const STEPS = 240
+const STEPS = 160
 
 export function quantityChart(asked: Asked, vertical: Vertical): Chart {
   const { solutions, by, focus, compare } = asked

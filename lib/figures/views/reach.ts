@@ -17,7 +17,7 @@ import { curveOf, type Values } from './quantity-chart'
 import { type Asked, focusOf, rangeOf, type View } from './view'
 
 const BY = ['time', 'logtime', 'scale']
-const STEPS = 200
+const STEPS = 160
 
 const isProper = ({ show }: Asked): boolean => show.key === 'proper'
 
