@@ -2,6 +2,7 @@
 import { expect, type Page, test } from '@playwright/test'
 
 const verdict = (page: Page, name: string) => page.locator('.verdict', { hasText: name }).locator('.said')
+const ingredients = (page: Page) => page.locator('.ingredients')
 const measure = (page: Page, key: string) => page.locator(`[data-measure="${key}"] .value`)
 
 test.describe('without JavaScript', () => {
@@ -23,11 +24,11 @@ test.describe('without JavaScript', () => {
   test('parameters are set by the form and the verdict changes', async ({ page }) => {
     await page.goto('/?s=h0:70,matter:0.3')
     await expect(verdict(page, 'Scenario 1')).toContainText('expands for ever')
-    await page.getByLabel('matter').fill('1,5')
-    await page.getByLabel('law of dark energy').selectOption('constant')
+    await ingredients(page).getByLabel('matter').fill('1,5')
+    await ingredients(page).getByLabel('law of dark energy').selectOption('constant')
     await page.getByRole('button', { name: 'Apply' }).click()
-    await page.getByLabel('equation of state').fill('−0,9')
-    await page.getByLabel('name').fill('Heavy, and sinking')
+    await ingredients(page).getByLabel('equation of state').fill('−0,9')
+    await ingredients(page).getByLabel('name').fill('Heavy, and sinking')
     await page.getByRole('button', { name: 'Apply' }).click()
     await expect(page).toHaveURL(/[?]s=h0:70,matter:1.5,eos:constant,w:-0.9,as:Heavy%2C%20and%20sinking$/)
     await expect(verdict(page, 'Heavy, and sinking')).toContainText('ends in a Big Crunch')
@@ -41,7 +42,7 @@ test.describe('without JavaScript', () => {
     await expect(page.locator('.verdict h2')).toHaveText(['One', 'One 2', 'Scenario 3'])
     await page.locator('.tab', { hasText: 'One 2' }).click()
     await expect(page.locator('#moments')).toHaveText('Moments of One 2')
-    await page.getByLabel('Hubble constant').fill('60')
+    await ingredients(page).getByLabel('Hubble constant').fill('60')
     await page.getByRole('button', { name: 'Apply' }).click()
     await expect(page.locator('.verdict h2')).toHaveText(['One', 'One 2', 'Scenario 3'])
     await expect(page.locator('#moments')).toHaveText('Moments of One 2')
