@@ -2,6 +2,7 @@ import { lazy, Suspense, useState } from 'react'
 import type { Choice, TakeAwayLists } from '../../lib/answers/take-away'
 import { frameHtml } from '../../lib/formats/frame'
 import type { Desk } from '../../lib/words/desk'
+import { placePairs } from '../../lib/words/place'
 import { CopyText } from './copy-text'
 
 interface Props {
@@ -17,22 +18,43 @@ const Words = lazy(() => import('./take-away-fetched'))
 export function TakeAway({ desk, lists, live }: Props) {
   const query = queryOf(desk)
   const theme = desk.place.theme === 'night' ? '&theme=night' : ''
+  const figures = figuresOf(desk.place, lists)
   const [open, setOpen] = useState(false)
   return (
     <section className="take-away" aria-labelledby="take-away">
       <h2 id="take-away" className="heading">
         Take away
       </h2>
-      <table>
+      <table className="figures">
+        <thead>
+          <tr>
+            <th scope="col">Figures</th>
+            {figures.map(({ title }) => (
+              <th key={title} scope="col">
+                {title}
+              </th>
+            ))}
+          </tr>
+        </thead>
         <tbody>
           {lists.sizes.map(({ key, label }) => (
-            <Row
-              key={key}
-              label={`Figure, ${label}`}
-              choices={lists.figures}
-              href={(format) => `/api/figure?${query}&size=${key}&format=${format}${theme}`}
-            />
+            <tr key={key}>
+              <th scope="row">{label}</th>
+              {figures.map(({ title, keys }) => (
+                <td key={title}>
+                  <Files
+                    label={`${title}, ${label}`}
+                    choices={lists.figures}
+                    href={(format) => `/api/figure?${query}${keys}&size=${key}&format=${format}${theme}`}
+                  />
+                </td>
+              ))}
+            </tr>
           ))}
+        </tbody>
+      </table>
+      <table>
+        <tbody>
           <Row label="Table" choices={lists.tables} href={(format) => `/api/table?${query}&format=${format}`} />
           <Codes query={query} lists={lists} live={live} />
           <FrameRow query={`${query}${theme}`} title={titleOf(desk)} lists={lists} live={live} />
@@ -97,14 +119,33 @@ function Row({ label, choices, href }: RowProps) {
     <tr>
       <th scope="row">{label}</th>
       <td>
-        {choices.map(({ key, label: name }) => (
-          <a key={key} href={href(key)} rel="nofollow" download aria-label={`${label} as ${name}`}>
-            {name}
-          </a>
-        ))}
+        <Files label={label} choices={choices} href={href} />
       </td>
     </tr>
   )
+}
+
+function Files({ label, choices, href }: RowProps) {
+  return choices.map(({ key, label: name }) => (
+    <a key={key} href={href(key)} rel="nofollow" download aria-label={`${label} as ${name}`}>
+      {name}
+    </a>
+  ))
+}
+
+const OF_LONG = ['time', 'from', 'to']
+const OF_VIEW = ['focus', 'show', 'by', 'compare', 'galaxy', 'left', 'right']
+
+/** Both figures of the page as they are shown, each with the keys that say so. */
+function figuresOf(place: Desk['place'], { views }: TakeAwayLists) {
+  const pairs = placePairs(place)
+  const keysOf = (wanted: readonly string[]) =>
+    pairs.flatMap(([key, value]) => (wanted.includes(key) ? [`&${key}=${encodeURIComponent(value)}`] : [])).join('')
+  const view = views.find(({ key }) => key === place.view) ?? views[0]
+  return [
+    { title: 'Long view', keys: keysOf(OF_LONG) },
+    { title: view?.label ?? '', keys: `&view=${view?.key}${keysOf(OF_VIEW)}` },
+  ]
 }
 
 /** A code has to lead somewhere: where the server does not know its own address, the browser does. */

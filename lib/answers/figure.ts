@@ -1,6 +1,8 @@
 /** `/api/figure`: a view of scenarios as a file for a place. */
 import type { Chart } from '../figures/chart'
 import { drawChart, heightOfChart } from '../figures/draw-chart'
+import { VIEWS } from '../figures/views'
+import type { View } from '../figures/views/view'
 import { fileName } from '../formats/file-name'
 import { type Picture, type Sheet, sheetOf } from '../print/sheet'
 import { SIZES, type Size } from '../print/sizes'
@@ -12,36 +14,30 @@ import type { Reading, Scenario } from '../scenario/scenario'
 import { linkQuery } from '../scenario/write'
 import { ENGINE, type Solution } from '../solve'
 import { nameOf } from '../words/desk'
+import { type Place, placeKeys } from '../words/place'
 import { joined } from '../words/sentence'
 import { verdictOf } from '../words/verdict'
 import { count, oneOf, take } from './fields'
+import { PLACE_FIELDS, readFigurePlace } from './figure-place'
 import { readKeys } from './keys'
+import { longChart } from './long-panel'
+import { viewChart } from './panel'
 import { mapped, type Pairs, type Question, scenariosOf, solved } from './question'
 import type { Home } from './table'
-import { figureOf } from './words'
 
-/** A view of solved scenarios, with what says the same in words. */
-interface View {
-  readonly key: string
-  readonly of: (solutions: readonly Solution[]) => Picture & { readonly caption: string; readonly alternative: string }
-}
+const LONG = 'long'
 
 /** All views that can be had as files, the default first. */
-export const VIEWS: readonly View[] = [
-  {
-    key: 'long',
-    of: (solutions) => {
-      const chart = figureOf(solutions)
-      const { caption, alternative } = chart
-      return { caption, alternative, ...pictureOf(chart), lean: pictureOf({ ...chart, ribbons: [] }) }
-    },
-  },
-]
+export const VIEW_KEYS = [{ key: LONG }, ...VIEWS.map(({ key }) => ({ key }))]
 
-const pictureOf = (chart: Chart): Picture => ({
-  draw: (frame) => drawChart(chart, frame),
-  heightOf: (frame) => heightOfChart(chart, frame),
-})
+/** A chart, and the same without what hangs below it. */
+function pictureOf(chart: Chart): Picture {
+  const of = (one: Chart): Picture => ({
+    draw: (frame) => drawChart(one, frame),
+    heightOf: (frame) => heightOfChart(one, frame),
+  })
+  return chart.ribbons.length === 0 ? of(chart) : { ...of(chart), lean: of({ ...chart, ribbons: [] }) }
+}
 
 export const FIGURE_FORMATS = [
   { key: 'svg', mediaType: 'image/svg+xml' },
@@ -55,11 +51,16 @@ export const LEAST_DPI = 96
 export const MOST_DPI = 600
 export const MOST_PIXELS = 40e6
 
+function told({ key, title, shows }: View): string {
+  return `${key}: ${title}, with show one of ${shows.map((show) => show.key).join(', ')}.`
+}
+
 export const FIGURE_FIELDS = {
-  view: oneOf('view', VIEWS, 'What is drawn: long, the scale factor against time.'),
+  view: oneOf('view', VIEW_KEYS, `What is drawn. long: scale factor against time. ${VIEWS.map(told).join(' ')}`),
   format: oneOf('format', FIGURE_FORMATS, 'The format of the file.'),
   size: oneOf('size', SIZES, SIZES.map(({ key, label, source }) => `${key}: ${label} (${source}).`).join(' ')),
   theme: oneOf('theme', THEMES, 'Dark on light, or light on dark.'),
+  ...PLACE_FIELDS,
   dpi: count('dpi', LEAST_DPI, MOST_DPI, `Dots an inch of a PNG of at most ${MOST_PIXELS / 1e6} megapixels.`),
 }
 
@@ -73,7 +74,8 @@ export interface FigureFile {
 }
 
 interface Order {
-  readonly view: View
+  readonly view: string
+  readonly place: Place
   readonly format: FigureFormat
   readonly size: Size
   readonly theme: ThemeKey
@@ -95,7 +97,8 @@ export function askFigure(pairs: Pairs, home: Home): Reading<Question<FigureFile
 }
 
 function readOrder(values: ReadonlyMap<string, string>, faults: Fault[], scenarios: number): Order {
-  const view = take(values, 'view', FIGURE_FIELDS.view, faults) ?? VIEWS[0]
+  const view = take(values, 'view', FIGURE_FIELDS.view, faults)?.key ?? LONG
+  const place = readFigurePlace(view, values, scenarios, faults)
   const format = take(values, 'format', FIGURE_FIELDS.format, faults) ?? FIGURE_FORMATS[0]
   const size = take(values, 'size', FIGURE_FIELDS.size, faults) ?? SIZES[0]
   const theme = take(values, 'theme', FIGURE_FIELDS.theme, faults)?.key ?? THEME_KEYS[0]
@@ -109,7 +112,7 @@ function readOrder(values: ReadonlyMap<string, string>, faults: Fault[], scenari
     const message = `The picture would have ${(pixelsOf(size, scenarios, dpi) / 1e6).toFixed(0)} megapixels.`
     faults.push(fault('dpi', String(dpi), `up to ${most} with size=${size.key}`, message))
   }
-  return { view, format, size, theme, dpi }
+  return { view, place, format, size, theme, dpi }
 }
 
 /** At most: each scenario has a ribbon below the plot. In units of the type. */
@@ -124,19 +127,20 @@ function pixelsOf({ width, height, fixed, type }: Size, scenarios: number, dpi: 
 const mostDpi = (size: Size, scenarios: number): number =>
   Math.min(MOST_DPI, Math.floor(Math.sqrt(MOST_PIXELS / pixelsOf(size, scenarios, 1))))
 
-function orderText({ view, format, size, theme, dpi }: Order): string {
+function orderText({ view, place, format, size, theme, dpi }: Order): string {
   const dots = format.key === 'png' ? `&dpi=${dpi}` : ''
-  return `view=${view.key}&format=${format.key}&size=${size.key}&theme=${theme}${dots}`
+  const shown = placeKeys({ ...place, view: null, theme: null }).map((pair) => `&${pair}`)
+  return `view=${view}${shown.join('')}&format=${format.key}&size=${size.key}&theme=${theme}${dots}`
 }
 
 function figureFile(
   scenarios: readonly Scenario[],
   solutions: readonly Solution[],
-  { view, format, size, theme, dpi }: Order,
+  { view, place, format, size, theme, dpi }: Order,
   home: Home,
 ): FigureFile {
   const named = solutions.map((one, slot) => ({ ...one, label: nameOf(one.scenario, slot) }))
-  const picture = view.of(named)
+  const chart = view === LONG ? longChart({ solutions: named, place }) : viewChart({ solutions: named, place })
   const title = joined(named.map(({ label }) => label))
   const edition = `Longhence ${home.version}, engine ${ENGINE}`
   const codes = named.map(({ code }) => decodeURIComponent(code))
@@ -145,14 +149,14 @@ function figureFile(
   return {
     format,
     dpi,
-    fileName: fileName([...(names.length > 0 ? names : ['figure']), view.key, size.key], format.key),
-    sheet: sheetOf(picture, size, paletteOf(theme), {
+    fileName: fileName([...(names.length > 0 ? names : ['figure']), view, size.key], format.key),
+    sheet: sheetOf(pictureOf(chart), size, paletteOf(theme), {
       heading: [title, verdictOf(named[0], null).sentences[0] ?? ''],
       foot: `${edition}: ${codes.join('; ')}`,
     }),
     about: {
       title,
-      description: `${picture.caption} ${picture.alternative} Scenarios: ${codes.join('; ')}. ${edition}. ${link}`,
+      description: `${chart.caption} ${chart.alternative} Scenarios: ${codes.join('; ')}. ${edition}. ${link}`,
     },
   }
 }

@@ -1,4 +1,5 @@
 /** What can be taken away, as data for the page: it needs names and keys, not what makes the files. */
+import { VIEWS } from '../figures/views'
 import { FORMATS } from '../formats'
 import { SIZES } from '../print/sizes'
 import { FIGURE_FORMATS } from './figure'
@@ -15,6 +16,8 @@ export interface Choice {
 export interface TakeAwayLists {
   /** What stands before the paths of links; empty where the server does not know it. */
   readonly base: string
+  /** Views below the long one, the default first. */
+  readonly views: readonly Choice[]
   readonly sizes: readonly Choice[]
   readonly figures: readonly Choice[]
   readonly tables: readonly Choice[]
@@ -23,6 +26,7 @@ export interface TakeAwayLists {
 
 export const takeAwayLists = (base: string): TakeAwayLists => ({
   base,
+  views: VIEWS.map(({ key, title }) => ({ key, label: title })),
   sizes: SIZES.map(named),
   figures: FIGURE_FORMATS.map(upper),
   tables: FORMATS.map(named),

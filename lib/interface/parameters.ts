@@ -1,6 +1,7 @@
 /** Query keys of the routes, described by the very schemas that read them. */
 import { AT_FIELDS } from '../answers/epochs'
-import { FIGURE_FIELDS, FIGURE_FORMATS, LEAST_DPI, MOST_DPI, VIEWS } from '../answers/figure'
+import { FIGURE_FIELDS, FIGURE_FORMATS, LEAST_DPI, MOST_DPI, VIEW_KEYS } from '../answers/figure'
+import type { PLACE_FIELDS } from '../answers/figure-place'
 import { TABLE_FIELDS } from '../answers/layout'
 import { OEMBED_FIELDS } from '../answers/oembed'
 import { QR_FIELDS, QR_FORMATS } from '../answers/qr'
@@ -46,8 +47,23 @@ const TABLE_SHAPES: Readonly<Record<keyof typeof TABLE_FIELDS, Schema>> = {
   columns,
 }
 
+const plain: Schema = { type: 'number' }
+const PLACE_SHAPES: Readonly<Record<keyof typeof PLACE_FIELDS, Schema>> = {
+  focus: { type: 'integer', minimum: 1, maximum: MOST_SCENARIOS, default: 1 },
+  time: { enum: ['log'] },
+  from: plain,
+  to: plain,
+  show: { type: 'string' },
+  by: { type: 'string' },
+  compare: { enum: ['ratio', 'difference'] },
+  galaxy: plain,
+  left: plain,
+  right: plain,
+}
+
 const FIGURE_SHAPES: Readonly<Record<keyof typeof FIGURE_FIELDS, Schema>> = {
-  view: { ...keysOf(VIEWS), default: VIEWS[0].key },
+  view: { ...keysOf(VIEW_KEYS), default: VIEW_KEYS[0].key },
+  ...PLACE_SHAPES,
   format: { ...keysOf(FIGURE_FORMATS), default: FIGURE_FORMATS[0].key },
   size: { ...keysOf(SIZES), default: SIZES[0].key },
   theme: { enum: THEME_KEYS, default: THEME_KEYS[0] },

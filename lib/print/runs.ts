@@ -13,33 +13,35 @@ export interface Run {
   readonly halo: string | null
 }
 
-export function runsOfText(
-  { attributes, children }: SvgNode,
-  faces: Faces,
-  inherited: Attributes = {},
-): readonly Run[] {
-  const own = { ...inherited, ...attributes }
-  const size = Number(own['font-size'])
-  const parts = children.flatMap((child) =>
-    typeof child === 'string'
-      ? [{ text: child, face: faceOf(own) }]
-      : [{ text: child.children.join(''), face: faceOf({ ...own, ...child.attributes }) }],
-  )
-  const widths = parts.map(({ text, face }) => widthOf(faces[face], text, size))
+export function runsOfText({ attributes, children }: SvgNode, faces: Faces): readonly Run[] {
+  const parts = partsOf(attributes, children)
+  const widths = parts.map(({ text, face, size }) => widthOf(faces[face], text, size))
   const total = widths.reduce((sum, width) => sum + width, 0)
-  let x = Number(own.x) - total * shareBefore(own['text-anchor'])
-  return parts.map(({ text, face }, i) => {
-    const run = {
-      text,
-      face,
-      size,
-      x,
-      y: Number(own.y),
-      fill: String(own.fill ?? '#000000'),
-      halo: own.halo === undefined ? null : String(own.halo),
-    }
+  const fill = String(attributes.fill ?? '#000000')
+  const halo = attributes.halo === undefined ? null : String(attributes.halo)
+  let [x, y] = [Number(attributes.x) - total * shareBefore(attributes['text-anchor']), Number(attributes.y)]
+  return parts.map(({ text, face, size, drop }, i) => {
+    y += drop
+    const run = { text, face, size, x, y, fill, halo }
     x += widths[i]
     return run
+  })
+}
+
+interface Part {
+  readonly text: string
+  readonly face: FaceKey
+  readonly size: number
+  /** By how much lower than the part before: subscripts and back. */
+  readonly drop: number
+}
+
+function partsOf(attributes: Attributes, children: SvgNode['children']): readonly Part[] {
+  return children.flatMap((child) => {
+    const own = typeof child === 'string' ? attributes : { ...attributes, ...child.attributes }
+    const text = typeof child === 'string' ? child : child.children.join('')
+    const drop = typeof child === 'string' ? 0 : Number(child.attributes.dy ?? 0)
+    return text === '' ? [] : [{ text, face: faceOf(own), size: Number(own['font-size']), drop }]
   })
 }
 

@@ -8,7 +8,7 @@ export interface Size {
   /** Of the sheet where it is `fixed`, else of the plot with its axes: what hangs below makes the sheet higher. */
   readonly height: number
   readonly fixed: boolean
-  /** Points of the type; the smallest letters of a figure have 0.78 of it. */
+  /** Points of the type; the smallest letters of a figure have 0.78 of it, subscripts less. */
   readonly type: number
   /** Points of the smallest letters that the place allows, and who says so. */
   readonly least: number
