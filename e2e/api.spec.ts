@@ -37,6 +37,24 @@ test.describe('answers', () => {
     const { rows } = (await response.json()).scenarios[0]
     expect(rows.map(([z]: number[]) => z)).toEqual([0.5, 1])
   })
+  test('neighbours', async ({ request }) => {
+    const response = await request.get('/api/neighbours?s=matter:0.3,dark:0.7,cmb:0')
+    expect(response.status()).toBe(200)
+    const { engine, scenarios } = await response.json()
+    expect(engine).toEqual(expect.any(String))
+    expect(scenarios[0]).toMatchObject({ code: 'h0:67.66,matter:0.3,dark:0.7,cmb:0', closes: 'curvature' })
+    const below = scenarios[0].neighbours.find((one: { direction: string }) => one.direction === 'down')
+    expect(below).toMatchObject({
+      parameter: 'dark',
+      value: 0,
+      end: { from: 'exponential', to: 'crunch' },
+      origin: null,
+    })
+    const again = await request.get('/api/neighbours?s=matter:0.30,cmb:0,dark:.7', {
+      headers: { 'If-None-Match': response.headers().etag },
+    })
+    expect(again.status()).toBe(304)
+  })
   test('a table, as a file, line by line', async ({ request }) => {
     const response = await request.get('/api/table?s=h0:70,as:Steady%20light&rows=5000&columns=scale,age')
     expect(response.headers()['content-type']).toBe('text/csv; charset=utf-8; header=present')
@@ -160,6 +178,8 @@ const REFUSED: readonly (readonly [target: string, parameter: string, scenario?:
   ['/api/at?z=1&toString', 'toString'],
   ['/api/at?z=1&=1', ''],
   ['/api/history?z=1', 'z'],
+  ['/api/neighbours?z=1', 'z'],
+  ['/api/neighbours?s=', 's', 0],
   ['/api/history?s=h0:70,h0:71', 'h0', 0],
   ['/api/history?s=__proto__:1', '__proto__', 0],
   ['/api/history?s=constructor:1', 'constructor', 0],

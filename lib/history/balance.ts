@@ -35,7 +35,9 @@ export class Balance {
   #meanRise = 0
   #leastRise = 0
   #mostRise = 0
-  #slack = 0
+  #fallSpread = 0
+  #fallSizes = 0
+  #meanSizes = 0
   #N = Number.NaN
 
   constructor(terms: readonly Term[], direction: Direction) {
@@ -102,10 +104,10 @@ export class Balance {
     this.#rates(length, true)
     // What of P thins out no faster than any negative term outweighs M for ever, if it does so here.
     if (this.#lasting > 0 && h + Math.log(this.#lasting) > this.error) return Number.POSITIVE_INFINITY
-    const plain = h / Math.max(0, this.#fall + this.#mostRise + this.#slack)
+    const plain = h / Math.max(0, this.#fall + this.#mostRise + this.#slackWith(this.#mostRise, 0))
     const spread = this.#mostRise - this.#leastRise
     if (this.#minus.length < 2 || !Number.isFinite(spread)) return Number.isNaN(plain) ? 0 : plain
-    const closing = this.#fall + this.#meanRise + this.#slack
+    const closing = this.#fall + this.#meanRise + this.#slackWith(this.#meanSizes, spread)
     const bent = (2 * h) / (closing + Math.sqrt(closing * closing + 0.5 * h * spread * spread))
     return Math.max(plain, bent) || 0
   }
@@ -113,7 +115,15 @@ export class Balance {
   /** The slowest that h falls outwards on the next `length`: above zero, h falls on all of it. For short steps only. */
   falling(length: number): number {
     this.#rates(length, false)
-    return this.#fall + this.#leastRise - this.#slack
+    return this.#fall + this.#leastRise - this.#slackWith(this.#leastRise, 0)
+  }
+
+  /**
+   * What rounding may have moved a sum of rates by, of which those of M have this size and differ by this much in a mean. Weights add
+   * up to 1, so that their errors move a mean by no more than the rates differ.
+   */
+  #slackWith(rise: number, spread: number): number {
+    return Number.EPSILON * (2 * this.#rounding * (this.#fallSpread + spread) + 16 * (this.#fallSizes + Math.abs(rise)))
   }
 
   /** Bounds of the rates on the next `length`: the fastest that h could fall, or the slowest. */
@@ -137,6 +147,7 @@ export class Balance {
       if (rate > steepest) steepest = rate
     }
     let mean = 0
+    let meanSizes = 0
     let least = Number.POSITIVE_INFINITY
     let most = Number.NEGATIVE_INFINITY
     for (let i = 0; i < this.#minus.length; i++) {
@@ -145,7 +156,9 @@ export class Balance {
       const rate = outwards ? -n : n
       if (rate < least) least = rate
       if (rate > most) most = rate
-      if (this.#minusWeights[i] !== 0) mean += this.#minusWeights[i] * rate
+      if (this.#minusWeights[i] === 0) continue
+      mean += this.#minusWeights[i] * rate
+      meanSizes += this.#minusWeights[i] * Math.abs(rate)
     }
     let lasting = 0
     for (let i = 0; i < this.#plus.length; i++) if (rates[i] + most <= 0) lasting += this.#weights[i]
@@ -154,10 +167,9 @@ export class Balance {
     this.#meanRise = mean
     this.#leastRise = least
     this.#mostRise = most
-    // Weights add up to 1, so that their errors move a mean by no more than the rates differ.
-    const spread = (steepest > slowest ? steepest - slowest : 0) + (most > least ? most - least : 0)
-    const rounded = sizes + Math.max(Math.abs(most), Math.abs(least))
-    this.#slack = Number.EPSILON * (2 * this.#rounding * spread + 16 * rounded)
+    this.#fallSpread = steepest > slowest ? steepest - slowest : 0
+    this.#fallSizes = sizes
+    this.#meanSizes = meanSizes
   }
 }
 

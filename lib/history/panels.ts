@@ -37,7 +37,7 @@ const GROWTH = 1.7
 /** A narrower trial that is not five times better shows noise, unless above NOISIEST times what is asked: it should be 60 times. */
 const NOISIEST = 1e3
 /** Panels tried in one zone before the scenario is given up. */
-const MOST_PANELS = 4000
+const MOST_PANELS = 1500
 
 /** Integrands below this no longer have all their digits. */
 const SMALLEST = 1e-280

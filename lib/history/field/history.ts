@@ -2,15 +2,17 @@
 import type { Potential } from '../../dark-energy/potential'
 import { powerLaw } from '../../dark-energy/power-law'
 import { type Model, modelOf } from '../../model'
+import type { Purse } from '../../numerics/ode'
 import type { Budget } from '../../scenario/budget'
 import { type Arm, armOf } from '../arm'
 import { endOf } from '../ending'
 import { originOf } from '../origin'
+import type { Origin } from '../outcome'
 import type { History } from '../whole'
 import { errorAhead, lookAhead, type Outlook } from './ahead'
 import { backgroundOf } from './background'
 import { averagedCrunch, crunchAfter, endAhead } from './endings'
-import { BUDGET, fieldToday } from './height'
+import { BUDGET, FUTURE_BUDGET, fieldToday } from './height'
 import { fieldLaw } from './law'
 import { energyOf } from './motion'
 import { FROZEN, PASSAGE_ERROR, passage } from './shot'
@@ -38,15 +40,24 @@ export function fieldHistory(budget: Budget, potential: Potential, hold: boolean
       budget.closes === 'dark' ? 'matter' : 'dark',
     )
   }
-  const now = today(budget, potential)
+  const purse = { left: BUDGET }
+  const now = today(budget, potential, purse)
   const w = now.past.model.law.w(0)
-  const ahead = hold ? held(now, modelOf(budget, powerLaw(w))) : followed(now)
+  const ahead = hold ? held(now, modelOf(budget, powerLaw(w))) : followed(now, aheadOf(purse))
   // Before a bounce in the frozen era the same universe came in, mirrored.
-  return { past: now.past, before: ahead.future, origin: originOf(now.past, ahead.future), ...ahead }
+  return { past: now.past, before: ahead.future, origin: fieldOrigin(now, originOf(now.past, ahead.future)), ...ahead }
 }
 
-function today(budget: Budget, potential: Potential): Now {
-  const purse = { left: BUDGET }
+/** The search for the height leaves at least so much for the future, and a whole history costs no more than both. */
+const aheadOf = ({ left }: Purse): Purse => ({ left: Math.min(FUTURE_BUDGET, FUTURE_BUDGET / 2 + left) })
+
+/** Only where every density is positive E² has no root on the way back whatever the digits. */
+function fieldOrigin({ budget }: Now, origin: Origin): Origin {
+  if (budget.curvature >= 0) return origin
+  return { ...origin, proven: false, because: `${origin.because} This is seen by integration, not proven.` }
+}
+
+function today(budget: Budget, potential: Potential, purse: Purse): Now {
   const field = fieldToday({ potential, background: backgroundOf(budget), target: budget.dark, purse })
   const { steps, state } = passage(field, purse)
   const energy = energyOf(field, state[0], state[1])
@@ -66,9 +77,8 @@ function held(now: Now, model: Model): Ahead {
   return { future, home, descent: future, end: endOf(future, home) }
 }
 
-function followed(now: Now): Ahead {
+function followed(now: Now, purse: Purse): Ahead {
   const { field, state } = now
-  const purse = { left: BUDGET }
   // With V ≥ 0 in flat or open space E² is a sum of positive terms.
   const mayTurn = !field.potential.positive || now.budget.curvature < 0
   const outlook = lookAhead(field, state, purse, mayTurn)
