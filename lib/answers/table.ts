@@ -43,7 +43,7 @@ function download(scenarios: readonly Scenario[], tables: readonly Table[], orde
   const provenance = {
     version: home.version,
     engine: ENGINE,
-    page: `${home.base}/?${query}`,
+    page: `${home.base}/?${query}&engine=${ENGINE}`,
     data: `${home.base}/api/table?${query}&${orderText(order)}`,
   }
   return {

@@ -68,7 +68,7 @@ describe('where it comes from', () => {
     expect(remarks).toEqual([
       expect.stringMatching(/^# Longhence 9\.8\.7, engine \S+$/),
       '# scenario: h0:70,matter:0.3111,as:a%26b',
-      '# link: https://a.example/?s=h0:70,matter:0.3111,as:a%26b',
+      expect.stringMatching(/^# link: https:\/\/a\.example\/\?s=h0:70,matter:0\.3111,as:a%26b&engine=\d+$/),
       '# table: https://a.example/api/table?s=h0:70,matter:0.3111,as:a%26b&format=csv&by=logscale&rows=3&columns=time,w',
       '# time: time from now, Gyr',
       '# w: equation of state of dark energy',
