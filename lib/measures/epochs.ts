@@ -3,9 +3,12 @@
 import type { Component } from '../components'
 import type { Arm } from '../history/arm'
 import type { History } from '../history/history'
+import type { Panel } from '../history/panels'
 import { leadingExponent } from '../history/tail'
 import type { Model } from '../model'
+import { coefficientsInto, derivative, NODE_COUNT, NODES } from '../numerics/chebyshev'
 import { brent } from '../numerics/roots'
+import { type Bracket, signChanges } from '../numerics/sign-changes'
 
 /** A sign change at N = ln a; `rising` when the function goes from negative to positive as a grows. */
 export interface Crossing {
@@ -13,12 +16,8 @@ export interface Crossing {
   readonly rising: boolean
 }
 
-/** Looks per panel of the integrals, whose widths follow the bends of E². */
-const LOOKS = 3
 /** How far beyond the last panel, in ln a, to look where what rules there neither accelerates nor decelerates. */
 const BEYOND = 60
-/** Exponent of E² at which ä = 0. */
-const COASTING = 2
 /** Farthest ln a at which densities are still doubles. */
 const FARTHEST = 700
 
@@ -59,37 +58,75 @@ function changesBetween(comparison: Comparison, model: Model, from: number, to: 
   return [{ N: left === 0 ? from : brent(value, from, to), rising: before < right }]
 }
 
-/**
- * Changes of the sign of ä, in order of a, from looks at every third of a panel: a pair nearer together can be missed.
- */
-export function accelerationChanges(history: History): readonly Crossing[] {
-  const looks = [...looksAlong(history.past).reverse(), { arm: history.past, N: 0 }, ...looksAlong(history.future)]
+/** Changes of the sign of ä, in order of a: every one that the panels can tell, and looks at the tails where they do not decide. */
+export function accelerationChanges({ past, future }: History): readonly Crossing[] {
+  const [back, ahead] = [changesAlong(past), changesAlong(future)]
+  const today = acceleration(past.model, 0) > 0
+  // At today's break of a law that is held the two may differ.
+  const turns = today !== acceleration(future.model, 0) > 0
+  return [...back.reverse(), ...(turns ? [{ N: 0, rising: !today }] : []), ...ahead]
+}
+
+/** In the order outwards from today. */
+function changesAlong(arm: Arm): Crossing[] {
   const found: Crossing[] = []
-  let [before, was] = [0, 0]
-  let zero: number | null = null
-  for (const { arm, N } of looks) {
-    const is = acceleration(arm.model, N)
-    if (is === 0) zero = N
-    if (is === 0 || !Number.isFinite(is)) continue
-    if (was !== 0 && was > 0 !== is > 0) {
-      found.push({ N: zero ?? brent((x) => acceleration(arm.model, x), before, N), rising: is > 0 })
+  for (const panel of arm.panels) {
+    for (const { from, to } of changesOver(arm, panel)) {
+      const at = (x: number) =>
+        arm.direction * panel.zone.distanceAt(panel.from + ((x + 1) / 2) * (panel.to - panel.from))
+      add(found, arm, at(from), at(to))
     }
-    ;[before, was, zero] = [N, is, null]
+  }
+  if (!isDecided(arm)) {
+    const last = arm.edges[arm.edges.length - 1]
+    for (let k = 1; k <= BEYOND; k++) add(found, arm, arm.direction * (last + k - 1), arm.direction * (last + k))
   }
   return found
 }
 
-/** Where to look, outwards from today. */
-function looksAlong(arm: Arm): { arm: Arm; N: number }[] {
-  const looks: { arm: Arm; N: number }[] = []
-  for (const { zone, from, to } of arm.panels) {
-    for (let k = 1; k <= LOOKS; k++)
-      looks.push({ arm, N: arm.direction * zone.distanceAt(from + ((to - from) * k) / LOOKS) })
+/** The change between two places, outwards, if the sums of densities see it too; on an edge of panels it is seen once. */
+function add(found: Crossing[], { model, direction }: Arm, inner: number, outer: number): void {
+  const [near, far] = [acceleration(model, inner), acceleration(model, outer)]
+  if (!Number.isFinite(near) || !Number.isFinite(far) || near > 0 === far > 0) return
+  const N = brent((x) => acceleration(model, x), inner, outer)
+  const rising = direction > 0 ? far > near : near > far
+  found.push({ N, rising })
+}
+
+const samples = new Float64Array(NODE_COUNT)
+/** Relative error of the series below: derivatives of a series of 16 terms multiply that of the panels by up to 16². */
+const NOISE = 1e-11
+
+/** Where ä changes its sign, from a series of its sign over the panel. */
+function changesOver(arm: Arm, { zone, from, to, time }: Panel): readonly Bracket[] {
+  const half = (to - from) / 2
+  if (!zone.plain) {
+    const out = new Float64Array(NODE_COUNT)
+    for (let k = 0; k < NODE_COUNT; k++) {
+      const N = arm.direction * zone.distanceAt((from + to) / 2 + half * NODES[k])
+      samples[k] = acceleration(arm.model, N) / Math.max(1e-300, arm.model.magnitude(N))
+    }
+    coefficientsInto(out, samples)
+    return signChanges(out, NOISE)
   }
-  const last = arm.edges[arm.edges.length - 1]
-  const undecided = arm.tail !== null && leadingExponent(arm.model, arm.direction) === COASTING
-  if (undecided) for (let k = 1; k <= BEYOND; k++) looks.push({ arm, N: arm.direction * (last + k) })
-  return looks
+  // With r = dt/dN = 1/E it is 1/E − d(1/E)/dN = r (ä/a)/E².
+  const rate = derivative(time.series)
+  const slope = derivative(rate)
+  const noise = NOISE * rate.reduce((sum, one) => sum + Math.abs(one), 0)
+  if (!(noise > 0)) return []
+  for (let j = 0; j < rate.length; j++) rate[j] -= (arm.direction * slope[j]) / half
+  return signChanges(rate, noise)
+}
+
+/** Whether what rules beyond the last panel leaves the sign of ä to nothing else. */
+function isDecided({ model, direction, tail }: Arm): boolean {
+  const exponent = leadingExponent(model, direction)
+  if (tail === null || exponent === null) return true
+  const others = tail.corrections.reduce(
+    (sum, { size, rate }) => sum + Math.abs(size * (1 - (exponent + direction * rate) / 2)),
+    0,
+  )
+  return others < Math.abs(1 - exponent / 2)
 }
 
 /** ä/a in H₀². */

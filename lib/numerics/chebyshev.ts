@@ -60,6 +60,15 @@ export function antiderivative(coefficients: Series, scale: number): number[] {
   return out
 }
 
+/** Coefficients of the derivative: c_{j−1} = c_{j+1} + 2j b_j. */
+export function derivative(series: Series): number[] {
+  const out: number[] = []
+  for (let j = 0; j < series.length; j++) out.push(0)
+  for (let j = series.length - 1; j > 0; j--) out[j - 1] = (j + 1 < series.length ? out[j + 1] : 0) + 2 * j * series[j]
+  out[0] /= 2
+  return out
+}
+
 /** Sum of the series at 1: the integral over the whole panel when the series is an antiderivative from −1. */
 export function sumAtOne(coefficients: Series): number {
   let sum = 0

@@ -1,0 +1,36 @@
+/** Where a Chebyshev series changes its sign, so that no pair of changes is passed over that its coefficients can tell. */
+import { evaluate, type Series } from './chebyshev'
+
+export interface Bracket {
+  readonly from: number
+  readonly to: number
+}
+
+/**
+ * Intervals in [−1, 1] that hold one sign change each. On an interval of width w the series lies within w²/8 of its chord, and its
+ * slope within w/2 of that of the chord, times the largest second derivative, Σ |c_j| j² (j² − 1)/3 (Trefethen, Approximation Theory
+ * and Approximation Practice, 2013, ch. 3: T_j″(1) is the largest). Halved until that decides, or the series leaves its chord by less
+ * than the `noise` of its values.
+ */
+export function signChanges(series: Series, noise: number): readonly Bracket[] {
+  let bend = 0
+  for (let j = 2; j < series.length; j++) bend += (Math.abs(series[j]) * j * j * (j * j - 1)) / 3
+  const found: Bracket[] = []
+  const search = (from: number, to: number, left: number, right: number): void => {
+    const width = to - from
+    const unlike = left > 0 !== right > 0
+    const sure = unlike
+      ? Math.abs(right - left) > (bend * width * width) / 2
+      : Math.min(Math.abs(left), Math.abs(right)) > (bend * width * width) / 8
+    if (sure || bend * width * width < 8 * noise) {
+      if (unlike) found.push({ from, to })
+      return
+    }
+    const middle = (from + to) / 2
+    const value = evaluate(series, middle)
+    search(from, middle, left, value)
+    search(middle, to, value, right)
+  }
+  search(-1, 1, evaluate(series, -1), evaluate(series, 1))
+  return found
+}
