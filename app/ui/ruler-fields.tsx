@@ -105,21 +105,23 @@ export function ReadingChoices({ ask, shelf, hand }: Omit<Props, 'complaints'>) 
   return (
     <details className="group">
       <summary>Choose the readings</summary>
-      {shelf.readings.map(({ title, choices }) => (
-        <fieldset key={title}>
-          <legend>{title}</legend>
-          {choices.map(({ key, label }) => (
-            <Tick
-              key={key}
-              name="read"
-              value={key}
-              ticked={ask.read.includes(key)}
-              label={label}
-              tick={hand && ((chosen) => choose(key, chosen))}
-            />
-          ))}
-        </fieldset>
-      ))}
+      <div className="choices">
+        {shelf.readings.map(({ title, choices }) => (
+          <fieldset key={title}>
+            <legend>{title}</legend>
+            {choices.map(({ key, label }) => (
+              <Tick
+                key={key}
+                name="read"
+                value={key}
+                ticked={ask.read.includes(key)}
+                label={label}
+                tick={hand && ((chosen) => choose(key, chosen))}
+              />
+            ))}
+          </fieldset>
+        ))}
+      </div>
     </details>
   )
 }

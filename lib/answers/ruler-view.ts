@@ -69,16 +69,28 @@ function rounded(value: number, { kind, count }: Quantity['digits']): string {
   return kind === 'fixed' ? fixed(value, count) : significant(value, count)
 }
 
-/** `Steady light: no age: …`; a reason that all rows share names none of them. */
+/** `Steady light, comoving distance: …`, each reason once; what holds of all scenarios or of all rows does not name them. */
 function notesOf(lines: readonly RulerLine[], names: readonly string[]): string[] {
-  return names.flatMap((name, slot) => {
-    const labels = new Map<string, string[]>()
-    for (const { quantity, cells } of lines) {
-      const because = cells[slot]?.because
-      if (because) labels.set(because, [...(labels.get(because) ?? []), quantity.label])
+  const told = new Map<string, string[]>()
+  names.forEach((name, slot) => {
+    for (const [because, labels] of reasonsOf(lines, slot)) {
+      const text = `${labels.length === lines.length ? '' : labels.join(', ')}: ${because}.`
+      told.set(text, [...(told.get(text) ?? []), name])
     }
-    return [...labels].map(([because, told]) =>
-      told.length === lines.length ? `${name}: ${because}.` : `${name}, ${told.join(', ')}: ${because}.`,
-    )
   })
+  return [...told].map(([text, some]) => {
+    const whose = some.length === names.length && names.length > 1 ? '' : some.join(', ')
+    const note = `${whose}${whose && !text.startsWith(':') ? ', ' : ''}${text}`.replace(/^: /, '')
+    return `${note.charAt(0).toUpperCase()}${note.slice(1)}`
+  })
+}
+
+/** Labels of the rows by the reason that their cells give. */
+function reasonsOf(lines: readonly RulerLine[], slot: number): ReadonlyMap<string, readonly string[]> {
+  const labels = new Map<string, string[]>()
+  for (const { quantity, cells } of lines) {
+    const because = cells[slot]?.because
+    if (because) labels.set(because, [...(labels.get(because) ?? []), quantity.label])
+  }
+  return labels
 }

@@ -2,7 +2,7 @@
 import { EPOCH_VARIABLES } from '../ruler/epochs'
 import { READING_GROUPS } from '../ruler/groups'
 import { readingNamed } from '../ruler/readings'
-import { PUBLISHED_SETS, type PublishedSet } from '../scenario/presets'
+import { PUBLISHED_SETS, type PublishedSet, type PublishedValue } from '../scenario/presets'
 
 export interface Shelf {
   readonly epochs: readonly { readonly key: string; readonly label: string; readonly unit: string }[]
@@ -37,13 +37,18 @@ export const SHELF: Shelf = {
   sets: PUBLISHED_SETS.map(shelved),
 }
 
+/** `w_a −0.62 (+0.22 −0.19)`. */
+function valueText({ symbol, value, error }: PublishedValue): string {
+  return `${symbol} ${value} ${error.startsWith('+') ? `(${error})` : error}`.trim()
+}
+
 function shelved({ key, title, code, values, citation, confidence, note, kept }: PublishedSet): ShelvedSet {
   const errors = confidence === 'best fit' ? 'best fit' : `errors ${confidence}`
   return {
     key,
     title,
     plain: code?.replace(/,as:.*$/, '') ?? null,
-    values: values.map(({ symbol, value, error }) => `${symbol} ${value} ${error}`.trim()).join(', '),
+    values: values.map(valueText).join(', '),
     cited: `${citation}; ${errors}. ${note}`,
     retunes: kept !== null && RETUNED_TO.includes(key),
   }

@@ -131,7 +131,7 @@ export const BETWEEN: readonly Between[] = [
     digits: significant(5),
     meaning: 'Surface density of a lens at the nearer that can make several images of a source at the farther.',
     formula: 'Σ_cr = (c²/4πG) D_{A,2}/(D_{A,1} D_{A,12})',
-    source: 'Schneider, Ehlers & Falco 1992, Gravitational Lenses, Springer, eq. 5.5 (equation number from memory)',
+    source: 'Schneider, Ehlers & Falco 1992, Gravitational Lenses, Springer',
     accuracy: DIFFERENCE,
     value: seen(criticalSurfaceDensity),
   },

@@ -137,6 +137,10 @@ function baseOf(reader: Reader, token: Token, before: Item | undefined): Item {
       operand: false,
       apart,
     }
+  // Not a difference where nothing stands before it.
+  if (text === '−' && !before?.operand) {
+    return { node: { tag: 'mo', attributes: { form: 'prefix' }, children: [text] }, operand: false, apart }
+  }
   return plain('mo', false)
 }
 

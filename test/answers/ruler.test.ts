@@ -53,7 +53,11 @@ describe('the view', () => {
     expect(notes).toEqual([
       'One, comoving distance, angular diameter distance: it lies in the future: no line of sight leads there.',
     ])
-    expect(view(`${TWO}&epoch=age&at=-3`).notes).toHaveLength(2)
+    expect(view(`${TWO}&at=-0.5&read=comoving,age`).notes).toEqual([
+      'Comoving distance: it lies in the future: no line of sight leads there.',
+    ])
+    expect(view(`${TWO}&epoch=age&at=-3`).notes).toEqual(['Nothing lies before the origin.'])
+    expect(view(`${TWO}&epoch=lookback&at=13.48`).notes).toEqual(['One: this is before the origin.'])
   })
 
   it('reads between two epochs where a second is given', () => {
