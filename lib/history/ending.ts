@@ -23,13 +23,15 @@ export function fateOf(model: Model, future: Search, home: Search): Fate {
     proven: doubt === null,
     because: doubt === null ? because : `${because} ${doubt}`,
   })
-  if (future.kind === 'double') return told('static', AT_REST, future.doubt)
+  if (future.kind === 'double') return told('static', future.exact ? `${AT_REST} ${AS_TYPED}` : AT_REST, future.doubt)
   if (future.kind === 'singular') return told('singular', singularity(model, 1), future.doubt)
   if (future.kind === 'none' && future.farRoot === null) return told(...expanding(model), future.doubt)
   const size = future.kind === 'root' ? Math.exp(future.N).toPrecision(4) : null
   return told(...afterTurning(model, size, home), future.doubt ?? home.doubt)
 }
 
+/** Of a double root that exact arithmetic has shown. */
+export const AS_TYPED = 'Exactly so for the decimals of the densities as typed.'
 const AT_REST = 'E² and its slope vanish together at this scale factor: the expansion comes to rest there.'
 const FAR = 'E² vanishes at a scale factor that is beyond the range of floating-point numbers.'
 

@@ -1,7 +1,7 @@
 /** Where a history comes from, decided by the first root of E² into the past or by the component that rules as a → 0. */
 import { logarithmicIn, type Model } from '../model'
 import type { Arm } from './arm'
-import { singularity } from './ending'
+import { AS_TYPED, singularity } from './ending'
 import type { Origin, OriginKind } from './outcome'
 import type { Search } from './search'
 import { explodes, leadingExponent } from './tail'
@@ -19,7 +19,7 @@ export function beginningOf(model: Model, past: Search, before: Search): Beginni
     proven: doubt === null,
     because: doubt === null ? because : `${because} ${doubt}`,
   })
-  if (past.kind === 'double') return told('static', AT_REST, past.doubt)
+  if (past.kind === 'double') return told('static', past.exact ? `${AT_REST} ${AS_TYPED}` : AT_REST, past.doubt)
   if (past.kind === 'singular') return told('singular', singularity(model, -1), past.doubt)
   if (past.kind === 'root' || past.farRoot !== null) {
     const swings = before.kind === 'root' || (before.kind === 'none' && before.farRoot !== null)

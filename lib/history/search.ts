@@ -32,7 +32,12 @@ export type Search = Found &
         readonly slope?: number
       }
     /** E² and its slope vanish together: a static state, for certain or as far as the digits tell. */
-    | { readonly kind: 'double'; readonly N: number }
+    | {
+        readonly kind: 'double'
+        readonly N: number
+        /** By exact arithmetic on the decimals of the densities. */
+        readonly exact: boolean
+      }
     /** The law of dark energy ends at N before E² vanishes: its density or its pressure diverges. */
     | { readonly kind: 'singular'; readonly N: number }
   )

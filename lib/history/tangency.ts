@@ -11,7 +11,7 @@ import { FARTHEST, type Narrow } from './search'
 export type Encounter =
   /** `slope` where it takes twice the digits. */
   | { readonly kind: 'root'; readonly N: number; readonly slope: number | null; readonly doubt: string | null }
-  | { readonly kind: 'double'; readonly N: number; readonly doubt: string | null }
+  | { readonly kind: 'double'; readonly N: number; readonly exact: boolean; readonly doubt: string | null }
   /** E² stays positive up to N, where doubles are enough again. */
   | { readonly kind: 'passed'; readonly N: number; readonly narrow: Narrow | null }
 
@@ -29,8 +29,7 @@ const MOST_STEPS = 400
 const SLOPE = 1e-7
 const UNRESOLVED = 'Whether E² vanishes there is beyond the digits of a scale factor.'
 const ROUNDED = 'Rounding could change whether E² becomes negative there.'
-const UNDECIDED =
-  'E² and its slope vanish together to all digits that are computed, and one more digit could change that.'
+const UNDECIDED = 'That holds to all digits that are computed, and one more could change it.'
 
 /** What becomes of h, which the balance has just weighed at N; `fast`: it is not small, but falls within a digit of N. */
 export function meet(
@@ -45,7 +44,7 @@ export function meet(
   if (simple) return simple
   if (fast || Math.abs(N) > FARTHEST) return { kind: 'root', N, slope: null, doubt: UNRESOLVED }
   // Decimals that touch exactly do so, though the doubles that they are read as may not.
-  if (exactlyStatic(model.budget, model.law)) return { kind: 'double', N: atRest(model, N), doubt: null }
+  if (exactlyStatic(model.budget, model.law)) return { kind: 'double', N: atRest(model, N), exact: true, doubt: null }
   return stepsWithAllDigits(model, balance, N, direction, left)
 }
 
@@ -130,7 +129,7 @@ function touching(model: Model, N: number, direction: Direction): Encounter {
   if (direction * model.derivatives(N).first < -SLOPE * model.magnitude(N)) {
     return { kind: 'root', N: polished(model, N), slope: null, doubt: ROUNDED }
   }
-  return { kind: 'double', N: atRest(model, N), doubt: UNDECIDED }
+  return { kind: 'double', N: atRest(model, N), exact: false, doubt: UNDECIDED }
 }
 
 /** The minimum that was passed, where it is one that doubles would lose. */

@@ -61,7 +61,9 @@ const termsOf = (model: Model, direction: Direction, withDark: boolean): readonl
 function atEdge(model: Model, edge: Edge, direction: Direction): Search {
   const terms = termsOf(model, direction, false)
   if (terms.length === 0) {
-    return edge.kind === 'singular' ? singular(edge.N) : { kind: 'double', N: edge.N, narrows: [], doubt: null }
+    return edge.kind === 'singular'
+      ? singular(edge.N)
+      : { kind: 'double', N: edge.N, exact: false, narrows: [], doubt: null }
   }
   const balance = new Balance(terms, direction)
   balance.weigh(edge.N)
@@ -107,7 +109,7 @@ function stepsFrom(model: Model, terms: readonly Term[], direction: Direction, s
       const found = rootAt(model, met.N, narrows, met.doubt)
       return met.slope === null || found.kind !== 'root' ? found : { ...found, slope: met.slope }
     }
-    if (met.kind === 'double') return { kind: 'double', N: met.N, narrows, doubt: met.doubt }
+    if (met.kind === 'double') return { kind: 'double', N: met.N, exact: met.exact, narrows, doubt: met.doubt }
     if (met.narrow) narrows.push(met.narrow)
     ;[N, length] = [met.N, 2 * Math.abs(met.N - N)]
   }

@@ -104,7 +104,7 @@ test('in random universes the kinds on both sides of a boundary are as told', { 
         if (kinds && origin) expect(kinds.origin.kind, `${code} ${parameter} ${value}`).not.toBe(origin.from)
       }
     }),
-    { numRuns: 60, seed: 5 },
+    { numRuns: 25, seed: 5 },
   )
 })
 
@@ -116,7 +116,7 @@ test('classification alone says what a whole solution says', { timeout: 60_000 }
       const kinds = kindsOf(read(code))
       expect([kinds?.origin.kind, kinds?.end.kind]).toEqual([solution?.origin.kind, solution?.end.kind])
     }),
-    { numRuns: 200, seed: 6 },
+    { numRuns: 100, seed: 6 },
   )
 })
 

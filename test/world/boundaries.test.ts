@@ -64,6 +64,7 @@ describe('static states', () => {
     expectRelative(3 * budget.dark, -budget.curvature / found ** 2, 1e-13)
     // Exact in decimals, and proven by exact arithmetic on them.
     expect(end.proven).toBe(true)
+    if (scale > 1) expect(end.because).toContain('Exactly so')
   })
   test.each([
     [1, 4],
