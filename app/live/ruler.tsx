@@ -9,7 +9,11 @@ import { type RulerAsk, rulerAskOf } from '../../lib/words/ruler-ask'
 import { type RulerField, rulerTyped } from '../../lib/words/ruler-typed'
 import { Ruler, type RulerHand } from '../ui/ruler'
 import { type Address, go, settle } from './address'
+import { useLate } from './use-late'
 import { useRuler } from './use-ruler'
+
+/** Sooner nobody misses anything. Milliseconds. */
+const PATIENCE = 300
 
 export interface LiveRulerProps {
   readonly desk: Desk
@@ -28,8 +32,10 @@ export default function LiveRuler(props: LiveRulerProps) {
 }
 
 function RulerOf({ desk, address, initial, shelf }: LiveRulerProps) {
-  const view = useRuler(address, initial)
-  return <Ruler desk={desk} view={view} shelf={shelf} hand={useHand(desk, view)} />
+  const { view, waiting, failed } = useRuler(address, initial)
+  const late = useLate(waiting, PATIENCE)
+  const state = failed ? 'The server cannot be reached. Shown is what was read last.' : late ? 'Calculating' : null
+  return <Ruler desk={desk} view={view} shelf={shelf} state={state} hand={useHand(desk, view)} />
 }
 
 type Drafts = Readonly<Partial<Record<RulerField, string>>>

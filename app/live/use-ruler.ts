@@ -10,9 +10,15 @@ function askedOf(search: string): string {
   return new URLSearchParams([...query].filter(([key]) => keys.includes(key))).toString()
 }
 
-export function useRuler(address: Address, initial: RulerView): RulerView {
+export interface LiveReadings {
+  readonly view: RulerView
+  readonly waiting: boolean
+  readonly failed: boolean
+}
+
+export function useRuler(address: Address, initial: RulerView): LiveReadings {
   const asked = askedOf(address.search)
-  const { data } = useQuery({
+  const { data, isFetching, isError } = useQuery({
     queryKey: ['ruler', asked],
     queryFn: async ({ signal }): Promise<RulerView> => {
       const response = await fetch(`/api/ruler?${asked}`, { signal })
@@ -26,5 +32,5 @@ export function useRuler(address: Address, initial: RulerView): RulerView {
     networkMode: 'always',
     refetchOnWindowFocus: false,
   })
-  return data ?? initial
+  return { view: data ?? initial, waiting: isFetching, failed: isError }
 }

@@ -23,10 +23,12 @@ interface Props {
   readonly view: RulerView
   readonly shelf: Shelf
   readonly hand: RulerHand | null
+  /** That something is still on its way, or why it does not come. */
+  readonly state?: string | null
 }
 
 /** An epoch in any variable, and what is read there in every scenario. */
-export function Ruler({ desk, view, shelf, hand }: Props) {
+export function Ruler({ desk, view, shelf, hand, state = null }: Props) {
   const ask = rulerAskOf(desk.place)
   const own: readonly string[] = RULER_KEYS
   return (
@@ -53,7 +55,7 @@ export function Ruler({ desk, view, shelf, hand }: Props) {
         <ReadingChoices ask={ask} shelf={shelf} hand={hand} />
         {!hand && <button type="submit">Read</button>}
       </form>
-      <Readings view={view} {...captionsOf(ask, shelf)} />
+      <Readings view={view} state={state} {...captionsOf(ask, shelf)} />
     </section>
   )
 }
@@ -74,13 +76,21 @@ function captionsOf({ variable, at, until, hubble }: RulerAsk, { epochs }: Shelf
   }
 }
 
-function Readings({ view, here, there }: Captions & { readonly view: RulerView }) {
+interface ReadingsProps extends Captions {
+  readonly view: RulerView
+  readonly state: string | null
+}
+
+function Readings({ view, state, here, there }: ReadingsProps) {
   const { at, between, notes, downloads } = view
   if (at.length === 0 && between.length === 0) {
     return <p className="readings because">Nothing is read: choose readings, or correct the field that is marked.</p>
   }
   return (
-    <div className="readings">
+    <div className="readings" aria-busy={state ? true : undefined}>
+      <p className="state-of-readings" role="status">
+        {state}
+      </p>
       {at.length > 0 && <RulerTable view={view} rows={at} of="reading" caption={here} />}
       {between.length > 0 && <RulerTable view={view} rows={between} of="between" caption={there} />}
       {notes.map((note) => (
