@@ -53,7 +53,7 @@ export function Explorer({ initial, asked, ruler, shelf, lists, edition, childre
     // biome-ignore lint/a11y: links stay links; what is caught here is the click that they get
     <div className="page" data-theme={desk.place.theme} onClick={address ? follow : undefined}>
       <Header desk={desk} address={address} />
-      <main aria-busy={busy || later !== view || undefined} data-shown={view.links.here}>
+      <main id="scenarios" tabIndex={-1} aria-busy={busy || later !== view || undefined} data-shown={view.links.here}>
         <h1 className={initial.titled || view.titled ? undefined : 'spoken'}>{view.title}</h1>
         {view.refusal && <Refusal refusal={view.refusal} />}
         <div className="workbench">

@@ -9,6 +9,7 @@ export function follow(event: MouseEvent): void {
   const link = event.target instanceof Element ? event.target.closest('a') : null
   const plain = event.button === 0 && !(event.metaKey || event.ctrlKey || event.shiftKey || event.altKey)
   if (!link || !plain || event.defaultPrevented || link.origin !== location.origin) return
+  if (link.getAttribute('href')?.startsWith('#')) return
   if (link.pathname === '/') go(link.href)
   else if (link.pathname.startsWith(COMPOSED)) void compose(link)
   else return

@@ -2,6 +2,7 @@ import { memo, useMemo } from 'react'
 import type { Explorer } from '../../lib/answers/explorer'
 import { useSteadyHeight } from '../live/use-steady-height'
 import { Choices } from './choices'
+import { FigureTable } from './figure-table'
 import { Plate } from './plate'
 import { ZoomLinks } from './zoom-links'
 
@@ -31,10 +32,11 @@ export const Figure = memo(function Figure({ view, shown }: Props) {
       <figcaption ref={caption}>
         <div className="choices">
           <Choices choice={{ label: 'Time', options: clocks }} />
-          <ZoomLinks zoom={zoom} later="Later" earlier="Earlier" />
+          <ZoomLinks zoom={zoom} of="the long view" later="Later" earlier="Earlier" />
         </div>
         {figure.caption}
       </figcaption>
+      <FigureTable figure={figure} />
     </figure>
   )
 })

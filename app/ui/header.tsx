@@ -15,6 +15,9 @@ export function Header({ desk, address }: Props) {
   const { place, links } = desk
   return (
     <header className="masthead">
+      <a className="skip" href="#scenarios">
+        Skip to the scenarios
+      </a>
       <a className="brand" href="/">
         Longhence
       </a>

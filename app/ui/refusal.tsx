@@ -5,7 +5,7 @@ import { Sentence } from './symbol'
 export function Refusal({ refusal }: { readonly refusal: Refused }) {
   const { problems, changes, link } = refusal
   return (
-    <aside className="refusal" role="alert">
+    <div className="refusal" role="alert">
       <h2>This link cannot be shown as written</h2>
       <ul>
         {problems.map(({ parameter, scenario, value, allowed, message }) => (
@@ -22,6 +22,6 @@ export function Refusal({ refusal }: { readonly refusal: Refused }) {
           Shown is the nearest good reading: <Sentence text={changes.join(' ')} /> <a href={link}>Open that reading</a>
         </p>
       )}
-    </aside>
+    </div>
   )
 }

@@ -46,7 +46,10 @@ function Text({ title, text, code }: TextProps) {
       <h4>
         {title} <CopyText title={title} text={text} />
       </h4>
-      <pre className={code ? 'code' : undefined}>{text}</pre>
+      {/* biome-ignore lint/a11y/noNoninteractiveTabindex: what scrolls must be within reach of the keyboard */}
+      <pre className={code ? 'code' : undefined} tabIndex={code ? 0 : undefined}>
+        {text}
+      </pre>
     </div>
   )
 }

@@ -99,7 +99,10 @@ function FrameRow({
           Open
         </a>
         <CopyText title="HTML of the frame" text={html} />
-        <pre className="code">{html}</pre>
+        {/* biome-ignore lint/a11y/noNoninteractiveTabindex: what scrolls must be within reach of the keyboard */}
+        <pre className="code" tabIndex={0}>
+          {html}
+        </pre>
       </td>
     </tr>
   )

@@ -2,6 +2,7 @@ import { memo } from 'react'
 import type { Explorer } from '../../lib/answers/explorer'
 import { useSteadyHeight } from '../live/use-steady-height'
 import { Choices } from './choices'
+import { FigureTable } from './figure-table'
 import { Galaxy } from './galaxy'
 import { Plate } from './plate'
 import { Sentence } from './symbol'
@@ -33,7 +34,7 @@ export const Views = memo(function Views({ view, shown }: Props) {
         {choices.map((choice) => (
           <Choices key={choice.label} choice={anchored(choice)} />
         ))}
-        <ZoomLinks zoom={zoom} earlier="Left" later="Right" />
+        <ZoomLinks zoom={zoom} of="the view" earlier="Left" later="Right" />
       </div>
       <figure key={key}>
         <Plate
@@ -56,6 +57,7 @@ export const Views = memo(function Views({ view, shown }: Props) {
           ))}
           {galaxy && <Galaxy key={galaxy.redshift} view={view} galaxy={galaxy} live={shown !== null} />}
         </figcaption>
+        <FigureTable figure={figure} />
       </figure>
     </section>
   )

@@ -1,0 +1,144 @@
+/** For everyone: what axe finds, keys, zoom, forced colours, still pictures, fingers. WCAG 2.2 AA. */
+import AxeBuilder from '@axe-core/playwright'
+import { expect, type Page, test } from '@playwright/test'
+import { open } from './live'
+
+test.describe.configure({ timeout: 120_000 })
+
+/** Every page. One line for each that is new. */
+const PAGES = ['/', '/?s=matter:none&s=h0:70', '/not-there', '/method', '/gallery', '/words', '/embed']
+const WIDTHS = [390, 1280, 1920]
+const RULES = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-practice']
+
+async function faults(page: Page): Promise<readonly string[]> {
+  const { violations } = await new AxeBuilder({ page }).withTags(RULES).analyze()
+  return violations.flatMap(({ id, nodes }) =>
+    nodes.map(({ target, failureSummary }) => `${id}: ${target} ${failureSummary}`),
+  )
+}
+
+for (const path of PAGES) {
+  test(`axe finds nothing at ${path}`, async ({ page }) => {
+    for (const colorScheme of ['light', 'dark'] as const) {
+      for (const width of WIDTHS) {
+        await page.emulateMedia({ colorScheme })
+        await page.setViewportSize({ width, height: 900 })
+        await page.goto(path, { waitUntil: 'networkidle' })
+        expect(await faults(page), `${width} px, ${colorScheme}`).toEqual([])
+      }
+    }
+  })
+
+  test(`headings go down in steps at ${path}`, async ({ page }) => {
+    await page.goto(path)
+    const levels = await page
+      .locator('h1, h2, h3, h4')
+      .evaluateAll((all) => all.map(({ tagName }) => Number(tagName[1])))
+    expect(levels.filter((level) => level === 1)).toHaveLength(1)
+    expect(levels.filter((level, i) => level > (levels[i - 1] ?? 0) + 1)).toEqual([])
+  })
+
+  test(`nothing is cut off or scrolled sideways at 400% zoom at ${path}`, async ({ page }) => {
+    // 1280 px at 400%: WCAG 1.4.10.
+    await page.setViewportSize({ width: 320, height: 256 })
+    await page.goto(path, { waitUntil: 'networkidle' })
+    expect(await page.evaluate(() => document.documentElement.scrollWidth - window.innerWidth)).toBeLessThanOrEqual(0)
+  })
+}
+
+test('the first key leads past the masthead', async ({ page }) => {
+  await open(page, '/')
+  await page.keyboard.press('Tab')
+  const skip = page.getByRole('link', { name: 'Skip to the scenarios' })
+  await expect(skip).toBeFocused()
+  await expect(skip).toBeInViewport()
+  await page.keyboard.press('Enter')
+  await expect(page.locator('main')).toBeFocused()
+})
+
+for (const colorScheme of ['light', 'dark'] as const) {
+  test(`what has the focus is marked, in ${colorScheme}`, async ({ page }) => {
+    await page.emulateMedia({ colorScheme })
+    await open(page, '/')
+    for (let i = 0; i < 30; i++) {
+      await page.keyboard.press('Tab')
+      const marked = await page.evaluate(() => {
+        const element = document.activeElement as HTMLElement
+        if (element === document.body) return 'nothing has it'
+        const { outlineStyle, outlineWidth } = getComputedStyle(element)
+        const thumb = element.matches('input[type=range]')
+        return thumb || (outlineStyle !== 'none' && Number.parseFloat(outlineWidth) >= 2)
+          ? ''
+          : element.outerHTML.slice(0, 120)
+      })
+      expect(marked).toBe('')
+    }
+  })
+}
+
+test('forced colours leave lines and marks', async ({ page }) => {
+  await page.emulateMedia({ forcedColors: 'active' })
+  await open(page, '/')
+  const ground = await page.evaluate(() => getComputedStyle(document.body).backgroundColor)
+  const strokes = await page
+    .locator('.frame:visible .curve')
+    .evaluateAll((curves) => curves.map((curve) => getComputedStyle(curve).stroke))
+  expect(strokes.length).toBeGreaterThan(2)
+  for (const stroke of strokes) expect([ground, 'none', 'rgba(0, 0, 0, 0)']).not.toContain(stroke)
+  await expect(page.getByRole('slider', { name: 'matter', exact: true })).toBeVisible()
+})
+
+test('nothing moves by itself where that is not wanted', async ({ page }) => {
+  await page.emulateMedia({ reducedMotion: 'reduce' })
+  await open(page, '/')
+  const moving = await page.evaluate(
+    () =>
+      [...document.querySelectorAll('*')].filter((element) => {
+        const { transitionDuration, animationName } = getComputedStyle(element)
+        return animationName !== 'none' || Number.parseFloat(transitionDuration) > 0.01
+      }).length,
+  )
+  expect(moving).toBe(0)
+})
+
+test('targets are 24 px high and wide, or stand apart', async ({ page }) => {
+  await page.setViewportSize({ width: 390, height: 844 })
+  await open(page, '/')
+  // WCAG 2.5.8: smaller ones where a circle of 24 px around each meets no other target; those in a sentence are exempt.
+  const small = await page.evaluate(() => {
+    const seen = [
+      ...document.querySelectorAll<HTMLElement>('a, button, input:not([type=hidden]), select, summary'),
+    ].filter((one) => one.checkVisibility({ visibilityProperty: true }) && !one.closest('p'))
+    const boxes = seen.map((one) => one.getBoundingClientRect())
+    const centre = (box: DOMRect) => [box.x + box.width / 2, box.y + box.height / 2] as const
+    return seen
+      .filter((_, i) => {
+        const box = boxes[i] as DOMRect
+        if (box.width === 0 || (box.width >= 24 && box.height >= 24)) return false
+        const [x, y] = centre(box)
+        return boxes.some((other, j) => {
+          if (i === j || other.width === 0) return false
+          const dx = Math.max(other.left - x, 0, x - other.right)
+          const dy = Math.max(other.top - y, 0, y - other.bottom)
+          return Math.hypot(dx, dy) < 12
+        })
+      })
+      .map((one) => one.outerHTML.slice(0, 140))
+  })
+  expect(small).toEqual([])
+})
+
+test('a slider says its value with its unit, and every figure has its sentence and its table', async ({ page }) => {
+  await open(page, '/')
+  for (const one of await page.getByRole('slider').all()) await expect(one).toHaveAttribute('aria-valuetext', /\S/)
+  for (const figure of await page.locator('figure').all()) {
+    expect((await figure.locator('[aria-label]:visible').first().getAttribute('aria-label'))?.length).toBeGreaterThan(
+      10,
+    )
+    const table = figure.locator('details table')
+    await figure.locator('details summary').first().click()
+    await expect(table.first().locator('caption')).not.toBeEmpty()
+    expect(await table.first().locator('th[scope=col]').count()).toBeGreaterThan(1)
+    expect(await table.first().locator('tbody tr').count()).toBeGreaterThan(5)
+  }
+})
