@@ -5,8 +5,8 @@ import { wholeMultiples } from '../scenario/exact-sum'
 
 /**
  * True where Λ a⁴ + Ω_k a² + Ω_m a + Ω_r has a double root at some a > 0, for the decimals of the densities and the closing one as
- * their exact remainder: its discriminant vanishes (Dickson, New First Course in the Theory of Equations, 1939, section 42), and
- * Euclid's algorithm gives the root.
+ * their exact remainder: where its discriminant vanishes (the textbook formula, from memory; the tests build double roots), and
+ * Euclid's algorithm, derived here, gives the root.
  */
 export function exactlyStatic(budget: Budget, law: Law): boolean {
   if (!budget.typed || law.exponent !== 0) return false

@@ -1,4 +1,4 @@
-/** Random numbers from a seed (the 32-bit generator of Steele, Lea & Flood 2014, OOPSLA, with a step of its own). */
+/** Random numbers from a seed: equal steps through a mixing function, as by Steele, Lea & Flood 2014 (OOPSLA); constants from memory. */
 
 export interface Chance {
   /** Evenly in [from, to). */
