@@ -1,8 +1,6 @@
 import { memo, useState } from 'react'
 import type { Picture, Shown } from '../../lib/figures/picture'
-import type { SvgNode } from '../../lib/figures/svg'
 import { Cursor } from './cursor'
-import { Drawing } from './drawing'
 
 interface Props {
   readonly figure: Shown
@@ -33,12 +31,14 @@ const Sheet = memo(function Sheet({ figure, picture, box, live, ...rest }: Sheet
   const tone = lit === null ? undefined : figure.curves[lit]?.tone
   return (
     <div className={`${box} ${picture.frame}`} data-lit={lit ?? undefined} data-tone={tone}>
-      <Drawn node={picture.node} />
+      <Drawn markup={picture.markup} />
       {live && <Cursor figure={figure} picture={picture} lit={lit} light={light} {...rest} />}
     </div>
   )
 })
 
-const Drawn = memo(function Drawn({ node }: { readonly node: SvgNode }) {
-  return <Drawing node={node} />
+/** As text the browser reads it at once, and there is nothing in it for React to look after. */
+const Drawn = memo(function Drawn({ markup }: { readonly markup: string }) {
+  // biome-ignore lint/security/noDangerouslySetInnerHtml: our own drawing, in which every text is escaped
+  return <div dangerouslySetInnerHTML={{ __html: markup }} />
 })

@@ -114,6 +114,7 @@ function reference({ axis, at, label }: Reference, plot: Plot, { type }: Frame):
     return [svg('line', { x1: x, x2: x, y1: plot.top, y2: plot.bottom, class: 'reference' })]
   }
   const y = plot.y(at)
-  const place = { x: px(plot.left + 0.4 * type), y: px(y - 0.35 * type), 'font-size': size, class: 'axis' }
-  return [svg('line', { x1: plot.left, x2: plot.right, y1: y, y2: y, class: 'reference' }), svg('text', place, label)]
+  const place = { x: px(plot.right - 0.4 * type), y: px(y - 0.35 * type), 'font-size': size, class: 'axis' }
+  const line = svg('line', { x1: plot.left, x2: plot.right, y1: y, y2: y, class: 'reference' })
+  return label === '' ? [line] : [line, svg('text', { ...place, 'text-anchor': 'end' }, label)]
 }

@@ -3,7 +3,7 @@ import type { Axis, Chart } from './chart'
 import { drawChart, heightOfChart, plotOfChart } from './draw-chart'
 import type { Edges, Frame } from './plot'
 import type { Readings } from './readings'
-import type { SvgNode } from './svg'
+import { serialize } from './svg'
 
 export interface Picture {
   /** Id of the frame. */
@@ -12,7 +12,8 @@ export interface Picture {
   readonly height: number
   /** Of the plot within the drawing. */
   readonly plot: Edges
-  readonly node: SvgNode
+  /** The drawing as text, with nothing in it that a person typed unescaped. */
+  readonly markup: string
 }
 
 export interface Shown {
@@ -50,6 +51,11 @@ function pictureOf(chart: Chart, frame: Frame, prefix: string, className: string
     width: frame.width,
     height: heightOfChart(chart, frame),
     plot: { left, right, top, bottom },
-    node: drawChart(chart, { ...frame, id: `${prefix}-${frame.id}` }, className),
+    markup: apostrophes(serialize(drawChart(chart, { ...frame, id: `${prefix}-${frame.id}` }, className))),
   }
+}
+
+/** Quoted by apostrophes, which need no escapes of their own where the page carries the text as data. */
+function apostrophes(xml: string): string {
+  return xml.replaceAll("'", '&#39;').replaceAll('"', "'")
 }

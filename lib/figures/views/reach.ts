@@ -3,6 +3,7 @@ import { instantAt, isInstant } from '../../quantities/instant'
 import type { Solution } from '../../solve'
 import { extrapolates } from '../../words/beyond'
 import { galaxySentences } from '../../words/galaxy'
+import { significant, withUnit } from '../../words/number'
 import { reachSentence } from '../../words/reach'
 import { fromNow } from '../../words/time'
 import type { Chart, Spot } from '../chart'
@@ -47,7 +48,7 @@ function reach(asked: Asked): Chart {
     title: `Horizons and light cones of ${solution.label}`,
     ...axes,
     curves,
-    references: [],
+    references: referencesOf(solution, isProper(asked), y.to),
     spots: galaxy ? spotsOf(asked, galaxy, { x, y }) : [],
     ribbons: [],
     now: asked.by.now,
@@ -71,6 +72,13 @@ function pathsOf(asked: Asked, galaxy: Galaxy | null) {
     const named = tone === GALAXY_TONE ? `galaxy at z = ${asked.galaxy}` : name
     return { tone, name: named, dash, strong: tone === CONE_TONE, values }
   })
+}
+
+/** In comoving coordinates light sent today comes closer and closer to a limit. */
+function referencesOf({ measures }: Solution, proper: boolean, top: number): Chart['references'] {
+  const limit = measures.eventHorizon.value
+  if (proper || limit === null || limit > top) return []
+  return [{ axis: 'y', at: limit, label: `limit of light sent today, ${withUnit(significant(limit, 3), 'Gly')}` }]
 }
 
 /** Close to the origin and the end, where conformal time runs fast. */
