@@ -23,7 +23,8 @@ export function doubtsOf(solution: Solution): Doubts {
     const others = numbersOf(moved)
     for (const [key, value] of numbers) {
       const other = others.get(key)
-      const change = other === undefined ? Number.POSITIVE_INFINITY : Math.abs(other - value)
+      // A neighbour beyond the doubles is as good as none.
+      const change = Number.isFinite(other) ? Math.abs((other as number) - value) : Number.POSITIVE_INFINITY
       doubts.set(key, (doubts.get(key) ?? 0) + change)
     }
   }

@@ -3,7 +3,7 @@
 import { tex } from '../formats/tex'
 import { MEASURES } from '../quantities/measures'
 import { capital } from '../words/sentence'
-import type { Rounded } from './rounded'
+import { isPlain, type Rounded } from './rounded'
 import type { Edition } from './sources'
 import { type Known, rounded } from './told'
 
@@ -26,10 +26,9 @@ function macro({ key, label, unit }: (typeof MEASURES)[number], known: Known, su
 }
 
 /** Signs and powers in mathematics, in text as well. */
-export function numberTex({ value, decimals }: Rounded): string {
-  if (value !== 0 && (Math.abs(value) < 1e-3 || Math.abs(value) >= 1e6)) {
-    const digits = Math.max(0, Math.min(100, Math.floor(Math.log10(Math.abs(value))) + decimals))
-    const [mantissa, power] = value.toExponential(digits).split('e')
+export function numberTex({ value, decimals, digits }: Rounded): string {
+  if (!isPlain(value)) {
+    const [mantissa, power] = value.toExponential(digits - 1).split('e')
     return `\\ensuremath{${mantissa}\\times10^{${Number(power)}}}`
   }
   const text = value.toFixed(decimals)

@@ -37,6 +37,8 @@ describe('rounding', () => {
     [99.96, 0.09, 0.01, '100.0'],
     [0, 0.1, 0.01, '0.00'],
     [12.3, Number.POSITIVE_INFINITY, 0.01, '10'],
+    [1.23456e120, 1e118, 0.01, '1.23\u202f×\u202f10¹²⁰'],
+    [9.996e-7, 1e-9, 1e-12, '1.000\u202f×\u202f10⁻⁶'],
   ])('%d known to %d: %s', (value, doubt, finest, text) => expect(textOf(roundedBy(value, doubt, finest))).toBe(text))
 
   test('the last digit is worth as much as the doubt or more, unless it is the only one', () => {

@@ -49,6 +49,11 @@ describe('each scenario', () => {
     expect(fine.summary).toContain('6.14 billion years')
     expect(rough.summary).toContain('6.1 billion years')
   })
+  test('beside a scenario whose numbers leave the doubles, one digit is left', () => {
+    const code =
+      'h0:182.314359145,matter:0.0003467368504525317,dark:-8.128305161640995e-7,eos:chaplygin,b:1,beyond:hold'
+    expect(words(code).scenarios[0].summary).toMatch(/^This universe began 5 billion years ago in a Big Bang/)
+  })
   test('no word of a number that is none, whatever the scenario', () => {
     fc.assert(
       fc.property(plainCode, (code) => {
