@@ -105,7 +105,7 @@ export function ReadingChoices({ ask, shelf, hand }: Omit<Props, 'complaints'>) 
   return (
     <details className="group">
       <summary>Choose the readings</summary>
-      <div className="choices">
+      <div className="reading-choices">
         {shelf.readings.map(({ title, choices }) => (
           <fieldset key={title}>
             <legend>{title}</legend>
