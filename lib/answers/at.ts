@@ -1,5 +1,6 @@
 /** `/api/at`: columns at given epochs. */
 import { isMissing } from '../measures/outcome'
+import { withBounds } from '../quantities/bounds'
 import type { Column } from '../quantities/column'
 import { type Instant, instantAt, isInstant } from '../quantities/instant'
 import type { Fault } from '../scenario/problems'
@@ -38,7 +39,8 @@ interface Note {
   readonly because: string
 }
 
-function scenarioAt(solution: Solution, { variable, values, branch, columns }: Epochs) {
+function scenarioAt(solution: Solution, { variable, values, branch, columns: asked, bounds = false }: Epochs) {
+  const columns = withBounds(asked, bounds)
   const notes: Note[] = []
   const rows = values.map((value, row) => {
     const instant = instantAt(solution, variable, value, branch)

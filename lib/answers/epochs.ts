@@ -4,7 +4,7 @@ import type { Column } from '../quantities/column'
 import { COLUMNS } from '../quantities/columns'
 import { VARIABLES, type Variable } from '../quantities/instant'
 import { type Fault, fault } from '../scenario/problems'
-import { columnList, numberList, oneOf, take } from './fields'
+import { boundsFlag, columnList, numberList, oneOf, take } from './fields'
 import { numberText } from './question'
 
 const BRANCHES = [{ key: 'expanding' }, { key: 'contracting' }] as const satisfies readonly { key: Branch }[]
@@ -18,6 +18,7 @@ export const AT_FIELDS = {
   age: numberList({ key: 'age', above: ANY, unit: 'Gyr' }, 'Times since the origin; negative before a bounce.'),
   branch: oneOf('branch', BRANCHES, 'With z or scale: the expansion that holds today, or the contraction.'),
   columns: columnList,
+  bounds: boundsFlag,
 }
 
 export interface Epochs {
@@ -25,6 +26,8 @@ export interface Epochs {
   readonly values: readonly number[]
   readonly branch: Branch
   readonly columns: readonly Column[]
+  /** Whether error bounds are asked for. */
+  readonly bounds?: boolean
 }
 
 /** Adds to `faults`; where it does, the epochs are not those asked for. */
@@ -43,8 +46,9 @@ export function readEpochs(values: ReadonlyMap<string, string>, faults: Fault[])
     values: take(values, variable, AT_FIELDS[variable], faults) ?? [],
     branch: branch?.key ?? 'expanding',
     columns: take(values, 'columns', AT_FIELDS.columns, faults) ?? COLUMNS,
+    bounds: take(values, 'bounds', AT_FIELDS.bounds, faults)?.key === '1',
   }
 }
 
-export const epochsText = ({ variable, values, branch, columns }: Epochs): string =>
-  `${variable}=${values.map(numberText).join(',')}&branch=${branch}&columns=${columns.map(({ key }) => key).join(',')}`
+export const epochsText = ({ variable, values, branch, columns, bounds }: Epochs): string =>
+  `${variable}=${values.map(numberText).join(',')}&branch=${branch}&columns=${columns.map(({ key }) => key).join(',')}${bounds ? '&bounds=1' : ''}`

@@ -102,6 +102,13 @@ export const columnList = field<readonly Column[]>(
   },
 )
 
+/** 1 where every column is to be followed by that of its error bounds. */
+export const boundsFlag = oneOf(
+  'bounds',
+  [{ key: '0' }, { key: '1' }],
+  'With 1, each column is followed by one of the absolute bounds on its numerical errors, named with Error at its end.',
+)
+
 /** The value of a key by its schema; undefined where the key is absent or at fault. Adds to `faults`. */
 export function take<T>(
   values: ReadonlyMap<string, string>,

@@ -5,7 +5,7 @@ import { COLUMNS } from '../quantities/columns'
 import { type Fault, fault } from '../scenario/problems'
 import { SPACINGS, type Spacing } from '../tables/spacing'
 import type { Layout } from '../tables/table'
-import { allowedNumber, columnList, count, number, oneOf, take } from './fields'
+import { allowedNumber, boundsFlag, columnList, count, number, oneOf, take } from './fields'
 import { numberText } from './question'
 
 const LEAST_ROWS = 2
@@ -19,10 +19,13 @@ export const TABLE_FIELDS = {
   to: number({ key: 'to', above: ANY, unit: '' }, 'Where they end, in the variable of `by`; it is the last row.'),
   rows: count('rows', LEAST_ROWS, MOST_ROWS, `How many rows; ${DEFAULT_ROWS} where none are asked.`),
   columns: columnList,
+  bounds: boundsFlag,
 }
 
 export interface Order extends Layout {
   readonly format: Format
+  /** Whether error bounds are asked for. */
+  readonly bounds: boolean
 }
 
 /** Adds to `faults`; where it does, the order is not the one asked for. */
@@ -34,7 +37,8 @@ export function readOrder(values: ReadonlyMap<string, string>, faults: Fault[]):
   const rows = take(values, 'rows', TABLE_FIELDS.rows, faults) ?? DEFAULT_ROWS
   faults.push(...endFaults(spacing, values, from, to), ...rowFaults(format, rows))
   const columns = take(values, 'columns', TABLE_FIELDS.columns, faults) ?? COLUMNS
-  return { format, spacing, given: { from, to }, rows, columns }
+  const bounds = take(values, 'bounds', TABLE_FIELDS.bounds, faults)?.key === '1'
+  return { format, spacing, given: { from, to }, rows, columns, bounds }
 }
 
 function endFaults(
@@ -58,7 +62,7 @@ function rowFaults({ key, mostRows }: Format, rows: number): Fault[] {
 }
 
 /** Ends that are not given stay out: they may differ from scenario to scenario. */
-export function orderText({ format, spacing, given, rows, columns }: Order): string {
+export function orderText({ format, spacing, given, rows, columns, bounds }: Order): string {
   const ends = Object.entries(given).filter(([, value]) => value !== undefined)
   return [
     `format=${format.key}`,
@@ -66,5 +70,6 @@ export function orderText({ format, spacing, given, rows, columns }: Order): str
     ...ends.map(([key, value]) => `${key}=${numberText(value)}`),
     `rows=${rows}`,
     ...(columns === COLUMNS ? [] : [`columns=${columns.map(({ key }) => key).join(',')}`]),
+    ...(bounds ? ['bounds=1'] : []),
   ].join('&')
 }

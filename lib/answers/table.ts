@@ -1,5 +1,6 @@
 /** `/api/table`: evenly spaced rows in a format of downloads, written while they are read. */
 import { fileName } from '../formats/file-name'
+import { withBounds } from '../quantities/bounds'
 import type { Fault } from '../scenario/problems'
 import type { Reading, Scenario } from '../scenario/scenario'
 import { linkQuery } from '../scenario/write'
@@ -30,14 +31,16 @@ export function askTable(pairs: Pairs, home: Home): Reading<Question<Download>> 
     canonical: `${linkQuery(scenarios)}&${orderText(order)}`,
     answer: () =>
       mapped(
-        solved(scenarios, (solution) => tableOf(solution, solution.code, order)),
+        solved(scenarios, (solution) => tableOf(solution, solution.code, { ...order, columns: shown(order) })),
         (tables) => download(scenarios, tables, order, home),
       ),
   }))
 }
 
+const shown = ({ columns, bounds }: Order) => withBounds(columns, bounds)
+
 function download(scenarios: readonly Scenario[], tables: readonly Table[], order: Order, home: Home): Download {
-  const { format, columns } = order
+  const [{ format }, columns] = [order, shown(order)]
   const query = linkQuery(scenarios)
   const names = scenarios.flatMap(({ name }) => name ?? [])
   const provenance = {

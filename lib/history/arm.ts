@@ -16,6 +16,9 @@ interface Sums {
   /** From today to the end; Infinity where it diverges. */
   readonly total: number
   readonly error: number
+  /** Error bounds of the integral from today to the outer edge of each panel, and from its inner edge to the end. */
+  readonly errorFromToday: Float64Array
+  readonly errorToEnd: Float64Array
 }
 
 export interface Arm {
@@ -123,12 +126,20 @@ function sumsOf(panels: readonly Panel[], clock: Clock, [beyond, beyondError]: r
   panels.forEach((one, i) => {
     fromToday[i + 1] = fromToday[i] + one[clock].total
   })
+  const errorFromToday = new Float64Array(panels.length + 1)
+  const errorToEnd = new Float64Array(panels.length + 1)
   let left = beyond
   let error = beyondError
+  errorToEnd[panels.length] = beyondError
+  panels.forEach((one, i) => {
+    errorFromToday[i] = (i > 0 ? errorFromToday[i - 1] : 0) + one[clock].error
+  })
+  errorFromToday[panels.length] = (errorFromToday[panels.length - 1] ?? 0) + beyondError
   for (let i = panels.length - 1; i >= 0; i--) {
     toEnd[i] = left
     left += panels[i][clock].total
     error += panels[i][clock].error
+    errorToEnd[i] = error
   }
-  return { fromToday, toEnd, total: left, error }
+  return { fromToday, toEnd, total: left, error, errorFromToday, errorToEnd }
 }

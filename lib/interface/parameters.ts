@@ -27,6 +27,7 @@ const columns: Schema = {
   type: 'string',
   description: `Some of ${COLUMNS.map(({ key }) => key).join(', ')}, joined by commas`,
 }
+const bounds: Schema = { enum: ['0', '1'], default: '0' }
 const keysOf = (list: readonly { readonly key: string }[]): Schema => ({ enum: list.map(({ key }) => key) })
 
 const AT_SHAPES: Readonly<Record<keyof typeof AT_FIELDS, Schema>> = {
@@ -36,6 +37,7 @@ const AT_SHAPES: Readonly<Record<keyof typeof AT_FIELDS, Schema>> = {
   age: numbers,
   branch: { enum: ['expanding', 'contracting'], default: 'expanding' },
   columns,
+  bounds,
 }
 
 const TABLE_SHAPES: Readonly<Record<keyof typeof TABLE_FIELDS, Schema>> = {
@@ -45,6 +47,7 @@ const TABLE_SHAPES: Readonly<Record<keyof typeof TABLE_FIELDS, Schema>> = {
   to: { type: 'number' },
   rows: { type: 'integer', minimum: 2, maximum: Math.max(...FORMATS.map(({ mostRows }) => mostRows)), default: 200 },
   columns,
+  bounds,
 }
 
 const plain: Schema = { type: 'number' }

@@ -18,6 +18,8 @@ export interface Block extends Places, Position {
   readonly redshift: Float64Array
   /** In Gyr, where that is what was asked for. */
   readonly given: { readonly time?: Float64Array; readonly age?: Float64Array }
+  /** Which of them was asked for, so that the place is the result of a search; null where it follows from a. */
+  readonly asked: 'time' | 'age' | null
   /** What several columns share, by what makes it. */
   readonly kept: Map<unknown, unknown>
   /** An array that is nobody else's, with a place for each instant. */
@@ -56,6 +58,7 @@ export function blockOf(subject: ColumnSubject, instant: Instant): Block {
       scale: Float64Array.of(scale),
       redshift: Float64Array.of(redshift),
       given: { time: Float64Array.of(time), age: Float64Array.of(age) },
+      asked: instant.asked,
       kept: new Map(),
       take: () => new Float64Array(1),
     }

@@ -73,7 +73,7 @@ function nextByScale(sheet: Sheet, first: number): Run {
   if (outside) return { count, arm: null }
   placeInto(arrays.panel, arrays.s, N, arm, count)
   const { phase, sign, swings } = { phase: past ? 'past' : 'future', sign: 1, swings: 0 } as const
-  return { ...blockFrom(sheet, arm, count), ...arrays, phase, sign, swings, given: {} }
+  return { ...blockFrom(sheet, arm, count), ...arrays, phase, sign, swings, given: {}, asked: null }
 }
 
 /** The panels of places and the variables there; from one place to the next the panel is seldom another. */
@@ -111,6 +111,7 @@ function nextByTime(sheet: Sheet, first: number): Run {
     sign,
     swings,
     given: { [variable]: asked },
+    asked: variable as 'time' | 'age',
   }
 }
 

@@ -40,7 +40,7 @@ export const COLUMN_KEYS = [
 export type ColumnKey = (typeof COLUMN_KEYS)[number]
 
 export interface Column extends Quantity {
-  readonly key: ColumnKey
+  readonly key: ColumnKey | `${ColumnKey}Error`
   /** A number for each instant of a block in the unit of the column; where it is not finite there is none. */
   values(block: Block): Float64Array
   /** A finite number, or the reason why there is none. */
@@ -51,7 +51,7 @@ export interface Column extends Quantity {
 
 /** A column as it is written down. */
 export interface Definition extends Quantity {
-  readonly key: ColumnKey
+  readonly key: Column['key']
   values(block: Block): Float64Array
   /** Why there is no value at place i; null, as where this is not given, when it leaves the doubles. */
   why?(block: Block, i: number): Missing | null

@@ -54,15 +54,18 @@ function volumeIn(block: Block): Float64Array {
 }
 
 /** Near today 1 − aE is formed from E² − 1 and a² − 1, which are known without cancellation there. */
-const NEAR_TODAY = 0.7
+export const NEAR_TODAY = 0.7
 const NOTHING_TODAY = { N: 0, value: 0 } as const
+
+/** c H₀ in cm/s per Julian year. */
+export const driftUnit = (h0: number): number => 100 * SPEED_OF_LIGHT * perSecond(h0) * JULIAN_YEAR
 
 /** c H₀ (1 − E/(1 + z)) in cm/s per Julian year. */
 function driftIn(block: Block): Float64Array {
   if (unseen(block)) return nothing(block)
   const { arm, N, scale, redshift } = block
   const [out, squared] = [block.take(), expansionIn(block)]
-  const unit = 100 * SPEED_OF_LIGHT * perSecond(block.subject.scenario.h0) * JULIAN_YEAR
+  const unit = driftUnit(block.subject.scenario.h0)
   for (let i = 0; i < block.count; i++) {
     const rate = Math.sqrt(Math.max(0, squared[i])) / (1 + redshift[i])
     out[i] =

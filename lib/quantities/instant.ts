@@ -27,6 +27,8 @@ export interface Instant extends Event {
   readonly age: number
   /** Conformal time from now, in 1/H₀; past negative. */
   readonly conformal: number
+  /** Which time was asked for, so that the place is the result of a search; null where it follows from a. */
+  readonly asked: 'time' | 'age' | null
   /** E² = H²/H₀². */
   readonly expansion: number
 }
@@ -104,6 +106,7 @@ export function instantOf({ scenario, history }: ColumnSubject, event: Event, gi
     time: given.time ?? sinceNow(history, event, 'time') * gyr,
     age: given.age ?? sinceOrigin(history, event, 'time') * gyr,
     conformal: sinceNow(history, event, 'conformal'),
+    asked: given.time !== undefined ? 'time' : given.age !== undefined ? 'age' : null,
     expansion: expansionAtEvent(event),
   }
 }
