@@ -63,7 +63,7 @@ export function over(a: Twofold, b: Twofold): Twofold {
 /** Times a power of two. */
 const scaled = ([a, aLow]: Twofold, power: number): Twofold => [a * power, aLow * power]
 
-const LN2: Twofold = [0.6931471805599453, 2.3190468138462996e-17]
+const LN2: Twofold = [Math.LN2, 2.3190468138462996e-17]
 const HALVINGS = 9
 /** 1/k! for k = 2 … 9, each to twice the digits. */
 const FACTORIALS: readonly Twofold[] = inverseFactorials(9)
