@@ -95,5 +95,5 @@ function differences(one: unknown, other: unknown, path = ''): string[] {
  * known than is shown.
  */
 function known(value: unknown): unknown {
-  return typeof value === 'string' ? value.replace(/, \S+ (s|min|h|d|days?|hours?|minutes?) before$/, '') : value
+  return typeof value === 'string' ? value.replace(/,\s\S+\s(s|h|days)\sbefore$/, '') : value
 }

@@ -16,7 +16,7 @@ export default function Fetched({ query }: { readonly query: string }) {
     return () => controller.abort()
   }, [query])
   if (state === null) return null
-  return 'words' in state ? <TakeAwayWords words={state.words} /> : <p role="alert">{state.trouble}</p>
+  return 'words' in state ? <TakeAwayWords words={state.words} level={3} /> : <p role="alert">{state.trouble}</p>
 }
 
 async function fetchWords(query: string, signal: AbortSignal): Promise<Words> {

@@ -40,7 +40,7 @@ export default async function Page({ searchParams }: Props) {
         <p>
           <a href={`/?${query}`}>Open in the explorer</a>
         </p>
-        <TakeAwayWords words={wordsOf(solutions, edition)} />
+        <TakeAwayWords words={wordsOf(solutions, edition)} level={2} />
       </main>
       <Footer data={null} edition={EDITION} />
     </div>
