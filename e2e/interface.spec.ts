@@ -13,6 +13,8 @@ const present = (program: string) => spawnSync(program, ['--version']).error ===
 
 test('every example of the page answers', async ({ page, baseURL }) => {
   test.skip(!present('curl'), 'curl is not installed here')
+  // Every example twice, some of them figures.
+  test.setTimeout(240_000)
   await page.goto('/api')
   const commands = await page.locator('.example code').allTextContents()
   expect(commands.length).toBeGreaterThan(5)
