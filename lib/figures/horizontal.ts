@@ -18,6 +18,8 @@ export interface Horizontal {
   readonly now: number
   /** Which way the future lies. */
   readonly future: 'right' | 'none'
+  /** How instants are asked for: a variable, which may run the other way, and what it must lie above; null where by none. */
+  readonly asked: { readonly variable: Variable; readonly sign: 1 | -1; readonly above: number } | null
   instant(solution: Solution, value: number): Instant | Missing
   /** Where an instant lies on the axis. */
   place(solution: Solution, instant: Instant): number
@@ -37,10 +39,11 @@ const columnOf = (key: string, symbol?: string): Horizontal['quantity'] => {
   return { quantity: key, label: column.label, symbol: symbol ?? column.symbol, unit: column.unit }
 }
 
-const by =
-  (variable: Variable, sign = 1) =>
-  (solution: Solution, value: number) =>
-    sign * value > LEAST[variable] ? instantAt(solution, variable, sign * value) : missing('there is no such instant')
+const by = (variable: Variable, sign: 1 | -1 = 1): Pick<Horizontal, 'asked' | 'instant'> => ({
+  asked: { variable, sign, above: LEAST[variable] },
+  instant: (solution, value) =>
+    sign * value > LEAST[variable] ? instantAt(solution, variable, sign * value) : missing('there is no such instant'),
+})
 
 /** What must lie below a value. */
 const LEAST: Readonly<Record<Variable, number>> = {
@@ -98,7 +101,7 @@ export const HORIZONTALS: readonly Horizontal[] = [
     quantity: columnOf('time', ''),
     now: 0,
     future: 'right',
-    instant: by('time'),
+    ...by('time'),
     place: timeOf,
     range: timeRange,
   },
@@ -108,7 +111,7 @@ export const HORIZONTALS: readonly Horizontal[] = [
     quantity: columnOf('time', ''),
     now: 0,
     future: 'right',
-    instant: by('time'),
+    ...by('time'),
     place: timeOf,
     range: logTimeRange,
   },
@@ -118,7 +121,7 @@ export const HORIZONTALS: readonly Horizontal[] = [
     quantity: columnOf('lookback'),
     now: 0,
     future: 'none',
-    instant: by('time', -1),
+    ...by('time', -1),
     place: (_, { time }) => -time,
     range: (solutions) => linear(0, pastOf(solutions)),
   },
@@ -128,7 +131,7 @@ export const HORIZONTALS: readonly Horizontal[] = [
     quantity: columnOf('scale'),
     now: 1,
     future: 'right',
-    instant: by('scale'),
+    ...by('scale'),
     place: scaleOf,
     range: (_, whole) => linear(0, whole ? 3 : 1),
   },
@@ -138,7 +141,7 @@ export const HORIZONTALS: readonly Horizontal[] = [
     quantity: columnOf('scale'),
     now: 1,
     future: 'right',
-    instant: by('scale'),
+    ...by('scale'),
     place: scaleOf,
     range: (_, whole) => (whole ? log(1e-5, 100) : log(1e-3, 1)),
   },
@@ -148,7 +151,7 @@ export const HORIZONTALS: readonly Horizontal[] = [
     quantity: columnOf('redshift'),
     now: 0,
     future: 'none',
-    instant: by('z'),
+    ...by('z'),
     place: redshiftOf,
     range: () => linear(0, 6),
   },
@@ -158,7 +161,7 @@ export const HORIZONTALS: readonly Horizontal[] = [
     quantity: columnOf('redshift'),
     now: 0,
     future: 'none',
-    instant: by('z'),
+    ...by('z'),
     place: redshiftOf,
     // ln(1 + z) is the signed logarithm with a linear part of 1.
     range: () => signedLog(0, 1100, 1),
@@ -169,6 +172,7 @@ export const HORIZONTALS: readonly Horizontal[] = [
     quantity: { quantity: 'conformal', label: 'conformal time from now', symbol: 'c (η − η_0)', unit: 'Gly' },
     now: 0,
     future: 'right',
+    asked: null,
     instant: (solution, value) => {
       const event = eventAtConformal(solution.history, value / hubbleLengthGly(solution.scenario.h0))
       return isEvent(event) ? instantOf(solution, event) : missing(event.because)

@@ -1,16 +1,13 @@
 /** Of what: the share of each component in the scenario in focus, and the law of dark energy of all. */
-import { isMissing, type Missing } from '../../measures/outcome'
-import type { ColumnKey } from '../../quantities/column'
+import type { Column, ColumnKey } from '../../quantities/column'
 import { columnNamed } from '../../quantities/columns'
-import { type Instant, isInstant } from '../../quantities/instant'
-import type { Solution } from '../../solve'
 import { extrapolates } from '../../words/beyond'
+import { columnAlong } from '../along'
 import type { Chart } from '../chart'
 import { readingsOf } from '../readings'
-import { remembered } from '../remembered'
 import { linearRange } from '../scale'
 import { alternativeOf, futureOf } from './describe'
-import { curveOf, quantityChart, type Values, type Vertical } from './quantity-chart'
+import { curveOf, quantityChart, type Vertical } from './quantity-chart'
 import { type Asked, focusOf, rangeOf, type View } from './view'
 
 const BY = ['logscale', 'scale', 'time', 'logtime', 'lookback', 'redshift', 'logredshift']
@@ -29,21 +26,20 @@ const NOTHING = 5e-4
 /** Near a turning point the shares have no bounds. */
 const MOST = 2
 
-function valuesOf(solution: Solution, instantAtPlace: (place: number) => Instant | Missing, key: ColumnKey): Values {
+function columnOf(key: ColumnKey): Column {
   const column = columnNamed(key)
-  return (places) =>
-    places.map((place) => {
-      const instant = instantAtPlace(place)
-      const value = isInstant(instant) && column ? column.value(solution, instant) : null
-      return value === null || isMissing(value) ? null : value
-    })
+  if (!column) throw new Error(`there is no column ${key}`)
+  return column
 }
 
 function shares(asked: Asked): Chart {
   const solution = focusOf(asked)
   const x = rangeOf({ ...asked, solutions: [solution] }, true)
-  const instantAtPlace = remembered((place) => asked.by.instant(solution, place))
-  const all = PARTS.map((part, dash) => ({ ...part, dash, values: valuesOf(solution, instantAtPlace, part.key) }))
+  const all = PARTS.map((part, dash) => ({
+    ...part,
+    dash,
+    values: columnAlong(columnOf(part.key), solution, asked.by),
+  }))
   const first = readingsOf(
     all.map(({ values }) => values),
     x,
@@ -82,11 +78,10 @@ function shares(asked: Asked): Chart {
 }
 
 function law(): Vertical {
-  const column = columnNamed('w')
-  if (!column) throw new Error('there is no column w')
-  const { label, symbol, unit, value } = column
+  const column = columnOf('w')
+  const { label, symbol, unit } = column
   const divide = { axis: 'y', at: -1, label: '' } as const
-  return { quantity: 'w', label, symbol, unit, value, past: false, logarithmic: false, divide }
+  return { quantity: 'w', label, symbol, unit, factors: [column], past: false, logarithmic: false, divide }
 }
 
 export const CONTENTS: View = {

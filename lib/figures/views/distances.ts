@@ -16,8 +16,8 @@ const show = (key: ColumnKey, word: string, compare: readonly Comparison[] = ['r
 function verticalOf(key: string): Vertical {
   const column = columnNamed(key)
   if (!column) throw new Error(`there is no column ${key}`)
-  const { label, symbol, unit, value } = column
-  return { quantity: key, label, symbol, unit, value, past: true, logarithmic: key !== 'modulus' }
+  const { label, symbol, unit } = column
+  return { quantity: key, label, symbol, unit, factors: [column], past: true, logarithmic: key !== 'modulus' }
 }
 
 export const DISTANCES: View = {

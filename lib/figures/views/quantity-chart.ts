@@ -1,9 +1,9 @@
 /** One quantity of every scenario against another: as it is, or compared with the scenario in focus. */
-import { isMissing, type Missing } from '../../measures/outcome'
-import { type Instant, isInstant } from '../../quantities/instant'
+import type { Column } from '../../quantities/column'
 import type { Solution } from '../../solve'
 import { extrapolates } from '../../words/beyond'
 import { capital } from '../../words/sentence'
+import { columnAlong, type Values } from '../along'
 import type { Axis, Chart, Curve, Reference } from '../chart'
 import { finishOf } from '../long-view'
 import { readingsOf } from '../readings'
@@ -20,7 +20,8 @@ export interface Vertical {
   readonly label: string
   readonly symbol: string
   readonly unit: string
-  readonly value: (solution: Solution, instant: Instant) => number | Missing
+  /** Columns whose product it is. */
+  readonly factors: readonly Column[]
   /** Seen only along a line of sight: the horizontal axis stops today. */
   readonly past: boolean
   /** A value that divides, as q = 0. */
@@ -28,8 +29,6 @@ export interface Vertical {
   /** False where a logarithm would make no sense. */
   readonly logarithmic: boolean
 }
-
-export type Values = (places: readonly number[]) => readonly (number | null)[]
 
 const STEPS = 160
 
@@ -84,15 +83,16 @@ function compared(asked: Asked, vertical: Vertical, solution: Solution): Values 
   }
 }
 
-function valuesOf({ by }: Asked, { value }: Vertical, solution: Solution): Values {
-  return (places) =>
-    places.map((place) => {
-      const instant = by.instant(solution, place)
-      if (!isInstant(instant)) return null
-      const found = value(solution, instant)
-      return isMissing(found) ? null : found
-    })
+function valuesOf({ by }: Asked, { factors }: Vertical, solution: Solution): Values {
+  const all = factors.map((column) => columnAlong(column, solution, by))
+  return (places) => {
+    const [first = [], ...others] = all.map((values) => values(places))
+    return others.reduce((product, other) => product.map((value, i) => times(value, other[i] ?? null)), first)
+  }
 }
+
+const times = (one: number | null, other: number | null): number | null =>
+  one === null || other === null ? null : one * other
 
 /** Today's values are seen whatever is cut, where today is seen, and so is what divides. */
 function steadyOf(today: readonly (number | null)[], divide: Reference | null): number[] {

@@ -1,5 +1,4 @@
 /** How fast: the expansion rate over 1 + z, and how the expansion slows or speeds up. */
-import { isMissing } from '../../measures/outcome'
 import type { Column } from '../../quantities/column'
 import { columnNamed } from '../../quantities/columns'
 import { quantityChart, type Vertical } from './quantity-chart'
@@ -23,10 +22,7 @@ const PACE: Vertical = {
   unit: HUBBLE.unit,
   past: false,
   logarithmic: true,
-  value: (solution, instant) => {
-    const rate = HUBBLE.value(solution, instant)
-    return isMissing(rate) ? rate : rate * instant.scale
-  },
+  factors: [HUBBLE, column('scale')],
 }
 
 const SLOWING: Vertical = {
@@ -37,7 +33,7 @@ const SLOWING: Vertical = {
   past: false,
   logarithmic: false,
   divide: { axis: 'y', at: 0, label: '' },
-  value: (solution, instant) => DECELERATION.value(solution, instant),
+  factors: [DECELERATION],
 }
 
 export const RATE: View = {
