@@ -86,18 +86,8 @@ function differences(one: unknown, other: unknown, path = ''): string[] {
     return far ? [`${path}: ${one} ${other}`] : []
   }
   if (typeof one !== 'object' || typeof other !== 'object' || one === null || other === null) {
-    return known(one) === known(other) ? [] : [`${path}: ${one} ${other}`]
+    return one === other ? [] : [`${path}: ${one} ${other}`]
   }
   const keys = new Set([...Object.keys(one), ...Object.keys(other)])
   return [...keys].flatMap((key) => differences(Reflect.get(one, key), Reflect.get(other, key), `${path}.${key}`))
-}
-
-/**
- * How long before an end something comes apart is told as the difference of two times that may be far away: less of it may be
- * known than is shown.
- */
-function known(value: unknown): unknown {
-  return typeof value === 'string'
-    ? value.replace(/(,\s)?\S+(\s×\s10\S+)?\s(s|h|days|yr|kyr|Myr|Gyr)\sbefore/g, '')
-    : value
 }

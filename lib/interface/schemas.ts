@@ -4,23 +4,8 @@ import { COLUMNS } from '../quantities/columns'
 import { MEASURES } from '../quantities/measures'
 import type { MomentKind } from '../quantities/moments'
 import { END_NAMES } from '../words/ending'
-
-export type Schema = Readonly<Record<string, unknown>>
-
-const number: Schema = { type: 'number' }
-const text: Schema = { type: 'string' }
-const maybeNumber: Schema = { type: ['number', 'null'] }
-const listOf = (items: Schema): Schema => ({ type: 'array', items })
-export const refTo = (name: string): Schema => ({ $ref: `#/components/schemas/${name}` })
-
-/** All properties are always there, and no others. */
-const closed = (properties: Readonly<Record<string, Schema>>, description?: string): Schema => ({
-  type: 'object',
-  ...(description ? { description } : {}),
-  properties,
-  required: Object.keys(properties),
-  additionalProperties: false,
-})
+import { RULER_SCHEMAS } from './ruler'
+import { closed, column, listOf, maybeNumber, number, refTo, rows, type Schema, scenarios, text } from './shapes'
 
 const ORIGINS: Readonly<Record<OriginKind, string>> = {
   'big-bang': 'a = 0 at a finite time',
@@ -50,8 +35,6 @@ const MOMENTS: Readonly<Record<MomentKind, true>> = {
 const ENDS: readonly EndKind[] = Object.keys(END_NAMES) as EndKind[]
 
 const densities = ['photons', 'masslessNeutrinos', 'massiveNeutrinos', 'coldMatter', 'curvature', 'dark']
-
-const column = closed({ name: text, unit: text, label: text })
 
 const measure = (unit: string, description: string): Schema => ({
   description,
@@ -90,6 +73,8 @@ const history: Readonly<Record<string, Schema>> = {
       time: maybeNumber,
       scale: maybeNumber,
       redshift: maybeNumber,
+      age: { ...maybeNumber, description: 'Gyr since the origin; null when infinite' },
+      remaining: { ...maybeNumber, description: 'Gyr left to the end; null when infinite' },
     }),
   ),
   series: closed({ columns: listOf(column), rows: listOf(listOf(number)) }, 'Rounded points for drawing'),
@@ -105,9 +90,10 @@ const changeBetween = (kinds: readonly string[]): Schema => ({
   oneOf: [closed({ from: { enum: kinds }, to: { enum: kinds } }), { type: 'null' }],
 })
 
-const scenarios = (scenario: Schema): Schema => closed({ engine: text, scenarios: listOf(scenario) })
-const rows = listOf(listOf(maybeNumber))
 const index: Schema = { type: 'integer', minimum: 0, description: 'The line of the request, counted from 0' }
+
+/** Of the columns, and of those of their error bounds. */
+const COLUMN_NAMES = COLUMNS.flatMap(({ key }) => [key, `${key}Error`])
 
 const problemProperties: Readonly<Record<string, Schema>> = {
   type: text,
@@ -145,7 +131,7 @@ export const SCHEMAS: Readonly<Record<string, Schema>> = {
   Note: closed({ row: { type: 'integer' }, column: { type: ['string', 'null'] }, because: text }),
   Epochs: scenarios(closed({ code: text, columns: listOf(refTo('Column')), rows, notes: listOf(refTo('Note')) })),
   Table: scenarios(closed({ code: text, columns: listOf(refTo('Column')), rows })),
-  Column: closed({ name: { enum: COLUMNS.map(({ key }) => key) }, unit: text, label: text }),
+  Column: closed({ name: { enum: COLUMN_NAMES }, unit: text, label: text }),
   BatchLine: {
     oneOf: [text, closed({ s: text })],
     description: 'A scenario code as plain text, nothing percent-encoded',
@@ -188,5 +174,6 @@ export const SCHEMAS: Readonly<Record<string, Schema>> = {
     allowed: text,
     message: text,
   }),
+  ...RULER_SCHEMAS,
   Problem: closed(problemProperties, 'Problem details, RFC 9457'),
 }

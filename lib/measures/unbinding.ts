@@ -6,7 +6,7 @@
 
 import { JULIAN_YEAR } from '../constants'
 import type { History } from '../history/history'
-import { fromToday, placeAt } from '../history/place'
+import { fromToday, placeAt, toEnd } from '../history/place'
 import type { Model } from '../model'
 import { brent } from '../numerics/roots'
 import { hubbleTimeGyr } from '../units'
@@ -26,8 +26,16 @@ export type UnboundSystem = (typeof UNBOUND_SYSTEMS)[number]
 
 const DESTRUCTIVE: readonly History['end']['kind'][] = ['rip', 'little-rip', 'singular']
 
-/** Time from now in 1/H₀ and ln a; null when the universe does not end that way, or the system is never bound after today. */
-export function unbinding(history: History, h0: number, { period }: UnboundSystem): { time: number; N: number } | null {
+export interface Unbinding {
+  /** From now, and left to the end, in 1/H₀. */
+  readonly time: number
+  readonly remaining: number
+  /** ln a. */
+  readonly N: number
+}
+
+/** Null when the universe does not end that way, or the system is never bound after today. */
+export function unbinding(history: History, h0: number, { period }: UnboundSystem): Unbinding | null {
   if (!DESTRUCTIVE.includes(history.end.kind)) return null
   const { future } = history
   const periods = (hubbleTimeGyr(h0) * 1e9 * YEAR) / period
@@ -39,7 +47,8 @@ export function unbinding(history: History, h0: number, { period }: UnboundSyste
   const N = brent(excess, 0, far)
   const place = placeAt(future, N)
   // Rounding alone must not put it behind the end.
-  return place === null ? null : { time: Math.min(fromToday(place, 'time'), future.time.total), N }
+  if (place === null) return null
+  return { time: Math.min(fromToday(place, 'time'), future.time.total), remaining: toEnd(place, 'time'), N }
 }
 
 /** Doubling steps until the system is unbound; null where ln a grows beyond all numbers that the law can be asked for. */

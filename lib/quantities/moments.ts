@@ -1,5 +1,5 @@
 /** The timetable of a scenario: every moment kind once, with its label and where it lies in the history. */
-import { type Event, eventAtScale, isEvent, sinceNow } from '../history/event'
+import { type Event, eventAtScale, isEvent, sinceNow, sinceOrigin, untilEnd } from '../history/event'
 import type { History } from '../history/history'
 import { type Crossing, nearestToNow } from '../measures/epochs'
 import { isMissing, type Outcome } from '../measures/outcome'
@@ -32,6 +32,9 @@ export interface Moment {
   readonly time: number | null
   readonly scale: number | null
   readonly redshift: number | null
+  /** Gyr since the origin and left to the end, each on its own and not as a difference of times; null when infinite. */
+  readonly age: number | null
+  readonly remaining: number | null
 }
 
 /** Changes of the sign of ä that are listed; from the last of them on, the scenario is said to oscillate. */
@@ -68,6 +71,8 @@ export function momentsOf(subject: Subject): readonly Moment[] {
     label,
     time: sinceNow(history, event, 'time') * gyr,
     ...placeOf(event.place.N),
+    age: finite(sinceOrigin(history, event, 'time') * gyr),
+    remaining: finite(untilEnd(history, event, 'time') * gyr),
   })
   const crossing = (kind: MomentKind, label: string, one: Crossing | null): Moment[] =>
     onExpansion(history, one?.N ?? null, (event) => at(kind, label, event))
@@ -78,12 +83,26 @@ export function momentsOf(subject: Subject): readonly Moment[] {
     ...fit('recombination', 'last scattering', recombinationRedshift(scenario)),
     ...fit('drag', 'end of the drag epoch', dragRedshift(scenario)),
     ...changes(subject, crossing),
-    { kind: 'now' as const, label: 'now', time: 0, scale: 1, redshift: 0 },
+    ...now(history, gyr),
     ...turnaround(subject, gyr),
     ...unbindings(subject, gyr),
   ]
   between.sort((one, other) => (one.time ?? 0) - (other.time ?? 0))
   return [first(subject, gyr), ...between, last(subject, gyr)]
+}
+
+const finite = (time: number): number | null => (Number.isFinite(time) ? time : null)
+
+/** From the times of origin and end alone: for what lies far from both, or is one of them. */
+function within({ origin, end }: History, time: number, gyr: number): Pick<Moment, 'age' | 'remaining'> {
+  return {
+    age: origin.time === null ? null : (time - origin.time) * gyr,
+    remaining: end.time === null ? null : (end.time - time) * gyr,
+  }
+}
+
+function now(history: History, gyr: number): Moment[] {
+  return [{ kind: 'now', label: 'now', time: 0, scale: 1, redshift: 0, ...within(history, 0, gyr) }]
 }
 
 const placeOf = (N: number) => {
@@ -130,6 +149,7 @@ function turnaround({ history }: Subject, gyr: number): Moment[] {
       label: 'expansion stops',
       time: turnaround.time * gyr,
       ...placeOf(Math.log(turnaround.scale)),
+      ...within(history, turnaround.time, gyr),
     },
   ]
 }
@@ -139,18 +159,29 @@ function unbindings({ history, scenario }: Subject, gyr: number): Moment[] {
     const found = unbinding(history, scenario.h0, system)
     return found === null
       ? []
-      : [{ kind: system.kind, label: system.label, time: found.time * gyr, ...placeOf(found.N) }]
+      : [
+          {
+            kind: system.kind,
+            label: system.label,
+            time: found.time * gyr,
+            ...placeOf(found.N),
+            age: within(history, found.time, gyr).age,
+            remaining: finite(found.remaining * gyr),
+          },
+        ]
   })
 }
 
 function first({ history }: Subject, gyr: number): Moment {
   const { kind, time, scale } = history.origin
   const redshift = scale > 0 ? 1 / scale - 1 : null
-  return { kind: 'origin', label: ORIGINS[kind], time: time === null ? null : time * gyr, scale, redshift }
+  const times = time === null ? { age: null, remaining: null } : within(history, time, gyr)
+  return { kind: 'origin', label: ORIGINS[kind], time: time === null ? null : time * gyr, scale, redshift, ...times }
 }
 
 function last({ history }: Subject, gyr: number): Moment {
   const { kind, time, scale } = history.end
   const redshift = scale === null ? -1 : scale > 0 ? 1 / scale - 1 : null
-  return { kind: 'end', label: ENDS[kind], time: time === null ? null : time * gyr, scale, redshift }
+  const times = time === null ? { age: null, remaining: null } : within(history, time, gyr)
+  return { kind: 'end', label: ENDS[kind], time: time === null ? null : time * gyr, scale, redshift, ...times }
 }

@@ -74,8 +74,7 @@ export function endTail(told: Told): string | null {
   return `H tends to ${withUnit(significant(limit, 3), 'km/s/Mpc')}.`
 }
 
-function tornApart({ end, moments }: Told): string | null {
+function tornApart({ moments }: Told): string | null {
   const galaxy = moments.find((one) => one.kind === 'unbinding-galaxy')
-  if (!galaxy || galaxy.time === null || end.time === null) return null
-  return `Galaxies come apart ${duration(end.time - galaxy.time)} before.`
+  return galaxy && galaxy.remaining !== null ? `Galaxies come apart ${duration(galaxy.remaining)} before.` : null
 }

@@ -12,20 +12,20 @@ export interface MomentWords {
   readonly where: string
 }
 
-export function momentWords({ origin, end, moments }: Pick<Solution, 'origin' | 'end' | 'moments'>): MomentWords[] {
+export function momentWords({ moments }: Pick<Solution, 'moments'>): MomentWords[] {
   return moments.map((moment) => ({
     kind: moment.kind,
-    label: `${moment.kind === 'now' ? 'today' : moment.label}${apart(moment, origin.time, end.time)}`,
+    label: `${moment.kind === 'now' ? 'today' : moment.label}${apart(moment)}`,
     when: whenOf(moment),
     where: whereOf(moment),
   }))
 }
 
 /** Close to the origin or the end, where the time from now says too little: by how much. */
-function apart({ kind, time }: Moment, origin: number | null, end: number | null): string {
-  if (time === null || kind === 'origin' || kind === 'now' || kind === 'end') return ''
-  if (origin !== null && time > origin && time - origin < NEAR) return `, after ${duration(time - origin)}`
-  if (end !== null && time < end && end - time < NEAR) return `, ${duration(end - time)} before`
+function apart({ kind, age, remaining }: Moment): string {
+  if (kind === 'origin' || kind === 'now' || kind === 'end') return ''
+  if (age !== null && age > 0 && age < NEAR) return `, after ${duration(age)}`
+  if (remaining !== null && remaining > 0 && remaining < NEAR) return `, ${duration(remaining)} before`
   return ''
 }
 

@@ -47,6 +47,16 @@ test('before a little rip ln a grows without bound: Frampton, Ludwick & Scherrer
   })
 })
 
+test('what is left to a rip keeps its digits down to the atom: Caldwell, Kamionkowski & Weinberg 2003, P √(2|1+3w|)/(6π|1+w|)', () => {
+  const { history, scenario } = universe('matter:0.3,eos:constant,w:-1.5')
+  for (const system of [planet, UNBOUND_SYSTEMS[3], atom]) {
+    const found = unbinding(history, scenario.h0, system)
+    const periods = ((found?.remaining ?? Number.NaN) * hubbleTimeGyr(scenario.h0) * 1e9 * JULIAN_YEAR) / system.period
+    // Exact for dark energy alone; matter is down by a^-4.5 and less than 1e-14 by then.
+    expectRelative(periods, Math.sqrt(2 * 3.5) / (6 * Math.PI * 0.5), 1e-10)
+  }
+})
+
 test('the looser a system, the earlier it goes', () => {
   const { history, scenario } = universe('matter:0.3,eos:constant,w:-1.3')
   const scales = UNBOUND_SYSTEMS.map((system) => unbinding(history, scenario.h0, system)?.N ?? Number.NaN)

@@ -36,7 +36,7 @@ export function told({ scenario, label, origin, end, measures = {}, moments = []
     origin: { kind: 'big-bang', time: -13.789, scale: 0, ...origin },
     end: { kind: 'exponential', time: null, scale: null, turnaround: null, proven: true, because: 'by hand', ...end },
     measures: Object.fromEntries(MEASURE_KEYS.map((key) => [key, answer(measures[key])])) as Record<MeasureKey, Answer>,
-    moments: moments.map(([kind, time]) => moment(kind, time)),
+    moments: moments.map(([kind, time]) => moment(kind, time, null, end?.time ?? null)),
   }
 }
 
@@ -45,6 +45,14 @@ function answer(value: number | undefined): Answer {
   return { value, unit: '', error: 0, because: null }
 }
 
-export function moment(kind: MomentKind, time: number | null, scale: number | null = null): Moment {
-  return { kind, label: kind, time, scale, redshift: scale ? 1 / scale - 1 : null }
+/** In a history that began 13.789 Gyr ago and ends at `end`. */
+export function moment(
+  kind: MomentKind,
+  time: number | null,
+  scale: number | null = null,
+  end: number | null = null,
+): Moment {
+  const age = time === null ? null : time + 13.789
+  const remaining = time === null || end === null ? null : end - time
+  return { kind, label: kind, time, scale, redshift: scale ? 1 / scale - 1 : null, age, remaining }
 }
