@@ -20,7 +20,11 @@ import { type RulerView, rulerView } from './ruler-view'
 import type { Download, Home } from './table'
 
 const TABLE_FORMATS = FORMATS.filter(({ key }) => key === 'csv' || key === 'json')
-const FORMAT_FIELD = oneOf('format', TABLE_FORMATS, 'The format of the download.')
+/** Of the table, and what reads it. */
+export const RULER_FORMAT = {
+  formats: TABLE_FORMATS,
+  field: oneOf('format', TABLE_FORMATS, 'The format of the download.'),
+}
 
 /** Like the page it reads leniently what stands behind `s`, and answers with complaints where a field cannot be read. */
 export function askRuler(pairs: Pairs): Reading<Question<RulerView>> {
@@ -40,7 +44,7 @@ export function askRuler(pairs: Pairs): Reading<Question<RulerView>> {
 export function askRulerTable(pairs: Pairs, home: Home): Reading<Question<Download>> {
   const { codes, values, faults: unknown } = readKeys(pairs, [...RULER_KEYS, 'format'])
   const faults: Fault[] = [...unknown]
-  const format = take(values, 'format', FORMAT_FIELD, faults) ?? TABLE_FORMATS[0]
+  const format = take(values, 'format', RULER_FORMAT.field, faults) ?? TABLE_FORMATS[0]
   const place = placeOf(values)
   const ask = rulerAskOf(place)
   for (const [key, message] of Object.entries(rulerTyped(ask).complaints)) {

@@ -4,7 +4,7 @@ import type { Pairs, Question } from '../answers/question'
 import { fault, problemsOf } from '../scenario/problems'
 import type { Reading } from '../scenario/scenario'
 import { openApi, type Place } from './openapi'
-import type { Schema } from './schemas'
+import type { Schema } from './shapes'
 
 export function askDocument(pairs: Pairs, place: Place): Reading<Question<Schema>> {
   const { codes, faults } = readKeys(pairs, [])

@@ -2,7 +2,8 @@
 import { ENGINE } from '../solve'
 import type { Route, RouteParameter } from './route'
 import { ROUTES } from './routes'
-import { refTo, SCHEMAS, type Schema } from './schemas'
+import { SCHEMAS } from './schemas'
+import { refTo, type Schema } from './shapes'
 
 export interface Place {
   readonly version: string

@@ -1,4 +1,5 @@
 /** Query keys of the routes, described by the very schemas that read them. */
+import { RULER_FORMAT } from '../answers/ask-ruler'
 import { AT_FIELDS } from '../answers/epochs'
 import { FIGURE_FIELDS, FIGURE_FORMATS, LEAST_DPI, MOST_DPI, VIEW_KEYS } from '../answers/figure'
 import type { PLACE_FIELDS } from '../answers/figure-place'
@@ -13,7 +14,7 @@ import { MOST_SCENARIOS } from '../scenario/query'
 import { SPACINGS } from '../tables/spacing'
 import type { RouteParameter } from './route'
 import { codeDescription } from './scenario-code'
-import type { Schema } from './schemas'
+import type { Schema } from './shapes'
 
 export const SCENARIOS: RouteParameter = {
   name: 's',
@@ -107,3 +108,7 @@ export const TABLE_PARAMETERS = parametersOf(TABLE_FIELDS, TABLE_SHAPES)
 export const FIGURE_PARAMETERS = parametersOf(FIGURE_FIELDS, FIGURE_SHAPES)
 export const QR_PARAMETERS = parametersOf(QR_FIELDS, QR_SHAPES)
 export const OEMBED_PARAMETERS = parametersOf(OEMBED_FIELDS, OEMBED_SHAPES)
+export const RULER_FORMATS = parametersOf(
+  { format: RULER_FORMAT.field },
+  { format: { ...keysOf(RULER_FORMAT.formats), default: RULER_FORMAT.formats[0].key } },
+)

@@ -1,5 +1,5 @@
 /** What the document of the interface says about a route. */
-import type { Schema } from './schemas'
+import type { Schema } from './shapes'
 
 export interface RouteParameter {
   readonly name: string

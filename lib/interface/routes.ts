@@ -1,5 +1,6 @@
 /** Every route of the interface once; the document, the page about it and the tests follow from this list. */
 
+import { RULER_FORMAT } from '../answers/ask-ruler'
 import { FIGURE_FORMATS } from '../answers/figure'
 import { QR_FORMATS } from '../answers/qr'
 import { FORMATS } from '../formats'
@@ -8,18 +9,21 @@ import {
   FIGURE_PARAMETERS,
   OEMBED_PARAMETERS,
   QR_PARAMETERS,
+  RULER_FORMATS,
   SCENARIOS,
   TABLE_PARAMETERS,
 } from './parameters'
 import { BYTES, type Route } from './route'
-import { refTo } from './schemas'
+import { RULER_PARAMETERS } from './ruler'
+import { refTo } from './shapes'
 
 const JSON_TYPE = 'application/json'
 export const LINES_TYPE = 'application/x-ndjson'
 
-const tableAnswers = Object.fromEntries(
-  FORMATS.map(({ key, mediaType }) => [mediaType.split(';')[0], key === 'json' ? refTo('Table') : BYTES]),
-)
+const tablesIn = (formats: typeof FORMATS, json: string) =>
+  Object.fromEntries(
+    formats.map(({ key, mediaType }) => [mediaType.split(';')[0], key === 'json' ? refTo(json) : BYTES]),
+  )
 
 export const ROUTES: readonly Route[] = [
   {
@@ -54,7 +58,7 @@ export const ROUTES: readonly Route[] = [
     method: 'get',
     summary: 'Evenly spaced rows as a file, streamed.',
     parameters: [SCENARIOS, ...TABLE_PARAMETERS],
-    answer: tableAnswers,
+    answer: tablesIn(FORMATS, 'Table'),
     refusals: [422],
     examples: [
       { title: 'A table for a spreadsheet', query: 's=h0:70,matter:0.3&by=redshift&from=0&to=10&rows=11' },
@@ -63,6 +67,35 @@ export const ROUTES: readonly Route[] = [
         query: 's=h0:70,matter:0.3&by=redshift&from=0&to=10&rows=11&format=latex&columns=redshift,age,luminosity',
       },
       { title: 'And as data', query: 's=h0:70,matter:0.3&rows=3&format=json&columns=scale,age' },
+    ],
+  },
+  {
+    path: '/api/ruler',
+    method: 'get',
+    summary: 'What an epoch means in every scenario, and what lies between two, rounded as the page shows it.',
+    parameters: [SCENARIOS, ...RULER_PARAMETERS],
+    answer: { [JSON_TYPE]: refTo('Ruler') },
+    refusals: [],
+    examples: [
+      { title: 'A lens and its source', query: 's=h0:70,matter:0.3&at=0.5&until=2&read=age,angular' },
+      {
+        title: 'When the background is at 10 K',
+        query: 's=h0:70,matter:0.3&epoch=temperature&at=10&read=redshift,age',
+      },
+    ],
+  },
+  {
+    path: '/api/ruler/table',
+    method: 'get',
+    summary: 'The same in full, a row for each scenario.',
+    parameters: [SCENARIOS, ...RULER_PARAMETERS, ...RULER_FORMATS],
+    answer: tablesIn(RULER_FORMAT.formats, 'RulerTable'),
+    refusals: [422],
+    examples: [
+      {
+        title: 'The angle of 30 kpc in two scenarios',
+        query: 's=h0:70,matter:0.3&s=h0:67.66&at=2&length=0.03&read=angle,angular&format=json',
+      },
     ],
   },
   {

@@ -1,7 +1,11 @@
 /** The document is judged by the published schemas of OpenAPI 3.1, and our answers by its own. */
+
+import { readdirSync } from 'node:fs'
+import { dirname, join } from 'node:path'
 import { Validator } from '@seriousme/openapi-schema-validator'
 import { Ajv2020 } from 'ajv/dist/2020'
 import { describe, expect, test } from 'vitest'
+import { askRuler, askRulerTable } from '../../lib/answers/ask-ruler'
 import { askAt } from '../../lib/answers/at'
 import { answerLine, linesOf } from '../../lib/answers/batch'
 import { AT_FIELDS } from '../../lib/answers/epochs'
@@ -16,6 +20,7 @@ import type { SCHEMAS } from '../../lib/interface/schemas'
 import { COLUMN_KEYS } from '../../lib/quantities/column'
 import { MEASURE_KEYS } from '../../lib/quantities/measures'
 import { DEMO } from '../../lib/scenario/demo'
+import { RULER_KEYS } from '../../lib/words/place'
 import { problemDocument } from '../../scripts/front/problem.mjs'
 import { answerOf, problemsOf } from '../answers/ask'
 
@@ -66,6 +71,8 @@ test('it knows every query key, column and measure', () => {
   const keys = (path: string) => ROUTES.find((one) => one.path === path)?.parameters.map(({ name }) => name)
   expect(keys('/api/at')).toEqual(['s', ...Object.keys(AT_FIELDS)])
   expect(keys('/api/table')).toEqual(['s', ...Object.keys(TABLE_FIELDS)])
+  expect(keys('/api/ruler')).toEqual(['s', ...RULER_KEYS])
+  expect(keys('/api/ruler/table')).toEqual(['s', ...RULER_KEYS, 'format'])
   const text = JSON.stringify(document)
   for (const key of [...COLUMN_KEYS, ...MEASURE_KEYS]) expect(text).toContain(`"${key}"`)
   for (const { parameters } of ROUTES) {
@@ -74,6 +81,17 @@ test('it knows every query key, column and measure', () => {
       expect(Object.keys(schema).length).toBeGreaterThan(0)
     }
   }
+})
+
+/** Routes that are not for scripts: the document itself, what the live page asks for, and the answer to what is no route. */
+const APART = ['/api/openapi.json', '/api/explorer', '/api/[...path]']
+
+test('every route of the server is in it', () => {
+  const app = new URL('../../app', import.meta.url).pathname
+  const files = readdirSync(join(app, 'api'), { recursive: true, encoding: 'utf8' })
+  const served = files.filter((one) => one.endsWith('route.ts')).map((one) => `/api/${dirname(one)}`)
+  expect(served.filter((one) => !APART.includes(one)).sort()).toEqual(ROUTES.map(({ path }) => path).sort())
+  for (const one of APART) expect(served).toContain(one)
 })
 
 describe('answers are as it says', () => {
@@ -88,6 +106,21 @@ describe('answers are as it says', () => {
     const answer = answerOf(askAt, `${s([...DEMO.codes])}&time=-100,-5,0,40`)
     expect(answer.scenarios[0].notes.length).toBeGreaterThan(0)
     expect(complaints('Epochs', answer)).toBe('')
+  })
+  test('epochs with error bounds', () => {
+    expect(complaints('Epochs', answerOf(askAt, `${s(['h0:70'])}&z=1&bounds=1`))).toBe('')
+  })
+  test.each(['', 'at=0.5&until=2', 'at=x&line=0', 'epoch=age&at=30&units=h', 'read=none'])('ruler: %s', (keys) => {
+    const answer = answerOf(askRuler, `${s([...DEMO.codes])}&${keys}`)
+    expect(complaints('Ruler', answer)).toBe('')
+    expect(complaints('Ruler', { ...answer, complaints: { epoch: '' } })).not.toBe('')
+  })
+  test('table of the ruler', () => {
+    const ask = (pairs: URLSearchParams) => askRulerTable(pairs, HOME)
+    const { pieces } = answerOf(ask, `${s([...DEMO.codes])}&at=1&until=-0.5&format=json`)
+    const answer = JSON.parse([...pieces()].join(''))
+    expect(answer.scenarios).toHaveLength(DEMO.codes.length)
+    expect(complaints('RulerTable', answer)).toBe('')
   })
   test('words', () => {
     expect(
