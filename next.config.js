@@ -9,6 +9,10 @@ const config = {
   // They read files beside their own, and one is no JavaScript: not to be bundled.
   serverExternalPackages: ['@resvg/resvg-js', 'fontkit', 'pdfkit'],
   images: { unoptimized: true },
+  // By its ending it would be sent as a film.
+  headers: async () => [
+    { source: '/longhence.d.ts', headers: [{ key: 'Content-Type', value: 'text/plain; charset=utf-8' }] },
+  ],
 }
 
 export default config

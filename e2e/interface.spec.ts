@@ -65,6 +65,12 @@ test('the document is served', async ({ request }) => {
   expect((await request.get('/api/openapi.json?s=h0:70')).status()).toBe(400)
 })
 
+test('and its types, as text', async ({ request }) => {
+  const response = await request.get('/longhence.d.ts')
+  expect(response.headers()['content-type']).toBe('text/plain; charset=utf-8')
+  expect(await response.text()).toContain('export interface Routes')
+})
+
 test.describe('the batch', () => {
   const post = (data: string | Buffer, headers: Record<string, string> = LINES) => ({ data, headers })
 

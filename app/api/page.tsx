@@ -29,7 +29,7 @@ export default function Page() {
           Every answer is a plain GET, but for the batch; no key is needed, and pages of any site may ask. Numbers are
           full doubles with their units beside them. What is refused comes back as a problem document (RFC 9457) that
           names the parameter, what was given and what is allowed. The same as a document for programs:{' '}
-          <a href="/api/openapi.json">OpenAPI 3.1</a>.
+          <a href="/api/openapi.json">OpenAPI 3.1</a>, and as <a href="/longhence.d.ts">TypeScript declarations</a>.
         </p>
         <nav aria-label="Routes">
           <ul className="routes">

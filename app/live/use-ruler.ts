@@ -2,6 +2,7 @@
 import { useQuery } from '@tanstack/react-query'
 import type { RulerView } from '../../lib/answers/ruler-view'
 import { RULER_KEYS } from '../../lib/words/place'
+import type { Routes } from '../../public/longhence'
 import type { Address } from './address'
 
 function askedOf(search: string): string {
@@ -9,6 +10,8 @@ function askedOf(search: string): string {
   const keys: readonly string[] = ['s', ...RULER_KEYS]
   return new URLSearchParams([...query].filter(([key]) => keys.includes(key))).toString()
 }
+
+type Answer = Routes['/api/ruler']['answers']['application/json']
 
 export interface LiveReadings {
   readonly view: RulerView
@@ -18,9 +21,9 @@ export interface LiveReadings {
 
 export function useRuler(address: Address, initial: RulerView): LiveReadings {
   const asked = askedOf(address.search)
-  const { data, isFetching, isError } = useQuery({
+  const { data, isFetching, isError } = useQuery<RulerView>({
     queryKey: ['ruler', asked],
-    queryFn: async ({ signal }): Promise<RulerView> => {
+    queryFn: async ({ signal }): Promise<Answer> => {
       const response = await fetch(`/api/ruler?${asked}`, { signal })
       if (!response.ok) throw new Error(`The server answered with ${response.status}.`)
       return response.json()

@@ -1,5 +1,6 @@
 import { useEffect, useState } from 'react'
 import type { Words } from '../../lib/answers/words'
+import type { Routes } from '../../public/longhence'
 import { TakeAwayWords } from './take-away-words'
 
 type State = { readonly words: Words } | { readonly trouble: string } | null
@@ -19,7 +20,9 @@ export default function Fetched({ query }: { readonly query: string }) {
   return 'words' in state ? <TakeAwayWords words={state.words} level={3} /> : <p role="alert">{state.trouble}</p>
 }
 
-async function fetchWords(query: string, signal: AbortSignal): Promise<Words> {
+type Answer = Routes['/api/words']['answers']['application/json']
+
+async function fetchWords(query: string, signal: AbortSignal): Promise<Answer> {
   const response = await fetch(`/api/words?${query}`, { signal })
   if (!response.ok) throw new Error(`The server answered with ${response.status}.`)
   return response.json()
