@@ -1,5 +1,7 @@
 /** Where a universe with a scalar field goes, by theorems on the potential where they hold, else by what the integration shows. */
+import type { Budget } from '../../scenario/budget'
 import type { Arm } from '../arm'
+import type { Beginning } from '../origin'
 import type { End, EndKind } from '../outcome'
 import { finalExponent, type Outlook } from './ahead'
 import type { Field } from './motion'
@@ -67,28 +69,35 @@ function cosineEnd(curvature: number, outlook: Outlook): readonly [EndKind, stri
   return ['decelerating', `The field ${swings} about the minimum V = 0 and thins out like dust.`, true]
 }
 
-/** The expansion stops at `future`'s end and turns into contraction. */
-export function crunchAfter(future: Arm, rest: number, turns: number): End {
-  const times = turns === 1 ? '' : ` H changes its sign ${turns} times before the end.`
-  const scale = turnScale(future)
-  const because = `Followed by integration: H vanishes at a = ${scale.toPrecision(4)}, and the contraction is driven by the motion of the field down to a = 0.${times}`
-  return crunch(future, scale, rest, because)
-}
+/** The expansion stops at N = `turn`, the end of `future`, and turns into contraction. */
+export const crunchAfter = (future: Arm, turn: number, rest: number, turns: number): End =>
+  crunch(future, turn, rest, crunchBecause(turn, turns))
 
 /** The same, where the field swings as dust on the average. */
-export function averagedCrunch(future: Arm, rest: number): End {
-  const scale = turnScale(future)
-  const because = `The field swings too often to be followed and thins out like dust on the average: H vanishes about a = ${scale.toPrecision(4)}, and the contraction takes about as long as the expansion.`
-  return crunch(future, scale, rest, because)
+export const averagedCrunch = (future: Arm, turn: number, rest: number): End =>
+  crunch(future, turn, rest, averagedBecause(turn))
+
+export function crunchBecause(turn: number, turns: number): string {
+  const times = turns === 1 ? '' : ` H changes its sign ${turns} times before the end.`
+  return `Followed by integration: H vanishes at a = ${sizeAt(turn)}, and the contraction is driven by the motion of the field down to a = 0.${times}`
 }
 
-const turnScale = ({ end }: Arm): number => Math.exp(end.kind === 'root' ? end.N : 0)
+export const averagedBecause = (turn: number): string =>
+  `The field swings too often to be followed and thins out like dust on the average: H vanishes about a = ${sizeAt(turn)}, and the contraction takes about as long as the expansion.`
 
-const crunch = (future: Arm, scale: number, rest: number, because: string): End => ({
+const sizeAt = (N: number): string => Math.exp(N).toPrecision(4)
+
+const crunch = (future: Arm, turn: number, rest: number, because: string): End => ({
   kind: 'crunch',
   time: future.time.total + rest,
   scale: 0,
-  turnaround: { time: future.time.total, scale },
+  turnaround: { time: future.time.total, scale: Math.exp(turn) },
   proven: false,
   because,
 })
+
+/** Only where every density is positive E² has no root on the way back whatever the digits. */
+export function fieldOrigin<T extends Beginning>({ curvature }: Budget, origin: T): T {
+  if (curvature >= 0) return origin
+  return { ...origin, proven: false, because: `${origin.because} This is seen by integration, not proven.` }
+}

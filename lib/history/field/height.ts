@@ -32,6 +32,11 @@ export function fieldToday(search: Search): Field {
   return fieldOf(search, polished(search, bracketOf(search)))
 }
 
+/** Throws the problem where no height will do: a part of the search, for those who need no height. */
+export function requireHeight(search: Search): void {
+  if (search.potential.slope(search.potential.start) !== 0) bracketOf(search)
+}
+
 /** Two heights between which Ω_DE passes its value, at coarse accuracy. */
 function bracketOf(search: Search): readonly [Shot, Shot] {
   const top = highest(search)
@@ -128,7 +133,7 @@ function polished(search: Search, [one, other]: readonly [Shot, Shot]): number {
 
 function narrowed(search: Search, one: Shot, other: Shot): readonly [Shot, Shot] {
   let [a, b] = [one, other]
-  let [fa, fb] = [a.excess ?? 0, b.excess ?? 0]
+  let [fa, fb] = [excessOf(a), excessOf(b)]
   for (let i = 0; i < 60 && Math.abs(a.y - b.y) > 1e-4 && fa !== fb; i++) {
     const y = b.y - (fb * (b.y - a.y)) / (fb - fa)
     const c = shoot(search, y, COARSE)
