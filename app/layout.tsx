@@ -18,7 +18,8 @@ import type { ReactNode } from 'react'
 
 const sans = localFont({
   src: [
-    { path: './fonts/longhence-sans.woff2', style: 'normal', weight: '400 700' },
+    { path: './fonts/longhence-sans-regular.woff2', style: 'normal', weight: '400' },
+    { path: './fonts/longhence-sans-semibold.woff2', style: 'normal', weight: '600' },
     { path: './fonts/longhence-sans-italic.woff2', style: 'italic', weight: '400' },
   ],
   variable: '--sans',

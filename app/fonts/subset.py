@@ -1,16 +1,13 @@
-"""Makes the two fonts of the pages, and the three of figures as files, from the npm package `source-sans` (Source Sans 3 by Adobe, SIL Open Font License 1.1).
+"""Makes the three fonts of the pages, and the three of figures as files, from the npm package `source-sans` (Source Sans 3 by Adobe, SIL Open Font License 1.1).
 
-Only Latin and Greek letters, the signs of formulas, and the weights 400 to 700 are kept, which makes a fifth of the size.
-The licence reserves the name "Source" for unchanged fonts, so the results are called Longhence Sans; their licence stands in NOTICE.
-Run from the top of the project with fonttools and brotli installed: python3 app/fonts/subset.py
+Only Latin and Greek letters and the signs of formulas are kept, which makes a fifth of the size. Single weights, for one browser refuses
+the variations of the variable font. The licence reserves the name "Source" for unchanged fonts, so the results are called Longhence Sans;
+their licence stands in NOTICE. Run from the top of the project with fonttools and brotli installed: python3 app/fonts/subset.py
 """
-from io import BytesIO
-
 from fontTools import subset
 from fontTools.ttLib import TTFont
-from fontTools.varLib import instancer
 
-PACKAGE = 'node_modules/source-sans/WOFF2/VF/'
+PACKAGE = 'node_modules/source-sans/TTF/'
 
 
 def characters(*ranges):
@@ -25,19 +22,6 @@ ITALIC = characters((0x20, 0x7E), (0xA0, 0xFF), *GREEK) | {ord(sign) for sign in
 FEATURES = 'kern mark mkmk ccmp locl tnum lnum pnum sups subs frac case liga'.split()
 
 
-def fix_weight(font, weight):
-    font = instancer.instantiateVariableFont(font, {'wght': weight})
-    if 'gvar' in font:
-        for glyph in font.getGlyphOrder():
-            if glyph not in font['gvar'].variations:
-                font['gvar'].variations[glyph] = []
-    plain = BytesIO()
-    font.flavor = None
-    font.save(plain)
-    plain.seek(0)
-    return TTFont(plain)
-
-
 def rename(font):
     for record in font['name'].names:
         if record.nameID != 0:
@@ -49,37 +33,23 @@ def rename(font):
             record.string = text
 
 
-def make(source, target, codes, weight):
-    font = fix_weight(TTFont(PACKAGE + source), weight)
+def make(source, target, codes, features, web):
+    font = TTFont(PACKAGE + source)
     options = subset.Options()
-    options.layout_features = FEATURES
-    options.notdef_outline = True
-    subsetter = subset.Subsetter(options)
-    subsetter.populate(unicodes=codes)
-    subsetter.subset(font)
-    rename(font)
-    font.flavor = 'woff2'
-    font.save(target)
-
-
-make('SourceSans3VF-Upright.ttf.woff2', 'app/fonts/longhence-sans.woff2', UPRIGHT, (400, 700))
-make('SourceSans3VF-Italic.ttf.woff2', 'app/fonts/longhence-sans-italic.woff2', ITALIC, 400)
-
-
-# Figures as files need single weights without compression, and no features but those that every program applies by itself.
-def make_plain(source, target, codes):
-    font = TTFont('node_modules/source-sans/TTF/' + source)
-    options = subset.Options()
-    options.layout_features = ['kern', 'mark', 'mkmk', 'ccmp']
+    options.layout_features = features
     options.notdef_outline = True
     options.hinting = False
     subsetter = subset.Subsetter(options)
     subsetter.populate(unicodes=codes)
     subsetter.subset(font)
     rename(font)
-    font.save(target)
+    font.flavor = 'woff2' if web else None
+    font.save(target + ('.woff2' if web else '.ttf'))
 
 
-make_plain('SourceSans3-Regular.ttf', 'app/fonts/longhence-sans-regular.ttf', UPRIGHT)
-make_plain('SourceSans3-Semibold.ttf', 'app/fonts/longhence-sans-semibold.ttf', UPRIGHT)
-make_plain('SourceSans3-It.ttf', 'app/fonts/longhence-sans-italic.ttf', ITALIC)
+# Figures as files are without compression, and with no features but those that every program applies by itself.
+BARE = ['kern', 'mark', 'mkmk', 'ccmp']
+
+for style, name, codes in [('Regular', 'regular', UPRIGHT), ('Semibold', 'semibold', UPRIGHT), ('It', 'italic', ITALIC)]:
+    for features, web in [(FEATURES, True), (BARE, False)]:
+        make(f'SourceSans3-{style}.ttf', f'app/fonts/longhence-sans-{name}', codes, features, web)
