@@ -27,7 +27,7 @@ const PAGES = {
 const RULES = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-practice']
 
 async function faults(page: Page): Promise<readonly string[]> {
-  const axe = new AxeBuilder({ page }).withTags(RULES).options({ resultTypes: ['violations'] })
+  const axe = new AxeBuilder({ page }).options({ resultTypes: ['violations'] }).withTags(RULES)
   const { violations } = await axe.analyze()
   return violations.flatMap(({ id, nodes }) =>
     nodes.map(({ target, failureSummary }) => `${id}: ${target} ${failureSummary}`),
