@@ -10,11 +10,12 @@ export interface Bracket {
  * Intervals in [−1, 1] that hold one sign change each. On an interval of width w the series lies within w²/8 of its chord, and its
  * slope within w/2 of that of the chord, times the largest second derivative, Σ |c_j| j² (j² − 1)/3 (Trefethen, Approximation Theory
  * and Approximation Practice, 2013, ch. 3: T_j″(1) is the largest). Halved until that decides, or the series leaves its chord by less
- * than the `noise` of its values.
+ * than the `noise` of its values. A series that is not finite decides nothing: the whole interval stands for it.
  */
 export function signChanges(series: Series, noise: number): readonly Bracket[] {
   let bend = 0
   for (let j = 2; j < series.length; j++) bend += (Math.abs(series[j]) * j * j * (j * j - 1)) / 3
+  if (!Number.isFinite(bend)) return [{ from: -1, to: 1 }]
   const found: Bracket[] = []
   const search = (from: number, to: number, left: number, right: number): void => {
     const width = to - from

@@ -42,3 +42,8 @@ test('every zero of a polynomial with well separated ones', () => {
     .map((list) => list.map((one) => one / 100 + 0.00123))
   fc.assert(fc.property(separated, holds))
 })
+
+test('a series that is not finite decides nothing', () => {
+  const series = new Float64Array(NODE_COUNT).fill(Number.NaN)
+  expect(signChanges(series, NOISE)).toEqual([{ from: -1, to: 1 }])
+})
