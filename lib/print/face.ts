@@ -1,6 +1,7 @@
 /** The typeface as drawers of files need it: three faces, of each the outlines and advances of a run of text. */
 
 export interface Glyph {
+  readonly id: number
   readonly path: { readonly commands: readonly { readonly command: string; readonly args: readonly number[] }[] }
 }
 

@@ -25,6 +25,8 @@ export interface Origin {
 /** The drawing in its own units, `scale` points each. */
 export interface Sheet {
   readonly node: SvgNode
+  /** Colour of what lies below everything. */
+  readonly ground: string
   readonly width: number
   readonly height: number
   readonly scale: number
@@ -57,7 +59,7 @@ export function sheetOf(picture: Picture, size: Size, palette: Palette, { headin
     svg('g', { transform: `translate(${px(margin)} ${px(top)})` }, ...drawing.children),
     text(foot, { x: margin, y: height - 0.75 * margin, size: FOOT_SIZE, width: inner }, 'foot'),
   )
-  return { node: styled(node, palette), width, height, scale }
+  return { node: styled(node, palette), ground: palette('ground'), width, height, scale }
 }
 
 interface Room {

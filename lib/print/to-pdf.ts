@@ -2,9 +2,10 @@
 import PDFDocument from 'pdfkit'
 import type { Attributes, SvgNode } from '../figures/svg'
 import { FACE_KEYS, type FaceKey, type Faces } from './face'
+import { outlineOf } from './outline'
 import { type Run, runsOfText } from './runs'
 import type { Sheet } from './sheet'
-import { type About, outlineOf } from './to-svg'
+import type { About } from './to-svg'
 
 export interface PdfMeans {
   readonly faces: Faces
