@@ -1384,7 +1384,14 @@ export interface Neighbourhoods {
       | 'static'
       | 'singular'
       | 'oscillating'
+    /**
+     * The nearest that growing steps find from the value given; two boundaries between the same two steps are missed
+     */
     neighbours: Neighbour[]
+    /**
+     * Of a scalar field: beyond these there is no solution
+     */
+    edges: Edge[]
     leftOut: {
       parameter: string
       because: string
@@ -1402,11 +1409,15 @@ export interface Neighbour {
   index: number | null
   symbol: string
   /**
-   * Where the kind changes, to 2e-10 of itself
+   * Where the kind changes
    */
   value: number
   /**
-   * The same less the value given; 0 where any change will do
+   * The boundary lies no farther from the value; about 2e-10 of it where no integration is needed
+   */
+  accuracy: number
+  /**
+   * The same less the value given; 0 where any change will do, within the accuracy
    */
   change: number
   direction: 'up' | 'down'
@@ -1439,7 +1450,39 @@ export interface Neighbour {
     to: 'big-bang' | 'bounce' | 'eternal' | 'static' | 'oscillating' | 'singular'
   } | null
   /**
+   * False where a kind on either side is seen by integration, not proven
+   */
+  certain: boolean
+  /**
    * Why it begins or ends so beyond the boundary
+   */
+  because: string
+}
+export interface Edge {
+  /**
+   * Key of the scenario code
+   */
+  parameter: string
+  /**
+   * Place in a list of numbers, counted from 0
+   */
+  index: number | null
+  symbol: string
+  /**
+   * Up to where there are solutions
+   */
+  value: number
+  /**
+   * The boundary lies no farther from the value; about 2e-10 of it where no integration is needed
+   */
+  accuracy: number
+  /**
+   * The same less the value given
+   */
+  change: number
+  direction: 'up' | 'down'
+  /**
+   * Why there is none beyond, such as the largest density that the field can reach
    */
   because: string
 }

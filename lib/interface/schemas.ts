@@ -92,6 +92,12 @@ const changeBetween = (kinds: readonly string[]): Schema => ({
 
 const index: Schema = { type: 'integer', minimum: 0, description: 'The line of the request, counted from 0' }
 
+const direction: Schema = { enum: ['up', 'down'] }
+const accuracy: Schema = {
+  ...number,
+  description: 'The boundary lies no farther from the value; about 2e-10 of it where no integration is needed',
+}
+
 /** Of the columns, and of those of their error bounds. */
 const COLUMN_NAMES = COLUMNS.flatMap(({ key }) => [key, `${key}Error`])
 
@@ -113,7 +119,12 @@ export const SCHEMAS: Readonly<Record<string, Schema>> = {
       closes: { enum: ['curvature', 'dark'], description: 'The density that closes the budget' },
       origin: { enum: Object.keys(ORIGINS) },
       end: { enum: ENDS },
-      neighbours: listOf(refTo('Neighbour')),
+      neighbours: {
+        ...listOf(refTo('Neighbour')),
+        description:
+          'The nearest that growing steps find from the value given; two boundaries between the same two steps are missed',
+      },
+      edges: { ...listOf(refTo('Edge')), description: 'Of a scalar field: beyond these there is no solution' },
       leftOut: listOf(closed({ parameter: text, because: text })),
     }),
   ),
@@ -121,12 +132,27 @@ export const SCHEMAS: Readonly<Record<string, Schema>> = {
     parameter: { ...text, description: 'Key of the scenario code' },
     index: { type: ['integer', 'null'], description: 'Place in a list of numbers, counted from 0' },
     symbol: text,
-    value: { ...number, description: 'Where the kind changes, to 2e-10 of itself' },
-    change: { ...number, description: 'The same less the value given; 0 where any change will do' },
-    direction: { enum: ['up', 'down'] },
+    value: { ...number, description: 'Where the kind changes' },
+    accuracy,
+    change: {
+      ...number,
+      description: 'The same less the value given; 0 where any change will do, within the accuracy',
+    },
+    direction,
     end: changeBetween(ENDS),
     origin: changeBetween(Object.keys(ORIGINS)),
+    certain: { type: 'boolean', description: 'False where a kind on either side is seen by integration, not proven' },
     because: { ...text, description: 'Why it begins or ends so beyond the boundary' },
+  }),
+  Edge: closed({
+    parameter: { ...text, description: 'Key of the scenario code' },
+    index: { type: ['integer', 'null'], description: 'Place in a list of numbers, counted from 0' },
+    symbol: text,
+    value: { ...number, description: 'Up to where there are solutions' },
+    accuracy,
+    change: { ...number, description: 'The same less the value given' },
+    direction,
+    because: { ...text, description: 'Why there is none beyond, such as the largest density that the field can reach' },
   }),
   Note: closed({ row: { type: 'integer' }, column: { type: ['string', 'null'] }, because: text }),
   Epochs: scenarios(closed({ code: text, columns: listOf(refTo('Column')), rows, notes: listOf(refTo('Note')) })),

@@ -22,6 +22,8 @@ export interface Bracket {
 /** Where it changes, and what to. */
 export interface Boundary {
   readonly value: number
+  /** It lies no farther from `value`. */
+  readonly accuracy: number
   readonly beyond: Kinds
 }
 
@@ -76,13 +78,19 @@ export function boundaryIn(
     if (there[aspect].kind === today[aspect].kind) near = middle
     else [far, kinds] = [middle, there]
   }
-  const value = shortest(Math.min(near, far), Math.max(near, far))
+  const place = placeIn(near, far)
   // A little farther on, since a kind of its own may belong to the boundary alone.
   const clear = far + way * 4 * size()
   const beyond = clear >= one.min && clear <= one.max ? classified(one.with(clear), purse) : null
   const other =
     beyond && beyond[aspect].kind !== today[aspect].kind ? beyond : (kinds ?? classified(one.with(far), purse))
-  return other && { value, beyond: other }
+  return other && { ...place, beyond: other }
+}
+
+/** The shortest number between two, and how far the farther of them is. */
+export function placeIn(near: number, far: number): { readonly value: number; readonly accuracy: number } {
+  const value = shortest(Math.min(near, far), Math.max(near, far))
+  return { value, accuracy: Math.max(Math.abs(value - near), Math.abs(value - far)) }
 }
 
 /** The decimal of fewest digits between two numbers. */

@@ -11,7 +11,13 @@ export function unsolvable(message: string, parameter = 'dark'): Unsolvable {
 }
 
 export const overBudget = (message: string): Unsolvable =>
-  unsolvable(`${message} This scenario is over its budget of computation.`, 'eos')
+  unsolvable(`${message} This scenario is over its budget of computation.`, COSTS)
+
+/** What costs too much is the field. */
+const COSTS = 'eos'
+
+/** Whether there might be a solution, for all that is known. */
+export const isOverBudget = ({ parameter }: Unsolvable): boolean => parameter === COSTS
 
 export const isUnsolvable = (error: unknown): error is Unsolvable =>
   error instanceof Error && error.name === 'Unsolvable'
