@@ -12,7 +12,7 @@ export function powerLaw(w: number): Law {
   const law = smoothLaw({
     logDensity: n === 0 ? () => 0 : (N) => -n * N,
     preciseLogDensity: (N) => times(precise, [N, 0]),
-    logChange: n === 0 ? () => 0 : (_, d) => -n * d,
+    logChange: (_, d) => -n * d,
     w: () => w,
     wSlope: () => 0,
     exponentRange: () => range,

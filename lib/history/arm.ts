@@ -134,7 +134,7 @@ function sumsOf(panels: readonly Panel[], clock: Clock, [beyond, beyondError]: r
   panels.forEach((one, i) => {
     errorFromToday[i] = (i > 0 ? errorFromToday[i - 1] : 0) + one[clock].error
   })
-  errorFromToday[panels.length] = (errorFromToday[panels.length - 1] ?? 0) + beyondError
+  errorFromToday[panels.length] = errorFromToday[panels.length - 1] + beyondError
   for (let i = panels.length - 1; i >= 0; i--) {
     toEnd[i] = left
     left += panels[i][clock].total

@@ -45,6 +45,7 @@ function afterTurning(model: Model, size: string | null, home: Search): readonly
           ? FAR
           : 'E² vanishes at a larger and at a smaller scale factor: expansion and contraction follow each other for ever.',
       ]
+    /* v8 ignore next -- only numbers tuned to the last digit have a double root behind today and a simple one ahead */
     case 'double':
       return ['static', `${turns} The contraction comes to rest where E² and its slope vanish together.`]
     case 'singular':
@@ -89,7 +90,8 @@ function scaleAt(N: number): number | null {
 
 /** What happens where the law of dark energy ends. */
 export function singularity(model: Model, direction: 1 | -1): string {
-  const diverges = (logarithmicIn(model, direction)?.power ?? 0) < 0
+  const law = logarithmicIn(model, direction)
+  const diverges = law !== null && law.power < 0
   return diverges
     ? 'The density of dark energy diverges at this scale factor, and E² with it.'
     : 'Dark energy is used up at this scale factor while its pressure, and with it ä, diverges.'

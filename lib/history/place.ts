@@ -5,7 +5,7 @@ import { gaussLegendre } from '../numerics/gauss-legendre'
 import { brent } from '../numerics/roots'
 import type { Arm } from './arm'
 import { within } from './panels'
-import { type Clock, elapsedIn, remainingIn } from './tail'
+import { type Clock, elapsedIn, remainingIn, type Tail } from './tail'
 import { FARTHEST } from './turning'
 
 /** A place on an arm: s is the variable of its panel's zone, or the distance into the tail beyond the last panel. */
@@ -75,10 +75,10 @@ export function placeElapsed(arm: Arm, clock: Clock, value: number): Place | nul
   const sums = arm[clock]
   if (!(value <= sums.total)) return null
   const holding = indexBelow(sums.fromToday, value)
-  const ends = arm.tail === null && arm.end.kind !== 'double'
+  const ends = arm.tail === null && Number.isFinite(sums.total)
   const panel = ends ? Math.min(holding, arm.panels.length - 1) : holding
   if (panel === arm.panels.length) {
-    return placeInTail(arm, (D) => elapsedBeyond(arm, clock, D) - (value - sums.fromToday[panel]))
+    return placeInTail(arm, clock, (tail, D) => elapsedIn(tail, D) - (value - sums.fromToday[panel]))
   }
   if (panel === 0) {
     const near = variableNear(arm)
@@ -96,13 +96,10 @@ export function placeRemaining(arm: Arm, clock: Clock, value: number): Place | n
   const sums = arm[clock]
   if (!(value >= 0 && value <= sums.total) || !Number.isFinite(sums.total)) return null
   let panel = arm.panels.length - 1
-  if (value < sums.toEnd[panel])
-    return placeInTail(arm, (D) => (arm.tail ? value - remainingIn(arm.tail[clock], D) : 0))
+  if (value < sums.toEnd[panel]) return placeInTail(arm, clock, (tail, D) => value - remainingIn(tail, D))
   while (panel > 0 && sums.toEnd[panel - 1] <= value) panel--
   return placeInPanel(arm, panel, clock, arm.panels[panel][clock].total - (value - sums.toEnd[panel]))
 }
-
-const elapsedBeyond = (arm: Arm, clock: Clock, D: number): number => (arm.tail ? elapsedIn(arm.tail[clock], D) : 0)
 
 const placeOf = (arm: Arm, panel: number, s: number): Place => ({
   arm,
@@ -119,11 +116,13 @@ function placeInPanel(arm: Arm, panel: number, clock: Clock, value: number): Pla
 }
 
 /** Beyond the last panel; at a static state for ever where the arm leads there. */
-function placeInTail(arm: Arm, f: (D: number) => number): Place | null {
+function placeInTail(arm: Arm, clock: Clock, along: (tail: Tail[Clock], D: number) => number): Place | null {
   const panel = arm.panels.length
   if (arm.end.kind === 'double') return placeOf(arm, panel - 1, arm.panels[panel - 1].to)
   const farthest = FARTHEST - arm.edges[panel]
   if (arm.tail === null) return null
+  const integral = arm.tail[clock]
+  const f = (D: number) => along(integral, D)
   // By doubling, since far out the terms of a tail leave the doubles and their sum is no number.
   let reach = Math.min(1, farthest)
   while (f(reach) < 0 && reach < farthest) reach = Math.min(2 * reach, farthest)

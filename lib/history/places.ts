@@ -86,8 +86,8 @@ export function expansionsAt(out: Float64Array, places: Places): void {
   const { arm, N, inverseScale, s } = places
   forPanels(places, (index, from, to) => {
     const zone = index < arm.panels.length ? arm.panels[index].zone : null
-    if (zone?.plain || (zone === null && arm.tail === null)) arm.model.expansionsInto(out, N, inverseScale, from, to)
-    else
-      for (let i = from; i < to; i++) out[i] = zone ? zone.expansion(s[i]) : (arm.tail?.expansion(s[i]) ?? Number.NaN)
+    const form = zone ?? arm.tail
+    if (zone?.plain || form === null) arm.model.expansionsInto(out, N, inverseScale, from, to)
+    else for (let i = from; i < to; i++) out[i] = form.expansion(s[i])
   })
 }

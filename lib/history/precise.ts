@@ -40,15 +40,16 @@ interface Part {
   readonly error: number
 }
 
-function darkEnergy({ budget, law, acting }: Model, N: number, x: Twofold): Part {
+function darkEnergy({ budget, law, components, acting }: Model, N: number, x: Twofold): Part {
   const { dark, closes, closingRemainder } = budget
-  if (dark === 0) return { part: [0, 0], error: 0 }
+  const own = components.find((one) => one.key === 'dark')
+  if (!own) return { part: [0, 0], error: 0 }
   const omega: Twofold = [dark, closes === 'dark' ? closingRemainder : 0]
-  const own = acting.find((one) => one.key === 'dark')
-  const merged = !own && law.exponent !== undefined
-  if (merged) return { part: times(omega, power(x, law.exponent)), error: Math.abs(dark) * TWOFOLD_EPSILON * ROUNDINGS }
+  // Counted as radiation, matter or curvature.
+  if (law.exponent !== undefined && !acting.includes(own))
+    return { part: times(omega, power(x, law.exponent)), error: Math.abs(dark) * TWOFOLD_EPSILON * ROUNDINGS }
   const log = law.preciseLogDensity?.(N)
-  if (!log) return own ? inDoubles(own, N) : { part: [Number.NaN, 0], error: Number.POSITIVE_INFINITY }
+  if (!log) return inDoubles(own, N)
   const part = times(omega, exponential(log))
   const sizes = Math.abs(log[0]) + (law.roughness?.(N) ?? 0)
   return { part, error: Math.abs(part[0]) * TWOFOLD_EPSILON * (ROUNDINGS + 8 * sizes) }

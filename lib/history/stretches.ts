@@ -44,10 +44,9 @@ export function stretchesOf(model: Model, direction: Direction, end: Search): re
   const edge = beginnings.find((one) => one.edge === 'edge')
   const lastBreak = Math.max(0, ...(edge ? [] : breaks))
   return cuts.slice(1).map((to, i) => {
-    const from = cuts[i] ?? 0
-    const begun = beginnings.findLast((one) => one.from <= from)
-    const zone = (begun ?? beginnings[0]).zone(from, to)
-    return { zone, kind: begun?.edge ?? (runsOut && from >= lastBreak ? 'last' : 'inner') }
+    const from = cuts[i]
+    const begun = beginnings.reduce((last, one) => (one.from <= from ? one : last))
+    return { zone: begun.zone(from, to), kind: begun.edge ?? (runsOut && from >= lastBreak ? 'last' : 'inner') }
   })
 }
 
@@ -70,17 +69,17 @@ function beginningsOf(model: Model, direction: Direction, end: Search, reach: nu
     list.push({ from: centre - half, zone, edge: null }, plain(passed))
   }
   if (law && edge < reach) {
-    const zone = (from: number, to: number) => edgeZone(model, direction, law, from, to)
+    const zone = (from: number, to: number) => edgeZone(model, direction, law, edge, from, to)
     list.push({ from: Math.max(passed, nearEdge(edge)), zone, edge: 'edge' }, plain(edge))
   }
   const least = edge < reach ? edge : 0
   if (end.kind === 'none' || reach < Math.abs(end.N)) return list
   if (law && end.kind === 'singular') {
-    const zone = (from: number, to: number) => edgeZone(model, direction, law, from, to)
+    const zone = (from: number, to: number) => edgeZone(model, direction, law, edge, from, to)
     return [...list, { from: Math.max(passed, nearEdge(reach)), zone, edge: 'final' }]
   }
   if (law && end.kind === 'root' && edge >= reach && edge - reach < AT_EDGE) {
-    const zone = (from: number) => edgeTurningZone(model, direction, law, from)
+    const zone = (from: number) => edgeTurningZone(model, direction, law, edge, from)
     return [...list, { from: Math.max(passed, nearEdge(reach)), zone, edge: null }]
   }
   const zone = (from: number, to: number) =>

@@ -82,14 +82,12 @@ export function leadingExponent(model: Model, direction: Direction): number | nu
   return winner
 }
 
-/** Whether the integral to the far end is finite, from what wins there. */
+/** Whether the integral to the far end is finite, from what wins there, where nothing outgrows every power. */
 export function converges(model: Model, direction: Direction, clock: Clock): boolean {
-  if (explodes(model, direction)) return true
   const exponent = leadingExponent(model, direction)
-  if (exponent === null) return false
   const slow = exponent === 0 ? logarithmicIn(model, direction) : null
   if (slow && clock === 'time') return slow.overTwo * slow.rate * direction > 0
-  return -direction * exponent + (clock === 'conformal' ? 2 * direction : 0) > 0
+  return exponent !== null && -direction * exponent + (clock === 'conformal' ? 2 * direction : 0) > 0
 }
 
 /** The tail from N on, or null where corrections are still too large; `anyway`, at the end of the doubles, leaves them out. */

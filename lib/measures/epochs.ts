@@ -64,7 +64,10 @@ export function accelerationChanges({ past, future }: History): readonly Crossin
   const today = acceleration(past.model, 0) > 0
   // At today's break of a law that is held the two may differ.
   const turns = today !== acceleration(future.model, 0) > 0
-  return [...back.reverse(), ...(turns ? [{ N: 0, rising: !today }] : []), ...ahead]
+  const now = turns
+    ? /* v8 ignore next -- w is the same on both sides, so only rounding can part them */ [{ N: 0, rising: !today }]
+    : []
+  return [...back.reverse(), ...now, ...ahead]
 }
 
 /** In the order outwards from today. */
@@ -106,6 +109,8 @@ function changesOver(arm: Arm, { zone, from, to, time }: Panel): readonly Bracke
       const N = arm.direction * zone.distanceAt((from + to) / 2 + half * NODES[k])
       samples[k] = acceleration(arm.model, N) / Math.max(1e-300, arm.model.magnitude(N))
     }
+    // Where densities leave the doubles the ends of the panel decide.
+    if (!samples.every(Number.isFinite)) return [{ from: -1, to: 1 }]
     coefficientsInto(out, samples)
     return signChanges(out, NOISE)
   }

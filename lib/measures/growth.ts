@@ -51,7 +51,9 @@ export function growthRateAt(history: History, event: Event): Outcome {
   const state = stateAt(growth, event)
   if (state === null) return OUT_OF_RANGE
   const value = (state.flow * Math.exp(-2 * N)) / (Math.sqrt(e2) * state.contrast)
-  return Number.isFinite(value) ? bounded(value, value * (state.error + roundingOf(event.place))) : OUT_OF_RANGE
+  return Number.isFinite(value)
+    ? bounded(value, value * (state.error + roundingOf(event.place)))
+    : /* v8 ignore next -- a guard: E² is above zero here */ OUT_OF_RANGE
 }
 
 function closedRate(start: Start, N: number): Outcome {
@@ -83,7 +85,8 @@ function obstacleTo({ past, origin }: History): Missing | null {
   const { coldMatter, states } = past.model.budget
   if (coldMatter === 0 && states.length === 0) return missing('there is no matter to cluster')
   if (origin.kind !== 'big-bang') return missing('growth starts from a big bang, and this expansion has none')
-  if (explodes(past.model, -1) || (leadingExponent(past.model, -1) ?? 5) > 4) {
+  const exponent = leadingExponent(past.model, -1)
+  if (explodes(past.model, -1) || exponent === null || exponent > 4) {
     return missing('something stiffer than radiation rules early, and all solutions are regular there')
   }
   return null

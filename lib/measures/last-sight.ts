@@ -11,6 +11,7 @@ import { eventHorizon } from './sight'
  */
 export function lastSight(history: History, chi: number): Found {
   const now = eventAtScale(history, 0, 'expanding')
+  /* v8 ignore if -- every history has its today */
   if (!isEvent(now)) return now
   const left = eventHorizon(history, now)
   if (isMissing(left)) return left

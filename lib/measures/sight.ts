@@ -70,9 +70,16 @@ export function redshiftAt(history: History, chi: number, uncertainty: number): 
   if (!(chi + error < past.conformal.total))
     return missing('the distance reaches beyond all that light could cross since the origin of the expansion')
   const place: Place | null = placeElapsed(past, 'conformal', chi)
+  /* v8 ignore if -- χ is below the whole by more than its error, so that it lies among the panels or in a tail */
   if (place === null) return missing(OUT_OF_RANGE)
   const z = Math.expm1(-place.N)
   const found = eventAtScale(history, place.N, 'expanding')
-  const rate = isEvent(found) ? Math.sqrt(past.model.expansion(place.N, Math.exp(-place.N))) : 0
-  return Number.isFinite(rate) ? bounded(z, error * rate) : missing(OUT_OF_RANGE)
+  const rate = isEvent(found)
+    ? Math.sqrt(past.model.expansion(place.N, Math.exp(-place.N)))
+    : /* v8 ignore next -- the place was found on this arm */ 0
+  return Number.isFinite(rate)
+    ? bounded(z, error * rate)
+    : /* v8 ignore next -- so near to the origin χ differs from the whole by less than its error */ missing(
+        OUT_OF_RANGE,
+      )
 }

@@ -81,8 +81,10 @@ export function acousticAngle(history: History, scenario: Scenario): Outcome {
   const sound = soundHorizon(history, scenario, z)
   if (isMissing(sound)) return sound
   const event = eventAtScale(history, -Math.log1p(z.value), 'expanding')
+  /* v8 ignore if -- with a sound horizon the expansion began at a = 0 and passed z* */
   if (!isEvent(event)) return missing(event.because)
   const chi = comovingDistance(history, event)
+  /* v8 ignore if -- z* is above 0, so it lies in the past */
   if (typeof chi !== 'number') return chi
   const { model, conformal } = history.past
   const { curvature } = model.budget

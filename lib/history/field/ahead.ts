@@ -51,6 +51,7 @@ export function lookAhead(field: Field, today: Float64Array, purse: Purse, deep:
   let [swings, stop] = [0, null as Outlook['kind'] | null]
   let before = today[1]
   const after = (N: number, state: Float64Array, step: Step | null) => {
+    /* v8 ignore else -- a dense course has every step */
     if (step) steps.push(step)
     if (deep && isShallow(field, N, state)) stop = 'shallow'
     else if (last !== null && settledAt(field, N, state, last)) stop = 'settled'
@@ -66,7 +67,7 @@ export function lookAhead(field: Field, today: Float64Array, purse: Purse, deep:
   if (arrival === 'stuck' || stop === 'shallow') return { kind: 'shallow' }
   if (arrival === 'spent') return { kind: 'spent' }
   const end = steps[steps.length - 1].to
-  if (stop === 'settled') return { kind: 'settled', exponent: last ?? 0, steps, end }
+  if (stop === 'settled' && last !== null) return { kind: 'settled', exponent: last, steps, end }
   if (stop === 'swinging') return { kind: 'swinging', exponent: 3, steps, end: lastRest(steps) }
   return { kind: 'far', exponent: exponentAt(field, state), steps, end }
 }

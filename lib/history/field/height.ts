@@ -50,6 +50,7 @@ function bracketOf(search: Search): readonly [Shot, Shot] {
     if (pair) return pair
     if (before && mayRise(before, last, next, best)) {
       best = peakOf(search, before.y, last, next.y)
+      /* v8 ignore if -- only where Ω_DE lies between the top of a peak and the looks beside it */
       if (excessOf(best) >= 0) return [before, best]
     }
     ;[before, last] = [last, next]
@@ -70,6 +71,7 @@ function signChange(search: Search, last: Shot, next: Shot): readonly [Shot, Sho
 function mayRise(before: Shot, last: Shot, next: Shot, best: Shot): boolean {
   const [a, b, c] = [excessOf(before), excessOf(last), excessOf(next)]
   if (!(a < b && c < b) || b >= 0) return false
+  /* v8 ignore if -- only where a look beside a peak does not arrive at all */
   if (!Number.isFinite(a + c)) return true
   const [p, q] = [(b - a) / (last.y - before.y), (c - b) / (next.y - last.y)]
   const bend = (p - q) / (next.y - before.y)
@@ -108,6 +110,7 @@ function peakOf(search: Search, from: number, inner: Shot, to: number): Shot {
       best = shot
     } else if (right) high = y
     else low = y
+    /* v8 ignore if -- as in bracketOf */
     if (best.excess !== null && best.excess >= 0) break
   }
   return best
@@ -137,6 +140,7 @@ function narrowed(search: Search, one: Shot, other: Shot): readonly [Shot, Shot]
   for (let i = 0; i < 60 && Math.abs(a.y - b.y) > 1e-4 && fa !== fb; i++) {
     const y = b.y - (fb * (b.y - a.y)) / (fb - fa)
     const c = shoot(search, y, COARSE)
+    /* v8 ignore if -- both ends of the bracket arrive, and what lies between seldom does not */
     if (c.excess === null) throw tooNear()
     const fc = c.excess
     if (fc < 0 !== fb < 0) [a, fa] = [b, fb]

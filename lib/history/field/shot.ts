@@ -89,11 +89,14 @@ export function passage(field: Field, purse: Purse): { readonly steps: readonly 
   const steps: Step[] = []
   const state = Float64Array.of(field.potential.start, 0)
   const after = (_x: number, _state: Float64Array, step: Step | null) => {
+    /* v8 ignore else -- a dense course has every step */
     if (step) steps.push(step)
     return false
   }
   const arrival = run(field, state, FINAL, purse, after, true)
+  /* v8 ignore if -- the search for the height, which goes first, is the dearer one */
   if (arrival === 'spent') throw overBudget('The field swings too often before today to be followed.')
+  /* v8 ignore if -- the last shots of the search came through with the same accuracy */
   if (arrival !== 'there') throw tooNear()
   return { steps, state }
 }

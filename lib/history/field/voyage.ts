@@ -42,6 +42,7 @@ export function travelOn(field: Field, today: Float64Array, purse: Purse): Voyag
   let end: Voyage['end'] = 'spent'
   const after = (_: number, state: Float64Array, step: Step | null) => {
     project(field, state)
+    /* v8 ignore if -- a dense course has every step */
     if (!step) return false
     steps.push(step)
     turns.push(...turnsIn(step, steps.length - 1))
@@ -73,13 +74,18 @@ function turnsIn(step: Step, index: number): Turn[] {
 
 function outcomeAt(field: Field, state: Float64Array, turns: number): Voyage['end'] | null {
   const [N, H] = [state[SCALE], state[RATE]]
+  /* v8 ignore if -- guards, which no scenario has been seen to need */
   if (!Number.isFinite(N + H) || turns > MOST_TURNS) return 'spent'
   if (H > 0) return N > 690 || (turns === 0 && N > 5 && accelerates(field, state)) ? 'expanding' : null
   field.background.into(scratch, N)
   const kinetic = state[TIMED_SPEED] ** 2 / 6
   const rest = scratch[2] + Math.abs(field.height * field.potential.value(state[TIMED_PHI]))
   if (rest < SMALL * kinetic && N < -1) return 'crunch'
-  return H * H > LARGEST && kinetic > 0.99 * H * H ? (N < -1 ? 'crunch' : 'overflow') : null
+  return H * H > LARGEST && kinetic > 0.99 * H * H
+    ? N < -1
+      ? /* v8 ignore next -- there the power law has set in long before */ 'crunch'
+      : 'overflow'
+    : null
 }
 
 /** Nothing but a potential is left that goes on for ever and falls no faster than it does here: no turning point is in sight. */
