@@ -46,17 +46,22 @@ export interface Exhibit {
 }
 
 /** Every view with all that it shows, each against its first axis, the first one compared, and some of the others. */
-export function exhibitsOf({ codes }: Collection): readonly Exhibit[] {
+export function exhibitsOf({ codes }: Collection, wanted: (index: number) => boolean = () => true): readonly Exhibit[] {
   const solutions = opened(codes).solutions.map((one, slot) => ({ ...one, label: nameOf(one.scenario, slot) }))
-  const long = [PLAIN_PLACE, { ...PLAIN_PLACE, time: 'log' as const }, { ...PLAIN_PLACE, from: -14, to: 10 }]
+  const places = placesOf(solutions.length > 1).filter((_, index) => wanted(index))
+  return places.map((place) => {
+    const subject = { solutions, place }
+    return { place, chart: place.view === null ? longChart(subject) : viewChart(subject) }
+  })
+}
+
+/** The long view first. */
+function placesOf(several: boolean): readonly Place[] {
   const views = VIEWS.flatMap(({ key: view, shows }) =>
     shows.flatMap(({ key: show, by, compare }) => [
       ...by.map((axis) => ({ ...PLAIN_PLACE, view, show, by: axis })),
-      ...(solutions.length > 1 ? compare.map((how) => ({ ...PLAIN_PLACE, view, show, compare: how })) : []),
+      ...(several ? compare.map((how) => ({ ...PLAIN_PLACE, view, show, compare: how })) : []),
     ]),
   )
-  return [
-    ...long.map((place) => ({ place, chart: longChart({ solutions, place }) })),
-    ...views.map((place) => ({ place, chart: viewChart({ solutions, place }) })),
-  ]
+  return [PLAIN_PLACE, { ...PLAIN_PLACE, time: 'log' }, { ...PLAIN_PLACE, from: -14, to: 10 }, ...views]
 }

@@ -18,9 +18,17 @@ import { needs, run } from '../tools'
 
 const ask = (pairs: URLSearchParams) => askFigure(pairs, { version: '9.8.7', base: 'https://a.example' })
 const fileOf = (query: string) => answerOf(ask, query)
-const bytesOf = async (query: string) => Buffer.from(await drawn(fileOf(query)))
+const madeNow = async (query: string) => Buffer.from(await drawn(fileOf(query)))
+const made = new Map<string, Promise<Buffer>>()
+/** The same file serves several tests. */
+function bytesOf(query: string): Promise<Buffer> {
+  const bytes = made.get(query) ?? madeNow(query)
+  made.set(query, bytes)
+  return bytes
+}
 const HARD = `s=${encodeURIComponent('h0:70,as:<b>&"Ω – 宇宙 🌌')}&s=h0:70,matter:0.3,eos:constant,w:-1.2&s=h0:70,matter:0.4,dark:0.85,eos:cpl,w0:-0.6,wa:-1.6&s=h0:70,matter:0.1,dark:1.7,cmb:0&s=h0:70,matter:1,cmb:0&s=eos:field,v:linear`
-const CASES = SIZES.flatMap(({ key }) => THEME_KEYS.map((theme) => [key, theme] as const))
+/** Every size, and every theme: one has nothing to do with the other. */
+const CASES = [...SIZES.map(({ key }) => [key, THEME_KEYS[0]] as const), ['slide', THEME_KEYS[1]] as const]
 
 describe('colours', () => {
   const css = readFileSync(new URL('../../app/styles/theme.css', import.meta.url), 'utf8')
@@ -29,7 +37,11 @@ describe('colours', () => {
     expect(css).toContain(pair)
   })
   test('every class of a drawing has its look', () => {
-    for (const { chart } of COLLECTIONS.flatMap(exhibitsOf)) {
+    // The long views of every collection; of the many others each in one of them.
+    const wanted = (slot: number) => (index: number) => index < 3 || index % COLLECTIONS.length === slot
+    const exhibits = COLLECTIONS.flatMap((one, slot) => exhibitsOf(one, wanted(slot)))
+    expect(exhibits.length).toBeGreaterThan(90)
+    for (const { chart } of exhibits) {
       for (const compact of [true, false]) {
         const node = drawChart(chart, { width: 900, height: 400, type: 15, compact, id: 'a' })
         expect(plainClasses(node)).toEqual([])
@@ -49,8 +61,8 @@ describe.each(CASES)('%s on %s', (size, theme) => {
     expect(Math.min(...sizes)).toBeGreaterThanOrEqual(least)
   })
   test('the same bytes each time', async () => {
-    for (const format of size === 'card' ? ['svg', 'pdf', 'png'] : ['svg', 'pdf']) {
-      expect((await bytesOf(query(format))).equals(await bytesOf(query(format))), format).toBe(true)
+    for (const key of size === 'card' ? ['svg', 'pdf', 'png&dpi=96'] : ['svg', 'pdf']) {
+      expect((await bytesOf(query(key))).equals(await madeNow(query(key))), key).toBe(true)
     }
   })
   test('SVG: no class, no style, no letters that need a font, and well formed', async (context) => {
@@ -122,6 +134,31 @@ describe('views', () => {
     expect(words('view=distances&compare=ratio')).not.toBe(words('view=distances'))
     expect(words('from=-5&to=5')).not.toBe(words(''))
   })
+})
+
+test('a PNG holds the very pixels that were drawn', async () => {
+  const query = `${HARD}&size=card&theme=night`
+  const svg = (await bytesOf(query)).toString()
+  const shown = (href: Buffer | string, type: string) => {
+    const picture = `<image width="1200" height="630" xlink:href="data:image/${type};base64,${Buffer.from(href).toString('base64')}"/>`
+    const page = `<svg xmlns="http://www.w3.org/2000/svg" xmlns:xlink="http://www.w3.org/1999/xlink" width="1200" height="630">${picture}</svg>`
+    return new Resvg(page, { font: { loadSystemFonts: false } }).render().pixels
+  }
+  const [png, drawing] = [shown(await bytesOf(`${query}&format=png`), 'png'), shown(svg, 'svg+xml')]
+  let off = 0
+  for (let i = 0; i < png.length; i++) off += Math.abs(png[i] - drawing[i])
+  // Edges may round otherwise where a picture stands in another.
+  expect(off / (255 * png.length)).toBeLessThan(1e-4)
+})
+
+test('letters stand once in a file, and every reference has its end', async () => {
+  const text = (await bytesOf(HARD)).toString()
+  const ids = [...text.matchAll(/ id="([^"]+)"/g)].map(([, id]) => id)
+  expect(new Set(ids).size).toBe(ids.length)
+  const ends = [...text.matchAll(/(?:xlink:href="#|url\(#)([^")]+)/g)].map(([, id]) => id)
+  expect(ends.length).toBeGreaterThan(300)
+  for (const one of ends) expect(ids).toContain(one)
+  expect(text.length).toBeLessThan(60_000)
 })
 
 test('the preview card has 1200 × 630 pixels', async () => {
