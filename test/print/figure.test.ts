@@ -4,7 +4,7 @@ import { join } from 'node:path'
 import { Resvg } from '@resvg/resvg-js'
 import { describe, expect, test } from 'vitest'
 import { drawn } from '../../app/api/figure/draw'
-import { askFigure, MOST_PIXELS } from '../../lib/answers/figure'
+import { askFigure, FIGURE_FORMATS, type FigureFile, MOST_PIXELS } from '../../lib/answers/figure'
 import { COLLECTIONS, exhibitsOf } from '../../lib/answers/gallery'
 import { drawChart } from '../../lib/figures/draw-chart'
 import type { SvgNode } from '../../lib/figures/svg'
@@ -19,10 +19,23 @@ import { needs, run } from '../tools'
 const ask = (pairs: URLSearchParams) => askFigure(pairs, { version: '9.8.7', base: 'https://a.example' })
 const fileOf = (query: string) => answerOf(ask, query)
 const madeNow = async (query: string) => Buffer.from(await drawn(fileOf(query)))
+const files = new Map<string, FigureFile>()
 const made = new Map<string, Promise<Buffer>>()
+
+/** Solved once for all formats. */
+function fileFor(query: string): FigureFile {
+  const pairs = new URLSearchParams(query)
+  const format = FIGURE_FORMATS.find(({ key }) => key === pairs.get('format')) ?? FIGURE_FORMATS[0]
+  const dpi = Number(pairs.get('dpi') ?? 96)
+  for (const key of ['format', 'dpi']) pairs.delete(key)
+  const file = files.get(`${pairs}`) ?? fileOf(`${pairs}`)
+  files.set(`${pairs}`, file)
+  return { ...file, format, dpi }
+}
+
 /** The same file serves several tests. */
-function bytesOf(query: string): Promise<Buffer> {
-  const bytes = made.get(query) ?? madeNow(query)
+async function bytesOf(query: string): Promise<Buffer> {
+  const bytes = made.get(query) ?? drawn(fileFor(query)).then(Buffer.from)
   made.set(query, bytes)
   return bytes
 }
@@ -55,7 +68,7 @@ describe.each(CASES)('%s on %s', (size, theme) => {
 
   test('no letter is smaller than the place allows', () => {
     const { least } = SIZES.find(({ key }) => key === size) ?? { least: 0 }
-    const { sheet } = fileOf(query('svg'))
+    const { sheet } = fileFor(query('svg'))
     const sizes = letterSizes(sheet.node).map((one) => one * sheet.scale)
     expect(sizes.length).toBeGreaterThan(10)
     expect(Math.min(...sizes)).toBeGreaterThanOrEqual(least)
@@ -85,7 +98,7 @@ describe.each(CASES)('%s on %s', (size, theme) => {
     expect(run('pdfinfo', ['a.pdf'], { 'a.pdf': pdf }).said).toMatch(/Title: +<b>&"Ω/)
   })
   test('PNG: the size in pixels, the density, the words', async () => {
-    const { sheet } = fileOf(query('png'))
+    const { sheet } = fileFor(query('png'))
     const png = await bytesOf(`${query('png')}&dpi=96`)
     const [width, height] = [png.readUInt32BE(16), png.readUInt32BE(20)]
     expect(Math.abs(width - (sheet.width * sheet.scale * 96) / 72)).toBeLessThanOrEqual(1)
@@ -125,7 +138,7 @@ describe('views', () => {
       const text = (await bytesOf(query)).toString()
       expect(text).not.toMatch(/ class=|undefined|NaN/)
       expect((await bytesOf(`${query}&format=pdf`)).length).toBeGreaterThan(10_000)
-      expect(fileOf(query).fileName).toContain(`-${view}-column.svg`)
+      expect(fileFor(query).fileName).toContain(`-${view}-column.svg`)
     },
   )
   test('the keys of the page say what is shown', () => {
@@ -162,7 +175,7 @@ test('letters stand once in a file, and every reference has its end', async () =
 })
 
 test('the preview card has 1200 × 630 pixels', async () => {
-  const png = await bytesOf('size=card&format=png')
+  const png = await madeNow('size=card&format=png')
   expect([png.readUInt32BE(16), png.readUInt32BE(20)]).toEqual([1200, 630])
 })
 
