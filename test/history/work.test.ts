@@ -11,6 +11,7 @@ import { readScenario } from '../../lib/scenario/read'
 import type { Scenario } from '../../lib/scenario/scenario'
 import { chanceOf } from '../hunt/chance'
 import { anyScenario } from '../hunt/costs'
+import { counted } from './counted'
 
 function read(code: string): Scenario {
   const reading = readScenario(code, 0)
@@ -76,34 +77,11 @@ const FIELDS = [
 /** What the purses of search and future add up to, and what panels ask of the law that the steps become. */
 const [MOST_EVALUATIONS, MOST_LOOKS] = [190_000, 200_000]
 
-/** How often the potential was asked for both its value and slope (by the equation of motion in N), and for one of them. */
-function counted(potential: Potential): {
-  readonly potential: Potential
-  readonly count: { both: number; one: number }
-} {
-  const count = { both: 0, one: 0 }
-  const wrapped: Potential = {
-    ...potential,
-    bothInto: (out, phi) => {
-      count.both++
-      potential.bothInto(out, phi)
-    },
-    value: (phi) => {
-      count.one++
-      return potential.value(phi)
-    },
-    slope: (phi) => {
-      count.one++
-      return potential.slope(phi)
-    },
-  }
-  return { potential: wrapped, count }
-}
-
 describe('fields', () => {
   const check = (code: string, scenario: Scenario) => {
     const budget = budgetOf(scenario)
-    const { potential, count } = counted(familyOf('field').potential?.(scenario.law) as Potential)
+    const count = { both: 0, one: 0 }
+    const potential = counted(familyOf('field').potential?.(scenario.law) as Potential, count)
     try {
       expect(panelsOf(fieldHistory(budget, potential, scenario.beyond === 'hold')), code).toBeLessThan(MOST_PANELS)
     } catch (error) {

@@ -15,6 +15,8 @@ const WIDEST = 0.35
 const PER_SWING = 5
 /** How far below the smallest conceivable height, in its logarithm, the largest Ω_DE is looked for. */
 const LOWEST = 15
+/** In ln(height), beyond what rounding adds to the energy. */
+const WITHIN = 1e-4
 /** Heights at which the field swings more often before today are not tried. */
 const MOST_SWINGS = 12
 /**
@@ -41,7 +43,7 @@ export function requireHeight(search: Search): void {
 function bracketOf(search: Search): readonly [Shot, Shot] {
   const top = highest(search)
   let before: Shot | null = null
-  let last: Shot = shoot(search, 0, COARSE)
+  let last: Shot = firstLook(search)
   let best = last
   while (last.y < top && last.swings < MOST_SWINGS && search.purse.left > RESERVE) {
     const next = shoot(search, Math.min(top, last.y + strideAfter(last)), COARSE)
@@ -56,6 +58,12 @@ function bracketOf(search: Search): readonly [Shot, Shot] {
     ;[before, last] = [last, next]
   }
   throw unreachable(search, best, last)
+}
+
+/** The smallest conceivable height cannot be too great; where rounding says so the field hardly moves, and a lower one is below for sure. */
+function firstLook(search: Search): Shot {
+  const look = shoot(search, 0, COARSE)
+  return excessOf(look) < 0 ? look : shoot(search, -WITHIN, COARSE)
 }
 
 /** A universe that does not arrive has less than any Ω_DE. */
