@@ -75,6 +75,7 @@ function timedModel({ budget, today }: Route, trail: TimedTrail): Model {
   const model = modelOf(budget, fieldLaw(trail, { today, outside, breaks: [], error: () => VOYAGE_ERROR }))
   const first = trail.edges[0]
   const expansion = (N: number, inverseScale: number) => {
+    /* v8 ignore if -- beyond the trail the tail of its arm is asked, not the model */
     if (N < first) return model.expansion(N, inverseScale)
     return trail.rate(N) ** 2
   }
