@@ -110,7 +110,8 @@ export class Balance {
       return Number.isNaN(plain) ? /* v8 ignore next -- only where rates leave the doubles */ 0 : plain
     const closing = this.#fall + this.#meanRise + this.#slackWith(this.#meanSizes, spread)
     const bent = (2 * h) / (closing + Math.sqrt(closing * closing + 0.5 * h * spread * spread))
-    return Math.max(plain, bent) || /* v8 ignore next -- only where rates leave the doubles */ 0
+    /* v8 ignore next -- 0 only where rates leave the doubles */
+    return Math.max(plain, bent) || 0
   }
 
   /** The slowest that h falls outwards on the next `length`: above zero, h falls on all of it. For short steps only. */

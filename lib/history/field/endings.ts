@@ -44,6 +44,7 @@ function verdict(field: Field, outlook: Outlook): readonly [EndKind, string, boo
 
 function exponentialEnd(field: Field, curvature: number): readonly [EndKind, string, boolean] {
   const square = field.potential.parameter ** 2
+  /* v8 ignore next -- an exponential potential has its final exponent */
   const n = curvature < 0 ? square : (finalExponent(field) ?? 0)
   const kind = n < 2 ? 'accelerating' : n === 2 ? 'coasting' : 'decelerating'
   const rule =
