@@ -2,6 +2,7 @@
  * Adaptive Chebyshev panels for the two integrals of a zone. A panel stands when its last two coefficients are below 2e-14 of the
  * largest; a rejected one shrinks, a good one lets the next grow. The factors are tuned for few evaluations.
  */
+
 import {
   antiderivative,
   coefficientsInto,
@@ -11,6 +12,7 @@ import {
   type Series,
   sumAtOne,
 } from '../numerics/chebyshev'
+import { overBudget } from './field/unsolvable'
 import type { Samples, Zone } from './zone'
 
 /** One integral over a panel. */
@@ -53,7 +55,7 @@ export function panelsOf(zone: Zone, enough: (panel: Panel, edge: number) => boo
   let tried = 0
   let [floor, before] = [1, Number.POSITIVE_INFINITY]
   while (from < zone.to) {
-    if (++tried > MOST_PANELS) throw new RangeError(`more than ${MOST_PANELS} panels would be needed`)
+    if (++tried > MOST_PANELS) throw overBudget(`The integrals take more than ${MOST_PANELS} panels.`)
     const to = from + width >= zone.to - width * 0.05 ? zone.to : from + width
     const trial = attempt(zone, from, to)
     floor = Math.max(floor, noiseIn(before, trial.worst))
