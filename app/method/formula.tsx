@@ -1,9 +1,13 @@
 import { createElement, type ReactNode } from 'react'
 import { formulaTree, type MathNode } from '../../lib/words/formula'
 
+/** Characters from which a formula is wider than a phone: it then scrolls, by keys too. */
+const WIDE = 60
+
 /** A formula of the lists, typeset by the browser. */
 export function Formula({ text }: { readonly text: string }) {
-  return createElement('math', { display: 'block' }, element(formulaTree(text), 0))
+  const wide = text.length > WIDE ? { tabIndex: 0, 'aria-label': text } : {}
+  return createElement('math', { display: 'block', ...wide }, element(formulaTree(text), 0))
 }
 
 function element(node: MathNode | string, key: number): ReactNode {
