@@ -224,7 +224,7 @@ function solvable(code: string): ReturnType<typeof subject> | null {
   try {
     return subject(code)
   } catch (error) {
-    if (isUnsolvable(error) || error instanceof RangeError) return null
+    if (isUnsolvable(error)) return null
     throw error
   }
 }
