@@ -7,7 +7,9 @@ import { open, slider } from './live'
 const COUNT = Number(process.env.COUNT ?? 200)
 const TOGETHER = 20
 
-const between = (min: number, max: number) => fc.double({ min, max, noNaN: true })
+/** As people type them: four decimals. */
+const between = (min: number, max: number) =>
+  fc.integer({ min: Math.ceil(min * 1e4), max: Math.floor(max * 1e4) }).map((one) => one / 1e4)
 const law = fc.oneof(
   fc.constant(''),
   between(-1.6, 0.2).map((w) => `,eos:constant,w:${w}`),
