@@ -14,7 +14,7 @@ export function endsInTime(kind: EndKind): boolean {
 }
 
 export function endClause({ end }: Ended): string {
-  const inTime = end.time === null ? 'in the infinite future' : `in ${duration(end.time)}`
+  const inTime = end.time === null ? neverOrFar({ end }) : `in ${duration(end.time)}`
   const scale = end.scale === null ? 'a size beyond all numbers' : `${size(end.scale)} times today’s size`
   const turn = turnClause({ end })
   switch (end.kind) {
@@ -40,6 +40,10 @@ export function endClause({ end }: Ended): string {
       return `${turn}goes on oscillating for ever`
   }
 }
+
+/** A turnaround that is not told lies at a size beyond all numbers. */
+const neverOrFar = ({ end: { kind, turnaround } }: Ended): string =>
+  kind === 'crunch' && turnaround === null ? 'later than can be computed' : 'in the infinite future'
 
 function turnClause({ end: { turnaround } }: Ended): string {
   if (turnaround === null) return ''

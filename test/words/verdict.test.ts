@@ -111,3 +111,8 @@ describe('what hangs on the law beyond today', () => {
     expect(verdictOf(followed, followed).aside).toMatch(/would end the same way\.$/)
   })
 })
+
+it('a crunch after a turnaround beyond all numbers is not said to be in the infinite future', () => {
+  const end = { kind: 'crunch', time: null, scale: 0, turnaround: null } as const
+  expect(text({ end })).toContain('ends in a Big Crunch later than can be computed')
+})
