@@ -5,9 +5,11 @@
  */
 
 import { JULIAN_YEAR } from '../constants'
+import type { Arm } from '../history/arm'
+import { integralOfExp } from '../history/far'
 import type { History } from '../history/history'
-import { fromToday, placeAt, toEnd } from '../history/place'
-import type { Model } from '../model'
+import { fromToday, type Place, placeAt, toEnd } from '../history/place'
+import { logExpansion, type Model } from '../model'
 import { brent } from '../numerics/roots'
 import { hubbleTimeGyr } from '../units'
 
@@ -48,7 +50,16 @@ export function unbinding(history: History, h0: number, { period }: UnboundSyste
   const place = placeAt(future, N)
   // Rounding alone must not put it behind the end.
   if (place === null) return null
-  return { time: Math.min(fromToday(place, 'time'), future.time.total), remaining: toEnd(place, 'time'), N }
+  return { time: Math.min(fromToday(place, 'time'), future.time.total), remaining: remainingFrom(future, place), N }
+}
+
+/**
+ * What is left of time. Where dark energy outgrows every power, the panels end when they add nothing to the whole time, which is too
+ * early for what is left: it is integrated on its own.
+ */
+function remainingFrom(future: Arm, place: Place): number {
+  if (future.tail !== null || future.end.kind !== 'none') return toEnd(place, 'time')
+  return integralOfExp((N) => -0.5 * logExpansion(future.model, N), place.N)
 }
 
 /** Doubling steps until the system is unbound; null where ln a grows beyond all numbers that the law can be asked for. */

@@ -103,3 +103,17 @@ test('held at w = −1 or above there is none', () => {
   const { history, scenario } = universe('matter:0.3,cmb:0,eos:cpl,w0:-0.99,wa:1,beyond:hold')
   for (const system of UNBOUND_SYSTEMS) expect(unbinding(history, scenario.h0, system)).toBe(null)
 })
+
+test('what is left where dark energy outgrows every power: ∫ √a e^(−3(a−1)/2) da = (2/3)^(3/2) e^(3/2) Γ(3/2, 3a/2) for w0 = −1, wa = 1 alone', () => {
+  const { history, scenario } = universe('matter:0,cmb:0,eos:cpl,w0:-1,wa:1')
+  for (const system of [planet, UNBOUND_SYSTEMS[3], atom]) {
+    const found = unbinding(history, scenario.h0, system)
+    const x = 1.5 * Math.exp(found?.N ?? Number.NaN)
+    // Abramowitz & Stegun 1964, 6.5.31: Γ(s, x) = e^(−x) x^s / (x + 1 − s − 1(1 − s)/(x + 3 − s − 2(2 − s)/(x + 5 − s − …)).
+    let rest = 0
+    for (let k = 60; k > 0; k--) rest = (k * (k - 1.5)) / (x + 2 * k - 0.5 - rest)
+    const gamma = (Math.exp(1.5 - x) * x ** 1.5) / (x - 0.5 - rest)
+    // e^(−x) multiplies the eps of a by x, up to some hundred.
+    expectRelative(found?.remaining ?? Number.NaN, (2 / 3) ** 1.5 * gamma, 1e-12)
+  }
+})
