@@ -90,7 +90,9 @@ function topOf({ solution, scales }: Entry, to: number): number {
   const turn = end.turnaround
   if (turn !== null && turn.time <= to) return Math.min(TURNING_TOP, turn.scale * HEADROOM)
   const times = [0.25, 0.5, 0.75, 1].map((part) => part * Math.min(to, end.time ?? to))
-  const reached = Math.max(...scales(times).map((scale) => scale ?? PLAIN_TOP), end.kind === 'rip' ? PLAIN_TOP : 0)
+  // The last of these times may be that of the end, which a history reaches or not by rounding.
+  const sizes = scales(times).map((scale) => scale ?? end.scale ?? PLAIN_TOP)
+  const reached = Math.max(...sizes, end.kind === 'rip' ? PLAIN_TOP : 0)
   return Math.min(PLAIN_TOP, reached * HEADROOM)
 }
 
