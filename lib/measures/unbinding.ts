@@ -29,9 +29,9 @@ export type UnboundSystem = (typeof UNBOUND_SYSTEMS)[number]
 const DESTRUCTIVE: readonly History['end']['kind'][] = ['rip', 'little-rip', 'singular']
 
 export interface Unbinding {
-  /** From now, and left to the end, in 1/H₀. */
+  /** From now, and left to the end, in 1/H₀; null where rounding of ln a leaves too little of what is left. */
   readonly time: number
-  readonly remaining: number
+  readonly remaining: number | null
   /** ln a. */
   readonly N: number
 }
@@ -57,10 +57,15 @@ export function unbinding(history: History, h0: number, { period }: UnboundSyste
  * What is left of time. Where dark energy outgrows every power, the panels end when they add nothing to the whole time, which is too
  * early for what is left: it is integrated on its own.
  */
-function remainingFrom(future: Arm, place: Place): number {
-  if (future.tail !== null || future.end.kind !== 'none') return toEnd(place, 'time')
+function remainingFrom(future: Arm, place: Place): number | null {
+  const { end } = future
+  if (end.kind !== 'none' && Math.abs(end.N - place.N) < BLURRED * Math.abs(end.N)) return null
+  if (future.tail !== null || end.kind !== 'none') return toEnd(place, 'time')
   return integralOfExp((N) => -0.5 * logExpansion(future.model, N), place.N)
 }
+
+/** Part of ln a that eps blurs by a millionth. */
+const BLURRED = 1e6 * Number.EPSILON
 
 /** Doubling steps until the system is unbound; null where ln a grows beyond all numbers that the law can be asked for. */
 function firstAbove(excess: (N: number) => number): number | null {

@@ -32,7 +32,7 @@ export interface Moment {
   readonly time: number | null
   readonly scale: number | null
   readonly redshift: number | null
-  /** Gyr since the origin and left to the end, each on its own and not as a difference of times; null when infinite. */
+  /** Gyr since the origin and left to the end, each on its own and not as a difference of times; null when infinite or lost in rounding. */
   readonly age: number | null
   readonly remaining: number | null
 }
@@ -166,7 +166,7 @@ function unbindings({ history, scenario }: Subject, gyr: number): Moment[] {
             time: found.time * gyr,
             ...placeOf(found.N),
             age: within(history, found.time, gyr).age,
-            remaining: finite(found.remaining * gyr),
+            remaining: found.remaining === null ? null : finite(found.remaining * gyr),
           },
         ]
   })
