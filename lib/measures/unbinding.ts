@@ -59,12 +59,16 @@ export function unbinding(history: History, h0: number, { period }: UnboundSyste
  */
 function remainingFrom(future: Arm, place: Place): number | null {
   const { end } = future
-  if (end.kind !== 'none' && Math.abs(end.N - place.N) < BLURRED * Math.abs(end.N)) return null
-  if (future.tail !== null || end.kind !== 'none') return toEnd(place, 'time')
+  if (end.kind !== 'none') {
+    const left = toEnd(place, 'time')
+    const blurred = Math.abs(end.N - place.N) < BLURRED * Math.abs(end.N) || left < BLURRED * future.time.total
+    return blurred ? null : left
+  }
+  if (future.tail !== null) return toEnd(place, 'time')
   return integralOfExp((N) => -0.5 * logExpansion(future.model, N), place.N)
 }
 
-/** Part of ln a that eps blurs by a millionth. */
+/** Part of ln a, or of the whole time, that eps blurs by a millionth. */
 const BLURRED = 1e6 * Number.EPSILON
 
 /** Doubling steps until the system is unbound; null where ln a grows beyond all numbers that the law can be asked for. */
