@@ -94,7 +94,8 @@ export function momentsOf(subject: Subject): readonly Moment[] {
 const finite = (time: number): number | null => (Number.isFinite(time) ? time : null)
 
 /** From the times of origin and end alone: for what lies far from both, or is one of them. */
-function within({ origin, end }: History, time: number, gyr: number): Pick<Moment, 'age' | 'remaining'> {
+function within({ origin, end }: History, time: number | null, gyr: number): Pick<Moment, 'age' | 'remaining'> {
+  if (time === null) return { age: null, remaining: null }
   return {
     age: origin.time === null ? null : (time - origin.time) * gyr,
     remaining: end.time === null ? null : (end.time - time) * gyr,
@@ -175,13 +176,13 @@ function unbindings({ history, scenario }: Subject, gyr: number): Moment[] {
 function first({ history }: Subject, gyr: number): Moment {
   const { kind, time, scale } = history.origin
   const redshift = scale > 0 ? 1 / scale - 1 : null
-  const times = time === null ? { age: null, remaining: null } : within(history, time, gyr)
+  const times = within(history, time, gyr)
   return { kind: 'origin', label: ORIGINS[kind], time: time === null ? null : time * gyr, scale, redshift, ...times }
 }
 
 function last({ history }: Subject, gyr: number): Moment {
   const { kind, time, scale } = history.end
   const redshift = scale === null ? -1 : scale > 0 ? 1 / scale - 1 : null
-  const times = time === null ? { age: null, remaining: null } : within(history, time, gyr)
+  const times = within(history, time, gyr)
   return { kind: 'end', label: ENDS[kind], time: time === null ? null : time * gyr, scale, redshift, ...times }
 }
