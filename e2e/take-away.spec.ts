@@ -46,6 +46,22 @@ test('words come when they are opened, and one click copies each', async ({ page
   expect(heard).toEqual([])
 })
 
+test('words that were opened before the page came alive come when it does', async ({ page }) => {
+  let release = () => {}
+  const released = new Promise<void>((resolve) => {
+    release = resolve
+  })
+  await page.route('**/*.js', async (route) => {
+    await released
+    await route.continue()
+  })
+  await page.goto(SCENARIOS, { waitUntil: 'commit' })
+  await page.locator('.take-away summary').click()
+  await expect(page.getByRole('link', { name: 'All of them on a page of their own' })).toBeVisible()
+  release()
+  await expect(page.getByRole('button', { name: 'Copy: LaTeX macros' })).toBeVisible()
+})
+
 test.describe('without scripts', () => {
   test.use({ javaScriptEnabled: false })
   test('the words stand on a page of their own', async ({ page }) => {

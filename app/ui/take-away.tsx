@@ -1,4 +1,4 @@
-import { lazy, Suspense, useState } from 'react'
+import { lazy, Suspense, useEffect, useRef, useState } from 'react'
 import type { Choice, TakeAwayLists } from '../../lib/answers/take-away'
 import { frameHtml } from '../../lib/formats/frame'
 import type { Desk } from '../../lib/words/desk'
@@ -19,7 +19,7 @@ export function TakeAway({ desk, lists, live }: Props) {
   const query = queryOf(desk)
   const theme = desk.place.theme === 'night' ? '&theme=night' : ''
   const figures = figuresOf(desk.place, lists)
-  const [open, setOpen] = useState(false)
+  const words = useOpen()
   return (
     <section className="take-away" aria-labelledby="take-away">
       <h2 id="take-away" className="heading">
@@ -66,9 +66,9 @@ export function TakeAway({ desk, lists, live }: Props) {
           </tr>
         </tbody>
       </table>
-      <details onToggle={({ currentTarget }) => setOpen(currentTarget.open)}>
+      <details ref={words.ref} onToggle={words.look}>
         <summary>Words: captions, methods, summary, press card, macros, references</summary>
-        {open && live ? (
+        {words.open && live ? (
           <Suspense fallback={null}>
             <Words query={query} />
           </Suspense>
@@ -80,6 +80,15 @@ export function TakeAway({ desk, lists, live }: Props) {
       </details>
     </section>
   )
+}
+
+/** Whether it is open, also where it was opened before the page came alive. */
+function useOpen() {
+  const ref = useRef<HTMLDetailsElement>(null)
+  const [open, setOpen] = useState(false)
+  const look = () => setOpen(ref.current?.open === true)
+  useEffect(look, [])
+  return { ref, open, look }
 }
 
 /** What a page of somebody else pastes to show the figure. */
