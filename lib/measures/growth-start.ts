@@ -38,8 +38,8 @@ const FORGOTTEN = -150
 
 /** Past arms that reach back to a big bang with no exponent above 4. */
 export function startOf(past: Arm): Start {
-  const exponent =
-    leadingExponent(past.model, -1) ?? /* v8 ignore next -- where there is matter there is an exponent */ 3
+  /* v8 ignore next -- where there is matter there is an exponent */
+  const exponent = leadingExponent(past.model, -1) ?? 3
   const tail = past.tail && earlierTail(past.model, past.tail, exponent)
   const small = tail && tail.N > FARTHEST && tail.corrections.every((one) => Math.abs(one.size) < SMALL)
   return small ? closedStart(past.model, tail, exponent) : balancedStart(past.model, exponent)
@@ -52,9 +52,9 @@ function earlierTail(model: Model, tail: Tail, exponent: number): Tail {
     ({ size, rate }) => Math.log(Math.abs(size) / least) / Math.min(1, exponent - 3 || 1, rate),
   )
   const earlier = Math.max(FARTHEST + 1, tail.N - Math.max(0, ...ways))
-  return earlier < tail.N
-    ? (tailAt(model, -1, earlier) ?? /* v8 ignore next -- earlier the corrections are smaller still */ tail)
-    : tail
+  if (!(earlier < tail.N)) return tail
+  /* v8 ignore next -- earlier the corrections are smaller still, so there is a tail */
+  return tailAt(model, -1, earlier) ?? tail
 }
 
 /** The root f ≥ 0 of f² + k f = source, for k ≥ 0. */

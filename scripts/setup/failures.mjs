@@ -1,4 +1,4 @@
-/** Names what failed, with the first lines of why, from the JSON files of the test runners. */
+/** Names what failed, at first or for good, with the first lines of why, from the JSON files of the test runners. */
 
 const COLOUR = new RegExp(`${String.fromCharCode(27)}\\[[0-9;]*m`, 'g')
 const MOST_LINES = 12
@@ -32,14 +32,14 @@ function inSuite({ file, specs = [], suites = [] }) {
       .filter((/** @type {any} */ { status }) => status === 'unexpected' || status === 'flaky')
       .map((/** @type {any} */ { status, results }) => {
         const { error } = results.find((/** @type {any} */ result) => result.error) ?? {}
-        return told(`${file} › ${title} (${status})`, error?.message ?? 'no message')
+        return told(`${file} › ${title}`, error?.message ?? 'no message', status === 'flaky' ? 'at first only' : '')
       }),
   )
   return [...own, ...suites.flatMap(inSuite)]
 }
 
-/** @param {string} name @param {string} [why] */
-function told(name, why = '') {
+/** @param {string} name @param {string} [why] @param {string} [when] */
+function told(name, why = '', when = '') {
   const lines = why.replace(COLOUR, '').split('\n').slice(0, MOST_LINES)
-  return [`failed: ${name}`, ...lines.map((line) => `    ${line}`)].join('\n')
+  return [`failed${when && ` ${when}`}: ${name}`, ...lines.map((line) => `    ${line}`)].join('\n')
 }

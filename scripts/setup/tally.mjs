@@ -27,14 +27,14 @@ export function tallyVitest(report) {
 }
 
 /**
- * A test that passed only when tried again has failed.
+ * A test that passed when tried again has passed; `failures.mjs` names it.
  * @param {any} report of Playwright
  * @returns {Tally}
  */
 export function tallyPlaywright({ stats, errors }) {
   return {
-    passed: stats.expected,
-    failed: stats.unexpected + stats.flaky + errors.length,
+    passed: stats.expected + stats.flaky,
+    failed: stats.unexpected + errors.length,
     skipped: stats.skipped,
   }
 }

@@ -21,7 +21,7 @@ test('vitest: failed tests and files that did not load, with the reason', () => 
   ])
 })
 
-test('Playwright: unexpected and flaky tests at any depth, and errors outside tests', () => {
+test('Playwright: tests that failed, for good or at first, at any depth, and errors outside tests', () => {
   const spec = (title: string, status: string, message: string) => ({
     title,
     tests: [{ status, results: [{ error: { message } }, {}] }],
@@ -33,8 +33,8 @@ test('Playwright: unexpected and flaky tests at any depth, and errors outside te
     suites: [inner],
   }
   expect(failuresOfPlaywright({ suites: [outer], errors: [{ message: 'no server' }] })).toEqual([
-    'failed: x.spec.ts › click (unexpected)\n    gone',
-    'failed: x.spec.ts › drag (flaky)\n    late',
+    'failed: x.spec.ts › click\n    gone',
+    'failed at first only: x.spec.ts › drag\n    late',
     'failed: outside tests\n    no server',
   ])
 })
