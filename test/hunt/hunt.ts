@@ -68,8 +68,8 @@ function complaint(
   if (found.kind !== 'root' || found.doubt !== null || Math.abs(found.N) > DISTANT) return null
   // Not invented: E² vanishes at the root and is no more than rounding above zero just beyond it.
   const there = Math.abs(share(found.N))
-  // Next to the edge of a law doubles of N tell its density badly.
-  if (edge - Math.abs(found.N) < 1e-9) return null
+  // Next to the edge of a law doubles of N tell its density badly: to eps over the part of the way that is left.
+  if (edge - Math.abs(found.N) < 1e-6) return null
   const beyond = share(found.N + direction * 1e-7)
   const noise = 1e3 * ROUNDING * (1 + Math.abs(found.N))
   return there > noise || beyond > noise ? `E² is ${there} at the root N = ${found.N}, and ${beyond} beyond` : null
