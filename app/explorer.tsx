@@ -82,7 +82,7 @@ export function Explorer({ initial, asked, ruler, shelf, lists, edition, childre
         <RulerPlace {...ruled} initial={ruler} shelf={shelf}>
           {children}
         </RulerPlace>
-        <TakeAway desk={ruled.desk} lists={lists} live={address !== null} />
+        <TakeAway desk={ruled.desk} lists={lists} version={edition.version} live={address !== null} />
       </main>
       <Footer data={desk.links.data} edition={edition} />
       {address && <Status view={view} moving={moving} waiting={waiting} trouble={trouble} />}

@@ -73,7 +73,7 @@ async function compute(questions: readonly string[]) {
           resolve(data.text)
         }
         worker.addEventListener('message', heard)
-        worker.postMessage(question)
+        worker.postMessage({ route: '/api/explorer', asked: question })
       }),
     )
   }

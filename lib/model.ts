@@ -266,13 +266,16 @@ export function logarithmicIn(model: Model, direction: 1 | -1): Logarithmic | nu
   return asymptote.kind === 'logarithmic' ? asymptote : null
 }
 
+const logs: number[] = []
+
 /** ln E² at N, also where E² itself leaves the doubles; for components that keep their signs. */
-export function logExpansion(model: Model, N: number): number {
-  const logs = model.acting.map((one) => one.logSize(N))
-  const largest = Math.max(...logs)
-  const sum = model.acting.reduce(
-    (total, one, i) => total + Math.sign(one.omega) * Math.exp((logs[i] ?? largest) - largest),
-    0,
-  )
+export function logExpansion({ acting }: Model, N: number): number {
+  let largest = Number.NEGATIVE_INFINITY
+  for (let i = 0; i < acting.length; i++) {
+    logs[i] = acting[i].logSize(N)
+    largest = Math.max(largest, logs[i])
+  }
+  let sum = 0
+  for (let i = 0; i < acting.length; i++) sum += Math.sign(acting[i].omega) * Math.exp(logs[i] - largest)
   return largest + Math.log(sum)
 }

@@ -8,7 +8,7 @@ import type { EndKind, OriginKind } from './history/outcome'
 import { isMissing, type Outcome } from './measures/outcome'
 import { MEASURES, type MeasureKey } from './quantities/measures'
 import { type Moment, momentsOf } from './quantities/moments'
-import { subjectOf } from './quantities/quantity'
+import { type Subject, subjectOf } from './quantities/quantity'
 import type { Budget } from './scenario/budget'
 import { type Notice, noticesOf } from './scenario/notices'
 import type { Scenario } from './scenario/scenario'
@@ -54,19 +54,25 @@ export function solve(scenario: Scenario): Solution {
   const subject = subjectOf(scenario)
   const { budget, history } = subject
   const code = writeScenario(scenario)
-  const measures = MEASURES.map((one) => [one.key, answer(one.value(subject), one.unit)] as const)
   return {
     scenario,
     code,
     label: scenario.name ?? code,
     budget,
     ...originAndEnd(history, hubbleTimeGyr(scenario.h0)),
-    measures: Object.fromEntries(measures) as Record<MeasureKey, Answer>,
+    measures: measuresOf(subject),
     moments: momentsOf(subject),
     notices: noticesOf(scenario, budget),
     history,
   }
 }
+
+/** Every measure of the list. */
+export const measuresOf = (subject: Subject): Readonly<Record<MeasureKey, Answer>> =>
+  Object.fromEntries(MEASURES.map((one) => [one.key, answer(one.value(subject), one.unit)])) as Record<
+    MeasureKey,
+    Answer
+  >
 
 function originAndEnd({ origin, end }: History, gyr: number): Pick<Solution, 'origin' | 'end'> {
   const inGyr = (time: number | null) => (time === null ? null : time * gyr)

@@ -1,9 +1,14 @@
-/** The engine in this browser: a worker, loaded when it is first needed. It gets one question at a time, the newest next. */
+/**
+ * The engine in this browser: a worker, loaded when it is first needed. Of the explorer's questions it gets one at a time, the
+ * newest next.
+ */
 import type { Explorer } from '../../lib/answers/explorer'
-import type { Computed } from './worker'
+import type { Computed, Question } from './worker'
 
 /** Told of every answer; null where there is none. */
 type Listener = (asked: string, view: Explorer | null) => void
+
+const EXPLORER = '/api/explorer'
 
 let worker: Worker | null = null
 let ready = false
@@ -37,11 +42,30 @@ function goOn(): void {
   if (!ready || underWay !== null || next === null) return
   underWay = next
   next = null
-  worker?.postMessage(underWay)
+  put({ route: EXPLORER, asked: underWay })
+}
+
+const put = (question: Question): void => worker?.postMessage(question)
+
+/** The answer to a question that is put once, as JSON; null where there is none. */
+export function answered(question: Question): Promise<string | null> {
+  wake()
+  const its = worker
+  return new Promise((resolve) => {
+    const heardIts = ({ data }: MessageEvent<Computed | null>) => {
+      if (data?.route !== question.route || data.asked !== question.asked) return
+      its?.removeEventListener('message', heardIts)
+      resolve(data.text)
+    }
+    its?.addEventListener('message', heardIts)
+    its?.addEventListener('error', () => resolve(null), { once: true })
+    put(question)
+  })
 }
 
 /** Null says that it is ready. */
 function heard({ data }: MessageEvent<Computed | null>): void {
+  if (data !== null && data.route !== EXPLORER) return
   ready = true
   underWay = null
   // First the next question: it is worked on while this answer is drawn.

@@ -2,16 +2,14 @@
 import { useQuery } from '@tanstack/react-query'
 import type { RulerView } from '../../lib/answers/ruler-view'
 import { RULER_KEYS } from '../../lib/words/place'
-import type { Routes } from '../../public/longhence'
 import type { Address } from './address'
+import { answerTo } from './either'
 
 function askedOf(search: string): string {
   const query = new URLSearchParams(search)
   const keys: readonly string[] = ['s', ...RULER_KEYS]
   return new URLSearchParams([...query].filter(([key]) => keys.includes(key))).toString()
 }
-
-type Answer = Routes['/api/ruler']['answers']['application/json']
 
 export interface LiveReadings {
   readonly view: RulerView
@@ -23,11 +21,7 @@ export function useRuler(address: Address, initial: RulerView): LiveReadings {
   const asked = askedOf(address.search)
   const { data, isFetching, isError } = useQuery<RulerView>({
     queryKey: ['ruler', asked],
-    queryFn: async ({ signal }): Promise<Answer> => {
-      const response = await fetch(`/api/ruler?${asked}`, { signal })
-      if (!response.ok) throw new Error(`The server answered with ${response.status}.`)
-      return response.json()
-    },
+    queryFn: ({ signal }) => answerTo({ route: '/api/ruler', asked }, signal),
     // The address may have moved on since the server drew the page.
     placeholderData: (previous) => previous ?? initial,
     staleTime: Number.POSITIVE_INFINITY,

@@ -1,19 +1,35 @@
-/** In a thread of its own: computes what the server would answer, by the same code. Questions are queries, answers JSON. */
+/** In a thread of its own: computes what the server would answer, by the same code. */
 import { askExplorer } from '../../lib/answers/ask-explorer'
+import { askRuler } from '../../lib/answers/ask-ruler'
+import type { Pairs, Question as Read } from '../../lib/answers/question'
+import type { Home } from '../../lib/answers/table'
+import { askWords } from '../../lib/answers/words'
+import type { Reading } from '../../lib/scenario/scenario'
 
-export interface Computed {
+const ROUTES = { '/api/explorer': askExplorer, '/api/ruler': askRuler, '/api/words': askWords }
+
+export interface Question {
+  readonly route: keyof typeof ROUTES
+  /** The query. */
   readonly asked: string
-  /** Null where there is no answer. */
+  /** What links begin with, for answers that have some. */
+  readonly home?: Home
+}
+
+export interface Computed extends Pick<Question, 'route' | 'asked'> {
+  /** JSON; null where there is no answer. */
   readonly text: string | null
 }
 
-addEventListener('message', ({ data }: MessageEvent<string>) => {
-  postMessage({ asked: data, text: answer(data) } satisfies Computed)
+addEventListener('message', ({ data: { route, asked, home } }: MessageEvent<Question>) => {
+  postMessage({ route, asked, text: answer(ROUTES[route], asked, home) } satisfies Computed)
 })
 
-function answer(asked: string): string | null {
+type Route = (pairs: Pairs, home: Home) => Reading<Read<unknown>>
+
+function answer(route: Route, asked: string, home: Home = { version: '', base: '' }): string | null {
   try {
-    const reading = askExplorer(new URLSearchParams(asked))
+    const reading = route(new URLSearchParams(asked), home)
     const view = reading.ok ? reading.value.answer() : reading
     return view.ok ? JSON.stringify(view.value) : null
   } catch {

@@ -1,4 +1,4 @@
-import { lazy, Suspense, useEffect, useRef, useState } from 'react'
+import { lazy, Suspense, useEffect, useMemo, useRef, useState } from 'react'
 import type { Choice, TakeAwayLists } from '../../lib/answers/take-away'
 import { frameHtml } from '../../lib/formats/frame'
 import type { Desk } from '../../lib/words/desk'
@@ -8,6 +8,7 @@ import { CopyText } from './copy-text'
 interface Props {
   readonly desk: Pick<Desk, 'links' | 'place' | 'scenarios'>
   readonly lists: TakeAwayLists
+  readonly version: string
   readonly live: boolean
 }
 
@@ -15,11 +16,12 @@ interface Props {
 const Words = lazy(() => import('./take-away-fetched'))
 
 /** Files, links and words of what is shown. Without scripts all of it is links. */
-export function TakeAway({ desk, lists, live }: Props) {
+export function TakeAway({ desk, lists, version, live }: Props) {
   const query = queryOf(desk)
   const theme = desk.place.theme === 'night' ? '&theme=night' : ''
   const figures = figuresOf(desk.place, lists)
   const words = useOpen()
+  const home = useMemo(() => ({ version, base: lists.base }), [version, lists.base])
   return (
     <section className="take-away" aria-labelledby="take-away">
       <h2 id="take-away" className="heading">
@@ -70,7 +72,7 @@ export function TakeAway({ desk, lists, live }: Props) {
         <summary>Words: captions, methods, summary, press card, macros, references</summary>
         {words.open && live ? (
           <Suspense fallback={null}>
-            <Words query={query} />
+            <Words query={query} home={home} />
           </Suspense>
         ) : (
           <p>
@@ -97,7 +99,7 @@ function FrameRow({
   title,
   lists,
   live,
-}: Omit<Props, 'desk'> & { readonly query: string; readonly title: string }) {
+}: Pick<Props, 'lists' | 'live'> & { readonly query: string; readonly title: string }) {
   const base = lists.base === '' && live ? location.origin : lists.base
   const html = frameHtml(`${base}/embed?${query}`, title)
   return (
@@ -161,7 +163,7 @@ function figuresOf(place: Desk['place'], { views }: TakeAwayLists) {
 }
 
 /** A code has to lead somewhere: where the server does not know its own address, the browser does. */
-function Codes({ query, lists, live }: Omit<Props, 'desk'> & { readonly query: string }) {
+function Codes({ query, lists, live }: Pick<Props, 'lists' | 'live'> & { readonly query: string }) {
   if (lists.base === '' && !live) return null
   const base = lists.base === '' ? `&base=${encodeURIComponent(location.origin)}` : ''
   return (

@@ -11,14 +11,14 @@ import { type Direction, FARTHEST, type Search, searchTurning } from './turning'
 
 /** Sums at the inner edge of each panel, from today, and at its outer edge, to the end. */
 interface Sums {
-  readonly fromToday: Float64Array
-  readonly toEnd: Float64Array
+  readonly fromToday: readonly number[]
+  readonly toEnd: readonly number[]
   /** From today to the end; Infinity where it diverges. */
   readonly total: number
   readonly error: number
   /** Error bounds of the integral from today to the outer edge of each panel, and from its inner edge to the end. */
-  readonly errorFromToday: Float64Array
-  readonly errorToEnd: Float64Array
+  readonly errorFromToday: readonly number[]
+  readonly errorToEnd: readonly number[]
 }
 
 export interface Arm {
@@ -27,7 +27,7 @@ export interface Arm {
   readonly end: Search
   readonly panels: readonly Panel[]
   /** m = |ln a| at the inner edge of each panel, and at the outer edge of the last. */
-  readonly edges: Float64Array
+  readonly edges: readonly number[]
   readonly tail: Tail | null
   readonly time: Sums
   readonly conformal: Sums
@@ -55,11 +55,7 @@ export function armFrom(
   stopped: Stopped,
   begun: Tail | null = null,
 ): Arm {
-  const edges = new Float64Array(panels.length + 1)
-  panels.forEach((one, i) => {
-    edges[i] = one.zone.distanceAt(one.from)
-  })
-  edges[panels.length] = lastEdge(panels)
+  const edges = [...panels.map((one) => one.zone.distanceAt(one.from)), lastEdge(panels)]
   const { tail, time, conformal } = beyondPanels(model, direction, end, stopped, lastEdge(panels), begun)
   return {
     model,
@@ -120,26 +116,33 @@ function lasts(model: Model, direction: Direction, edge: number): boolean {
   return !(lasting < 0.5 * model.expansion(N, Math.exp(-N)))
 }
 
+/** Running sums outwards and inwards. Plain arrays: typed ones of this length take longer to make than to fill. */
 function sumsOf(panels: readonly Panel[], clock: Clock, [beyond, beyondError]: readonly [number, number]): Sums {
-  const fromToday = new Float64Array(panels.length + 1)
-  const toEnd = new Float64Array(panels.length)
+  const fromToday = [0]
+  const errorFromToday: number[] = []
+  let errorBefore = 0
   panels.forEach((one, i) => {
-    fromToday[i + 1] = fromToday[i] + one[clock].total
+    fromToday.push(fromToday[i] + one[clock].total)
+    errorBefore += one[clock].error
+    errorFromToday.push(errorBefore)
   })
-  const errorFromToday = new Float64Array(panels.length + 1)
-  const errorToEnd = new Float64Array(panels.length + 1)
+  errorFromToday.push(errorBefore + beyondError)
   let left = beyond
   let error = beyondError
-  errorToEnd[panels.length] = beyondError
-  panels.forEach((one, i) => {
-    errorFromToday[i] = (i > 0 ? errorFromToday[i - 1] : 0) + one[clock].error
-  })
-  errorFromToday[panels.length] = errorFromToday[panels.length - 1] + beyondError
+  const toEnd: number[] = []
+  const errorToEnd = [beyondError]
   for (let i = panels.length - 1; i >= 0; i--) {
-    toEnd[i] = left
+    toEnd.push(left)
     left += panels[i][clock].total
     error += panels[i][clock].error
-    errorToEnd[i] = error
+    errorToEnd.push(error)
   }
-  return { fromToday, toEnd, total: left, error, errorFromToday, errorToEnd }
+  return {
+    fromToday,
+    toEnd: toEnd.reverse(),
+    total: left,
+    error,
+    errorFromToday,
+    errorToEnd: errorToEnd.reverse(),
+  }
 }

@@ -29,7 +29,7 @@ export function placeAt(arm: Arm, m: number): Place | null {
 }
 
 /** Index of the last entry of an ascending list that is not above the value. */
-export function indexBelow(list: Float64Array, value: number): number {
+export function indexBelow(list: readonly number[], value: number): number {
   let [low, high] = [0, list.length]
   while (high - low > 1) {
     const middle = (low + high) >> 1

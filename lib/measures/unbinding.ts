@@ -77,22 +77,19 @@ function firstAbove(excess: (N: number) => number): number | null {
   return null
 }
 
+const [logs, weights]: [number[], number[]] = [[], []]
+
 /** ln of ä/a in H₀², −∞ where it is not positive; by logarithms, for E² leaves the doubles before an atom breaks. */
-function logAcceleration(model: Model, N: number): number {
-  const terms = model.components.map((one) => {
+function logAcceleration({ components }: Model, N: number): number {
+  let largest = Number.NEGATIVE_INFINITY
+  components.forEach((one, i) => {
     const [low, high] = one.exponentRange(N, N)
     const sign = one.terms ? Math.sign(one.density(N)) : Math.sign(one.omega)
-    return { log: one.logSize(N), weight: sign * (1 - (low + high) / 4) }
+    logs[i] = one.logSize(N)
+    weights[i] = sign * (1 - (low + high) / 4)
+    largest = Math.max(largest, logs[i])
   })
-  const largest = Math.max(...terms.map((one) => one.log))
   if (largest === Number.POSITIVE_INFINITY) return largest
-  return (
-    largest +
-    Math.log(
-      Math.max(
-        0,
-        terms.reduce((sum, one) => sum + one.weight * Math.exp(one.log - largest), 0),
-      ),
-    )
-  )
+  const sum = components.reduce((before, _, i) => before + weights[i] * Math.exp(logs[i] - largest), 0)
+  return largest + Math.log(Math.max(0, sum))
 }

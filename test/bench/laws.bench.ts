@@ -1,5 +1,6 @@
 /** Other laws of dark energy and other ends: what one server meets in a day. */
-import { solve } from '../../lib/solve'
+import { subjectOf } from '../../lib/quantities/quantity'
+import { measuresOf, solve } from '../../lib/solve'
 import type { Bench, Benches } from './bench'
 import { inTurn, MASSLESS, numbers, read, STANDARD, variants } from './scenarios'
 
@@ -27,8 +28,9 @@ export const benches: Benches = {
   'scalar field, exponential potential': solved(`${MASSLESS},eos:field,v:exponential,slope:1`),
   'scalar field, one massive state': solved(`${STANDARD},eos:field,v:exponential,slope:1`),
   'scalar field that turns round': solved(`${MASSLESS},eos:field,v:linear,slope:1`),
-  '10,000 random scenarios whose w changes': {
-    run: () => random.forEach((one) => void solve(one)),
+  '10,000 random scenarios whose w changes, all measures': {
+    run: () => random.forEach((one) => void measuresOf(subjectOf(one))),
     aim: 1,
   },
+  'the same with their moments': { run: () => random.forEach((one) => void solve(one)) },
 }
