@@ -57,7 +57,8 @@ function fromTodayInto(
   const near = NEAR_TODAY * arm.edges[1]
   for (let i = 0; i < count; i++) {
     const m = Math.abs(N[i])
-    out[i] = offset + sign * (m < near ? nearToday(arm, m, clock) : sums[panel[i]] + within[i])
+    if (m < near) out[i] = offset + sign * nearToday(arm, m, clock)
+    else out[i] = offset + sign * (sums[panel[i]] + within[i])
   }
 }
 

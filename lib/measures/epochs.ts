@@ -6,7 +6,7 @@ import type { History } from '../history/history'
 import type { Panel } from '../history/panels'
 import { leadingExponent } from '../history/tail'
 import type { Model } from '../model'
-import { coefficientsInto, derivative, NODE_COUNT, NODES } from '../numerics/chebyshev'
+import { coefficientsInto, derivativeInto, NODE_COUNT, NODES } from '../numerics/chebyshev'
 import { brent } from '../numerics/roots'
 import { type Bracket, signChanges } from '../numerics/sign-changes'
 
@@ -96,7 +96,9 @@ function add(found: Crossing[], { model, direction }: Arm, inner: number, outer:
   found.push({ N, rising })
 }
 
-const samples = new Float64Array(NODE_COUNT)
+const [samples, coefficients] = [new Float64Array(NODE_COUNT), new Float64Array(NODE_COUNT)]
+/** As long as the series of a panel. */
+const [rate, slope] = [new Float64Array(NODE_COUNT + 1), new Float64Array(NODE_COUNT + 1)]
 /** Relative error of the series below: derivatives of a series of 16 terms multiply that of the panels by up to 16². */
 const NOISE = 1e-11
 
@@ -104,23 +106,23 @@ const NOISE = 1e-11
 function changesOver(arm: Arm, { zone, from, to, time }: Panel): readonly Bracket[] {
   const half = (to - from) / 2
   if (!zone.plain) {
-    const out = new Float64Array(NODE_COUNT)
     for (let k = 0; k < NODE_COUNT; k++) {
       const N = arm.direction * zone.distanceAt((from + to) / 2 + half * NODES[k])
       samples[k] = acceleration(arm.model, N) / Math.max(1e-300, arm.model.magnitude(N))
     }
     // Where densities leave the doubles the ends of the panel decide.
     if (!samples.every(Number.isFinite)) return [{ from: -1, to: 1 }]
-    coefficientsInto(out, samples)
-    return signChanges(out, NOISE)
+    coefficientsInto(coefficients, samples)
+    return signChanges(coefficients, NOISE)
   }
   // With r = dt/dN = 1/E it is 1/E − d(1/E)/dN = r (ä/a)/E².
-  const rate = derivative(time.series)
-  const slope = derivative(rate)
-  const noise = NOISE * rate.reduce((sum, one) => sum + Math.abs(one), 0)
-  if (!(noise > 0)) return []
+  derivativeInto(rate, time.series)
+  derivativeInto(slope, rate)
+  let size = 0
+  for (const one of rate) size += Math.abs(one)
+  if (!(size > 0)) return []
   for (let j = 0; j < rate.length; j++) rate[j] -= (arm.direction * slope[j]) / half
-  return signChanges(rate, noise)
+  return signChanges(rate, NOISE * size)
 }
 
 /** Whether what rules beyond the last panel leaves the sign of ä to nothing else. */

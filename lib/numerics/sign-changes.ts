@@ -6,6 +6,8 @@ export interface Bracket {
   readonly to: number
 }
 
+const NONE: readonly Bracket[] = []
+
 /**
  * Intervals in [−1, 1] that hold one sign change each. On an interval of width w the series lies within w²/8 of its chord, and its
  * slope within w/2 of that of the chord, times the largest second derivative, Σ |c_j| j² (j² − 1)/3 (Trefethen, Approximation Theory
@@ -13,9 +15,15 @@ export interface Bracket {
  * than the `noise` of its values. A series that is not finite decides nothing: the whole interval stands for it.
  */
 export function signChanges(series: Series, noise: number): readonly Bracket[] {
-  let bend = 0
-  for (let j = 2; j < series.length; j++) bend += (Math.abs(series[j]) * j * j * (j * j - 1)) / 3
+  let [bend, swing] = [0, 0]
+  for (let j = 1; j < series.length; j++) {
+    const size = Math.abs(series[j])
+    swing += size
+    bend += (size * j * j * (j * j - 1)) / 3
+  }
   if (!Number.isFinite(bend)) return [{ from: -1, to: 1 }]
+  // Then it keeps the sign of its mean.
+  if (Math.abs(series[0]) > swing) return NONE
   const found: Bracket[] = []
   const search = (from: number, to: number, left: number, right: number): void => {
     const width = to - from

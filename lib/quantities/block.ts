@@ -119,6 +119,19 @@ export const expansionIn = shared((block) => {
   return out
 })
 
+/**
+ * Divides by E², in place; no value where the expansion stands still. Two stores, since a choice between a number and NaN within
+ * one expression makes an object for every row.
+ */
+export function overExpansion(block: Block, values: Float64Array): Float64Array {
+  const squared = expansionIn(block)
+  for (let i = 0; i < block.count; i++) {
+    if (squared[i] > 0) values[i] /= squared[i]
+    else values[i] = Number.NaN
+  }
+  return values
+}
+
 /** dE²/dN and d²E²/dN². */
 export const slopesIn = shared((block) => {
   const [first, second] = [block.take(), block.take()]

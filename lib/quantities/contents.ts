@@ -3,7 +3,7 @@ import type { Component } from '../components'
 import { missing } from '../measures/outcome'
 import { AT_REST } from '../measures/rates'
 import { ROUNDING } from './accuracy'
-import { type Block, expansionIn, nothing } from './block'
+import { type Block, expansionIn, nothing, overExpansion } from './block'
 import type { ColumnKey, Definition } from './column'
 import { FRIEDMANN, fixed, significant } from './quantity'
 
@@ -18,10 +18,9 @@ const share = (key: ColumnKey, symbol: string, label: string, meaning: string, o
   source: FRIEDMANN,
   accuracy: ROUNDING,
   values: (block) => {
-    const [out, squared] = [block.take(), expansionIn(block)]
+    const out = block.take()
     block.arm.model.densitiesInto(out, of, block.N, block.inverseScale, block.count)
-    for (let i = 0; i < block.count; i++) out[i] = squared[i] > 0 ? out[i] / squared[i] : Number.NaN
-    return out
+    return overExpansion(block, out)
   },
   why: (block, i) => (expansionIn(block)[i] > 0 ? null : AT_REST),
 })

@@ -4,7 +4,7 @@ import { type Missing, missing } from '../measures/outcome'
 import { AT_REST } from '../measures/rates'
 import { hubbleLengthGly, perSecond } from '../units'
 import { ROUNDING } from './accuracy'
-import { type Block, expansionIn, shared, slopesIn, times } from './block'
+import { type Block, expansionIn, overExpansion, shared, slopesIn, times } from './block'
 import type { Definition } from './column'
 import { FRIEDMANN, fixed, significant } from './quantity'
 
@@ -21,18 +21,16 @@ const atRest = (block: Block, i: number): Missing | null => (expansionIn(block)[
 /** −1 − ½ (E²)′/E², primes by ln a. */
 function decelerations(block: Block): Float64Array {
   const [out, squared, { first }] = [block.take(), expansionIn(block), slopesIn(block)]
-  for (let i = 0; i < block.count; i++) out[i] = ratio(-0.5 * first[i] - squared[i], squared[i])
-  return out
+  for (let i = 0; i < block.count; i++) out[i] = -0.5 * first[i] - squared[i]
+  return overExpansion(block, out)
 }
 
 /** 1 + (3/2)(E²)′/E² + ½ (E²)″/E². */
 function jerks(block: Block): Float64Array {
   const [out, squared, { first, second }] = [block.take(), expansionIn(block), slopesIn(block)]
-  for (let i = 0; i < block.count; i++) out[i] = ratio(squared[i] + 1.5 * first[i] + 0.5 * second[i], squared[i])
-  return out
+  for (let i = 0; i < block.count; i++) out[i] = squared[i] + 1.5 * first[i] + 0.5 * second[i]
+  return overExpansion(block, out)
 }
-
-const ratio = (value: number, squared: number): number => (squared > 0 ? value / squared : Number.NaN)
 
 export const RATE_COLUMNS: readonly Definition[] = [
   {
