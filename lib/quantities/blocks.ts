@@ -79,14 +79,17 @@ function nextByScale(sheet: Sheet, first: number): Run {
 /** The panels of places and the variables there; from one place to the next the panel is seldom another. */
 function placeInto(panel: Float64Array, s: Float64Array, N: Float64Array, arm: Arm, count: number): void {
   const { edges, panels } = arm
+  const last = panels.length
+  const plain = panels.map(({ zone }) => zone.plain === true)
   let k = 0
   for (let i = 0; i < count; i++) {
     const m = Math.abs(N[i])
     while (k > 0 && edges[k] > m) k--
-    while (k < panels.length && edges[k + 1] <= m) k++
+    while (k < last && edges[k + 1] <= m) k++
     panel[i] = k
-    if (k === panels.length) s[i] = m - edges[k]
-    else s[i] = panels[k].zone.plain ? m : panels[k].zone.variableAt(m)
+    if (k === last) s[i] = m - edges[k]
+    else if (plain[k]) s[i] = m
+    else s[i] = panels[k].zone.variableAt(m)
   }
 }
 

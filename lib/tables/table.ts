@@ -40,9 +40,11 @@ export function tableOf(subject: ColumnSubject, code: string, layout: Layout): P
 function* pagesOf(subject: ColumnSubject, layout: Layout): Generator<Page> {
   const { spacing, given, rows, columns } = layout
   const ends = spacing.ends(subject, rows, given)
-  const workspace = borrowWorkspace()
+  // What is asked for outlives the blocks that are made of it.
+  const [workspace, asked] = [borrowWorkspace(), borrowWorkspace()]
+  asked.clear()
   try {
-    const values = new Float64Array(Math.min(rows, BLOCK_SIZE))
+    const values = asked.take()
     for (let first = 0; first < rows; first += BLOCK_SIZE) {
       const count = Math.min(BLOCK_SIZE, rows - first)
       valuesInto(values, spacing, ends, rows, first, count)
@@ -54,6 +56,7 @@ function* pagesOf(subject: ColumnSubject, layout: Layout): Generator<Page> {
     }
   } finally {
     returnWorkspace(workspace)
+    returnWorkspace(asked)
   }
 }
 

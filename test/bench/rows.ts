@@ -31,7 +31,7 @@ export function pagesOf(subject: ColumnSubject, columns: readonly Column[]): num
 }
 
 /** A scenario alone: its history is not known yet. */
-function subjectOf(scenario: Scenario): ColumnSubject {
+export function tableSubject(scenario: Scenario): ColumnSubject {
   const budget = budgetOf(scenario)
   return { scenario, budget, history: historyOf(scenario, budget) }
 }
@@ -39,13 +39,13 @@ function subjectOf(scenario: Scenario): ColumnSubject {
 const scenarios = variants(MASSLESS)
 const [scenario] = scenarios
 
-export const make = inTurn(scenarios, (scenario) => pagesOf(subjectOf(scenario), FIVE))
+export const make = inTurn(scenarios, (scenario) => pagesOf(tableSubject(scenario), FIVE))
 
 /** The rows of one scenario, in 1/H₀, c/H₀ and H₀. */
 export function rows(): readonly (readonly number[])[] {
   const { h0 } = scenario
   const units = [hubbleTimeGyr(h0), hubbleLengthMpc(h0), hubbleLengthGly(h0), h0, 1]
-  return [...tableFor(subjectOf(scenario), FIVE).rows()].map((cells) =>
+  return [...tableFor(tableSubject(scenario), FIVE).rows()].map((cells) =>
     cells.map((cell, i) => (cell ?? Number.NaN) / units[i]),
   )
 }
