@@ -14,8 +14,8 @@ export default function NotFound() {
       <main className="lone">
         <h1>There is no such page</h1>
         <p>
-          Scenarios live in the address of the <a href="/">explorer</a>, behind <code>?s=</code>. Perhaps a part of the
-          link was lost on the way.
+          Scenarios live in the address of the <a href="/">explorer</a>, behind <code className="unbroken">?s=</code>.
+          Perhaps a part of the link was lost on the way.
         </p>
       </main>
       <Footer data={null} edition={EDITION} />

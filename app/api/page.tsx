@@ -5,8 +5,9 @@ import type { Route, RouteParameter } from '../../lib/interface/route'
 import { ROUTES } from '../../lib/interface/routes'
 import { CODE_KEYS, FAMILY_KEYS, type KeyTold } from '../../lib/interface/scenario-code'
 import { EDITION } from '../edition'
+import { Formula } from '../method/formula'
 import { Footer } from '../ui/footer'
-import { Sentence, Symbols } from '../ui/symbol'
+import { Sentence } from '../ui/symbol'
 import { HOME } from './home'
 
 export const metadata: Metadata = {
@@ -133,12 +134,8 @@ function Code() {
           <h3>
             <code>eos:{key}</code> {label}
           </h3>
-          <p>
-            <span className="formula">
-              <Symbols markup={formula} />
-            </span>{' '}
-            {source}.
-          </p>
+          <Formula text={formula} />
+          <p>{source}.</p>
           <Keys keys={keys} />
         </div>
       ))}
@@ -157,7 +154,8 @@ function Keys({ keys }: { readonly keys: readonly KeyTold[] }) {
               <code>{key}</code>
             </th>
             <td>
-              <Sentence text={meaning} /> Allowed: {allowed}.{fallback !== '' && ` Default: ${fallback}.`}
+              <Sentence text={meaning} /> Allowed: <Sentence text={allowed} />.
+              {fallback !== '' && ` Default: ${fallback}.`}
             </td>
           </tr>
         ))}

@@ -15,12 +15,13 @@ interface Props {
 }
 
 export default async function Method({ searchParams }: Props) {
-  const { theme } = await searchParams
+  const asked = (await searchParams).theme
+  const theme = THEMES.find((one) => one === asked)
   const sections = method()
   return (
-    <div className="page" data-theme={THEMES.find((one) => one === theme)}>
+    <div className="page" data-theme={theme}>
       <header className="masthead">
-        <a className="brand" href="/">
+        <a className="brand" href={theme ? `/?theme=${theme}` : '/'}>
           Longhence
         </a>
       </header>
@@ -42,7 +43,7 @@ export default async function Method({ searchParams }: Props) {
           </section>
         ))}
       </main>
-      <Footer data={null} edition={EDITION} />
+      <Footer data={null} edition={EDITION} theme={theme} />
     </div>
   )
 }

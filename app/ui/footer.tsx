@@ -1,3 +1,5 @@
+import type { Theme } from '../../lib/words/place'
+
 export interface Edition {
   readonly version: string
   readonly engine: number | string
@@ -5,10 +7,11 @@ export interface Edition {
 
 interface Props {
   readonly data: string | null
+  readonly theme?: Theme | undefined
   readonly edition: Edition
 }
 
-export function Footer({ data, edition }: Props) {
+export function Footer({ data, edition, theme }: Props) {
   return (
     <footer className="colophon">
       <p>
@@ -16,7 +19,8 @@ export function Footer({ data, edition }: Props) {
         measurements it describes is an assumption, not a forecast.
       </p>
       <p>
-        Longhence {edition.version}, engine {edition.engine}. MIT licence. <a href="/method">Methods and sources</a>
+        Longhence {edition.version}, engine {edition.engine}. MIT licence.{' '}
+        <a href={theme ? `/method?theme=${theme}` : '/method'}>Methods and sources</a>
         {data && (
           <>
             {' '}

@@ -14,7 +14,13 @@ export function Sentence({ text }: { readonly text: string }) {
 function Scripts({ markup, plain }: { readonly markup: string; readonly plain: (text: string) => ReactNode }) {
   return runsOf(markup).map(({ kind, text }, i) => {
     const key = `${i}${text}`
-    if (kind === 'sub') return <sub key={key}>{text}</sub>
+    if (kind === 'sub') {
+      return (
+        <sub key={key} className={text === '*' ? 'star' : undefined}>
+          {text}
+        </sub>
+      )
+    }
     return kind === 'sup' ? <sup key={key}>{text}</sup> : <Fragment key={key}>{plain(text)}</Fragment>
   })
 }

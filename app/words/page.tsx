@@ -21,14 +21,16 @@ export const metadata: Metadata = {
 
 /** The words of scenarios, complete without scripts. */
 export default async function Page({ searchParams }: Props) {
-  const { s, theme } = await searchParams
+  const { s, theme: asked } = await searchParams
+  const theme = THEMES.find((one) => one === asked)
+  const kept = theme ? [`theme=${theme}`] : []
   const { solutions, problems } = opened(s === undefined ? [] : [s].flat())
   const query = linkQuery(solutions.map(({ scenario }) => scenario))
   const edition = { version: HOME.version, engine: ENGINE, link: `${HOME.base}/?${query}&engine=${ENGINE}` }
   return (
-    <div className="page" data-theme={THEMES.find((one) => one === theme)}>
+    <div className="page" data-theme={theme}>
       <header className="masthead">
-        <a className="brand" href="/">
+        <a className="brand" href={theme ? `/?theme=${theme}` : '/'}>
           Longhence
         </a>
       </header>
@@ -38,11 +40,11 @@ export default async function Page({ searchParams }: Props) {
           <p role="alert">The link could not be read as written; these are the words of what could.</p>
         )}
         <p>
-          <a href={`/?${query}`}>Open in the explorer</a>
+          <a href={`/?${[query, ...kept].join('&')}`}>Open in the explorer</a>
         </p>
         <TakeAwayWords words={wordsOf(solutions, edition)} level={2} />
       </main>
-      <Footer data={null} edition={EDITION} />
+      <Footer data={null} edition={EDITION} theme={theme} />
     </div>
   )
 }

@@ -19,7 +19,7 @@ function speedingUp(last: Change | undefined): string {
 
 function slowingDown(last: Change | undefined, changes: readonly Change[]): string | null {
   const next = changes.find((one) => one.kind === 'acceleration-start' && one.time > 0)
-  if (next !== undefined) return `slows down today, accelerates from ${duration(next.time)} on`
+  if (next !== undefined) return `slows down today, begins to accelerate in ${duration(next.time)}`
   return last === undefined ? null : `stopped accelerating ${duration(-last.time)} ago`
 }
 

@@ -4,7 +4,19 @@
  */
 
 export interface MathNode {
-  readonly tag: 'mrow' | 'mi' | 'mn' | 'mo' | 'mtext' | 'mfrac' | 'msqrt' | 'msub' | 'msup' | 'msubsup' | 'mspace'
+  readonly tag:
+    | 'mrow'
+    | 'mi'
+    | 'mn'
+    | 'mo'
+    | 'mtext'
+    | 'mfrac'
+    | 'msqrt'
+    | 'msub'
+    | 'msup'
+    | 'msubsup'
+    | 'mover'
+    | 'mspace'
   readonly attributes?: Readonly<Record<string, string>>
   readonly children: readonly (MathNode | string)[]
 }
@@ -12,6 +24,7 @@ export interface MathNode {
 const FUNCTIONS: ReadonlySet<string> = new Set(['sin', 'sinh', 'ln', 'log', 'lim', 'cos', 'exp'])
 const UPRIGHT: ReadonlySet<string> = new Set(['Mpc'])
 const SUPERSCRIPTS: Readonly<Record<string, string>> = { '²': '2', '³': '3', '″': '″', '′': '′' }
+const DOTS: Readonly<Record<string, string>> = { '\u0307': '˙', '\u0308': '¨' }
 const BRACKETS: Readonly<Record<string, string>> = { '(': ')', '[': ']', '|': '|' }
 
 interface Token {
@@ -42,6 +55,13 @@ interface Item {
   readonly apart: boolean
   /** What stands between its brackets, where it has brackets. */
   readonly inside?: MathNode
+}
+
+/** About the name of a function that has no brackets. */
+const THIN: Item = {
+  node: { tag: 'mspace', attributes: { width: '0.17em' }, children: [] },
+  operand: false,
+  apart: false,
 }
 
 const node = (tag: MathNode['tag'], ...children: (MathNode | string)[]): MathNode => ({ tag, children })
@@ -83,7 +103,12 @@ function rowUntil(reader: Reader, close: string | null): Item[] {
     if (token.kind === 'slash') {
       reader.at++
       items.push(fraction(items, reader, token))
-    } else items.push(itemOf(reader, items.at(-1)))
+    } else {
+      const named = FUNCTIONS.has(token.text)
+      if (named && items.at(-1)?.operand) items.push(THIN)
+      items.push(itemOf(reader, items.at(-1)))
+      if (named && reader.tokens[reader.at]?.kind === 'letter') items.push(THIN)
+    }
   }
 }
 
@@ -126,7 +151,7 @@ function baseOf(reader: Reader, token: Token, before: Item | undefined): Item {
     return { node: node('msqrt', content), operand: true, apart }
   }
   if (kind === 'number') return plain('mn', true)
-  if (kind === 'letter') return alone(reader, before) ? wordItem(token) : plain('mi', true)
+  if (kind === 'letter') return alone(reader, before) ? wordItem(token) : { node: letterOf(text), operand: true, apart }
   if (kind === 'word') {
     if (FUNCTIONS.has(text)) return { ...plain('mi', false), operand: false }
     return UPRIGHT.has(text) ? upright(token) : wordItem(token)
@@ -146,6 +171,19 @@ function baseOf(reader: Reader, token: Token, before: Item | undefined): Item {
 
 const isBar = (item: Item): boolean =>
   item.node.children.some((one) => typeof one !== 'string' && one.children[0] === '|')
+
+/** Dots of a derivative stand over the slanted letter: one letter with its dots would be set upright. */
+function letterOf(text: string): MathNode {
+  const [letter = text, dots] = text.normalize('NFD')
+  const over = DOTS[dots ?? '']
+  const accent: Pick<MathNode, 'tag' | 'attributes'> = { tag: 'mo', attributes: { stretchy: 'false' } }
+  if (over === undefined) return node('mi', text)
+  return {
+    tag: 'mover',
+    attributes: { accent: 'true' },
+    children: [node('mi', letter), { ...accent, children: [over] }],
+  }
+}
 
 /** The article between two words. */
 function alone({ tokens, at }: Reader, before: Item | undefined): boolean {
@@ -168,8 +206,12 @@ const wordItem = ({ text, apart }: Token): Item => ({
 function bracketed(reader: Reader, { text, apart }: Token): Item {
   const close = BRACKETS[text] ?? ')'
   const inside = inRow(rowUntil(reader, close))
-  const fence = (sign: string): MathNode => ({ tag: 'mo', attributes: { fence: 'true' }, children: [sign] })
-  return { node: node('mrow', fence(text), inside, fence(close)), operand: true, apart, inside }
+  const fence = (sign: string, form: 'prefix' | 'postfix'): MathNode => ({
+    tag: 'mo',
+    attributes: { fence: 'true', form },
+    children: [sign],
+  })
+  return { node: node('mrow', fence(text, 'prefix'), inside, fence(close, 'postfix')), operand: true, apart, inside }
 }
 
 /** Subscripts and superscripts that follow at once. */
@@ -212,6 +254,8 @@ export function formulaText({ tag, children }: MathNode): string {
   switch (tag) {
     case 'mfrac':
       return `{${parts[0]}|${parts[1]}}`
+    case 'mover':
+      return `${parts[0]}${Object.keys(DOTS).find((dots) => DOTS[dots] === parts[1]) ?? parts[1]}`.normalize('NFC')
     case 'msqrt':
       return `√{${parts[0]}}`
     case 'msub':

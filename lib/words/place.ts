@@ -76,7 +76,18 @@ export type RulerPlace = Pick<Place, (typeof RULER_KEYS)[number]>
 /** Reads a place leniently: whatever is not understood is what would hold anyway. `focus` counts from 1 in addresses. */
 export function readPlace(textOf: (key: string) => string | null | undefined, count: number): Place {
   const entries = (KEYS as readonly Key[]).map(({ key, read }) => [key, read(textOf(key) ?? '', count)])
-  return Object.fromEntries(entries) as unknown as Place
+  return ascending(Object.fromEntries(entries) as unknown as Place)
+}
+
+/** A range may be given from either end. */
+function ascending(place: Place): Place {
+  const [from, to] = inOrder(place.from, place.to)
+  const [left, right] = inOrder(place.left, place.right)
+  return { ...place, from, to, left, right }
+}
+
+function inOrder(one: number | null, other: number | null): readonly [number | null, number | null] {
+  return one !== null && other !== null && one > other ? [other, one] : [one, other]
 }
 
 /** Where nothing but the scenarios is said. */

@@ -66,7 +66,7 @@ describe('a verdict', () => {
 
   it.each([
     [{ deceleration: -1 }, [], 'has accelerated throughout'],
-    [{ deceleration: 0.2 }, [['acceleration-start', 5]], 'slows down today, accelerates from 5.00 Gyr on'],
+    [{ deceleration: 0.2 }, [['acceleration-start', 5]], 'slows down today, begins to accelerate in 5.00 Gyr'],
     [
       { deceleration: 0.2 },
       [
