@@ -24,14 +24,15 @@ export function drawAxes(chart: Axes, plot: Plot, frame: Frame, inRow: boolean):
     ...upright(chart.y, plot, frame, size),
     ...chart.references.flatMap((one) => reference(one, plot, frame)),
     ...level(chart, plot, frame, size),
-    svg(
-      'text',
-      { x: frame.compact ? 0 : plot.left, y: px(plot.top - 0.55 * frame.type), 'font-size': size, class: 'axis' },
-      ...titleOf(chart.y, size),
-    ),
+    svg('text', { ...headOf(frame, plot), 'font-size': size, class: 'axis' }, ...titleOf(chart.y, size)),
     title(chart.x, plot, frame, size, inRow),
     ...today(chart.now, chart.x, plot),
   ]
+}
+
+/** Where the title of the vertical axis begins: on a phone above its ticks, and clear of the highest of them. */
+function headOf({ compact, type }: Frame, plot: Plot): { readonly x: number; readonly y: number } {
+  return compact ? { x: 0, y: px(plot.top - 0.85 * type) } : { x: plot.left, y: px(plot.top - 0.55 * type) }
 }
 
 /** Ticks of the vertical axis, also for those who ask how wide they are. */
