@@ -108,8 +108,21 @@ export function within(axis: Axis, at: number): boolean {
   return part >= 0 && part <= 1
 }
 
+/** Size of the words at a line of reference, in units of the type. */
+const REFERENCE_SIZE = 0.8
+
+/** Where words stand at lines of reference: at the right, upon the line. */
+export function referenceBoxes({ references }: Pick<Chart, 'references'>, plot: Plot, { type }: Frame) {
+  const size = REFERENCE_SIZE * type
+  const named = references.filter(({ axis, label }) => axis === 'y' && label !== '')
+  return named.map(({ at, label }) => {
+    const width = textWidth(label, size)
+    return { x: plot.right - 0.4 * type - width, y: plot.y(at) - 0.35 * type - size, width, height: size }
+  })
+}
+
 function reference({ axis, at, label }: Reference, plot: Plot, { type }: Frame): SvgNode[] {
-  const size = px(0.8 * type)
+  const size = px(REFERENCE_SIZE * type)
   if (axis === 'x') {
     const x = plot.x(at)
     return [svg('line', { x1: x, x2: x, y1: plot.top, y2: plot.bottom, class: 'reference' })]

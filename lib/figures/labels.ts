@@ -1,5 +1,6 @@
 /** Labels at the ends of curves: above the plot, beside it, or next to a mark within it, never one over another. */
 import type { Chart, Curve } from './chart'
+import { referenceBoxes } from './draw-axes'
 import { alongLine, type Box, clearest, obstaclesOf, type Spot } from './obstacles'
 import type { Frame, Plot } from './plot'
 import type { Point } from './sample'
@@ -40,7 +41,7 @@ export function labelWidth(label: Pick<Label, 'name' | 'note'>, type: number): n
   return Math.max(textWidth(label.name, type), textWidth(label.note, type * NOTE_SIZE))
 }
 
-type Drawn = Pick<Chart, 'curves' | 'spots' | 'now' | 'x'>
+type Drawn = Pick<Chart, 'curves' | 'spots' | 'now' | 'x' | 'references'>
 
 /** `free` is where the row above the plot begins, right of the axis title. */
 export function placeLabels(chart: Drawn, plot: Plot, frame: Frame, free: number): readonly Label[] {
@@ -52,7 +53,11 @@ export function placeLabels(chart: Drawn, plot: Plot, frame: Frame, free: number
     ...chart.curves.flatMap((curve) => insideWishes(curve, plot, frame)),
   ]
   const spots = inside.length > 0 ? obstaclesOf(chart, plot) : []
-  for (const wish of inside) placed.push(placeInside(wish, spots, plot, frame, placed))
+  const fixed = referenceBoxes(chart, plot, frame)
+  for (const wish of inside) {
+    const taken = [...fixed, ...placed.map((label) => boxOf(label, frame.type))]
+    placed.push(placeInside(wish, spots, plot, frame, taken))
+  }
   return placed
 }
 
@@ -168,10 +173,9 @@ function spotWishes({ spots }: Drawn, plot: Plot, frame: Frame): InsideWish[] {
   })
 }
 
-function placeInside(wish: InsideWish, spots: readonly Spot[], plot: Plot, frame: Frame, placed: readonly Label[]) {
+function placeInside(wish: InsideWish, spots: readonly Spot[], plot: Plot, frame: Frame, taken: readonly Box[]): Label {
   const { tone, name, note } = wish
   const places = wish.places(labelWidth(wish, frame.type), labelHeight(wish, frame.type))
-  const taken = placed.map((label) => boxOf(label, frame.type))
   const best = clearest(places, spots, taken, { ...plot, right: frame.width })
   const anchor: Label['anchor'] = best.x + best.width / 2 < best.of ? 'end' : 'start'
   const leader = wish.from ? leaderOf(wish.from, best, frame.type) : null

@@ -172,17 +172,12 @@ function baseOf(reader: Reader, token: Token, before: Item | undefined): Item {
 const isBar = (item: Item): boolean =>
   item.node.children.some((one) => typeof one !== 'string' && one.children[0] === '|')
 
-/** Dots of a derivative stand over the slanted letter: one letter with its dots would be set upright. */
+/** Dots of a derivative stand over the slanted letter: one letter with its dots would be set upright. No accent, which touches it. */
 function letterOf(text: string): MathNode {
   const [letter = text, dots] = text.normalize('NFD')
   const over = DOTS[dots ?? '']
-  const accent: Pick<MathNode, 'tag' | 'attributes'> = { tag: 'mo', attributes: { stretchy: 'false' } }
   if (over === undefined) return node('mi', text)
-  return {
-    tag: 'mover',
-    attributes: { accent: 'true' },
-    children: [node('mi', letter), { ...accent, children: [over] }],
-  }
+  return node('mover', node('mi', letter), { tag: 'mo', attributes: { stretchy: 'false' }, children: [over] })
 }
 
 /** The article between two words. */
