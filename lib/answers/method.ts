@@ -130,7 +130,9 @@ function allowedText(parameter: Parameter | OwnParameter): string {
   if (parameter.kind === 'text') return `${parameter.least} to ${parameter.most} characters`
   const own = parameter as Parameter
   if (own.kind !== 'choice') return unitText(allowedBy(own)).replaceAll('-', '−')
-  return own.choices.map(({ value, label }) => (value === label ? value : `${value} (${label})`)).join(', ')
+  const told = own.choices.map(({ value, label }) => (value === label ? value : `${value} (${label})`))
+  // Exponents in brackets, in the markup of labels.
+  return told.join(', ').replaceAll(/\^\(([^()]*)\)/g, '^{$1}')
 }
 
 function defaultText(parameter: Parameter | OwnParameter): string {
