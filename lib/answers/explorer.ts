@@ -12,6 +12,7 @@ import { type MomentWords, momentWords } from '../words/moments'
 import { type Place, readPlace } from '../words/place'
 import { joined } from '../words/sentence'
 import { type Verdict, verdictOf } from '../words/verdict'
+import { lately } from './lately'
 import { type LongPanel, longPanel } from './long-panel'
 import { type Opened, opened, solutionOf } from './opened'
 import { type Panel, panelOf, settled } from './panel'
@@ -88,6 +89,11 @@ function named(solution: Solution, slot: number): Solution {
   return { ...solution, label: nameOf(solution.scenario, slot) }
 }
 
+const nearestTo = lately(
+  ({ code }: Solution) => code,
+  ({ scenario }) => nearestOf(scenario),
+)
+
 function told(
   solution: Solution,
   slot: number,
@@ -96,7 +102,7 @@ function told(
 ): Omit<ScenarioView, keyof Tab> {
   const other = otherBeyond(solution.scenario)
   return {
-    verdict: verdictOf(solution, other && solutionOf(other), nearestOf(solution.scenario)),
+    verdict: verdictOf(solution, other && solutionOf(other), nearestTo(solution)),
     because: solution.end.because,
     proven: solution.end.proven,
     notices: solution.notices.map(({ message, code }) => ({

@@ -4,8 +4,10 @@ import { contentsAt } from '../figures/contents'
 import { longView } from '../figures/long-view'
 import { type Shown, shownOf } from '../figures/picture'
 import { LONG_FRAMES } from '../figures/plot'
+import { remembered } from '../figures/remembered'
 import type { Entry } from '../figures/window'
 import { type Solution, scalesAt } from '../solve'
+import { lately } from './lately'
 import { framesOf, linker, type Option, type Subject, type Zoom, zoomOf } from './panel'
 
 export interface LongPanel {
@@ -37,10 +39,16 @@ export function longPanel(subject: Subject): LongPanel {
   }
 }
 
-function drawable(solution: Solution): Entry<Solution> {
-  return {
-    solution,
-    scales: (times) => scalesAt(solution, times),
-    contents: (time) => contentsAt(solution, time),
-  }
-}
+const drawable = (solution: Solution): Entry<Solution> => ({ solution, ...seen(solution) })
+
+/** A figure asks for the same times again while it is dragged about. */
+const seen = lately(
+  ({ code }: Solution) => code,
+  (solution) => {
+    const scaleAt = remembered((time) => scalesAt(solution, [time])[0] ?? null)
+    return {
+      scales: (times: readonly number[]) => times.map(scaleAt),
+      contents: remembered((time) => contentsAt(solution, time)),
+    }
+  },
+)

@@ -5,6 +5,7 @@ import { readQuery } from '../scenario/query'
 import type { Problem, Reading, Scenario } from '../scenario/scenario'
 import { writeScenario } from '../scenario/write'
 import { type Solution, solve } from '../solve'
+import { lately } from './lately'
 import { isSane } from './sane'
 
 export type Pairs = Iterable<readonly [string, string]>
@@ -37,11 +38,11 @@ export function solved<T>(scenarios: readonly Scenario[], use: (solution: Soluti
   return problems.length > 0 ? { ok: false, problems } : { ok: true, value }
 }
 
-function solvedSanely(scenario: Scenario): Solution {
+const solvedSanely = lately(writeScenario, (scenario: Scenario): Solution => {
   const solution = solve(scenario)
   if (!isSane(solution)) throw new RangeError('its numbers leave the range of floating-point numbers')
   return solution
-}
+})
 
 function unsolved(scenario: Scenario, index: number, error: unknown): Problem {
   const code = writeScenario(scenario)

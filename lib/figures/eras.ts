@@ -1,6 +1,5 @@
 /** Which component dominates when, and when the expansion accelerates: stretches of time within a window. */
 import type { Contents, Era } from './contents'
-import { remembered } from './remembered'
 import { type Range, valueAt } from './scale'
 
 export interface Stretch<T> {
@@ -19,8 +18,7 @@ const SAMPLES = 480
 /** Halvings until a boundary is finer than a hundredth of a pixel. */
 const HALVINGS = 12
 
-export function erasOf(asked: (time: number) => Contents | null, x: Range): Eras {
-  const contents = remembered(asked)
+export function erasOf(contents: (time: number) => Contents | null, x: Range): Eras {
   const times = Array.from({ length: SAMPLES + 1 }, (_, i) => valueAt(x, i / SAMPLES))
   const dominant = stretches(times, (time) => contents(time)?.dominant ?? null)
   const accelerating = stretches(times, (time) => (contents(time)?.accelerating ? true : null))

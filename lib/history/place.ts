@@ -81,15 +81,29 @@ export function placeElapsed(arm: Arm, clock: Clock, value: number): Place | nul
     return placeInTail(arm, clock, (tail, D) => elapsedIn(tail, D) - (value - sums.fromToday[panel]))
   }
   if (panel === 0) {
-    const near = variableNear(arm)
+    const { s, [clock]: reached } = nearOf(arm)
     const direct = (x: number) => fromToday(placeOf(arm, 0, x), clock) - value
-    if (direct(near) > 0) return placeOf(arm, 0, brent(direct, arm.panels[0].from, near))
+    if (reached > value) return placeOf(arm, 0, brent(direct, arm.panels[0].from, s))
   }
   return placeInPanel(arm, panel, clock, value - sums.fromToday[panel])
 }
 
-/** Just inside the part of the first panel where integrals from today are taken directly. */
-const variableNear = (arm: Arm): number => arm.panels[0].zone.variableAt(0.99 * NEAR_TODAY * arm.edges[1])
+interface Near extends Readonly<Record<Clock, number>> {
+  readonly s: number
+}
+
+const nearPlaces = new WeakMap<Arm, Near>()
+
+/** Just inside the part of the first panel where integrals from today are taken directly, and what they are there. */
+function nearOf(arm: Arm): Near {
+  const known = nearPlaces.get(arm)
+  if (known) return known
+  const s = arm.panels[0].zone.variableAt(0.99 * NEAR_TODAY * arm.edges[1])
+  const place = placeOf(arm, 0, s)
+  const near = { s, time: fromToday(place, 'time'), conformal: fromToday(place, 'conformal') }
+  nearPlaces.set(arm, near)
+  return near
+}
 
 /** Where the integral to the end has this value, which keeps its relative accuracy near the end; null where there is none. */
 export function placeRemaining(arm: Arm, clock: Clock, value: number): Place | null {

@@ -224,22 +224,22 @@ function slowTail(N: number, direction: Direction, density: number, law: Logarit
 /** ∫ from the beginning of the tail out to D. */
 export function elapsedIn(integral: TailIntegral, D: number): number {
   if (integral.kind === 'slow') return slowElapsed(integral, D)
-  const term = (kappa: number) => (kappa === 0 ? D : -Math.expm1(-kappa * D) / kappa)
-  return (
-    integral.scale *
-    integral.terms.reduce((sum, { size, rate }) => sum + size * term(integral.kappa + rate), term(integral.kappa))
-  )
+  const { kappa, terms } = integral
+  let sum = elapsedTerm(kappa, D)
+  for (const { size, rate } of terms) sum += size * elapsedTerm(kappa + rate, D)
+  return integral.scale * sum
 }
+
+const elapsedTerm = (kappa: number, D: number): number => (kappa === 0 ? D : -Math.expm1(-kappa * D) / kappa)
 
 /** ∫ from D out to infinity; Infinity where it diverges. */
 export function remainingIn(integral: TailIntegral, D: number): number {
   if (integral.kind === 'slow') return slowRemaining(integral, D)
   if (integral.kappa <= 0) return Number.POSITIVE_INFINITY
-  const term = (kappa: number) => Math.exp(-kappa * D) / kappa
-  return (
-    integral.scale *
-    integral.terms.reduce((sum, { size, rate }) => sum + size * term(integral.kappa + rate), term(integral.kappa))
-  )
+  const { kappa, terms } = integral
+  let sum = Math.exp(-kappa * D) / kappa
+  for (const { size, rate } of terms) sum += (size * Math.exp(-(kappa + rate) * D)) / (kappa + rate)
+  return integral.scale * sum
 }
 
 const logSlow =
