@@ -1,5 +1,5 @@
 /** What this browser computes is what the server answers. */
-import { expect, test } from '@playwright/test'
+import { type APIRequestContext, expect, type Page, test } from '@playwright/test'
 import fc from 'fast-check'
 import { open, slider } from './live'
 
@@ -26,7 +26,20 @@ const code = fc
   .tuple(between(50, 90), between(0.05, 1.2), between(-0.3, 0.3), fc.constantFrom('', ',masses:0', ',cmb:0'), law)
   .map(([h0, matter, k, light, eos]) => `h0:${h0},matter:${matter},curvature:${k}${light}${eos}`)
 
-test('the worker and the server agree to the last digit', async ({ page, request }) => {
+type Route = '/api/explorer' | '/api/history'
+
+test('what is shown agrees to the last digit', async ({ page, request }) => {
+  await agree(page, request, '/api/explorer', asShown)
+})
+
+test('all numbers of whole histories agree to 1e-13', async ({ page, request }) => {
+  await agree(page, request, '/api/history', (one, other) => far(one, other, 1e-13))
+})
+
+/** Numbers that are not the same. */
+type Unlike = (one: number, other: number) => boolean
+
+async function agree(page: Page, request: APIRequestContext, route: Route, unlike: Unlike): Promise<void> {
   test.setTimeout(120_000 + 200 * COUNT)
   await page.addInitScript(() => {
     const Plain = window.Worker
@@ -46,22 +59,22 @@ test('the worker and the server agree to the last digit', async ({ page, request
   let compared = 0
   for (let i = 0; i < codes.length; i += TOGETHER) {
     const questions = codes.slice(i, i + TOGETHER).map((one) => new URLSearchParams([['s', one]]).toString())
-    const here = await page.evaluate(compute, questions)
+    const here = await page.evaluate(compute, { route, questions })
     const there = await Promise.all(
-      questions.map(async (one) => (await request.get(`/api/explorer?${one}`, { maxRetries: 2 })).text()),
+      questions.map(async (one) => (await request.get(`${route}?${one}`, { maxRetries: 2 })).text()),
     )
     questions.forEach((question, k) => {
-      const found = differences(JSON.parse(here[k] ?? 'null'), JSON.parse(there[k] ?? 'null'))
+      const found = differences(JSON.parse(here[k] ?? 'null'), JSON.parse(there[k] ?? 'null'), unlike)
       different.push(...found.map((one) => `${question} ${one}`.slice(0, 300)))
       compared++
     })
   }
   expect(different).toEqual([])
   expect(compared).toBe(COUNT)
-})
+}
 
 /** In the page. The worker was made by the page itself. */
-async function compute(questions: readonly string[]) {
+async function compute({ route, questions }: { readonly route: Route; readonly questions: readonly string[] }) {
   const { worker } = window as unknown as { worker: Worker }
   const answers: (string | null)[] = []
   for (const question of questions) {
@@ -73,28 +86,31 @@ async function compute(questions: readonly string[]) {
           resolve(data.text)
         }
         worker.addEventListener('message', heard)
-        worker.postMessage({ route: '/api/explorer', asked: question })
+        worker.postMessage({ route, asked: question })
       }),
     )
   }
   return answers
 }
 
-/**
- * Where two answers differ. Texts, and the numbers in drawings, have to be equal: they are what is shown. Numbers for cursors
- * have seven digits, and two that differ by 1e-13 may be rounded to neighbours.
- */
-function differences(one: unknown, other: unknown, path = ''): string[] {
-  if (typeof one === 'number' && typeof other === 'number') {
-    const far = Math.abs(one - other) > 1.01e-6 * Math.max(Math.abs(one), Math.abs(other))
-    return far ? [`${path}: ${one} ${other}`] : []
-  }
+/** Where two answers differ. Texts, and the numbers in drawings, have to be equal: they are what is shown. */
+function differences(one: unknown, other: unknown, unlike: Unlike, path = ''): string[] {
+  if (typeof one === 'number' && typeof other === 'number')
+    return unlike(one, other) ? [`${path}: ${one} ${other}`] : []
   if (typeof one !== 'object' || typeof other !== 'object' || one === null || other === null) {
     return one === other || sameDrawing(one, other) ? [] : [`${path}: ${one} ${other}`]
   }
   const keys = new Set([...Object.keys(one), ...Object.keys(other)])
-  return [...keys].flatMap((key) => differences(Reflect.get(one, key), Reflect.get(other, key), `${path}.${key}`))
+  return [...keys].flatMap((key) =>
+    differences(Reflect.get(one, key), Reflect.get(other, key), unlike, `${path}.${key}`),
+  )
 }
+
+const far = (one: number, other: number, part: number) =>
+  Math.abs(one - other) > part * Math.max(Math.abs(one), Math.abs(other))
+
+/** Numbers for cursors have seven digits, and two that differ by 1e-13 may be rounded to neighbours. */
+const asShown: Unlike = (one, other) => far(one, other, 1.01e-6)
 
 /** Places in drawings have two decimals: they may be rounded to neighbours. */
 function sameDrawing(one: unknown, other: unknown): boolean {

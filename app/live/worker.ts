@@ -1,12 +1,18 @@
 /** In a thread of its own: computes what the server would answer, by the same code. */
 import { askExplorer } from '../../lib/answers/ask-explorer'
 import { askRuler } from '../../lib/answers/ask-ruler'
+import { askHistory } from '../../lib/answers/history'
 import type { Pairs, Question as Read } from '../../lib/answers/question'
 import type { Home } from '../../lib/answers/table'
 import { askWords } from '../../lib/answers/words'
 import type { Reading } from '../../lib/scenario/scenario'
 
-const ROUTES = { '/api/explorer': askExplorer, '/api/ruler': askRuler, '/api/words': askWords }
+const ROUTES = {
+  '/api/explorer': askExplorer,
+  '/api/history': askHistory,
+  '/api/ruler': askRuler,
+  '/api/words': askWords,
+}
 
 export interface Question {
   readonly route: keyof typeof ROUTES

@@ -107,7 +107,7 @@ export const barotropic: Family = {
   key: 'barotropic',
   label: 'pressure follows density',
   formula: 'p = −ρ − A ρ_0 (ρ/ρ_0)^α',
-  meaning: 'A excess pressure that hangs on the density alone: the density grows for A > 0 and falls for A < 0.',
+  meaning: 'An excess pressure that hangs on the density alone: the density grows for A > 0 and falls for A < 0.',
   source:
     'Nojiri, Odintsov & Tsujikawa 2005, Phys. Rev. D 71, 063004; Frampton, Ludwick & Scherrer 2011, Phys. Rev. D 84, 063003',
   caution: 'Made to list what endings are possible (rip, little rip, sudden singularity), not drawn from measurements.',

@@ -235,7 +235,7 @@ const ALL: readonly MeasureQuantity[] = [
     unit: '',
     digits: fixed(0),
     meaning: 'Redshift at which cold matter equals photons and all neutrinos.',
-    formula: 'ρ_c = ρ_γ + ρ_ν',
+    formula: 'ρ_{cb} = ρ_γ + ρ_ν, ρ_{cb} that of cold matter',
     source: FRIEDMANN,
     accuracy: ROOT,
     value: (subject) => {
@@ -254,7 +254,7 @@ const ALL: readonly MeasureQuantity[] = [
     unit: '',
     digits: fixed(3),
     meaning: 'Redshift at which cold matter equals dark energy.',
-    formula: 'ρ_c = ρ_DE',
+    formula: 'ρ_{cb} = ρ_{DE}, ρ_{cb} that of cold matter',
     source: FRIEDMANN,
     accuracy: ROOT,
     value: (subject) => {

@@ -27,7 +27,7 @@ export const MOMENT_KINDS: Readonly<Record<MomentKind, MomentEntry>> = {
   'matter-radiation-equality': {
     symbol: 't_{eq}',
     label: 'matter equals radiation',
-    formula: 'ρ_c = ρ_γ + ρ_ν',
+    formula: 'ρ_{cb} = ρ_γ + ρ_ν, ρ_{cb} that of cold matter',
     meaning: 'When cold matter is as dense as photons and all neutrinos together.',
     accuracy: ROOT,
     source: FRIEDMANN,
@@ -67,7 +67,7 @@ export const MOMENT_KINDS: Readonly<Record<MomentKind, MomentEntry>> = {
   'matter-dark-equality': {
     symbol: 't_{mΛ}',
     label: 'matter equals dark energy',
-    formula: 'ρ_c = ρ_{DE}',
+    formula: 'ρ_{cb} = ρ_{DE}, ρ_{cb} that of cold matter',
     meaning: 'When cold matter is as dense as dark energy.',
     accuracy: ROOT,
     source: FRIEDMANN,
