@@ -48,7 +48,7 @@ test('three futures are compared on a slide, and whoever gets the link sees the 
   await option(page, 'As', 'ratio to Steady light').click()
   await arrived(page, /compare=ratio/)
   await expect(caption(page)).toHaveText(
-    'Luminosity distance, as a ratio to Steady light against redshift, logarithmic.',
+    'Luminosity distance DL, as a ratio to Steady light, against redshift, logarithmic.',
   )
   for (const name of ['Steady light', 'Fading light', 'Gathering light'])
     await expect(picture(page).getByText(name, { exact: true })).toBeVisible()

@@ -111,7 +111,7 @@ function Parameter({ parameter }: { readonly parameter: RouteParameter }) {
             <a href="#code">Scenario codes</a>, up to six times; the demo where there is none.
           </>
         ) : (
-          description
+          description.split('`').map((part, i) => (i % 2 === 1 ? <code key={part}>{part}</code> : part))
         )}
         {choices !== '' && ` One of ${choices}.`}
         {schema.default !== undefined && ` Default: ${schema.default}.`}

@@ -4,6 +4,7 @@ import { drawChart } from '../../lib/figures/draw-chart'
 import { type Frame, LONG_FRAMES, VIEW_FRAMES } from '../../lib/figures/plot'
 import { serialize } from '../../lib/figures/svg'
 import { placeKeys, THEMES } from '../../lib/words/place'
+import { Sentence } from '../ui/symbol'
 
 interface Props {
   readonly searchParams: Promise<Readonly<Record<string, string | string[] | undefined>>>
@@ -65,7 +66,9 @@ function Plates({ exhibit: { place, chart }, id, number }: PlatesProps) {
           return <div key={theme} className={`plate ${theme}`} dangerouslySetInnerHTML={{ __html: drawing }} />
         })}
       </div>
-      <p>{chart.caption}</p>
+      <p>
+        <Sentence text={chart.caption} />
+      </p>
     </section>
   )
 }

@@ -105,9 +105,10 @@ function Group({ group, editing, live, children }: GroupProps) {
       </details>
     )
   }
+  const isSaid = fields.length === 1 && fields[0]?.label === title.toLowerCase()
   return (
     <fieldset className="group">
-      <legend>{title}</legend>
+      <legend className={isSaid ? 'spoken' : undefined}>{title}</legend>
       {rows}
       {children}
       {family && (

@@ -8,7 +8,7 @@ export const Measures = memo(function Measures({ view }: { readonly view: Explor
   return (
     <section aria-labelledby="measures">
       <h2 id="measures" className="heading">
-        Measures today of {view.scenarios[view.place.focus]?.name}
+        Measures of {view.scenarios[view.place.focus]?.name} today
       </h2>
       <table className="measures">
         <thead className="spoken">

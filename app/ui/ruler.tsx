@@ -27,12 +27,15 @@ interface Props {
   readonly state?: string | null
 }
 
+/** So many columns have room beside the form. */
+const BESIDE = 3
+
 /** An epoch in any variable, and what is read there in every scenario. */
 export function Ruler({ desk, view, shelf, hand, state = null }: Props) {
   const ask = rulerAskOf(desk.place)
   const own: readonly string[] = RULER_KEYS
   return (
-    <section className="ruler" aria-labelledby="ruler">
+    <section className={view.scenarios.length > BESIDE ? 'ruler many' : 'ruler'} aria-labelledby="ruler">
       <h2 id="ruler" className="heading">
         Ruler
       </h2>

@@ -134,13 +134,13 @@ function axes({ show, by }: Asked, link: Link): Choice[] {
   return options.length > 1 ? [{ label: 'Against', options }] : []
 }
 
-const COMPARED = { value: 'values', ratio: 'ratio', difference: 'difference' } as const
+const COMPARED = { value: 'values', ratio: 'ratio to', difference: 'difference from' } as const
 
 function comparisons({ show, compare, solutions, focus }: Asked, link: Link): Choice[] {
   if (solutions.length < 2 || show.compare.length === 0) return []
   const name = solutions[focus]?.label ?? ''
   const options = (['value', ...show.compare] as const).map((key) => ({
-    word: key === 'value' ? COMPARED.value : `${COMPARED[key]} to ${name}`,
+    word: key === 'value' ? COMPARED.value : `${COMPARED[key]} ${name}`,
     link: link({ compare: key }),
     chosen: key === compare,
   }))

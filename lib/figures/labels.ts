@@ -25,6 +25,8 @@ export const NAME_LINE = 1.2
 export const NOTE_LINE = 1.1
 export const NOTE_SIZE = 0.86
 const GAP = 0.9
+/** A line from the row above the plot to an end so far left of it would strike through the title of the axis. */
+const UNDER_TITLE = 3
 /** A phone has room for so much of a name. */
 const LONGEST_NAME = { wide: 13, compact: 6.5 }
 
@@ -45,12 +47,19 @@ type Drawn = Pick<Chart, 'curves' | 'spots' | 'now' | 'x' | 'references'>
 
 /** `free` is where the row above the plot begins, right of the axis title. */
 export function placeLabels(chart: Drawn, plot: Plot, frame: Frame, free: number): readonly Label[] {
-  const above = topLabels(chart.curves, plot, frame, free)
+  const ends = namedAbove(chart.curves, frame, free)
+  const below = ends.filter(({ finish }) => plot.x(finish?.at[0] ?? 0) < free - UNDER_TITLE * frame.type)
+  const above = topLabels(
+    ends.filter((curve) => !below.includes(curve)),
+    plot,
+    frame,
+    free,
+  )
   const beside = frame.compact ? [] : rightLabels(chart.curves, plot, frame)
   const placed = [...above, ...beside]
   const inside = [
     ...spotWishes(chart, plot, frame),
-    ...chart.curves.flatMap((curve) => insideWishes(curve, plot, frame)),
+    ...chart.curves.flatMap((curve) => insideWishes(curve, plot, frame, below.includes(curve))),
   ]
   const spots = inside.length > 0 ? obstaclesOf(chart, plot) : []
   const fixed = referenceBoxes(chart, plot, frame)
@@ -73,9 +82,8 @@ function roomAbove(ends: readonly Curve[], frame: Frame, free: number): number {
   return sharedRoom(widths, frame.width - free - ends.length * GAP * frame.type)
 }
 
-function topLabels(curves: readonly Curve[], plot: Plot, frame: Frame, free: number): Label[] {
+function topLabels(ends: readonly Curve[], plot: Plot, frame: Frame, free: number): Label[] {
   const { type } = frame
-  const ends = namedAbove(curves, frame, free)
   const room = roomAbove(ends, frame, free)
   const texts = ends.map((curve) => shortened(textsOf(curve, frame), room, type))
   const wishes = ends.map((curve, i) => ({
@@ -150,13 +158,16 @@ interface Place extends Box {
   readonly of: number
 }
 
-/** Ends within the plot, the line of a rip, and what is named along its way; on a phone also what leaves on the right. */
-function insideWishes(curve: Curve, plot: Plot, frame: Frame): InsideWish[] {
+/**
+ * Ends within the plot, the line of a rip, and what is named along its way; on a phone also what leaves on the right.
+ * `below`: it leaves at the top, where the title of the axis stands.
+ */
+function insideWishes(curve: Curve, plot: Plot, frame: Frame, below: boolean): InsideWish[] {
   const { finish, asymptote } = curve
   const [tone, texts] = [toneOf(curve), textsOf(curve, frame)]
   const wishes: InsideWish[] = []
   if (finish?.edge === 'along') wishes.push({ tone, ...texts, places: alongCurve(curve, plot, frame) })
-  else if (finish?.edge === 'inside' || (frame.compact && finish?.edge === 'right'))
+  else if (finish && (below || finish.edge === 'inside' || (frame.compact && finish.edge === 'right')))
     wishes.push({ tone, ...texts, places: besidePoint(finish.at, plot, frame) })
   if (asymptote !== null) {
     const places = besidePoint([asymptote.at, Number.POSITIVE_INFINITY], plot, frame)

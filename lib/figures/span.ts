@@ -7,6 +7,8 @@ const CUT = { low: 0.03, high: 0.95 }
 /** But not where the whole is hardly larger than the rest. */
 const HARDLY = 1.7
 const PAD = 0.06
+/** What varies by less in parts of itself does not vary. */
+const LEVEL = 1e-12
 /** What must be seen fills at least one part in so many. */
 const RUNAWAY = 8
 /** From here on what is positive everywhere begins at 0. */
@@ -37,7 +39,8 @@ function bulk(sorted: readonly number[], steady: readonly number[]): readonly [n
 }
 
 function padded([low, high]: readonly [number, number], least: number): Range {
-  const pad = high > low ? PAD * (high - low) : Math.max(1e-9, PAD * Math.abs(high))
+  const size = Math.max(Math.abs(low), Math.abs(high))
+  const pad = high - low > LEVEL * size ? PAD * (high - low) : PAD * size || 1
   if (least >= 0 && low < NEAR_ZERO * high) return linearRange(0, high + pad)
   return linearRange(low - pad, high + pad)
 }

@@ -1,6 +1,6 @@
 /** Where an axis has its marks, and what stands there. */
 import { ticks } from 'd3-array'
-import { fixed, powerOfTen, signed, significant } from '../words/number'
+import { fixed, powerOfTen, signed, significant, THIN } from '../words/number'
 import type { Axis } from './chart'
 import { fractionOf, type Range } from './scale'
 
@@ -54,15 +54,29 @@ function sparse(powers: readonly number[]): number[] {
 }
 
 function textOf(axis: Axis, now: number | null, count: number): (at: number) => string {
-  const decimals = axis.scaling === 'linear' ? decimalsOf(ticks(axis.from, axis.to, count)) : 0
+  const even = evenTextOf(axis, count)
   const plus = axis.quantity === 'time' || axis.quantity === 'conformal' ? signed : (text: string) => text
   return (at) => {
     if (at === now && (plus === signed || at === 1)) return 'now'
     if (at === 0) return '0'
     if (axis.scaling !== 'linear') return plus(shortest(at))
-    return plus(fixed(at, decimals))
+    return plus(even(at))
   }
 }
+
+/** All with the same decimals, and where some are too large for that in the same power of ten. */
+function evenTextOf(axis: Range, count: number): (at: number) => string {
+  if (axis.scaling !== 'linear') return shortest
+  const all = ticks(axis.from, axis.to, count)
+  const most = Math.max(...all.map(Math.abs))
+  if (most < LARGE) return (at) => fixed(at, decimalsOf(all))
+  const power = 10 ** Math.floor(Math.log10(most))
+  const decimals = decimalsOf(all.map((at) => at / power))
+  return (at) => `${fixed(at / power, decimals)}${THIN}×${THIN}${powerOfTen(power)}`
+}
+
+/** Digits of larger numbers are more than an axis has room for. */
+const LARGE = 1e6
 
 const shortest = (at: number): string => {
   const size = Math.abs(at)

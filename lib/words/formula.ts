@@ -203,10 +203,15 @@ function bracketed(reader: Reader, { text, apart }: Token): Item {
   const inside = inRow(rowUntil(reader, close))
   const fence = (sign: string, form: 'prefix' | 'postfix'): MathNode => ({
     tag: 'mo',
-    attributes: { fence: 'true', form },
+    attributes: { fence: 'true', form, ...(isTall(inside) ? {} : { stretchy: 'false' }) },
     children: [sign],
   })
   return { node: node('mrow', fence(text, 'prefix'), inside, fence(close, 'postfix')), operand: true, apart, inside }
+}
+
+/** Only brackets about these are stretched: a stretched bracket stands apart from what is within. */
+function isTall({ tag, children }: MathNode): boolean {
+  return tag === 'mfrac' || tag === 'msqrt' || children.some((one) => typeof one !== 'string' && isTall(one))
 }
 
 /** Subscripts and superscripts that follow at once. */

@@ -1,6 +1,6 @@
 /** A galaxy that is followed: where it is, and until when its light sets out to reach us. */
 import { significant, withUnit } from './number'
-import { duration } from './time'
+import { duration, isNow } from './time'
 
 export interface Followed {
   readonly redshift: number
@@ -24,6 +24,6 @@ export function galaxySentences({ redshift, distance, seen, last, always }: Foll
 }
 
 function when(time: number): string {
-  if (Math.abs(time) < 1e-9) return 'now'
+  if (isNow(time)) return 'now'
   return time < 0 ? `${duration(-time)} ago` : `${duration(time)} from now`
 }

@@ -20,6 +20,9 @@ export function duration(gyr: number): string {
   return withUnit(significant(gyr * fitting[1], 3), fitting[0])
 }
 
+/** Gyr: nearer than rounding tells. */
+export const isNow = (gyr: number): boolean => Math.abs(gyr) < 1e-9
+
 /** A time from now, e.g. `+53.28 Gyr`, `−13.79 Gyr`. */
 export function fromNow(gyr: number): string {
   return withUnit(signed(fixed(gyr, 2)), 'Gyr')

@@ -41,6 +41,11 @@ describe('horizons of matter alone', () => {
     expect(chart.readings.values[1]?.every((value) => value === null)).toBe(true)
   })
 
+  it('nothing but a constant: the galaxy at z = 1 is lost this very moment', () => {
+    // D_C = c z/H₀ with a constant alone, and the event horizon c/H₀.
+    const { spots } = chartOf([`h0:${H0},matter:0,cmb:0`], { show: 'comoving' })
+    expect(spots.map(({ label }) => label)).toEqual(['seen today', 'last light, now'])
+  })
   it('in conformal coordinates light goes straight', () => {
     const chart = chartOf([MATTER], { show: 'conformal' })
     compare(chart, 0, (eta) => (eta <= 0 ? -eta : Number.NaN))

@@ -66,3 +66,14 @@ describe.each([...new Set(ALL)])('%s', (text) => {
     visit(formulaTree(text))
   })
 })
+
+it('stretches only brackets about what is tall', () => {
+  const stretched = (text: string) => fencesOf(formulaTree(text)).map(({ attributes }) => attributes?.stretchy)
+  expect(stretched('χ(z)')).toEqual(['false', 'false'])
+  expect(stretched('sin(D_C/R)')).toEqual([undefined, undefined])
+})
+
+function fencesOf(node: MathNode): readonly MathNode[] {
+  const within = node.children.flatMap((one) => (typeof one === 'string' ? [] : fencesOf(one)))
+  return node.attributes?.fence ? [node, ...within] : within
+}

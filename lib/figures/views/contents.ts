@@ -6,7 +6,7 @@ import { columnAlong } from '../along'
 import type { Chart } from '../chart'
 import { readingsOf } from '../readings'
 import { linearRange } from '../scale'
-import { alternativeOf, futureOf } from './describe'
+import { againstOf, alternativeOf, futureOf } from './describe'
 import { curveOf, quantityChart, type Vertical } from './quantity-chart'
 import { type Asked, focusOf, rangeOf, type View } from './view'
 
@@ -72,7 +72,7 @@ function shares(asked: Asked): Chart {
     now: asked.by.now,
     future: futureOf(asked.by, extrapolates(solution.scenario)),
     readings,
-    caption: `Density of each component of ${solution.label} over the critical density, against ${axes.x.label}. Radiation: photons and massless neutrinos.`,
+    caption: `Density of each component of ${solution.label} over the critical density, against ${againstOf(axes.x)}. Radiation: photons and massless neutrinos.`,
     alternative: alternativeOf(axes.x, axes.y, curves, readings),
   }
 }

@@ -9,6 +9,9 @@ export function futureOf({ future }: Horizontal, hatched: boolean): Chart['futur
   return hatched ? 'hatched' : 'tint'
 }
 
+/** The horizontal axis in a caption. */
+export const againstOf = ({ label, scaling }: Axis): string => `${label}${scaling === 'linear' ? '' : ', logarithmic'}`
+
 export function alternativeOf(x: Axis, y: Axis, curves: readonly Curve[], readings: Readings): string {
   const frame = `Line chart of ${y.label} from ${told(y, y.from)} to ${told(y, y.to)} against ${x.label} from ${told(x, x.from)} to ${told(x, x.to)}.`
   return [frame, ...curves.flatMap(({ name }, i) => ends(name, x, y, readings.places, readings.values[i] ?? []))].join(

@@ -11,7 +11,7 @@ import { placesAlong, type Ranges, rounded, sampleCurve } from '../sample'
 import type { Range } from '../scale'
 import { spanOf } from '../span'
 import { fitted } from '../text-width'
-import { alternativeOf, futureOf } from './describe'
+import { againstOf, alternativeOf, futureOf } from './describe'
 import { type Asked, focusOf, rangeOf } from './view'
 
 /** A vertical quantity. */
@@ -19,6 +19,8 @@ export interface Vertical {
   readonly quantity: string
   readonly label: string
   readonly symbol: string
+  /** What is compared, where the label alone would not say it. */
+  readonly spelled?: string
   readonly unit: string
   /** Columns whose product it is. */
   readonly factors: readonly Column[]
@@ -62,7 +64,7 @@ export function quantityChart(asked: Asked, vertical: Vertical): Chart {
       solutions.some(({ scenario }) => extrapolates(scenario)),
     ),
     readings,
-    caption: captionOf(asked, axes.x, axes.y),
+    caption: captionOf(asked, axes.x, `${vertical.label} ${vertical.symbol}`),
     alternative: alternativeOf(axes.x, axes.y, curves, readings),
   }
 }
@@ -105,12 +107,17 @@ function dividerOf(asked: Asked, { divide }: Vertical): Reference | null {
   return { axis: 'y', at: compare === 'ratio' ? 1 : 0, label: '' }
 }
 
-function titled(asked: Asked, { quantity, label, symbol, unit }: Vertical): Omit<Axis, keyof Range> {
+function titled(asked: Asked, { quantity, label, symbol, spelled, unit }: Vertical): Omit<Axis, keyof Range> {
   const { compare } = asked
   if (compare === 'value') return { quantity, label, symbol, unit }
   const name = fitted(focusOf(asked).label, 1, 14)
   const how = compare === 'ratio' ? 'ratio to' : 'less that of'
-  return { quantity: compare, label: `${label}, ${how} ${name}`, symbol: '', unit: compare === 'ratio' ? '' : unit }
+  return {
+    quantity: compare,
+    label: `${spelled ?? label}, ${how} ${name}`,
+    symbol: '',
+    unit: compare === 'ratio' ? '' : unit,
+  }
 }
 
 interface Look {
@@ -133,9 +140,7 @@ export function curveOf(values: Values, ranges: Ranges, { special = [], ...look 
   }
 }
 
-function captionOf({ compare, solutions, focus }: Asked, x: Axis, y: Axis): string {
-  const against = `${x.label}${x.scaling === 'linear' ? '' : ', logarithmic'}`
-  const what = compare === 'value' ? `${y.label} ${y.symbol}` : y.label.split(', ')[0]
+function captionOf({ compare, solutions, focus }: Asked, x: Axis, what: string): string {
   const how = { value: '', ratio: ', as a ratio to', difference: ', less that of' }[compare]
-  return `${capital(what ?? '')}${how && `${how} ${solutions[focus]?.label}`} against ${against}.`
+  return `${capital(what)}${how && `${how} ${solutions[focus]?.label},`} against ${againstOf(x)}.`
 }

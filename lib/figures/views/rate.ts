@@ -19,6 +19,7 @@ const PACE: Vertical = {
   quantity: 'pace',
   label: 'expansion rate',
   symbol: 'H/(1 + z)',
+  spelled: 'H/(1 + z)',
   unit: HUBBLE.unit,
   past: false,
   logarithmic: true,

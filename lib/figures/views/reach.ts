@@ -5,14 +5,14 @@ import { extrapolates } from '../../words/beyond'
 import { galaxySentences } from '../../words/galaxy'
 import { significant, withUnit } from '../../words/number'
 import { reachSentence } from '../../words/reach'
-import { fromNow } from '../../words/time'
+import { fromNow, isNow } from '../../words/time'
 import type { Values } from '../along'
 import type { Chart, Spot } from '../chart'
 import { readingsOf } from '../readings'
 import { remembered } from '../remembered'
 import type { Point, Ranges } from '../sample'
 import { linearRange } from '../scale'
-import { alternativeOf, futureOf } from './describe'
+import { againstOf, alternativeOf, futureOf } from './describe'
 import { followedOf, type Galaxy, galaxyAt } from './galaxy'
 import { CONE_TONE, GALAXY_TONE, PATHS } from './paths'
 import { curveOf } from './quantity-chart'
@@ -55,7 +55,7 @@ function reach(asked: Asked): Chart {
     now: asked.by.now,
     future: futureOf(asked.by, extrapolates(solution.scenario)),
     readings,
-    caption: `Horizons and light paths of ${solution.label}: ${coordinate} from us against ${axes.x.label}.`,
+    caption: `Horizons and light paths of ${solution.label}: ${coordinate} from us against ${againstOf(axes.x)}.`,
     alternative: alternativeOf(axes.x, axes.y, curves, readings),
   }
 }
@@ -110,7 +110,7 @@ function topOf({ measures }: Solution, galaxy: Galaxy | null, proper: boolean): 
 function spotsOf(asked: Asked, { distance, seen, last }: Galaxy, { x, y }: Ranges): Spot[] {
   const spots = [
     { instant: seen, label: 'seen today' },
-    ...(last ? [{ instant: last, label: `last light, ${fromNow(last.time)}` }] : []),
+    ...(last ? [{ instant: last, label: `last light, ${isNow(last.time) ? 'now' : fromNow(last.time)}` }] : []),
   ]
   return spots.flatMap(({ instant, label }) => {
     const at: Point = [asked.by.place(focusOf(asked), instant), isProper(asked) ? distance * instant.scale : distance]
