@@ -11,8 +11,11 @@ Decimal.set({ precision: 45, toExpNeg: -40, toExpPos: 40 })
 /** A double as it is, not as the shortest decimal that is read as it. */
 export function exactly(x: number): Decimal {
   if (x === 0) return new Decimal(0)
-  const exponent = Math.max(-1000, Math.floor(Math.log2(Math.abs(x))) - 60)
-  return new Decimal(BigInt(x * 2 ** -exponent).toString()).times(new Decimal(2).pow(exponent))
+  const exponent = Math.floor(Math.log2(Math.abs(x))) - 60
+  // In two steps, since 2 to the whole may leave the doubles.
+  const half = Math.trunc(exponent / 2)
+  const whole = x * 2 ** -half * 2 ** (half - exponent)
+  return new Decimal(BigInt(whole).toString()).times(new Decimal(2).pow(exponent))
 }
 
 export interface OtherLaw {
