@@ -168,7 +168,12 @@ function insideWishes(curve: Curve, plot: Plot, frame: Frame, below: boolean): I
   const wishes: InsideWish[] = []
   if (finish?.edge === 'along') wishes.push({ tone, ...texts, places: alongCurve(curve, plot, frame) })
   else if (finish && (below || finish.edge === 'inside' || (frame.compact && finish.edge === 'right')))
-    wishes.push({ tone, ...texts, places: besidePoint(finish.at, plot, frame) })
+    wishes.push({
+      tone,
+      ...texts,
+      places: besidePoint(finish.at, plot, frame),
+      ...(below ? { from: spotOf(finish.at, plot) } : {}),
+    })
   if (asymptote !== null) {
     const places = besidePoint([asymptote.at, Number.POSITIVE_INFINITY], plot, frame)
     wishes.push({ tone, name: '', note: asymptote.label, places })
@@ -179,10 +184,11 @@ function insideWishes(curve: Curve, plot: Plot, frame: Frame, below: boolean): I
 function spotWishes({ spots }: Drawn, plot: Plot, frame: Frame): InsideWish[] {
   const named = spots.filter(({ label }) => label !== '')
   return named.map(({ tone, at, label }) => {
-    const from = [plot.x(at[0]), plot.y(at[1])] as const
-    return { tone, name: '', note: label, places: besidePoint(at, plot, frame), from }
+    return { tone, name: '', note: label, places: besidePoint(at, plot, frame), from: spotOf(at, plot) }
   })
 }
+
+const spotOf = ([x, y]: Point, plot: Plot): Spot => [plot.x(x), plot.y(y)]
 
 function placeInside(wish: InsideWish, spots: readonly Spot[], plot: Plot, frame: Frame, taken: readonly Box[]): Label {
   const { tone, name, note } = wish
