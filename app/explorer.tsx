@@ -84,7 +84,7 @@ export function Explorer({ initial, asked, ruler, shelf, lists, edition, childre
         </RulerPlace>
         <TakeAway desk={ruled.desk} lists={lists} version={edition.version} live={address !== null} />
       </main>
-      <Footer data={desk.links.data} edition={edition} />
+      <Footer data={desk.links.data} edition={edition} theme={desk.place.theme ?? undefined} />
       {address && <Status view={view} moving={moving} waiting={waiting} trouble={trouble} />}
     </div>
   )

@@ -76,7 +76,7 @@ export function TakeAway({ desk, lists, version, live }: Props) {
           </Suspense>
         ) : (
           <p>
-            <a href={`/words?${query}`}>All of them on a page of their own</a>
+            <a href={`/words?${query}${theme}`}>All of them on a page of their own</a>
           </p>
         )}
       </details>
