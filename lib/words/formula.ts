@@ -80,10 +80,16 @@ function inRow(items: readonly Item[]): MathNode {
     const before = nodes.at(-1)
     if (one.tag === 'mtext' && before?.tag === 'mtext') {
       nodes[nodes.length - 1] = node('mtext', `${before.children[0]}${one.children[0]}`.replace(/\u00a0+/g, '\u00a0'))
-    } else nodes.push(one)
+    } else {
+      if (before?.tag === 'mtext' && isStop(one))
+        nodes[nodes.length - 1] = node('mtext', `${before.children[0]}`.trimEnd())
+      nodes.push(one)
+    }
   }
   return rowOf(nodes)
 }
+
+const isStop = ({ tag, children }: MathNode): boolean => tag === 'mo' && (children[0] === ',' || children[0] === ';')
 
 interface Reader {
   readonly tokens: readonly Token[]

@@ -28,7 +28,7 @@ it.each([
   ['μ = 5 log_10(D_L/Mpc) + 25', 'μ=5log_10({D_L|Mpc})+25'],
   [
     'χ = ∫ c dt/a, from the beginning; after a bounce the contraction counts',
-    'χ=∫c{dt|a}, from the beginning ; after a bounce the contraction counts',
+    'χ=∫c{dt|a}, from the beginning; after a bounce the contraction counts',
   ],
   ['Σ_cr = (c²/4πG) D_{A,2}/(D_{A,1} D_{A,12})', 'Σ_cr=({c^2|4πG}){D_A,2|D_A,1D_A,12}'],
 ])('%s', (text, expected) => expect(read(text)).toBe(expected))
