@@ -32,17 +32,10 @@ test('what is shown agrees to the last digit', async ({ page, request }) => {
   await agree(page, request, '/api/explorer', asShown)
 })
 
-test('all numbers of whole histories agree to 1e-13, or to their own error bounds where these are wider', async ({
-  page,
-  request,
-}) => {
-  await agree(page, request, '/api/history', (one, other, path, bound) => {
-    // Rows of figures have fewer digits, and the last may lie where the doubles end.
-    if (path.includes('.series.')) return false
-    // Bounds are about rounding, which may differ; moments have none of their own: those of nearly equal slopes are known badly.
-    if (path.endsWith('.error')) return false
-    return far(one, other, path.includes('.moments.') ? 1e-9 : 1e-13) && Math.abs(one - other) > bound
-  })
+test('every measure agrees to 1e-13, or to its own error bound where that is wider', async ({ page, request }) => {
+  await agree(page, request, '/api/history', (one, other, path, bound) =>
+    path.endsWith('.value') ? far(one, other, 1e-13) && Math.abs(one - other) > bound : false,
+  )
 })
 
 /** Numbers that are not the same. `bound` is the error that stands beside them. */

@@ -14,6 +14,8 @@ import { type Bracket, signChanges } from '../numerics/sign-changes'
 export interface Crossing {
   readonly N: number
   readonly rising: boolean
+  /** Bound of the error of N where two things run so nearly alike that rounding shifts it; absent where it does not. */
+  readonly blur?: number
 }
 
 /** How far beyond the last panel, in ln a, to look where what rules there neither accelerates nor decelerates. */
@@ -28,6 +30,8 @@ const BEFORE = 1e-6
 export interface Comparison {
   value(model: Model, N: number): number
   slopeRange(model: Model, from: number, to: number): readonly [number, number]
+  /** Bound of the rounding error of the value. */
+  rounding(model: Model, N: number): number
 }
 
 /** All sign changes of a comparison, in order of a. */
@@ -55,7 +59,9 @@ function changesBetween(comparison: Comparison, model: Model, from: number, to: 
   // Exactly zero where an interval begins, as today with equal densities: what came before decides.
   const before = left === 0 ? value(from - BEFORE) : left
   if (right === 0 || before > 0 === right > 0) return []
-  return [{ N: left === 0 ? from : brent(value, from, to), rising: before < right }]
+  const N = left === 0 ? from : brent(value, from, to)
+  const slope = Math.min(...comparison.slopeRange(model, N, N).map(Math.abs))
+  return [{ N, rising: before < right, blur: Math.min(1, comparison.rounding(model, N) / slope) }]
 }
 
 /** Changes of the sign of ä, in order of a: every one that the panels can tell, and looks at the tails where they do not decide. */
@@ -172,6 +178,7 @@ const ratio = (over: readonly Component['key'][], under: readonly Component['key
     const [above, below] = [exponentsOf(model, over, from, to), exponentsOf(model, under, from, to)]
     return [below[0] - above[1], below[1] - above[0]]
   },
+  rounding: (model, N) => Number.EPSILON * (4 + Math.abs(logOf(model, over, N)) + Math.abs(logOf(model, under, N))),
 })
 
 /** ln of cold matter over photons and all neutrinos; both must be there. */

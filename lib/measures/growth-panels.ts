@@ -135,6 +135,7 @@ export function sourceOver({ budget }: Model, inverseScale: number): number {
 /** Relative rounding of 1/E at s; where E² exceeds the doubles, nothing is left that it could spoil. */
 export function roundingAt(zone: Zone, s: number): number {
   const conditioning = zone.conditioning(s)
+  /* v8 ignore next -- growth is asked for where there is matter, and E² a double */
   return Number.EPSILON * (2 + (Number.isFinite(conditioning) ? conditioning : 0))
 }
 

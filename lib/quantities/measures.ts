@@ -74,7 +74,8 @@ const event = (subject: Subject): Outcome => {
 /** z of a crossing; its error follows from the noise of the sums and is far below what the page shows. */
 const redshiftOf = ({ history }: Subject, crossing: Crossing | null, because: string): Outcome => {
   if (crossing === null) return missing(because)
-  return bounded(Math.expm1(-crossing.N), (64 * Number.EPSILON + 4 * noise(history)) * Math.exp(-crossing.N))
+  const relative = Math.max(64 * Number.EPSILON + 4 * noise(history), crossing.blur ?? 0)
+  return bounded(Math.expm1(-crossing.N), relative * Math.exp(-crossing.N))
 }
 
 const ALL: readonly MeasureQuantity[] = [

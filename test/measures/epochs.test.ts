@@ -32,7 +32,18 @@ describe('matter and dark energy', () => {
     ['w:0.5', false],
     ['w:-1', true],
   ])('equal exactly today, %s', (w, rising) => {
-    expect(dark(`matter:0.5,cmb:0,eos:constant,${w}`)).toEqual([{ N: expect.closeTo(0, 15), rising }])
+    expect(dark(`matter:0.5,cmb:0,eos:constant,${w}`)).toEqual([
+      { N: expect.closeTo(0, 15), rising, blur: expect.closeTo(0, 13) },
+    ])
+  })
+  test('the more alike they thin out, the wider the error that is stated', () => {
+    // ln a = ln(Ω_DE/Ω_m)/(3w): eps in the logarithms is eps/(3w) there. The densities are doubles that add up to 1.
+    for (const w of [0.5, 1e-2, 1e-4, 1e-6]) {
+      const [one] = dark(`matter:0.50048828125,cmb:0,eos:constant,w:${w}`)
+      const off = Math.abs(one.N - Math.log(0.49951171875 / 0.50048828125) / (3 * w))
+      expect(off).toBeLessThanOrEqual(one.blur ?? 0)
+      expect(one.blur).toBeLessThan((20 * Number.EPSILON * (1 + Math.abs(one.N) * 3)) / (3 * w))
+    }
   })
   test('dust-like dark energy never overtakes, not even when it weighs the same', () => {
     expect(dark('matter:0.5,cmb:0,eos:constant,w:0')).toEqual([])
