@@ -85,10 +85,10 @@ export function leadingExponent(model: Model, direction: Direction): number | nu
 /** Whether the integral to the far end is finite, from what wins there, where nothing outgrows every power. */
 export function converges(model: Model, direction: Direction, clock: Clock): boolean {
   const exponent = leadingExponent(model, direction)
-  /* v8 ignore start -- a logarithmic law has a tail wherever its density is positive, and then nobody asks */
+  /* v8 ignore next -- a logarithmic law has a tail wherever its density is positive, and then nobody asks */
   const slow = exponent === 0 ? logarithmicIn(model, direction) : null
+  /* v8 ignore next -- as above */
   if (slow && clock === 'time') return slow.overTwo * slow.rate * direction > 0
-  /* v8 ignore stop */
   return exponent !== null && -direction * exponent + (clock === 'conformal' ? 2 * direction : 0) > 0
 }
 
