@@ -7,6 +7,7 @@ import type { Home } from '../../lib/answers/table'
 import { askWords } from '../../lib/answers/words'
 import type { Reading } from '../../lib/scenario/scenario'
 
+/** What pages ask for, and whole histories, by which a test compares all digits with the server's. */
 const ROUTES = {
   '/api/explorer': askExplorer,
   '/api/history': askHistory,

@@ -76,7 +76,9 @@ export function TakeAway({ desk, lists, version, live }: Props) {
           </Suspense>
         ) : (
           <p>
-            <a href={`/words?${query}${theme}`}>All of them on a page of their own</a>
+            <a href={`/words?${query}${desk.place.theme ? `&theme=${desk.place.theme}` : ''}`}>
+              All of them on a page of their own
+            </a>
           </p>
         )}
       </details>

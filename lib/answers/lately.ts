@@ -9,8 +9,10 @@ export function lately<Subject, Made>(textOf: (subject: Subject) => string, make
   const known = new LRUCache<string, { readonly made: Made }>({ max: MOST })
   return (subject: Subject): Made => {
     const text = textOf(subject)
-    const found = known.get(text) ?? { made: make(subject) }
-    known.set(text, found)
-    return found.made
+    const found = known.get(text)
+    if (found) return found.made
+    const made = make(subject)
+    known.set(text, { made })
+    return made
   }
 }

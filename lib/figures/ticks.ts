@@ -69,9 +69,9 @@ function evenTextOf(axis: Range, count: number): (at: number) => string {
   if (axis.scaling !== 'linear') return shortest
   const all = ticks(axis.from, axis.to, count)
   const most = Math.max(...all.map(Math.abs))
-  if (most < LARGE) return (at) => fixed(at, decimalsOf(all))
-  const power = 10 ** Math.floor(Math.log10(most))
+  const power = most < LARGE ? 1 : 10 ** Math.floor(Math.log10(most))
   const decimals = decimalsOf(all.map((at) => at / power))
+  if (power === 1) return (at) => fixed(at, decimals)
   return (at) => `${fixed(at / power, decimals)}${THIN}×${THIN}${powerOfTen(power)}`
 }
 

@@ -126,9 +126,10 @@ function changesOver(arm: Arm, { zone, from, to, time }: Panel): readonly Bracke
   derivativeInto(slope, rate)
   let size = 0
   for (const one of rate) size += Math.abs(one)
-  if (!(size > 0)) return []
+  const noise = NOISE * size
+  if (!(noise > 0)) return []
   for (let j = 0; j < rate.length; j++) rate[j] -= (arm.direction * slope[j]) / half
-  return signChanges(rate, NOISE * size)
+  return signChanges(rate, noise)
 }
 
 /** Whether what rules beyond the last panel leaves the sign of ä to nothing else. */
