@@ -1,6 +1,6 @@
 import type { Metadata } from 'next'
 import { method } from '../../lib/answers/method'
-import { THEMES } from '../../lib/words/place'
+import { THEMES, themed } from '../../lib/words/place'
 import { EDITION } from '../edition'
 import { Footer } from '../ui/footer'
 import { EntryOfMethod } from './entry'
@@ -21,7 +21,7 @@ export default async function Method({ searchParams }: Props) {
   return (
     <div className="page" data-theme={theme}>
       <header className="masthead">
-        <a className="brand" href={theme ? `/?theme=${theme}` : '/'}>
+        <a className="brand" href={themed('/', theme)}>
           Longhence
         </a>
       </header>

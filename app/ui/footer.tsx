@@ -1,4 +1,4 @@
-import type { Theme } from '../../lib/words/place'
+import { type Theme, themed } from '../../lib/words/place'
 
 export interface Edition {
   readonly version: string
@@ -20,7 +20,7 @@ export function Footer({ data, edition, theme }: Props) {
       </p>
       <p>
         Longhence {edition.version}, engine {edition.engine}. MIT licence.{' '}
-        <a href={theme ? `/method?theme=${theme}` : '/method'}>Methods and sources</a>
+        <a href={themed('/method', theme)}>Methods and sources</a>
         {data && (
           <>
             {' '}

@@ -3,7 +3,7 @@ import { opened } from '../../lib/answers/opened'
 import { wordsOf } from '../../lib/answers/words'
 import { linkQuery } from '../../lib/scenario/write'
 import { ENGINE } from '../../lib/solve'
-import { THEMES } from '../../lib/words/place'
+import { THEMES, themed } from '../../lib/words/place'
 import { HOME } from '../api/home'
 import { EDITION } from '../edition'
 import { Footer } from '../ui/footer'
@@ -30,7 +30,7 @@ export default async function Page({ searchParams }: Props) {
   return (
     <div className="page" data-theme={theme}>
       <header className="masthead">
-        <a className="brand" href={theme ? `/?theme=${theme}` : '/'}>
+        <a className="brand" href={themed('/', theme)}>
           Longhence
         </a>
       </header>

@@ -73,6 +73,10 @@ export const PLACE_KEYS: readonly (keyof Place)[] = KEYS.map(({ key }) => key)
 export const RULER_KEYS = ['epoch', 'at', 'until', 'read', 'length', 'line', 'sky', 'units'] as const
 export type RulerPlace = Pick<Place, (typeof RULER_KEYS)[number]>
 
+/** A page without other keys, in a theme that was chosen. */
+export const themed = (path: string, theme: Theme | null | undefined): string =>
+  theme ? `${path}?theme=${theme}` : path
+
 /** Reads a place leniently: whatever is not understood is what would hold anyway. `focus` counts from 1 in addresses. */
 export function readPlace(textOf: (key: string) => string | null | undefined, count: number): Place {
   const entries = (KEYS as readonly Key[]).map(({ key, read }) => [key, read(textOf(key) ?? '', count)])
