@@ -9,6 +9,8 @@ export interface Axis extends Range {
   /** Name in answers and tables, where it has one there. */
   readonly quantity: string
   readonly label: string
+  /** A symbol with which the label begins. */
+  readonly lead?: string
   /** In the markup of labels: `_` starts a subscript. */
   readonly symbol: string
   readonly unit: string

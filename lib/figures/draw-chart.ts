@@ -7,6 +7,7 @@ import { drawRibbons, ribbonsHeight } from './draw-ribbons'
 import { titleWidth } from './draw-text'
 import { labelHeight, labelWidth, namedAbove, nameOf, placeLabels } from './labels'
 import { type Frame, type Margins, type Plot, plotOf } from './plot'
+import { fractionOf } from './scale'
 import { px, type SvgNode, svg } from './svg'
 import { textWidth } from './text-width'
 
@@ -69,8 +70,12 @@ function textsOf(curve: Curve, frame: Frame) {
   return { name: nameOf(curve, frame), note: frame.compact ? '' : curve.note }
 }
 
-function besideOf({ curves }: Chart, frame: Frame): number {
-  const others = curves.filter(({ finish }) => finish?.edge === 'right')
+/** A label at a mark so near the right edge needs room beside it too. */
+const NEAR_EDGE = 0.93
+
+function besideOf({ curves, x }: Chart, frame: Frame): number {
+  const near = ({ edge, at }: NonNullable<Curve['finish']>) => edge === 'inside' && fractionOf(x, at[0]) > NEAR_EDGE
+  const others = curves.filter(({ finish }) => finish !== null && (finish.edge === 'right' || near(finish)))
   return Math.max(0, ...others.map((curve) => labelWidth(textsOf(curve, frame), frame.type)))
 }
 

@@ -7,10 +7,10 @@ import { textWidth } from './text-width'
 const SCRIPT = 0.72
 const DROP = 0.22
 
-type Parts = Pick<Axis, 'label' | 'symbol' | 'unit'>
+type Parts = Pick<Axis, 'label' | 'lead' | 'symbol' | 'unit'>
 
 /** `scale factor a`, `time from now t − t_0, Gyr`. */
-export function titleOf({ label, symbol, unit }: Parts, size: number): (SvgNode | string)[] {
+export function titleOf({ label, lead = '', symbol, unit }: Parts, size: number): (SvgNode | string)[] {
   const runs: (Run & { readonly upright?: true })[] = [...runsOf(symbol)]
   if (unit) runs.push({ kind: 'plain', text: `, ${unit}`, upright: true })
   let shift = 0
@@ -21,7 +21,8 @@ export function titleOf({ label, symbol, unit }: Parts, size: number): (SvgNode 
     const place: Attributes = dy === 0 ? {} : { dy }
     return upright ? [svg('tspan', place, text)] : run(kind, text, size, place)
   })
-  return [`${label}${symbol ? ' ' : ''}`, ...marked]
+  const begin = runsOf(lead).flatMap(({ kind, text }) => run(kind, text, size, {}))
+  return [...begin, `${label.slice(lead.length)}${symbol ? ' ' : ''}`, ...marked]
 }
 
 export function titleWidth({ label, symbol, unit }: Parts, size: number): number {

@@ -1,8 +1,9 @@
 /** Labels at the ends of curves: above the plot, beside it, or next to a mark within it, never one over another. */
 import type { Chart, Curve } from './chart'
 import { referenceBoxes } from './draw-axes'
-import { alongLine, type Box, clearest, obstaclesOf, type Spot } from './obstacles'
+import { alongLine, type Box, clearest, costOf, obstaclesOf, type Spot } from './obstacles'
 import type { Frame, Plot } from './plot'
+import { rowsOf } from './rows'
 import type { Point } from './sample'
 import { spread } from './spread'
 import { fitted, textWidth } from './text-width'
@@ -27,12 +28,12 @@ export const NOTE_SIZE = 0.86
 const GAP = 0.9
 /** A line from the row above the plot to an end so far left of it would strike through the title of the axis. */
 const UNDER_TITLE = 3
-/** A phone has room for so much of a name. */
-const LONGEST_NAME = { wide: 13, compact: 6.5 }
+/** There is room for so much of a name, and less of it is no name. */
+const LONGEST_NAME = 13
+const SHORTEST_NAME = 5
 
-export function nameOf(curve: Curve, frame: Frame): string {
-  const short = frame.compact && curve.finish?.edge !== 'along'
-  return fitted(curve.name, frame.type, frame.type * (short ? LONGEST_NAME.compact : LONGEST_NAME.wide))
+export function nameOf({ name }: Curve, { type }: Frame): string {
+  return fitted(name, type, LONGEST_NAME * type)
 }
 
 export function labelHeight(label: Pick<Label, 'name' | 'note'>, type: number): number {
@@ -67,13 +68,15 @@ export function placeLabels(chart: Drawn, plot: Plot, frame: Frame, free: number
     const taken = [...fixed, ...placed.map((label) => boxOf(label, frame.type))]
     placed.push(placeInside(wish, spots, plot, frame, taken))
   }
-  return placed
+  return frame.compact
+    ? [...placed, ...withinRight(chart, plot, frame, [...fixed, ...placed.map((one) => boxOf(one, frame.type))])]
+    : placed
 }
 
 /** The curves that are named above the plot. On a phone that has no room for them all it is none: hue and dash are the key. */
 export function namedAbove(curves: readonly Curve[], frame: Frame, free: number): readonly Curve[] {
   const ends = curves.filter((curve) => curve.finish?.edge === 'top')
-  return frame.compact && roomAbove(ends, frame, free) < Number.POSITIVE_INFINITY ? [] : ends
+  return frame.compact && roomAbove(ends, frame, free) < SHORTEST_NAME * frame.type ? [] : ends
 }
 
 /** For each label, where not all can have what they need. */
@@ -144,6 +147,31 @@ function rightLabels(curves: readonly Curve[], plot: Plot, frame: Frame): Label[
   })
 }
 
+/** Worth of a pixel between a name and the end of its curve. Tuned by eye. */
+const AWAY = 0.5
+
+/** Without room beside the plot: right-aligned within it, in the order of the ends. */
+function withinRight(chart: Drawn, plot: Plot, frame: Frame, taken: readonly Box[]): Label[] {
+  const { type } = frame
+  const ends = chart.curves
+    .filter((curve) => curve.finish?.edge === 'right')
+    .map((curve) => ({ curve, texts: textsOf(curve, frame), at: plot.y(curve.finish?.at[1] ?? 0) }))
+    .sort((one, other) => one.at - other.at)
+  if (ends.length === 0) return []
+  const spots = obstaclesOf(chart, plot)
+  const right = plot.right - 0.7 * type
+  const rows = ends.map(({ texts, at }) => {
+    const [width, height] = [labelWidth(texts, type), labelHeight(texts, type)]
+    const cost = (y: number) =>
+      AWAY * Math.abs(y + height / 2 - at) + costOf({ x: right - width, y, width, height }, spots, taken, plot)
+    return { height, cost }
+  })
+  const edges = rowsOf(rows, plot.top, plot.bottom)
+  return ends.map(({ curve, texts }, i) => {
+    return { tone: toneOf(curve), ...texts, anchor: 'end' as const, x: right, y: edges[i] as number, leader: null }
+  })
+}
+
 interface InsideWish {
   readonly tone: string
   readonly name: string
@@ -159,7 +187,7 @@ interface Place extends Box {
 }
 
 /**
- * Ends within the plot, the line of a rip, and what is named along its way; on a phone also what leaves on the right.
+ * Ends within the plot, the line of a rip, and what is named along its way.
  * `below`: it leaves at the top, where the title of the axis stands.
  */
 function insideWishes(curve: Curve, plot: Plot, frame: Frame, below: boolean): InsideWish[] {
@@ -167,7 +195,7 @@ function insideWishes(curve: Curve, plot: Plot, frame: Frame, below: boolean): I
   const [tone, texts] = [toneOf(curve), textsOf(curve, frame)]
   const wishes: InsideWish[] = []
   if (finish?.edge === 'along') wishes.push({ tone, ...texts, places: alongCurve(curve, plot, frame) })
-  else if (finish && (below || finish.edge === 'inside' || (frame.compact && finish.edge === 'right')))
+  else if (finish && (below || finish.edge === 'inside'))
     wishes.push({
       tone,
       ...texts,

@@ -6,8 +6,8 @@ import { longViewCaption, longViewText } from './caption'
 import type { Chart, Curve, Mark, Ribbon } from './chart'
 import { erasOf } from './eras'
 import { readingsOf } from './readings'
-import { placesAlong, type Ranges, rounded, type Source, sampleCurve } from './sample'
-import { linearRange } from './scale'
+import { placesAlong, type Ranges, type Source, sampleCurve } from './sample'
+import { fine, linearRange } from './scale'
 import { type Entry, type Wanted, type Window, windowOf } from './window'
 
 export type Drawn = Pick<Solution, 'scenario' | 'code' | 'label' | 'origin' | 'end' | 'measures' | 'moments'>
@@ -88,7 +88,7 @@ function curveOf(entry: Entry<Drawn>, slot: number, strong: boolean, ranges: Ran
     dash: slot,
     name: solution.label,
     strong,
-    segments: segments.map((segment) => segment.map(rounded)),
+    segments: segments.map((segment) => segment.map(([at, value]) => [fine(ranges.x, at), fine(ranges.y, value)])),
     marks: [...startMarks(solution, segments, ranges), ...endMarks(solution, segments, ranges)],
     note: asymptote === null ? noteOf(solution, ranges) : '',
     finish: finishOf(segments, ranges),
@@ -130,6 +130,7 @@ function endMarks({ end }: Drawn, segments: Curve['segments'], ranges: Ranges): 
   const asymptote = asymptoteOf({ end }, ranges)
   const cross: Mark[] = asymptote === null ? [] : [{ kind: 'cross', at: [asymptote.at, y.to] }]
   if (!at || !from) return cross
-  const inside = endsInTime(end.kind) && end.kind !== 'rip' && end.time !== null && end.time <= x.to
+  const inside =
+    endsInTime(end.kind) && end.time !== null && end.time <= x.to && (end.scale ?? Number.POSITIVE_INFINITY) <= y.to
   return [inside ? { kind: 'cross', at } : { kind: 'arrow', at, from }, ...cross]
 }

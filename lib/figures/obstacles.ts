@@ -55,12 +55,23 @@ export function clearest<B extends Box>(
   let [best, least] = [first, Number.POSITIVE_INFINITY]
   for (const box of boxes) {
     const away = Math.hypot(box.x - first.x, box.y - first.y)
-    const overlaps = taken.filter((other) => overlap(box, other)).length
-    const start = COST.label * overlaps + (outside(box, edges) ? COST.edge : 0) + COST.away * away
-    const cost = withCovered(box, spots, start, least)
+    const cost = costOf(box, spots, taken, edges, COST.away * away, least)
     if (cost < least) [best, least] = [box, cost]
   }
   return best
+}
+
+/** What a box hides, added to `start`, until that is more than `least` anyway. */
+export function costOf(
+  box: Box,
+  spots: readonly Spot[],
+  taken: readonly Box[],
+  edges: Edges,
+  start = 0,
+  least = Number.POSITIVE_INFINITY,
+): number {
+  const overlaps = taken.filter((other) => overlap(box, other)).length
+  return withCovered(box, spots, start + COST.label * overlaps + (outside(box, edges) ? COST.edge : 0), least)
 }
 
 /** Adds what a box covers, until that is more than `least` anyway. */

@@ -35,3 +35,13 @@ function unbent({ scaling, linear }: Range, value: number): number {
   if (scaling === 'linear') return value
   return scaling === 'log' ? Math.exp(value) : Math.sign(value) * linear * Math.expm1(Math.abs(value))
 }
+
+/** Parts of an axis that nobody can tell apart. */
+const FINEST = 1e-5
+
+/** A value with the digits that can be seen along an axis, which far from 0 are more than the first few. */
+export function fine({ scaling, from, to }: Range, value: number): number {
+  const least = scaling === 'linear' ? FINEST * (to - from) : FINEST * Math.abs(value)
+  const decimals = Math.ceil(-Math.log10(least))
+  return decimals >= 0 && decimals <= 100 ? Number(value.toFixed(decimals)) : Number(value.toPrecision(6))
+}

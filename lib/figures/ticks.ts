@@ -39,12 +39,15 @@ function wishes(axis: Range, now: number | null, count: number): number[] {
   return [...today, 0, ...sides.flatMap((at) => [at, -at])]
 }
 
-/** Powers of ten, then their fives and twos. */
+/** So many powers of ten fill an axis. */
+const ENOUGH = 6
+
+/** Powers of ten, then their fives and twos where there are few. */
 function decades(from: number, to: number): number[] {
   const [first, last] = [Math.floor(Math.log10(from)), Math.ceil(Math.log10(to))]
   const powers = Array.from({ length: last - first + 1 }, (_, i) => first + i)
   const of = (digit: number) => powers.map((power) => Number(`${digit}e${power}`))
-  return [...sparse(of(1)), ...of(5), ...of(2)]
+  return powers.length > ENOUGH ? sparse(of(1)) : [...of(1), ...of(5), ...of(2)]
 }
 
 /** Where there are many decades every second or third of them comes first, so that what is left out is even. */
@@ -64,19 +67,20 @@ function textOf(axis: Axis, now: number | null, count: number): (at: number) => 
   }
 }
 
-/** All with the same decimals, and where some are too large for that in the same power of ten. */
+/** All with the same decimals, and where some are too large or small for that in the same power of ten. */
 function evenTextOf(axis: Range, count: number): (at: number) => string {
   if (axis.scaling !== 'linear') return shortest
   const all = ticks(axis.from, axis.to, count)
   const most = Math.max(...all.map(Math.abs))
-  const power = most < LARGE ? 1 : 10 ** Math.floor(Math.log10(most))
+  const power = most < LARGE && most >= SMALL ? 1 : 10 ** Math.floor(Math.log10(most || 1))
   const decimals = decimalsOf(all.map((at) => at / power))
   if (power === 1) return (at) => fixed(at, decimals)
   return (at) => `${fixed(at / power, decimals)}${THIN}×${THIN}${powerOfTen(power)}`
 }
 
-/** Digits of larger numbers are more than an axis has room for. */
+/** Digits of larger and smaller numbers are more than an axis has room for. */
 const LARGE = 1e6
+const SMALL = 1e-4
 
 const shortest = (at: number): string => {
   const size = Math.abs(at)

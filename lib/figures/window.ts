@@ -1,4 +1,4 @@
-/** The shared window of several histories: every origin, and every ending that falls within reason. */
+/** The shared window of several histories: every origin, every turn and ending that falls within reason, else what is seen of the rest. */
 import type { Solution } from '../solve'
 import type { Contents } from './contents'
 import type { Range, Scaling } from './scale'
@@ -34,9 +34,15 @@ const LONGEST_PAST = 12
 const ETERNAL_PAST = 1.4
 /** A bounce shows this part of its time again before it. */
 const BEFORE_BOUNCE = 0.6
-/** Future without an ending, and the farthest ending, in units of the past. */
-const FUTURE = { linear: { plain: 2.4, farthest: 10 }, log: { plain: 30, farthest: 3000 } }
+/** Future without an ending, the farthest ending, and the farthest turn, in units of the past. */
+const FUTURE = { linear: { plain: 2.4, farthest: 10, turn: 16 }, log: { plain: 30, farthest: 3000, turn: 3000 } }
+/** However soon a curve leaves through the top. */
+const LEAST_FUTURE = 0.5
 const MARGIN = 1.05
+/** A turn is followed so much longer, to be seen as one. */
+const AFTER_TURN = 1.25
+/** Beyond the place where the last curve leaves through the top. */
+const AFTER_TOP = 1.25
 /** Largest scale factors for those that turn and for those that do not. */
 const TURNING_TOP = 12
 const PLAIN_TOP = 5
@@ -47,15 +53,12 @@ const NEARLY_LINEAR = 0.07
 /** In a range of one's own the figure is as high as all but this part of it. */
 const CUT = 0.12
 const TRIED = 32
+const STEPS = 60
 
 export function windowOf(entries: readonly Entry[], wanted: Wanted = { time: null, from: null, to: null }): Window {
   const past = Math.max(...entries.map(({ solution }) => pastOf(solution)))
   const scaling: Scaling = wanted.time === 'log' ? 'signed-log' : 'linear'
-  const future = futureOf(
-    entries.map(({ solution }) => solution),
-    past,
-    wanted.time === 'log' ? FUTURE.log : FUTURE.linear,
-  )
+  const future = futureOf(entries, past, wanted.time === 'log' ? FUTURE.log : FUTURE.linear)
   const shape = { scaling, linear: 10 ** Math.round(Math.log10(NEARLY_LINEAR * past)) }
   const [from, to] = [wanted.from ?? -past * MARGIN, wanted.to ?? future]
   if (to <= from || (wanted.from === null && wanted.to === null)) {
@@ -72,17 +75,29 @@ function pastOf({ origin, measures }: Seen): number {
   return Math.min(-origin.time * before, LONGEST_PAST * hubbleTime)
 }
 
-function futureOf(solutions: readonly Seen[], past: number, { plain, farthest }: typeof FUTURE.linear): number {
-  const events = solutions.map((one) => lastEvent(one, farthest * past))
-  const shown = events.filter((time) => time !== null)
-  const least = shown.length === events.length ? 0.5 * past : plain * past
-  return Math.max(least, ...shown.map((time) => time * MARGIN))
+type Future = typeof FUTURE.linear
+
+function futureOf(entries: readonly Entry[], past: number, kind: Future): number {
+  const futures = entries.map((entry) => shownEvent(entry.solution, past, kind) ?? plainFuture(entry, past, kind))
+  return Math.max(LEAST_FUTURE * past, ...futures)
 }
 
-/** The ending, else the turn, if it comes before `limit`. */
-function lastEvent({ end }: Seen, limit: number): number | null {
-  const times = [end.time, end.turnaround?.time ?? null]
-  return times.find((time) => time !== null && time <= limit) ?? null
+/** Until after the ending; where that is too far until after the turn, and as far as an ending might be. */
+function shownEvent({ end }: Seen, past: number, { farthest, turn }: Future): number | null {
+  if (end.time !== null && end.time <= farthest * past) return end.time * MARGIN
+  if (end.turnaround === null || end.turnaround.time > turn * past) return null
+  return Math.max(end.turnaround.time * AFTER_TURN, end.time === null ? 0 : farthest * past)
+}
+
+/** Until the curve has left through the top, or so far that its course is clear. */
+function plainFuture({ scales }: Entry, past: number, { plain }: Future): number {
+  const step = (plain * past) / STEPS
+  const sizes = scales(Array.from({ length: STEPS + 1 }, (_, i) => i * step))
+  const left = sizes.findIndex((size) => size === null || size > PLAIN_TOP)
+  if (left < 1) return plain * past
+  const [before, after] = [sizes[left - 1] ?? 0, sizes[left] ?? Number.POSITIVE_INFINITY]
+  const part = Number.isFinite(after) ? (PLAIN_TOP - before) / (after - before) : 1
+  return Math.min(plain * past, (left - 1 + part) * step * AFTER_TOP)
 }
 
 function topOf({ solution, scales }: Entry, to: number): number {
@@ -93,7 +108,9 @@ function topOf({ solution, scales }: Entry, to: number): number {
   // The last of these times may be that of the end, which a history reaches or not by rounding.
   const sizes = scales(times).map((scale) => scale ?? end.scale ?? PLAIN_TOP)
   const reached = Math.max(...sizes, end.kind === 'rip' ? PLAIN_TOP : 0)
-  return Math.min(PLAIN_TOP, reached * HEADROOM)
+  // An ending at a size is seen at that size.
+  const ending = end.time !== null && end.time <= to ? Math.min(TURNING_TOP, (end.scale ?? 0) * HEADROOM) : 0
+  return Math.max(ending, Math.min(PLAIN_TOP, reached * HEADROOM))
 }
 
 /** High enough for nearly all that happens within a range. */

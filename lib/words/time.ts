@@ -1,4 +1,4 @@
-/** Times in words: Gyr to two decimals, smaller units where Gyr would round to nothing. */
+/** Times in words: Gyr to two decimals, from a thousand on to none, smaller units where Gyr would round to nothing. */
 import { fixed, signed, significant, withUnit } from './number'
 
 const SMALLER: readonly (readonly [unit: string, perGyr: number])[] = [
@@ -12,10 +12,14 @@ const SMALLER: readonly (readonly [unit: string, perGyr: number])[] = [
 
 /** Below this many Gyr two decimals say too little. */
 export const NEAR = 0.5
+/** From here on they say too much. */
+const FAR = 1000
+
+const plain = (gyr: number): string => fixed(gyr, Math.abs(gyr) < FAR ? 2 : 0)
 
 /** A length of time, e.g. `13.79 Gyr`, `110 Myr`. */
 export function duration(gyr: number): string {
-  if (gyr >= NEAR || gyr === 0) return withUnit(fixed(gyr, 2), 'Gyr')
+  if (gyr >= NEAR || gyr === 0) return withUnit(plain(gyr), 'Gyr')
   const fitting = SMALLER.find(([, perGyr]) => gyr * perGyr >= 1) ?? (['s', 31557600e9] as const)
   return withUnit(significant(gyr * fitting[1], 3), fitting[0])
 }
@@ -25,7 +29,7 @@ export const isNow = (gyr: number): boolean => Math.abs(gyr) < 1e-9
 
 /** A time from now, e.g. `+53.28 Gyr`, `−13.79 Gyr`. */
 export function fromNow(gyr: number): string {
-  return withUnit(signed(fixed(gyr, 2)), 'Gyr')
+  return withUnit(signed(plain(gyr)), 'Gyr')
 }
 
 /** A scale factor as a multiple of today's. */

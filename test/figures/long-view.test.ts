@@ -48,6 +48,50 @@ describe('the shared window', () => {
     const { turnaround } = sinking().solution.end
     expect(windowOf([sinking()]).top).toBeGreaterThan(turnaround?.scale ?? Number.NaN)
   })
+
+  it.each([0.5, 0.2, 0.05, 0.03, 0.02, 0.0145, 0.01, 0.005, 0.002])(
+    'holds an ending within ten pasts and a turn within sixteen: 1 + %f',
+    (sink) => {
+      const entry = sinking(sink)
+      const { origin, end } = entry.solution
+      const [past, turn] = [-(origin.time ?? 0), end.turnaround ?? { time: Number.NaN, scale: Number.NaN }]
+      const { to, top } = windowOf([entry])
+      if ((end.time ?? 0) <= 10 * past) expect(to).toBeGreaterThan(end.time ?? Number.NaN)
+      if (turn.time <= 16 * past) {
+        expect(to).toBeGreaterThan(1.04 * turn.time)
+        expect(top).toBeGreaterThan(turn.scale)
+      } else expect(to).toBeLessThan(3 * past)
+      expect(to).toBeLessThan(20.1 * past)
+    },
+  )
+
+  it('turns at 112 Gyr and is seen to', () => {
+    // In sin^(2/3) the turn comes after (π/2)/(1.5 √0.0145/14 Gyr) − 9.3 Gyr.
+    const entry = sinking(0.0145)
+    expect(entry.solution.end.turnaround?.time).toBeCloseTo(112.45, 1)
+    expect(windowOf([entry]).to).toBeGreaterThan(130)
+  })
+
+  it.each([flatLambda(), deSitter(), bounce(), bounce(40), flatLambda(0.01)].map((entry) => [entry] as const))(
+    'has no empty future: its curve leaves through the top in the last third, or the future is the shortest',
+    (entry) => {
+      const { from, to } = windowOf([entry])
+      const leaves = Array.from({ length: 1001 }, (_, i) => (to * i) / 1000).find(
+        (t) => (entry.scales([t])[0] ?? 9) > 5,
+      )
+      if (to > -0.5 * from) expect(leaves ?? to).toBeGreaterThan(to * 0.66)
+    },
+  )
+
+  it('is high enough for an ending at a size, and marks it there', () => {
+    const [time, scale] = [18, 9]
+    const history = (t: number) => (t > time ? null : scale - (scale - 1) * Math.sqrt(1 - t / time))
+    const solution = { ...flatLambda().solution, origin: { ...flatLambda().solution.origin, time: -14 } }
+    const end = { ...solution.end, kind: 'singular' as const, time, scale }
+    const chart = longView([{ solution: { ...solution, end }, scales: (times) => times.map(history) }])
+    expect(chart.y.to).toBeGreaterThan(scale)
+    expect(chart.curves[0]?.marks).toContainEqual({ kind: 'cross', at: [time, scale] })
+  })
 })
 
 describe('a sampled curve', () => {

@@ -1,7 +1,6 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import { fractionOf, linearRange, type Range, valueAt } from '../../lib/figures/scale'
-import { spanOf } from '../../lib/figures/span'
 import { type Tick, ticksOf } from '../../lib/figures/ticks'
 import { aside, between, closer, wider } from '../../lib/figures/zoom'
 
@@ -66,12 +65,5 @@ describe('an even axis', () => {
       '2.0\u202f×\u202f10⁶',
     ])
     expect(textsOf(0, 2e5)).toEqual(['0', '50\u202f000', '100\u202f000', '150\u202f000', '200\u202f000'])
-  })
-
-  it('has room about values that are all equal', () => {
-    expect(spanOf([0, 0], [0], false)).toMatchObject({ from: -1, to: 1 })
-    const { from, to } = spanOf([1, 1 + Number.EPSILON], [], false)
-    expect(from).toBeCloseTo(0.94, 12)
-    expect(to).toBeCloseTo(1.06, 12)
   })
 })

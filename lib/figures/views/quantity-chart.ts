@@ -7,8 +7,8 @@ import { columnAlong, type Values } from '../along'
 import type { Axis, Chart, Curve, Reference } from '../chart'
 import { finishOf } from '../long-view'
 import { readingsOf } from '../readings'
-import { placesAlong, type Ranges, rounded, sampleCurve } from '../sample'
-import type { Range } from '../scale'
+import { placesAlong, type Ranges, sampleCurve } from '../sample'
+import { fine, type Range } from '../scale'
 import { spanOf } from '../span'
 import { fitted } from '../text-width'
 import { againstOf, alternativeOf, futureOf } from './describe'
@@ -19,7 +19,7 @@ export interface Vertical {
   readonly quantity: string
   readonly label: string
   readonly symbol: string
-  /** What is compared, where the label alone would not say it. */
+  /** The symbol of what is compared, where the label alone would not say it. */
   readonly spelled?: string
   readonly unit: string
   /** Columns whose product it is. */
@@ -41,8 +41,10 @@ export function quantityChart(asked: Asked, vertical: Vertical): Chart {
   const readings = readingsOf(all, x, [by.now], STEPS)
   const divide = dividerOf(asked, vertical)
   const today = all.flatMap((values) => values([by.now]))
-  const log = compare === 'value' && vertical.logarithmic && x.scaling !== 'linear'
-  const y = spanOf(readings.values.flat(), steadyOf(by.now >= x.from && by.now <= x.to ? today : [], divide), log)
+  const y = spanOf(readings.values, {
+    steady: steadyOf(by.now >= x.from && by.now <= x.to ? today : [], divide),
+    kind: compare !== 'value' ? compare : vertical.logarithmic && x.scaling !== 'linear' ? 'size' : 'value',
+  })
   const axes = { x: { ...by.quantity, ...x }, y: { ...titled(asked, vertical), ...y } }
   const curves = all.map((values, slot) =>
     curveOf(
@@ -79,11 +81,17 @@ function compared(asked: Asked, vertical: Vertical, solution: Solution): Values 
     return own(places).map((value, i) => {
       const other = base[i] ?? null
       if (value === null || other === null) return null
-      if (compare === 'difference') return value - other
+      if (compare === 'difference') return known(value - other, value, other)
       return other === 0 ? null : value / other
     })
   }
 }
+
+/** What differs by less in parts of itself differs by rounding alone. */
+const ALIKE = 1e-11
+
+const known = (difference: number, value: number, other: number): number =>
+  Math.abs(difference) <= ALIKE * Math.max(Math.abs(value), Math.abs(other)) ? 0 : difference
 
 function valuesOf({ by }: Asked, { factors }: Vertical, solution: Solution): Values {
   const all = factors.map((column) => columnAlong(column, solution, by))
@@ -111,10 +119,11 @@ function titled(asked: Asked, { quantity, label, symbol, spelled, unit }: Vertic
   const { compare } = asked
   if (compare === 'value') return { quantity, label, symbol, unit }
   const name = fitted(focusOf(asked).label, 1, 14)
-  const how = compare === 'ratio' ? 'ratio to' : 'less that of'
+  const how = compare === 'ratio' ? 'ratio to' : 'minus that of'
   return {
     quantity: compare,
     label: `${spelled ?? label}, ${how} ${name}`,
+    ...(spelled ? { lead: spelled } : {}),
     symbol: '',
     unit: compare === 'ratio' ? '' : unit,
   }
@@ -132,7 +141,7 @@ export function curveOf(values: Values, ranges: Ranges, { special = [], ...look 
   const segments = sampleCurve({ places: placesAlong(ranges.x, special), values }, ranges)
   return {
     ...look,
-    segments: segments.map((segment) => segment.map(rounded)),
+    segments: segments.map((segment) => segment.map(([at, value]) => [fine(ranges.x, at), fine(ranges.y, value)])),
     marks: [],
     note: '',
     finish: finishOf(segments, ranges),
@@ -141,6 +150,6 @@ export function curveOf(values: Values, ranges: Ranges, { special = [], ...look 
 }
 
 function captionOf({ compare, solutions, focus }: Asked, x: Axis, what: string): string {
-  const how = { value: '', ratio: ', as a ratio to', difference: ', less that of' }[compare]
+  const how = { value: '', ratio: ', as a ratio to', difference: ', minus that of' }[compare]
   return `${capital(what)}${how && `${how} ${solutions[focus]?.label},`} against ${againstOf(x)}.`
 }
