@@ -10,6 +10,12 @@ import { ROOT } from './setup/project.mjs'
 const DEADLINE = 10_000
 
 /**
+ * The library that draws pixels keeps its memory for the next picture: what is given back and asked for anew costs more
+ * than the drawing. It reads this when it is loaded.
+ */
+process.env.MIMALLOC_PURGE_DELAY ??= '-1'
+
+/**
  * Settles when the server listens; throws where it cannot.
  * @param {number} port 0 takes any free one
  */

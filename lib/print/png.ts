@@ -50,49 +50,51 @@ function header(width: number, height: number): Uint8Array {
   return chunk('IHDR', data)
 }
 
-export interface Picture {
+/** Some rows of a picture, from above downwards. */
+export interface Band {
   readonly width: number
   readonly height: number
   /** Four bytes a pixel, the last of which is left out: our figures have a ground. */
   readonly pixels: Uint8Array
 }
 
-/** Bytes that are made at a time. */
-const STRIP = 2 ** 18
 /** The filter that takes from each byte the one above it: flat areas and upright lines become nothing. */
 const UP = 2
 
-/** The rows as they are compressed, some at a time in an array that is used again. */
-export function* filteredStrips({ width, height, pixels }: Picture): Generator<Uint8Array> {
-  const words = new Uint32Array(pixels.buffer, pixels.byteOffset, width * height)
+/** Bands one after the other as they are compressed, in an array that is used again. None has more than `most` rows. */
+export function rowFilter(width: number, most: number): (band: Band) => Uint8Array {
   const stride = 3 * width + 1
-  const rows = Math.max(1, Math.floor(STRIP / stride))
-  const strip = new Uint8Array(rows * stride)
-  for (let y = 0; y < height; y += rows) {
-    const count = Math.min(rows, height - y)
-    strip.fill(0)
-    for (let row = 0; row < count; row++) filterRow(words, (y + row) * width, width, strip, row * stride)
-    yield strip.subarray(0, count * stride)
+  const out = new Uint8Array(most * stride)
+  const above = new Uint32Array(width)
+  return ({ height, pixels }) => {
+    const words = new Uint32Array(pixels.buffer, pixels.byteOffset, width * height)
+    out.fill(0)
+    for (let y = 0; y < height; y++) {
+      const row = words.subarray(y * width, (y + 1) * width)
+      filterRow(row, y === 0 ? above : words.subarray((y - 1) * width, y * width), out, y * stride)
+    }
+    above.set(words.subarray((height - 1) * width))
+    return out.subarray(0, height * stride)
   }
 }
 
-/** `strip` holds nothing yet. */
-function filterRow(words: Uint32Array, from: number, width: number, strip: Uint8Array, at: number): void {
-  strip[at] = UP
-  for (let x = 0; x < width; x++) {
-    const here = words[from + x]
-    const above = from === 0 ? 0 : words[from + x - width]
-    if (here === above) continue
+/** `out` holds nothing yet. */
+function filterRow(row: Uint32Array, above: Uint32Array, out: Uint8Array, at: number): void {
+  out[at] = UP
+  for (let x = 0; x < row.length; x++) {
+    const here = row[x]
+    const over = above[x]
+    if (here === over) continue
     const to = at + 1 + 3 * x
-    strip[to] = here - above
-    strip[to + 1] = (here >>> 8) - (above >>> 8)
-    strip[to + 2] = (here >>> 16) - (above >>> 16)
+    out[to] = here - over
+    out[to + 1] = (here >>> 8) - (over >>> 8)
+    out[to + 2] = (here >>> 16) - (over >>> 16)
   }
 }
 
 /** `compressed` are the filtered rows. */
 export function pngFile(
-  { width, height }: Picture,
+  { width, height }: Pick<Band, 'width' | 'height'>,
   compressed: Uint8Array,
   dpi: number,
   about: Readonly<Record<string, string>>,

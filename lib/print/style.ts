@@ -30,7 +30,8 @@ const STYLES: readonly (readonly [classes: string, style: Style])[] = [
   ['curve', { fill: 'none', stroke: 'hue', 'stroke-linecap': 'round', 'stroke-linejoin': 'round' }],
   ['cross', { fill: 'none', stroke: 'hue', 'stroke-linecap': 'round' }],
   ['asymptote', { fill: 'none', stroke: 'hue' }],
-  ['leader', { fill: 'none', stroke: 'hue', opacity: 0.55 }],
+  // Not `opacity`, which asks for a layer: the library that draws pixels dies of one that lies outside of the rows it draws.
+  ['leader', { fill: 'none', stroke: 'hue', 'stroke-opacity': 0.55 }],
   ['ring', { fill: 'ground', stroke: 'hue' }],
   ['arrow', { fill: 'hue' }],
   ['name', { fill: 'hue', 'font-weight': 600, halo: 'ground' }],

@@ -77,7 +77,6 @@ function draw(node: SvgNode, page: Page): void {
   if (tag === 'defs' || tag === 'title') return
   pdf.save()
   if (of.transform !== undefined) translate(pdf, String(of.transform))
-  if (of.opacity !== undefined) pdf.opacity(Number(of.opacity))
   if (tag === 'text') for (const run of runsOfText(node, page.faces)) write(run, page)
   else if (tag === 'g' || tag === 'svg' || tag === 'a')
     for (const child of children) typeof child !== 'string' && draw(child, page)
@@ -131,6 +130,7 @@ function trace(tag: string, of: Attributes, pdf: PDFKit.PDFDocument): void {
 
 function line(of: Attributes, pdf: PDFKit.PDFDocument): void {
   paint(String(of.stroke), pdf.strokeColor.bind(pdf))
+  if (of['stroke-opacity'] !== undefined) pdf.strokeOpacity(Number(of['stroke-opacity']))
   pdf.lineWidth(Number(of['stroke-width'] ?? 1))
   pdf.lineCap((of['stroke-linecap'] ?? 'butt') as 'butt' | 'round')
   pdf.lineJoin((of['stroke-linejoin'] ?? 'miter') as 'miter' | 'round')

@@ -10,15 +10,25 @@ export interface About {
   readonly description: string
 }
 
-export function toSvg({ node, width, height, scale }: Sheet, faces: Faces, { title, description }: About): string {
+/** The elements of a sheet, letters first. */
+function drawingOf({ node }: Sheet, faces: Faces): readonly SvgNode[] {
   const letters = lettersWith(faces)
   const drawing = outlined(node, letters)
+  return [letters.definitions(), drawing]
+}
+
+const NAMESPACES = {
+  xmlns: 'http://www.w3.org/2000/svg',
+  // Without its prefix, references are not known to every program.
+  'xmlns:xlink': 'http://www.w3.org/1999/xlink',
+}
+
+export function toSvg(sheet: Sheet, faces: Faces, { title, description }: About): string {
+  const { width, height, scale } = sheet
   const root = svg(
     'svg',
     {
-      xmlns: 'http://www.w3.org/2000/svg',
-      // Without its prefix, references are not known to every program.
-      'xmlns:xlink': 'http://www.w3.org/1999/xlink',
+      ...NAMESPACES,
       width: `${px(width * scale)}pt`,
       height: `${px(height * scale)}pt`,
       viewBox: `0 0 ${width} ${height}`,
@@ -27,10 +37,24 @@ export function toSvg({ node, width, height, scale }: Sheet, faces: Faces, { tit
     },
     svg('title', { id: 'title' }, title),
     svg('desc', { id: 'description' }, description),
-    letters.definitions(),
-    drawing,
+    ...drawingOf(sheet, faces),
   )
   return `<?xml version="1.0" encoding="UTF-8"?>\n${serialize(root)}\n`
+}
+
+/** Pixels of a sheet drawn `width` wide. */
+export const pixelsOf = (sheet: Sheet, width: number) => ({
+  width,
+  height: Math.round((width * sheet.height) / sheet.width),
+})
+
+/** SVG of some of the rows of pixels of a sheet drawn `width` wide. */
+export function bandsOf(sheet: Sheet, faces: Faces, width: number): (first: number, rows: number) => string {
+  const drawing = drawingOf(sheet, faces).map(serialize).join('')
+  const scale = width / sheet.width
+  const spaces = Object.entries(NAMESPACES).map(([name, value]) => ` ${name}="${value}"`)
+  return (first, rows) =>
+    `<svg${spaces.join('')} width="${width}" height="${rows}"><g transform="matrix(${scale} 0 0 ${scale} 0 ${-first})">${drawing}</g></svg>`
 }
 
 /** The rim is drawn below the letters by itself, since not every program knows `paint-order`. */

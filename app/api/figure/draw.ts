@@ -3,9 +3,10 @@ import { buffer } from 'node:stream/consumers'
 import { createDeflate } from 'node:zlib'
 import { renderAsync } from '@resvg/resvg-js'
 import type { FigureFile } from '../../../lib/answers/figure'
-import { filteredStrips, type Picture, pngFile } from '../../../lib/print/png'
+import { type Band, pngFile, rowFilter } from '../../../lib/print/png'
+import type { Sheet } from '../../../lib/print/sheet'
 import { toPdf } from '../../../lib/print/to-pdf'
-import { toSvg } from '../../../lib/print/to-svg'
+import { bandsOf, pixelsOf, toSvg } from '../../../lib/print/to-svg'
 import { typeface } from './faces'
 
 /** Of the first version: the same figure has the same bytes whenever it is made. */
@@ -15,35 +16,47 @@ export async function drawn(file: FigureFile): Promise<Uint8Array<ArrayBuffer>> 
   const { sheet, about, format } = file
   const { faces, files } = typeface()
   if (format.key === 'pdf') return toPdf(sheet, { faces, files, about, date: DATE })
-  const svg = toSvg(sheet, faces, about)
-  return format.key === 'svg' ? new TextEncoder().encode(svg) : png(svg, file)
+  return format.key === 'svg' ? new TextEncoder().encode(toSvg(sheet, faces, about)) : png(file)
 }
 
-/** Letters are outlines already, so no font is looked for. */
-async function png(svg: string, { sheet, dpi, about }: FigureFile): Promise<Uint8Array<ArrayBuffer>> {
-  const value = Math.round((sheet.width * sheet.scale * dpi) / 72)
-  const { width, height, pixels } = await renderAsync(svg, {
-    fitTo: { mode: 'width', value },
-    font: { loadSystemFonts: false },
-    // The last row may be covered in part.
-    background: sheet.ground,
-  })
-  const picture = { width, height, pixels }
-  const words = { Title: about.title, Description: about.description, Software: 'Longhence' }
-  return pngFile(picture, await compressed(picture), dpi, words)
-}
-
+/** Pixels that are drawn at a time. Memory for a whole picture would have to be found by the system first, which takes longer than drawing. */
+const BAND = 2 ** 20
 /** Higher levels take far more time for little, since most of a filtered figure is nothing. */
 const LEVEL = 3
 
-async function compressed(picture: Picture): Promise<Uint8Array> {
+async function png({ sheet, dpi, about }: FigureFile): Promise<Uint8Array<ArrayBuffer>> {
+  const size = pixelsOf(sheet, Math.round((sheet.width * sheet.scale * dpi) / 72))
   const deflate = createDeflate({ level: LEVEL, memLevel: 9 })
-  const all = buffer(deflate)
-  for (const strip of filteredStrips(picture)) {
+  const compressed = buffer(deflate)
+  const most = Math.ceil(BAND / size.width)
+  const filtered = rowFilter(size.width, most)
+  for await (const band of bands(sheet, size, most)) {
     await new Promise<void>((resolve, reject) => {
-      deflate.write(strip, (error) => (error ? reject(error) : resolve()))
+      deflate.write(filtered(band), (error) => (error ? reject(error) : resolve()))
     })
   }
   deflate.end()
-  return all
+  const words = { Title: about.title, Description: about.description, Software: 'Longhence' }
+  return pngFile(size, await compressed, dpi, words)
+}
+
+/** One after the other; while one is read, the next is drawn. */
+async function* bands(
+  sheet: Sheet,
+  { width, height }: Pick<Band, 'width' | 'height'>,
+  rows: number,
+): AsyncGenerator<Band> {
+  const svgOf = bandsOf(sheet, typeface().faces, width)
+  const draw = (first: number): Promise<Band> | null => {
+    if (first >= height) return null
+    // Letters are outlines already, so no font is looked for. The last row may be covered in part.
+    const options = { font: { loadSystemFonts: false }, background: sheet.ground }
+    return renderAsync(svgOf(first, Math.min(rows, height - first)), options)
+  }
+  let next = draw(0)
+  for (let first = rows; next !== null; first += rows) {
+    const band: Band = await next
+    next = draw(first)
+    yield band
+  }
 }
