@@ -1,13 +1,14 @@
 'use client'
 
-import { type ReactNode, useDeferredValue, useEffect } from 'react'
+import { type ReactNode, useDeferredValue, useEffect, useState } from 'react'
 import type { Explorer as View } from '../lib/answers/explorer'
 import type { RulerView } from '../lib/answers/ruler-view'
 import type { Shelf } from '../lib/answers/shelf'
 import type { TakeAwayLists } from '../lib/answers/take-away'
 import { useAddress } from './live/address'
 import { follow } from './live/follow'
-import { useExplorer } from './live/use-explorer'
+import { type Packed, unpacked } from './live/packed'
+import { tellViewsSeen, useExplorer } from './live/use-explorer'
 import { useShownFrame } from './live/use-shown-frame'
 import { useStill } from './live/use-still'
 import { Figure } from './ui/figure'
@@ -24,20 +25,26 @@ import { TakeAway } from './ui/take-away'
 import { Verdicts } from './ui/verdicts'
 import { Views } from './ui/views'
 
-interface Props {
+/** What comes with the page. */
+export interface Load {
   readonly initial: View
-  /** The question that `initial` answers. */
-  readonly asked: string
   readonly ruler: RulerView
   readonly shelf: Shelf
   readonly lists: TakeAwayLists
   readonly edition: Edition
+}
+
+interface Props {
+  readonly load: Packed<Load>
+  /** The question that it answers. */
+  readonly asked: string
   /** The ruler as the server draws it. */
   readonly children: ReactNode
 }
 
 /** The page: complete as the server draws it, and alive from then on. */
-export function Explorer({ initial, asked, ruler, shelf, lists, edition, children }: Props) {
+export function Explorer({ load, asked, children }: Props) {
+  const [{ initial, ruler, shelf, lists, edition }] = useState(() => unpacked(load))
   const address = useAddress()
   const frame = useShownFrame()
   const { view, desk, waiting, busy, trouble } = useExplorer(address, initial, asked, frame)
@@ -52,7 +59,7 @@ export function Explorer({ initial, asked, ruler, shelf, lists, edition, childre
   return (
     // biome-ignore lint/a11y: links stay links; what is caught here is the click that they get
     <div className="page" data-theme={desk.place.theme} onClick={address ? follow : undefined}>
-      <Header desk={desk} address={address} />
+      <Header desk={ruled.desk} depth={address?.depth} />
       <main id="scenarios" tabIndex={-1} aria-busy={busy || later !== view || undefined} data-shown={view.links.here}>
         <h1 className={initial.titled || view.titled ? undefined : 'spoken'}>{view.title}</h1>
         {view.refusal && <Refusal refusal={view.refusal} />}
@@ -65,18 +72,19 @@ export function Explorer({ initial, asked, ruler, shelf, lists, edition, childre
             <Ingredients
               key={`${desk.place.focus} ${desk.scenarios.length}`}
               desk={desk}
+              still={ruled.desk}
               sets={shelf.sets}
               live={address !== null}
             />
-            <InSight of={later} moving={moving}>
+            <InSight of={later} moving={moving} className="far of-moments">
               {(shown) => <Moments view={shown} />}
             </InSight>
-            <InSight of={later} moving={moving}>
+            <InSight of={later} moving={moving} className="far of-measures">
               {(shown) => <Measures view={shown} />}
             </InSight>
           </div>
         </div>
-        <InSight of={later} moving={moving}>
+        <InSight of={later} moving={moving} className="far of-views" told={tellViewsSeen}>
           {(shown) => <Views view={shown} shown={address && frame} />}
         </InSight>
         <RulerPlace {...ruled} initial={ruler} shelf={shelf}>
@@ -84,7 +92,7 @@ export function Explorer({ initial, asked, ruler, shelf, lists, edition, childre
         </RulerPlace>
         <TakeAway desk={ruled.desk} lists={lists} version={edition.version} live={address !== null} />
       </main>
-      <Footer data={desk.links.data} edition={edition} theme={desk.place.theme ?? undefined} />
+      <Footer data={ruled.desk.links.data} edition={edition} theme={desk.place.theme ?? undefined} />
       {address && <Status view={view} moving={moving} waiting={waiting} trouble={trouble} />}
     </div>
   )

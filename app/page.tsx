@@ -6,9 +6,10 @@ import { SHELF } from '../lib/answers/shelf'
 import { takeAwayLists } from '../lib/answers/take-away'
 import { HOME } from './api/home'
 import { EDITION } from './edition'
-import { Explorer } from './explorer'
+import { Explorer, type Load } from './explorer'
 import { linkCard } from './link-card'
 import { askedOf } from './live/fetch-view'
+import { packed } from './live/packed'
 import { OlderEngine } from './ui/older-engine'
 import { Ruler } from './ui/ruler'
 
@@ -32,10 +33,11 @@ export default async function Page(props: Props) {
   const ruler = rulerOf(all(s), (key) => all(others[key])[0])
   const view = await read(props)
   const asked = askedOf(await queryOf(props), null)
+  const load = packed<Load>({ initial: view, ruler, shelf: SHELF, lists: LISTS, edition: EDITION })
   return (
     <>
       <OlderEngine asked={all(others.engine)[0]} today={EDITION.engine} />
-      <Explorer initial={view} asked={asked} ruler={ruler} shelf={SHELF} lists={LISTS} edition={EDITION}>
+      <Explorer load={load} asked={asked}>
         <Ruler desk={view} view={ruler} shelf={SHELF} hand={null} />
       </Explorer>
     </>

@@ -1,9 +1,11 @@
 /** The live page: its parts by the names that people see, and hands that drag. */
 import { expect, type Locator, type Page } from '@playwright/test'
 
-/** The page, once its scripts have taken over. */
+/** The page, once its scripts have taken over, as they do when a hand comes near. */
 export async function open(page: Page, path: string): Promise<void> {
   await page.goto(path)
+  // Of a hand that is neither a mouse nor a finger, whose tests come later.
+  await page.evaluate(() => dispatchEvent(new Event('pointermove')))
   await expect(page.getByRole('button', { name: 'Copy link' })).toBeVisible()
 }
 

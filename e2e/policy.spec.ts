@@ -7,12 +7,22 @@ for (const path of ['/', '/?s=matter:0.3,eos:constant,w:-1.2', '/?s=matter:none'
     const heard = await complaints(page)
     await page.goto(path, { waitUntil: 'networkidle' })
     expect(await page.locator('h1').count()).toBe(1)
-    // The framework's scripts have run.
-    expect(await page.evaluate(() => 'next' in window)).toBe(true)
+    const rests = () => page.evaluate(() => !('next' in window))
+    expect(await rests()).toBe(true)
+    // The framework's scripts run when a hand comes near.
+    await page.mouse.move(1, 1)
+    await expect.poll(rests).toBe(false)
+    await page.waitForLoadState('networkidle')
     const expected = path === '/nothing-here' ? [expect.stringContaining('404')] : []
     expect(heard).toEqual(expected)
   })
 }
+
+test('a page that nobody touches comes alive by itself', async ({ page }) => {
+  await page.goto('/')
+  expect(await page.evaluate(() => 'next' in window)).toBe(false)
+  await expect(page.getByRole('button', { name: 'Copy link' })).toBeVisible()
+})
 
 test('a script without the nonce does not run', async ({ page }) => {
   const heard = await complaints(page)

@@ -266,3 +266,39 @@ describe('stopping', () => {
     await failed
   })
 })
+
+describe('a page', () => {
+  const scripts = ['/a.js', '/b.js'].map((source) => `<script src="${source}" async="" nonce="n+/="></script>`)
+  const page = `<html><head><title>Ω_m älter</title>${scripts.join('')}</head><body>ü<script src="/a.js" async=""></script></body></html>`
+  /** Written in pieces that cut letters and tags. */
+  const serve = (size: number, type = 'text/html; charset=utf-8') =>
+    start((_request, response) => {
+      response.setHeader('Content-Type', type)
+      const bytes = Buffer.from(page)
+      for (let i = 0; i < bytes.length; i += size) response.write(bytes.subarray(i, i + size))
+      response.end()
+    })
+
+  test.each([1, 7, 100, 10_000])(
+    'rests: its scripts are fetched and wait, written %i bytes at a time',
+    async (size) => {
+      const { port } = await serve(size)
+      const body = String((await get(port, '/')).body)
+      const [head, rest] = body.split('</head>')
+      expect(head).not.toContain('async')
+      expect(head).toContain('<title>Ω_m älter</title>')
+      expect(head).toContain('<script nonce="n+/=" data-scripts="/a.js /b.js">')
+      expect(head.match(/<link rel="preload" as="script" [^>]*nonce="n\+\/=" href="\/[ab]\.js"\/>/g)).toHaveLength(2)
+      expect(rest).toBe('<body>ü<script src="/a.js" async=""></script></body></html>')
+    },
+  )
+
+  test('without scripts, and what is no page, are passed on as they are', async () => {
+    const plain = await start((_request, response) => {
+      response.setHeader('Content-Type', 'text/html').end('<head></head>', 'latin1')
+    })
+    expect(String((await get(plain.port, '/')).body)).toBe('<head></head>')
+    const { port } = await serve(9, 'text/plain; charset=utf-8')
+    expect(String((await get(port, '/')).body)).toBe(page)
+  })
+})

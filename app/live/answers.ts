@@ -3,7 +3,7 @@
  * of a gesture this browser computes, as soon as it can; when the gesture is over, the server's answer is the one that
  * stands. Where the server does not answer, this browser does. Nothing old is ever shown over something newer.
  */
-import type { Explorer } from '../../lib/answers/explorer'
+import type { Brief, Explorer } from '../../lib/answers/explorer'
 import type { Ask, Progress } from './asking'
 
 export interface Answer {
@@ -65,7 +65,8 @@ export function createAnswers(first: Answer, { isAwake, compute, load }: Means) 
     set({ computing: true })
     compute(state.wanted)
   }
-  const show = (answer: Answer) => {
+  const show = ({ view, ...rest }: Omit<Answer, 'view'> & { readonly view: Brief }) => {
+    const answer: Answer = { ...rest, view: whole(view, state.answer.view) }
     const its = turns.get(answer.asked) ?? -1
     const stands = its === shown && answer.here && !state.answer.here
     if (its < shown || stands) return
@@ -98,7 +99,7 @@ export function createAnswers(first: Answer, { isAwake, compute, load }: Means) 
       if (isAwake()) computeHere()
       if (isOpen() && (!moving || !(isAwake() || state.fetching))) ask()
     },
-    computed(asked: string, view: Explorer | null) {
+    computed(asked: string, view: Brief | null) {
       if (view) show({ asked, view, here: true })
       if (asked === state.wanted) set({ computing: false })
     },
@@ -106,6 +107,11 @@ export function createAnswers(first: Answer, { isAwake, compute, load }: Means) 
     again: ask,
   }
 }
+
+/** What is out of sight stays as it was. */
+const whole = (view: Brief, before: Explorer): Explorer => (isWhole(view) ? view : { ...view, panel: before.panel })
+
+const isWhole = (view: Brief): view is Explorer => view.panel !== null
 
 /** The same content as the same object has nothing drawn again. */
 function unlessSame(answer: Answer, before: Answer): Answer {

@@ -1,6 +1,6 @@
 /** Questions to the server, with its answers kept. Loaded with the first question: the page comes with an answer. */
 import { QueryClient, QueryObserver } from '@tanstack/react-query'
-import type { Explorer } from '../../lib/answers/explorer'
+import type { Brief } from '../../lib/answers/explorer'
 import { fetchView } from './fetch-view'
 
 /** Milliseconds: between two tries of one request, and until a failed one is made again unasked. */
@@ -9,7 +9,7 @@ const RECOVER = 5000
 
 export interface Progress {
   readonly asked: string
-  readonly view: Explorer | null
+  readonly view: Brief | null
   readonly fetching: boolean
   /** True from the first try that failed. */
   readonly failing: boolean
@@ -23,7 +23,7 @@ export type Ask = (asked: string) => void
 export function startAsking(told: (progress: Progress) => void): Ask {
   const client = new QueryClient()
   let current: string | null = null
-  let observer: QueryObserver<Explorer> | null = null
+  let observer: QueryObserver<Brief> | null = null
   const tell = () => {
     const result = observer?.getCurrentResult()
     if (!result || current === null) return
@@ -36,7 +36,7 @@ export function startAsking(told: (progress: Progress) => void): Ask {
     if (observer && again) void observer.refetch({ cancelRefetch: false })
     else if (observer) observer.setOptions(optionsOf(asked))
     else {
-      observer = new QueryObserver<Explorer>(client, optionsOf(asked))
+      observer = new QueryObserver<Brief>(client, optionsOf(asked))
       observer.subscribe(tell)
     }
     tell()

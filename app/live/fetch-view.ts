@@ -1,9 +1,9 @@
 /** Asks the server for what an address shows. */
-import type { Explorer } from '../../lib/answers/explorer'
+import type { Brief } from '../../lib/answers/explorer'
 import { PLACE_KEYS, RULER_KEYS } from '../../lib/words/place'
 
-/** What of an address the answer depends on; figures are drawn for one frame. */
-export function askedOf(search: string, frame: string | null): string {
+/** What of an address the answer depends on; figures are drawn for one frame, and of the two views maybe the long one alone. */
+export function askedOf(search: string, frame: string | null, isBrief = false): string {
   const query = new URLSearchParams(search)
   const asked = new URLSearchParams(query.getAll('s').map((code) => ['s', code]))
   const apart: readonly string[] = RULER_KEYS
@@ -12,10 +12,11 @@ export function askedOf(search: string, frame: string | null): string {
     if (value !== null) asked.set(key, value)
   }
   if (frame !== null) asked.set('frame', frame)
+  if (isBrief) asked.set('parts', 'long')
   return asked.toString()
 }
 
-export async function fetchView(asked: string, signal: AbortSignal): Promise<Explorer> {
+export async function fetchView(asked: string, signal: AbortSignal): Promise<Brief> {
   const response = await fetch(`/api/explorer?${asked}`, { signal }).catch((error: unknown) => {
     throw signal.aborted ? error : new Error('The server cannot be reached.')
   })

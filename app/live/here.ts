@@ -2,11 +2,11 @@
  * The engine in this browser: a worker, loaded when it is first needed. Of the explorer's questions it gets one at a time, the
  * newest next.
  */
-import type { Explorer } from '../../lib/answers/explorer'
+import type { Brief } from '../../lib/answers/explorer'
 import type { Computed, Question } from './worker'
 
 /** Told of every answer; null where there is none. */
-type Listener = (asked: string, view: Explorer | null) => void
+type Listener = (asked: string, view: Brief | null) => void
 
 const EXPLORER = '/api/explorer'
 

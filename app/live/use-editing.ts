@@ -1,18 +1,17 @@
 /** What a person types, chooses and drags in the form, and where it leads. */
-import { useState } from 'react'
+import { useLayoutEffect, useMemo, useRef, useState } from 'react'
 import type { Desk } from '../../lib/words/desk'
 import { edited } from '../../lib/words/edit'
 import { go } from './address'
 
-interface Draft {
+/** What a field holds until it is taken over, and what is wrong with it. */
+export interface Draft {
   readonly text: string
   readonly complaint: string | null
 }
 
-export interface Editing {
-  /** What a field holds: as typed, until it is taken over. */
-  readonly textOf: (name: string, value: string) => string
-  readonly complaintOf: (name: string) => string | null
+/** What can be done with fields, by their names; the same for the whole life of a form. */
+export interface Hand {
   readonly type: (name: string, text: string) => void
   readonly drop: (name: string) => void
   /** Takes over what was typed. */
@@ -22,33 +21,43 @@ export interface Editing {
   readonly drag: (name: string, text: string, gesture: string) => void
 }
 
+export interface Editing {
+  readonly drafts: ReadonlyMap<string, Draft>
+  readonly hand: Hand
+}
+
 export function useEditing(desk: Desk): Editing {
   const [drafts, setDrafts] = useState<ReadonlyMap<string, Draft>>(new Map())
-  const put = (name: string, draft: Draft | null) =>
-    setDrafts((before) => {
-      const after = new Map(before)
-      if (draft) after.set(name, draft)
-      else after.delete(name)
-      return after
-    })
-  const take = (name: string, text: string, gesture: string | null) => {
-    const result = edited(desk, name, text)
-    if (result.ok) {
-      put(name, null)
-      go(result.link, gesture)
-    } else put(name, { text, complaint: result.complaint })
-  }
-  const commit = (name: string) => {
-    const draft = drafts.get(name)
-    if (draft && draft.complaint === null) take(name, draft.text, null)
-  }
-  return {
-    textOf: (name, value) => drafts.get(name)?.text ?? value,
-    complaintOf: (name) => drafts.get(name)?.complaint ?? null,
-    type: (name, text) => put(name, { text, complaint: null }),
-    drop: (name) => put(name, null),
-    commit,
-    choose: (name, text) => take(name, text, null),
-    drag: take,
-  }
+  const latest = useRef({ desk, drafts })
+  useLayoutEffect(() => {
+    latest.current = { desk, drafts }
+  }, [desk, drafts])
+  const hand = useMemo((): Hand => {
+    const put = (name: string, draft: Draft | null) =>
+      setDrafts((before) => {
+        if (!draft && !before.has(name)) return before
+        const after = new Map(before)
+        if (draft) after.set(name, draft)
+        else after.delete(name)
+        return after
+      })
+    const take = (name: string, text: string, gesture: string | null) => {
+      const result = edited(latest.current.desk, name, text)
+      if (result.ok) {
+        put(name, null)
+        go(result.link, gesture)
+      } else put(name, { text, complaint: result.complaint })
+    }
+    return {
+      type: (name, text) => put(name, { text, complaint: null }),
+      drop: (name) => put(name, null),
+      commit: (name) => {
+        const draft = latest.current.drafts.get(name)
+        if (draft && draft.complaint === null) take(name, draft.text, null)
+      },
+      choose: (name, text) => take(name, text, null),
+      drag: take,
+    }
+  }, [])
+  return { drafts, hand }
 }

@@ -50,6 +50,13 @@ export function useExplorer(address: Address | null, initial: Explorer, asked: s
   }
 }
 
+/** Whether the view below the long one is in sight. */
+let viewsSeen = true
+
+export function tellViewsSeen(seen: boolean): void {
+  viewsSeen = seen
+}
+
 /** What came with the page is drawn for every frame; later answers for the one that is seen. */
 function useAnswers(initial: Explorer, asked: string, frame: string | null) {
   const [answers] = useState(() => createAnswers({ asked, view: initial, here: false }, MEANS))
@@ -57,7 +64,7 @@ function useAnswers(initial: Explorer, asked: string, frame: string | null) {
     onComputed(answers.computed)
     return watchAddress(({ search, moving }) => {
       const plain = askedOf(search, null)
-      answers.want(plain === asked ? asked : askedOf(search, frame), moving)
+      answers.want(plain === asked ? asked : askedOf(search, frame, moving && !viewsSeen), moving)
     })
   }, [answers, asked, frame])
   useOffline(answers.again)

@@ -1,19 +1,29 @@
+import { memo } from 'react'
 import type { Field } from '../../lib/words/fields'
-import type { Editing } from '../live/use-editing'
+import type { Draft, Hand } from '../live/use-editing'
 import { Means } from './means'
 import { Slider } from './slider'
 import { Symbols } from './symbol'
 
 interface Props {
   readonly field: Field
-  readonly editing: Editing
+  readonly draft: Draft | undefined
+  readonly hand: Hand
   readonly live: boolean
 }
 
+/** Fields are read anew from every address, and a hand changes one or two of them. */
+const isSame = (one: Props, other: Props): boolean =>
+  one.draft === other.draft &&
+  one.hand === other.hand &&
+  one.live === other.live &&
+  JSON.stringify(one.field) === JSON.stringify(other.field)
+
 /** One parameter: symbol, words, where it is typed or chosen, and where it is dragged. */
-export function FieldRow({ field, editing, live }: Props) {
+export const FieldRow = memo(function FieldRow(props: Props) {
+  const { field, draft, hand } = props
   const id = `field-${field.name}`
-  const complaint = editing.complaintOf(field.name)
+  const complaint = draft?.complaint ?? null
   return (
     <div className={field.kind === 'closing' ? 'field closing' : 'field'}>
       <span className="named">
@@ -33,25 +43,26 @@ export function FieldRow({ field, editing, live }: Props) {
           {field.kind === 'closing' && ', closes'}
         </label>
       </span>
-      <Control field={field} id={id} editing={editing} live={live} />
+      <Control id={id} {...props} />
       {complaint && (
         <p id={`${id}-complaint`} className="complaint" role="alert">
           {complaint}
         </p>
       )}
-      {field.kind === 'number' && <span className="track">{live && <Slider field={field} drag={editing.drag} />}</span>}
+      {field.kind === 'number' && (
+        <span className="track">
+          <Slider field={field} drag={hand.drag} />
+        </span>
+      )}
     </div>
   )
-}
+}, isSame)
 
-interface ControlProps {
-  readonly field: Field
+interface ControlProps extends Props {
   readonly id: string
-  readonly editing: Editing
-  readonly live: boolean
 }
 
-function Control({ field, id, editing, live }: ControlProps) {
+function Control({ field, id, draft, hand, live }: ControlProps) {
   switch (field.kind) {
     case 'closing':
       return (
@@ -61,16 +72,16 @@ function Control({ field, id, editing, live }: ControlProps) {
         </span>
       )
     case 'choice':
-      return <Choices field={field} id={id} choose={editing.choose} />
+      return <Choices field={field} id={id} choose={hand.choose} />
     case 'text':
-      return <input className="wide" maxLength={2 * field.most} {...typed(field, id, editing)} />
+      return <input className="wide" maxLength={2 * field.most} {...typed(field, id, draft, hand)} />
     default:
       return (
         <span className="entry">
-          <input inputMode="text" title={field.allowed} {...typed(field, id, editing)} />
+          <input inputMode="text" title={field.allowed} {...typed(field, id, draft, hand)} />
           <span className="unit">
             {field.unit}
-            {live && field.kind === 'number' && <Reset field={field} choose={editing.choose} />}
+            {live && field.kind === 'number' && <Reset field={field} choose={hand.choose} />}
           </span>
         </span>
       )
@@ -79,7 +90,7 @@ function Control({ field, id, editing, live }: ControlProps) {
 
 interface ResetProps {
   readonly field: Extract<Field, { kind: 'number' }>
-  readonly choose: Editing['choose']
+  readonly choose: Hand['choose']
 }
 
 /** Back to what holds where nothing is typed. */
@@ -93,12 +104,12 @@ function Reset({ field: { name, label, value, usual }, choose }: ResetProps) {
 }
 
 /** What is typed is taken over on Enter and on leaving the field; Escape takes it back. */
-function typed({ name, value }: Field, id: string, { textOf, complaintOf, type, commit, drop }: Editing) {
-  const wrong = complaintOf(name) !== null
+function typed({ name, value }: Field, id: string, draft: Draft | undefined, { type, commit, drop }: Hand) {
+  const wrong = draft !== undefined && draft.complaint !== null
   return {
     id,
     name,
-    value: textOf(name, value),
+    value: draft?.text ?? value,
     'aria-invalid': wrong || undefined,
     'aria-describedby': wrong ? `${id}-complaint` : undefined,
     onChange: ({ target }: { readonly target: HTMLInputElement }) => type(name, target.value),
@@ -113,7 +124,7 @@ function typed({ name, value }: Field, id: string, { textOf, complaintOf, type, 
 interface ChoicesProps {
   readonly field: Extract<Field, { kind: 'choice' }>
   readonly id: string
-  readonly choose: Editing['choose']
+  readonly choose: Hand['choose']
 }
 
 function Choices({ field, id, choose }: ChoicesProps) {

@@ -1,3 +1,4 @@
+import { memo } from 'react'
 import type { Desk } from '../../lib/words/desk'
 import { type Address, undo } from '../live/address'
 import { CopyLink } from './copy-link'
@@ -7,11 +8,11 @@ const NAMES = { paper: 'Paper', night: 'Night' } as const
 
 interface Props {
   readonly desk: Desk
-  /** Null until the page is alive: what needs that keeps its room. */
-  readonly address: Address | null
+  /** How many changes can be undone. Undefined until the page is alive: what needs that keeps its room. */
+  readonly depth: Address['depth'] | undefined
 }
 
-export function Header({ desk, address }: Props) {
+export const Header = memo(function Header({ desk, depth }: Props) {
   const { place, links } = desk
   return (
     <header className="masthead">
@@ -22,10 +23,10 @@ export function Header({ desk, address }: Props) {
         Longhence
       </a>
       <div className="acts-of-page">
-        <button type="button" className={address && address.depth > 0 ? 'act' : 'act absent'} onClick={undo}>
+        <button type="button" className={depth ? 'act' : 'act absent'} onClick={undo}>
           Undo
         </button>
-        <CopyLink link={links.here} live={address !== null} />
+        <CopyLink link={links.here} live={depth !== undefined} />
         <Tables links={links.tables} />
       </div>
       <nav className="themes" aria-label="Theme">
@@ -37,4 +38,4 @@ export function Header({ desk, address }: Props) {
       </nav>
     </header>
   )
-}
+})

@@ -1,3 +1,4 @@
+import { memo } from 'react'
 import type { ShelvedSet } from '../../lib/answers/shelf'
 import type { Desk } from '../../lib/words/desk'
 import { Sentence, Symbols } from './symbol'
@@ -10,7 +11,7 @@ interface Props {
 const queryOf = ({ links }: Desk): string => links.here.replace(/^\/\?/, '')
 
 /** Sets of parameters from the literature, each a link that gives them to the scenario in focus. */
-export function Published({ desk, sets }: Props) {
+export const Published = memo(function Published({ desk, sets }: Props) {
   const own = desk.scenarios[desk.place.focus]?.plainCode.replace(/,as:.*$/s, '')
   const chosen = sets.find(({ plain }) => plain !== null && plain === own)
   const query = queryOf(desk)
@@ -45,10 +46,10 @@ export function Published({ desk, sets }: Props) {
       )}
     </div>
   )
-}
+})
 
 /** Links that change H₀ alone, so that the angle or the age is that of another scenario or of a published set. */
-export function Retune({ desk, sets }: Props) {
+export const Retune = memo(function Retune({ desk, sets }: Props) {
   const { scenarios, place } = desk
   const others = scenarios.filter(({ slot }) => slot !== place.focus)
   const models = [
@@ -71,4 +72,4 @@ export function Retune({ desk, sets }: Props) {
       <p>to keep the age of {links('age')}</p>
     </details>
   )
-}
+})

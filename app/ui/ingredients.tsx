@@ -1,4 +1,4 @@
-import type { ReactNode } from 'react'
+import { memo, type ReactNode } from 'react'
 import type { ShelvedSet } from '../../lib/answers/shelf'
 import type { Desk } from '../../lib/words/desk'
 import type { FieldGroup } from '../../lib/words/fields'
@@ -10,13 +10,15 @@ import { Sentence, Symbols } from './symbol'
 
 interface Props {
   readonly desk: Desk
+  /** The same, but for the middle of a gesture: what it was before. Links need not follow every turn of a slider. */
+  readonly still: Desk
   readonly sets: readonly ShelvedSet[]
   /** Until then a plain form, which asks for the page that its fields spell. */
   readonly live: boolean
 }
 
 /** The parameters of the scenario in focus; the others travel along unseen. */
-export function Ingredients({ desk, sets, live }: Props) {
+export const Ingredients = memo(function Ingredients({ desk, still, sets, live }: Props) {
   const { form, scenarios, place, placeFields } = desk
   const editing = useEditing(desk)
   return (
@@ -24,8 +26,8 @@ export function Ingredients({ desk, sets, live }: Props) {
       <h2 id="ingredients" className="heading">
         Ingredients
       </h2>
-      <Tabs desk={desk} />
-      <Published desk={desk} sets={sets} />
+      <Tabs desk={still} />
+      <Published desk={still} sets={sets} />
       <form
         action="/compose"
         method="get"
@@ -44,7 +46,7 @@ export function Ingredients({ desk, sets, live }: Props) {
         ))}
         {form.groups.map((group) => (
           <Group key={group.key} group={group} editing={editing} live={live}>
-            {group.key === 'rate' && <Retune desk={desk} sets={sets} />}
+            {group.key === 'rate' && <Retune desk={still} sets={sets} />}
           </Group>
         ))}
         <button type="submit" className={live ? 'absent' : undefined}>
@@ -53,9 +55,9 @@ export function Ingredients({ desk, sets, live }: Props) {
       </form>
     </section>
   )
-}
+})
 
-function Tabs({ desk }: { readonly desk: Desk }) {
+const Tabs = memo(function Tabs({ desk }: { readonly desk: Desk }) {
   const { scenarios, place, links } = desk
   const reset = `/compose/preset?${links.here.replace(/^\/\?/, '')}&set=defaults`
   const acts = { Add: links.add, Copy: links.copy, Remove: links.remove, Reset: reset }
@@ -84,7 +86,7 @@ function Tabs({ desk }: { readonly desk: Desk }) {
       </span>
     </nav>
   )
-}
+})
 
 interface GroupProps {
   readonly group: FieldGroup
@@ -96,7 +98,10 @@ interface GroupProps {
 
 function Group({ group, editing, live, children }: GroupProps) {
   const { key, title, folded, fields, family } = group
-  const rows = fields.map((field) => <FieldRow key={field.name} field={field} editing={editing} live={live} />)
+  const { drafts, hand } = editing
+  const rows = fields.map((field) => (
+    <FieldRow key={field.name} field={field} draft={drafts.get(field.name)} hand={hand} live={live} />
+  ))
   if (folded) {
     return (
       <details className="group" id={key}>

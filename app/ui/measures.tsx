@@ -19,8 +19,8 @@ export const Measures = memo(function Measures({ view }: { readonly view: Explor
           </tr>
         </thead>
         <tbody>
-          {view.measures.map((measure) => (
-            <Row key={measure.key} measure={measure} />
+          {view.measures.map(({ key, ...words }) => (
+            <Row key={key} of={key} {...words} />
           ))}
         </tbody>
       </table>
@@ -28,11 +28,12 @@ export const Measures = memo(function Measures({ view }: { readonly view: Explor
   )
 })
 
-function Row({ measure }: { readonly measure: MeasureWords }) {
-  const { key, label, symbol, value, unit, because } = measure
-  const entry = `measure-${key}`
+type RowProps = Omit<MeasureWords, 'key'> & { readonly of: MeasureWords['key'] }
+
+const Row = memo(function Row({ of, label, symbol, value, unit, because }: RowProps) {
+  const entry = `measure-${of}`
   return (
-    <tr data-measure={key}>
+    <tr data-measure={of}>
       <td className="symbol" data-means={entry}>
         <Symbols markup={symbol} />
       </td>
@@ -49,7 +50,7 @@ function Row({ measure }: { readonly measure: MeasureWords }) {
       </td>
     </tr>
   )
-}
+})
 
 function Value({ value, unit }: { readonly value: string; readonly unit: string }) {
   return (

@@ -1,5 +1,6 @@
 import { memo } from 'react'
 import type { Explorer } from '../../lib/answers/explorer'
+import type { MomentWords } from '../../lib/words/moments'
 import { Means } from './means'
 import { Sentence } from './symbol'
 
@@ -19,18 +20,8 @@ export const Moments = memo(function Moments({ view }: { readonly view: Explorer
           </tr>
         </thead>
         <tbody>
-          {view.moments.map(({ kind, label, when, where }) => (
-            <tr key={`${kind}${when}${label}`} className={kind === 'now' ? 'present' : undefined}>
-              <td className="when" data-means={`moment-${kind}`}>
-                {when}
-              </td>
-              <th scope="row">
-                <Means of={`moment-${kind}`}>{label}</Means>
-              </th>
-              <td className="where" data-means={`moment-${kind}`}>
-                {where}
-              </td>
-            </tr>
+          {view.moments.map((moment, i) => (
+            <Row key={keyOf(view.moments, i)} {...moment} />
           ))}
         </tbody>
       </table>
@@ -38,5 +29,28 @@ export const Moments = memo(function Moments({ view }: { readonly view: Explorer
         <Sentence text={scenario?.because ?? ''} />
       </p>
     </section>
+  )
+})
+
+/** The same for the same moment while its time changes. */
+function keyOf(moments: readonly MomentWords[], index: number): string {
+  const kind = moments[index]?.kind
+  return `${kind}${moments.slice(0, index).filter((one) => one.kind === kind).length}`
+}
+
+const Row = memo(function Row({ kind, label, when, where }: MomentWords) {
+  const entry = `moment-${kind}`
+  return (
+    <tr className={kind === 'now' ? 'present' : undefined}>
+      <td className="when" data-means={entry}>
+        {when}
+      </td>
+      <th scope="row">
+        <Means of={entry}>{label}</Means>
+      </th>
+      <td className="where" data-means={entry}>
+        {where}
+      </td>
+    </tr>
   )
 })

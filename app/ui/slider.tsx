@@ -1,8 +1,8 @@
-import { type KeyboardEvent, useRef } from 'react'
+import { type KeyboardEvent, useLayoutEffect, useRef } from 'react'
 import type { Field } from '../../lib/words/fields'
 import { settle } from '../live/address'
 import { wake } from '../live/here'
-import type { Editing } from '../live/use-editing'
+import type { Hand } from '../live/use-editing'
 
 /** Steps of a key that still belong to one change, in milliseconds. */
 const PAUSE = 1000
@@ -13,7 +13,7 @@ const ARROWS: Readonly<Record<string, number>> = { ArrowRight: 1, ArrowUp: 1, Ar
 
 interface Props {
   readonly field: Extract<Field, { kind: 'number' }>
-  readonly drag: Editing['drag']
+  readonly drag: Hand['drag']
 }
 
 /** Arrow keys go in steps that can be seen, with Shift in the smallest ones. */
@@ -29,9 +29,10 @@ export function Slider({ field, drag }: Props) {
     const size = event.shiftKey ? step : stride(slider)
     move(Math.max(min, Math.min(max, Number(value) + way * size)))
   }
-  const part = Math.max(0, Math.min(1, (Number(value) - min) / (max - min)))
+  const ref = useFilled((Number(value) - min) / (max - min))
   return (
     <input
+      ref={ref}
       type="range"
       className="slider"
       aria-label={label}
@@ -40,11 +41,14 @@ export function Slider({ field, drag }: Props) {
       max={max}
       step={step}
       value={value}
-      style={{ '--part': `${100 * part}%` } as Record<string, string>}
       onChange={({ target }) => move(Number(target.value))}
       onPointerEnter={wake}
       onFocus={wake}
-      onPointerDown={() => gesture.begin(true)}
+      onPointerDown={() => {
+        // A finger may come without having been near.
+        wake()
+        gesture.begin(true)
+      }}
       onKeyDown={press}
       onPointerUp={gesture.end}
       onPointerCancel={gesture.end}
@@ -52,6 +56,15 @@ export function Slider({ field, drag }: Props) {
       onBlur={gesture.end}
     />
   )
+}
+
+/** How much of its line is coloured: told to the style here, since the policy of the page lets no style come with its text. */
+function useFilled(part: number) {
+  const ref = useRef<HTMLInputElement>(null)
+  useLayoutEffect(() => {
+    ref.current?.style.setProperty('--part', `${100 * Math.max(0, Math.min(1, part))}%`)
+  }, [part])
+  return ref
 }
 
 let gestures = 0

@@ -6,18 +6,23 @@ import { readQuery } from '../scenario/query'
 import type { Reading } from '../scenario/scenario'
 import { linkQuery } from '../scenario/write'
 import { PLACE_KEYS, placeKeys, readPlace } from '../words/place'
-import { type Asked, type Explorer, explorer } from './explorer'
+import { type Asked, type Brief, brief, explorer } from './explorer'
 import { readKeys, SCENARIO } from './keys'
 import type { Pairs, Question } from './question'
 
 /** The live page asks for the drawings that it shows. */
 const FRAME = 'frame'
+/** And in the middle of a gesture for the long view alone, where the other one is out of sight. */
+const PARTS = 'parts'
+const LONG = 'long'
 
-export function askExplorer(pairs: Pairs): Reading<Question<Explorer>> {
-  const { codes, values, faults } = readKeys(pairs, [...PLACE_KEYS, FRAME])
+export function askExplorer(pairs: Pairs): Reading<Question<Brief>> {
+  const { codes, values, faults } = readKeys(pairs, [...PLACE_KEYS, FRAME, PARTS])
   if (faults.length > 0) return { ok: false, problems: problemsOf(faults, null) }
   const asked = { codes, keys: values, frame: values.get(FRAME) }
-  return { ok: true, value: { canonical: canonicalOf(asked), answer: () => ({ ok: true, value: explorer(asked) }) } }
+  const isBrief = values.get(PARTS) === LONG
+  const canonical = isBrief ? `${canonicalOf(asked)}&${PARTS}=${LONG}` : canonicalOf(asked)
+  return { ok: true, value: { canonical, answer: () => ({ ok: true, value: (isBrief ? brief : explorer)(asked) }) } }
 }
 
 /** No scenario at all stays apart from the scenarios of the demo: it has a title. */

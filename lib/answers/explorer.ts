@@ -15,7 +15,7 @@ import { type Verdict, verdictOf } from '../words/verdict'
 import { lately } from './lately'
 import { type LongPanel, longPanel } from './long-panel'
 import { type Opened, opened, solutionOf } from './opened'
-import { type Panel, panelOf, settled } from './panel'
+import { type Panel, panelOf, type Subject, settled } from './panel'
 
 export interface Asked {
   /** Every `s`, decoded once. */
@@ -53,7 +53,14 @@ export interface Explorer extends Desk {
   readonly refusal: Refusal | null
 }
 
-export function explorer(asked: Asked): Explorer {
+/** Without the view below the long one, where nobody sees it. */
+export type Brief = Omit<Explorer, 'panel'> & { readonly panel: Panel | null }
+
+export const explorer = (asked: Asked): Explorer => shown(asked, panelOf)
+
+export const brief = (asked: Asked): Brief => shown(asked, () => null)
+
+function shown<P>(asked: Asked, below: (subject: Subject) => P): Omit<Explorer, 'panel'> & { readonly panel: P } {
   const address = opened(asked.codes)
   const solutions = address.solutions.map(named)
   const scenarios = solutions.map(({ scenario }) => scenario)
@@ -74,7 +81,7 @@ export function explorer(asked: Asked): Explorer {
       ...told(solutions[tab.slot] as Solution, tab.slot, scenarios, place),
     })),
     long: longPanel(subject),
-    panel: panelOf(subject),
+    panel: below(subject),
     moments: momentWords(focus),
     measures: measureWords(focus.measures),
     refusal: address.problems.length === 0 ? null : refusalOf(address, desk.links.here),

@@ -3,6 +3,7 @@ import { createServer } from 'node:http'
 import { compress } from './compress.mjs'
 import { setSecurityHeaders } from './headers.mjs'
 import { sendProblem, writeProblem } from './problem.mjs'
+import { rest } from './rest.mjs'
 import { LONGEST_STATE, routerStateProblem } from './router-state.mjs'
 import { LONGEST_TARGET, methodProblem, optionsHeaders, targetProblem } from './target.mjs'
 
@@ -37,7 +38,7 @@ export function createFront(handler, limits = {}) {
       routerStateProblem(request.headers)
     if (problem) sendProblem(response, problem, target.split('?')[0].slice(0, 200))
     else if (request.method === 'OPTIONS') response.writeHead(204, optionsHeaders(target)).end()
-    else compress(request, response, () => answer(handler, request, response))
+    else compress(request, response, () => answer(handler, request, rest(response)))
   })
   server.setTimeout(SILENCE)
   server.on('connect', (_request, socket) => writeProblem(socket, /** @type {any} */ (methodProblem('CONNECT'))))

@@ -27,6 +27,15 @@ describe('/api/explorer', () => {
     expect(question('s=h0:7o').canonical).not.toBe(question('s=h0:7p').canonical)
   })
 
+  it('leaves out the view below where only the long one is asked for', () => {
+    const query = 's=h0:70,as:One&s=h0:71&frame=wide'
+    const [brief, whole] = [question(`${query}&parts=long`), question(query)]
+    expect(brief.canonical).not.toBe(whole.canonical)
+    const answer = whole.answer()
+    expect(brief.answer()).toEqual(answer.ok && { ok: true, value: { ...answer.value, panel: null } })
+    expect(question(`${query}&parts=many`).canonical).toBe(whole.canonical)
+  })
+
   it('refuses unknown and repeated keys', () => {
     expect(ask('s=h0:70&z=1')).toMatchObject({ ok: false, problems: [{ parameter: 'z' }] })
     expect(ask('focus=1&focus=2')).toMatchObject({ ok: false, problems: [{ parameter: 'focus' }] })

@@ -45,6 +45,17 @@ async function page({ awake = false, loads = true } = {}) {
   }
 }
 
+it('leaves what is out of sight as it was', async () => {
+  const { answers } = await page({ awake: true })
+  const whole = { ...viewOf('whole'), panel: { key: 'reach' } } as Explorer
+  answers.want('a', true)
+  answers.computed('a', whole)
+  expect(answers.read().answer.view).toBe(whole)
+  answers.want('b', true)
+  answers.computed('b', { ...viewOf('brief'), panel: null })
+  expect(answers.read().answer.view).toEqual({ title: 'brief', panel: whole.panel })
+})
+
 describe('without a worker', () => {
   it('asks one question at a time in a gesture, then the newest', async () => {
     const { asked, answers, settle, server, shown } = await page()

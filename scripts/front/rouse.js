@@ -1,0 +1,17 @@
+// In the page: has its scripts run at the first sign of a hand, or when nobody has come for a while, so that they are ready.
+{
+  const sources = document.currentScript.dataset.scripts.split(' ')
+  const signs = ['pointermove', 'pointerdown', 'touchstart', 'keydown', 'focusin', 'wheel', 'scroll']
+  const patience = 3000
+  let roused = false
+  const rouse = () => {
+    if (roused) return
+    roused = true
+    for (const sign of signs) removeEventListener(sign, rouse, true)
+    for (const src of sources) document.head.append(Object.assign(document.createElement('script'), { src }))
+  }
+  for (const sign of signs) addEventListener(sign, rouse, { capture: true, passive: true })
+  addEventListener('load', () => setTimeout(rouse, patience))
+  // A page that was kept for use without a network may have to compute what its address says.
+  if (navigator.serviceWorker?.controller) rouse()
+}
