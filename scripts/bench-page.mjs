@@ -3,16 +3,15 @@
  * takes 150 ms longer; once as fast as the machine is, once slowed down four times. From the event of an input to the paint
  * that shows it or a newer one, and the longest task of the page's thread.
  */
-import { spawn } from 'node:child_process'
 import { availableParallelism, loadavg } from 'node:os'
 import { setTimeout as wait } from 'node:timers/promises'
 import { chromium } from '@playwright/test'
 import { record, results } from './bench/drag-record.mjs'
+import { withServer } from './bench/server.mjs'
 import { ensureBuilt } from './setup/build.mjs'
 import { ensureChromium } from './setup/chromium.mjs'
 import { ensureInstalled } from './setup/install.mjs'
-import { probePort } from './setup/port.mjs'
-import { fail, Refusal, ROOT } from './setup/project.mjs'
+import { fail, Refusal } from './setup/project.mjs'
 
 /** Milliseconds, but for the number of moves. */
 const [ROUND_TRIP, MOVES, BETWEEN] = [150, 150, 16]
@@ -22,15 +21,6 @@ const SIZES = [
 ]
 const AIMS = { paint: 50, task: 100 }
 const FLAGS = ['--no-sandbox', '--disable-gpu', '--disable-quic', '--no-first-run', '--disable-background-networking']
-
-/** @param {string} url */
-async function answering(url) {
-  for (let i = 0; i < 400; i++) {
-    if (await fetch(`${url}/healthz`).catch(() => false)) return
-    await wait(50)
-  }
-  throw new Refusal('The server did not start.')
-}
 
 /**
  * @param {import('@playwright/test').Browser} browser
@@ -81,30 +71,31 @@ async function drag(page, moves) {
 /** @param {number} value @param {number} aim */
 const judged = (value, aim) => `${value.toFixed(0).padStart(4)} ms (aim ${aim}${value > aim ? ', missed' : ''})`
 
+/** @param {import('@playwright/test').Browser} browser @param {string} url */
+async function measureAll(browser, url) {
+  console.log(`Three scenarios, ${MOVES} moves of a slider, ${ROUND_TRIP} ms of added round trip.`)
+  // Times by the clock: other programs are in them.
+  console.log(`Load of the machine: ${loadavg()[0].toFixed(1)} on ${availableParallelism()} processors.`)
+  for (const size of SIZES) {
+    for (const slowdown of [1, 4]) {
+      const { count, half, most, longest } = await measure(browser, url, size, slowdown)
+      const paint = slowdown === 1 ? judged(most, AIMS.paint) : `${most.toFixed(0)} ms`
+      const task = slowdown === 4 ? judged(longest, AIMS.task) : `${longest.toFixed(0)} ms`
+      console.log(`${size.width} px, slowed down ${slowdown} times: ${count} inputs`)
+      console.log(`  input to paint p50 ${half.toFixed(0)} ms, p95 ${paint}; longest task ${task}`)
+    }
+  }
+}
+
 try {
   ensureInstalled()
   const executablePath = ensureChromium()
   ensureBuilt()
-  const port = await probePort(0)
-  const server = spawn(process.execPath, ['scripts/start.mjs', '-p', String(port)], { cwd: ROOT, stdio: 'ignore' })
   const browser = await chromium.launch({ executablePath, args: FLAGS })
   try {
-    await answering(`http://localhost:${port}`)
-    console.log(`Three scenarios, ${MOVES} moves of a slider, ${ROUND_TRIP} ms of added round trip.`)
-    // Times by the clock: other programs are in them.
-    console.log(`Load of the machine: ${loadavg()[0].toFixed(1)} on ${availableParallelism()} processors.`)
-    for (const size of SIZES) {
-      for (const slowdown of [1, 4]) {
-        const { count, half, most, longest } = await measure(browser, `http://localhost:${port}`, size, slowdown)
-        const paint = slowdown === 1 ? judged(most, AIMS.paint) : `${most.toFixed(0)} ms`
-        const task = slowdown === 4 ? judged(longest, AIMS.task) : `${longest.toFixed(0)} ms`
-        console.log(`${size.width} px, slowed down ${slowdown} times: ${count} inputs`)
-        console.log(`  input to paint p50 ${half.toFixed(0)} ms, p95 ${paint}; longest task ${task}`)
-      }
-    }
+    await withServer(({ url }) => measureAll(browser, url))
   } finally {
     await browser.close()
-    server.kill('SIGTERM')
   }
 } catch (error) {
   fail(error)

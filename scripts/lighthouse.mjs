@@ -2,29 +2,19 @@
  * `npm run lighthouse`: the explorer as Lighthouse judges it, on a slow phone with a slow line. Exits with 1 below the aims.
  * Of a few runs the best counts, since whatever else the machine does only makes a page slower.
  */
-import { spawn } from 'node:child_process'
-import { setTimeout as wait } from 'node:timers/promises'
 import { chromium } from '@playwright/test'
 import lighthouse from 'lighthouse'
+import { withServer } from './bench/server.mjs'
 import { ensureBuilt } from './setup/build.mjs'
 import { ensureChromium } from './setup/chromium.mjs'
 import { ensureInstalled } from './setup/install.mjs'
 import { probePort } from './setup/port.mjs'
-import { fail, Refusal, ROOT } from './setup/project.mjs'
+import { fail, Refusal } from './setup/project.mjs'
 
 /** @type {Readonly<Record<string, number>>} */
 const AIMS = { performance: 0.95, accessibility: 1, 'best-practices': 1, seo: 1 }
 const RUNS = 3
 const FLAGS = ['--no-sandbox', '--disable-gpu', '--disable-quic', '--no-first-run', '--disable-background-networking']
-
-/** @param {string} url */
-async function answering(url) {
-  for (let i = 0; i < 400; i++) {
-    if (await fetch(`${url}/healthz`).catch(() => false)) return
-    await wait(50)
-  }
-  throw new Refusal('The server did not start.')
-}
 
 /** @param {string} url @param {number} port of the browser */
 async function judge(url, port) {
@@ -40,30 +30,31 @@ async function judge(url, port) {
   return { scores: Object.fromEntries(scores), lost }
 }
 
+/** @param {string} url @param {number} debugging port of the browser */
+async function judgeAll(url, debugging) {
+  /** @type {Record<string, number>} */
+  const best = {}
+  for (let i = 0; i < RUNS; i++) {
+    const { scores, lost } = await judge(url, debugging)
+    for (const key of Object.keys(AIMS)) best[key] = Math.max(best[key] ?? 0, scores[key])
+    const told = Object.entries(scores).map(([key, score]) => `${key} ${score.toFixed(2)}`)
+    console.log(`${told.join(', ')}${lost.length > 0 ? `; below 0.9: ${lost.join(', ')}` : ''}`)
+  }
+  const below = Object.keys(AIMS).filter((key) => (best[key] ?? 0) < (AIMS[key] ?? 0))
+  console.log(below.length === 0 ? 'Every aim is met.' : `Below the aim: ${below.join(', ')}.`)
+  process.exitCode = below.length === 0 ? 0 : 1
+}
+
 try {
   ensureInstalled()
   const executablePath = ensureChromium()
   ensureBuilt()
-  const [port, debugging] = [await probePort(0), await probePort(0)]
-  const server = spawn(process.execPath, ['scripts/start.mjs', '-p', String(port)], { cwd: ROOT, stdio: 'ignore' })
+  const debugging = await probePort(0)
   const browser = await chromium.launch({ executablePath, args: [...FLAGS, `--remote-debugging-port=${debugging}`] })
   try {
-    const url = `http://localhost:${port}/`
-    await answering(`http://localhost:${port}`)
-    /** @type {Record<string, number>} */
-    const best = {}
-    for (let i = 0; i < RUNS; i++) {
-      const { scores, lost } = await judge(url, debugging)
-      for (const key of Object.keys(AIMS)) best[key] = Math.max(best[key] ?? 0, scores[key])
-      const told = Object.entries(scores).map(([key, score]) => `${key} ${score.toFixed(2)}`)
-      console.log(`${told.join(', ')}${lost.length > 0 ? `; below 0.9: ${lost.join(', ')}` : ''}`)
-    }
-    const below = Object.keys(AIMS).filter((key) => (best[key] ?? 0) < (AIMS[key] ?? 0))
-    console.log(below.length === 0 ? 'Every aim is met.' : `Below the aim: ${below.join(', ')}.`)
-    process.exitCode = below.length === 0 ? 0 : 1
+    await withServer(({ url }) => judgeAll(`${url}/`, debugging))
   } finally {
     await browser.close()
-    server.kill('SIGTERM')
   }
 } catch (error) {
   fail(error)

@@ -3,13 +3,11 @@
  * nothing. Both are measured in turns, so that a slower or busier machine changes the ratio little. Where the system tells it,
  * the server's processor time per request stands beside: other processes do not count in it.
  */
-import { spawn } from 'node:child_process'
 import { readFileSync } from 'node:fs'
-import { setTimeout as wait } from 'node:timers/promises'
 import autocannon from 'autocannon'
-import { probePort } from '../setup/port.mjs'
-import { Refusal, ROOT } from '../setup/project.mjs'
+import { Refusal } from '../setup/project.mjs'
 import { median } from './clock.mjs'
+import { withServer } from './server.mjs'
 
 const CONNECTIONS = 16
 const SECONDS = 2
@@ -24,19 +22,9 @@ const unseen = () => `/api/history?s=matter:${(0.3 + ++asked * 1e-8).toFixed(8)}
 const health = () => '/healthz'
 
 /** @typedef {{readonly rate: number, readonly processor: number}} Turn rate in requests per second, processor in seconds per request */
-/** @typedef {{readonly url: string, readonly pid: number}} Server */
+/** @typedef {import('./server.mjs').Server} Server */
 
-export async function benchRequests() {
-  const port = await probePort(0)
-  const url = `http://localhost:${port}`
-  const server = spawn(process.execPath, ['scripts/start.mjs', '-p', String(port)], { cwd: ROOT, stdio: 'ignore' })
-  try {
-    await answering(url)
-    await compare({ url, pid: server.pid ?? 0 })
-  } finally {
-    server.kill('SIGTERM')
-  }
-}
+export const benchRequests = () => withServer(compare)
 
 /** @param {Server} server */
 async function compare(server) {
@@ -107,13 +95,4 @@ function processorSeconds(pid) {
   } catch {
     return Number.NaN
   }
-}
-
-/** @param {string} url */
-async function answering(url) {
-  for (let i = 0; i < 400; i++) {
-    if (await fetch(`${url}/healthz`).catch(() => false)) return
-    await wait(50)
-  }
-  throw new Refusal('The server did not start.')
 }
