@@ -38,8 +38,6 @@ const STYLES: readonly (readonly [classes: string, style: Style])[] = [
   ['note', { fill: 'hue', halo: 'ground' }],
   ['reference', { stroke: 'edge', 'stroke-dasharray': '2 3' }],
   ['spot', { fill: 'hue', stroke: 'ground', 'stroke-width': 1.5 }],
-  ['reference', { stroke: 'edge', 'stroke-dasharray': '2 3' }],
-  ['spot', { fill: 'hue', stroke: 'ground', 'stroke-width': 1.5 }],
   ['heading', { fill: 'ink', 'font-weight': 600 }],
   ['foot', { fill: 'soft' }],
 ]
