@@ -17,6 +17,10 @@ const PER_SWING = 5
 const LOWEST = 15
 /** In ln(height), beyond what rounding adds to the energy. */
 const WITHIN = 1e-4
+/** How well today's Ω_DE is met, relative to it, and how well at least where no double does better. */
+const [MET, NEARLY_MET] = [1e-11, 1e-8]
+/** First step in ln(height) by which a bracket is sought anew. */
+const FIRST_STEP = 1e-11
 /** Heights at which the field swings more often before today are not tried. */
 const MOST_SWINGS = 12
 /**
@@ -139,7 +143,49 @@ function polished(search: Search, [one, other]: readonly [Shot, Shot]): number {
     if (f === null || Math.abs(f) >= Math.abs(f1)) break
     ;[y0, f0, y1, f1] = [y1, f1, y, f]
   }
-  return y1
+  return Math.abs(f1) <= MET ? y1 : steepRoot(search, y1, f1)
+}
+
+/**
+ * Next to a height with which the universe turns round early it nearly rests, the longer the nearer: Ω_DE goes like the logarithm of
+ * how near, and coarse accuracy puts it elsewhere. The root in a bracket that is sought anew at full accuracy.
+ */
+function steepRoot(search: Search, from: number, excess: number): number {
+  const at = (y: number): Shot => shoot(search, y, FINAL)
+  let [low, high] = steepBracket(at, { y: from, excess, swings: 0 })
+  let side = 0
+  for (;;) {
+    const best = Math.abs(excessOf(low)) < Math.abs(excessOf(high)) ? low : high
+    if (Math.abs(excessOf(best)) <= MET) return best.y
+    const y = side === 0 ? (low.y + high.y) / 2 : secant(low, high)
+    if (!(low.y < y && y < high.y)) {
+      if (Math.abs(excessOf(best)) > NEARLY_MET) throw tooNear()
+      return best.y
+    }
+    const middle = at(y)
+    const above = excessOf(middle) > 0
+    // A step that leaves the same end twice is followed by a halving.
+    side = Number.isFinite(excessOf(low)) && side !== (above ? 1 : -1) ? (above ? 1 : -1) : 0
+    if (above) high = middle
+    else low = middle
+  }
+}
+
+const secant = (low: Shot, high: Shot): number => {
+  const [below, above] = [excessOf(low), excessOf(high)]
+  return low.y - (below * (high.y - low.y)) / (above - below)
+}
+
+/** By steps that double: too little Ω_DE, or a universe that does not arrive, and too much. */
+function steepBracket(at: (y: number) => Shot, start: Shot): [Shot, Shot] {
+  const direction = excessOf(start) > 0 ? -1 : 1
+  let before = start
+  for (let step = FIRST_STEP; step < WIDEST; step *= 2) {
+    const next = at(before.y + direction * step)
+    if (excessOf(next) > 0 !== excessOf(before) > 0) return direction < 0 ? [next, before] : [before, next]
+    before = next
+  }
+  throw tooNear()
 }
 
 function narrowed(search: Search, one: Shot, other: Shot): readonly [Shot, Shot] {
