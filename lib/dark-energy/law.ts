@@ -87,8 +87,10 @@ export interface Law {
   readonly future: Asymptote
   /** Values of N where a derivative of the law jumps; empty for an analytic law. */
   readonly breaks: readonly number[]
-  /** By how much the law's own error can move E², relative to it and in units of eps; absent where that is rounding. */
+  /** Where the law is the result of steps: what they leave in E² at least, relative to it and in units of eps, so that no panel resolves more. */
   readonly noise?: (N: number) => number
+  /** The error of such a law, relative to f and in units of eps; absent where that is rounding. */
+  readonly stray?: (N: number) => number
 }
 
 /** A family of laws: one file, one line in the list (index.ts). Form, URL keys, method page and tests follow from it. */

@@ -6,8 +6,9 @@ import type { Model } from '../model'
 import { beyondPanels, type Stopped } from './beyond'
 import { type Panel, panelsOf } from './panels'
 import { stretchesOf } from './stretches'
-import { type Clock, type Tail, tailAt } from './tail'
+import { type Clock, explodes, type Tail, tailAt } from './tail'
 import { type Direction, FARTHEST, type Search, searchTurning } from './turning'
+import type { Zone } from './zone'
 
 /** Sums at the inner edge of each panel, from today, and at its outer edge, to the end. */
 interface Sums {
@@ -85,6 +86,8 @@ function march(model: Model, direction: Direction, end: Search): March {
   let [time, conformal] = [0, 0]
   let stopped: Stopped | null = null
   let tail: Tail | null = null
+  // Ages near a beginning whose density outgrows every power add nothing to the whole, but they are asked for themselves.
+  const bursts = direction < 0 && explodes(model, direction)
   for (const { zone, kind } of stretchesOf(model, direction, end)) {
     const enough = (panel: Panel, edge: number): boolean => {
       time += panel.time.total
@@ -93,8 +96,9 @@ function march(model: Model, direction: Direction, end: Search): March {
       const gone = adds < NEGLIGIBLE
       if (end.kind !== 'root' && (time > FOR_EVER || conformal > LARGEST)) stopped = 'for ever'
       else if (kind === 'edge') return gone && zone.distanceAt(edge + 1) === zone.distanceAt(zone.to)
-      else if (kind === 'final' && gone) stopped = 'spent'
-      else if (kind === 'last' && gone && (adds < NOTHING || lasts(model, direction, edge))) stopped = 'spent'
+      else if (kind === 'final' && gone && atEdge(zone, edge)) stopped = 'spent'
+      else if (kind === 'last' && gone && (adds < NOTHING || (!bursts && lasts(model, direction, edge))))
+        stopped = 'spent'
       else if (zone.to === FARTHEST) tail = tailAt(model, direction, direction * edge)
       if (tail !== null) stopped = 'tail'
       return stopped !== null
@@ -104,6 +108,12 @@ function march(model: Model, direction: Direction, end: Search): March {
   }
   return { panels, stopped: lastEdge(panels) === FARTHEST ? 'far' : 'end', tail }
 }
+
+/** In the variable of an edge: this much farther than where ln a no longer tells it from the edge. */
+const BEHIND = 25
+
+/** Is this so near to an edge that whatever is left beyond adds nothing to what is left at any double ln a? */
+const atEdge = (zone: Zone, s: number): boolean => zone.distanceAt(s - BEHIND) === zone.distanceAt(zone.to)
 
 /** Is E² here made of what never thins out again farther on? Then what adds nothing now adds nothing later. */
 function lasts(model: Model, direction: Direction, edge: number): boolean {

@@ -84,7 +84,8 @@ function noiseIn(before: number, now: number): number {
 /** A panel that is tried. `worst` is the size of the last two coefficients over what is asked; its series wait in the scratch. */
 interface Trial {
   readonly worst: number
-  readonly rounding: number
+  /** Relative, of what is integrated. */
+  readonly error: number
 }
 
 function attempt(zone: Zone, from: number, to: number): Trial {
@@ -98,30 +99,33 @@ function attempt(zone: Zone, from: number, to: number): Trial {
     zone.conditioning(to - half * 0.01),
   )
   const rounding = Number.EPSILON * (2 + conditioning)
+  const error = zone.stray
+    ? rounding + Number.EPSILON * Math.max(zone.stray(from), zone.stray(centre), zone.stray(to))
+    : rounding
   // Where E² is small beside its terms, rounding shows in the last coefficients and no narrower panel would lower it.
-  return { worst: Math.max(tailOf('time'), tailOf('conformal')) / Math.max(RESOLVED, rounding), rounding }
+  return { worst: Math.max(tailOf('time'), tailOf('conformal')) / Math.max(RESOLVED, rounding), error }
 }
 
 const tailOf = (clock: Clock): number =>
   Math.max(samples[clock][0], samples[clock][NODE_COUNT - 1]) < SMALLEST ? 0 : relativeTail(coefficients[clock])
 
 /** The panel that was tried last. */
-function panelFrom(zone: Zone, from: number, to: number, { rounding }: Trial): Panel {
+function panelFrom(zone: Zone, from: number, to: number, { error }: Trial): Panel {
   const half = (to - from) / 2
   return {
     zone,
     from,
     to,
-    time: stretchOf(coefficients.time, half, rounding),
-    conformal: stretchOf(coefficients.conformal, half, rounding),
+    time: stretchOf(coefficients.time, half, error),
+    conformal: stretchOf(coefficients.conformal, half, error),
   }
 }
 
-function stretchOf(series: Float64Array, half: number, rounding: number): Stretch {
+function stretchOf(series: Float64Array, half: number, relative: number): Stretch {
   const left = Math.abs(series[NODE_COUNT - 1]) + Math.abs(series[NODE_COUNT - 2])
   const integral = antiderivative(series, half)
   const total = sumAtOne(integral)
-  return { series: integral, total, error: left * half + rounding * Math.abs(total) }
+  return { series: integral, total, error: left * half + relative * Math.abs(total) }
 }
 
 /** The integral from the panel's inner edge to s. */

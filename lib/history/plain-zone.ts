@@ -21,6 +21,7 @@ export function plainZone(model: Model, direction: Direction, from: number, to: 
       const sum = model.signed ? conditioningOf(model.magnitude(N), expansionAt(model, N, Math.exp(-N))) : 2
       return sum + darkNoise(model, N) + (model.law.noise?.(N) ?? 0)
     },
+    stray: (s) => strayOf(model, direction * s),
     sampleInto(out, centre, half) {
       nodesInto(direction, centre, half)
       model.expansionsInto(squares, places, inverseScales, 0, NODE_COUNT)
@@ -55,6 +56,14 @@ function nodesInto(direction: Direction, centre: number, half: number): void {
     inverseScales[k] = central * factor
     inverseScales[mirrored] = central / factor
   }
+}
+
+/** What the error of the law itself does to E², relative to it in units of eps: its share may be far above 1 where E² is small. */
+function strayOf(model: Model, N: number): number {
+  const { budget, law } = model
+  if (!law.stray || budget.dark === 0) return 0
+  const share = Math.abs(budget.dark * law.density(N)) / expansionAt(model, N, Math.exp(-N))
+  return law.stray(N) * (share >= 0 && share < 1e16 ? share : 1)
 }
 
 /** What rounding N and ln f does to f where exponents or densities are extreme, relative to E² in units of eps. */

@@ -26,6 +26,8 @@ export interface Zone {
   expansion(s: number): number
   /** Rounding error of E² at s relative to E², in units of eps. */
   conditioning(s: number): number
+  /** What the error of a law of steps adds to that; absent where there is none. */
+  stray?(s: number): number
   /** dt/ds and dη/ds at the sixteen nodes of the panel centre ± half. */
   sampleInto(out: Samples, centre: number, half: number): void
 }
@@ -80,6 +82,22 @@ export function narrowZone(model: Model, direction: Direction, narrow: Narrow, f
 }
 
 /**
+ * What the error δ of a law of steps does next to a turning point, relative to E² and in units of eps. E² = B + Ω f vanishes where
+ * B = −Ω f, so that δ moves that place by x = δ Ω f/(dE²/dN), and E² at a distance from it by d (δ (Ω f)′ + x (E²)″) to first order in
+ * d: by δ ((Ω f)′ + Ω f (E²)″/(E²)′)/(E²)′ of itself. The distance to today changes by x too, and with it, at most, 1/E by as much.
+ */
+function shakenBy(model: Model, N: number): number {
+  const { law, budget } = model
+  if (!law.stray) return 0
+  const { first, second } = model.derivatives(N)
+  const f = new Float64Array(3)
+  law.derivativesInto(f, N)
+  const [density, slope] = [Math.abs(budget.dark * f[0]), Math.abs(budget.dark * f[1])]
+  const shift = density / Math.abs(first)
+  return law.stray(N) * (shift + (slope + shift * Math.abs(second)) / Math.abs(first))
+}
+
+/**
  * s = −√(m_t − m): up to a turning point at N, where E² goes to zero linearly and dN/E like d√(m_t − m). With its slope there given,
  * next to a double root, from what E² bends.
  */
@@ -99,6 +117,7 @@ export function turningZone(
     return slope === undefined ? model.expansionFrom(anchor, d) : expansionAbout(model, anchor, slope, d)
   }
   const size = slope === undefined ? null : model.magnitude(N)
+  const shaken = shakenBy(model, N)
   const farthest = Math.abs(N)
   return {
     from: -Math.sqrt(farthest - from),
@@ -112,6 +131,7 @@ export function turningZone(
       size === null
         ? conditioningOf(4 * model.magnitudeFrom(anchor, offset(s)), expansion(s))
         : 2 + (size * offset(s) ** 2) / expansion(s),
+    stray: () => shaken,
     sampleInto(out, centre, half) {
       for (let k = 0; k < NODE_COUNT; k++) {
         const s = centre + half * NODES[k]

@@ -14,8 +14,8 @@ import { type Bracket, signChanges } from '../numerics/sign-changes'
 export interface Crossing {
   readonly N: number
   readonly rising: boolean
-  /** Bound of the error of N where two things run so nearly alike that rounding shifts it; absent where it does not. */
-  readonly blur?: number
+  /** Bound of the error of N: the noise of what is compared over its slope. */
+  readonly blur: number
 }
 
 /** How far beyond the last panel, in ln a, to look where what rules there neither accelerates nor decelerates. */
@@ -60,8 +60,25 @@ function changesBetween(comparison: Comparison, model: Model, from: number, to: 
   const before = left === 0 ? value(from - BEFORE) : left
   if (right === 0 || before > 0 === right > 0) return []
   const N = left === 0 ? from : brent(value, from, to)
-  const slope = Math.min(...comparison.slopeRange(model, N, N).map(Math.abs))
-  return [{ N, rising: before < right, blur: Math.min(1, comparison.rounding(model, N) / slope) }]
+  const slope = (at: number) => {
+    const [least, most] = comparison.slopeRange(model, at, at)
+    return (least + most) / 2
+  }
+  return [{ N, rising: before < right, blur: blurOf(comparison.rounding(model, N), slope, N) }]
+}
+
+/** Step in ln a for the bend of a function. */
+const BEND = 1e-3
+
+/**
+ * How far a function whose values err by e may shift its root, where it goes like s d + c d²/2: by 2e/(s + √(s² − 2ce)) at most; and
+ * where that is no number, next to a double root, by (s + √(s² + 2ce))/c.
+ */
+function blurOf(e: number, slope: (N: number) => number, N: number): number {
+  const s = Math.abs(slope(N))
+  const c = Math.abs(slope(N + BEND) - slope(N - BEND)) / (2 * BEND)
+  const blur = s * s > 2 * c * e ? (2 * e) / (s + Math.sqrt(s * s - 2 * c * e)) : (s + Math.sqrt(s * s + 2 * c * e)) / c
+  return Math.min(1, blur)
 }
 
 /** Changes of the sign of ä, in order of a: every one that the panels can tell, and looks at the tails where they do not decide. */
@@ -71,7 +88,9 @@ export function accelerationChanges({ past, future }: History): readonly Crossin
   // At today's break of a law that is held the two may differ.
   const turns = today !== acceleration(future.model, 0) > 0
   const now = turns
-    ? /* v8 ignore next -- w is the same on both sides, so only rounding can part them */ [{ N: 0, rising: !today }]
+    ? /* v8 ignore next -- w is the same on both sides, so only rounding can part them */ [
+        { N: 0, rising: !today, blur: 0 },
+      ]
     : []
   return [...back.reverse(), ...now, ...ahead]
 }
@@ -99,7 +118,26 @@ function add(found: Crossing[], { model, direction }: Arm, inner: number, outer:
   if (!Number.isFinite(near) || !Number.isFinite(far) || near > 0 === far > 0) return
   const N = brent((x) => acceleration(model, x), inner, outer)
   const rising = direction > 0 ? far > near : near > far
-  found.push({ N, rising })
+  const slope = (at: number) => {
+    const { first, second } = model.derivatives(at)
+    return first + second / 2
+  }
+  found.push({ N, rising, blur: blurOf(accelerationError(model, N), slope, N) })
+}
+
+/** Of the sum of its terms Ω f (1 − n/2). */
+function accelerationError(model: Model, N: number): number {
+  let sum = 0
+  for (const one of model.acting) {
+    const [low, high] = one.exponentRange(N, N)
+    const n = Math.max(Math.abs(low), Math.abs(high))
+    const log = one.logSize(N)
+    // The error of a law that is followed counts six times in its slope.
+    const relative =
+      (1 + n / 2) * (4 + one.rounding(N, log)) + (one.key === 'dark' ? 4 * (model.law.stray?.(N) ?? 0) : 0)
+    if (log > -700) sum += relative * Math.exp(log)
+  }
+  return Number.EPSILON * sum
 }
 
 const [samples, coefficients] = [new Float64Array(NODE_COUNT), new Float64Array(NODE_COUNT)]
@@ -179,7 +217,12 @@ const ratio = (over: readonly Component['key'][], under: readonly Component['key
     const [above, below] = [exponentsOf(model, over, from, to), exponentsOf(model, under, from, to)]
     return [below[0] - above[1], below[1] - above[0]]
   },
-  rounding: (model, N) => Number.EPSILON * (4 + Math.abs(logOf(model, over, N)) + Math.abs(logOf(model, under, N))),
+  rounding: (model, N) =>
+    Number.EPSILON *
+    (4 +
+      Math.abs(logOf(model, over, N)) +
+      Math.abs(logOf(model, under, N)) +
+      (over === DARK ? (model.law.stray?.(N) ?? 0) : 0)),
 })
 
 /** ln of cold matter over photons and all neutrinos; both must be there. */

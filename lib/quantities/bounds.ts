@@ -3,6 +3,7 @@
  * and what the rounding of ln a, or of the place found for a time, moves the value by.
  */
 import { GRAVITATION } from '../constants'
+import type { Law } from '../dark-energy/law'
 import { type Event, type Span, spanSinceNow, spanSinceOrigin, spanUntilEnd } from '../history/event'
 import type { History } from '../history/history'
 import type { Clock } from '../history/tail'
@@ -53,7 +54,7 @@ const nearest = (block: Block): Span =>
 const roundings = shared(
   errors(({ arm, panel, s }, i) => {
     const zone = panel[i] < arm.panels.length ? arm.panels[panel[i]].zone : null
-    return EPS * (FEW + 2 * (zone ? zone.conditioning(s[i]) : 2))
+    return EPS * (FEW + 2 * (zone ? zone.conditioning(s[i]) + (zone.stray?.(s[i]) ?? 0) : 2))
   }),
 )
 
@@ -180,8 +181,13 @@ const darkShare = relative('omegaDark', (block, i) => {
   const { law } = block.arm.model
   const N = block.N[i]
   const exponent = Math.abs(3 * (1 + law.w(N)))
-  return ofDensity(block, i) + exponent * placeErrors(block)[i] + 4 * EPS * Math.abs(law.logDensity(N))
+  return (
+    ofDensity(block, i) + exponent * placeErrors(block)[i] + EPS * (4 * Math.abs(law.logDensity(N)) + noiseOf(law, N))
+  )
 })
+
+/** Of a law that is followed step by step. */
+const noiseOf = (law: Law, N: number): number => law.stray?.(N) ?? 0
 
 const laws = new Float64Array(3)
 const equationErrors = errors((block, i) => {
@@ -190,7 +196,9 @@ const equationErrors = errors((block, i) => {
   const n = -laws[1] / laws[0]
   const slope = Math.abs(n * n - laws[2] / laws[0]) / 3
   const size = 1 + Math.abs(law.w(block.N[i])) + Math.abs(law.w(0))
-  return FEW * EPS * size + (Number.isFinite(slope) ? slope : size) * placeErrors(block)[i]
+  return (
+    EPS * (FEW * size + 4 * noiseOf(law, block.N[i])) + (Number.isFinite(slope) ? slope : size) * placeErrors(block)[i]
+  )
 })
 
 /** Of 1 − aE: near today from differences that are of the order of z. */

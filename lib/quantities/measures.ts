@@ -52,10 +52,11 @@ const withError = (value: number | Missing, error: number): Outcome =>
   typeof value === 'number' ? bounded(value, error) : value
 
 const rounding = ({ history }: Subject): number =>
-  16 * Number.EPSILON * (1 + history.past.model.magnitude(0)) + noise(history)
+  16 * Number.EPSILON * (1 + history.past.model.magnitude(0)) + 4 * noise(history)
 
-/** Relative error of E² today that comes with the law of dark energy. */
-const noise = (history: History): number => Number.EPSILON * (history.past.model.law.noise?.(0) ?? 0)
+/** Error of E² today that comes with the law of dark energy; those of its slopes are up to 6 and 36 times as large. */
+const noise = ({ past: { model } }: History): number =>
+  Number.EPSILON * Math.abs(model.budget.dark) * (model.law.stray?.(0) ?? 0)
 
 const particle = (subject: Subject): Outcome => {
   const { past, before, origin } = subject.history
@@ -72,9 +73,9 @@ const event = (subject: Subject): Outcome => {
 }
 
 /** z of a crossing; its error follows from the noise of the sums and is far below what the page shows. */
-const redshiftOf = ({ history }: Subject, crossing: Crossing | null, because: string): Outcome => {
+const redshiftOf = (crossing: Crossing | null, because: string): Outcome => {
   if (crossing === null) return missing(because)
-  const relative = Math.max(64 * Number.EPSILON + 4 * noise(history), crossing.blur ?? 0)
+  const relative = Math.max(64 * Number.EPSILON, crossing.blur)
   return bounded(Math.expm1(-crossing.N), relative * Math.exp(-crossing.N))
 }
 
@@ -224,7 +225,6 @@ const ALL: readonly MeasureQuantity[] = [
     accuracy: ROOT,
     value: (subject) =>
       redshiftOf(
-        subject,
         nearestToNow(subject.epochs.acceleration.filter((one) => one.rising)),
         'the expansion never changes from deceleration to acceleration',
       ),
@@ -239,13 +239,12 @@ const ALL: readonly MeasureQuantity[] = [
     formula: 'ρ_{cb} = ρ_γ + ρ_ν, ρ_{cb} that of cold matter',
     source: FRIEDMANN,
     accuracy: ROOT,
-    value: (subject) => {
-      const { epochs, budget } = subject
+    value: ({ epochs, budget }) => {
       const none = 'cold matter and radiation are never equal on the expansion that holds today'
       if (!(budget.coldMatter > 0 && budget.photons + budget.masslessNeutrinos + budget.massiveNeutrinos > 0)) {
         return missing('there is no cold matter or no radiation in this scenario')
       }
-      return redshiftOf(subject, nearestToNow(epochs.matterRadiation), none)
+      return redshiftOf(nearestToNow(epochs.matterRadiation), none)
     },
   },
   {
@@ -258,12 +257,11 @@ const ALL: readonly MeasureQuantity[] = [
     formula: 'ρ_{cb} = ρ_{DE}, ρ_{cb} that of cold matter',
     source: FRIEDMANN,
     accuracy: ROOT,
-    value: (subject) => {
-      const { epochs, budget } = subject
+    value: ({ epochs, budget }) => {
       if (!(budget.dark > 0 && budget.coldMatter > 0))
         return missing('there is no cold matter or no positive dark energy')
       const none = 'cold matter and dark energy are never equal on the expansion that holds today'
-      return redshiftOf(subject, nearestToNow(epochs.matterDark), none)
+      return redshiftOf(nearestToNow(epochs.matterDark), none)
     },
   },
   {

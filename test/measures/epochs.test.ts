@@ -103,7 +103,9 @@ describe('acceleration', () => {
     expectNear(list[0].N, Math.log(0.3 / 1.4) / 3, 2e-15)
   })
   test('exactly today: radiation and Λ with Ω_r = Ω_Λ', () => {
-    expect(accelerationChanges(universe('matter:0,radiation:0.5,dark:0.5').history)).toEqual([{ N: 0, rising: true }])
+    expect(accelerationChanges(universe('matter:0,radiation:0.5,dark:0.5').history)).toMatchObject([
+      { N: 0, rising: true },
+    ])
   })
   test('none where everything decelerates, or accelerates', () => {
     expect(accelerationChanges(universe('matter:1,cmb:0').history)).toEqual([])
@@ -131,7 +133,7 @@ describe('acceleration', () => {
 })
 
 test('of several, the last up to now, else the first ahead', () => {
-  const at = (N: number): Crossing => ({ N, rising: true })
+  const at = (N: number): Crossing => ({ N, rising: true, blur: 0 })
   expect(nearestToNow([])).toBe(null)
   expect(nearestToNow([at(-3), at(-1), at(2)])?.N).toBe(-1)
   expect(nearestToNow([at(-3), at(0), at(2)])?.N).toBe(0)

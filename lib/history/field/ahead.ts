@@ -42,10 +42,12 @@ export interface Ahead {
   readonly end: number
 }
 
+export const isAhead = (outlook: Outlook): outlook is Ahead => outlook.kind !== 'shallow' && outlook.kind !== 'spent'
+
 const scratch = new Float64Array(3)
 
-/** From today, with φ and φ̇ in `today`. */
-export function lookAhead(field: Field, today: Float64Array, purse: Purse, deep: boolean): Outlook {
+/** From today, with φ and φ̇ in `today`, by steps that many times `looser`. */
+export function lookAhead(field: Field, today: Float64Array, purse: Purse, deep: boolean, looser = 1): Outlook {
   const steps: Step[] = []
   const last = finalExponent(field)
   let [swings, stop] = [0, null as Outlook['kind'] | null]
@@ -60,9 +62,9 @@ export function lookAhead(field: Field, today: Float64Array, purse: Purse, deep:
     return stop !== null
   }
   const state = today.slice()
-  const course = { from: 0, to: LATE, state, tolerance: TOLERANCE, first: 0.1, after, dense: true, purse }
+  const course = { from: 0, to: LATE, state, tolerance: looser * TOLERANCE, first: 0.1, after, dense: true, purse }
   const early = travel(byScale(field), course)
-  const late = { ...course, from: LATE, to: FARTHEST, tolerance: LATE_TOLERANCE }
+  const late = { ...course, from: LATE, to: FARTHEST, tolerance: looser * LATE_TOLERANCE }
   const arrival = early === 'there' ? travel(byScale(field), late) : early
   if (arrival === 'stuck' || stop === 'shallow') return { kind: 'shallow' }
   if (arrival === 'spent') return { kind: 'spent' }

@@ -19,6 +19,8 @@ const LOWEST = 15
 const WITHIN = 1e-4
 /** How well today's Ω_DE is met, relative to it, and how well at least where no double does better. */
 const [MET, NEARLY_MET] = [1e-11, 1e-8]
+/** Steps in ln(height) below this tell no slope. */
+const SECANT = 1e-7
 /** First step in ln(height) by which a bracket is sought anew. */
 const FIRST_STEP = 1e-11
 /** Heights at which the field swings more often before today are not tried. */
@@ -32,10 +34,26 @@ export const FUTURE_BUDGET = 140_000
 /** Of these, what is kept for the largest Ω_DE, where the one wanted is not found. */
 const RESERVE = 30_000
 
-/** The field of the smallest height, or a problem that says how much Ω_DE can be reached. */
-export function fieldToday(search: Search): Field {
-  if (search.potential.slope(search.potential.start) === 0) return fieldOf(search, 0)
-  return fieldOf(search, polished(search, bracketOf(search)))
+/** ln(height) over the smallest conceivable one, and d ln Ω_DE/d ln(height) there. */
+export interface Height {
+  readonly y: number
+  readonly steepness: number
+}
+
+/** The smallest height, or a problem that says how much Ω_DE can be reached. */
+export function heightToday(search: Search): Height {
+  if (search.potential.slope(search.potential.start) === 0) return { y: 0, steepness: 1 }
+  return polished(search, bracketOf(search))
+}
+
+export const fieldToday = (search: Search): Field => fieldOf(search, heightToday(search).y)
+
+/** The height that the same search comes to with steps of another tolerance. */
+export function heightBeside(search: Search, { y, steepness }: Height, tolerance: number): number {
+  const shot = shoot(search, y, tolerance)
+  const excess = excessOf(shot)
+  if (Math.abs(excess) < NEARLY_MET) return y - excess / steepness
+  return steepRoot(search, shot, tolerance).y
 }
 
 /** Throws the problem where no height will do: a part of the search, for those who need no height. */
@@ -129,12 +147,13 @@ function peakOf(search: Search, from: number, inner: Shot, to: number): Shot {
 }
 
 /** The root in a bracket: false position at coarse accuracy (Dowell & Jarratt 1971), secants at full accuracy. */
-function polished(search: Search, [one, other]: readonly [Shot, Shot]): number {
+function polished(search: Search, [one, other]: readonly [Shot, Shot]): Height {
   const [a, b] = narrowed(search, one, other)
   let [y0, f0] = [a.y, shoot(search, a.y, FINAL).excess]
   let [y1, f1] = [b.y, shoot(search, b.y, FINAL).excess]
   if (f0 === null || f1 === null) throw tooNear()
   if (Math.abs(f0) < Math.abs(f1)) [y0, f0, y1, f1] = [y1, f1, y0, f0]
+  let steepness = (f1 - f0) / (y1 - y0)
   for (let i = 0; i < 12 && f1 !== 0 && f1 !== f0; i++) {
     const step: number = (f1 * (y1 - y0)) / (f1 - f0)
     if (Math.abs(step) <= 1e-16 * Math.max(1, y1)) break
@@ -142,25 +161,27 @@ function polished(search: Search, [one, other]: readonly [Shot, Shot]): number {
     const f: number | null = shoot(search, y, FINAL).excess
     if (f === null || Math.abs(f) >= Math.abs(f1)) break
     ;[y0, f0, y1, f1] = [y1, f1, y, f]
+    if (Math.abs(y1 - y0) > SECANT) steepness = (f1 - f0) / (y1 - y0)
   }
-  return Math.abs(f1) <= MET ? y1 : steepRoot(search, y1, f1)
+  return Math.abs(f1) <= MET ? { y: y1, steepness } : steepRoot(search, { y: y1, excess: f1, swings: 0 }, FINAL)
 }
 
 /**
  * Next to a height with which the universe turns round early it nearly rests, the longer the nearer: Ω_DE goes like the logarithm of
  * how near, and coarse accuracy puts it elsewhere. The root in a bracket that is sought anew at full accuracy.
  */
-function steepRoot(search: Search, from: number, excess: number): number {
-  const at = (y: number): Shot => shoot(search, y, FINAL)
-  let [low, high] = steepBracket(at, { y: from, excess, swings: 0 })
+function steepRoot(search: Search, start: Shot, tolerance: number): Height {
+  const at = (y: number): Shot => shoot(search, y, tolerance)
+  let [low, high] = steepBracket(at, start)
   let side = 0
   for (;;) {
     const best = Math.abs(excessOf(low)) < Math.abs(excessOf(high)) ? low : high
-    if (Math.abs(excessOf(best)) <= MET) return best.y
+    const steepness = (excessOf(high) - excessOf(low)) / (high.y - low.y)
+    if (Math.abs(excessOf(best)) <= MET) return { y: best.y, steepness }
     const y = side === 0 ? (low.y + high.y) / 2 : secant(low, high)
     if (!(low.y < y && y < high.y)) {
       if (Math.abs(excessOf(best)) > NEARLY_MET) throw tooNear()
-      return best.y
+      return { y: best.y, steepness }
     }
     const middle = at(y)
     const above = excessOf(middle) > 0

@@ -8,7 +8,7 @@ import { endOf } from '../ending'
 import { originOf } from '../origin'
 import type { History } from '../whole'
 import type { Ahead } from './ahead'
-import { aheadOf, heldModel, modelAhead, type Now, nowOf, tooLong, wayAhead } from './course'
+import { aheadOf, heldModel, modelAhead, type Now, nowOf, tooLong, voyageBeside, voyageError, wayAhead } from './course'
 import { averagedCrunch, crunchAfter, endAhead, fieldOrigin } from './endings'
 import { BUDGET } from './height'
 import { restOf, timedArm } from './timed-arm'
@@ -68,7 +68,8 @@ function averaged(now: Here, future: Arm, turn: number): Future {
   const unfollowed = {
     time: future.time.total + time.total,
     conformal: future.conformal.total + conformal.total,
-    error: future.conformal.error + conformal.total,
+    // The last swings before the crunch may cut it short.
+    error: future.conformal.error + future.conformal.total + conformal.total,
     because: 'the field swings too fast to be followed through the contraction',
   }
   return { future, home: now.past, descent: future, unfollowed, end: averagedCrunch(future, turn, unfollowed.time) }
@@ -79,18 +80,22 @@ function turning(now: Here, voyage: Voyage): Future {
   const turn = turns[0]
   const last = steps[steps.length - 1].to
   const root = { kind: 'root', N: turn.N, narrows: [], doubt: null } as const
-  const future = timedArm(now, { legs: legsBetween(steps, 0, turn.tau), forward: true, direction: 1 }, root)
+  const looser = voyageBeside(now, voyage)
+  const error = voyageError(voyage, looser, turn.tau)
+  const future = timedArm(now, { legs: legsBetween(steps, 0, turn.tau), forward: true, direction: 1, error }, root)
   const back = turns.length === 1 && end === 'crunch' ? returnAfter(steps, turn.tau) : null
-  if (back === null) return unfollowed(now, voyage, future)
-  const descent = timedArm(now, { legs: legsBetween(steps, turn.tau, back), forward: false, direction: 1 }, root)
-  const inwards = { legs: legsBetween(steps, back, last), forward: true, direction: -1 } as const
+  const whole = voyageError(voyage, looser, last)
+  if (back === null) return unfollowed(now, voyage, future, whole)
+  const way = { legs: legsBetween(steps, turn.tau, back), forward: false, direction: 1, error: whole } as const
+  const descent = timedArm(now, way, root)
+  const inwards = { legs: legsBetween(steps, back, last), forward: true, direction: -1, error: whole } as const
   const home = timedArm(now, inwards, { kind: 'none', farRoot: null, narrows: [], doubt: null })
   return { future, descent, home, end: crunchAfter(future, turn.N, descent.time.total + home.time.total, 1) }
 }
 
 /** Where the contraction is no single way back to a = 0 in doubles, only its length is told. */
-function unfollowed(now: Here, { steps, turns, state }: Voyage, future: Arm): Future {
-  const rest = restOf(legsBetween(steps, turns[0].tau, steps[steps.length - 1].to), state)
+function unfollowed(now: Here, { steps, turns, state }: Voyage, future: Arm, stray: number): Future {
+  const rest = restOf(legsBetween(steps, turns[0].tau, steps[steps.length - 1].to), state, stray)
   const because =
     turns.length > 1
       ? 'the contraction is interrupted by another turning point, and is not followed scale factor by scale factor'

@@ -18,6 +18,8 @@ export interface Told {
   readonly outside: Outside
   /** Where a derivative jumps. */
   readonly breaks: readonly number[]
+  /** Relative error of ρ that the steps leave where none of them grows. */
+  least(N: number): number
   /** Relative error of ρ at N. */
   error(N: number): number
 }
@@ -25,7 +27,7 @@ export interface Told {
 /** n on the way to ρ = 0, and for ρ < 0, where ln ρ counts as −∞. */
 const FALLING: readonly [number, number] = [1000, Number.POSITIVE_INFINITY]
 
-export function fieldLaw(trail: Trail, { today, outside, breaks, error }: Told): Law {
+export function fieldLaw(trail: Trail, { today, outside, breaks, least, error }: Told): Law {
   const { field, edges } = trail
   const [first, last] = [edges[0], edges[edges.length - 1]]
   const at = new Float64Array(2)
@@ -96,8 +98,9 @@ export function fieldLaw(trail: Trail, { today, outside, breaks, error }: Told):
     breaks,
     noise: (N) => {
       const place = Math.min(last, Math.max(first, N))
-      return (error(N) / Number.EPSILON) * Math.min(1, (Math.abs(density(place)) * today) / trail.rate(place) ** 2)
+      return (least(N) / Number.EPSILON) * Math.min(1, (Math.abs(density(place)) * today) / trail.rate(place) ** 2)
     },
+    stray: (N) => error(N) / Number.EPSILON,
   }
 }
 

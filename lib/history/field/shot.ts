@@ -85,7 +85,11 @@ function run(
 }
 
 /** The field's way from rest to today, step by step. */
-export function passage(field: Field, purse: Purse): { readonly steps: readonly Step[]; readonly state: Float64Array } {
+export function passage(
+  field: Field,
+  purse: Purse,
+  tolerance = FINAL,
+): { readonly steps: readonly Step[]; readonly state: Float64Array } {
   const steps: Step[] = []
   const state = Float64Array.of(field.potential.start, 0)
   const after = (_x: number, _state: Float64Array, step: Step | null) => {
@@ -93,7 +97,7 @@ export function passage(field: Field, purse: Purse): { readonly steps: readonly 
     if (step) steps.push(step)
     return false
   }
-  const arrival = run(field, state, FINAL, purse, after, true)
+  const arrival = run(field, state, tolerance, purse, after, true)
   /* v8 ignore if -- the search for the height, which goes first, is the dearer one */
   if (arrival === 'spent') throw overBudget('The field swings too often before today to be followed.')
   /* v8 ignore if -- the last shots of the search came through with the same accuracy */

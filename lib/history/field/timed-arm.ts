@@ -35,9 +35,11 @@ interface Course {
   readonly legs: readonly Leg[]
   readonly forward: boolean
   readonly direction: Direction
+  /** Relative error of what is integrated. */
+  readonly error: number
 }
 
-function timedZone({ legs, forward, direction }: Course, time: (N: number) => number): Zone {
+function timedZone({ legs, forward, direction, error }: Course, time: (N: number) => number): Zone {
   const [first, last] = [legs[0].from, legs[legs.length - 1].to]
   const [origin, sign] = forward ? [first, 1] : [last, -1]
   const at = along(legs)
@@ -50,6 +52,7 @@ function timedZone({ legs, forward, direction }: Course, time: (N: number) => nu
     variableAt: (m) => sign * (time(direction * m) - origin),
     expansion: (s) => at(RATE, tau(s)) ** 2,
     conditioning: () => VOYAGE_ERROR / Number.EPSILON,
+    stray: () => error / Number.EPSILON,
     sampleInto(out: Samples, centre, half) {
       for (let k = 0; k < NODE_COUNT; k++) {
         const moment = tau(centre + half * NODES[k])
@@ -66,13 +69,16 @@ export function timedArm(route: Route, course: Course, end: Search): Arm {
   const { legs, forward, direction } = course
   const trail = trailByTime(route.field, direction > 0 === forward ? legs : legs.toReversed())
   const panels = panelsOf(timedZone(course, trail.time), () => false)
-  return armFrom(timedModel(route, trail), direction, end, panels, end.kind === 'root' ? 'end' : 'far')
+  return armFrom(timedModel(route, trail, course.error), direction, end, panels, end.kind === 'root' ? 'end' : 'far')
 }
 
 /** E² is that of the integration, which stays right where the sum of densities cancels. */
-function timedModel({ budget, today }: Route, trail: TimedTrail): Model {
+function timedModel({ budget, today }: Route, trail: TimedTrail, error: number): Model {
   const outside = { before: 6, after: 6 }
-  const model = modelOf(budget, fieldLaw(trail, { today, outside, breaks: [], error: () => VOYAGE_ERROR }))
+  const model = modelOf(
+    budget,
+    fieldLaw(trail, { today, outside, breaks: [], least: () => VOYAGE_ERROR, error: () => error }),
+  )
   const first = trail.edges[0]
   const expansion = (N: number, inverseScale: number) => {
     /* v8 ignore if -- beyond the trail the tail of its arm is asked, not the model */
@@ -90,11 +96,11 @@ function timedModel({ budget, today }: Route, trail: TimedTrail): Model {
 }
 
 /** Time and conformal time along legs and on in the power law of a crunch, E² ∝ a⁻⁶, from N and H in `state`. */
-export function restOf(legs: readonly Leg[], state: Float64Array): Omit<Unfollowed, 'because'> {
+export function restOf(legs: readonly Leg[], state: Float64Array, stray: number): Omit<Unfollowed, 'because'> {
   let time = 1 / (3 * Math.abs(state[RATE]))
   let conformal = Math.exp(-state[SCALE]) / (2 * Math.abs(state[RATE]))
-  let error = VOYAGE_ERROR * conformal
-  const zone = timedZone({ legs, forward: true, direction: 1 }, () => Number.NaN)
+  let error = stray * conformal
+  const zone = timedZone({ legs, forward: true, direction: 1, error: stray }, () => Number.NaN)
   for (const panel of panelsOf(zone, () => false)) {
     time += panel.time.total
     conformal += panel.conformal.total

@@ -35,8 +35,8 @@ export interface Voyage {
 
 const scratch = new Float64Array(3)
 
-/** From today, with φ and φ̇ in `today`. */
-export function travelOn(field: Field, today: Float64Array, purse: Purse): Voyage {
+/** From today, with φ and φ̇ in `today`, by steps that many times `looser`. */
+export function travelOn(field: Field, today: Float64Array, purse: Purse, looser = 1): Voyage {
   const steps: Step[] = []
   const turns: Turn[] = []
   let end: Voyage['end'] = 'spent'
@@ -51,7 +51,8 @@ export function travelOn(field: Field, today: Float64Array, purse: Purse): Voyag
     return outcome !== null
   }
   const state = Float64Array.of(0, 1, today[0], today[1])
-  travel(byTime(field), { from: 0, to: 1e9, state, tolerance: TOLERANCE, first: 0.05, after, dense: true, purse })
+  const tolerance = looser * TOLERANCE
+  travel(byTime(field), { from: 0, to: 1e9, state, tolerance, first: 0.05, after, dense: true, purse })
   return { steps, turns, end, state }
 }
 
