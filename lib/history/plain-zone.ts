@@ -63,7 +63,9 @@ function strayOf(model: Model, N: number): number {
   const { budget, law } = model
   if (!law.stray || budget.dark === 0) return 0
   const share = Math.abs(budget.dark * law.density(N)) / expansionAt(model, N, Math.exp(-N))
-  return law.stray(N) * (share >= 0 && share < 1e16 ? share : 1)
+  return share >= 0 && share < 1e16
+    ? law.stray(N) * share
+    : /* v8 ignore next -- only where the densities of a field leave the doubles */ law.stray(N)
 }
 
 /** What rounding N and ln f does to f where exponents or densities are extreme, relative to E² in units of eps. */

