@@ -4,6 +4,7 @@ import { exampleCommand, exampleLink } from '../../lib/interface/examples'
 import type { Route, RouteParameter } from '../../lib/interface/route'
 import { ROUTES } from '../../lib/interface/routes'
 import { CODE_KEYS, FAMILY_KEYS, type KeyTold } from '../../lib/interface/scenario-code'
+import { typeset } from '../../lib/words/number'
 import { EDITION } from '../edition'
 import { Formula } from '../method/formula'
 import { Footer } from '../ui/footer'
@@ -114,7 +115,12 @@ function Parameter({ parameter }: { readonly parameter: RouteParameter }) {
           description.split('`').map((part, i) => (i % 2 === 1 ? <code key={part}>{part}</code> : part))
         )}
         {choices !== '' && ` One of ${choices}.`}
-        {schema.default !== undefined && ` Default: ${schema.default}.`}
+        {schema.default !== undefined && (
+          <>
+            {' '}
+            Default: <code>{String(schema.default)}</code>.
+          </>
+        )}
       </td>
     </tr>
   )
@@ -149,13 +155,18 @@ function Keys({ keys }: { readonly keys: readonly KeyTold[] }) {
     <table className="parameters">
       <tbody>
         {keys.map(({ key, meaning, allowed, fallback }) => (
-          <tr key={`${key}${allowed}`}>
+          <tr key={key}>
             <th scope="row">
               <code>{key}</code>
             </th>
             <td>
-              <Sentence text={meaning} /> Allowed: <Sentence text={allowed} />.
-              {fallback !== '' && ` Default: ${fallback}.`}
+              <Sentence text={meaning} /> Allowed: <Sentence text={typeset(allowed)} />.
+              {fallback !== '' && (
+                <>
+                  {' '}
+                  Default: <code>{fallback}</code>.
+                </>
+              )}
             </td>
           </tr>
         ))}

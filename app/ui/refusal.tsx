@@ -1,4 +1,5 @@
 import type { Refusal as Refused } from '../../lib/answers/explorer'
+import { typeset } from '../../lib/words/number'
 import { Sentence } from './symbol'
 
 /** Names what is wrong with an address and says what is shown in its place. */
@@ -11,7 +12,7 @@ export function Refusal({ refusal }: { readonly refusal: Refused }) {
         {problems.map(({ parameter, scenario, value, allowed, message }) => (
           <li key={`${scenario}${parameter}${message}`}>
             <b>{parameter}</b> {value && <q>{value}</q>} {scenario !== null && `in scenario ${scenario + 1}`}:{' '}
-            <Sentence text={message} /> Allowed: {allowed}.
+            <Sentence text={message} /> Allowed: {typeset(allowed)}.
           </li>
         ))}
       </ul>

@@ -15,19 +15,29 @@ export interface KeyTold {
   readonly fallback: string
 }
 
-export const CODE_KEYS: readonly KeyTold[] = OWN_PARAMETERS.map(toldOf)
+export const CODE_KEYS: readonly KeyTold[] = toldOf(OWN_PARAMETERS)
 
 export const FAMILY_KEYS = FAMILIES.map(({ key, label, formula, source, parameters }) => ({
   key,
   label,
   formula,
   source,
-  keys: parameters.map(toldOf),
+  keys: toldOf(parameters),
 }))
 
-function toldOf(one: Told): KeyTold {
-  const { key, label, meaning } = one
-  return { key, label, meaning, allowed: allowedOf(one), fallback: fallbackOf(one) }
+/** Each key once, though a family may have it with other limits for other values of another key. */
+function toldOf(parameters: readonly Told[]): readonly KeyTold[] {
+  const keys = [...new Set(parameters.map(({ key }) => key))]
+  return keys.map((key) => {
+    const same = parameters.filter((one) => one.key === key)
+    const { label, meaning } = same[0] as Told
+    const allowed = same.map((one) => `${allowedOf(one)}${whereOf(one)}`).join('; ')
+    return { key, label, meaning, allowed, fallback: fallbackOf(same[0] as Told) }
+  })
+}
+
+function whereOf(one: Told): string {
+  return 'only' in one && one.only ? `, where ${one.only.key} is ${one.only.values.join(' or ')}` : ''
 }
 
 function allowedOf(one: Told): string {

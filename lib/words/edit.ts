@@ -4,6 +4,7 @@ import type { Problem } from '../scenario/scenario'
 import { codeOf, composedLink } from './compose'
 import type { Desk } from './desk'
 import { type Field, unitText } from './fields'
+import { typeset } from './number'
 
 export type Edited = { readonly ok: true; readonly link: string } | { readonly ok: false; readonly complaint: string }
 
@@ -29,5 +30,5 @@ function shownFields({ form }: Desk): readonly Field[] {
 function complaintOf({ parameter, message, allowed }: Problem, fields: readonly Field[]): string {
   const label = fields.find(({ name }) => name === parameter)?.label
   const said = label && message.startsWith(`${parameter} `) ? `${label}${message.slice(parameter.length)}` : message
-  return `${said.charAt(0).toUpperCase()}${said.slice(1)} Allowed: ${unitText(allowed).replace(' joined by _', '')}.`
+  return `${said.charAt(0).toUpperCase()}${said.slice(1)} Allowed: ${typeset(unitText(allowed)).replace(' joined by _', '')}.`
 }

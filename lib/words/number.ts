@@ -37,6 +37,11 @@ export function signed(text: string): string {
   return text.startsWith(MINUS) || /^[0.]+$/.test(text) ? text : `+${text}`
 }
 
+/** Numbers as they are typed, within words: with a true minus sign. */
+export function typeset(words: string): string {
+  return words.replace(/(?<![\p{L}\d])-(?=[\d.])/gu, MINUS)
+}
+
 /** A power of ten, or a few of them, to one digit. */
 export function powerOfTen(value: number): string {
   return scientific(value, 1).replace(`1${THIN}×${THIN}`, '')
