@@ -42,7 +42,7 @@ test('the explorer opens and computes with the server killed, says so, and finds
 
   // The ruler and the words as well. In flat dust the distance to z = 3 is 2 (1 − 1/√4) c/H₀, whatever H₀.
   await open(page, '/?s=h0:50,matter:1,cmb:0,as:Dust&at=1&read=comoving&units=h')
-  await expect(page.getByRole('button', { name: 'Read', exact: true })).toHaveCount(0)
+  await expect(page.getByRole('button', { name: 'Read', exact: true, includeHidden: true })).toHaveCount(0)
   await page.getByRole('textbox', { name: 'redshift' }).fill('3')
   await expect(page.locator('[data-reading="comoving"] .value')).toHaveText(['2997.92'])
   await page.locator('.take-away summary').click()

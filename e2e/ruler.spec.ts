@@ -8,7 +8,9 @@ const cells = (page: Page, key: string) => page.locator(`[data-reading="${key}"]
 const alive = (page: Page) => expect(page.getByRole('button', { name: 'Copy link' })).toBeVisible({ timeout: 15_000 })
 /** The live ruler has taken over. */
 const live = (page: Page) =>
-  expect(page.getByRole('button', { name: 'Read', exact: true })).toHaveCount(0, { timeout: 15_000 })
+  expect(page.getByRole('button', { name: 'Read', exact: true, includeHidden: true })).toHaveCount(0, {
+    timeout: 15_000,
+  })
 
 /** Rows of a downloaded table by the names of its columns; the first cell is quoted. */
 function rowsOf(csv: string): Readonly<Record<string, string>>[] {

@@ -40,7 +40,7 @@ test('words come when they are opened, and one click copies each', async ({ page
   const heard = await complaints(page)
   await page.goto(SCENARIOS, { waitUntil: 'networkidle' })
   // The ruler above is another one then, and what stands below moves no more.
-  await expect(page.getByRole('button', { name: 'Read', exact: true })).toHaveCount(0)
+  await expect(page.getByRole('button', { name: 'Read', exact: true, includeHidden: true })).toHaveCount(0)
   await page.locator('.take-away summary').click()
   await page.getByRole('button', { name: 'Copy: LaTeX macros' }).click()
   await expect(page.getByText('Copied', { exact: true })).toBeVisible()

@@ -49,7 +49,7 @@ export const Ingredients = memo(function Ingredients({ desk, still, sets, live }
             {group.key === 'rate' && <Retune desk={still} sets={sets} />}
           </Group>
         ))}
-        <button type="submit" className={live ? 'absent' : undefined}>
+        <button type="submit" className={live ? 'absent unscripted' : 'unscripted'}>
           Apply
         </button>
       </form>

@@ -56,7 +56,11 @@ export function Ruler({ desk, view, shelf, hand, state = null }: Props) {
           ))}
         <RulerFields ask={ask} shelf={shelf} complaints={view.complaints} hand={hand} />
         <ReadingChoices ask={ask} shelf={shelf} hand={hand} />
-        {!hand && <button type="submit">Read</button>}
+        {!hand && (
+          <button type="submit" className="unscripted">
+            Read
+          </button>
+        )}
       </form>
       <Readings view={view} state={state} {...captionsOf(ask, shelf)} />
     </section>

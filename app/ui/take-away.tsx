@@ -59,7 +59,9 @@ export function TakeAway({ desk, lists, version, live }: Props) {
         <tbody>
           <Row label="Table" choices={lists.tables} href={(format) => `/api/table?${query}&format=${format}`} />
           <Codes query={query} lists={lists} live={live} />
-          <FrameRow query={`${query}${theme}`} title={titleOf(desk)} lists={lists} live={live} />
+        </tbody>
+        <FrameRows query={`${query}${theme}`} title={titleOf(desk)} lists={lists} live={live} />
+        <tbody>
           <tr>
             <th scope="row">For programs</th>
             <td>
@@ -96,7 +98,7 @@ function useOpen() {
 }
 
 /** What a page of somebody else pastes to show the figure. */
-function FrameRow({
+function FrameRows({
   query,
   title,
   lists,
@@ -105,19 +107,25 @@ function FrameRow({
   const base = lists.base === '' && live ? location.origin : lists.base
   const html = frameHtml(`${base}/embed?${query}`, title)
   return (
-    <tr>
-      <th scope="row">Frame for other pages</th>
-      <td className="text">
-        <a href={`/embed?${query}`} rel="nofollow">
-          Open
-        </a>
-        <CopyText title="HTML of the frame" text={html} />
-        {/* biome-ignore lint/a11y/noNoninteractiveTabindex: what scrolls must be within reach of the keyboard */}
-        <pre className="code" tabIndex={0}>
-          {html}
-        </pre>
-      </td>
-    </tr>
+    <tbody className="text">
+      <tr>
+        <th scope="row">Frame for other pages</th>
+        <td>
+          <a href={`/embed?${query}`} rel="nofollow">
+            Open
+          </a>
+          <CopyText title="HTML of the frame" text={html} />
+        </td>
+      </tr>
+      <tr>
+        <td colSpan={2}>
+          {/* biome-ignore lint/a11y/noNoninteractiveTabindex: what scrolls must be within reach of the keyboard */}
+          <pre className="code" tabIndex={0}>
+            {html}
+          </pre>
+        </td>
+      </tr>
+    </tbody>
   )
 }
 

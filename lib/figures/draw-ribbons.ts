@@ -85,12 +85,15 @@ function key(place: number, y: number, plot: Plot, type: number): SvgNode {
 
 function word({ from, to, value }: Stretch<Era>, y: number, plot: Plot, type: number): SvgNode[] {
   const size = px(WORD * type)
-  const [left, right] = [plot.x(from), plot.x(to)]
-  if (textWidth(value, size) + 0.6 * type > right - left) return []
-  // Beside the line of now, never under it.
-  const now = plot.x(0)
-  const start = left < now && right > now && right - now > now - left ? now : left
-  const fits = textWidth(value, size) + 0.6 * type <= right - start
-  const place = { x: px((fits ? start : left) + 0.45 * type), y: px(y + 0.79 * type), 'font-size': size }
+  const start = startOf(plot.x(from), plot.x(to), plot.x(0), textWidth(value, size) + 0.6 * type)
+  if (start === null) return []
+  const place = { x: px(start + 0.45 * type), y: px(y + 0.79 * type), 'font-size': size }
   return [svg('text', { ...place, class: `era-word ${value.replace(' ', '-')}` }, value)]
+}
+
+/** Where a word begins that needs so much room: beside the line of now, never under it. */
+function startOf(left: number, right: number, now: number, needed: number): number | null {
+  const parts = now > left && now < right ? [[left, now] as const, [now, right] as const] : [[left, right] as const]
+  const [start, end] = parts.reduce((best, part) => (part[1] - part[0] > best[1] - best[0] ? part : best))
+  return end - start >= needed ? start : null
 }
