@@ -49,6 +49,8 @@ export interface Reference {
   readonly axis: 'x' | 'y'
   readonly at: number
   readonly label: string
+  /** On a phone. */
+  readonly short?: string
 }
 
 /** A place with a name of its own. */

@@ -22,7 +22,7 @@ export function drawAxes(chart: Axes, plot: Plot, frame: Frame, inRow: boolean):
   const size = px(frame.type * SMALL)
   return [
     ...upright(chart.y, plot, frame, size),
-    ...chart.references.flatMap((one) => reference(one, plot, frame)),
+    ...chart.references.map((one) => reference(one, plot)),
     ...level(chart, plot, frame, size),
     svg('text', { ...headOf(frame, plot), 'font-size': size, class: 'axis' }, ...titleOf(chart.y, size)),
     title(chart.x, plot, frame, size, inRow),
@@ -108,27 +108,9 @@ export function within(axis: Axis, at: number): boolean {
   return part >= 0 && part <= 1
 }
 
-/** Size of the words at a line of reference, in units of the type. */
-const REFERENCE_SIZE = 0.8
-
-/** Where words stand at lines of reference: at the right, upon the line. */
-export function referenceBoxes({ references }: Pick<Chart, 'references'>, plot: Plot, { type }: Frame) {
-  const size = REFERENCE_SIZE * type
-  const named = references.filter(({ axis, label }) => axis === 'y' && label !== '')
-  return named.map(({ at, label }) => {
-    const width = textWidth(label, size)
-    return { x: plot.right - 0.4 * type - width, y: plot.y(at) - 0.35 * type - size, width, height: size }
-  })
-}
-
-function reference({ axis, at, label }: Reference, plot: Plot, { type }: Frame): SvgNode[] {
-  const size = px(REFERENCE_SIZE * type)
-  if (axis === 'x') {
-    const x = plot.x(at)
-    return [svg('line', { x1: x, x2: x, y1: plot.top, y2: plot.bottom, class: 'reference' })]
-  }
-  const y = plot.y(at)
-  const place = { x: px(plot.right - 0.4 * type), y: px(y - 0.35 * type), 'font-size': size, class: 'axis' }
-  const line = svg('line', { x1: plot.left, x2: plot.right, y1: y, y2: y, class: 'reference' })
-  return label === '' ? [line] : [line, svg('text', { ...place, 'text-anchor': 'end' }, label)]
+function reference({ axis, at }: Reference, plot: Plot): SvgNode {
+  const [x, y] = [plot.x(at), plot.y(at)]
+  const ends =
+    axis === 'x' ? { x1: x, x2: x, y1: plot.top, y2: plot.bottom } : { x1: plot.left, x2: plot.right, y1: y, y2: y }
+  return svg('line', { ...ends, class: 'reference' })
 }

@@ -1,6 +1,5 @@
 /** Labels at the ends of curves: above the plot, beside it, or next to a mark within it, never one over another. */
 import type { Chart, Curve } from './chart'
-import { referenceBoxes } from './draw-axes'
 import { alongLine, type Box, clearest, costOf, obstaclesOf, type Spot } from './obstacles'
 import type { Frame, Plot } from './plot'
 import { rowsOf } from './rows'
@@ -62,15 +61,11 @@ export function placeLabels(chart: Drawn, plot: Plot, frame: Frame, free: number
     ...spotWishes(chart, plot, frame),
     ...chart.curves.flatMap((curve) => insideWishes(curve, plot, frame, below.includes(curve))),
   ]
-  const spots = inside.length > 0 ? obstaclesOf(chart, plot) : []
-  const fixed = referenceBoxes(chart, plot, frame)
-  for (const wish of inside) {
-    const taken = [...fixed, ...placed.map((label) => boxOf(label, frame.type))]
-    placed.push(placeInside(wish, spots, plot, frame, taken))
-  }
-  return frame.compact
-    ? [...placed, ...withinRight(chart, plot, frame, [...fixed, ...placed.map((one) => boxOf(one, frame.type))])]
-    : placed
+  const levels = levelWishes(chart, plot, frame)
+  const spots = inside.length + levels.length > 0 ? obstaclesOf(chart, plot) : []
+  const boxes = () => placed.map((label) => boxOf(label, frame.type))
+  for (const wish of [...levels, ...inside]) placed.push(placeInside(wish, spots, plot, frame, boxes()))
+  return frame.compact ? [...placed, ...withinRight(chart, plot, frame, boxes())] : placed
 }
 
 /** The curves that are named above the plot. On a phone that has no room for them all it is none: hue and dash are the key. */
@@ -215,6 +210,26 @@ function spotWishes({ spots }: Drawn, plot: Plot, frame: Frame): InsideWish[] {
     return { tone, name: '', note: label, places: besidePoint(at, plot, frame), from: spotOf(at, plot) }
   })
 }
+
+/** Words at a line across the figure, above or below it, from the right. */
+function levelWishes({ references }: Drawn, plot: Plot, { type, compact }: Frame): InsideWish[] {
+  const named = references.filter(({ axis, label }) => axis === 'y' && label !== '')
+  return named.map(({ at, label, short = label }) => {
+    const places = (width: number, height: number) => {
+      const room = plot.right - plot.left - width - 0.8 * type
+      const rows = [plot.y(at) - height - 0.15 * type, plot.y(at) + 0.15 * type]
+      const steps = Array.from(
+        { length: LEVEL_STEPS + 1 },
+        (_, i) => plot.right - 0.4 * type - width - (room * i) / LEVEL_STEPS,
+      )
+      return steps.flatMap((x) => rows.map((y) => ({ x, y, width, height, of: x })))
+    }
+    return { tone: 'part-level', name: '', note: compact ? short : label, places }
+  })
+}
+
+/** So many places along the line are tried. */
+const LEVEL_STEPS = 24
 
 const spotOf = ([x, y]: Point, plot: Plot): Spot => [plot.x(x), plot.y(y)]
 

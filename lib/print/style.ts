@@ -46,6 +46,7 @@ const SCENARIO = /^(?:slot|ink)-(\d)$/
 const PARTS: Readonly<Record<string, string>> = {
   'part-cone': 'ink',
   'part-galaxy': 'soft',
+  'part-level': 'soft',
   'part-event': 'hue-1',
   'part-particle': 'hue-2',
   'part-hubble': 'hue-3',

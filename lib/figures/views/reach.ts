@@ -79,7 +79,8 @@ function pathsOf(asked: Asked, galaxy: Galaxy | null) {
 function referencesOf({ measures }: Solution, proper: boolean, top: number): Chart['references'] {
   const limit = measures.eventHorizon.value
   if (proper || limit === null || limit > top) return []
-  return [{ axis: 'y', at: limit, label: `limit of light sent today, ${withUnit(significant(limit, 3), 'Gly')}` }]
+  const distance = withUnit(significant(limit, 3), 'Gly')
+  return [{ axis: 'y', at: limit, label: `limit of light sent today, ${distance}`, short: `limit, ${distance}` }]
 }
 
 /** Close to the origin and the end, where conformal time runs fast. */
