@@ -153,8 +153,9 @@ function withinRight(chart: Drawn, plot: Plot, frame: Frame, taken: readonly Box
     .map((curve) => ({ curve, texts: textsOf(curve, frame), at: plot.y(curve.finish?.at[1] ?? 0) }))
     .sort((one, other) => one.at - other.at)
   if (ends.length === 0) return []
-  const spots = obstaclesOf(chart, plot)
   const right = plot.right - 0.7 * type
+  const widest = Math.max(...ends.map(({ texts }) => labelWidth(texts, type)))
+  const spots = obstaclesOf(chart, plot).filter(([x]) => x > right - widest - type)
   const rows = ends.map(({ texts, at }) => {
     const [width, height] = [labelWidth(texts, type), labelHeight(texts, type)]
     const cost = (y: number) =>
