@@ -115,12 +115,7 @@ function Parameter({ parameter }: { readonly parameter: RouteParameter }) {
           description.split('`').map((part, i) => (i % 2 === 1 ? <code key={part}>{part}</code> : part))
         )}
         {choices !== '' && ` One of ${choices}.`}
-        {schema.default !== undefined && (
-          <>
-            {' '}
-            Default: <code>{String(schema.default)}</code>.
-          </>
-        )}
+        {schema.default !== undefined && <Default value={String(schema.default)} />}
       </td>
     </tr>
   )
@@ -161,16 +156,21 @@ function Keys({ keys }: { readonly keys: readonly KeyTold[] }) {
             </th>
             <td>
               <Sentence text={meaning} /> Allowed: <Sentence text={typeset(allowed)} />.
-              {fallback !== '' && (
-                <>
-                  {' '}
-                  Default: <code>{fallback}</code>.
-                </>
-              )}
+              {fallback !== '' && <Default value={fallback} />}
             </td>
           </tr>
         ))}
       </tbody>
     </table>
+  )
+}
+
+/** At the end of what is said of a key. */
+function Default({ value }: { readonly value: string }) {
+  return (
+    <>
+      {' '}
+      Default: <code>{value}</code>.
+    </>
   )
 }

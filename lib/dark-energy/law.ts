@@ -93,6 +93,9 @@ export interface Law {
   readonly stray?: (N: number) => number
 }
 
+/** The error that a law has beside rounding, relative to f and in units of eps. */
+export const strayOf = (law: Law, N: number): number => law.stray?.(N) ?? 0
+
 /** A family of laws: one file, one line in the list (index.ts). Form, URL keys, method page and tests follow from it. */
 export interface Family {
   /** The word after `eos:`. */

@@ -5,7 +5,7 @@ import { drawCurve } from './draw-curve'
 import { drawLabel } from './draw-label'
 import { drawRibbons, ribbonsHeight } from './draw-ribbons'
 import { titleWidth } from './draw-text'
-import { labelHeight, labelWidth, namedAbove, nameOf, placeLabels } from './labels'
+import { labelHeight, labelWidth, namedAbove, placeLabels, textsOf } from './labels'
 import { type Frame, type Margins, type Plot, plotOf } from './plot'
 import { fractionOf } from './scale'
 import { px, type SvgNode, svg } from './svg'
@@ -64,10 +64,6 @@ function freeAbove(chart: Chart, frame: Frame): number {
 /** The title of the horizontal axis stands beside its ticks where labels need a margin there anyway. */
 function titleInRow(chart: Chart, frame: Frame): boolean {
   return !frame.compact && titleWidth(chart.x, frame.type * SMALL) < Math.max(9 * frame.type, besideOf(chart, frame))
-}
-
-function textsOf(curve: Curve, frame: Frame) {
-  return { name: nameOf(curve, frame), note: frame.compact ? '' : curve.note }
 }
 
 /** A label at a mark so near the right edge needs room beside it too. */

@@ -31,7 +31,7 @@ const UNDER_TITLE = 3
 const LONGEST_NAME = 13
 const SHORTEST_NAME = 5
 
-export function nameOf({ name }: Curve, { type }: Frame): string {
+function nameOf({ name }: Curve, { type }: Frame): string {
   return fitted(name, type, LONGEST_NAME * type)
 }
 
@@ -116,7 +116,8 @@ const EMPTY = { name: '', note: '' }
 
 const toneOf = ({ tone, strong }: Curve): string => (strong ? tone : `${tone} quiet`)
 
-function textsOf(curve: Curve, frame: Frame): { readonly name: string; readonly note: string } {
+/** What a curve is labelled with; on a phone its name alone. */
+export function textsOf(curve: Curve, frame: Frame): { readonly name: string; readonly note: string } {
   return { name: nameOf(curve, frame), note: frame.compact ? '' : curve.note }
 }
 

@@ -128,8 +128,3 @@ function distance(point: Point, first: Point, last: Point): number {
   const length = Math.hypot(dx, dy)
   return length === 0 ? Math.hypot(x, y) : Math.abs(x * dy - y * dx) / length
 }
-
-/** Far finer than a screen, and half as long on its way there. */
-export function rounded([x, y]: Point): Point {
-  return [Number(x.toPrecision(6)), Number(y.toPrecision(6))]
-}

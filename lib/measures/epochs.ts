@@ -1,6 +1,7 @@
 /** Moments when one thing overtakes another: sign changes of a function of ln a along the expansion that holds today. */
 
 import type { Component } from '../components'
+import { strayOf } from '../dark-energy/law'
 import type { Arm } from '../history/arm'
 import type { History } from '../history/history'
 import type { Panel } from '../history/panels'
@@ -133,8 +134,7 @@ function accelerationError(model: Model, N: number): number {
     const n = Math.max(Math.abs(low), Math.abs(high))
     const log = one.logSize(N)
     // The error of a law that is followed counts six times in its slope.
-    const relative =
-      (1 + n / 2) * (4 + one.rounding(N, log)) + (one.key === 'dark' ? 4 * (model.law.stray?.(N) ?? 0) : 0)
+    const relative = (1 + n / 2) * (4 + one.rounding(N, log)) + (one.key === 'dark' ? 4 * strayOf(model.law, N) : 0)
     if (log > -700) sum += relative * Math.exp(log)
   }
   return Number.EPSILON * sum
@@ -222,7 +222,7 @@ const ratio = (over: readonly Component['key'][], under: readonly Component['key
     (4 +
       Math.abs(logOf(model, over, N)) +
       Math.abs(logOf(model, under, N)) +
-      (over === DARK ? (model.law.stray?.(N) ?? 0) : 0)),
+      (over === DARK ? strayOf(model.law, N) : 0)),
 })
 
 /** ln of cold matter over photons and all neutrinos; both must be there. */

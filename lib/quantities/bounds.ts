@@ -3,7 +3,7 @@
  * and what the rounding of ln a, or of the place found for a time, moves the value by.
  */
 import { GRAVITATION } from '../constants'
-import type { Law } from '../dark-energy/law'
+import { strayOf } from '../dark-energy/law'
 import { type Event, type Span, spanSinceNow, spanSinceOrigin, spanUntilEnd } from '../history/event'
 import type { History } from '../history/history'
 import type { Clock } from '../history/tail'
@@ -182,12 +182,9 @@ const darkShare = relative('omegaDark', (block, i) => {
   const N = block.N[i]
   const exponent = Math.abs(3 * (1 + law.w(N)))
   return (
-    ofDensity(block, i) + exponent * placeErrors(block)[i] + EPS * (4 * Math.abs(law.logDensity(N)) + noiseOf(law, N))
+    ofDensity(block, i) + exponent * placeErrors(block)[i] + EPS * (4 * Math.abs(law.logDensity(N)) + strayOf(law, N))
   )
 })
-
-/** Of a law that is followed step by step. */
-const noiseOf = (law: Law, N: number): number => law.stray?.(N) ?? 0
 
 const laws = new Float64Array(3)
 const equationErrors = errors((block, i) => {
@@ -197,7 +194,7 @@ const equationErrors = errors((block, i) => {
   const slope = Math.abs(n * n - laws[2] / laws[0]) / 3
   const size = 1 + Math.abs(law.w(block.N[i])) + Math.abs(law.w(0))
   return (
-    EPS * (FEW * size + 4 * noiseOf(law, block.N[i])) + (Number.isFinite(slope) ? slope : size) * placeErrors(block)[i]
+    EPS * (FEW * size + 4 * strayOf(law, block.N[i])) + (Number.isFinite(slope) ? slope : size) * placeErrors(block)[i]
   )
 })
 

@@ -1,4 +1,5 @@
 /** Every measure of a scenario once, in the order of the page; values in the units shown, with error bounds. */
+import { strayOf } from '../dark-energy/law'
 import { type Event, eventAtScale, isEvent } from '../history/event'
 import type { History } from '../history/history'
 import { leadingExponent } from '../history/tail'
@@ -56,7 +57,7 @@ const rounding = ({ history }: Subject): number =>
 
 /** Error of E² today that comes with the law of dark energy; those of its slopes are up to 6 and 36 times as large. */
 const noise = ({ past: { model } }: History): number =>
-  Number.EPSILON * Math.abs(model.budget.dark) * (model.law.stray?.(0) ?? 0)
+  Number.EPSILON * Math.abs(model.budget.dark) * strayOf(model.law, 0)
 
 const particle = (subject: Subject): Outcome => {
   const { past, before, origin } = subject.history
