@@ -28,44 +28,48 @@ const FARTHEST = 700
 const BEFORE = 1e-6
 
 /** A function of ln a along the expansion, with bounds of its slope, so that no sign change can hide. */
-export interface Comparison {
-  value(model: Model, N: number): number
-  slopeRange(model: Model, from: number, to: number): readonly [number, number]
+interface Compared {
+  value(N: number): number
+  slopeRange(from: number, to: number): readonly [number, number]
   /** Bound of the rounding error of the value. */
-  rounding(model: Model, N: number): number
+  rounding(N: number): number
 }
 
+/** What is compared, in any model. */
+export type Comparison = (model: Model) => Compared
+
 /** All sign changes of a comparison, in order of a. */
-export function overtakings(history: History, comparison: Comparison): readonly Crossing[] {
-  const [low, high] = [reachOf(history.past), reachOf(history.future)]
-  return [
-    ...changesBetween(comparison, history.past.model, low, 0),
-    ...changesBetween(comparison, history.future.model, 0, high),
-  ]
+export function overtakings({ past, future }: History, comparison: Comparison): readonly Crossing[] {
+  const found: Crossing[] = []
+  changesBetween(found, comparison(past.model), reachOf(past), 0)
+  changesBetween(found, comparison(future.model), 0, reachOf(future))
+  return found
 }
 
 const reachOf = ({ direction, end }: Arm): number =>
   direction * (end.kind === 'none' ? FARTHEST : Math.min(FARTHEST, Math.abs(end.N)))
 
 /** Intervals where the slope keeps its sign hold one change at most; where |value| outweighs the slope there is none; others are halved. */
-function changesBetween(comparison: Comparison, model: Model, from: number, to: number): Crossing[] {
-  const value = (N: number) => comparison.value(model, N)
-  const [low, high] = comparison.slopeRange(model, from, to)
+function changesBetween(found: Crossing[], compared: Compared, from: number, to: number): void {
+  const [low, high] = compared.slopeRange(from, to)
   const middle = (from + to) / 2
   if (low < 0 && high > 0 && to - from > 1e-6) {
-    if (Math.abs(value(middle)) > (Math.max(-low, high) * (to - from)) / 2) return []
-    return [...changesBetween(comparison, model, from, middle), ...changesBetween(comparison, model, middle, to)]
+    if (Math.abs(compared.value(middle)) > (Math.max(-low, high) * (to - from)) / 2) return
+    changesBetween(found, compared, from, middle)
+    changesBetween(found, compared, middle, to)
+    return
   }
-  const [left, right] = [value(from), value(to)]
+  const [left, right] = [compared.value(from), compared.value(to)]
   // Exactly zero where an interval begins, as today with equal densities: what came before decides.
-  const before = left === 0 ? value(from - BEFORE) : left
-  if (right === 0 || before > 0 === right > 0) return []
-  const N = left === 0 ? from : brent(value, from, to)
-  const slope = (at: number) => {
-    const [least, most] = comparison.slopeRange(model, at, at)
-    return (least + most) / 2
-  }
-  return [{ N, rising: before < right, blur: blurOf(comparison.rounding(model, N), slope, N) }]
+  const before = left === 0 ? compared.value(from - BEFORE) : left
+  if (right === 0 || before > 0 === right > 0) return
+  const N = left === 0 ? from : brent(compared.value, from, to)
+  found.push({ N, rising: before < right, blur: blurOf(compared.rounding(N), (at) => slopeAt(compared, at), N) })
+}
+
+function slopeAt(compared: Compared, N: number): number {
+  const [least, most] = compared.slopeRange(N, N)
+  return (least + most) / 2
 }
 
 /** Step in ln a for the bend of a function. */
@@ -189,41 +193,44 @@ const RADIATION: readonly Component['key'][] = ['radiation', 'neutrino']
 const DARK: readonly Component['key'][] = ['dark']
 
 /** ln of the summed sizes of some components. */
-function logOf(model: Model, keys: readonly Component['key'][], N: number): number {
-  let [largest, sum] = [Number.NEGATIVE_INFINITY, 0]
-  for (const one of model.components) {
-    if (!keys.includes(one.key)) continue
+function logOf(components: readonly Component[], N: number): number {
+  let largest = Number.NEGATIVE_INFINITY
+  let sum = 0
+  for (const one of components) {
     const log = one.terms && one.density(N) < 0 ? Number.NEGATIVE_INFINITY : one.logSize(N)
     sum = log > largest ? sum * Math.exp(largest - log) + 1 : sum + Math.exp(log - largest)
-    largest = Math.max(largest, log)
+    if (!(log <= largest)) largest = log
   }
   return largest + Math.log(sum)
 }
 
 /** Bounds of the exponents of some components over an interval. */
-function exponentsOf(
-  model: Model,
-  keys: readonly Component['key'][],
-  from: number,
-  to: number,
-): readonly [number, number] {
-  const ranges = model.components.filter((one) => keys.includes(one.key)).map((one) => one.exponentRange(from, to))
-  return [Math.min(...ranges.map(([low]) => low)), Math.max(...ranges.map(([, high]) => high))]
+function exponentsOf(components: readonly Component[], from: number, to: number): readonly [number, number] {
+  let least = Number.POSITIVE_INFINITY
+  let most = Number.NEGATIVE_INFINITY
+  for (const one of components) {
+    const [low, high] = one.exponentRange(from, to)
+    if (low < least) least = low
+    if (high > most) most = high
+  }
+  return [least, most]
 }
 
-const ratio = (over: readonly Component['key'][], under: readonly Component['key'][]): Comparison => ({
-  value: (model, N) => logOf(model, over, N) - logOf(model, under, N),
-  slopeRange: (model, from, to) => {
-    const [above, below] = [exponentsOf(model, over, from, to), exponentsOf(model, under, from, to)]
-    return [below[0] - above[1], below[1] - above[0]]
-  },
-  rounding: (model, N) =>
-    Number.EPSILON *
-    (4 +
-      Math.abs(logOf(model, over, N)) +
-      Math.abs(logOf(model, under, N)) +
-      (over === DARK ? strayOf(model.law, N) : 0)),
-})
+const ratio =
+  (over: readonly Component['key'][], under: readonly Component['key'][]): Comparison =>
+  ({ components, law }) => {
+    const above = components.filter(({ key }) => over.includes(key))
+    const below = components.filter(({ key }) => under.includes(key))
+    const stray = (N: number) => (over === DARK ? strayOf(law, N) : 0)
+    return {
+      value: (N) => logOf(above, N) - logOf(below, N),
+      slopeRange: (from, to) => {
+        const [[least, most], [low, high]] = [exponentsOf(above, from, to), exponentsOf(below, from, to)]
+        return [low - most, high - least]
+      },
+      rounding: (N) => Number.EPSILON * (4 + Math.abs(logOf(above, N)) + Math.abs(logOf(below, N)) + stray(N)),
+    }
+  }
 
 /** ln of cold matter over photons and all neutrinos; both must be there. */
 export const matterOverRadiation = ratio(MATTER, RADIATION)
