@@ -8,30 +8,36 @@ const ROUSE = readFileSync(new URL('./rouse.js', import.meta.url), 'utf8')
 
 /** The scripts in the head. */
 const SCRIPT = /<script src="([^"]+)" async="" nonce="([^"]*)"><\/script>/g
+/** What they are told at the end of the body. As plain text nobody compiles it. */
+const TOLD = /<script nonce="([^"]*)">(?=\(?self\.__next_f)/g
+/** No such beginning is longer. */
+const BEGINNING = 120
 const HEAD_END = '</head>'
 
 /**
- * Holds back the head of a page until it is complete, and changes its scripts; all else is passed on as it comes.
+ * Changes a page on its way out; all else is passed on as it comes.
  * @template {import('node:http').ServerResponse} Response
  * @param {Response} response
  * @returns {Response} the same
  */
 export function rest(response) {
   const { write, end } = response
-  let head = ''
+  const page = restingPage()
   const restore = () => Object.assign(response, { write, end })
   response.write = (/** @type {any} */ chunk, /** @type {any[]} */ ...others) => {
-    if (isPage(response)) {
-      head += bytesOf(chunk, others[0])
-      if (!head.includes(HEAD_END)) return true
-    }
+    if (isPage(response)) return pass(page.add(bytesOf(chunk, others[0])))
     restore()
-    return response.write(head === '' ? chunk : resting(head), ...others)
+    return response.write(chunk, ...others)
   }
+  const pass = (/** @type {string} */ text) =>
+    text === '' || Reflect.apply(write, response, [Buffer.from(text, 'latin1')])
   response.end = (/** @type {any[]} */ ...last) => {
     restore()
-    if (head !== '') response.write(resting(head))
-    return response.end(...last)
+    if (!isPage(response)) return response.end(...last)
+    const [chunk, encoding] = last
+    const text = typeof chunk === 'string' || chunk instanceof Uint8Array ? page.add(bytesOf(chunk, encoding)) : ''
+    pass(text + page.end())
+    return response.end(last.find((one) => typeof one === 'function'))
   }
   return response
 }
@@ -44,14 +50,43 @@ const isPage = (response) =>
 const bytesOf = (chunk, encoding) =>
   (typeof chunk === 'string' ? Buffer.from(chunk, encoding) : Buffer.from(chunk)).toString('latin1')
 
+/** A page that comes in pieces: each gives back what can go on by now. The head waits until it is complete. */
+export function restingPage() {
+  let held = ''
+  let inHead = true
+  const released = (/** @type {number} */ length) => {
+    const ready = held.slice(0, length)
+    held = held.slice(length)
+    return ready.replace(TOLD, '<script type="text/plain" data-rest nonce="$1">')
+  }
+  const leaveHead = () => {
+    if (inHead) held = withRestingHead(held)
+    inHead = false
+  }
+  return {
+    /** @param {string} text */
+    add(text) {
+      held += text
+      if (inHead && !held.includes(HEAD_END)) return ''
+      leaveHead()
+      const tag = held.lastIndexOf('<')
+      return released(tag > held.length - BEGINNING ? tag : held.length)
+    },
+    end() {
+      leaveHead()
+      return released(held.length)
+    },
+  }
+}
+
 /** The scripts are fetched all the same, with what is left of the line. @param {string} head */
-function resting(head) {
+function withRestingHead(head) {
   const [first, ...others] = [...head.matchAll(SCRIPT)]
-  if (!first) return Buffer.from(head, 'latin1')
+  if (!first) return head
   const sources = [first, ...others].map(([, source]) => source)
   const rouse = `<script nonce="${first[2]}" data-scripts="${sources.join(' ')}">${ROUSE}</script>`
   const links = sources.map(
     (source) => `<link rel="preload" as="script" fetchpriority="low" nonce="${first[2]}" href="${source}"/>`,
   )
-  return Buffer.from(head.replace(SCRIPT, '').replace(HEAD_END, [...links, rouse, HEAD_END].join('')), 'latin1')
+  return head.replace(SCRIPT, '').replace(HEAD_END, [...links, rouse, HEAD_END].join(''))
 }

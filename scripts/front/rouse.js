@@ -4,11 +4,18 @@
   const signs = ['pointermove', 'pointerdown', 'touchstart', 'keydown', 'focusin', 'wheel', 'scroll']
   const patience = 3000
   let roused = false
+  const scriptOf = (properties) => Object.assign(document.createElement('script'), properties)
+  const tell = () => {
+    for (const told of document.querySelectorAll('[data-rest]'))
+      told.replaceWith(scriptOf({ nonce: told.nonce, text: told.text }))
+  }
   const rouse = () => {
     if (roused) return
     roused = true
     for (const sign of signs) removeEventListener(sign, rouse, true)
-    for (const src of sources) document.head.append(Object.assign(document.createElement('script'), { src }))
+    tell()
+    if (document.readyState === 'loading') addEventListener('DOMContentLoaded', tell)
+    for (const src of sources) document.head.append(scriptOf({ src }))
   }
   for (const sign of signs) addEventListener(sign, rouse, { capture: true, passive: true })
   addEventListener('load', () => setTimeout(rouse, patience))
