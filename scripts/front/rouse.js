@@ -14,7 +14,8 @@
     roused = true
     for (const sign of signs) removeEventListener(sign, rouse, true)
     tell()
-    if (document.readyState === 'loading') addEventListener('DOMContentLoaded', tell)
+    // The rest of it, before those who are told take it for complete.
+    if (document.readyState === 'loading') document.addEventListener('DOMContentLoaded', tell)
     for (const src of sources) document.head.append(scriptOf({ src }))
   }
   for (const sign of signs) addEventListener(sign, rouse, { capture: true, passive: true })
