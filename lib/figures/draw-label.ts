@@ -1,5 +1,5 @@
 /** A label in the colour of its curve, with a rim of the ground so that it stays readable over lines. */
-import { type Label, NAME_LINE, NOTE_LINE, NOTE_SIZE } from './labels'
+import { type Label, NAME_LINE, NOTE_LINE, NOTE_SIZE } from './label'
 import type { Frame } from './plot'
 import { px, type SvgNode, svg } from './svg'
 

@@ -89,8 +89,10 @@ function shownEvent({ end }: Seen, past: number, { farthest, turn }: Future): nu
   return Math.max(end.turnaround.time * AFTER_TURN, end.time === null ? 0 : farthest * past)
 }
 
-/** Until the curve has left through the top, or so far that its course is clear. */
-function plainFuture({ scales }: Entry, past: number, { plain }: Future): number {
+/** Until the curve has left through the top, or so far that its course is clear: where it turns later, as far as a turn might be. */
+function plainFuture({ scales, solution }: Entry, past: number, kind: Future): number {
+  const turns = (solution.end.turnaround?.scale ?? Number.POSITIVE_INFINITY) <= TURNING_TOP
+  const plain = turns ? kind.turn * AFTER_TURN : kind.plain
   const step = (plain * past) / STEPS
   const sizes = scales(Array.from({ length: STEPS + 1 }, (_, i) => i * step))
   const left = sizes.findIndex((size) => size === null || size > PLAIN_TOP)
