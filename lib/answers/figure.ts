@@ -2,7 +2,7 @@
 import type { Chart } from '../figures/chart'
 import { drawChart, heightOfChart } from '../figures/draw-chart'
 import { VIEWS } from '../figures/views'
-import type { View } from '../figures/views/view'
+import { askedOf, drawnOf, type View } from '../figures/views/view'
 import { fileName } from '../formats/file-name'
 import { type Picture, type Sheet, sheetOf } from '../print/sheet'
 import { SIZES, type Size } from '../print/sizes'
@@ -14,14 +14,15 @@ import type { Reading, Scenario } from '../scenario/scenario'
 import { linkQuery } from '../scenario/write'
 import { ENGINE, type Solution } from '../solve'
 import { nameOf } from '../words/desk'
+import { pageLink } from '../words/link'
 import { type Place, placeKeys } from '../words/place'
-import { joined } from '../words/sentence'
+import { joined, lowered } from '../words/sentence'
 import { verdictOf } from '../words/verdict'
 import { count, oneOf, take } from './fields'
 import { PLACE_FIELDS, readFigurePlace } from './figure-place'
 import { readKeys } from './keys'
 import { longChart } from './long-panel'
-import { viewChart } from './panel'
+import { viewChart, viewOf } from './panel'
 import { mapped, type Pairs, type Question, scenariosOf, solved } from './question'
 import type { Home } from './table'
 
@@ -140,18 +141,20 @@ function figureFile(
   home: Home,
 ): FigureFile {
   const named = solutions.map((one, slot) => ({ ...one, label: nameOf(one.scenario, slot) }))
-  const chart = view === LONG ? longChart({ solutions: named, place }) : viewChart({ solutions: named, place })
-  const title = joined(named.map(({ label }) => label))
+  const subject = { solutions: named, place }
+  const chart = view === LONG ? longChart(subject) : viewChart(subject)
+  const shown = view === LONG ? named : drawnOf(askedOf(viewOf(place), place, named).show, named, place.focus)
+  const title = joined(shown.map(({ label }) => label))
   const edition = `Longhence ${home.version}, engine ${ENGINE}`
-  const codes = named.map(({ code }) => decodeURIComponent(code))
-  const link = `${home.base}/?${linkQuery(scenarios)}&engine=${ENGINE}`
-  const names = scenarios.flatMap(({ name }) => name ?? [])
+  const codes = shown.map(({ code }) => decodeURIComponent(code))
+  const link = `${home.base}${pageLink(scenarios, place)}&engine=${ENGINE}`
+  const names = shown.flatMap(({ scenario }) => scenario.name ?? [])
   return {
     format,
     dpi,
     fileName: fileName([...(names.length > 0 ? names : ['figure']), view, size.key], format.key),
     sheet: sheetOf(pictureOf(chart), size, paletteOf(theme), {
-      heading: [title, verdictOf(named[0], null).sentences[0] ?? ''],
+      heading: [title, headline(named[place.focus] as Solution, shown.length)],
       foot: `${edition}: ${codes.join('; ')}`,
     }),
     about: {
@@ -159,4 +162,10 @@ function figureFile(
       description: `${chart.caption} ${chart.alternative} Scenarios: ${codes.join('; ')}. ${edition}. ${link}`,
     },
   }
+}
+
+/** The verdict on the scenario in focus, which has to be named where it is one of several. */
+function headline(solution: Solution, count: number): string {
+  const verdict = verdictOf(solution, null).sentences[0] ?? ''
+  return count > 1 ? `${solution.label}: ${lowered(verdict)}` : verdict
 }

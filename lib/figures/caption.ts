@@ -2,7 +2,7 @@
 import type { Solution } from '../solve'
 import { extrapolates } from '../words/beyond'
 import { fixed, signed, significant } from '../words/number'
-import { capital, joined } from '../words/sentence'
+import { capital, joined, lowered } from '../words/sentence'
 import { verdictOf } from '../words/verdict'
 import type { Window } from './window'
 
@@ -47,8 +47,4 @@ export function longViewText(solutions: readonly Told[], { from, to, top }: Wind
 
 function timeText(time: number): string {
   return signed(Math.abs(time) < 10 ? significant(time, 2) : fixed(time, 0))
-}
-
-function lowered(text: string): string {
-  return `${text.charAt(0).toLowerCase()}${text.slice(1)}`
 }

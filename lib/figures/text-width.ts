@@ -31,3 +31,12 @@ export function fitted(text: string, size: number, width: number): string {
   while (signs.length > 1 && textWidth(`${signs.join('')}…`, size) > width) signs.pop()
   return `${signs.join('').trimEnd()}…`
 }
+
+/** A text in one line or, where that is too short, in two, broken between words. */
+export function wrapped(text: string, size: number, width: number): readonly string[] {
+  const words = text.split(' ')
+  const fits = (count: number) => textWidth(words.slice(0, count).join(' '), size) <= width
+  let count = words.length
+  while (count > 1 && !fits(count)) count--
+  return count === words.length ? [text] : [words.slice(0, count).join(' '), words.slice(count).join(' ')]
+}

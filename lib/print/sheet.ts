@@ -1,7 +1,7 @@
 /** A figure upon its sheet: ground, heading, drawing and the line that says where it comes from. */
 import type { Frame } from '../figures/plot'
 import { px, type SvgNode, svg } from '../figures/svg'
-import { fitted } from '../figures/text-width'
+import { fitted, wrapped } from '../figures/text-width'
 import type { Size } from './sizes'
 import { styled } from './style'
 import type { Palette } from './theme'
@@ -40,14 +40,14 @@ const FOOT = 1.5
 const HEADING = 1.7
 /** Sizes of letters over that of the type. */
 const FOOT_SIZE = 0.78
-const HEADING_SIZES = [1.3, 1]
+const HEADING_SIZES = [1.3, 1] as const
 
 export function sheetOf(picture: Picture, size: Size, palette: Palette, { heading, foot }: Origin): Sheet {
   const scale = size.type / TYPE
   const width = px(size.width / scale)
   const margin = MARGIN * TYPE
   const inner = px(width - 2 * margin)
-  const lines = size.headed ? heading : []
+  const lines = size.headed ? headlines(heading, inner) : []
   const top = margin + lines.length * HEADING * TYPE
   const bottom = margin + FOOT * TYPE
   const { drawing, height } = drawnIn(picture, size, { width: inner, height: size.height / scale, taken: top + bottom })
@@ -69,8 +69,8 @@ interface Room {
   readonly taken: number
 }
 
-/** The plot gets at least so much of the room. */
-const LEAST_PLOT = 0.5
+/** The plot with its axes and the names above it gets at least so much of the room. */
+const LEAST_PLOT = 0.6
 
 /** The drawing, and the height of the sheet that it asks for. */
 function drawnIn(picture: Picture, size: Size, { width, height, taken }: Room): { drawing: SvgNode; height: number } {
@@ -82,8 +82,13 @@ function drawnIn(picture: Picture, size: Size, { width, height, taken }: Room): 
   return { drawing: chosen.draw(fit(chosen)), height: px(height) }
 }
 
+/** The title has one line; what is said below it may have two. */
+function headlines([title = '', ...said]: readonly string[], width: number): readonly string[] {
+  return [title, ...said.flatMap((one) => wrapped(one, HEADING_SIZES[1] * TYPE, width))]
+}
+
 function headline(line: string, i: number, margin: number, width: number): SvgNode {
-  const place = { x: margin, y: margin + (0.9 + i * HEADING) * TYPE, size: HEADING_SIZES[Math.min(i, 1)], width }
+  const place = { x: margin, y: margin + (0.9 + i * HEADING) * TYPE, size: HEADING_SIZES[i === 0 ? 0 : 1], width }
   return text(line, place, i === 0 ? 'heading' : 'axis')
 }
 

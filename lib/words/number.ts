@@ -1,6 +1,6 @@
 /** Numbers as people read them: rounded, with a true minus sign and thin spaces between thousands. */
 
-const MINUS = '−'
+export const MINUS = '−'
 /** Narrow no-break space. */
 export const THIN = '\u202f'
 const SUPERSCRIPTS: Readonly<Record<string, string>> = Object.fromEntries(

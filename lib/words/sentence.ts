@@ -10,3 +10,7 @@ export function joined(parts: readonly string[]): string {
 export function capital(text: string): string {
   return `${text.charAt(0).toUpperCase()}${text.slice(1)}`
 }
+
+export function lowered(text: string): string {
+  return `${text.charAt(0).toLowerCase()}${text.slice(1)}`
+}

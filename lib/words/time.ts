@@ -1,5 +1,5 @@
 /** Times in words: Gyr to two decimals, from a thousand on to none, smaller units where Gyr would round to nothing. */
-import { fixed, signed, significant, withUnit } from './number'
+import { fixed, MINUS, signed, significant, withUnit } from './number'
 
 const SMALLER: readonly (readonly [unit: string, perGyr: number])[] = [
   ['Myr', 1e3],
@@ -27,9 +27,13 @@ export function duration(gyr: number): string {
 /** Gyr: nearer than rounding tells. */
 export const isNow = (gyr: number): boolean => Math.abs(gyr) < 1e-9
 
-/** A time from now, e.g. `+53.28 Gyr`, `−13.79 Gyr`. */
+/** Nearer to now two decimals of a Gyr say too little. */
+const AT_HAND = 0.1
+
+/** A time from now, e.g. `+53.28 Gyr`, `−13.79 Gyr`, `+3.21 Myr`. */
 export function fromNow(gyr: number): string {
-  return withUnit(signed(plain(gyr)), 'Gyr')
+  if (Math.abs(gyr) >= AT_HAND || gyr === 0) return withUnit(signed(plain(gyr)), 'Gyr')
+  return `${gyr < 0 ? MINUS : '+'}${duration(Math.abs(gyr))}`
 }
 
 /** A scale factor as a multiple of today's. */

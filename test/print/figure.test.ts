@@ -151,6 +151,41 @@ describe('views', () => {
   })
 })
 
+describe('what stands on a sheet', () => {
+  const pair = 's=h0:70,as:First&s=h0:60,matter:0.4,dark:0.85,eos:cpl,w0:-0.6,wa:-1.6,as:Second'
+  const wordsOf = (query: string) => textsIn(fileOf(query).sheet.node)
+  test.each(['view=reach', 'view=reach&show=conformal', 'view=contents'])(
+    '%s: the one scenario that is drawn, by its code, its name and its verdict',
+    (view) => {
+      const { fileName, about } = fileOf(`${pair}&${view}&focus=2`)
+      const words = wordsOf(`${pair}&${view}&focus=2&size=card`)
+      expect(words.filter((one) => one.includes('engine'))).toEqual([expect.stringMatching(/: h0:60,matter:0\.4/)])
+      expect(words).toContain('Second')
+      expect(words.join()).not.toMatch(/First|h0:70/)
+      expect(words.join()).toContain('Begins in a Big Bang')
+      expect(fileName).toMatch(/-second-/)
+      expect(fileName).not.toContain('first')
+      expect(about.description).toContain(`Scenarios: h0:60,matter:0.4,`)
+    },
+  )
+  test.each(['', 'view=rate', 'view=contents&show=w'])('%s: all of them, and whose verdict it is', (view) => {
+    const words = wordsOf(`${pair}&${view}&focus=2&size=card`).join('\n')
+    expect(words).toContain('First and Second')
+    // In two lines, where one is too short for it.
+    expect(words).toMatch(/Second: begins in a Big Bang [\s\S]* Big Crunch in [\d.]+\u00a0Gyr\.$/m)
+    expect(words).toMatch(/: h0:70,matter:0.3111,as:First; h0:60/)
+  })
+  test('the link opens the view', () => {
+    const { description } = fileOf(`${pair}&view=rate&show=q&focus=2`).about
+    expect(description).toMatch(/https:\/\/a\.example\/\?s=\S+&focus=2&view=rate&show=q&engine=\d+$/)
+  })
+})
+
+function textsIn(node: SvgNode): string[] {
+  const own = node.tag === 'text' ? [node.children.filter((one) => typeof one === 'string').join('')] : []
+  return [...own, ...node.children.flatMap((child) => (typeof child === 'string' ? [] : textsIn(child)))]
+}
+
 test('a PNG of several bands holds the very pixels that were drawn', async () => {
   const query = `${HARD}&size=card&theme=night`
   const svg = (await bytesOf(query)).toString()

@@ -33,6 +33,12 @@ describe('numbers', () => {
       '0.00\u00a0Gyr',
     ])
     expect(signed('0')).toBe('0')
+    // A time so near that a hundredth of a Gyr says nothing of it.
+    expect([fromNow(0.00321), fromNow(-0.0004), fromNow(0.1)]).toEqual([
+      '+3.21\u00a0Myr',
+      '−400\u00a0kyr',
+      '+0.10\u00a0Gyr',
+    ])
   })
 
   it.each([

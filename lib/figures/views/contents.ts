@@ -89,7 +89,7 @@ export const CONTENTS: View = {
   title: 'Contents',
   choice: 'Show',
   shows: [
-    { key: 'shares', word: 'density fractions', by: BY, compare: [] },
+    { key: 'shares', word: 'density fractions', by: BY, compare: [], alone: true },
     { key: 'w', word: 'w of dark energy', by: BY, compare: ['difference'] },
   ],
   chart: (asked) => (asked.show.key === 'w' ? quantityChart(asked, law()) : shares(asked)),

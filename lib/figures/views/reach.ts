@@ -125,9 +125,9 @@ export const REACH: View = {
   title: 'Reach',
   choice: 'Coordinates',
   shows: [
-    { key: 'proper', word: 'proper', by: BY, compare: [] },
-    { key: 'comoving', word: 'comoving', by: [...BY, 'logscale'], compare: [] },
-    { key: 'conformal', word: 'conformal', by: ['conformal'], compare: [] },
+    { key: 'proper', word: 'proper', by: BY, compare: [], alone: true },
+    { key: 'comoving', word: 'comoving', by: [...BY, 'logscale'], compare: [], alone: true },
+    { key: 'conformal', word: 'conformal', by: ['conformal'], compare: [], alone: true },
   ],
   chart: reach,
   notes: (asked) => {

@@ -16,6 +16,8 @@ export interface Show {
   readonly by: readonly string[]
   /** Ways to compare scenarios, beside the values themselves. */
   readonly compare: readonly Comparison[]
+  /** True where it is of the scenario in focus alone. */
+  readonly alone?: true
 }
 
 export interface View {
@@ -64,6 +66,10 @@ export function askedOf(view: View, place: Place, solutions: readonly Solution[]
     galaxy: place.galaxy ?? GALAXY,
   }
 }
+
+/** The scenarios that are drawn. */
+export const drawnOf = <S>({ alone }: Show, all: readonly S[], focus: number): readonly S[] =>
+  alone ? all.slice(focus, focus + 1) : all
 
 /** The range that is asked for, as far as it is one of the axis; else its own. */
 export function rangeOf({ by, solutions, left, right }: Asked, whole: boolean): Range {
