@@ -81,7 +81,7 @@ function Control({ field, id, draft, hand, live }: ControlProps) {
           <input inputMode="text" title={field.allowed} {...typed(field, id, draft, hand)} />
           <span className="unit">
             {field.unit}
-            {live && field.kind === 'number' && <Reset field={field} choose={hand.choose} />}
+            {field.kind === 'number' && <Reset field={field} choose={hand.choose} live={live} />}
           </span>
         </span>
       )
@@ -91,13 +91,19 @@ function Control({ field, id, draft, hand, live }: ControlProps) {
 interface ResetProps {
   readonly field: Extract<Field, { kind: 'number' }>
   readonly choose: Hand['choose']
+  readonly live: boolean
 }
 
 /** Back to what holds where nothing is typed. */
-function Reset({ field: { name, label, value, usual }, choose }: ResetProps) {
+function Reset({ field: { name, label, value, usual }, choose, live }: ResetProps) {
   if (usual === null || usual === value) return null
   return (
-    <button type="button" className="reset" aria-label={`Reset ${label} to ${usual}`} onClick={() => choose(name, '')}>
+    <button
+      type="button"
+      className={live ? 'reset' : 'reset absent'}
+      aria-label={`Reset ${label} to ${usual}`}
+      onClick={() => choose(name, '')}
+    >
       reset
     </button>
   )

@@ -132,24 +132,24 @@ function FrameRows({
 const titleOf = ({ scenarios }: Props['desk']): string => scenarios.map(({ name }) => name).join(', ')
 const queryOf = ({ links }: Props['desk']): string => links.data.split('?')[1] ?? ''
 
-interface RowProps {
+interface FilesProps {
   readonly label: string
   readonly choices: readonly Choice[]
   readonly href: (key: string) => string
 }
 
-function Row({ label, choices, href }: RowProps) {
+function Row(props: FilesProps) {
   return (
     <tr>
-      <th scope="row">{label}</th>
+      <th scope="row">{props.label}</th>
       <td>
-        <Files label={label} choices={choices} href={href} />
+        <Files {...props} />
       </td>
     </tr>
   )
 }
 
-function Files({ label, choices, href }: RowProps) {
+function Files({ label, choices, href }: FilesProps) {
   return choices.map(({ key, label: name }) => (
     <a key={key} href={href(key)} rel="nofollow" download aria-label={`${label} as ${name}`}>
       {name}
@@ -174,9 +174,19 @@ function figuresOf(place: Desk['place'], { views }: TakeAwayLists) {
 
 /** A code has to lead somewhere: where the server does not know its own address, the browser does. */
 function Codes({ query, lists, live }: Pick<Props, 'lists' | 'live'> & { readonly query: string }) {
-  if (lists.base === '' && !live) return null
+  if (lists.base === '' && !live) return <Room label={CODES} />
   const base = lists.base === '' ? `&base=${encodeURIComponent(location.origin)}` : ''
+  return <Row label={CODES} choices={lists.codes} href={(format) => `/api/qr?${query}&format=${format}${base}`} />
+}
+
+const CODES = 'Link as QR code'
+
+/** Of a row that comes later: nothing moves then. */
+function Room({ label }: { readonly label: string }) {
   return (
-    <Row label="Link as QR code" choices={lists.codes} href={(format) => `/api/qr?${query}&format=${format}${base}`} />
+    <tr className="absent">
+      <th scope="row">{label}</th>
+      <td>&nbsp;</td>
+    </tr>
   )
 }
