@@ -32,6 +32,8 @@ export interface Horizontal {
 const FUTURE = { linear: 1.6, log: 100 }
 const ETERNAL_PAST = 1.4
 const MARGIN = 1.02
+/** Beyond the least and the largest scale factor there ever is. */
+const REACHED = 1.25
 
 const columnOf = (key: string, symbol?: string): Horizontal['quantity'] => {
   const column = columnNamed(key)
@@ -83,6 +85,13 @@ const logTimeRange = (solutions: readonly Solution[], whole: boolean): Range => 
   const past = pastOf(solutions)
   const even = 10 ** Math.round(Math.log10(0.07 * past))
   return signedLog(-past * MARGIN, whole ? futureOf(solutions, past, FUTURE.log) : 0, even)
+}
+
+/** No more than what the scale factors reach, of which a bounce leaves out the small ones and a turn the large ones. */
+function logScaleRange(solutions: readonly Solution[], whole: boolean): Range {
+  const least = Math.min(...solutions.map(({ origin }) => origin.scale)) / REACHED
+  const most = Math.max(...solutions.map(({ end }) => end.turnaround?.scale ?? Number.POSITIVE_INFINITY)) * REACHED
+  return whole ? log(Math.max(1e-5, least), Math.min(100, most)) : log(Math.min(0.1, Math.max(1e-3, least)), 1)
 }
 
 /** All of conformal time where it is finite. */
@@ -143,7 +152,7 @@ export const HORIZONTALS: readonly Horizontal[] = [
     future: 'right',
     ...by('scale'),
     place: scaleOf,
-    range: (_, whole) => (whole ? log(1e-5, 100) : log(1e-3, 1)),
+    range: logScaleRange,
   },
   {
     key: 'redshift',

@@ -79,6 +79,25 @@ describe('rates and distances of matter alone', () => {
   })
 })
 
+describe('a logarithmic axis of scale factors', () => {
+  const axisOf = (...codes: readonly string[]) => chartOf(codes, { view: 'rate', show: 'q', by: 'logscale' }).x
+  // E² = Ω_m a⁻³ + (1 − Ω_m) a⁻² of matter alone vanishes at a = Ω_m / (Ω_m − 1).
+  const turning = 'h0:70,matter:1.25,dark:0,cmb:0'
+  const bouncing = 'h0:70,matter:0,dark:2,cmb:0'
+  it('ends a little beyond the largest there is', () => {
+    expect(axisOf(turning)).toMatchObject({ from: 1e-5, to: expect.closeTo(5 * 1.25, 9) })
+    expect(axisOf(turning, MATTER).to).toBe(100)
+  })
+  it('begins a little before the least', () => {
+    // E² = 2 − a⁻² vanishes at a = √½.
+    expect(axisOf(bouncing)).toMatchObject({ from: expect.closeTo(Math.SQRT1_2 / 1.25, 9), to: 100 })
+    expect(axisOf(bouncing, MATTER).from).toBe(1e-5)
+  })
+  it('shows a decade of the past at least', () => {
+    expect(chartOf([bouncing], { view: 'distances', by: 'logscale' }).x).toMatchObject({ from: 0.1, to: 1 })
+  })
+})
+
 describe('the choices of a view', () => {
   const scenarios = DEMO.map(({ scenario }) => scenario)
   const places = VIEWS.flatMap(({ key: view, shows }) =>
