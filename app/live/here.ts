@@ -3,10 +3,12 @@
  * newest next.
  */
 import type { Brief } from '../../lib/answers/explorer'
-import type { Computed, Question } from './worker'
+import type { Computed, Outlook, Question } from './worker'
 
 /** Told of every answer; null where there is none. */
 type Listener = (asked: string, view: Brief | null) => void
+/** What the explorer shows now, as a question. */
+type Ahead = () => string
 
 const EXPLORER = '/api/explorer'
 
@@ -15,12 +17,14 @@ let ready = false
 let underWay: string | null = null
 let next: string | null = null
 let listener: Listener = () => {}
+let ahead: Ahead = () => ''
 
 /** True once it computes without delay. */
 export const isAwake = (): boolean => ready
 
-export function onComputed(told: Listener): void {
+export function onComputed(told: Listener, now: Ahead): void {
   listener = told
+  ahead = now
 }
 
 /** Loads it, unless that has been done. */
@@ -45,7 +49,7 @@ function goOn(): void {
   put({ route: EXPLORER, asked: underWay })
 }
 
-const put = (question: Question): void => worker?.postMessage(question)
+const put = (question: Question | Outlook): void => worker?.postMessage(question)
 
 /** The answer to a question that is put once, as JSON; null where there is none. */
 export function answered(question: Question): Promise<string | null> {
@@ -70,6 +74,7 @@ function heard({ data }: MessageEvent<Computed | null>): void {
   underWay = null
   // First the next question: it is worked on while this answer is drawn.
   goOn()
+  if (data === null && underWay === null) put({ outlook: ahead() })
   if (data !== null) listener(data.asked, data.text === null ? null : JSON.parse(data.text))
 }
 

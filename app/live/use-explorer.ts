@@ -61,7 +61,7 @@ export function tellViewsSeen(seen: boolean): void {
 function useAnswers(initial: Explorer, asked: string, frame: string | null) {
   const [answers] = useState(() => createAnswers({ asked, view: initial, here: false }, MEANS))
   useEffect(() => {
-    onComputed(answers.computed)
+    onComputed(answers.computed, () => askedOf(location.search, frame, !viewsSeen))
     return watchAddress(({ search, moving }) => {
       const plain = askedOf(search, null)
       answers.want(plain === asked ? asked : askedOf(search, frame, moving && !viewsSeen), moving)

@@ -6,6 +6,7 @@ import type { Pairs, Question as Read } from '../../lib/answers/question'
 import type { Home } from '../../lib/answers/table'
 import { askWords } from '../../lib/answers/words'
 import type { Reading } from '../../lib/scenario/scenario'
+import { practise } from './practice'
 
 /** What pages ask for, and whole histories, by which a test compares all digits with the server's. */
 const ROUTES = {
@@ -23,12 +24,25 @@ export interface Question {
   readonly home?: Home
 }
 
+/** What the page shows, before it has a question. */
+export interface Outlook {
+  readonly outlook: string
+}
+
 export interface Computed extends Pick<Question, 'route' | 'asked'> {
   /** JSON; null where there is no answer. */
   readonly text: string | null
 }
 
-addEventListener('message', ({ data: { route, asked, home } }: MessageEvent<Question>) => {
+let rest = () => {}
+
+addEventListener('message', ({ data }: MessageEvent<Question | Outlook>) => {
+  rest()
+  if ('outlook' in data) {
+    rest = practise(data.outlook, (question) => void answer(askExplorer, question))
+    return
+  }
+  const { route, asked, home } = data
   postMessage({ route, asked, text: answer(ROUTES[route], asked, home) } satisfies Computed)
 })
 

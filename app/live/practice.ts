@@ -1,0 +1,40 @@
+/**
+ * A browser compiles what runs often, and takes a second or more over it. So the engine computes neighbours of what the page
+ * shows before a hand drags it: each question is new, so that nothing is taken from what was kept.
+ */
+import { DEMO } from '../../lib/scenario/demo'
+import { readQuery } from '../../lib/scenario/query'
+import { linkQuery } from '../../lib/scenario/write'
+
+/** So many questions, after which it gets no faster. */
+const ROUNDS = 40
+/** By so much each raises the Hubble constant of one scenario more than the one before, in km/s/Mpc. */
+const STEP = 1e-3
+
+/** Puts them one by one, so that a question of the page waits for one of them at most; the function that it returns ends it. */
+export function practise(asked: string, put: (question: string) => void): () => void {
+  let round = 0
+  const go = () => {
+    const question = round < ROUNDS ? nearby(asked, round) : null
+    if (question === null) return
+    round += 1
+    put(question)
+    setTimeout(go)
+  }
+  setTimeout(go)
+  return () => {
+    round = ROUNDS
+  }
+}
+
+/** What is asked about scenarios, of which one is a little different; null where they cannot be read. */
+export function nearby(asked: string, round: number): string | null {
+  const pairs = new URLSearchParams(asked)
+  const codes = pairs.getAll('s')
+  const reading = readQuery(codes.length > 0 ? codes : DEMO.codes)
+  if (!reading.ok) return null
+  const changed = round % reading.value.length
+  const scenarios = reading.value.map((one, i) => (i === changed ? { ...one, h0: one.h0 + (round + 1) * STEP } : one))
+  pairs.delete('s')
+  return [linkQuery(scenarios), ...(pairs.size > 0 ? [pairs.toString()] : [])].join('&')
+}

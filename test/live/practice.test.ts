@@ -1,0 +1,49 @@
+/** What the engine computes before it is asked. */
+import { afterEach, beforeEach, describe, expect, test, vi } from 'vitest'
+import { nearby, practise } from '../../app/live/practice'
+import { askExplorer } from '../../lib/answers/ask-explorer'
+
+const ASKED = 's=h0:70,matter:0.3&s=h0:68,matter:0.3,eos:constant,w:-0.9&view=rate&frame=wide'
+
+describe('a question near to another', () => {
+  test('has one scenario with another Hubble constant, in turn, and all else as it was', () => {
+    expect(nearby(ASKED, 0)).toBe(ASKED.replace('h0:70', 'h0:70.001'))
+    expect(nearby(ASKED, 1)).toBe(ASKED.replace('h0:68', 'h0:68.002'))
+  })
+
+  test('can be asked, also where an address names no scenario', () => {
+    for (const asked of [ASKED, 'view=reach', '']) {
+      const reading = askExplorer(new URLSearchParams(nearby(asked, 5) ?? 'unknown:1'))
+      expect(reading.ok && reading.value.answer().ok).toBe(true)
+    }
+  })
+
+  test('is none where the scenarios cannot be read', () => {
+    expect(nearby('s=matter:much', 0)).toBeNull()
+  })
+})
+
+describe('practice', () => {
+  beforeEach(() => void vi.useFakeTimers())
+  afterEach(() => void vi.useRealTimers())
+
+  test('puts one question at a time, each another, and comes to an end', () => {
+    const put = vi.fn()
+    practise(ASKED, put)
+    vi.advanceTimersToNextTimer()
+    expect(put).toHaveBeenCalledOnce()
+    vi.runAllTimers()
+    const asked = put.mock.calls.map(([question]) => question)
+    expect(asked.length).toBeGreaterThan(10)
+    expect(new Set(asked).size).toBe(asked.length)
+  })
+
+  test('stops when it is told to', () => {
+    const put = vi.fn()
+    const rest = practise(ASKED, put)
+    vi.advanceTimersToNextTimer()
+    rest()
+    vi.runAllTimers()
+    expect(put).toHaveBeenCalledOnce()
+  })
+})
