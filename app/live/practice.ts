@@ -7,23 +7,34 @@ import { readQuery } from '../../lib/scenario/query'
 import { linkQuery } from '../../lib/scenario/write'
 
 /** So many questions, after which it gets no faster. */
-const ROUNDS = 40
+const ROUNDS = 100
 /** By so much each raises the Hubble constant of one scenario more than the one before, in km/s/Mpc. */
 const STEP = 1e-3
+/** Nobody has asked anything for so long: a hand that drags asks more often. Milliseconds. */
+const QUIET = 300
 
-/** Puts them one by one, so that a question of the page waits for one of them at most; the function that it returns ends it. */
-export function practise(asked: string, put: (question: string) => void): () => void {
+export interface Practice {
+  /** There is a question of the page: it counts like one of these, and for a while there is none of these. */
+  yield(): void
+}
+
+/** Puts them one by one, so that a question of the page waits for one of them at most. */
+export function practise(asked: string, put: (question: string) => void): Practice {
   let round = 0
   const go = () => {
     const question = round < ROUNDS ? nearby(asked, round) : null
     if (question === null) return
     round += 1
     put(question)
-    setTimeout(go)
+    next = setTimeout(go)
   }
-  setTimeout(go)
-  return () => {
-    round = ROUNDS
+  let next = setTimeout(go)
+  return {
+    yield() {
+      round += 1
+      clearTimeout(next)
+      next = setTimeout(go, QUIET)
+    },
   }
 }
 

@@ -6,7 +6,7 @@ import type { Pairs, Question as Read } from '../../lib/answers/question'
 import type { Home } from '../../lib/answers/table'
 import { askWords } from '../../lib/answers/words'
 import type { Reading } from '../../lib/scenario/scenario'
-import { practise } from './practice'
+import { type Practice, practise } from './practice'
 
 /** What pages ask for, and whole histories, by which a test compares all digits with the server's. */
 const ROUTES = {
@@ -34,14 +34,14 @@ export interface Computed extends Pick<Question, 'route' | 'asked'> {
   readonly text: string | null
 }
 
-let rest = () => {}
+let practice: Practice | null = null
 
 addEventListener('message', ({ data }: MessageEvent<Question | Outlook>) => {
-  rest()
   if ('outlook' in data) {
-    rest = practise(data.outlook, (question) => void answer(askExplorer, question))
+    practice ??= practise(data.outlook, (question) => void answer(askExplorer, question))
     return
   }
+  practice?.yield()
   const { route, asked, home } = data
   postMessage({ route, asked, text: answer(ROUTES[route], asked, home) } satisfies Computed)
 })

@@ -38,12 +38,16 @@ describe('practice', () => {
     expect(new Set(asked).size).toBe(asked.length)
   })
 
-  test('stops when it is told to', () => {
+  test('makes way for a question of the page, and goes on when there is none', () => {
     const put = vi.fn()
-    const rest = practise(ASKED, put)
+    const practice = practise(ASKED, put)
     vi.advanceTimersToNextTimer()
-    rest()
-    vi.runAllTimers()
+    practice.yield()
+    vi.advanceTimersByTime(200)
+    practice.yield()
+    vi.advanceTimersByTime(200)
     expect(put).toHaveBeenCalledOnce()
+    vi.advanceTimersByTime(200)
+    expect(put.mock.calls.length).toBeGreaterThan(1)
   })
 })
