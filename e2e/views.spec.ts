@@ -206,6 +206,31 @@ test('on paper there are figures and tables, and nothing to click', async ({ pag
   for (const seen of ['.long-view .drawn:visible', '.views .drawn:visible'])
     await expect(page.locator(seen)).toHaveCount(1)
   await expect(page.locator('.moments')).toBeVisible()
-  for (const gone of ['.ways', '.choices', '.ingredients', '.acts-of-page', '.galaxy'])
+  for (const gone of ['.ways', '.choices', '.ingredients', '.acts-of-page', '.galaxy', '.downloads', '.figure-table'])
     await expect(page.locator(gone).first()).toBeHidden()
+  await expect(page.getByRole('heading', { name: 'Take away' })).toBeHidden()
+  // What stands in the address of a page stands on paper too.
+  await expect(page.locator('.colophon')).toContainText('h0:67.66,matter:0.3111,as:Steady light; h0:67.66,matter:0.4')
+  await expect(page.locator('.colophon .codes')).toBeVisible()
+  await page.goto('/words')
+  await expect(page.locator('pre').first()).toBeVisible()
+})
+
+test('at four times its size a page has its words beside its fields, and figures that can be read', async ({
+  page,
+}) => {
+  // 1280 × 1024 pixels at 400 percent.
+  await page.setViewportSize({ width: 320, height: 256 })
+  await page.goto('/')
+  expect(await page.evaluate(() => document.documentElement.scrollWidth)).toBe(320)
+  for (const name of ['matter', 'curvature', 'Hubble constant']) {
+    const label = page.locator('.field label', { hasText: name }).first()
+    const [words, control] = await Promise.all([
+      label.evaluate((one) => one.getBoundingClientRect().left + one.scrollWidth),
+      label.locator('xpath=ancestor::div[1]').locator('.entry').boundingBox(),
+    ])
+    expect(words, name).toBeLessThanOrEqual(control?.x ?? 0)
+  }
+  for (const figure of await page.locator('.drawn:visible').all())
+    expect((await figure.boundingBox())?.width).toBeGreaterThan(270)
 })

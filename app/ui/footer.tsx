@@ -30,6 +30,10 @@ export function Footer({ data, edition, theme }: Props) {
           </>
         )}
       </p>
+      {data && <p className="codes">Scenarios: {codesIn(data).join('; ')}</p>}
     </footer>
   )
 }
+
+/** On paper alone, which has no address. */
+const codesIn = (data: string): readonly string[] => new URLSearchParams(data.split('?')[1]).getAll('s')
