@@ -216,6 +216,15 @@ test('on paper there are figures and tables, and nothing to click', async ({ pag
   await expect(page.locator('pre').first()).toBeVisible()
 })
 
+test('in a low window nothing lies over the words', async ({ page }) => {
+  await page.setViewportSize({ width: 844, height: 390 })
+  await page.goto('/')
+  const frame = page.locator('.frame:visible')
+  // What is placed within the figure is placed by the figure, not by the window.
+  expect(await frame.evaluate((one) => getComputedStyle(one).position)).toBe('relative')
+  expect(await frame.evaluate((one) => getComputedStyle(one, '::after').content)).toBe('none')
+})
+
 test('at four times its size a page has its words beside its fields, and figures that can be read', async ({
   page,
 }) => {
