@@ -167,7 +167,7 @@ function changesOver(arm: Arm, { zone, from, to, time }: Panel): readonly Bracke
   derivativeInto(rate, time.series)
   derivativeInto(slope, rate)
   let size = 0
-  for (const one of rate) size += Math.abs(one)
+  for (let j = 0; j < rate.length; j++) size += Math.abs(rate[j])
   const noise = NOISE * size
   if (!(noise > 0)) return []
   for (let j = 0; j < rate.length; j++) rate[j] -= (arm.direction * slope[j]) / half
@@ -209,9 +209,9 @@ function exponentsOf(components: readonly Component[], from: number, to: number)
   let least = Number.POSITIVE_INFINITY
   let most = Number.NEGATIVE_INFINITY
   for (const one of components) {
-    const [low, high] = one.exponentRange(from, to)
-    if (low < least) least = low
-    if (high > most) most = high
+    const range = one.exponentRange(from, to)
+    if (range[0] < least) least = range[0]
+    if (range[1] > most) most = range[1]
   }
   return [least, most]
 }
@@ -225,8 +225,9 @@ const ratio =
     return {
       value: (N) => logOf(above, N) - logOf(below, N),
       slopeRange: (from, to) => {
-        const [[least, most], [low, high]] = [exponentsOf(above, from, to), exponentsOf(below, from, to)]
-        return [low - most, high - least]
+        const upper = exponentsOf(above, from, to)
+        const lower = exponentsOf(below, from, to)
+        return [lower[0] - upper[1], lower[1] - upper[0]]
       },
       rounding: (N) => Number.EPSILON * (4 + Math.abs(logOf(above, N)) + Math.abs(logOf(below, N)) + stray(N)),
     }

@@ -25,21 +25,28 @@ export function signChanges(series: Series, noise: number): readonly Bracket[] {
   // Then it keeps the sign of its mean.
   if (Math.abs(series[0]) > swing) return NONE
   const found: Bracket[] = []
-  const search = (from: number, to: number, left: number, right: number): void => {
-    const width = to - from
-    const unlike = left > 0 !== right > 0
-    const sure = unlike
-      ? Math.abs(right - left) > (bend * width * width) / 2
-      : Math.min(Math.abs(left), Math.abs(right)) > (bend * width * width) / 8
-    if (sure || bend * width * width < 8 * noise) {
-      if (unlike) found.push({ from, to })
-      return
-    }
-    const middle = (from + to) / 2
-    const value = evaluate(series, middle)
-    search(from, middle, left, value)
-    search(middle, to, value, right)
-  }
-  search(-1, 1, evaluate(series, -1), evaluate(series, 1))
+  search(found, { series, bend, noise }, -1, 1, evaluate(series, -1), evaluate(series, 1))
   return found
+}
+
+interface Curve {
+  readonly series: Series
+  readonly bend: number
+  readonly noise: number
+}
+
+function search(found: Bracket[], curve: Curve, from: number, to: number, left: number, right: number): void {
+  const deviation = curve.bend * (to - from) ** 2
+  const unlike = left > 0 !== right > 0
+  const sure = unlike
+    ? Math.abs(right - left) > deviation / 2
+    : Math.min(Math.abs(left), Math.abs(right)) > deviation / 8
+  if (sure || deviation < 8 * curve.noise) {
+    if (unlike) found.push({ from, to })
+    return
+  }
+  const middle = (from + to) / 2
+  const value = evaluate(curve.series, middle)
+  search(found, curve, from, middle, left, value)
+  search(found, curve, middle, to, value, right)
 }
