@@ -1,7 +1,8 @@
 /** What lies beyond the panels of an arm. */
 import { logExpansion, type Model } from '../model'
 import { integralOfExp } from './far'
-import { type Clock, converges, explodes, remainingIn, type Tail, tailAt } from './tail'
+import { type Clock, converges, explodes, type Tail, tailAt } from './tail'
+import { remainingIn } from './tail-integral'
 import { type Direction, FARTHEST, type Search } from './turning'
 
 /** Why the panels stop: at the end itself, where a closed form takes over, or where nothing that a double can hold is left to add. */

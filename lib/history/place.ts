@@ -5,7 +5,8 @@ import { gaussLegendre } from '../numerics/gauss-legendre'
 import { brent } from '../numerics/roots'
 import type { Arm } from './arm'
 import { within } from './panels'
-import { type Clock, elapsedIn, remainingIn, type Tail } from './tail'
+import type { Clock, Tail } from './tail'
+import { elapsedIn, remainingIn } from './tail-integral'
 import { FARTHEST } from './turning'
 
 /** A place on an arm: s is the variable of its panel's zone, or the distance into the tail beyond the last panel. */

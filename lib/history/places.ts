@@ -3,7 +3,8 @@ import { evaluatePairs } from '../numerics/chebyshev'
 import type { Arm } from './arm'
 import type { Span } from './event'
 import { NEAR_TODAY, nearToday } from './place'
-import { type Clock, elapsedIn, remainingIn } from './tail'
+import type { Clock } from './tail'
+import { elapsedIn, remainingIn } from './tail-integral'
 
 export interface Places {
   readonly arm: Arm

@@ -1,8 +1,11 @@
 /** Which zones an arm is made of. */
 import { logarithmicIn, type Model } from '../model'
+import { edgeTurningZone, edgeZone, staticZone } from './approach-zones'
+import { narrowZone } from './narrow-zone'
 import { plainZone } from './plain-zone'
 import { type Direction, FARTHEST, type Search } from './turning'
-import { edgeTurningZone, edgeZone, narrowZone, staticZone, turningZone, type Zone } from './zone'
+import { turningZone } from './turning-zone'
+import type { Zone } from './zone'
 
 /** Width in ln a of the zone around a turning point, a static state or an edge. */
 const NEAR = 0.7

@@ -6,102 +6,33 @@ import { GRAVITATION } from '../constants'
 import { strayOf } from '../dark-energy/law'
 import { type Event, type Span, spanSinceNow, spanSinceOrigin, spanUntilEnd } from '../history/event'
 import type { History } from '../history/history'
-import type { Clock } from '../history/tail'
 import { growthAt, growthRateAt } from '../measures/growth'
 import { isMissing, missing, type Outcome } from '../measures/outcome'
 import { particleHorizonSpan } from '../measures/sight'
 import { hubbleLengthGly, hubbleLengthMpc, hubbleTimeGyr, perSecond } from '../units'
-import { type Block, eventIn, expansionIn, shared, sightIn, slopesIn, spanIn } from './block'
+import { type Block, eventIn, expansionIn, slopesIn } from './block'
 import { type Column, type ColumnKey, columnFrom } from './column'
-import { columnNamed } from './columns'
+import { angularErrors, luminosityErrors, sightErrors, transverseErrors } from './distance-errors'
 import { driftUnit, NEAR_TODAY } from './distances'
+import {
+  type At,
+  EPS,
+  errors,
+  expansionErrors,
+  FEW,
+  isTimed,
+  ofDensity,
+  ofRate,
+  placed,
+  placeErrors,
+  rateErrors,
+  relative,
+  roundings,
+  scaledBy,
+  spanErrors,
+  valuesOf,
+} from './errors'
 import { significant } from './quantity'
-
-const EPS = Number.EPSILON
-/** Roundings of a short formula. */
-const FEW = 8
-
-type At = (block: Block, i: number) => number
-
-const errors =
-  (at: At) =>
-  (block: Block): Float64Array => {
-    const out = block.take()
-    for (let i = 0; i < block.count; i++) out[i] = at(block, i)
-    return out
-  }
-
-/** Was the instant asked for by time, so that its place is the result of a search? */
-const isTimed = ({ asked }: Block): boolean => asked !== null
-
-/** Of ln a. */
-const placeErrors = shared((block) => {
-  const squared = expansionIn(block)
-  const searched = isTimed(block) ? spanErrors(block, nearest(block), 'time', false) : null
-  return errors(({ N }, i) => {
-    const rounding = EPS * (1 + Math.abs(N[i]))
-    return rounding + (searched ? searched[i] * Math.sqrt(Math.max(0, squared[i])) : 0)
-  })(block)
-})
-
-/** From the origin or from now, as the instant was asked for. */
-const nearest = (block: Block): Span =>
-  block.asked === 'time'
-    ? spanSinceNow(block.subject.history, block, 'time')
-    : spanSinceOrigin(block.subject.history, block, 'time')
-
-/** Of E² at a given place, relative. */
-const roundings = shared(
-  errors(({ arm, panel, s }, i) => {
-    const zone = panel[i] < arm.panels.length ? arm.panels[panel[i]].zone : null
-    return EPS * (FEW + 2 * (zone ? zone.conditioning(s[i]) + (zone.stray?.(s[i]) ?? 0) : 2))
-  }),
-)
-
-/** Of E². */
-const expansionErrors = shared((block) => {
-  const [rounded, squared, { first }, places] = [
-    roundings(block),
-    expansionIn(block),
-    slopesIn(block),
-    placeErrors(block),
-  ]
-  return errors((_, i) => Math.abs(squared[i]) * rounded[i] + Math.abs(first[i]) * places[i])(block)
-})
-
-/** Of E: where the expansion stands still, the root of that of E². */
-const rateErrors = shared((block) => {
-  const [squared, off] = [expansionIn(block), expansionErrors(block)]
-  return errors((_, i) => Math.min(Math.sqrt(off[i]), off[i] / (2 * Math.sqrt(Math.max(0, squared[i])))))(block)
-})
-
-/** Of a time or conformal time, in 1/H₀; `moved` counts what the error of the place moves it by. */
-function spanErrors(block: Block, span: Span, clock: Clock, moved = true): Float64Array {
-  const { arm, subject, swings } = block
-  const [values, sums, squared] = [spanIn(block, span, clock), arm[clock], expansionIn(block)]
-  const [places, { first }] = [moved ? placeErrors(block) : null, slopesIn(block)]
-  const beyond =
-    span.offset === 0 ? 0 : (1 + 2 * swings) * totalErrors(subject.history, clock) + EPS * Math.abs(span.offset)
-  const gathered = span.of === 'fromToday' ? sums.errorFromToday : sums.errorToEnd
-  return errors(({ panel, scale }, i) => {
-    const own = gathered[panel[i]] + beyond + FEW * EPS * Math.abs(values[i])
-    if (!places) return own
-    // About a turning point time goes like the root of the distance in ln a.
-    const moved = Math.min(
-      places[i] / Math.sqrt(Math.max(0, squared[i])),
-      2 * Math.sqrt(places[i] / Math.abs(first[i])),
-    )
-    return own + moved / (clock === 'conformal' ? scale[i] : 1)
-  })(block)
-}
-
-const totalErrors = ({ past, future, before, descent, home, unfollowed }: History, clock: Clock): number =>
-  [past, future, before, descent, home].reduce((sum, one) => sum + one[clock].error, unfollowed?.error ?? 0)
-
-const scaledBy =
-  (values: Float64Array, unit: number): At =>
-  (_, i) =>
-    values[i] * unit
 
 const inGyr = (block: Block, span: Span): Float64Array =>
   errors(scaledBy(spanErrors(block, span, 'time'), hubbleTimeGyr(block.subject.scenario.h0)))(block)
@@ -117,50 +48,6 @@ const horizon = (spanOf: (block: Block) => Span | { readonly because: string }) 
   if ('because' in span) return block.take().fill(Number.NaN)
   return errors(scaledBy(spanErrors(block, span, 'conformal'), hubbleLengthGly(block.subject.scenario.h0)))(block)
 }
-
-/** A value of its own relative error. */
-const relative = (key: ColumnKey, of: At) => (block: Block) => {
-  const values = valuesOf(key, block)
-  return errors((one, i) => Math.abs(values[i]) * of(one, i))(block)
-}
-
-const valuesOf = (key: ColumnKey, block: Block): Float64Array => columnNamed(key)?.values(block) ?? block.take()
-
-/** Of D_M in Mpc: dD_M = √(1 + Ω_k D_M²) dχ. */
-const transverseErrors = shared((block) => {
-  if (block.phase !== 'past') return block.take().fill(Number.NaN)
-  const mpc = hubbleLengthMpc(block.subject.scenario.h0)
-  const { curvature } = block.subject.budget
-  const [distance, chi] = [valuesOf('transverse', block), sightErrors(block)]
-  return errors((_, i) => {
-    const slope = Math.sqrt(Math.max(0, 1 + curvature * (distance[i] / mpc) ** 2))
-    return (slope * chi[i] + FEW * EPS * (slope * sightIn(block)[i])) * mpc + FEW * EPS * distance[i]
-  })(block)
-})
-
-const angularErrors = shared((block) => {
-  const distance = transverseErrors(block)
-  return errors(
-    ({ redshift }, i) => distance[i] / (1 + redshift[i]) + valuesOf('angular', block)[i] * placed(block, i),
-  )(block)
-})
-
-const luminosityErrors = shared((block) => {
-  const distance = transverseErrors(block)
-  return errors(
-    ({ redshift }, i) => distance[i] * (1 + redshift[i]) + valuesOf('luminosity', block)[i] * placed(block, i),
-  )(block)
-})
-
-const sightErrors = shared((block) =>
-  spanErrors(block, spanSinceNow(block.subject.history, block, 'conformal'), 'conformal'),
-)
-
-/** Rounding and what the error of the place adds where it was searched for. */
-const placed: At = (block, i) => FEW * EPS + (isTimed(block) ? placeErrors(block)[i] : 0)
-
-const ofRate: At = (block, i) => rateErrors(block)[i] / Math.sqrt(expansionIn(block)[i]) + FEW * EPS
-const ofDensity: At = (block, i) => expansionErrors(block)[i] / expansionIn(block)[i] + FEW * EPS
 
 /** Of q and j: their terms are rounded, and q′ = −½ [(E²)″/E² − ((E²)′/E²)²] tells how fast they vary. */
 const ratios = (key: 'deceleration' | 'jerk', variation: number) => (block: Block) => {
