@@ -176,6 +176,6 @@ export class Balance {
 }
 
 function isSteady({ exponentRange }: Term): boolean {
-  const [low, high] = exponentRange(Number.NEGATIVE_INFINITY, Number.POSITIVE_INFINITY)
-  return low === high
+  const range = exponentRange(Number.NEGATIVE_INFINITY, Number.POSITIVE_INFINITY)
+  return range[0] === range[1]
 }
