@@ -15,12 +15,14 @@ const UNDER_TITLE = 3
 /** Less of a name is no name. */
 const SHORTEST_NAME = 5
 
-type Drawn = Pick<Chart, 'curves' | 'spots' | 'now' | 'x' | 'references'>
+type Drawn = Pick<Chart, 'curves' | 'spots' | 'now' | 'x' | 'references' | 'ribbons'>
 
 /** `free` is where the row above the plot begins, right of the axis title. */
 export function placeLabels(chart: Drawn, plot: Plot, frame: Frame, free: number): readonly Label[] {
   const ends = namedAbove(chart.curves, frame, free)
   const below = ends.filter(({ finish }) => plot.x(finish?.at[0] ?? 0) < free - UNDER_TITLE * frame.type)
+  // Ribbons bear hue and dash of every curve; without them a curve that has no room above is named within.
+  if (ends.length === 0 && chart.ribbons.length === 0) below.push(...chart.curves.filter(leavesAbove))
   const above = topLabels(
     ends.filter((curve) => !below.includes(curve)),
     plot,
@@ -33,9 +35,11 @@ export function placeLabels(chart: Drawn, plot: Plot, frame: Frame, free: number
   return frame.compact ? [...placed, ...withinRight(chart, plot, frame, placed)] : placed
 }
 
+const leavesAbove = ({ finish }: Curve): boolean => finish?.edge === 'top'
+
 /** The curves that are named above the plot. On a phone that has no room for them all it is none: hue and dash are the key. */
 export function namedAbove(curves: readonly Curve[], frame: Frame, free: number): readonly Curve[] {
-  const ends = curves.filter((curve) => curve.finish?.edge === 'top')
+  const ends = curves.filter(leavesAbove)
   return frame.compact && roomAbove(ends, frame, free) < SHORTEST_NAME * frame.type ? [] : ends
 }
 
