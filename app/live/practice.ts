@@ -1,6 +1,7 @@
 /**
  * A browser compiles what runs often, and takes a second or more over it. So the engine computes neighbours of what the page
- * shows before a hand drags it: each question is new, so that nothing is taken from what was kept.
+ * shows before a hand drags it: each question is new, so that nothing is taken from what was kept, and they lead as far about as a hand
+ * does, since what was compiled for one kind of history is compiled anew for another.
  */
 import { DEMO } from '../../lib/scenario/demo'
 import { readQuery } from '../../lib/scenario/query'
@@ -8,8 +9,8 @@ import { linkQuery } from '../../lib/scenario/write'
 
 /** So many questions, after which it gets no faster. */
 const ROUNDS = 100
-/** By so much each raises the Hubble constant of one scenario more than the one before, in km/s/Mpc. */
-const STEP = 1e-3
+/** Golden section: its multiples, less whole numbers, never come close to each other. */
+const GOLDEN = 0.618034
 /** Nobody has asked anything for so long: a hand that drags asks more often. Milliseconds. */
 const QUIET = 300
 
@@ -38,14 +39,15 @@ export function practise(asked: string, put: (question: string) => void): Practi
   }
 }
 
-/** What is asked about scenarios, of which one is a little different; null where they cannot be read. */
+/** What is asked about scenarios, of which one has from half to three halves of its matter; null where they cannot be read. */
 export function nearby(asked: string, round: number): string | null {
   const pairs = new URLSearchParams(asked)
   const codes = pairs.getAll('s')
   const reading = readQuery(codes.length > 0 ? codes : DEMO.codes)
   if (!reading.ok) return null
   const changed = round % reading.value.length
-  const scenarios = reading.value.map((one, i) => (i === changed ? { ...one, h0: one.h0 + (round + 1) * STEP } : one))
+  const factor = 0.5 + (((round + 1) * GOLDEN) % 1)
+  const scenarios = reading.value.map((one, i) => (i === changed ? { ...one, matter: one.matter * factor } : one))
   pairs.delete('s')
   return [linkQuery(scenarios), ...(pairs.size > 0 ? [pairs.toString()] : [])].join('&')
 }
