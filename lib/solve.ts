@@ -54,12 +54,14 @@ export function solve(scenario: Scenario): Solution {
   const subject = subjectOf(scenario)
   const { budget, history } = subject
   const code = writeScenario(scenario)
+  const { origin, end } = originAndEnd(history, hubbleTimeGyr(scenario.h0))
   return {
     scenario,
     code,
     label: scenario.name ?? code,
     budget,
-    ...originAndEnd(history, hubbleTimeGyr(scenario.h0)),
+    origin,
+    end,
     measures: measuresOf(subject),
     moments: momentsOf(subject),
     notices: noticesOf(scenario, budget),

@@ -10,6 +10,7 @@ export function powerLaw(w: number): Law {
   const range = [n, n] as const
   const precise = times([-3, 0], plus([1, 0], [w, 0]))
   const law = smoothLaw({
+    exponent: n,
     logDensity: n === 0 ? () => 0 : (N) => -n * N,
     preciseLogDensity: (N) => times(precise, [N, 0]),
     logChange: (_, d) => -n * d,
@@ -19,5 +20,5 @@ export function powerLaw(w: number): Law {
     past: asymptote,
     future: asymptote,
   })
-  return n === 0 ? { ...law, exponent: n, density: () => 1, change: () => 0, bend: () => 0 } : { ...law, exponent: n }
+  return n === 0 ? { ...law, density: () => 1, change: () => 0, bend: () => 0 } : law
 }

@@ -3,7 +3,7 @@ import { relativeBend } from '../numerics/bend'
 import type { Twofold } from '../numerics/twofold'
 import type { Asymptote, Law } from './law'
 
-export interface Logarithm extends Pick<Law, 'densitiesInto'> {
+export interface Logarithm extends Pick<Law, 'densitiesInto' | 'exponent'> {
   logDensity(N: number): number
   roughness?(N: number): number
   preciseLogDensity?(N: number): Twofold
@@ -20,6 +20,7 @@ export interface Logarithm extends Pick<Law, 'densitiesInto'> {
 
 export function smoothLaw(log: Logarithm): Law {
   const {
+    exponent,
     densitiesInto,
     logDensity,
     roughness,
@@ -33,6 +34,7 @@ export function smoothLaw(log: Logarithm): Law {
     breaks = [],
   } = log
   return {
+    exponent,
     density: (N) => Math.exp(logDensity(N)),
     densitiesInto,
     logDensity,

@@ -21,7 +21,6 @@ export function staticZone(model: Model, direction: Direction, N: number, from: 
   const offset = (s: number) => -direction * Math.exp(-s)
   const expansion = (s: number) => model.bendFrom(N, offset(s))
   return {
-    ...approach(Math.abs(N), STATIC_NEAREST, from, to),
     width: 0.5,
     expansion,
     conditioning: (s) => 1 + (model.magnitude(N) * offset(s) ** 2) / expansion(s),
@@ -33,6 +32,7 @@ export function staticZone(model: Model, direction: Direction, N: number, from: 
         out.conformal[k] = rate * Math.exp(-N - offset(s))
       }
     },
+    ...approach(Math.abs(N), STATIC_NEAREST, from, to),
   }
 }
 
@@ -54,7 +54,6 @@ export function edgeZone(
   const { dark } = model.budget
   const expansion = (s: number) => model.expansionWith(scaleOf(s), density(s))
   return {
-    ...approach(edge, EDGE_NEAREST, from, to),
     width: 0.5,
     expansion,
     conditioning: (s) => {
@@ -69,6 +68,7 @@ export function edgeZone(
         out.conformal[k] = rate * Math.exp(-scaleOf(s))
       }
     },
+    ...approach(edge, EDGE_NEAREST, from, to),
   }
 }
 

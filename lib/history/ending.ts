@@ -65,15 +65,24 @@ export function endOf(future: Arm, home: Arm): End {
   const fate = fateOf(future.model, future.end, home.end)
   const total = future.time.total
   if (future.end.kind === 'root') {
-    const turnaround = { time: total, scale: Math.exp(future.end.N) }
-    return { ...fate, ...whenBack(fate.kind, 2 * total + home.time.total, home.end), turnaround }
+    const back = whenBack(fate.kind, 2 * total + home.time.total, home.end)
+    return endFrom(fate, back.time, back.scale, { time: total, scale: Math.exp(future.end.N) })
   }
   const scale = future.end.kind === 'none' ? null : scaleAt(future.end.N)
-  if (future.end.kind === 'none' && future.end.farRoot !== null)
-    return { ...fate, ...whenBack(fate.kind, Number.POSITIVE_INFINITY, home.end), turnaround: null }
+  if (future.end.kind === 'none' && future.end.farRoot !== null) {
+    const back = whenBack(fate.kind, Number.POSITIVE_INFINITY, home.end)
+    return endFrom(fate, back.time, back.scale, null)
+  }
   const time = future.end.kind !== 'double' && Number.isFinite(total) ? total : null
-  return { ...fate, time, scale, turnaround: null }
+  return endFrom(fate, time, scale, null)
 }
+
+const endFrom = (
+  { kind, proven, because }: Fate,
+  time: number | null,
+  scale: number | null,
+  turnaround: End['turnaround'],
+): End => ({ kind, proven, because, time, scale, turnaround })
 
 /** When and where a universe that turns round ends. */
 function whenBack(kind: EndKind, time: number, home: Search): Pick<End, 'time' | 'scale'> {

@@ -30,16 +30,10 @@ export function historyOf(scenario: Scenario, budget: Budget): History {
 const heldLaw = (law: Law): Law => powerLaw(law.w(0))
 
 function assemble(pastLaw: Model, futureLaw: Model): History {
-  const arms = { past: armOf(pastLaw, -1), future: armOf(futureLaw, 1) }
+  const past = armOf(pastLaw, -1)
+  const future = armOf(futureLaw, 1)
   const same = pastLaw === futureLaw
-  const before = same || arms.past.end.kind === 'none' ? arms.future : armOf(pastLaw, 1)
-  const home = same || arms.future.end.kind === 'none' ? arms.past : armOf(futureLaw, -1)
-  return {
-    ...arms,
-    descent: arms.future,
-    before,
-    home,
-    origin: originOf(arms.past, before),
-    end: endOf(arms.future, home),
-  }
+  const before = same || past.end.kind === 'none' ? future : armOf(pastLaw, 1)
+  const home = same || future.end.kind === 'none' ? past : armOf(futureLaw, -1)
+  return { past, future, before, descent: future, home, origin: originOf(past, before), end: endOf(future, home) }
 }

@@ -48,5 +48,6 @@ export function originOf(past: Arm, before: Arm): Origin {
   const beginning = beginningOf(past.model, past.end, before.end)
   const infinite = beginning.kind === 'static' || beginning.kind === 'eternal'
   const N = past.end.kind === 'none' ? (past.end.farRoot ?? Number.NEGATIVE_INFINITY) : past.end.N
-  return { ...beginning, time: infinite ? null : -past.time.total, scale: Math.exp(N) }
+  const { kind, proven, because } = beginning
+  return { kind, proven, because, time: infinite ? null : -past.time.total, scale: Math.exp(N) }
 }

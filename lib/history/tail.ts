@@ -183,12 +183,12 @@ function powerTail(
 function slowTail(N: number, direction: Direction, density: number, law: Logarithmic): Tail {
   const scale = 1 / Math.sqrt(density)
   const rate = (direction * law.rate) / (1 + law.rate * N)
-  const shape = { kind: 'slow', rate, excess: law.overTwo / 2 } as const
+  const excess = law.overTwo / 2
   return {
     N,
     direction,
-    time: { ...shape, scale, decay: 0 },
-    conformal: { ...shape, scale: scale * Math.exp(-N), decay: direction },
+    time: { kind: 'slow', rate, excess, scale, decay: 0 },
+    conformal: { kind: 'slow', rate, excess, scale: scale * Math.exp(-N), decay: direction },
     corrections: [],
     left: 0,
     expansion: (D) => density * Math.exp(law.power * Math.log1p(rate * D)),

@@ -111,17 +111,17 @@ function rootBeyond(model: Model, N: number, direction: Direction): Encounter | 
   const least = Number.EPSILON * Math.max(Math.abs(N), 2 ** -20)
   for (let d = 2 * least; d < STEEP; d *= 2) {
     const { value, error } = preciseExpansion(model, N + direction * d)
-    if (value[0] + error < 0) return { kind: 'root', ...simpleRoot(model, N), doubt: null }
+    if (value[0] + error < 0) return simpleRoot(model, N)
     if (value[0] - error > 0 && d > 64 * least) break
   }
   return null
 }
 
 /** The root, to the digits that its slope allows. */
-function simpleRoot(model: Model, N: number): { readonly N: number; readonly slope: number | null } {
+function simpleRoot(model: Model, N: number): Encounter {
   const slope = preciseSlope(model, N)
   const flat = Math.abs(slope) < STEEP * model.magnitude(N)
-  return flat ? { N, slope } : { N: polished(model, N), slope: null }
+  return { kind: 'root', N: flat ? N : polished(model, N), slope: flat ? slope : null, doubt: null }
 }
 
 function touching(model: Model, N: number, direction: Direction): Encounter {

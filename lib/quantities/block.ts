@@ -37,6 +37,28 @@ export function shared<T>(make: (block: Block) => T): (block: Block) => T {
   }
 }
 
+type Arrays = Pick<Block, 'N' | 'inverseScale' | 'panel' | 's' | 'scale' | 'redshift'>
+
+/** Every block has one shape, since loops read it in every turn. */
+export const blockFrom = (arrays: Arrays, known: Omit<Block, keyof Arrays | 'kept'>): Block => ({
+  subject: known.subject,
+  phase: known.phase,
+  arm: known.arm,
+  sign: known.sign,
+  swings: known.swings,
+  count: known.count,
+  N: arrays.N,
+  inverseScale: arrays.inverseScale,
+  panel: arrays.panel,
+  s: arrays.s,
+  scale: arrays.scale,
+  redshift: arrays.redshift,
+  given: known.given,
+  asked: known.asked,
+  take: known.take,
+  kept: new Map(),
+})
+
 const blocks = new WeakMap<Instant, Block>()
 
 /** The block of one instant. */
@@ -44,24 +66,19 @@ export function blockOf(subject: ColumnSubject, instant: Instant): Block {
   let block = blocks.get(instant)
   if (!block) {
     const { phase, place, sign, swings, scale, redshift, time, age } = instant
-    block = {
-      subject,
-      phase,
-      arm: place.arm,
-      sign,
-      swings,
-      count: 1,
+    const arrays = {
       N: Float64Array.of(place.N),
       inverseScale: Float64Array.of(1 / scale),
       panel: Float64Array.of(place.panel),
       s: Float64Array.of(place.s),
       scale: Float64Array.of(scale),
       redshift: Float64Array.of(redshift),
-      given: { time: Float64Array.of(time), age: Float64Array.of(age) },
-      asked: instant.asked,
-      kept: new Map(),
-      take: () => new Float64Array(1),
     }
+    const given = { time: Float64Array.of(time), age: Float64Array.of(age) }
+    const { arm } = place
+    const { asked } = instant
+    const take = () => new Float64Array(1)
+    block = blockFrom(arrays, { subject, phase, arm, sign, swings, count: 1, given, asked, take })
     blocks.set(instant, block)
   }
   return block

@@ -1,7 +1,7 @@
 /** The instants at many values of a variable, block by block. */
 import type { Arm } from '../history/arm'
 import { type Event, isEvent } from '../history/event'
-import type { Block } from './block'
+import { type Block, blockFrom } from './block'
 import { type ColumnSubject, eventAt, type Variable } from './instant'
 import type { Workspace } from './workspace'
 
@@ -72,8 +72,8 @@ function nextByScale(sheet: Sheet, first: number): Run {
   while (first + count < sheet.count && N[count] <= 0 === past && Math.abs(N[count]) > reach === outside) count++
   if (outside) return { count, arm: null }
   placeInto(arrays.panel, arrays.s, N, arm, count)
-  const { phase, sign, swings } = { phase: past ? 'past' : 'future', sign: 1, swings: 0 } as const
-  return { ...blockFrom(sheet, arm, count), ...arrays, phase, sign, swings, given: {}, asked: null }
+  const event = { phase: past ? 'past' : 'future', sign: 1, swings: 0 } as const
+  return blockOver(sheet, arrays, arm, count, event, {}, null)
 }
 
 /** The panels of places and the variables there; from one place to the next the panel is seldom another. */
@@ -106,16 +106,7 @@ function nextByTime(sheet: Sheet, first: number): Run {
     found = eventAt(subject, variable, values[i], 'expanding')
   }
   if (!isEvent(start)) return { count: i - first, arm: null }
-  const { phase, sign, swings } = start
-  return {
-    ...blockFrom(sheet, start.place.arm, i - first),
-    ...arrays,
-    phase,
-    sign,
-    swings,
-    given: { [variable]: asked },
-    asked: variable as 'time' | 'age',
-  }
+  return blockOver(sheet, arrays, start.place.arm, i - first, start, { [variable]: asked }, variable as 'time' | 'age')
 }
 
 const goesOn = (one: Event, next: Event): boolean =>
@@ -130,10 +121,15 @@ function write(arrays: ReturnType<typeof arraysOf>, at: number, { place }: Event
   arrays.inverseScale[at] = Math.exp(-place.N)
 }
 
-const blockFrom = ({ subject, workspace }: Sheet, arm: Arm, count: number) => ({
-  subject,
-  arm,
-  count,
-  kept: new Map<unknown, unknown>(),
-  take: workspace.take,
-})
+function blockOver(
+  { subject, workspace: { take } }: Sheet,
+  { N, inverseScale, panel, s, scale, redshift }: ReturnType<typeof arraysOf>,
+  arm: Arm,
+  count: number,
+  { phase, sign, swings }: Pick<Block, 'phase' | 'sign' | 'swings'>,
+  given: Block['given'],
+  asked: Block['asked'],
+): Block {
+  const places = { N, inverseScale, panel, s, scale, redshift }
+  return blockFrom(places, { subject, phase, arm, sign, swings, count, given, asked, take })
+}

@@ -66,14 +66,11 @@ const ENDS: Readonly<Record<History['end']['kind'], string>> = {
 export function momentsOf(subject: Subject): readonly Moment[] {
   const { history, scenario } = subject
   const gyr = hubbleTimeGyr(scenario.h0)
-  const at = (kind: MomentKind, label: string, event: Event): Moment => ({
-    kind,
-    label,
-    time: sinceNow(history, event, 'time') * gyr,
-    ...placeOf(event.place.N),
-    age: finite(sinceOrigin(history, event, 'time') * gyr),
-    remaining: finite(untilEnd(history, event, 'time') * gyr),
-  })
+  const at = (kind: MomentKind, label: string, event: Event): Moment => {
+    const age = finite(sinceOrigin(history, event, 'time') * gyr)
+    const remaining = finite(untilEnd(history, event, 'time') * gyr)
+    return momentAt(kind, label, sinceNow(history, event, 'time') * gyr, event.place.N, { age, remaining })
+  }
   const crossing = (kind: MomentKind, label: string, one: Crossing | null): Moment[] =>
     onExpansion(history, one?.N ?? null, (event) => at(kind, label, event))
   const fit = (kind: MomentKind, label: string, z: Outcome): Moment[] =>
@@ -91,6 +88,7 @@ export function momentsOf(subject: Subject): readonly Moment[] {
   return [first(subject, gyr), ...between, last(subject, gyr)]
 }
 
+/** null where it leaves the doubles. */
 const finite = (time: number): number | null => (Number.isFinite(time) ? time : null)
 
 /** From the times of origin and end alone: for what lies far from both, or is one of them. */
@@ -106,11 +104,21 @@ function now(history: History, gyr: number): Moment[] {
   return [{ kind: 'now', label: 'now', time: 0, scale: 1, redshift: 0, ...within(history, 0, gyr) }]
 }
 
-const placeOf = (N: number) => {
-  const scale = Math.exp(N)
-  const redshift = Math.expm1(-N)
-  return { scale: Number.isFinite(scale) ? scale : null, redshift: Number.isFinite(redshift) ? redshift : null }
-}
+const momentAt = (
+  kind: MomentKind,
+  label: string,
+  time: number,
+  N: number,
+  { age, remaining }: Pick<Moment, 'age' | 'remaining'>,
+): Moment => ({
+  kind,
+  label,
+  time,
+  scale: finite(Math.exp(N)),
+  redshift: finite(Math.expm1(-N)),
+  age,
+  remaining,
+})
 
 function onExpansion(history: History, N: number | null, make: (event: Event) => Moment): Moment[] {
   if (N === null) return []
@@ -144,32 +152,17 @@ function changes(
 function turnaround({ history }: Subject, gyr: number): Moment[] {
   const { turnaround } = history.end
   if (!turnaround) return []
-  return [
-    {
-      kind: 'turnaround',
-      label: 'expansion stops',
-      time: turnaround.time * gyr,
-      ...placeOf(Math.log(turnaround.scale)),
-      ...within(history, turnaround.time, gyr),
-    },
-  ]
+  const { time, scale } = turnaround
+  return [momentAt('turnaround', 'expansion stops', time * gyr, Math.log(scale), within(history, time, gyr))]
 }
 
 function unbindings({ history, scenario }: Subject, gyr: number): Moment[] {
   return UNBOUND_SYSTEMS.flatMap((system) => {
     const found = unbinding(history, scenario.h0, system)
-    return found === null
-      ? []
-      : [
-          {
-            kind: system.kind,
-            label: system.label,
-            time: found.time * gyr,
-            ...placeOf(found.N),
-            age: within(history, found.time, gyr).age,
-            remaining: found.remaining === null ? null : finite(found.remaining * gyr),
-          },
-        ]
+    if (found === null) return []
+    const { age } = within(history, found.time, gyr)
+    const remaining = found.remaining === null ? null : finite(found.remaining * gyr)
+    return [momentAt(system.kind, system.label, found.time * gyr, found.N, { age, remaining })]
   })
 }
 

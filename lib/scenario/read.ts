@@ -41,16 +41,13 @@ export function readScenario(
 
 /** A value at fault is replaced by its default here; the faults then keep the scenario from getting out. */
 function assemble(desk: Desk, families: readonly Family[]): Scenario {
-  return {
-    h0: number(desk, own.H0),
-    matter: number(desk, own.MATTER),
-    baryons: number(desk, own.BARYONS),
-    closure: closure(desk),
-    radiation: radiation(desk),
-    ...darkEnergy(desk, families),
-    beyond: beyond(desk),
-    name: name(desk),
-  }
+  const h0 = number(desk, own.H0)
+  const matter = number(desk, own.MATTER)
+  const baryons = number(desk, own.BARYONS)
+  const closed = closure(desk)
+  const radiated = radiation(desk)
+  const { eos, law } = darkEnergy(desk, families)
+  return { h0, matter, baryons, closure: closed, radiation: radiated, eos, law, beyond: beyond(desk), name: name(desk) }
 }
 
 /** The value of a key, or the fallback where it is absent or at fault. */
