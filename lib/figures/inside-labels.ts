@@ -153,7 +153,8 @@ function besidePoint(at: Point, plot: Plot, { type }: Frame, led: boolean): Wish
       [first, of - 0.7 * type - width, of - width / 2].map((x) => {
         const box = { x, y: y - step * 0.8 * type, width, height }
         const start = AWAY * Math.hypot(x - first, box.y - y)
-        return { ...box, start, of, leader: led ? leaderTo([of, plot.y(at[1])], box, type) : null }
+        const leader = led ? leaderTo([of, plot.y(at[1])], box, type) : null
+        return { x, y: box.y, width, height, start, of, leader }
       }),
     )
     return places.sort((one, other) => one.start - other.start)

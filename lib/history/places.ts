@@ -14,17 +14,23 @@ export interface Places {
   /** Index of the panel; their number for what lies in the tail. */
   readonly panel: Float64Array
   readonly s: Float64Array
+  /** Where a run of places in one panel begins; the last entry is the count. */
+  readonly starts: readonly number[]
+}
+
+export function startsOf(panel: Float64Array, count: number): readonly number[] {
+  const starts = [0]
+  for (let i = 1; i < count; i++) if (panel[i] !== panel[i - 1]) starts.push(i)
+  starts.push(count)
+  return starts
 }
 
 /** Integrals from the inner edges of the panels, or from the beginning of the tail. */
 export type Within = Readonly<Record<Clock, Float64Array>>
 
 /** Calls back for every run of places in one panel. */
-function forPanels({ count, panel }: Places, use: (panel: number, from: number, to: number) => void): void {
-  for (let from = 0, to = 0; from < count; from = to) {
-    while (to < count && panel[to] === panel[from]) to++
-    use(panel[from], from, to)
-  }
+function forPanels({ starts, panel }: Places, use: (panel: number, from: number, to: number) => void): void {
+  for (let run = 1; run < starts.length; run++) use(panel[starts[run - 1]], starts[run - 1], starts[run])
 }
 
 export function withinInto(out: Within, places: Places): void {
@@ -50,17 +56,22 @@ export function spanInto(out: Float64Array, span: Span, places: Places, within: 
 function fromTodayInto(
   out: Float64Array,
   { offset, sign }: Span,
-  { arm, count, panel, N }: Places,
+  places: Places,
   within: Float64Array,
   clock: Clock,
 ): void {
+  const { arm, N } = places
   const sums = arm[clock].fromToday
   const near = NEAR_TODAY * arm.edges[1]
-  for (let i = 0; i < count; i++) {
-    const m = Math.abs(N[i])
-    if (m < near) out[i] = offset + sign * nearToday(arm, m, clock)
-    else out[i] = offset + sign * (sums[panel[i]] + within[i])
-  }
+  forPanels(places, (index, from, to) => {
+    const inner = sums[index]
+    for (let i = from; i < to; i++) out[i] = offset + sign * (inner + within[i])
+    if (index > 0) return
+    for (let i = from; i < to; i++) {
+      const m = Math.abs(N[i])
+      if (m < near) out[i] = offset + sign * nearToday(arm, m, clock)
+    }
+  })
 }
 
 function toEndInto(
@@ -83,13 +94,13 @@ function toEndInto(
   })
 }
 
-/** E² by the form that rounds least. */
+/** E² by the form that rounds least: as the model has it, and where a zone or a tail knows it better, by that. */
 export function expansionsAt(out: Float64Array, places: Places): void {
-  const { arm, N, inverseScale, s } = places
+  const { arm, count, N, inverseScale, s } = places
+  arm.model.expansionsInto(out, N, inverseScale, 0, count)
   forPanels(places, (index, from, to) => {
     const zone = index < arm.panels.length ? arm.panels[index].zone : null
-    const form = zone ?? arm.tail
-    if (zone?.plain || form === null) arm.model.expansionsInto(out, N, inverseScale, from, to)
-    else for (let i = from; i < to; i++) out[i] = form.expansion(s[i])
+    const form = zone?.plain ? null : (zone ?? arm.tail)
+    if (form !== null) for (let i = from; i < to; i++) out[i] = form.expansion(s[i])
   })
 }

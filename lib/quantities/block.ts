@@ -4,7 +4,7 @@
  */
 import type { Event, Phase, Position, Span } from '../history/event'
 import { spanSinceNow, spanSinceOrigin } from '../history/event'
-import { expansionsAt, type Places, spanInto, type Within, withinInto } from '../history/places'
+import { expansionsAt, type Places, spanInto, startsOf, type Within, withinInto } from '../history/places'
 import type { Clock } from '../history/tail'
 import { hubbleTimeGyr } from '../units'
 import type { ColumnSubject, Instant } from './instant'
@@ -40,7 +40,7 @@ export function shared<T>(make: (block: Block) => T): (block: Block) => T {
 type Arrays = Pick<Block, 'N' | 'inverseScale' | 'panel' | 's' | 'scale' | 'redshift'>
 
 /** Every block has one shape, since loops read it in every turn. */
-export const blockFrom = (arrays: Arrays, known: Omit<Block, keyof Arrays | 'kept'>): Block => ({
+export const blockFrom = (arrays: Arrays, known: Omit<Block, keyof Arrays | 'starts' | 'kept'>): Block => ({
   subject: known.subject,
   phase: known.phase,
   arm: known.arm,
@@ -51,6 +51,7 @@ export const blockFrom = (arrays: Arrays, known: Omit<Block, keyof Arrays | 'kep
   inverseScale: arrays.inverseScale,
   panel: arrays.panel,
   s: arrays.s,
+  starts: startsOf(arrays.panel, known.count),
   scale: arrays.scale,
   redshift: arrays.redshift,
   given: known.given,

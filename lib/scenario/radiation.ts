@@ -29,6 +29,9 @@ export interface RadiationBudget {
   readonly states: readonly MassiveState[]
 }
 
+/** One list for all, since an optimized loop goes by the kind of the list that it met. */
+const NONE: readonly MassiveState[] = []
+
 /**
  * Ω_γ = (8πG/3H₀²) (π²/15) (k_B T)⁴/(ħ³c⁵), T in K and H₀ in km s⁻¹ Mpc⁻¹.
  * Relative accuracy that of the constants, rounding below 1e-15.
@@ -46,14 +49,15 @@ export function neutrinoTemperature(cmb: number, nu: number): number {
 }
 
 export function radiationBudget(radiation: Radiation, h0: number): RadiationBudget {
-  if (radiation.kind === 'none') return { photons: 0, masslessNeutrinos: 0, states: [] }
-  if (radiation.kind === 'given') return { photons: radiation.density, masslessNeutrinos: 0, states: [] }
+  if (radiation.kind === 'none') return { photons: 0, masslessNeutrinos: 0, states: NONE }
+  if (radiation.kind === 'given') return { photons: radiation.density, masslessNeutrinos: 0, states: NONE }
   const photons = photonDensity(radiation.cmb, h0)
   const each = photons * STATE_RATIO * (radiation.nu / STATES)
   // No neutrinos at all (N_eff = 0), or so cold that nothing is left in doubles: a mass then weighs nothing either.
-  if (each === 0) return { photons, masslessNeutrinos: 0, states: [] }
+  if (each === 0) return { photons, masslessNeutrinos: 0, states: NONE }
   const temperature = neutrinoTemperature(radiation.cmb, radiation.nu)
-  const states = radiation.masses.map((mass) => massiveState(mass, temperature, each))
+  const { masses } = radiation
+  const states = masses.length === 0 ? NONE : masses.map((mass) => massiveState(mass, temperature, each))
   return { photons, masslessNeutrinos: (STATES - states.length) * each, states }
 }
 

@@ -137,10 +137,13 @@ interface Look {
   readonly special?: readonly number[]
 }
 
-export function curveOf(values: Values, ranges: Ranges, { special = [], ...look }: Look): Curve {
+export function curveOf(values: Values, ranges: Ranges, { tone, dash, name, strong, special = [] }: Look): Curve {
   const segments = sampleCurve({ places: placesAlong(ranges.x, special), values }, ranges)
   return {
-    ...look,
+    tone,
+    dash,
+    name,
+    strong,
     segments: segments.map((segment) => segment.map(([at, value]) => [fine(ranges.x, at), fine(ranges.y, value)])),
     marks: [],
     note: '',
