@@ -6,7 +6,7 @@ import type { Model } from '../model'
 import { beyondPanels, type Stopped } from './beyond'
 import { type Panel, panelsOf } from './panels'
 import { stretchesOf } from './stretches'
-import { type Clock, explodes, type Tail, tailAt } from './tail'
+import { type Clock, explodes, type Tail, tailsOf } from './tail'
 import { type Direction, FARTHEST, type Search, searchTurning } from './turning'
 import type { Zone } from './zone'
 
@@ -86,6 +86,7 @@ function march(model: Model, direction: Direction, end: Search): March {
   let [time, conformal] = [0, 0]
   let stopped: Stopped | null = null
   let tail: Tail | null = null
+  const tailAt = tailsOf(model, direction)
   // Ages near a beginning whose density outgrows every power add nothing to the whole, but they are asked for themselves.
   const bursts = direction < 0 && explodes(model, direction)
   for (const { zone, kind } of stretchesOf(model, direction, end)) {
@@ -99,7 +100,7 @@ function march(model: Model, direction: Direction, end: Search): March {
       else if (kind === 'final' && gone && atEdge(zone, edge)) stopped = 'spent'
       else if (kind === 'last' && gone && (adds < NOTHING || (!bursts && lasts(model, direction, edge))))
         stopped = 'spent'
-      else if (zone.to === FARTHEST) tail = tailAt(model, direction, direction * edge)
+      else if (zone.to === FARTHEST) tail = tailAt(direction * edge)
       if (tail !== null) stopped = 'tail'
       return stopped !== null
     }

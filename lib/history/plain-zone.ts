@@ -8,6 +8,7 @@ const [places, inverseScales, squares] = Array.from({ length: 3 }, () => new Flo
 
 /** s = m. */
 export function plainZone(model: Model, direction: Direction, from: number, to: number): Zone {
+  const quiet = quietUpTo(model, direction)
   return {
     plain: true,
     from,
@@ -19,7 +20,7 @@ export function plainZone(model: Model, direction: Direction, from: number, to: 
     conditioning: (s) => {
       const N = direction * s
       const sum = model.signed ? conditioningOf(model.magnitude(N), expansionAt(model, N, Math.exp(-N))) : 2
-      return sum + darkNoise(model, N) + (model.law.noise?.(N) ?? 0)
+      return sum + (s < quiet ? 0 : darkNoise(model, N)) + (model.law.noise?.(N) ?? 0)
     },
     stray: (s) => strayOf(model, direction * s),
     sampleInto(out, centre, half) {
@@ -68,12 +69,25 @@ function strayOf(model: Model, N: number): number {
     : /* v8 ignore next -- only where the densities of a field leave the doubles */ law.stray(N)
 }
 
+/** Below this, rounding N and ln f is that of any sum. */
+const LOUD = 16
+/** In ln a: no farther is asked where a law stays quiet, and within it no law is loud. */
+const [FAR, NEAR] = [16, 1]
+
+/** A distance from today up to which a law is sure not to be loud, by the bounds of its exponent: neither |ln f| nor |n N| is above n N. */
+function quietUpTo({ budget, law }: Model, direction: Direction): number {
+  if (budget.dark === 0) return Number.POSITIVE_INFINITY
+  const [low, high] = direction > 0 ? law.exponentRange(0, FAR) : law.exponentRange(-FAR, 0)
+  const farthest = (0.49 * LOUD) / Math.max(Math.abs(low), Math.abs(high))
+  return Math.min(FAR, Math.max(NEAR, farthest))
+}
+
 /** What rounding N and ln f does to f where exponents or densities are extreme, relative to E² in units of eps. */
 function darkNoise(model: Model, N: number): number {
   const { budget, law } = model
-  if (budget.dark === 0 || Math.abs(N) < 1) return 0
   const noise = Math.abs(law.logDensity(N)) + Math.abs(3 * (1 + law.w(N)) * N)
-  if (!(noise > 16 && noise < 1e16)) return 0
-  const share = Math.abs(budget.dark * law.density(N)) / expansionAt(model, N, Math.exp(-N))
+  if (!(noise > LOUD && noise < 1e16)) return 0
+  const density = law.density(N)
+  const share = Math.abs(budget.dark * density) / model.expansionWith(N, density)
   return share < 1e16 ? noise * share : noise
 }

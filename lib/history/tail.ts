@@ -5,7 +5,7 @@
  */
 
 import { asymptoteOf, type Component } from '../components'
-import type { Asymptote, Logarithmic } from '../dark-energy/law'
+import type { Asymptote, Logarithmic, Power } from '../dark-energy/law'
 import { logarithmicIn, type Model } from '../model'
 import type { Correction, TailIntegral } from './tail-integral'
 import type { Direction } from './turning'
@@ -65,25 +65,32 @@ export function converges(model: Model, direction: Direction, clock: Clock): boo
 }
 
 /** The tail from N on, or null where corrections are still too large; `anyway`, at the end of the doubles, leaves them out. */
-export function tailAt(model: Model, direction: Direction, N: number, anyway = false): Tail | null {
+export const tailAt = (model: Model, direction: Direction, N: number, anyway = false): Tail | null =>
+  tailsOf(model, direction)(N, anyway)
+
+/** The tail at many places: what leads in this direction is asked once. */
+export function tailsOf(model: Model, direction: Direction): (N: number, anyway?: boolean) => Tail | null {
   const exponent = leadingExponent(model, direction)
-  if (exponent === null || explodes(model, direction)) return null
-  const density = leadingDensity(model, direction, N, exponent, anyway)
-  if (!(density > 0)) return null
+  if (exponent === null || explodes(model, direction)) return () => null
   const slow = exponent === 0 ? logarithmicIn(model, direction) : null
-  const corrections = correctionsAt(model, direction, N, exponent, density)
-  if (slow) return corrections?.length === 0 ? slowTail(N, direction, density, slow) : null
-  if (corrections && sumOfSizes(corrections) <= SMALL) return powerTail(N, direction, exponent, density, corrections)
-  return anyway ? powerTail(N, direction, exponent, density, []) : null
+  const leading = model.acting.filter((one) => exponentIn(one, direction) === exponent)
+  const others = model.acting.filter((one) => !leading.includes(one))
+  return (N, anyway = false) => {
+    const density = densityOf(leading, direction, N, anyway)
+    if (!(density > 0)) return null
+    const corrections = correctionsAt(leading, others, direction, N, exponent, density)
+    if (slow) return corrections?.length === 0 ? slowTail(N, direction, density, slow) : null
+    if (corrections && sumOfSizes(corrections) <= SMALL) return powerTail(N, direction, exponent, density, corrections)
+    return anyway ? powerTail(N, direction, exponent, density, []) : null
+  }
 }
 
 const sumOfSizes = (list: readonly Correction[]): number => list.reduce((sum, one) => sum + Math.abs(one.size), 0)
 
 /** Sum of the pure powers that win; 0 where one of them is not yet known as a power. */
-function leadingDensity(model: Model, direction: Direction, N: number, exponent: number, anyway: boolean): number {
+function densityOf(leading: readonly Component[], direction: Direction, N: number, anyway: boolean): number {
   let sum = 0
-  for (const one of model.acting) {
-    if (exponentIn(one, direction) !== exponent) continue
+  for (const one of leading) {
     if (!anyway && !isSettled(asymptoteOf(one, direction), direction, N)) return 0
     sum += powerPart(one, direction, N)
   }
@@ -105,27 +112,42 @@ function powerPart(one: Component, direction: Direction, N: number): number {
 
 /** δ and p of all components, or null while one that matters does not yet follow its power, or is too large. */
 function correctionsAt(
-  model: Model,
+  leading: readonly Component[],
+  others: readonly Component[],
   direction: Direction,
   N: number,
-  leading: number,
+  exponent: number,
   density: number,
 ): readonly Correction[] | null {
   const list: Correction[] = []
-  for (const one of model.acting) {
-    const asymptote = asymptoteOf(one, direction)
-    const leads = exponentIn(one, direction) === leading
+  for (const one of others) {
     const size = powerPart(one, direction, N) / density
-    if (!leads && Math.abs(size) < NEGLIGIBLE) continue
-    if (!leads && (asymptote.kind !== 'power' || !isSettled(asymptote, direction, N) || Math.abs(size) > SMALL))
-      return null
-    if (asymptote.kind !== 'power') continue
-    const rate = direction * (asymptote.exponent - leading)
-    if (!leads) list.push({ size, rate })
-    for (const more of asymptote.corrections ?? [])
-      list.push({ size: size * more.size * Math.exp(-direction * more.rate * N), rate: rate + more.rate })
+    if (Math.abs(size) < NEGLIGIBLE) continue
+    const asymptote = asymptoteOf(one, direction)
+    if (asymptote.kind !== 'power' || !isSettled(asymptote, direction, N) || Math.abs(size) > SMALL) return null
+    const rate = direction * (asymptote.exponent - exponent)
+    list.push({ size, rate })
+    pushCorrections(list, asymptote, size, rate, direction, N)
+  }
+  for (const one of leading) {
+    const asymptote = asymptoteOf(one, direction)
+    if (asymptote.kind === 'power' && asymptote.corrections)
+      pushCorrections(list, asymptote, powerPart(one, direction, N) / density, 0, direction, N)
   }
   return merged(list)
+}
+
+/** Those of the power itself. */
+function pushCorrections(
+  list: Correction[],
+  { corrections = [] }: Power,
+  size: number,
+  rate: number,
+  direction: Direction,
+  N: number,
+): void {
+  for (const more of corrections)
+    list.push({ size: size * more.size * Math.exp(-direction * more.rate * N), rate: rate + more.rate })
 }
 
 /** Those of one rate added up. */
