@@ -9,6 +9,7 @@ const [places, inverseScales, squares] = Array.from({ length: 3 }, () => new Flo
 /** s = m. */
 export function plainZone(model: Model, direction: Direction, from: number, to: number): Zone {
   const quiet = quietUpTo(model, direction)
+  const { stray } = model.law
   return {
     plain: true,
     from,
@@ -22,7 +23,7 @@ export function plainZone(model: Model, direction: Direction, from: number, to: 
       const sum = model.signed ? conditioningOf(model.magnitude(N), expansionAt(model, N, Math.exp(-N))) : 2
       return sum + (s < quiet ? 0 : darkNoise(model, N)) + (model.law.noise?.(N) ?? 0)
     },
-    stray: (s) => strayOf(model, direction * s),
+    stray: stray && ((s) => stray(direction * s) * darkShare(model, direction * s)),
     sampleInto(out, centre, half) {
       nodesInto(direction, centre, half)
       model.expansionsInto(squares, places, inverseScales, 0, NODE_COUNT)
@@ -59,14 +60,13 @@ function nodesInto(direction: Direction, centre: number, half: number): void {
   }
 }
 
-/** What the error of the law itself does to E², relative to it in units of eps: its share may be far above 1 where E² is small. */
-function strayOf(model: Model, N: number): number {
+/** Size of dark energy over E²: what an error of the law does to it. May be far above 1 where E² is small; 1 beyond the doubles. */
+function darkShare(model: Model, N: number): number {
   const { budget, law } = model
-  if (!law.stray || budget.dark === 0) return 0
-  const share = Math.abs(budget.dark * law.density(N)) / expansionAt(model, N, Math.exp(-N))
-  return share >= 0 && share < 1e16
-    ? law.stray(N) * share
-    : /* v8 ignore next -- only where the densities of a field leave the doubles */ law.stray(N)
+  if (budget.dark === 0) return 0
+  const density = law.density(N)
+  const share = Math.abs(budget.dark * density) / model.expansionWith(N, density)
+  return share >= 0 && share < 1e16 ? share : 1
 }
 
 /** Below this, rounding N and ln f is that of any sum. */
@@ -84,10 +84,7 @@ function quietUpTo({ budget, law }: Model, direction: Direction): number {
 
 /** What rounding N and ln f does to f where exponents or densities are extreme, relative to E² in units of eps. */
 function darkNoise(model: Model, N: number): number {
-  const { budget, law } = model
+  const { law } = model
   const noise = Math.abs(law.logDensity(N)) + Math.abs(3 * (1 + law.w(N)) * N)
-  if (!(noise > LOUD && noise < 1e16)) return 0
-  const density = law.density(N)
-  const share = Math.abs(budget.dark * density) / model.expansionWith(N, density)
-  return share < 1e16 ? noise * share : noise
+  return noise > LOUD && noise < 1e16 ? noise * darkShare(model, N) : 0
 }

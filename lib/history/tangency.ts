@@ -68,15 +68,17 @@ function steepRoot(
   return passed ? { kind: 'root', N: far ? start : polished(model, start), slope: null, doubt: null } : null
 }
 
-/** Newton's method on E². */
+/** Newton's method on E², until rounding tosses it to and fro between two neighbours: then that of the even steps, either is as good. */
 function polished(model: Model, start: number): number {
-  let N = start
+  let [N, before] = [start, Number.NaN]
   // Next to the edge of a law it wins no more than a part in each step.
   for (let step = 0; step < 64; step++) {
     const change = expansionAt(model, N, Math.exp(-N)) / model.derivatives(N).first
     if (!(Math.abs(change) < STRAY)) break
-    N -= change
-    if (Math.abs(change) <= 0.5 * Number.EPSILON * Math.abs(N)) break
+    const next = N - change
+    if (Math.abs(change) <= 0.5 * Number.EPSILON * Math.abs(next)) return next
+    if (next === before) return step % 2 === 1 ? next : N
+    ;[before, N] = [N, next]
   }
   return N
 }

@@ -180,7 +180,10 @@ export function solveIncreasing(coefficients: Series, target: number): number {
 /** Size of the last two coefficients relative to the largest: the series is resolved when this is near eps. */
 export function relativeTail(coefficients: Series): number {
   let largest = 0
-  for (let j = 0; j < NODE_COUNT; j++) largest = Math.max(largest, Math.abs(coefficients[j]))
+  for (let j = 0; j < NODE_COUNT; j++) {
+    const size = Math.abs(coefficients[j])
+    if (size > largest) largest = size
+  }
   const last = Math.abs(coefficients[NODE_COUNT - 1]) + Math.abs(coefficients[NODE_COUNT - 2])
   return largest === 0 ? 0 : last / largest
 }
