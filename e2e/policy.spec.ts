@@ -20,6 +20,8 @@ for (const path of ['/', '/?s=matter:0.3,eos:constant,w:-1.2', '/?s=matter:none'
 
 test('a page that nobody touches comes alive by itself', async ({ page }) => {
   await page.goto('/')
+  const fetched = page.locator('head link[rel=preload][as=script]')
+  await expect.poll(() => fetched.count()).toBeGreaterThan(4)
   expect(await page.evaluate(() => 'next' in window)).toBe(false)
   await expect(page.getByRole('button', { name: 'Copy link' })).toBeVisible()
 })

@@ -79,14 +79,11 @@ export function restingPage() {
   }
 }
 
-/** The scripts are fetched all the same, with what is left of the line. @param {string} head */
+/** What wakes the page fetches them when it has loaded, so that they take no part of the line from what is to be read. @param {string} head */
 function withRestingHead(head) {
   const [first, ...others] = [...head.matchAll(SCRIPT)]
   if (!first) return head
   const sources = [first, ...others].map(([, source]) => source)
   const rouse = `<script nonce="${first[2]}" data-scripts="${sources.join(' ')}">${ROUSE}</script>`
-  const links = sources.map(
-    (source) => `<link rel="preload" as="script" fetchpriority="low" nonce="${first[2]}" href="${source}"/>`,
-  )
-  return head.replace(SCRIPT, '').replace(HEAD_END, [...links, rouse, HEAD_END].join(''))
+  return head.replace(SCRIPT, '').replace(HEAD_END, rouse + HEAD_END)
 }
