@@ -4,9 +4,9 @@
  */
 import type { Model } from '../model'
 import { beyondPanels, type Stopped } from './beyond'
-import { type Panel, panelsOf } from './panels'
+import { type Panel, panelsOf, type Stretch } from './panels'
 import { stretchesOf } from './stretches'
-import { type Clock, explodes, type Tail, tailsOf } from './tail'
+import { explodes, type Tail, tailsOf } from './tail'
 import { type Direction, FARTHEST, type Search, searchTurning } from './turning'
 import type { Zone } from './zone'
 
@@ -65,8 +65,14 @@ export function armFrom(
     panels,
     edges,
     tail,
-    time: sumsOf(panels, 'time', time),
-    conformal: sumsOf(panels, 'conformal', conformal),
+    time: sumsOf(
+      panels.map((one) => one.time),
+      time,
+    ),
+    conformal: sumsOf(
+      panels.map((one) => one.conformal),
+      conformal,
+    ),
   }
 }
 
@@ -128,24 +134,26 @@ function lasts(model: Model, direction: Direction, edge: number): boolean {
 }
 
 /** Running sums outwards and inwards. Plain arrays: typed ones of this length take longer to make than to fill. */
-function sumsOf(panels: readonly Panel[], clock: Clock, [beyond, beyondError]: readonly [number, number]): Sums {
+function sumsOf(stretches: readonly Stretch[], [beyond, beyondError]: readonly [number, number]): Sums {
   const fromToday = [0]
   const errorFromToday: number[] = []
+  let sum = 0
   let errorBefore = 0
-  panels.forEach((one, i) => {
-    fromToday.push(fromToday[i] + one[clock].total)
-    errorBefore += one[clock].error
+  for (const one of stretches) {
+    sum += one.total
+    fromToday.push(sum)
+    errorBefore += one.error
     errorFromToday.push(errorBefore)
-  })
+  }
   errorFromToday.push(errorBefore + beyondError)
   let left = beyond
   let error = beyondError
   const toEnd: number[] = []
   const errorToEnd = [beyondError]
-  for (let i = panels.length - 1; i >= 0; i--) {
+  for (let i = stretches.length - 1; i >= 0; i--) {
     toEnd.push(left)
-    left += panels[i][clock].total
-    error += panels[i][clock].error
+    left += stretches[i].total
+    error += stretches[i].error
     errorToEnd.push(error)
   }
   return {

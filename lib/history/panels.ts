@@ -46,8 +46,6 @@ const SMALLEST = 1e-280
 
 const samples: Samples = { time: new Float64Array(NODE_COUNT), conformal: new Float64Array(NODE_COUNT) }
 const coefficients = { time: new Float64Array(NODE_COUNT), conformal: new Float64Array(NODE_COUNT) }
-type Clock = keyof Samples
-
 /** Panels that cover [zone.from, zone.to], outwards; an infinite zone ends where `enough` says so after a panel. */
 export function panelsOf(zone: Zone, enough: (panel: Panel, edge: number) => boolean): readonly Panel[] {
   const panels: Panel[] = []
@@ -57,7 +55,7 @@ export function panelsOf(zone: Zone, enough: (panel: Panel, edge: number) => boo
   while (from < zone.to) {
     if (++tried > MOST_PANELS) throw overBudget(`The integrals take more than ${MOST_PANELS} panels.`)
     const to = from + width >= zone.to - width * 0.05 ? zone.to : from + width
-    const trial = attempt(zone, from, to)
+    attempt(zone, from, to)
     floor = Math.max(floor, noiseIn(before, trial.worst))
     const excess = trial.worst / floor
     if (excess > 1 && to - from > NARROWEST) {
@@ -66,7 +64,7 @@ export function panelsOf(zone: Zone, enough: (panel: Panel, edge: number) => boo
       continue
     }
     before = Number.POSITIVE_INFINITY
-    const panel = panelFrom(zone, from, to, trial)
+    const panel = panelFrom(zone, from, to)
     panels.push(panel)
     if (enough(panel, to)) break
     width = (to - from) * Math.min(GROWTH, Math.max(1, 0.95 * (excess + 1e-3) ** (-1 / 15)))
@@ -81,14 +79,13 @@ function noiseIn(before: number, now: number): number {
   return noise < NOISIEST ? noise : 0
 }
 
-/** A panel that is tried. `worst` is the size of the last two coefficients over what is asked; its series wait in the scratch. */
-interface Trial {
-  readonly worst: number
-  /** Relative, of what is integrated. */
-  readonly error: number
-}
+/**
+ * The panel that was tried last, whose series wait in the scratch: `worst` is the size of the last two coefficients over what is
+ * asked, `error` that of what is integrated, relative. One object for all, since most of what a history makes is dropped at once.
+ */
+const trial = { worst: 0, error: 0 }
 
-function attempt(zone: Zone, from: number, to: number): Trial {
+function attempt(zone: Zone, from: number, to: number): void {
   const [centre, half] = [(from + to) / 2, (to - from) / 2]
   zone.sampleInto(samples, centre, half)
   coefficientsInto(coefficients.time, samples.time)
@@ -99,19 +96,23 @@ function attempt(zone: Zone, from: number, to: number): Trial {
     zone.conditioning(to - half * 0.01),
   )
   const rounding = Number.EPSILON * (2 + conditioning)
-  const error = zone.stray
+  trial.error = zone.stray
     ? rounding + Number.EPSILON * Math.max(zone.stray(from), zone.stray(centre), zone.stray(to))
     : rounding
   // Where E² is small beside its terms, rounding shows in the last coefficients and no narrower panel would lower it.
-  return { worst: Math.max(tailOf('time'), tailOf('conformal')) / Math.max(RESOLVED, rounding), error }
+  trial.worst = largestTail() / Math.max(RESOLVED, rounding)
 }
 
-const tailOf = (clock: Clock): number =>
-  Math.max(samples[clock][0], samples[clock][NODE_COUNT - 1]) < SMALLEST ? 0 : relativeTail(coefficients[clock])
+const largestTail = (): number =>
+  Math.max(tailOf(samples.time, coefficients.time), tailOf(samples.conformal, coefficients.conformal))
+
+const tailOf = (values: Float64Array, series: Float64Array): number =>
+  Math.max(values[0], values[NODE_COUNT - 1]) < SMALLEST ? 0 : relativeTail(series)
 
 /** The panel that was tried last. */
-function panelFrom(zone: Zone, from: number, to: number, { error }: Trial): Panel {
+function panelFrom(zone: Zone, from: number, to: number): Panel {
   const half = (to - from) / 2
+  const { error } = trial
   return {
     zone,
     from,

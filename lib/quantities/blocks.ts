@@ -82,14 +82,20 @@ function placeInto(panel: Float64Array, s: Float64Array, N: Float64Array, arm: A
   const last = panels.length
   const plain = panels.map(({ zone }) => zone.plain === true)
   let k = 0
-  for (let i = 0; i < count; i++) {
-    const m = Math.abs(N[i])
+  for (let i = 0; i < count; ) {
+    let m = Math.abs(N[i])
     while (k > 0 && edges[k] > m) k--
     while (k < last && edges[k + 1] <= m) k++
-    panel[i] = k
-    if (k === last) s[i] = m - edges[k]
-    else if (plain[k]) s[i] = m
-    else s[i] = panels[k].zone.variableAt(m)
+    const inner = edges[k]
+    const outer = k < last ? edges[k + 1] : Number.POSITIVE_INFINITY
+    const isPlain = plain[k]
+    do {
+      panel[i] = k
+      if (k === last) s[i] = m - inner
+      else s[i] = isPlain ? m : panels[k].zone.variableAt(m)
+      if (++i === count) return
+      m = Math.abs(N[i])
+    } while (m >= inner && m < outer)
   }
 }
 

@@ -83,9 +83,9 @@ export function valuesInto(
   const [low, high] = ratios ? [Math.log(from), Math.log(to)] : [from, to]
   for (let i = 0; i < count; i++) {
     const part = (first + i) / (rows - 1)
-    out[i] = low * (1 - part) + high * part
+    const value = low * (1 - part) + high * part
+    out[i] = ratios ? Math.exp(value) : value
   }
-  if (ratios) for (let i = 0; i < count; i++) out[i] = Math.exp(out[i])
   if (first === 0) out[0] = from
   if (first + count === rows) out[count - 1] = to
 }
