@@ -5,12 +5,12 @@ import { spawnSync } from 'node:child_process'
 import { join } from 'node:path'
 import { Refusal } from '../setup/project.mjs'
 import { FOLDER, inScratch, load } from './bundle.mjs'
-import { median, secondsOf, shown, warmUp } from './clock.mjs'
+import { median, secondsOf, shown, turnOf, undisturbed, warmUp } from './clock.mjs'
 
 const TOLERANCE = 1e-12
 /** A hundred times the tolerance: steps and rows add their errors up. */
 const AGREEMENT = 100 * TOLERANCE
-const ROUNDS = 15
+const ROUNDS = 25
 /** Seconds of a turn. */
 const TURN = 0.05
 const METHODS = [
@@ -94,17 +94,20 @@ function compare({ make }, others) {
   // Starting a program leaves our pages to be copied anew, which the runs of a first turn pay for.
   const mine = () => {
     secondsOf(make, count)
-    return secondsOf(make, count) / count
+    return turnOf(make, count)
   }
   const counts = others.map(({ run }) => Math.ceil(TURN / timeOf(run(1))))
   const turns = Array.from({ length: ROUNDS }, () =>
-    others.map(({ run }, i) => ({ ours: mine(), theirs: timeOf(run(counts[i])) })),
+    others.map(({ run }, i) => {
+      const { seconds, pace } = mine()
+      return { ours: seconds, pace, theirs: timeOf(run(counts[i])) }
+    }),
   )
-  const all = turns.flat().map(({ ours }) => ours)
+  const all = undisturbed(turns.flat()).map(({ ours }) => ours)
   console.log(`${' '.repeat(47)}     median    minimum  ours is faster by: median  minimum   aim`)
   console.log(`  ${'ours, with the history'.padEnd(45)}${shown(median(all))}${shown(Math.min(...all))}`)
   others.forEach(({ name, aim }, i) => {
-    const pairs = turns.map((round) => round[i])
+    const pairs = undisturbed(turns.map((round) => round[i]))
     const theirs = pairs.map((pair) => pair.theirs)
     const ratio = median(pairs.map((pair) => pair.theirs / pair.ours))
     const least = Math.min(...theirs) / Math.min(...all)
