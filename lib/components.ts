@@ -16,6 +16,8 @@ export interface Term {
   logSize(N: number): number
   /** Bound of the rounding error of logSize at N, where it is `log`, in units of eps. */
   rounding(N: number, log: number): number
+  /** Present where n is the same at all times. */
+  readonly exponent?: number
   /** Bounds of the exponent n on [from, to]. */
   exponentRange(from: number, to: number): readonly [number, number]
 }
@@ -77,6 +79,7 @@ function powerComponent(key: Component['key'], omega: number, exponent: number):
   return {
     key,
     omega,
+    exponent,
     logSize: (N) => logCoefficient - exponent * N,
     rounding: (_, log) => roundingOf(logCoefficient, log, 0),
     exponentRange: () => range,
@@ -94,6 +97,7 @@ function darkComponent(omega: number, law: Law): Component {
   return {
     key: 'dark',
     omega,
+    exponent: law.exponent,
     logSize: (N) => log + law.logDensity(N),
     rounding: (N, size) => roundingOf(log, size, law.roughness?.(N) ?? 0),
     exponentRange: law.exponentRange,

@@ -259,6 +259,16 @@ export function expansionAt(model: Model, N: number, inverseScale: number): numb
   return model.cancels && Math.abs(N) < NEAR_TODAY ? model.expansionFrom(TODAY, N) : model.expansion(N, inverseScale)
 }
 
+const [place, inverseScale, first, second] = Array.from({ length: 4 }, () => new Float64Array(1))
+
+/** dE²/dN at N. */
+export function slopeAt(model: Model, N: number): number {
+  place[0] = N
+  inverseScale[0] = Math.exp(-N)
+  model.slopesInto(first, second, place, inverseScale, 1)
+  return first[0]
+}
+
 /** How dark energy varies in this direction where it goes like a power of ln a, else null. */
 export function logarithmicIn(model: Model, direction: 1 | -1): Logarithmic | null {
   if (model.budget.dark === 0) return null

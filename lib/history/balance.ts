@@ -55,11 +55,9 @@ export class Balance {
   /** Weighs the terms at N. */
   weigh(N: number): void {
     this.#N = N
-    const minus = this.#logSum(this.#minus)
+    const minus = this.#logSum(this.#minus, this.#minusWeights)
     const minusRounding = this.#rounding
-    for (let i = 0; i < this.#minus.length; i++) this.#minusWeights[i] = Math.exp(logs[i] - minus)
-    const plus = this.#logSum(this.#plus)
-    for (let i = 0; i < this.#plus.length; i++) this.#weights[i] = Math.exp(logs[i] - plus)
+    const plus = this.#logSum(this.#plus, this.#weights)
     this.h = plus - minus
     this.#rounding = Math.max(this.#rounding, minusRounding)
     if (!Number.isFinite(this.h)) {
@@ -70,8 +68,8 @@ export class Balance {
     this.error = Number.EPSILON * (2 * this.#rounding + 2 * Math.abs(plus) + 2 * Math.abs(minus) + 4)
   }
 
-  /** ln of the sum of terms, with the rounding of its terms in `#rounding` and their logarithms in `logs`. */
-  #logSum(terms: readonly Term[]): number {
+  /** ln of the sum of terms, with the share of each in `weights` and the rounding of its terms in `#rounding`. */
+  #logSum(terms: readonly Term[], weights: number[]): number {
     const N = this.#N
     let largest = Number.NEGATIVE_INFINITY
     let sum = 0
@@ -82,15 +80,20 @@ export class Balance {
       if (!(log <= largest)) largest = log
     }
     this.#rounding = 0
-    if (!Number.isFinite(largest)) return largest
+    if (!Number.isFinite(largest)) {
+      for (let i = 0; i < terms.length; i++) weights[i] = Number.NaN
+      return largest
+    }
     for (let i = 0; i < terms.length; i++) {
       const below = largest - logs[i]
+      const size = Math.exp(-below)
+      weights[i] = size
       // What is e⁶⁰ times smaller than the largest moves nothing, nor does its error.
       if (below > 60) continue
-      const size = Math.exp(-below)
       sum += size
       rounding += size * (terms[i].rounding(N, logs[i]) + 4)
     }
+    for (let i = 0; i < terms.length; i++) weights[i] /= sum
     this.#rounding = rounding / sum + 4
     return largest + Math.log(sum)
   }
@@ -175,7 +178,8 @@ export class Balance {
   }
 }
 
-function isSteady({ exponentRange }: Term): boolean {
+function isSteady({ exponent, exponentRange }: Term): boolean {
+  if (exponent !== undefined) return true
   const range = exponentRange(Number.NEGATIVE_INFINITY, Number.POSITIVE_INFINITY)
   return range[0] === range[1]
 }

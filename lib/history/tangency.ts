@@ -2,7 +2,7 @@
  * Where the certified steps have come near to a zero of E²: is it passed, is it a turning point, or do E² and its slope vanish
  * together? A turning point is proven by a place beyond it with E² < 0, a passage by steps on E² with twice the digits.
  */
-import { expansionAt, type Model } from '../model'
+import { expansionAt, type Model, slopeAt } from '../model'
 import type { Balance, Direction } from './balance'
 import { exactlyStatic } from './exactly-static'
 import { preciseExpansion, preciseSlope } from './precise'
@@ -24,6 +24,7 @@ const STEEP = 1e-4
 /** Newton's steps from where the search came to rest are far shorter than this in ln a. */
 const STRAY = 0.1
 const MOST_STEPS = 400
+const MOST_NEWTON = 64
 
 /** Slope of E² over the sizes of its terms that tells a simple root. */
 const SLOPE = 1e-7
@@ -68,17 +69,22 @@ function steepRoot(
   return passed ? { kind: 'root', N: far ? start : polished(model, start), slope: null, doubt: null } : null
 }
 
-/** Newton's method on E², until rounding tosses it to and fro between two neighbours: then that of the even steps, either is as good. */
+/**
+ * Newton's method on E². Next to the edge of a law it wins no more than a part in each step. Where rounding tosses it about among
+ * neighbours it goes round, of which whole rounds are left out (R. P. Brent 1980, BIT 20, 176, finds them).
+ */
 function polished(model: Model, start: number): number {
-  let [N, before] = [start, Number.NaN]
-  // Next to the edge of a law it wins no more than a part in each step.
-  for (let step = 0; step < 64; step++) {
-    const change = expansionAt(model, N, Math.exp(-N)) / model.derivatives(N).first
+  let [N, mark] = [start, start]
+  let [since, lap] = [0, 1]
+  let last = MOST_NEWTON
+  for (let step = 1; step <= last; step++) {
+    const change = expansionAt(model, N, Math.exp(-N)) / slopeAt(model, N)
     if (!(Math.abs(change) < STRAY)) break
-    const next = N - change
-    if (Math.abs(change) <= 0.5 * Number.EPSILON * Math.abs(next)) return next
-    if (next === before) return step % 2 === 1 ? next : N
-    ;[before, N] = [N, next]
+    N -= change
+    if (Math.abs(change) <= 0.5 * Number.EPSILON * Math.abs(N)) break
+    since += 1
+    if (N === mark) last = step + ((last - step) % since)
+    if (since === lap) [mark, since, lap] = [N, 0, 2 * lap]
   }
   return N
 }

@@ -9,7 +9,7 @@
 
 import type { Term } from '../components'
 import type { Edge } from '../dark-energy/law'
-import { logarithmicIn, type Model } from '../model'
+import { logarithmicIn, type Model, slopeAt } from '../model'
 import { Balance, type Direction } from './balance'
 import { FARTHEST, type Narrow, type Search } from './search'
 import { type Encounter, meet } from './tangency'
@@ -82,7 +82,7 @@ function atEdge(model: Model, edge: Edge, direction: Direction): Search {
 /** A root, if a and E² about it are doubles. */
 function rootAt(model: Model, N: number, narrows: readonly Narrow[], doubt: string | null): Search {
   // The slope too: a density that changes its sign has no size here.
-  const size = model.magnitude(N) + Math.abs(model.derivatives(N).first)
+  const size = model.magnitude(N) + Math.abs(slopeAt(model, N))
   const near = Math.abs(N) <= FARTHEST && size > 1e-290 && size < 1e290
   return near ? { kind: 'root', N, narrows, doubt } : { kind: 'none', farRoot: N, narrows, doubt }
 }
