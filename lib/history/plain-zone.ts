@@ -63,7 +63,6 @@ function nodesInto(direction: Direction, centre: number, half: number): void {
 /** Size of dark energy over E²: what an error of the law does to it. May be far above 1 where E² is small; 1 beyond the doubles. */
 function darkShare(model: Model, N: number): number {
   const { budget, law } = model
-  if (budget.dark === 0) return 0
   const density = law.density(N)
   const share = Math.abs(budget.dark * density) / model.expansionWith(N, density)
   return share >= 0 && share < 1e16 ? share : 1
