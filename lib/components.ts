@@ -16,8 +16,8 @@ export interface Term {
   logSize(N: number): number
   /** Bound of the rounding error of logSize at N, where it is `log`, in units of eps. */
   rounding(N: number, log: number): number
-  /** Present where n is the same at all times. */
-  readonly exponent?: number
+  /** Present where n is the same at all times: what such a term is can be written out, and most are such. */
+  readonly power?: { readonly exponent: number; readonly logCoefficient: number } | undefined
   /** Bounds of the exponent n on [from, to]. */
   exponentRange(from: number, to: number): readonly [number, number]
 }
@@ -79,12 +79,13 @@ function powerComponent(key: Component['key'], omega: number, exponent: number):
   return {
     key,
     omega,
-    exponent,
+    power: { exponent, logCoefficient },
     logSize: (N) => logCoefficient - exponent * N,
     rounding: (_, log) => roundingOf(logCoefficient, log, 0),
     exponentRange: () => range,
     density: (N) => omega * Math.exp(-exponent * N),
     bend: (N, d) => omega * Math.exp(-exponent * N) * expm2(-exponent * d),
+    terms: undefined,
     past: asymptote,
     future: asymptote,
   }
@@ -97,7 +98,7 @@ function darkComponent(omega: number, law: Law): Component {
   return {
     key: 'dark',
     omega,
-    exponent: law.exponent,
+    power: law.exponent === undefined ? undefined : { exponent: law.exponent, logCoefficient: log },
     logSize: (N) => log + law.logDensity(N),
     rounding: (N, size) => roundingOf(log, size, law.roughness?.(N) ?? 0),
     exponentRange: law.exponentRange,
@@ -110,7 +111,7 @@ function darkComponent(omega: number, law: Law): Component {
 }
 
 /** Of ln |Ω| + ln f: both are rounded, and ln f is four times its size or what its law says. */
-const roundingOf = (logCoefficient: number, log: number, roughness: number): number =>
+export const roundingOf = (logCoefficient: number, log: number, roughness: number): number =>
   2 + 2 * Math.abs(logCoefficient) + 4 * Math.abs(log - logCoefficient) + roughness
 
 function termOf(darkEnergy: number, { factor, logDensity, roughness, exponentRange }: Part): Term {
@@ -145,15 +146,17 @@ function neutrinoComponent(state: MassiveState): Component {
   return {
     key: 'neutrino',
     omega: state.density,
+    power: undefined,
     // Also where y itself is no double any more.
     logSize: (N) => (N > cold ? logCold - 3 * N : logMassless + Math.log(energyRatio(y(N))) - 4 * N),
     // The energy ratio is right to 4 eps, its argument to 4 more.
     rounding: (N, log) => 10 + 2 * Math.abs(logMassless) + 4 * Math.abs(log) + 16 * Math.abs(N),
+    exponentRange: (from, to) => [4 - logSlope(y(to)), 4 - logSlope(y(from))],
     density,
     bend: (N, d) =>
       density(N) *
       relativeBend(Math.log1p(energyRatioChange(y(N), d)) - 4 * d, d, (t) => -logSlopeDerivative(y(N + t))),
-    exponentRange: (from, to) => [4 - logSlope(y(to)), 4 - logSlope(y(from))],
+    terms: undefined,
     past: {
       kind: 'power',
       exponent: 4,

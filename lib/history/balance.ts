@@ -2,7 +2,7 @@
  * The terms of E² = P − M, P the positive and M the negative ones, weighed against each other: h = ln P − ln M at one N, how far
  * rounding may have moved it, and how fast it can fall on from there. Every bound is widened by the rounding of what it is made from.
  */
-import type { Term } from '../components'
+import { roundingOf, type Term } from '../components'
 
 export type Direction = 1 | -1
 
@@ -75,7 +75,8 @@ export class Balance {
     let sum = 0
     let rounding = 0
     for (let i = 0; i < terms.length; i++) {
-      const log = terms[i].logSize(N)
+      const { power } = terms[i]
+      const log = power ? power.logCoefficient - power.exponent * N : terms[i].logSize(N)
       logs[i] = log
       if (!(log <= largest)) largest = log
     }
@@ -91,7 +92,9 @@ export class Balance {
       // What is e⁶⁰ times smaller than the largest moves nothing, nor does its error.
       if (below > 60) continue
       sum += size
-      rounding += size * (terms[i].rounding(N, logs[i]) + 4)
+      const { power } = terms[i]
+      const own = power ? roundingOf(power.logCoefficient, logs[i], 0) : terms[i].rounding(N, logs[i])
+      rounding += size * (own + 4)
     }
     for (let i = 0; i < terms.length; i++) weights[i] /= sum
     this.#rounding = rounding / sum + 4
@@ -140,8 +143,7 @@ export class Balance {
     let sizes = 0
     let [slowest, steepest] = [Number.POSITIVE_INFINITY, Number.NEGATIVE_INFINITY]
     for (let i = 0; i < this.#plus.length; i++) {
-      const range = this.#plus[i].exponentRange(from, to)
-      const n = high ? range[1] : range[0]
+      const n = boundOf(this.#plus[i], from, to, high)
       const rate = outwards ? n : -n
       rates[i] = rate
       const weight = this.#weights[i]
@@ -156,8 +158,7 @@ export class Balance {
     let least = Number.POSITIVE_INFINITY
     let most = Number.NEGATIVE_INFINITY
     for (let i = 0; i < this.#minus.length; i++) {
-      const range = this.#minus[i].exponentRange(from, to)
-      const n = high ? range[0] : range[1]
+      const n = boundOf(this.#minus[i], from, to, !high)
       const rate = outwards ? -n : n
       if (rate < least) least = rate
       if (rate > most) most = rate
@@ -178,8 +179,15 @@ export class Balance {
   }
 }
 
-function isSteady({ exponent, exponentRange }: Term): boolean {
-  if (exponent !== undefined) return true
+/** The highest or the lowest exponent of a term on [from, to]. */
+function boundOf(term: Term, from: number, to: number, high: boolean): number {
+  if (term.power) return term.power.exponent
+  const range = term.exponentRange(from, to)
+  return high ? range[1] : range[0]
+}
+
+function isSteady({ power, exponentRange }: Term): boolean {
+  if (power) return true
   const range = exponentRange(Number.NEGATIVE_INFINITY, Number.POSITIVE_INFINITY)
   return range[0] === range[1]
 }

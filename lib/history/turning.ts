@@ -21,6 +21,8 @@ export { FARTHEST, type Narrow, type Search } from './search'
 const NEAR = 1e-10
 /** Steps of one search; what needs more is not proven. The hunt for misses has met no more than 128. */
 const MOST_STEPS = 1000
+/** Of the stretches on which exponents are bounded, in ln a: tuned for few steps. */
+const [FIRST, GROWTH] = [0.7, 1.2]
 /** Distance to the edge of a law, relative to its ln a, that is as good as none. */
 const EDGE_NEAREST = 256 * Number.EPSILON
 
@@ -93,7 +95,7 @@ function stepsFrom(model: Model, terms: readonly Term[], direction: Direction, s
   const narrows: Narrow[] = []
   if (!balance.signed) return nothing(narrows, null)
   const nearest = Number.isFinite(limit) ? 4 * Number.EPSILON * Math.max(1, limit) : 0
-  let [N, length] = [start, 1]
+  let [N, length] = [start, FIRST]
   for (let step = 0; step < MOST_STEPS; step++) {
     balance.weigh(N)
     const h = balance.h - balance.error
@@ -105,7 +107,7 @@ function stepsFrom(model: Model, terms: readonly Term[], direction: Direction, s
     if (advance >= left || left <= nearest) return nothing(narrows, null)
     if (advance > Number.EPSILON * Math.abs(N)) {
       N += direction * advance
-      length = 2 * advance
+      length = GROWTH * advance
       continue
     }
     // So near to an edge that N tells no difference any more: the edge decides.
