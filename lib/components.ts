@@ -8,6 +8,18 @@ import { expm2 } from './numerics/exponential'
 import type { Budget } from './scenario/budget'
 import type { MassiveState } from './scenario/radiation'
 
+/** |Ω f| = e^(logCoefficient − exponent N). */
+export interface Power {
+  readonly exponent: number
+  readonly logCoefficient: number
+}
+
+/** As `logSize` of a term. */
+export const logOfPower = ({ logCoefficient, exponent }: Power, N: number): number => logCoefficient - exponent * N
+
+/** As `rounding` of a term. */
+export const roundingOfPower = ({ logCoefficient }: Power, log: number): number => roundingOf(logCoefficient, log, 0)
+
 /** A term of E² that keeps its sign. */
 export interface Term {
   /** Carries the sign. */
@@ -16,8 +28,8 @@ export interface Term {
   logSize(N: number): number
   /** Bound of the rounding error of logSize at N, where it is `log`, in units of eps. */
   rounding(N: number, log: number): number
-  /** Present where n is the same at all times: what such a term is can be written out, and most are such. */
-  readonly power?: { readonly exponent: number; readonly logCoefficient: number } | undefined
+  /** Present where n is the same at all times, as for most: then nobody need be called. */
+  readonly power?: Power | undefined
   /** Bounds of the exponent n on [from, to]. */
   exponentRange(from: number, to: number): readonly [number, number]
 }
@@ -75,13 +87,14 @@ export function componentsOf(amounts: Amounts, budget: Budget, law: Law): readon
 function powerComponent(key: Component['key'], omega: number, exponent: number): Component {
   const logCoefficient = Math.log(Math.abs(omega))
   const range = [exponent, exponent] as const
+  const power = { exponent, logCoefficient }
   const asymptote = { kind: 'power', exponent, logCoefficient, settled: 0 } as const
   return {
     key,
     omega,
-    power: { exponent, logCoefficient },
-    logSize: (N) => logCoefficient - exponent * N,
-    rounding: (_, log) => roundingOf(logCoefficient, log, 0),
+    power,
+    logSize: (N) => logOfPower(power, N),
+    rounding: (_, log) => roundingOfPower(power, log),
     exponentRange: () => range,
     density: (N) => omega * Math.exp(-exponent * N),
     bend: (N, d) => omega * Math.exp(-exponent * N) * expm2(-exponent * d),
@@ -111,7 +124,7 @@ function darkComponent(omega: number, law: Law): Component {
 }
 
 /** Of ln |Ω| + ln f: both are rounded, and ln f is four times its size or what its law says. */
-export const roundingOf = (logCoefficient: number, log: number, roughness: number): number =>
+const roundingOf = (logCoefficient: number, log: number, roughness: number): number =>
   2 + 2 * Math.abs(logCoefficient) + 4 * Math.abs(log - logCoefficient) + roughness
 
 function termOf(darkEnergy: number, { factor, logDensity, roughness, exponentRange }: Part): Term {

@@ -6,17 +6,11 @@ import { setFlagsFromString } from 'node:v8'
 import { expect, test } from 'vitest'
 import { isBlock, runsAlong } from '../lib/quantities/blocks'
 import { borrowWorkspace } from '../lib/quantities/workspace'
-import { readScenario } from '../lib/scenario/read'
 import { type Solution, solve } from '../lib/solve'
+import { read } from './bench/scenarios'
 
 setFlagsFromString('--allow-natives-syntax')
 const alike = new Function('one', 'other', 'return %HaveSameMap(one, other)') as (one: object, other: object) => boolean
-
-function solved(code: string): Solution {
-  const reading = readScenario(code, 0)
-  if (!reading.ok) throw new Error(code)
-  return solve(reading.value)
-}
 
 const workspace = borrowWorkspace()
 
@@ -55,7 +49,7 @@ test.each([
   ['a universe that turns round', (h0: number) => `h0:${h0},matter:2,dark:0,masses:0`],
   ['a bounce', (h0: number) => `h0:${h0},matter:0.1,dark:1.8,cmb:0`],
 ])('%s', (_, code) => {
-  const many = Array.from({ length: SETTLED }, (_, i) => partsOf(solved(code(60 + i))))
+  const many = Array.from({ length: SETTLED }, (_, i) => partsOf(solve(read(code(60 + i)))))
   const [one, other] = many.slice(-2)
   for (const [name, part] of Object.entries(one)) expect.soft(alike(part, other[name]), name).toBe(true)
 })

@@ -2,7 +2,7 @@
  * The terms of E² = P − M, P the positive and M the negative ones, weighed against each other: h = ln P − ln M at one N, how far
  * rounding may have moved it, and how fast it can fall on from there. Every bound is widened by the rounding of what it is made from.
  */
-import { roundingOf, type Term } from '../components'
+import { logOfPower, roundingOfPower, type Term } from '../components'
 
 export type Direction = 1 | -1
 
@@ -76,7 +76,7 @@ export class Balance {
     let rounding = 0
     for (let i = 0; i < terms.length; i++) {
       const { power } = terms[i]
-      const log = power ? power.logCoefficient - power.exponent * N : terms[i].logSize(N)
+      const log = power ? logOfPower(power, N) : terms[i].logSize(N)
       logs[i] = log
       if (!(log <= largest)) largest = log
     }
@@ -93,7 +93,7 @@ export class Balance {
       if (below > 60) continue
       sum += size
       const { power } = terms[i]
-      const own = power ? roundingOf(power.logCoefficient, logs[i], 0) : terms[i].rounding(N, logs[i])
+      const own = power ? roundingOfPower(power, logs[i]) : terms[i].rounding(N, logs[i])
       rounding += size * (own + 4)
     }
     for (let i = 0; i < terms.length; i++) weights[i] /= sum

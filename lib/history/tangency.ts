@@ -134,7 +134,7 @@ function simpleRoot(model: Model, N: number): Encounter {
 
 function touching(model: Model, N: number, direction: Direction): Encounter {
   // A slope that rounding could not have made, where E² itself is lost in it.
-  if (direction * model.derivatives(N).first < -SLOPE * model.magnitude(N)) {
+  if (direction * slopeAt(model, N) < -SLOPE * model.magnitude(N)) {
     return { kind: 'root', N: polished(model, N), slope: null, doubt: ROUNDED }
   }
   return { kind: 'double', N: atRest(model, N), exact: false, doubt: UNDECIDED }

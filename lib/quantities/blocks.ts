@@ -72,8 +72,9 @@ function nextByScale(sheet: Sheet, first: number): Run {
   while (first + count < sheet.count && N[count] <= 0 === past && Math.abs(N[count]) > reach === outside) count++
   if (outside) return { count, arm: null }
   placeInto(arrays.panel, arrays.s, N, arm, count)
-  const event = { phase: past ? 'past' : 'future', sign: 1, swings: 0 } as const
-  return blockOver(sheet, arrays, arm, count, event, {}, null)
+  const { take } = sheet.workspace
+  const phase = past ? 'past' : 'future'
+  return blockFrom(arrays, { subject, phase, arm, sign: 1, swings: 0, count, given: {}, asked: null, take })
 }
 
 /** The panels of places and the variables there; from one place to the next the panel is seldom another. */
@@ -112,7 +113,20 @@ function nextByTime(sheet: Sheet, first: number): Run {
     found = eventAt(subject, variable, values[i], 'expanding')
   }
   if (!isEvent(start)) return { count: i - first, arm: null }
-  return blockOver(sheet, arrays, start.place.arm, i - first, start, { [variable]: asked }, variable as 'time' | 'age')
+  const { phase, sign, swings, place } = start
+  const given = { [variable]: asked }
+  const { take } = sheet.workspace
+  return blockFrom(arrays, {
+    subject,
+    phase,
+    arm: place.arm,
+    sign,
+    swings,
+    count: i - first,
+    given,
+    asked: variable as 'time' | 'age',
+    take,
+  })
 }
 
 const goesOn = (one: Event, next: Event): boolean =>
@@ -125,17 +139,4 @@ function write(arrays: ReturnType<typeof arraysOf>, at: number, { place }: Event
   arrays.scale[at] = Math.exp(place.N)
   arrays.redshift[at] = Math.expm1(-place.N)
   arrays.inverseScale[at] = Math.exp(-place.N)
-}
-
-function blockOver(
-  { subject, workspace: { take } }: Sheet,
-  { N, inverseScale, panel, s, scale, redshift }: ReturnType<typeof arraysOf>,
-  arm: Arm,
-  count: number,
-  { phase, sign, swings }: Pick<Block, 'phase' | 'sign' | 'swings'>,
-  given: Block['given'],
-  asked: Block['asked'],
-): Block {
-  const places = { N, inverseScale, panel, s, scale, redshift }
-  return blockFrom(places, { subject, phase, arm, sign, swings, count, given, asked, take })
 }
