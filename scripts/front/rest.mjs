@@ -8,6 +8,9 @@ const ROUSE = readFileSync(new URL('./rouse.js', import.meta.url), 'utf8')
 
 /** The scripts in the head. */
 const SCRIPT = /<script src="([^"]+)" async="" nonce="([^"]*)"><\/script>/g
+/** What the head announces of the one that begins everything; it stands at the end of the body. */
+const ANNOUNCED = /<link rel="preload" as="script" [^>]*href="([^"]+)"\/>/g
+const BEGINNER = /<script src="[^"]+" nonce="([^"]*)" async="">/g
 /** What they are told at the end of the body. As plain text nobody compiles it. */
 const TOLD = /<script nonce="([^"]*)">(?=\(?self\.__next_f)/g
 /** No such beginning is longer. */
@@ -57,7 +60,9 @@ export function restingPage() {
   const released = (/** @type {number} */ length) => {
     const ready = held.slice(0, length)
     held = held.slice(length)
-    return ready.replace(TOLD, '<script type="text/plain" data-rest nonce="$1">')
+    return ready
+      .replace(TOLD, '<script type="text/plain" data-rest nonce="$1">')
+      .replace(BEGINNER, '<script type="text/plain" nonce="$1">')
   }
   const leaveHead = () => {
     if (inHead) held = withRestingHead(held)
@@ -81,9 +86,12 @@ export function restingPage() {
 
 /** What wakes the page fetches them when it has loaded, so that they take no part of the line from what is to be read. @param {string} head */
 function withRestingHead(head) {
-  const [first, ...others] = [...head.matchAll(SCRIPT)]
+  const [first] = head.matchAll(SCRIPT)
   if (!first) return head
-  const sources = [first, ...others].map(([, source]) => source)
+  const sources = [ANNOUNCED, SCRIPT].flatMap((tag) => [...head.matchAll(tag)].map(([, source]) => source))
   const rouse = `<script nonce="${first[2]}" data-scripts="${sources.join(' ')}">${ROUSE}</script>`
-  return head.replace(SCRIPT, '').replace(HEAD_END, rouse + HEAD_END)
+  return head
+    .replace(ANNOUNCED, '')
+    .replace(SCRIPT, '')
+    .replace(HEAD_END, rouse + HEAD_END)
 }
