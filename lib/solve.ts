@@ -2,7 +2,7 @@
  * The pipeline in a few calls; read this first:
  * scenario → budget and model (E² of a) → history (t and η as functions of a, origin and end) → measures and moments.
  */
-import { eventAtTime, isEvent } from './history/event'
+import { eventAtTime, type Found } from './history/event'
 import type { History } from './history/history'
 import type { EndKind, OriginKind } from './history/outcome'
 import { isMissing, type Outcome } from './measures/outcome'
@@ -90,11 +90,6 @@ const answer = (outcome: Outcome, unit: string): Answer =>
     ? { value: null, unit, error: null, because: outcome.because }
     : { value: outcome.value, unit, error: outcome.error, because: null }
 
-/** a at times in Gyr from now; null where the history does not reach. */
-export function scalesAt(solution: Solution, times: readonly number[]): (number | null)[] {
-  const gyr = hubbleTimeGyr(solution.scenario.h0)
-  return times.map((time) => {
-    const event = eventAtTime(solution.history, time / gyr)
-    return isEvent(event) ? Math.exp(event.place.N) : null
-  })
-}
+/** At a time in Gyr from now. */
+export const eventAtGyr = ({ scenario, history }: Pick<Solution, 'scenario' | 'history'>, time: number): Found =>
+  eventAtTime(history, time / hubbleTimeGyr(scenario.h0))

@@ -109,7 +109,12 @@ export function createAnswers(first: Answer, { isAwake, compute, load }: Means) 
 }
 
 /** What is out of sight stays as it was. */
-const whole = (view: Brief, before: Explorer): Explorer => (isWhole(view) ? view : { ...view, panel: before.panel })
+function whole(view: Brief, before: Explorer): Explorer {
+  if (isWhole(view)) return view
+  const { readings } = before.long.figure
+  const long = { ...view.long, figure: { ...view.long.figure, readings } }
+  return { ...view, long, panel: before.panel }
+}
 
 const isWhole = (view: Brief): view is Explorer => view.panel !== null
 

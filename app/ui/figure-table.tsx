@@ -6,8 +6,15 @@ import { Sentence } from './symbol'
 /** About so many rows: enough to follow a curve by ear; the whole is in the tables to take away. */
 const ROWS = 24
 
+interface FigureProps {
+  readonly figure: Shown
+}
+
+/** In the middle of a gesture a figure keeps its readings, and so does this. */
+const hasSameNumbers = (one: FigureProps, other: FigureProps) => one.figure.readings === other.figure.readings
+
 /** The figure as numbers. */
-export const FigureTable = memo(function FigureTable({ figure }: { readonly figure: Shown }) {
+export const FigureTable = memo(function FigureTable({ figure }: FigureProps) {
   const { title, x, y, curves } = figure
   const rows = rowsOf(useDeferredValue(figure))
   return (
@@ -17,7 +24,7 @@ export const FigureTable = memo(function FigureTable({ figure }: { readonly figu
       rows={rows}
     />
   )
-})
+}, hasSameNumbers)
 
 interface Props {
   readonly caption: string

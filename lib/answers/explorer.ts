@@ -53,14 +53,23 @@ export interface Explorer extends Desk {
   readonly refusal: Refusal | null
 }
 
-/** Without the view below the long one, where nobody sees it. */
+/** While a hand drags, where the view below the long one is out of sight: without it and without what a cursor reads. */
 export type Brief = Omit<Explorer, 'panel'> & { readonly panel: Panel | null }
 
-export const explorer = (asked: Asked): Explorer => shown(asked, panelOf)
+export const explorer = (asked: Asked): Explorer => shown(asked, longPanel, panelOf)
 
-export const brief = (asked: Asked): Brief => shown(asked, () => null)
+export const brief = (asked: Asked): Brief =>
+  shown(
+    asked,
+    (subject) => longPanel(subject, false),
+    () => null,
+  )
 
-function shown<P>(asked: Asked, below: (subject: Subject) => P): Omit<Explorer, 'panel'> & { readonly panel: P } {
+function shown<P>(
+  asked: Asked,
+  long: (subject: Subject) => LongPanel,
+  below: (subject: Subject) => P,
+): Omit<Explorer, 'panel'> & { readonly panel: P } {
   const address = opened(asked.codes)
   const solutions = address.solutions.map(named)
   const scenarios = solutions.map(({ scenario }) => scenario)
@@ -80,7 +89,7 @@ function shown<P>(asked: Asked, below: (subject: Subject) => P): Omit<Explorer, 
       ...tab,
       ...told(solutions[tab.slot] as Solution, tab.slot, scenarios, place),
     })),
-    long: longPanel(subject),
+    long: long(subject),
     panel: below(subject),
     moments: momentWords(focus),
     measures: measureWords(focus.measures),

@@ -1,12 +1,11 @@
 /** The long view with its links: how time runs along it, and which range of it is shown. */
 import type { Chart } from '../figures/chart'
-import { contentsAt } from '../figures/contents'
+import { entryOf } from '../figures/entry'
 import { longView } from '../figures/long-view'
 import { type Shown, shownOf } from '../figures/picture'
 import { LONG_FRAMES } from '../figures/plot'
-import { remembered } from '../figures/remembered'
 import type { Entry } from '../figures/window'
-import { type Solution, scalesAt } from '../solve'
+import type { Solution } from '../solve'
 import { lately } from './lately'
 import { framesOf, linker, type Option, type Subject, type Zoom, zoomOf } from './panel'
 
@@ -16,13 +15,14 @@ export interface LongPanel {
   readonly figure: Shown
 }
 
-export function longChart({ solutions, place }: Pick<Subject, 'solutions' | 'place'>): Chart {
-  return longView(solutions.map(drawable), place.focus, place)
+export function longChart({ solutions, place }: Pick<Subject, 'solutions' | 'place'>, read = true): Chart {
+  return longView(solutions.map(drawable), place.focus, place, read)
 }
 
-export function longPanel(subject: Subject): LongPanel {
+/** `read` is a figure with what a cursor reads. */
+export function longPanel(subject: Subject, read = true): LongPanel {
   const { place, frame } = subject
-  const chart = longChart(subject)
+  const chart = longChart(subject, read)
   const link = linker(subject)
   const clocks = [
     { word: 'linear', time: null },
@@ -39,16 +39,6 @@ export function longPanel(subject: Subject): LongPanel {
   }
 }
 
-const drawable = (solution: Solution): Entry<Solution> => ({ solution, ...seen(solution) })
+const drawable = (solution: Solution): Entry<Solution> => ({ ...seen(solution), solution })
 
-/** A figure asks for the same times again while it is dragged about. */
-const seen = lately(
-  ({ code }: Solution) => code,
-  (solution) => {
-    const scaleAt = remembered((time) => scalesAt(solution, [time])[0] ?? null)
-    return {
-      scales: (times: readonly number[]) => times.map(scaleAt),
-      contents: remembered((time) => contentsAt(solution, time)),
-    }
-  },
-)
+const seen = lately(({ code }: Solution) => code, entryOf)

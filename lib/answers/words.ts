@@ -1,11 +1,11 @@
 /** `/api/words`: sentences, macros and references to paste, for scenarios and their figure. */
 
 import type { Chart } from '../figures/chart'
-import { contentsAt } from '../figures/contents'
+import { entryOf } from '../figures/entry'
 import { longView } from '../figures/long-view'
 import type { Reading } from '../scenario/scenario'
 import { linkQuery } from '../scenario/write'
-import { ENGINE, type Solution, scalesAt } from '../solve'
+import { ENGINE, type Solution } from '../solve'
 import { macrosOf } from '../takeaway/macros'
 import { methodsOf } from '../takeaway/methods'
 import { type PressCard, pressOf } from '../takeaway/press'
@@ -76,14 +76,7 @@ export function wordsOf(solutions: readonly Solution[], edition: Edition): Words
 }
 
 /** The long view of these scenarios. */
-export const figureOf = (solutions: readonly Solution[]): Chart =>
-  longView(
-    solutions.map((solution) => ({
-      solution,
-      scales: (times) => scalesAt(solution, times),
-      contents: (time) => contentsAt(solution, time),
-    })),
-  )
+export const figureOf = (solutions: readonly Solution[]): Chart => longView(solutions.map(entryOf))
 
 /** The frame of the figure in its own words, and each curve in numbers that are known. */
 function alternativeOf({ alternative }: Chart, known: readonly Known[]): string {

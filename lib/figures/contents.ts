@@ -1,11 +1,11 @@
 /** What a universe is made of at a time, and whether its expansion speeds up then. */
 
 import type { Component } from '../components'
-import { type Event, eventAtTime, isEvent } from '../history/event'
-import type { Solution } from '../solve'
-import { hubbleTimeGyr } from '../units'
+import { type Event, type Found, isEvent } from '../history/event'
 
-export type Era = 'radiation' | 'matter' | 'curvature' | 'dark energy'
+const ERAS = ['radiation', 'matter', 'curvature', 'dark energy'] as const
+
+export type Era = (typeof ERAS)[number]
 
 export interface Contents {
   /** The component of the largest density, whatever its sign. */
@@ -22,25 +22,19 @@ const ERA_OF: Readonly<Record<Component['key'], Era>> = {
   dark: 'dark energy',
 }
 
-/** At a time in Gyr from now; null where the history does not reach. */
-export function contentsAt(
-  { scenario, history }: Pick<Solution, 'scenario' | 'history'>,
-  time: number,
-): Contents | null {
-  const event = eventAtTime(history, time / hubbleTimeGyr(scenario.h0))
-  if (!isEvent(event)) return null
-  return { dominant: dominantAt(event), accelerating: accelerates(event) }
-}
+/** Null where the history does not reach. */
+export const contentsOf = (event: Found): Contents | null =>
+  isEvent(event) ? { dominant: dominantAt(event), accelerating: accelerates(event) } : null
 
 function dominantAt({ place: { arm, N } }: Event): Era {
-  const sizes = new Map<Era, number>()
-  const logs = arm.model.components.map((one) => one.logSize(N))
+  const { components } = arm.model
+  const logs = components.map((one) => one.logSize(N))
   const largest = Math.max(...logs)
-  arm.model.components.forEach(({ key }, i) => {
-    const era = ERA_OF[key]
-    sizes.set(era, (sizes.get(era) ?? 0) + Math.exp((logs[i] ?? largest) - largest))
+  const sizes: Record<Era, number> = { radiation: 0, matter: 0, curvature: 0, 'dark energy': 0 }
+  components.forEach(({ key }, i) => {
+    sizes[ERA_OF[key]] += Math.exp((logs[i] ?? largest) - largest)
   })
-  return [...sizes].reduce((best, one) => (one[1] > best[1] ? one : best))[0]
+  return ERAS.reduce((best, one) => (sizes[one] > sizes[best] ? one : best))
 }
 
 /** ä/a = E² + ½ dE²/dN in units of H₀². */

@@ -1,5 +1,6 @@
 /** Which component dominates when, and when the expansion accelerates: stretches of time within a window. */
 import type { Contents, Era } from './contents'
+import { EVEN } from './sample'
 import { type Range, valueAt } from './scale'
 
 export interface Stretch<T> {
@@ -13,8 +14,8 @@ export interface Eras {
   readonly accelerating: readonly Stretch<true>[]
 }
 
-/** Shorter stretches than one of so many in a window can be missed; they could not be seen. */
-const SAMPLES = 480
+/** Shorter stretches than one of so many in a window can be missed; they could not be seen. Every other place is one of the curve's. */
+const SAMPLES = 2 * EVEN
 /** Halvings until a boundary is finer than a hundredth of a pixel. */
 const HALVINGS = 12
 

@@ -5,9 +5,9 @@ import { END_NAMES, endLabel, endsInTime } from '../words/ending'
 import { longViewCaption, longViewText } from './caption'
 import type { Chart, Curve, Mark, Ribbon } from './chart'
 import { erasOf } from './eras'
-import { readingsOf } from './readings'
+import { NO_READINGS, type Readings, readingsOf } from './readings'
 import { placesAlong, type Ranges, type Source, sampleCurve } from './sample'
-import { fine, linearRange } from './scale'
+import { fine, linearRange, type Range } from './scale'
 import { type Entry, type Wanted, type Window, windowOf } from './window'
 
 export type Drawn = Pick<Solution, 'scenario' | 'code' | 'label' | 'origin' | 'end' | 'measures' | 'moments'>
@@ -15,8 +15,8 @@ export type Drawn = Pick<Solution, 'scenario' | 'code' | 'label' | 'origin' | 'e
 const TIME = { quantity: 'time', label: 'time from now', symbol: '', unit: 'Gyr' }
 const SCALE = { quantity: 'scale', label: 'scale factor', symbol: 'a', unit: '' }
 
-/** `focus` is the scenario that is drawn strong. */
-export function longView(entries: readonly Entry<Drawn>[], focus = 0, wanted?: Wanted): Chart {
+/** `focus` is the scenario that is drawn strong; a `read` figure has what a cursor reads. */
+export function longView(entries: readonly Entry<Drawn>[], focus = 0, wanted?: Wanted, read = true): Chart {
   const window = windowOf(entries, wanted)
   const { top, ...range } = window
   const ranges = { x: range, y: linearRange(0, top) }
@@ -34,11 +34,7 @@ export function longView(entries: readonly Entry<Drawn>[], focus = 0, wanted?: W
     ribbons,
     now: 0,
     future: hatched ? 'hatched' : 'tint',
-    readings: readingsOf(
-      entries.map(({ scales }) => scales),
-      range,
-      [0, ...entries.flatMap(({ solution }) => specialTimes(solution))],
-    ),
+    readings: read ? longReadings(entries, range) : NO_READINGS,
     caption: longViewCaption(solutions, {
       marks: new Set(curves.flatMap(({ marks }) => marks.map(({ kind }) => kind))),
       ribbons: ribbons.length > 0,
@@ -47,6 +43,15 @@ export function longView(entries: readonly Entry<Drawn>[], focus = 0, wanted?: W
     }),
     alternative: longViewText(solutions, window),
   }
+}
+
+function longReadings(entries: readonly Entry<Drawn>[], x: Range): Readings {
+  const special = entries.flatMap(({ solution }) => specialTimes(solution))
+  return readingsOf(
+    entries.map(({ scales }) => scales),
+    x,
+    [0, ...special],
+  )
 }
 
 function specialTimes({ origin, end }: Pick<Drawn, 'origin' | 'end'>): number[] {

@@ -8,6 +8,8 @@ export interface Readings {
   readonly values: readonly (readonly (number | null)[])[]
 }
 
+export const NO_READINGS: Readings = { places: [], values: [] }
+
 type Values = (places: readonly number[]) => readonly (number | null)[]
 
 /** Together with now and three special places of each of six scenarios: 300 at most. */

@@ -16,7 +16,8 @@ export interface Ranges {
   readonly y: Range
 }
 
-const EVEN = 200
+/** Steps along a figure. */
+export const EVEN = 240
 const CROWDED = 28
 /** Part of the figure over which points crowd towards an origin or an ending. */
 const CROWD = 0.1

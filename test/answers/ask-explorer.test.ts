@@ -27,12 +27,15 @@ describe('/api/explorer', () => {
     expect(question('s=h0:7o').canonical).not.toBe(question('s=h0:7p').canonical)
   })
 
-  it('leaves out the view below where only the long one is asked for', () => {
+  it('leaves out the view below, and what a cursor reads, where only the long one is asked for', () => {
     const query = 's=h0:70,as:One&s=h0:71&frame=wide'
     const [brief, whole] = [question(`${query}&parts=long`), question(query)]
     expect(brief.canonical).not.toBe(whole.canonical)
     const answer = whole.answer()
-    expect(brief.answer()).toEqual(answer.ok && { ok: true, value: { ...answer.value, panel: null } })
+    const { long } = (answer.ok && answer.value) || { long: null }
+    expect(long?.figure.readings.places.length).toBeGreaterThan(100)
+    const without = { ...long, figure: { ...long?.figure, readings: { places: [], values: [] } } }
+    expect(brief.answer()).toEqual(answer.ok && { ok: true, value: { ...answer.value, long: without, panel: null } })
     expect(question(`${query}&parts=many`).canonical).toBe(whole.canonical)
   })
 

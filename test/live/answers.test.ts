@@ -47,13 +47,17 @@ async function page({ awake = false, loads = true } = {}) {
 
 it('leaves what is out of sight as it was', async () => {
   const { answers } = await page({ awake: true })
-  const whole = { ...viewOf('whole'), panel: { key: 'reach' } } as Explorer
+  const figured = (text: string, places: readonly number[]) =>
+    ({ title: text, long: { figure: { title: text, readings: { places } } } }) as unknown as Explorer
+  const whole = { ...figured('whole', [1, 2]), panel: { key: 'reach' } } as Explorer
   answers.want('a', true)
   answers.computed('a', whole)
   expect(answers.read().answer.view).toBe(whole)
   answers.want('b', true)
-  answers.computed('b', { ...viewOf('brief'), panel: null })
-  expect(answers.read().answer.view).toEqual({ title: 'brief', panel: whole.panel })
+  answers.computed('b', { ...figured('brief', []), panel: null })
+  const { title, long, panel } = answers.read().answer.view
+  expect([title, long.figure.title, panel]).toEqual(['brief', 'brief', whole.panel])
+  expect(long.figure.readings).toBe(whole.long.figure.readings)
 })
 
 describe('without a worker', () => {
