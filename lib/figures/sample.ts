@@ -16,8 +16,7 @@ export interface Ranges {
   readonly y: Range
 }
 
-/** Steps along a figure. */
-export const EVEN = 240
+const EVEN = 240
 const CROWDED = 28
 /** Part of the figure over which points crowd towards an origin or an ending. */
 const CROWD = 0.1
@@ -39,7 +38,8 @@ export function placesAlong(x: Range, special: readonly number[]): readonly numb
   const crowded = special.flatMap((place) => around(fractionOf(x, place)))
   const fractions = [...even, ...crowded].filter((part) => part >= 0 && part <= 1)
   const places = [...fractions.map((part) => valueAt(x, part)), ...special]
-  return [...new Set(places)].filter((place) => place >= x.from && place <= x.to).sort((one, other) => one - other)
+  const inside = new Set(places.filter((place) => place >= x.from && place <= x.to))
+  return [...Float64Array.from(inside).sort()]
 }
 
 /** Cubic steps: even steps of a where a goes like a root of the time. */
