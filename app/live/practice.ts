@@ -8,7 +8,7 @@ import { readQuery } from '../../lib/scenario/query'
 import { linkQuery } from '../../lib/scenario/write'
 
 /** So many questions, after which it gets no faster. */
-const ROUNDS = 100
+const ROUNDS = 300
 /** Golden section: its multiples, less whole numbers, never come close to each other. */
 const GOLDEN = 0.618034
 /** Nobody has asked anything for so long: a hand that drags asks more often. Milliseconds. */
@@ -39,14 +39,17 @@ export function practise(asked: string, put: (question: string) => void): Practi
   }
 }
 
-/** What is asked about scenarios, of which one has from half to three halves of its matter; null where they cannot be read. */
+/** As far as a hand goes along a slider: parts of what a scenario has. */
+const [LEAST, MOST] = [0.2, 2.2]
+
+/** What is asked about scenarios, of which one has less or more matter; null where they cannot be read. */
 export function nearby(asked: string, round: number): string | null {
   const pairs = new URLSearchParams(asked)
   const codes = pairs.getAll('s')
   const reading = readQuery(codes.length > 0 ? codes : DEMO.codes)
   if (!reading.ok) return null
   const changed = round % reading.value.length
-  const factor = 0.5 + (((round + 1) * GOLDEN) % 1)
+  const factor = LEAST + (MOST - LEAST) * (((round + 1) * GOLDEN) % 1)
   const scenarios = reading.value.map((one, i) => (i === changed ? { ...one, matter: one.matter * factor } : one))
   pairs.delete('s')
   return [linkQuery(scenarios), ...(pairs.size > 0 ? [pairs.toString()] : [])].join('&')
