@@ -1,5 +1,7 @@
 /** Which component dominates when, and when the expansion accelerates: stretches of time within a window. */
 import type { Contents, Era } from './contents'
+import { EVEN } from './sample'
+import { type Range, valueAt } from './scale'
 
 export interface Stretch<T> {
   readonly from: number
@@ -12,11 +14,13 @@ export interface Eras {
   readonly accelerating: readonly Stretch<true>[]
 }
 
+/** Shorter stretches than one of so many in a window can be missed; they could not be seen. Every other place is one of the curve's. */
+const SAMPLES = 2 * EVEN
 /** Halvings until a boundary is finer than a hundredth of a pixel. */
 const HALVINGS = 12
 
-/** At these times, ascending, from edge to edge of a window: stretches that lie between two of them are missed. */
-export function erasOf(contents: (time: number) => Contents | null, times: readonly number[]): Eras {
+export function erasOf(contents: (time: number) => Contents | null, x: Range): Eras {
+  const times = Array.from({ length: SAMPLES + 1 }, (_, i) => valueAt(x, i / SAMPLES))
   const dominant = stretches(times, (time) => contents(time)?.dominant ?? null)
   const accelerating = stretches(times, (time) => (contents(time)?.accelerating ? true : null))
   return { dominant, accelerating }

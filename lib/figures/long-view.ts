@@ -8,7 +8,7 @@ import { erasOf } from './eras'
 import { NO_READINGS, type Readings, readingsOf } from './readings'
 import { placesAlong, type Ranges, type Source, sampleCurve } from './sample'
 import { fine, linearRange, type Range } from './scale'
-import { type Entry, type Seen, type Wanted, windowOf } from './window'
+import { type Entry, type Wanted, type Window, windowOf } from './window'
 
 export type Drawn = Pick<Solution, 'scenario' | 'code' | 'label' | 'origin' | 'end' | 'measures' | 'moments'>
 
@@ -21,9 +21,8 @@ export function longView(entries: readonly Entry<Drawn>[], focus = 0, wanted?: W
   const { top, ...range } = window
   const ranges = { x: range, y: linearRange(0, top) }
   const solutions = entries.map(({ solution }) => solution)
-  const sources = entries.map((entry) => sourceOf(entry, range))
-  const curves = sources.map((source, slot) => curveOf(source, slot, slot === focus, ranges))
-  const ribbons = sources.flatMap(ribbonOf)
+  const curves = entries.map((entry, slot) => curveOf(entry, slot, slot === focus, ranges))
+  const ribbons = entries.flatMap((entry, slot) => ribbonOf(entry, slot, window))
   const hatched = solutions.some(({ scenario }) => extrapolates(scenario))
   return {
     title: 'The long view',
@@ -60,11 +59,9 @@ function specialTimes({ origin, end }: Pick<Drawn, 'origin' | 'end'>): number[] 
 }
 
 /** Samples of a history; where it begins and ends the scale factor is known without asking. */
-export function sourceOf<S extends Seen>(entry: Entry<S>, x: Range): Source & Entry<S> {
-  const { solution, scales } = entry
+export function sourceOf({ solution, scales }: Entry, x: Ranges['x']): Source {
   const known = new Map(boundary(solution))
   return {
-    ...entry,
     places: placesAlong(x, [0, ...specialTimes(solution)]),
     values: (times) => {
       const found = scales(times)
@@ -81,15 +78,15 @@ function boundary({ origin, end }: Pick<Drawn, 'origin' | 'end'>): [number, numb
   return points
 }
 
-function ribbonOf({ contents, solution, places }: Source & Entry<Drawn>, slot: number): Ribbon[] {
+function ribbonOf({ contents, solution }: Entry<Drawn>, slot: number, window: Window): Ribbon[] {
   if (!contents) return []
   const extrapolated = extrapolates(solution.scenario)
-  return [{ tone: `slot-${slot}`, dash: slot, eras: erasOf(contents, places), extrapolated }]
+  return [{ tone: `slot-${slot}`, dash: slot, eras: erasOf(contents, window), extrapolated }]
 }
 
-function curveOf(source: Source & Entry<Drawn>, slot: number, strong: boolean, ranges: Ranges): Curve {
-  const { solution } = source
-  const segments = sampleCurve(source, ranges)
+function curveOf(entry: Entry<Drawn>, slot: number, strong: boolean, ranges: Ranges): Curve {
+  const { solution } = entry
+  const segments = sampleCurve(sourceOf(entry, ranges.x), ranges)
   const asymptote = asymptoteOf(solution, ranges)
   return {
     tone: `slot-${slot}`,

@@ -16,7 +16,8 @@ export interface Ranges {
   readonly y: Range
 }
 
-const EVEN = 240
+/** Steps along a figure. */
+export const EVEN = 240
 const CROWDED = 28
 /** Part of the figure over which points crowd towards an origin or an ending. */
 const CROWD = 0.1
@@ -38,8 +39,7 @@ export function placesAlong(x: Range, special: readonly number[]): readonly numb
   const crowded = special.flatMap((place) => around(fractionOf(x, place)))
   const fractions = [...even, ...crowded].filter((part) => part >= 0 && part <= 1)
   const places = [...fractions.map((part) => valueAt(x, part)), ...special]
-  const inside = new Set(places.filter((place) => place >= x.from && place <= x.to))
-  return [...Float64Array.from(inside).sort()]
+  return [...new Set(places)].filter((place) => place >= x.from && place <= x.to).sort((one, other) => one - other)
 }
 
 /** Cubic steps: even steps of a where a goes like a root of the time. */
