@@ -11,6 +11,7 @@ import { type Packed, unpacked } from './live/packed'
 import { tellViewsSeen, useExplorer } from './live/use-explorer'
 import { useShownFrame } from './live/use-shown-frame'
 import { useStill } from './live/use-still'
+import { useUnhurried } from './live/use-unhurried'
 import { Figure } from './ui/figure'
 import { type Edition, Footer } from './ui/footer'
 import { Header } from './ui/header'
@@ -48,9 +49,9 @@ export function Explorer({ load, asked, children }: Props) {
   const address = useAddress()
   const frame = useShownFrame()
   const { view, desk, waiting, busy, trouble } = useExplorer(address, initial, asked, frame)
-  // The figure follows a hand at once, the rest as soon as there is time.
-  const later = useDeferredValue(view)
   const moving = address?.moving ?? false
+  // The figure follows a hand at once, the rest as soon as there is time, and while it drags as often as it can be read.
+  const later = useDeferredValue(useUnhurried(view, moving))
   // The ruler follows its own fields at once, and scenarios when the hand lets go.
   const dragged = useStill(desk.links.data, moving) !== desk.links.data
   const ruled = { desk: useStill(desk, dragged), address: useStill(address, dragged) }

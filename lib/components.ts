@@ -5,6 +5,7 @@ import type { Asymptote, Law, Part } from './dark-energy/law'
 import { energyRatio, energyRatioChange, logSlope, logSlopeDerivative } from './neutrinos/energy'
 import { relativeBend } from './numerics/bend'
 import { expm2 } from './numerics/exponential'
+import { listOf } from './numerics/list'
 import type { Budget } from './scenario/budget'
 import type { MassiveState } from './scenario/radiation'
 
@@ -79,7 +80,7 @@ export function componentsOf(amounts: Amounts, budget: Budget, law: Law): readon
     powerComponent('matter', amounts.matter, 3),
     powerComponent('curvature', amounts.curvature, 2),
     darkComponent(amounts.dark, law),
-    ...budget.states.map(neutrinoComponent),
+    ...listOf(budget.states, neutrinoComponent),
   ]
   return all.filter((one) => one.omega !== 0)
 }
@@ -146,7 +147,11 @@ const HOT_SQUARE = 5 / (7 * Math.PI ** 2)
  * I_n = ∫ x^n/(eˣ + 1) dx = n! (1 − 2^(−n)) ζ(n + 1): c_k = binomial(½, k) I_(2k+2)/I_2.
  */
 const COLD = 600
-const COLD_SERIES = [6.46970883252999, -49.54476700631098, 1394.940967821448]
+const COLD_SERIES = [
+  { size: 6.46970883252999, rate: 2 },
+  { size: -49.54476700631098, rate: 4 },
+  { size: 1394.940967821448, rate: 6 },
+]
 
 /** The exponent of a massive state falls from 4 to 3, since the logarithmic slope of its energy ratio rises from 0 to 1. */
 function neutrinoComponent(state: MassiveState): Component {
@@ -182,7 +187,7 @@ function neutrinoComponent(state: MassiveState): Component {
       exponent: 3,
       logCoefficient: logCold,
       settled: Math.log(COLD / state.y),
-      corrections: COLD_SERIES.map((one, k) => ({ size: one * state.y ** (-2 * (k + 1)), rate: 2 * (k + 1) })),
+      corrections: listOf(COLD_SERIES, ({ size, rate }) => ({ size: size * state.y ** -rate, rate })),
     },
   }
 }

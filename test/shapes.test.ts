@@ -54,6 +54,26 @@ test.each([
   for (const [name, part] of Object.entries(one)) expect.soft(alike(part, other[name]), name).toBe(true)
 })
 
+/** Enough for whoever makes a list to be optimized: `map` makes lists of another kind from then on. */
+const OPTIMIZED = 3000
+
+test('lists that loops read stay of one kind', () => {
+  const listsAt = (h0: number) => {
+    const { budget, history } = solve(read(`h0:${h0},matter:0.3`))
+    return [
+      budget.states,
+      history.past.model.components,
+      history.past.panels,
+      history.past.edges,
+      history.past.time.toEnd,
+    ]
+  }
+  const early = listsAt(70)
+  let late = early
+  for (let i = 0; i < OPTIMIZED; i++) late = listsAt(60 + 0.01 * i)
+  for (const [i, list] of early.entries()) expect.soft(alike(list, late[i]), `list ${i}`).toBe(true)
+})
+
 test('and it can be told', () => {
   expect(alike({ a: 1 }, { a: 2 })).toBe(true)
   expect(alike({ a: 1 }, { b: 2 })).toBe(false)

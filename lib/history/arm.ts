@@ -3,6 +3,7 @@
  * measured from today and from its far end, so that each keeps its own relative accuracy.
  */
 import type { Model } from '../model'
+import { listOf } from '../numerics/list'
 import { beyondPanels, type Stopped } from './beyond'
 import { type Panel, panelsOf, type Stretch } from './panels'
 import { stretchesOf } from './stretches'
@@ -56,7 +57,7 @@ export function armFrom(
   stopped: Stopped,
   begun: Tail | null = null,
 ): Arm {
-  const edges = [...panels.map((one) => one.zone.distanceAt(one.from)), lastEdge(panels)]
+  const edges = [...listOf(panels, (one) => one.zone.distanceAt(one.from)), lastEdge(panels)]
   const { tail, time, conformal } = beyondPanels(model, direction, end, stopped, lastEdge(panels), begun)
   return {
     model,
@@ -66,11 +67,11 @@ export function armFrom(
     edges,
     tail,
     time: sumsOf(
-      panels.map((one) => one.time),
+      listOf(panels, (one) => one.time),
       time,
     ),
     conformal: sumsOf(
-      panels.map((one) => one.conformal),
+      listOf(panels, (one) => one.conformal),
       conformal,
     ),
   }

@@ -1,5 +1,6 @@
 /** Which zones an arm is made of. */
 import { logarithmicIn, type Model } from '../model'
+import { listOf } from '../numerics/list'
 import { edgeTurningZone, edgeZone, staticZone } from './approach-zones'
 import { narrowZone } from './narrow-zone'
 import { plainZone } from './plain-zone'
@@ -41,12 +42,12 @@ function reachOf(end: Search): number {
 export function stretchesOf(model: Model, direction: Direction, end: Search): readonly Stretch[] {
   const reach = reachOf(end)
   const beginnings = beginningsOf(model, direction, end, reach)
-  const breaks = model.law.breaks.map((N) => direction * N).filter((m) => m > 0 && m < reach)
-  const cuts = [...new Set([...breaks, ...beginnings.map((one) => one.from), reach])].sort((a, b) => a - b)
+  const breaks = listOf(model.law.breaks, (N) => direction * N).filter((m) => m > 0 && m < reach)
+  const cuts = [...new Set([...breaks, ...listOf(beginnings, (one) => one.from), reach])].sort((a, b) => a - b)
   const runsOut = end.kind === 'none' || end.kind === 'singular'
   const edge = beginnings.find((one) => one.edge === 'edge')
   const lastBreak = Math.max(0, ...(edge ? [] : breaks))
-  return cuts.slice(1).map((to, i) => {
+  return listOf(cuts.slice(1), (to, i) => {
     const from = cuts[i]
     const begun = beginnings.reduce((last, one) => (one.from <= from ? one : last))
     return { zone: begun.zone(from, to), kind: begun.edge ?? (runsOut && from >= lastBreak ? 'last' : 'inner') }

@@ -1,6 +1,7 @@
 /** The instants at many values of a variable, block by block. */
 import type { Arm } from '../history/arm'
 import { type Event, isEvent } from '../history/event'
+import { listOf } from '../numerics/list'
 import { type Block, blockFrom } from './block'
 import { type ColumnSubject, eventAt, type Variable } from './instant'
 import type { Workspace } from './workspace'
@@ -81,7 +82,7 @@ function nextByScale(sheet: Sheet, first: number): Run {
 function placeInto(panel: Float64Array, s: Float64Array, N: Float64Array, arm: Arm, count: number): void {
   const { edges, panels } = arm
   const last = panels.length
-  const plain = panels.map(({ zone }) => zone.plain === true)
+  const plain = listOf(panels, ({ zone }) => zone.plain === true)
   let k = 0
   for (let i = 0; i < count; ) {
     let m = Math.abs(N[i])

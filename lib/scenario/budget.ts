@@ -1,4 +1,5 @@
 /** What the universe holds today: every Ω over the critical density, with sum 1. */
+import { listOf } from '../numerics/list'
 import { decimalsCancel, exactSum } from './exact-sum'
 import { type MassiveState, radiationBudget } from './radiation'
 import type { Scenario } from './scenario'
@@ -27,8 +28,8 @@ export interface Budget {
 export function budgetOf(scenario: Scenario): Budget {
   const { photons, masslessNeutrinos, states } = radiationBudget(scenario.radiation, scenario.h0)
   const { given, value } = scenario.closure
-  const weights = states.map((one) => one.density)
-  const cold = exactSum([scenario.matter, ...weights.map((one) => -one)])
+  const weights = listOf(states, (one) => one.density)
+  const cold = exactSum([scenario.matter, ...listOf(weights, (one) => -one)])
   const terms = [photons, masslessNeutrinos, scenario.matter, value]
   const typed = scenario.radiation.kind !== 'thermal'
   const closing = closingDensity(terms, typed)
@@ -52,7 +53,7 @@ export function budgetOf(scenario: Scenario): Budget {
  * 0.3 and 0.7) leave exactly nothing, though their doubles leave 1e-17, which would decide the far future.
  */
 function closingDensity(terms: readonly number[], typed: boolean): { readonly high: number; readonly low: number } {
-  const all = [1, ...terms.map((one) => -one)]
+  const all = [1, ...listOf(terms, (one) => -one)]
   const sum = exactSum(all)
   const negligible = Math.abs(sum.high) <= all.length * Number.EPSILON * Math.max(...all.map(Math.abs))
   return typed && negligible && decimalsCancel(all) ? { high: 0, low: 0 } : sum

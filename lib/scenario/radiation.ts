@@ -1,6 +1,7 @@
 /** Today's densities of photons and neutrinos over the critical density. */
 import { BOLTZMANN, ELECTRONVOLT, GRAVITATION, REDUCED_PLANCK, SPEED_OF_LIGHT } from '../constants'
 import { energyRatio } from '../neutrinos/energy'
+import { listOf } from '../numerics/list'
 import { perSecond } from '../units'
 import type { Radiation } from './scenario'
 
@@ -57,7 +58,7 @@ export function radiationBudget(radiation: Radiation, h0: number): RadiationBudg
   if (each === 0) return { photons, masslessNeutrinos: 0, states: NONE }
   const temperature = neutrinoTemperature(radiation.cmb, radiation.nu)
   const { masses } = radiation
-  const states = masses.length === 0 ? NONE : masses.map((mass) => massiveState(mass, temperature, each))
+  const states = masses.length === 0 ? NONE : listOf(masses, (mass) => massiveState(mass, temperature, each))
   return { photons, masslessNeutrinos: (STATES - states.length) * each, states }
 }
 
