@@ -53,19 +53,32 @@ const NEARLY_LINEAR = 0.07
 /** In a range of one's own the figure is as high as all but this part of it. */
 const CUT = 0.12
 const TRIED = 32
+const ROUND = [1, 2, 5, 10]
 const STEPS = 60
 
 export function windowOf(entries: readonly Entry[], wanted: Wanted = { time: null, from: null, to: null }): Window {
-  const past = Math.max(...entries.map(({ solution }) => pastOf(solution)))
+  const beginning = -outwards(MARGIN * Math.max(...entries.map(({ solution }) => pastOf(solution))))
+  const past = -beginning / MARGIN
   const scaling: Scaling = wanted.time === 'log' ? 'signed-log' : 'linear'
-  const future = futureOf(entries, past, wanted.time === 'log' ? FUTURE.log : FUTURE.linear)
+  const future = outwards(futureOf(entries, past, wanted.time === 'log' ? FUTURE.log : FUTURE.linear))
   const shape = { scaling, linear: 10 ** Math.round(Math.log10(NEARLY_LINEAR * past)) }
-  const [from, to] = [wanted.from ?? -past * MARGIN, wanted.to ?? future]
+  const [from, to] = [wanted.from ?? beginning, wanted.to ?? future]
   if (to <= from || (wanted.from === null && wanted.to === null)) {
-    const top = Math.max(LEAST_TOP, ...entries.map((entry) => topOf(entry, future)))
-    return { ...shape, from: -past * MARGIN, to: future, top }
+    const top = outwards(Math.max(LEAST_TOP, ...entries.map((entry) => topOf(entry, future))))
+    return { ...shape, from: beginning, to: future, top }
   }
   return { ...shape, from, to, top: topWithin(entries, from, to) }
+}
+
+/**
+ * The next of round numbers that lie two to five parts in a hundred apart: while one scenario changes, the axes stand still for a
+ * while and leave the others where they are.
+ */
+export function outwards(size: number): number {
+  const least = size / 50
+  const power = 10 ** Math.floor(Math.log10(least))
+  const step = power * (ROUND.find((one) => one * power >= least) ?? 10)
+  return Number((step * Math.ceil(size / step - 1e-9)).toPrecision(12))
 }
 
 function pastOf({ origin, measures }: Seen): number {

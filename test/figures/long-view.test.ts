@@ -7,7 +7,7 @@ import { LONG_FRAMES as FRAMES, type Frame, plotOf } from '../../lib/figures/plo
 import { sampleCurve } from '../../lib/figures/sample'
 import { linearRange } from '../../lib/figures/scale'
 import { serialize } from '../../lib/figures/svg'
-import { type Entry, type Window, windowOf } from '../../lib/figures/window'
+import { type Entry, outwards, type Window, windowOf } from '../../lib/figures/window'
 import * as universes from './universes'
 
 const { bounce, deSitter, einsteinDeSitter, flatLambda, milne, phantom, sinking } = universes
@@ -44,6 +44,26 @@ describe('the shared window', () => {
     expect(windowOf([far]).top).toBeLessThan(2 * (far.scales([windowOf([far]).to])[0] ?? 0))
     expect(longView([far]).curves[0]).toMatchObject({ note: expect.stringContaining('later: Big Crunch') })
   })
+
+  it('stands still while one scenario changes a little', () => {
+    const windows = Array.from({ length: 51 }, (_, i) => windowOf([sinking(), flatLambda(0.25 + 0.001 * i)]))
+    const different = new Set(windows.map(({ from, to, top }) => `${from} ${to} ${top}`))
+    // The age changes by a sixth, which is three to eight steps; the rest follows from it.
+    expect(different.size).toBeGreaterThan(1)
+    expect(different.size).toBeLessThan(10)
+  })
+
+  it.each([1e-7, 0.0123, 0.02, 1, 1.24999, 4.9, 5, 13.8, 14.51, 99.9, 113, 2.5e9])(
+    'goes out to round numbers: %f',
+    (size) => {
+      const out = outwards(size)
+      expect(out).toBeGreaterThanOrEqual(size)
+      expect(out).toBeLessThanOrEqual(1.05 * size)
+      // So that it does not go on growing.
+      expect(outwards(out)).toBe(out)
+      expect(String(Number(out.toPrecision(3)))).toBe(String(out))
+    },
+  )
 
   it('holds the turn of a crunch', () => {
     const { turnaround } = sinking().solution.end
