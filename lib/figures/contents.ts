@@ -1,16 +1,16 @@
-/** What a universe is made of at a time, and whether its expansion speeds up then. */
+/** What a universe is made of at a size, and whether its expansion speeds up then. */
 
 import type { Component } from '../components'
-import { type Event, type Found, isEvent } from '../history/event'
+import type { Arm } from '../history/arm'
 
 const ERAS = ['radiation', 'matter', 'curvature', 'dark energy'] as const
 
 export type Era = (typeof ERAS)[number]
 
-export interface Contents {
-  /** The component of the largest density, whatever its sign. */
-  readonly dominant: Era
-  readonly accelerating: boolean
+/** A size of a universe, on the run of its history where it has it. */
+export interface Size {
+  readonly arm: Arm
+  readonly N: number
 }
 
 /** Neutrinos count as radiation, as they do in the equality of matter and radiation. */
@@ -22,11 +22,8 @@ const ERA_OF: Readonly<Record<Component['key'], Era>> = {
   dark: 'dark energy',
 }
 
-/** Null where the history does not reach. */
-export const contentsOf = (event: Found): Contents | null =>
-  isEvent(event) ? { dominant: dominantAt(event), accelerating: accelerates(event) } : null
-
-function dominantAt({ place: { arm, N } }: Event): Era {
+/** The component of the largest density, whatever its sign. */
+export function dominantAt({ arm, N }: Size): Era {
   const { components } = arm.model
   const logs = components.map((one) => one.logSize(N))
   const largest = Math.max(...logs)
@@ -38,7 +35,7 @@ function dominantAt({ place: { arm, N } }: Event): Era {
 }
 
 /** ä/a = E² + ½ dE²/dN in units of H₀². */
-function accelerates({ place: { arm, N } }: Event): boolean {
+export function accelerates({ arm, N }: Size): boolean {
   const { value, first } = arm.model.derivatives(N)
   return value + first / 2 > 0
 }

@@ -1,12 +1,14 @@
 /** What the long view asks of a solution, each time only once: a figure asks for the same times again while it is dragged. */
 import { isEvent } from '../history/event'
 import { eventAtGyr, type Solution } from '../solve'
-import { contentsOf } from './contents'
+import { courseOf, told } from './course'
+import { erasOf } from './eras'
 import { remembered } from './remembered'
 import type { Entry } from './window'
 
 export function entryOf(solution: Solution): Entry<Solution> {
   const eventAt = remembered((time) => eventAtGyr(solution, time))
+  const course = courseOf(solution, eventAt)
   const scaleAt = (time: number) => {
     const event = eventAt(time)
     return isEvent(event) ? Math.exp(event.place.N) : null
@@ -14,6 +16,6 @@ export function entryOf(solution: Solution): Entry<Solution> {
   return {
     solution,
     scales: (times) => times.map(scaleAt),
-    contents: remembered((time) => contentsOf(eventAt(time))),
+    eras: (x) => erasOf(course, told, x),
   }
 }

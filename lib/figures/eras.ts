@@ -1,5 +1,5 @@
 /** Which component dominates when, and when the expansion accelerates: stretches of time within a window. */
-import type { Contents, Era } from './contents'
+import type { Era } from './contents'
 import { EVEN } from './sample'
 import { type Range, valueAt } from './scale'
 
@@ -14,41 +14,76 @@ export interface Eras {
   readonly accelerating: readonly Stretch<true>[]
 }
 
-/** Shorter stretches than one of so many in a window can be missed; they could not be seen. Every other place is one of the curve's. */
-const SAMPLES = 2 * EVEN
-/** Halvings until a boundary is finer than a hundredth of a pixel. */
-const HALVINGS = 12
+/** A history as places in the order of time. */
+export interface Course<Place> {
+  readonly at: (time: number) => Place
+  readonly timeOf: (place: Place) => number
+  /** A place between two; by what is at hand, so it need not be the middle of their times. */
+  readonly between: (one: Place, other: Place) => Place
+}
 
-export function erasOf(contents: (time: number) => Contents | null, x: Range): Eras {
-  const times = Array.from({ length: SAMPLES + 1 }, (_, i) => valueAt(x, i / SAMPLES))
-  const dominant = stretches(times, (time) => contents(time)?.dominant ?? null)
-  const accelerating = stretches(times, (time) => (contents(time)?.accelerating ? true : null))
-  return { dominant, accelerating }
+/** What is told of a place; null where there is nothing to tell. */
+export interface Told<Place> {
+  readonly dominant: (place: Place) => Era | null
+  readonly accelerating: (place: Place) => true | null
+}
+
+/** Halvings until a boundary is finer than a hundredth of a pixel. */
+const HALVINGS = 14
+
+/** What is shorter than half a step of the curve can be missed; it could not be seen. */
+export function erasOf<Place>(course: Course<Place>, { dominant, accelerating }: Told<Place>, x: Range): Eras {
+  const places = placesOf(course, x)
+  return { dominant: stretches(course, places, dominant), accelerating: stretches(course, places, accelerating) }
+}
+
+/** At the even steps of the curve, which are known already, and between any two of them. */
+function placesOf<Place>({ at, between }: Course<Place>, x: Range): readonly Place[] {
+  const places = [at(valueAt(x, 0))]
+  for (let i = 1; i <= EVEN; i++) {
+    const next = at(valueAt(x, i / EVEN))
+    places.push(between(places[places.length - 1] as Place, next), next)
+  }
+  return places
 }
 
 /** Maximal stretches of one value; null is no value. */
-export function stretches<T>(times: readonly number[], valueAt: (time: number) => T | null): Stretch<T>[] {
+export function stretches<T, Place>(
+  course: Course<Place>,
+  places: readonly Place[],
+  valueAt: (place: Place) => T | null,
+): Stretch<T>[] {
   const found: Stretch<T>[] = []
-  let start = times[0] ?? 0
-  let value = valueAt(start)
-  times.slice(1).forEach((time, i) => {
-    const next = valueAt(time)
-    const last = i === times.length - 2
-    if (next === value && !last) return
-    const end = next === value ? time : boundary(times[i] ?? start, time, value, valueAt)
-    if (value !== null && end > start) found.push({ from: start, to: end, value })
-    start = end
+  let [before] = places as readonly [Place]
+  let start = before
+  let value = valueAt(before)
+  const end = (to: Place) => {
+    const [one, other] = [course.timeOf(start), course.timeOf(to)]
+    if (value !== null && other > one) found.push({ from: one, to: other, value })
+    start = to
+  }
+  for (const place of places) {
+    const next = valueAt(place)
+    if (next !== value) end(boundary(course, before, place, value, valueAt))
     value = next
-  })
+    before = place
+  }
+  end(before)
   return found
 }
 
-function boundary<T>(from: number, to: number, value: T | null, valueAt: (time: number) => T | null): number {
+function boundary<T, Place>(
+  { between }: Course<Place>,
+  from: Place,
+  to: Place,
+  value: T | null,
+  valueAt: (place: Place) => T | null,
+): Place {
   let [low, high] = [from, to]
   for (let i = 0; i < HALVINGS; i++) {
-    const middle = (low + high) / 2
+    const middle = between(low, high)
     if (valueAt(middle) === value) low = middle
     else high = middle
   }
-  return (low + high) / 2
+  return between(low, high)
 }

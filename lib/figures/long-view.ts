@@ -4,7 +4,6 @@ import { extrapolates } from '../words/beyond'
 import { END_NAMES, endLabel, endsInTime } from '../words/ending'
 import { longViewCaption, longViewText } from './caption'
 import type { Chart, Curve, Mark, Ribbon } from './chart'
-import { erasOf } from './eras'
 import { NO_READINGS, type Readings, readingsOf } from './readings'
 import { placesAlong, type Ranges, type Source, sampleCurve } from './sample'
 import { fine, linearRange, type Range } from './scale'
@@ -78,10 +77,10 @@ function boundary({ origin, end }: Pick<Drawn, 'origin' | 'end'>): [number, numb
   return points
 }
 
-function ribbonOf({ contents, solution }: Entry<Drawn>, slot: number, window: Window): Ribbon[] {
-  if (!contents) return []
+function ribbonOf({ eras, solution }: Entry<Drawn>, slot: number, window: Window): Ribbon[] {
+  if (!eras) return []
   const extrapolated = extrapolates(solution.scenario)
-  return [{ tone: `slot-${slot}`, dash: slot, eras: erasOf(contents, window), extrapolated }]
+  return [{ tone: `slot-${slot}`, dash: slot, eras: eras(window), extrapolated }]
 }
 
 function curveOf(entry: Entry<Drawn>, slot: number, strong: boolean, ranges: Ranges): Curve {

@@ -1,6 +1,6 @@
 /** The shared window of several histories: every origin, every turn and ending that falls within reason, else what is seen of the rest. */
 import type { Solution } from '../solve'
-import type { Contents } from './contents'
+import type { Eras } from './eras'
 import type { Range, Scaling } from './scale'
 
 export type Seen = Pick<Solution, 'origin' | 'end' | 'measures'>
@@ -10,8 +10,8 @@ export type Scales = (times: readonly number[]) => readonly (number | null)[]
 export interface Entry<S extends Seen = Seen> {
   readonly solution: S
   readonly scales: Scales
-  /** What dominates at a time; absent where nobody knows. */
-  readonly contents?: (time: number) => Contents | null
+  /** What dominates when; absent where nobody knows. */
+  readonly eras?: (x: Range) => Eras
 }
 
 /** Times in Gyr from now. */

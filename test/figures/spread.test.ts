@@ -27,9 +27,11 @@ it('measures text by the font: advance widths of H, i and the space in Source Sa
 
 it('finds stretches of one value with their boundaries', () => {
   const sign = (t: number) => (t < 0.3 ? null : t < 1.25 ? 'low' : 'high')
-  const found = stretches([0, 0.5, 1, 1.5, 2], sign)
+  const same = (t: number) => t
+  const course = { at: same, timeOf: same, between: (one: number, other: number) => (one + other) / 2 }
+  const found = stretches(course, [0, 0.5, 1, 1.5, 2], sign)
   expect(found.map(({ value }) => value)).toEqual(['low', 'high'])
-  // 12 halvings of a step of 0.5
+  // 14 halvings of a step of 0.5
   expect(found[0]?.from).toBeCloseTo(0.3, 3)
   expect(found[0]?.to).toBeCloseTo(1.25, 3)
   expect(found[1]?.to).toBe(2)
