@@ -1,5 +1,5 @@
 import { createElement, type ReactNode } from 'react'
-import type { SvgNode } from '../../lib/figures/svg'
+import type { Attributes, SvgNode } from '../../lib/figures/svg'
 
 /** A drawing as elements of the page. */
 export function Drawing({ node }: { readonly node: SvgNode }): ReactNode {
@@ -8,9 +8,12 @@ export function Drawing({ node }: { readonly node: SvgNode }): ReactNode {
 
 function render(node: SvgNode | string, key: number): ReactNode {
   if (typeof node === 'string') return node
-  const attributes = Object.entries(node.attributes).map(([name, value]) => [propertyOf(name), value])
-  return createElement(node.tag, { key, ...Object.fromEntries(attributes) }, ...node.children.map(render))
+  return createElement(node.tag, { key, ...propertiesOf(node.attributes) }, ...node.children.map(render))
 }
+
+/** As React names them. */
+export const propertiesOf = (attributes: Attributes): Attributes =>
+  Object.fromEntries(Object.entries(attributes).map(([name, value]) => [propertyOf(name), value]))
 
 /** React's names of attributes: `stroke-width` is `strokeWidth`; those of ARIA stay. */
 function propertyOf(name: string): string {

@@ -1,6 +1,7 @@
 import { memo, useState } from 'react'
 import type { Picture, Shown } from '../../lib/figures/picture'
 import { Cursor } from './cursor'
+import { propertiesOf } from './drawing'
 
 interface Props {
   readonly figure: Shown
@@ -31,14 +32,26 @@ const Sheet = memo(function Sheet({ figure, picture, box, live, ...rest }: Sheet
   const tone = lit === null ? undefined : figure.curves[lit]?.tone
   return (
     <div className={`${box} ${picture.frame}`} data-lit={lit ?? undefined} data-tone={tone}>
-      <Drawn markup={picture.markup} />
+      <Drawn picture={picture} />
       {live && <Cursor figure={figure} picture={picture} lit={lit} light={light} {...rest} />}
     </div>
   )
 })
 
-/** As text the browser reads it at once, and there is nothing in it for React to look after. */
-const Drawn = memo(function Drawn({ markup }: { readonly markup: string }) {
+function Drawn({ picture: { attributes, parts } }: { readonly picture: Picture }) {
+  return (
+    // biome-ignore lint/a11y/noSvgWithoutTitle: its attributes say what it shows
+    <svg {...propertiesOf(attributes)}>
+      {parts.map((markup, i) => (
+        // biome-ignore lint/suspicious/noArrayIndexKey: they have no names, and their order stays
+        <Part key={i} markup={markup} />
+      ))}
+    </svg>
+  )
+}
+
+/** As text the browser reads it at once, and there is nothing in it for React to look after. What stays the same it leaves alone. */
+const Part = memo(function Part({ markup }: { readonly markup: string }) {
   // biome-ignore lint/security/noDangerouslySetInnerHtml: our own drawing, in which every text is escaped
-  return <div dangerouslySetInnerHTML={{ __html: markup }} />
+  return <g dangerouslySetInnerHTML={{ __html: markup }} />
 })

@@ -18,16 +18,18 @@ export const SMALL = 0.9
 type Axes = Pick<Chart, 'x' | 'y' | 'now' | 'references'>
 
 /** `inRow`: the title of the horizontal axis stands beside the ticks, else below them. */
-export function drawAxes(chart: Axes, plot: Plot, frame: Frame, inRow: boolean): SvgNode[] {
+export function drawAxes(chart: Axes, plot: Plot, frame: Frame, inRow: boolean): SvgNode {
   const size = px(frame.type * SMALL)
-  return [
+  return svg(
+    'g',
+    {},
     ...upright(chart.y, plot, frame, size),
     ...chart.references.map((one) => reference(one, plot)),
     ...level(chart, plot, frame, size),
     svg('text', { ...headOf(frame, plot), 'font-size': size, class: 'axis' }, ...titleOf(chart.y, size)),
     title(chart.x, plot, frame, size, inRow),
     ...today(chart.now, chart.x, plot),
-  ]
+  )
 }
 
 /** Where the title of the vertical axis begins: on a phone above its ticks, and clear of the highest of them. */

@@ -25,7 +25,7 @@ export function drawChart(chart: Chart, frame: Frame, className = ''): SvgNode {
       'aria-label': chart.alternative,
     },
     ...ground(chart, plot, frame),
-    ...drawAxes(chart, plot, frame, titleInRow(chart, frame)),
+    drawAxes(chart, plot, frame, titleInRow(chart, frame)),
     ...inOrder(chart.curves).map((curve) => drawCurve(curve, plot, frame)),
     ...drawRibbons(chart, plot, frame),
     ...chart.spots.map((spot) => drawSpot(spot, plot, frame)),

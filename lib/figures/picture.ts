@@ -3,7 +3,7 @@ import type { Axis, Chart } from './chart'
 import { drawChart, heightOfChart, plotOfChart } from './draw-chart'
 import type { Edges, Frame } from './plot'
 import type { Readings } from './readings'
-import { serialize } from './svg'
+import { type Attributes, serialize } from './svg'
 
 export interface Picture {
   /** Id of the frame. */
@@ -12,8 +12,10 @@ export interface Picture {
   readonly height: number
   /** Of the plot within the drawing. */
   readonly plot: Edges
-  /** The drawing as text, with nothing in it that a person typed unescaped. */
-  readonly markup: string
+  /** Of the drawing's own element. */
+  readonly attributes: Attributes
+  /** What is in it, as text with nothing in it that a person typed unescaped: apart, since one change leaves most as they are. */
+  readonly parts: readonly string[]
 }
 
 export interface Shown {
@@ -46,12 +48,14 @@ export function shownOf(chart: Chart, frames: readonly Frame[], prefix: string, 
 
 function pictureOf(chart: Chart, frame: Frame, prefix: string, className: string): Picture {
   const { left, right, top, bottom } = plotOfChart(chart, frame)
+  const { attributes, children } = drawChart(chart, { ...frame, id: `${prefix}-${frame.id}` }, className)
   return {
     frame: frame.id,
     width: frame.width,
     height: heightOfChart(chart, frame),
     plot: { left, right, top, bottom },
-    markup: apostrophes(serialize(drawChart(chart, { ...frame, id: `${prefix}-${frame.id}` }, className))),
+    attributes,
+    parts: children.map((one) => apostrophes(serialize(one))),
   }
 }
 

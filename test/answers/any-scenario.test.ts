@@ -54,7 +54,7 @@ it('shows every legal scenario in every view', { timeout: 240_000 }, () => {
       expect(JSON.stringify(words)).not.toMatch(/NaN|undefined|Infinity/)
       expect(JSON.stringify([panel.notes, panel.tabs, panel.choices])).not.toMatch(/NaN|undefined|Infinity/)
       for (const { pictures } of [long.figure, panel.figure])
-        for (const { markup } of pictures) expect(markup).not.toMatch(/NaN|undefined|Infinity/)
+        for (const { parts } of pictures) expect(parts.join('')).not.toMatch(/NaN|undefined|Infinity/)
       for (const { x, y } of [long.figure, panel.figure])
         for (const { from, to } of [x, y]) expect(to).toBeGreaterThan(from)
       expect(long.figure.curves).toHaveLength(view.scenarios.length)
