@@ -2,11 +2,11 @@
 import { TODAY } from '../model'
 import { solveIncreasing } from '../numerics/chebyshev'
 import { gaussLegendre } from '../numerics/gauss-legendre'
-import { brent } from '../numerics/roots'
+import { brent, newton } from '../numerics/roots'
 import type { Arm } from './arm'
 import { within } from './panels'
 import type { Clock, Tail } from './tail'
-import { elapsedIn, remainingIn } from './tail-integral'
+import { elapsedIn, reachedIn, remainingIn } from './tail-integral'
 import { FARTHEST } from './turning'
 
 /** A place on an arm: s is the variable of its panel's zone, or the distance into the tail beyond the last panel. */
@@ -53,11 +53,12 @@ export function fromToday(place: Place, clock: Clock): number {
 /** The same by Gauss's rule on [0, m], where E² is formed from today's exact 1. */
 export function nearToday(arm: Arm, m: number, clock: Clock): number {
   if (m === 0) return 0
-  const integrand = (s: number) => {
-    const N = arm.direction * s
-    return (clock === 'time' ? 1 : Math.exp(-N)) / Math.sqrt(arm.model.expansionFrom(TODAY, N))
-  }
-  return gaussLegendre(integrand, 0, m)
+  return gaussLegendre((s) => nearIntegrand(arm, s, clock), 0, m)
+}
+
+function nearIntegrand({ model, direction }: Arm, m: number, clock: Clock): number {
+  const N = direction * m
+  return (clock === 'time' ? 1 : Math.exp(-N)) / Math.sqrt(model.expansionFrom(TODAY, N))
 }
 
 /** ∫ from the place to the end of the arm; Infinity where it diverges. */
@@ -79,12 +80,12 @@ export function placeElapsed(arm: Arm, clock: Clock, value: number): Place | nul
   const ends = arm.tail === null && Number.isFinite(sums.total)
   const panel = ends ? Math.min(holding, arm.panels.length - 1) : holding
   if (panel === arm.panels.length) {
-    return placeInTail(arm, clock, (tail, D) => elapsedIn(tail, D) - (value - sums.fromToday[panel]))
+    const left = value - sums.fromToday[panel]
+    return placeAtOnce(arm, clock, left) ?? placeInTail(arm, clock, (tail, D) => elapsedIn(tail, D) - left)
   }
   if (panel === 0) {
     const { s, [clock]: reached } = nearOf(arm)
-    const direct = (x: number) => fromToday(placeOf(arm, 0, x), clock) - value
-    if (reached > value) return placeOf(arm, 0, brent(direct, arm.panels[0].from, s))
+    if (reached > value) return placeNear(arm, clock, value) ?? placeBracketed(arm, clock, value, s)
   }
   return placeInPanel(arm, panel, clock, value - sums.fromToday[panel])
 }
@@ -104,6 +105,19 @@ function nearOf(arm: Arm): Near {
   const near = { s, time: fromToday(place, 'time'), conformal: fromToday(place, 'conformal') }
   nearPlaces.set(arm, near)
   return near
+}
+
+/** Where today's integral has this value; null where Newton's steps, which begin with E = 1, do not lead there. */
+function placeNear(arm: Arm, clock: Clock, value: number): Place | null {
+  const m = newton((at) => (nearToday(arm, at, clock) - value) / nearIntegrand(arm, at, clock), value)
+  // Now may come as −0.
+  return m !== null && m >= 0 && m < NEAR_TODAY * arm.edges[1] ? placeAt(arm, Math.abs(m)) : null
+}
+
+/** The same between today and s. */
+function placeBracketed(arm: Arm, clock: Clock, value: number, s: number): Place {
+  const direct = (x: number) => fromToday(placeOf(arm, 0, x), clock) - value
+  return placeOf(arm, 0, brent(direct, arm.panels[0].from, s))
 }
 
 /** Where the integral to the end has this value, which keeps its relative accuracy near the end; null where there is none. */
@@ -128,6 +142,15 @@ function placeInPanel(arm: Arm, panel: number, clock: Clock, value: number): Pla
   const { from, to, [clock]: stretch } = arm.panels[panel]
   const x = solveIncreasing(stretch.series, value)
   return placeOf(arm, panel, from + ((x + 1) / 2) * (to - from))
+}
+
+/** In the tail, where its closed form can be turned round; null elsewhere. */
+function placeAtOnce(arm: Arm, clock: Clock, elapsed: number): Place | null {
+  const panel = arm.panels.length
+  if (arm.tail === null || arm.end.kind === 'double') return null
+  const D = reachedIn(arm.tail[clock], elapsed)
+  if (D === null || !(D >= 0 && D <= FARTHEST - arm.edges[panel])) return null
+  return { arm, N: arm.direction * (arm.edges[panel] + D), panel, s: D }
 }
 
 /** Beyond the last panel; at a static state for ever where the arm leads there. */

@@ -1,4 +1,4 @@
-/** The root of one equation in one unknown, bracketed, so that an answer always exists. */
+/** The root of one equation in one unknown: bracketed, so that an answer always exists, or from nearby, which is sooner there. */
 
 /** Root of f in [from, to], where f changes sign, by Brent's method (Brent 1973, ch. 4), to 2 eps |x| or the noise of f. */
 export function brent(f: (x: number) => number, from: number, to: number): number {
@@ -35,6 +35,24 @@ export function brent(f: (x: number) => number, from: number, to: number): numbe
     fb = f(b)
   }
   return b
+}
+
+/** A step this small against its place is the last: the next would be its square. */
+const LAST_STEP = 1e-9
+const STEPS = 8
+
+/**
+ * Root of a smooth function from a start nearby, by Newton's method: `step` is f/f′. To the noise of that, or null where the steps do
+ * not shrink at once.
+ */
+export function newton(step: (x: number) => number, start: number): number | null {
+  let x = start
+  for (let i = 0; i < STEPS; i++) {
+    const change = step(x)
+    x -= change
+    if (Math.abs(change) <= LAST_STEP * Math.abs(x)) return x
+  }
+  return null
 }
 
 /** Brent's step p/q: the secant through two points, or inverse quadratic interpolation through three; p ≥ 0. */

@@ -1,6 +1,6 @@
 /** Bracketed roots of equations whose roots are closed forms. */
 import { expect, test } from 'vitest'
-import { brent } from '../../lib/numerics/roots'
+import { brent, newton } from '../../lib/numerics/roots'
 
 const EPS = Number.EPSILON
 
@@ -44,3 +44,17 @@ test('Brent is quick on smooth functions', () => {
   // Superlinear: bisection would take 53.
   expect(calls).toBeLessThan(14)
 })
+
+test.each([
+  ['x² = 2', (x: number) => (x * x - 2) / (2 * x), 1.4, Math.SQRT2],
+  ['cos x = x', (x: number) => (x - Math.cos(x)) / (1 + Math.sin(x)), 0.7, 0.7390851332151607],
+  ['x = 0', (x: number) => x, 0, 0],
+])('Newton: %s', (_, step, start, root) => {
+  const found = newton(step, start)
+  expect(Math.abs((found ?? Number.NaN) - root)).toBeLessThanOrEqual(2 * EPS * root)
+})
+
+test.each([
+  ['runs away from a root of x/(1 + x²)', (x: number) => (x * (1 + x * x)) / (1 - x * x), 2],
+  ['is no number', () => Number.NaN, 1],
+])('Newton gives none where it %s', (_, step, start) => expect(newton(step, start)).toBeNull())
