@@ -5,17 +5,22 @@ import { useSyncExternalStore } from 'react'
 const WIDEST = { narrow: '(max-width: 600px)', middle: '(max-width: 1020px)' }
 
 export function useShownFrame(): string | null {
-  return useSyncExternalStore(
-    watchWidth,
-    () => Object.entries(WIDEST).find(([, query]) => matchMedia(query).matches)?.[0] ?? 'wide',
-    () => null,
-  )
+  return useSyncExternalStore(watchWidth, shownFrame, () => null)
 }
 
+let lists: readonly (readonly [string, MediaQueryList])[] | null = null
+
+/** Asked for with every drawing of the page, and slow to be made. */
+function widths() {
+  lists ??= Object.entries(WIDEST).map(([frame, query]) => [frame, matchMedia(query)] as const)
+  return lists
+}
+
+const shownFrame = () => widths().find(([, list]) => list.matches)?.[0] ?? 'wide'
+
 function watchWidth(changed: () => void): () => void {
-  const lists = Object.values(WIDEST).map((query) => matchMedia(query))
-  for (const list of lists) list.addEventListener('change', changed)
+  for (const [, list] of widths()) list.addEventListener('change', changed)
   return () => {
-    for (const list of lists) list.removeEventListener('change', changed)
+    for (const [, list] of widths()) list.removeEventListener('change', changed)
   }
 }

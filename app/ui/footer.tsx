@@ -1,3 +1,4 @@
+import { memo } from 'react'
 import { type Theme, themed } from '../../lib/words/place'
 
 export interface Edition {
@@ -11,7 +12,7 @@ interface Props {
   readonly edition: Edition
 }
 
-export function Footer({ data, edition, theme }: Props) {
+export const Footer = memo(function Footer({ data, edition, theme }: Props) {
   return (
     <footer className="colophon">
       <p>
@@ -33,7 +34,7 @@ export function Footer({ data, edition, theme }: Props) {
       {data && <p className="codes">Scenarios: {codesIn(data).join('; ')}</p>}
     </footer>
   )
-}
+})
 
 /** On paper alone, which has no address. */
 const codesIn = (data: string): readonly string[] => new URLSearchParams(data.split('?')[1]).getAll('s')

@@ -10,7 +10,7 @@ import { Sentence, Symbols } from './symbol'
 
 interface Props {
   readonly desk: Desk
-  /** The same, but for the middle of a gesture: what it was before. Links need not follow every turn of a slider. */
+  /** The same, but for the middle of a gesture: what it was before. Links, and what is sent unseen, need not follow every turn of a slider. */
   readonly still: Desk
   readonly sets: readonly ShelvedSet[]
   /** Until then a plain form, which asks for the page that its fields spell. */
@@ -19,7 +19,7 @@ interface Props {
 
 /** The parameters of the scenario in focus; the others travel along unseen. */
 export const Ingredients = memo(function Ingredients({ desk, still, sets, live }: Props) {
-  const { form, scenarios, place, placeFields } = desk
+  const { form, place, placeFields } = desk
   const editing = useEditing(desk)
   return (
     <section className="ingredients" aria-labelledby="ingredients">
@@ -35,7 +35,7 @@ export const Ingredients = memo(function Ingredients({ desk, still, sets, live }
         className={`slot-${place.focus}`}
         onSubmit={(event) => event.preventDefault()}
       >
-        {scenarios.map((one) => (
+        {still.scenarios.map((one) => (
           <input key={one.slot} type="hidden" name="s" value={one.plainCode} />
         ))}
         {placeFields.map(([key, value]) => (

@@ -1,4 +1,4 @@
-import { lazy, Suspense, useEffect, useMemo, useRef, useState } from 'react'
+import { lazy, memo, Suspense, useEffect, useMemo, useRef, useState } from 'react'
 import type { Choice, TakeAwayLists } from '../../lib/answers/take-away'
 import { frameHtml } from '../../lib/formats/frame'
 import type { Desk } from '../../lib/words/desk'
@@ -16,7 +16,7 @@ interface Props {
 const Words = lazy(() => import('./take-away-fetched'))
 
 /** Files, links and words of what is shown. Without scripts all of it is links. */
-export function TakeAway({ desk, lists, version, live }: Props) {
+export const TakeAway = memo(function TakeAway({ desk, lists, version, live }: Props) {
   const query = queryOf(desk)
   const theme = desk.place.theme === 'night' ? '&theme=night' : ''
   const figures = figuresOf(desk.place, lists)
@@ -86,7 +86,7 @@ export function TakeAway({ desk, lists, version, live }: Props) {
       </details>
     </section>
   )
-}
+})
 
 /** Whether it is open, also where it was opened before the page came alive. */
 function useOpen() {
