@@ -1,5 +1,5 @@
 /** What a cursor over a figure reads: every curve at the same places along the horizontal axis. */
-import { type Range, valueAt } from './scale'
+import { fractionOf, type Range, valueAt } from './scale'
 
 export interface Readings {
   /** Values of the horizontal quantity, ascending. */
@@ -14,9 +14,16 @@ type Values = (places: readonly number[]) => readonly (number | null)[]
 
 /** Together with now and three special places of each of six scenarios: 300 at most. */
 const STEPS = 279
+/** Nearer to a special place than this part of a step there is no other: a hand that steps along should see something change. */
+const LEAST_STEP = 0.5
 
 export function readingsOf(curves: readonly Values[], x: Range, special: readonly number[], steps = STEPS): Readings {
-  const even = Array.from({ length: steps + 1 }, (_, i) => valueAt(x, i / steps))
+  const parts = special.map((place) => fractionOf(x, place))
+  const isApart = (part: number) =>
+    part === 0 || part === 1 || parts.every((one) => !(Math.abs(one - part) < LEAST_STEP / steps))
+  const even = Array.from({ length: steps + 1 }, (_, i) => i / steps)
+    .filter(isApart)
+    .map((part) => valueAt(x, part))
   const inside = [...even, ...special].filter((place) => place >= x.from && place <= x.to)
   const places = [...new Set(inside.map((place) => digits(place, 7)))].sort((one, other) => one - other)
   return {

@@ -6,7 +6,7 @@ import { brent, newton } from '../numerics/roots'
 import type { Arm } from './arm'
 import { within } from './panels'
 import type { Clock, Tail } from './tail'
-import { elapsedIn, reachedIn, remainingIn } from './tail-integral'
+import { elapsedIn, remainingIn } from './tail-integral'
 import { FARTHEST } from './turning'
 
 /** A place on an arm: s is the variable of its panel's zone, or the distance into the tail beyond the last panel. */
@@ -80,8 +80,7 @@ export function placeElapsed(arm: Arm, clock: Clock, value: number): Place | nul
   const ends = arm.tail === null && Number.isFinite(sums.total)
   const panel = ends ? Math.min(holding, arm.panels.length - 1) : holding
   if (panel === arm.panels.length) {
-    const left = value - sums.fromToday[panel]
-    return placeAtOnce(arm, clock, left) ?? placeInTail(arm, clock, (tail, D) => elapsedIn(tail, D) - left)
+    return placeInTail(arm, clock, (tail, D) => elapsedIn(tail, D) - (value - sums.fromToday[panel]))
   }
   if (panel === 0) {
     const { s, [clock]: reached } = nearOf(arm)
@@ -142,15 +141,6 @@ function placeInPanel(arm: Arm, panel: number, clock: Clock, value: number): Pla
   const { from, to, [clock]: stretch } = arm.panels[panel]
   const x = solveIncreasing(stretch.series, value)
   return placeOf(arm, panel, from + ((x + 1) / 2) * (to - from))
-}
-
-/** In the tail, where its closed form can be turned round; null elsewhere. */
-function placeAtOnce(arm: Arm, clock: Clock, elapsed: number): Place | null {
-  const panel = arm.panels.length
-  if (arm.tail === null || arm.end.kind === 'double') return null
-  const D = reachedIn(arm.tail[clock], elapsed)
-  if (D === null || !(D >= 0 && D <= FARTHEST - arm.edges[panel])) return null
-  return { arm, N: arm.direction * (arm.edges[panel] + D), panel, s: D }
 }
 
 /** Beyond the last panel; at a static state for ever where the arm leads there. */

@@ -1,5 +1,4 @@
 /** The integrals of a tail, in closed form. */
-import { newton } from '../numerics/roots'
 import { integralOfExp } from './far'
 
 export type TailIntegral = PowerIntegral | SlowIntegral
@@ -40,20 +39,6 @@ export function elapsedIn(integral: TailIntegral, D: number): number {
 }
 
 const elapsedTerm = (kappa: number, D: number): number => (kappa === 0 ? D : -Math.expm1(-kappa * D) / kappa)
-
-/** Where the integral from the beginning has this value, by Newton's method; null where that does not lead there at once. */
-export function reachedIn(integral: TailIntegral, value: number): number | null {
-  if (integral.kind === 'slow') return null
-  const { kappa, terms, scale } = integral
-  const leading = value / scale
-  const start = kappa === 0 ? leading : -Math.log1p(-kappa * leading) / kappa
-  const rate = (D: number): number => {
-    let sum = Math.exp(-kappa * D)
-    for (const { size, rate } of terms) sum += size * Math.exp(-(kappa + rate) * D)
-    return scale * sum
-  }
-  return newton((D) => (elapsedIn(integral, D) - value) / rate(D), start)
-}
 
 /** ∫ from D out to infinity; Infinity where it diverges. */
 export function remainingIn(integral: TailIntegral, D: number): number {

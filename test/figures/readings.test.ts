@@ -18,6 +18,13 @@ describe('what the cursor reads', () => {
     for (const time of [crunch.time, crunch.turnaround?.time]) expect(times).toContain(Number(time?.toPrecision(7)))
   })
 
+  it('has nothing else within half a step of now', () => {
+    const { places } = readings
+    const now = places.indexOf(0)
+    const step = (x.to - x.from) / 279
+    for (const beside of [places[now - 1], places[now + 1]]) expect(Math.abs(beside ?? 0)).toBeGreaterThan(0.499 * step)
+  })
+
   it.each(SIX.map(({ solution, scales }, slot) => [solution.label, slot, scales] as const))(
     '%s is its closed form',
     (_, slot, scales) => {
