@@ -10,7 +10,10 @@ import { Sentence, Symbols } from './symbol'
 
 interface Props {
   readonly desk: Desk
-  /** The same, but for the middle of a gesture: what it was before. Links, and what is sent unseen, need not follow every turn of a slider. */
+  /**
+   * The same, but for the middle of a gesture: what it was before. Links, and what is sent unseen, need not follow every turn of a
+   * slider.
+   */
   readonly still: Desk
   readonly sets: readonly ShelvedSet[]
   /** Until then a plain form, which asks for the page that its fields spell. */

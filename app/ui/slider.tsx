@@ -1,4 +1,5 @@
 import { type KeyboardEvent, useLayoutEffect, useRef } from 'react'
+import { roundStep } from '../../lib/figures/scale'
 import type { Field } from '../../lib/words/fields'
 import { settle } from '../live/address'
 import { wake } from '../live/here'
@@ -98,8 +99,5 @@ function onStep(value: number, { step }: Range): number {
 
 /** A round number of steps. */
 function stride({ min, max, step }: Range): number {
-  const rough = (max - min) / PRESSES
-  const power = 10 ** Math.floor(Math.log10(rough))
-  const round = [1, 2, 5, 10].find((one) => one * power >= rough * 0.99) ?? 10
-  return Math.max(step, round * power)
+  return Math.max(step, roundStep((0.99 * (max - min)) / PRESSES))
 }

@@ -36,6 +36,12 @@ function unbent({ scaling, linear }: Range, value: number): number {
   return scaling === 'log' ? Math.exp(value) : Math.sign(value) * linear * Math.expm1(Math.abs(value))
 }
 
+/** The next of 1, 2 and 5 times a power of ten. */
+export function roundStep(least: number): number {
+  const power = 10 ** Math.floor(Math.log10(least))
+  return power * ([1, 2, 5].find((one) => one * power >= least) ?? 10)
+}
+
 /** Parts of an axis that nobody can tell apart. */
 const FINEST = 1e-5
 

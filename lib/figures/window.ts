@@ -1,7 +1,7 @@
 /** The shared window of several histories: every origin, every turn and ending that falls within reason, else what is seen of the rest. */
 import type { Solution } from '../solve'
 import type { Eras } from './eras'
-import type { Range, Scaling } from './scale'
+import { type Range, roundStep, type Scaling } from './scale'
 
 export type Seen = Pick<Solution, 'origin' | 'end' | 'measures'>
 /** a at times in Gyr from now, ascending; null where the history does not reach. */
@@ -53,7 +53,6 @@ const NEARLY_LINEAR = 0.07
 /** In a range of one's own the figure is as high as all but this part of it. */
 const CUT = 0.12
 const TRIED = 32
-const ROUND = [1, 2, 5, 10]
 const STEPS = 60
 
 export function windowOf(entries: readonly Entry[], wanted: Wanted = { time: null, from: null, to: null }): Window {
@@ -75,9 +74,7 @@ export function windowOf(entries: readonly Entry[], wanted: Wanted = { time: nul
  * while and leave the others where they are.
  */
 export function outwards(size: number): number {
-  const least = size / 50
-  const power = 10 ** Math.floor(Math.log10(least))
-  const step = power * (ROUND.find((one) => one * power >= least) ?? 10)
+  const step = roundStep(size / 50)
   return Number((step * Math.ceil(size / step - 1e-9)).toPrecision(12))
 }
 
