@@ -1,10 +1,9 @@
-/** The explorer in Firefox, where Debian's package or another is at hand: it opens, follows a number and a slider, and works by keyboard. */
-import { existsSync } from 'node:fs'
+/** The explorer in Firefox, where it can be had: it opens, follows a number and a slider, and works by keyboard. */
 import { expect, test } from '@playwright/test'
 import puppeteer, { type Page } from 'puppeteer-core'
+import { FIREFOX, find } from '../scripts/setup/browsers.mjs'
 
-const PLACES = ['/usr/bin/firefox-esr', '/usr/bin/firefox']
-const executablePath = process.env.FIREFOX_PATH || PLACES.find((path) => existsSync(path))
+const executablePath = find(FIREFOX, process.env)
 
 test.describe.configure({ timeout: 180_000 })
 test.skip(!executablePath, 'Firefox was not found (on Debian: apt-get install firefox-esr, or set FIREFOX_PATH)')

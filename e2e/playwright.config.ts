@@ -1,5 +1,5 @@
 import { defineConfig } from '@playwright/test'
-import { findChromium } from '../scripts/setup/chromium.mjs'
+import { CHROMIUM, find } from '../scripts/setup/browsers.mjs'
 import { ROOT } from '../scripts/setup/project.mjs'
 
 const port = process.env.PORT || '3000'
@@ -22,7 +22,7 @@ export default defineConfig({
     serviceWorkers: 'block',
     trace: 'retain-on-failure',
     launchOptions: {
-      executablePath: findChromium(process.env),
+      executablePath: find(CHROMIUM, process.env),
       args: [
         '--no-sandbox',
         '--disable-gpu',

@@ -16,7 +16,7 @@ const { join } = await import('node:path')
 const { fail, Refusal, run, runNode } = await import('./setup/project.mjs')
 const { ensureInstalled, npmCommand } = await import('./setup/install.mjs')
 const { ensureBuilt } = await import('./setup/build.mjs')
-const { ensureChromium } = await import('./setup/chromium.mjs')
+const { ensureChromium, FIREFOX, findOrInstall } = await import('./setup/browsers.mjs')
 const { probePort } = await import('./setup/port.mjs')
 const { atLeastOneFailed, closingLine, sum, tallyPlaywright, tallyVitest } = await import('./setup/tally.mjs')
 const { failuresOfPlaywright, failuresOfVitest } = await import('./setup/failures.mjs')
@@ -92,6 +92,8 @@ function failed(why) {
 try {
   ensureInstalled()
   const chromium = ensureChromium()
+  // Its tests are left out, and counted as such, where it cannot be had.
+  findOrInstall(FIREFOX)
   const tallies = [check(), unitTests()]
   const built = build()
   // Without a build there is nothing to browse, and the failed build is counted.

@@ -1,4 +1,5 @@
 /** Labels within the plot: where each hides least, and a line to what it names where that is not beside it. */
+import { evenParts } from '../numerics/list'
 import type { Chart, Curve } from './chart'
 import { boxOf, type Label, type Leader, labelHeight, labelWidth, type Texts, textsOf, toneOf } from './label'
 import {
@@ -120,7 +121,7 @@ function levelWishes({ references }: Drawn, plot: Plot, { type, compact }: Frame
     const places = (width: number, height: number) => {
       const room = plot.right - plot.left - width - 0.8 * type
       const rows = [plot.y(at) - height - 0.15 * type, plot.y(at) + 0.15 * type]
-      const steps = Array.from({ length: LEVEL_STEPS + 1 }, (_, i) => (room * i) / LEVEL_STEPS)
+      const steps = evenParts(LEVEL_STEPS).map((part) => room * part)
       return steps.flatMap((step) => {
         const x = plot.right - 0.4 * type - width - step
         return rows.map((y) => ({ x, y, width, height, start: AWAY * step, of: x, leader: null }))

@@ -1,4 +1,5 @@
 /** What a cursor over a figure reads: every curve at the same places along the horizontal axis. */
+import { evenParts } from '../numerics/list'
 import { fractionOf, type Range, valueAt } from './scale'
 
 export interface Readings {
@@ -21,7 +22,7 @@ export function readingsOf(curves: readonly Values[], x: Range, special: readonl
   const parts = special.map((place) => fractionOf(x, place))
   const isApart = (part: number) =>
     part === 0 || part === 1 || parts.every((one) => !(Math.abs(one - part) < LEAST_STEP / steps))
-  const even = Array.from({ length: steps + 1 }, (_, i) => i / steps)
+  const even = evenParts(steps)
     .filter(isApart)
     .map((part) => valueAt(x, part))
   const inside = [...even, ...special].filter((place) => place >= x.from && place <= x.to)

@@ -1,4 +1,5 @@
 /** Points of a curve where it bends, cut at the edges of the figure and thinned to what an eye can see. */
+import { evenParts } from '../numerics/list'
 import { fractionOf, type Range, valueAt } from './scale'
 
 export type Point = readonly [x: number, y: number]
@@ -35,9 +36,8 @@ export function sampleCurve({ places, values }: Source, ranges: Ranges): readonl
 
 /** Even steps along the axis, crowded about the special places, those included. */
 export function placesAlong(x: Range, special: readonly number[]): readonly number[] {
-  const even = Array.from({ length: EVEN + 1 }, (_, i) => i / EVEN)
   const crowded = special.flatMap((place) => around(fractionOf(x, place)))
-  const fractions = [...even, ...crowded].filter((part) => part >= 0 && part <= 1)
+  const fractions = [...evenParts(EVEN), ...crowded].filter((part) => part >= 0 && part <= 1)
   const places = [...fractions.map((part) => valueAt(x, part)), ...special]
   return [...new Set(places)].filter((place) => place >= x.from && place <= x.to).sort((one, other) => one - other)
 }

@@ -1,4 +1,5 @@
 /** The shared window of several histories: every origin, every turn and ending that falls within reason, else what is seen of the rest. */
+import { evenParts } from '../numerics/list'
 import type { Solution } from '../solve'
 import type { Eras } from './eras'
 import { type Range, roundStep, type Scaling } from './scale'
@@ -127,7 +128,7 @@ function topOf({ solution, scales }: Entry, to: number): number {
 
 /** High enough for nearly all that happens within a range. */
 function topWithin(entries: readonly Entry[], from: number, to: number): number {
-  const times = Array.from({ length: TRIED + 1 }, (_, i) => from + ((to - from) * i) / TRIED)
+  const times = evenParts(TRIED).map((part) => from + (to - from) * part)
   const found = entries
     .flatMap(({ scales }) => scales(times))
     .filter((scale) => scale !== null && Number.isFinite(scale)) as number[]

@@ -7,3 +7,10 @@ export function listOf<One, Made>(list: readonly One[], make: (one: One, index: 
   for (const one of list) made.push(make(one, made.length))
   return made
 }
+
+/** 0 to 1 in so many even steps, both ends included. */
+export function evenParts(steps: number): number[] {
+  const parts: number[] = []
+  for (let i = 0; i <= steps; i++) parts.push(i / steps)
+  return parts
+}

@@ -4,8 +4,8 @@ import { createServer } from 'node:net'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import { describe, expect, test } from 'vitest'
+import { CHROMIUM, FIREFOX, find } from '../../scripts/setup/browsers.mjs'
 import { builtIn, isSource } from '../../scripts/setup/build.mjs'
-import { findChromium } from '../../scripts/setup/chromium.mjs'
 import { npmCommand } from '../../scripts/setup/install.mjs'
 import { nodeProblem, requiredNode } from '../../scripts/setup/node-version.mjs'
 import { choosePort, explainListenError, probePort } from '../../scripts/setup/port.mjs'
@@ -110,10 +110,11 @@ test('npm is the one that runs us, and no other package manager', () => {
   expect(npmCommand({})).toEqual(['npm'])
 })
 
-test('Chromium is the named one, else a known place, else none', () => {
+test('a browser is the named one, else a known place, else none', () => {
   const only = (path: string) => (asked: string) => asked === path
-  expect(findChromium({ CHROMIUM_PATH: '/c' }, only('/c'))).toBe('/c')
-  expect(() => findChromium({ CHROMIUM_PATH: '/d' }, only('/c'))).toThrow('/d')
-  expect(findChromium({}, only('/usr/bin/google-chrome'))).toBe('/usr/bin/google-chrome')
-  expect(findChromium({}, () => false)).toBeUndefined()
+  expect(find(CHROMIUM, { CHROMIUM_PATH: '/c' }, only('/c'))).toBe('/c')
+  expect(() => find(CHROMIUM, { CHROMIUM_PATH: '/d' }, only('/c'))).toThrow('/d')
+  expect(find(CHROMIUM, {}, only('/usr/bin/google-chrome'))).toBe('/usr/bin/google-chrome')
+  expect(find(CHROMIUM, {}, () => false)).toBeUndefined()
+  expect(find(FIREFOX, { CHROMIUM_PATH: '/c', FIREFOX_PATH: '/f' }, only('/f'))).toBe('/f')
 })
