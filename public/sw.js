@@ -10,6 +10,9 @@ const MOST_PAGES = 30
 /** A network that says nothing for so long is none. Milliseconds. */
 const PATIENCE = 6000
 
+/** What is opened in a window without being a page. */
+const DATA = /^\/(api\/|longhence\.d\.ts$)/
+
 /** The windows whose page was one that had been kept. */
 const kept = new Set()
 
@@ -21,7 +24,7 @@ self.addEventListener('fetch', (event) => {
   const { origin, pathname } = new URL(request.url)
   if (request.method !== 'GET' || origin !== location.origin) return
   if (pathname.startsWith('/_next/static/')) event.respondWith(fixed(request))
-  else if (request.mode === 'navigate') event.respondWith(page(event))
+  else if (request.mode === 'navigate' && !DATA.test(pathname)) event.respondWith(page(event))
 })
 
 self.addEventListener('message', ({ source, data }) => {

@@ -5,8 +5,6 @@ import type { Problem, Reading } from '../../lib/scenario/scenario'
 import { PROBLEM_TYPE, problemBody } from '../../scripts/front/problem.mjs'
 import { EDITION } from './home'
 
-/** A page of any site may read the answers; they hold nothing but what their address asks for. */
-export const OPEN = { 'Access-Control-Allow-Origin': '*', 'Access-Control-Expose-Headers': 'ETag, Content-Disposition' }
 /** The same address gives the same answer until a new version is served. */
 const KEEP = 'public, max-age=3600'
 
@@ -32,7 +30,7 @@ export function reply<T>(
   const place = `${path}?${reading.value.canonical}`
   const tag = `W/"${createHash('sha256').update(`${EDITION} ${place}`).digest('base64url').slice(0, 22)}"`
   const known = request.headers.get('if-none-match')?.trim()
-  const headers = { ...OPEN, ETag: tag, 'Cache-Control': KEEP }
+  const headers = { ETag: tag, 'Cache-Control': KEEP }
   if (known !== undefined && names(known, tag)) return new Response(null, { status: 304, headers })
   const made = body(reading.value, place)
   if (!made.ok) return refused(422, path, made.problems)
@@ -60,6 +58,6 @@ export function refused(status: 400 | 422, path: string, errors: readonly Proble
 export function problem(one: Parameters<typeof problemBody>[0], path: string): Response {
   return new Response(problemBody(one, path), {
     status: one.status,
-    headers: { ...OPEN, ...one.headers, 'Content-Type': PROBLEM_TYPE, 'Cache-Control': 'no-store' },
+    headers: { ...one.headers, 'Content-Type': PROBLEM_TYPE, 'Cache-Control': 'no-store' },
   })
 }

@@ -24,19 +24,19 @@ let timer: ReturnType<typeof setTimeout> | undefined
 
 /** Null on the server, and until the page is alive. */
 export function useAddress(): Address | null {
-  return useSyncExternalStore(subscribe, read, () => null)
+  return useSyncExternalStore(subscribe, addressNow, () => null)
 }
 
 /** Tells now and at every change. Returns how to stop it. */
 export function watchAddress(listener: (address: Address) => void): () => void {
-  const told = () => listener(read())
+  const told = () => listener(addressNow())
   told()
   return subscribe(told)
 }
 
 /** Opens a link of the page. Calls with the same `by` in a row count as one change. */
 export function go(link: string, by: string | null = null): void {
-  const { search, depth } = read()
+  const { search, depth } = addressNow()
   const next = new URL(link, location.href).search
   if (next === search) return
   const continued = by !== null && by === gesture
@@ -55,14 +55,14 @@ export function go(link: string, by: string | null = null): void {
 /** The gesture is over. */
 export function settle(): void {
   flush()
-  if (read().moving) set({ ...read(), moving: false })
+  if (addressNow().moving) set({ ...addressNow(), moving: false })
 }
 
 export function undo(): void {
   history.back()
 }
 
-function read(): Address {
+export function addressNow(): Address {
   current ??= { search: location.search, moving: false, depth: Number(history.state?.depth ?? 0) }
   return current
 }
@@ -80,7 +80,7 @@ function flush(): void {
 }
 
 function write(how: 'pushState' | 'replaceState'): void {
-  const { search, depth } = read()
+  const { search, depth } = addressNow()
   try {
     history[how]({ depth }, '', search || location.pathname)
   } catch {
@@ -103,5 +103,5 @@ function moved(): void {
   timer = undefined
   gesture = null
   current = null
-  set(read())
+  set(addressNow())
 }

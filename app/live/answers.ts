@@ -94,7 +94,8 @@ export function createAnswers(first: Answer, { isAwake, compute, load }: Means) 
       moving = inGesture
       turns.set(asked, ++turn)
       if (asked === state.answer.asked) shown = turn
-      set({ wanted: asked, fetching: state.fetching && asked !== first.asked })
+      const computing = state.computing && asked === state.wanted
+      set({ wanted: asked, computing, fetching: state.fetching && asked !== first.asked })
       if (asked === first.asked) return show(first)
       if (isAwake()) computeHere()
       if (isOpen() && (!moving || !(isAwake() || state.fetching))) ask()

@@ -31,6 +31,7 @@ function methods(): Promise<Document> {
 }
 
 async function show(name: Element): Promise<void> {
+  shown?.removeAttribute('aria-describedby')
   shown = name
   const entry = (await methods()).getElementById(anchorOf(name))?.cloneNode(true)
   if (shown !== name || !(entry instanceof Element) || !name.isConnected) return

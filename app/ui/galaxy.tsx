@@ -15,7 +15,7 @@ export function Galaxy({ view, galaxy, live }: Props) {
   const take = (event: FormEvent) => {
     event.preventDefault()
     const redshift = Number(text.trim().replace(',', '.') || Number.NaN)
-    if (redshift >= 0 && redshift <= 1e4) go(galaxy.template.replace('GALAXY', String(redshift)))
+    if (redshift > 0 && redshift <= 1e4) go(galaxy.template.replace('GALAXY', String(redshift)))
     else setText(String(galaxy.redshift))
   }
   return (

@@ -18,7 +18,7 @@ const Words = lazy(() => import('./take-away-fetched'))
 /** Files, links and words of what is shown. Without scripts all of it is links. */
 export const TakeAway = memo(function TakeAway({ desk, lists, version, live }: Props) {
   const query = queryOf(desk)
-  const theme = desk.place.theme === 'night' ? '&theme=night' : ''
+  const theme = desk.place.theme ? `&theme=${desk.place.theme}` : ''
   const figures = figuresOf(desk.place, lists)
   const words = useOpen()
   const home = useMemo(() => ({ version, base: lists.base }), [version, lists.base])
@@ -78,9 +78,7 @@ export const TakeAway = memo(function TakeAway({ desk, lists, version, live }: P
           </Suspense>
         ) : (
           <p>
-            <a href={`/words?${query}${desk.place.theme ? `&theme=${desk.place.theme}` : ''}`}>
-              All of them on a page of their own
-            </a>
+            <a href={`/words?${query}${theme}`}>All of them on a page of their own</a>
           </p>
         )}
       </details>
@@ -157,7 +155,7 @@ function Files({ label, choices, href }: FilesProps) {
   ))
 }
 
-const OF_LONG = ['time', 'from', 'to']
+const OF_LONG = ['focus', 'time', 'from', 'to']
 const OF_VIEW = ['focus', 'show', 'by', 'compare', 'galaxy', 'left', 'right']
 
 /** Both figures of the page as they are shown, each with the keys that say so. */

@@ -50,13 +50,14 @@ export function askRulerTable(pairs: Pairs, home: Home): Reading<Question<Downlo
   for (const [key, message] of Object.entries(rulerTyped(ask).complaints)) {
     faults.push(fault(key, ask[key as 'at'], message.replace(/^.*Allowed: (.*)\.$/, '$1'), message))
   }
-  const keys = [...placeKeys(place), `format=${format?.key}`].join('&')
+  const shown = placeKeys(place)
+  const keys = [...shown, `format=${format?.key}`].join('&')
   return mapped(scenariosOf(codes, faults), (scenarios) => ({
     canonical: `${linkQuery(scenarios)}&${keys}`,
     answer: () =>
       mapped(
         solved(scenarios, (one) => one),
-        (solutions) => download(scenarios, solutions, ask, format ?? TABLE_FORMATS[0], keys, home),
+        (solutions) => download(scenarios, solutions, ask, format ?? TABLE_FORMATS[0], shown, home),
       ),
   }))
 }
@@ -71,7 +72,7 @@ function download(
   solutions: readonly Solution[],
   asked: RulerAsk,
   format: (typeof FORMATS)[number],
-  keys: string,
+  shown: readonly string[],
   home: Home,
 ): Download {
   const ask = withEpoch(asked)
@@ -79,12 +80,11 @@ function download(
   const lines = [...at, ...between]
   const names = scenarios.flatMap(({ name }) => name ?? [])
   const query = linkQuery(scenarios)
-  const shown = keys.replace(/&?format=\w+$/, '')
   const provenance = {
     version: home.version,
     engine: ENGINE,
-    page: `${home.base}/?${[query, shown].filter((part) => part !== '').join('&')}`,
-    data: `${home.base}/api/ruler/table?${query}&${keys}`,
+    page: `${home.base}/?${[query, ...shown, `engine=${ENGINE}`].join('&')}`,
+    data: `${home.base}/api/ruler/table?${[query, ...shown, `format=${format.key}`].join('&')}`,
   }
   const columns = lines.map(({ quantity: { key, label }, unit }) => ({ key, label, unit }))
   const tables = solutions.map(({ code }, slot) => ({ code, rows: () => [cellsOf(lines, slot)] }))

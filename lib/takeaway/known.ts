@@ -4,8 +4,7 @@
  */
 import { familyOf } from '../dark-energy'
 import type { ParameterValue } from '../parameter'
-import { budgetOf } from '../scenario/budget'
-import type { Scenario } from '../scenario/scenario'
+import type { Radiation, Scenario } from '../scenario/scenario'
 import { type Solution, solve } from '../solve'
 import { numbersOf } from './numbers'
 
@@ -34,7 +33,7 @@ export function doubtsOf(solution: Solution): Doubts {
 /** A scenario without a solution tells nothing about its neighbour. */
 function solvedOrNull(scenario: Scenario): Solution | null {
   try {
-    return budgetOf(scenario) && solve(scenario)
+    return solve(scenario)
   } catch {
     return null
   }
@@ -50,11 +49,27 @@ function neighbours(scenario: Scenario): Scenario[] {
     ...(closure.value === 0
       ? []
       : [{ ...scenario, closure: { ...closure, value: closure.value + halfUnit(closure.value) } }]),
-    ...(radiation.kind === 'thermal'
-      ? [{ ...scenario, radiation: { ...radiation, cmb: radiation.cmb + halfUnit(radiation.cmb) } }]
-      : []),
+    ...radiationNeighbours(radiation).map((moved) => ({ ...scenario, radiation: moved })),
     ...lawNeighbours(scenario),
   ]
+}
+
+function radiationNeighbours(radiation: Radiation): Radiation[] {
+  switch (radiation.kind) {
+    case 'none':
+      return []
+    case 'given':
+      return radiation.density === 0 ? [] : [{ ...radiation, density: radiation.density + halfUnit(radiation.density) }]
+    case 'thermal': {
+      const { cmb, nu, masses } = radiation
+      const heavier = masses.map((mass, i) => masses.with(i, mass + halfUnit(mass)))
+      return [
+        { ...radiation, cmb: cmb + halfUnit(cmb) },
+        ...(nu === 0 ? [] : [{ ...radiation, nu: nu + halfUnit(nu) }]),
+        ...heavier.map((moved) => ({ ...radiation, masses: moved })),
+      ]
+    }
+  }
 }
 
 function lawNeighbours(scenario: Scenario): Scenario[] {

@@ -50,7 +50,7 @@ const KEYS = [
   key('show', token),
   key('by', token),
   key('compare', token),
-  key('galaxy', (text) => within(text, 0, 1e4)),
+  key('galaxy', (text) => within(text, 0, 1e4) || null),
   key('time', (text) => (text === 'log' ? text : null)),
   key('from', (text) => within(text, -1e6, 1e6)),
   key('to', (text) => within(text, -1e6, 1e6)),

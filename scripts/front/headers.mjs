@@ -1,5 +1,6 @@
 /** Headers that every answer carries, whoever makes it. */
 import { randomBytes } from 'node:crypto'
+import { isApi, split } from './target.mjs'
 
 /** Figures made to stand in other people's pages. */
 const FRAMED_ANYWHERE = /^\/embed(?=[/?]|$)/
@@ -11,7 +12,7 @@ const NO_PAGE = /^\/(api\/|_next\/|healthz(?=[/?]|$))/
  * @param {import('node:http').IncomingMessage} request
  * @param {import('node:http').ServerResponse} response
  */
-export function setSecurityHeaders(request, response) {
+export function setHeaders(request, response) {
   const target = request.url ?? ''
   const framedAnywhere = FRAMED_ANYWHERE.test(target)
   // A download is what its Content-Type says, not what a browser guesses from its bytes.
@@ -21,6 +22,11 @@ export function setSecurityHeaders(request, response) {
   // Pages opened from elsewhere get no handle on ours.
   response.setHeader('Cross-Origin-Opener-Policy', 'same-origin')
   if (!framedAnywhere) response.setHeader('X-Frame-Options', 'SAMEORIGIN')
+  if (isApi(split(target).path)) {
+    // Pages of any site may read what the interface answers: it holds nothing but what its address asks for.
+    response.setHeader('Access-Control-Allow-Origin', '*')
+    response.setHeader('Access-Control-Expose-Headers', 'ETag, Content-Disposition')
+  }
   if (!NO_PAGE.test(target)) setContentPolicy(request, response, framedAnywhere ? '*' : "'self'")
 }
 

@@ -1,11 +1,11 @@
 /** The HTTP server in front of the application: refuses what is malformed, compresses, adds headers, keeps time. */
 import { createServer } from 'node:http'
 import { compress } from './compress.mjs'
-import { setSecurityHeaders } from './headers.mjs'
+import { setHeaders } from './headers.mjs'
 import { sendProblem, writeProblem } from './problem.mjs'
 import { rest } from './rest.mjs'
 import { LONGEST_STATE, routerStateProblem } from './router-state.mjs'
-import { LONGEST_TARGET, methodProblem, optionsHeaders, targetProblem } from './target.mjs'
+import { LONGEST_TARGET, methodProblem, optionsHeaders, targetProblem, unencodedProblem } from './target.mjs'
 
 /** @typedef {(request: import('node:http').IncomingMessage, response: import('node:http').ServerResponse) => unknown} Handler */
 
@@ -30,7 +30,7 @@ const SILENCE = 120_000
 export function createFront(handler, limits = {}) {
   const server = createServer({ ...LIMITS, ...limits }, (request, response) => {
     const target = request.url ?? ''
-    setSecurityHeaders(request, response)
+    setHeaders(request, response)
     const problem =
       methodProblem(request.method, target) ??
       hostProblem(request) ??
@@ -76,15 +76,13 @@ function hostProblem({ httpVersion, headers }) {
 }
 
 /**
- * @param {Error & {code?: string}} error of Node's parser
+ * @param {Error & {code?: string, rawPacket?: Buffer}} error of Node's parser
  * @returns {import('./problem.mjs').Problem}
  */
-function parserProblem({ code }) {
+function parserProblem({ code, rawPacket }) {
   if (code === 'HPE_INVALID_METHOD') return /** @type {any} */ (methodProblem(''))
   if (code === 'HPE_HEADER_OVERFLOW') return { status: 431, detail: 'The address and headers are too long together.' }
   if (code === 'ERR_HTTP_REQUEST_TIMEOUT') return { status: 408, detail: 'The request did not arrive in time.' }
-  if (code === 'HPE_INVALID_URL') {
-    return { status: 400, detail: 'The address holds characters that have to be percent-encoded.' }
-  }
+  if (code === 'HPE_INVALID_URL') return unencodedProblem(String(rawPacket).split(' ', 2)[1] ?? '')
   return { status: 400, detail: 'This is not a request in HTTP/1.1.' }
 }

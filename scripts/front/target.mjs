@@ -50,7 +50,19 @@ export function targetProblem(target) {
 }
 
 /**
- * The answer to OPTIONS. Pages of any site may use the interface: its answers hold nothing but what they are asked for.
+ * What Node's parser refuses: characters of a target that are no part of an address.
+ * @param {string} target as far as it was read
+ * @returns {Problem}
+ */
+export function unencodedProblem(target) {
+  const pairs = pairsOf(split(target).query)
+  const at = pairs.findIndex((pair) => pair.some((part) => /[^!-~]/.test(part)))
+  const message = 'The address holds characters that have to be percent-encoded.'
+  return at < 0 ? bad(message) : refusedPair(pairs, at, message)
+}
+
+/**
+ * The answer to OPTIONS.
  * @param {string} target
  */
 export function optionsHeaders(target) {
@@ -59,7 +71,6 @@ export function optionsHeaders(target) {
   if (!isApi(split(target).path)) return plain
   return {
     ...plain,
-    'Access-Control-Allow-Origin': '*',
     'Access-Control-Allow-Methods': allow,
     'Access-Control-Allow-Headers': 'Content-Type, If-None-Match',
     'Access-Control-Max-Age': '86400',
@@ -72,12 +83,26 @@ export function optionsHeaders(target) {
  * @returns {Problem | null}
  */
 function queryProblem(query) {
-  const pairs = query.split('&').map((pair) => pair.split(/=(.*)/s))
+  const pairs = pairsOf(query)
   const at = pairs.findIndex((pair) => pair.some((part) => decode(part) === null))
   if (at < 0) return hiddenKeyProblem(pairs)
+  const [key] = pairs[at]
+  const message = `The value of ${key} holds a percent sign that encodes no character; a percent sign itself is %25.`
+  return refusedPair(pairs, at, message)
+}
+
+/** @param {string} query */
+const pairsOf = (query) => query.split('&').map((pair) => pair.split(/=(.*)/s))
+
+/**
+ * @param {string[][]} pairs
+ * @param {number} at
+ * @param {string} message
+ * @returns {Problem}
+ */
+function refusedPair(pairs, at, message) {
   const [key, value = ''] = pairs[at]
   const scenario = key === 's' ? pairs.slice(0, at).filter(([earlier]) => earlier === 's').length : null
-  const message = `The value of ${key} holds a percent sign that encodes no character; a percent sign itself is %25.`
   return { ...bad(message), errors: [{ parameter: key, scenario, value, allowed: 'percent-encoded UTF-8', message }] }
 }
 
@@ -94,7 +119,7 @@ function hiddenKeyProblem(pairs) {
 }
 
 /** @param {string} target */
-function split(target) {
+export function split(target) {
   const at = target.indexOf('?')
   return at < 0 ? { path: target, query: '' } : { path: target.slice(0, at), query: target.slice(at + 1) }
 }
@@ -115,7 +140,7 @@ function hasControl(text) {
 }
 
 /** @param {string} path */
-function isApi(path) {
+export function isApi(path) {
   return path === '/api' || path.startsWith('/api/')
 }
 

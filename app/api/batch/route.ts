@@ -1,6 +1,6 @@
 import { answerLine, LARGEST_BATCH, type Line, linesOf, MOST_LINES } from '../../../lib/answers/batch'
 import { problemDocument } from '../../../scripts/front/problem.mjs'
-import { detailOf, OPEN, problem } from '../reply'
+import { detailOf, problem } from '../reply'
 import { streamOf } from '../stream'
 import { readText } from './read-text'
 
@@ -24,7 +24,7 @@ export async function POST(request: Request): Promise<Response> {
   if (lines.length > MOST_LINES) {
     return problem({ status: 413, detail: `The body has ${lines.length} scenarios; ${MOST_LINES} are the most.` }, PATH)
   }
-  const headers = { ...OPEN, 'Content-Type': TYPE, 'Cache-Control': 'no-store' }
+  const headers = { 'Content-Type': TYPE, 'Cache-Control': 'no-store' }
   return new Response(streamOf(answers(lines)), { headers })
 }
 

@@ -17,6 +17,8 @@ const AVERAGED = 3e-5
 
 /** Swings of the field that are followed; from then on it is dust on the average. */
 const MOST_SWINGS = 60
+/** n of a field that swings about a minimum of V = 0, on the average: that of dust. */
+const SWINGING = 3
 /** n has come to rest at its last value, as well as it is followed. */
 const [SETTLED, LATE_SETTLED] = [1e-11, 1e-8]
 /** Share of E² in the sizes of its parts below which the way through a turning point is followed by time. */
@@ -70,9 +72,15 @@ export function lookAhead(field: Field, today: Float64Array, purse: Purse, deep:
   if (arrival === 'spent') return { kind: 'spent' }
   const end = steps[steps.length - 1].to
   if (stop === 'settled' && last !== null) return { kind: 'settled', exponent: last, steps, end }
-  if (stop === 'swinging') return { kind: 'swinging', exponent: 3, steps, end: lastRest(steps) }
-  return { kind: 'far', exponent: exponentAt(field, state), steps, end }
+  if (stop === 'swinging') return { kind: 'swinging', exponent: SWINGING, steps, end: lastRest(steps) }
+  return { kind: 'far', exponent: beyond(field, state), steps, end }
 }
+
+/** n from the farthest ln a on: where a minimum of V = 0 is still ahead it is reached in the end, and no horizon may miss that. */
+const beyond = (field: Field, state: Float64Array): number =>
+  field.potential.kind === 'cosine' && field.potential.slope(field.potential.start) !== 0
+    ? SWINGING
+    : exponentAt(field, state)
 
 const exponentAt = (field: Field, state: Float64Array): number => state[1] ** 2 / energyOf(field, state[0], state[1])
 
