@@ -5,6 +5,7 @@
 import { eventAtTime, type Found } from './history/event'
 import type { History } from './history/history'
 import type { EndKind, OriginKind } from './history/outcome'
+import { earlyDarkNotices } from './measures/early-dark'
 import { isMissing, type Outcome } from './measures/outcome'
 import { MEASURES, type MeasureKey } from './quantities/measures'
 import { type Moment, momentsOf } from './quantities/moments'
@@ -64,7 +65,7 @@ export function solve(scenario: Scenario): Solution {
     end,
     measures: measuresOf(subject),
     moments: momentsOf(subject),
-    notices: noticesOf(scenario, budget),
+    notices: [...noticesOf(scenario, budget), ...earlyDarkNotices(history, scenario)],
     history,
   }
 }

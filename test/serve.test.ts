@@ -143,6 +143,21 @@ describe('what is refused', () => {
     })
   })
 
+  test('characters that are no part of an address: the parameter is named where it can be', async () => {
+    const { port } = await start(vi.fn())
+    const { status, body } = await ask(port, 'GET /api/at?s=h0:70&z=١')
+    expect(status).toBe(400)
+    expect(JSON.parse(body).errors).toMatchObject([
+      { parameter: 'z', scenario: null, value: '١', allowed: 'percent-encoded UTF-8' },
+    ])
+  })
+
+  test('a refusal too may be read by pages of any site', async () => {
+    const { port } = await start(vi.fn())
+    expect((await ask(port, 'DELETE /api/history')).head).toContain('Access-Control-Allow-Origin: *')
+    expect((await ask(port, 'DELETE /')).head).not.toContain('Access-Control')
+  })
+
   test('headers that do not end', async () => {
     const { port } = await start(vi.fn(), { headersTimeout: 100, requestTimeout: 100, connectionsCheckingInterval: 20 })
     expect(await raw(port, 'GET / HTTP/1.1\r\nHost: x\r\n')).toMatchObject({ status: 408 })

@@ -5,7 +5,7 @@
  */
 import type { Arm } from '../history/arm'
 import type { History } from '../history/history'
-import { fromToday, placeAt, placeElapsed, placeRemaining } from '../history/place'
+import { farthestOf, fromToday, placeAt, placeElapsed, placeRemaining } from '../history/place'
 import { FARTHEST } from '../history/turning'
 import type { Solution } from '../solve'
 import { hubbleTimeGyr } from '../units'
@@ -121,7 +121,7 @@ function reachOf(arm: Arm): number {
   const ends = Number.isFinite(arm.time.total)
   if (ends && arm.direction < 0) return SMALLEST
   const last = ends ? placeRemaining(arm, 'time', BEFORE_RIP * arm.time.total) : placeElapsed(arm, 'time', LONGEST)
-  const reach = last ? Math.abs(last.N) : FARTHEST
+  const reach = Math.min(last ? Math.abs(last.N) : FARTHEST, farthestOf(arm))
   return arm.direction < 0 ? Math.min(reach, SMALLEST) : reach
 }
 

@@ -2,6 +2,7 @@
 import type { Logarithmic } from '../dark-energy/law'
 import type { Anchor, Model } from '../model'
 import { NODE_COUNT, NODES } from '../numerics/chebyshev'
+import { STATIC_NEAREST } from './tail'
 import type { Direction } from './turning'
 import { conditioningOf, type Zone } from './zone'
 
@@ -12,9 +13,6 @@ const approach = (farthest: number, nearest: number, from: number, to: number) =
   distanceAt: (s: number) => farthest - Math.exp(-s),
   variableAt: (m: number) => -Math.log(Math.max(nearest, farthest - m)),
 })
-
-/** Nearest approach in ln a to a static state that is followed; nearer, a is that of the static state to all its digits. */
-const STATIC_NEAREST = 1e-16
 
 /** s = −ln(m_s − m): up to a static state at N, which is reached only after infinite time, like dN/E ∝ ds. */
 export function staticZone(model: Model, direction: Direction, N: number, from: number, to: number): Zone {

@@ -1,7 +1,7 @@
 /** What lies beyond the panels of an arm. */
 import { logExpansion, type Model } from '../model'
 import { integralOfExp } from './far'
-import { type Clock, converges, explodes, type Tail, tailAt } from './tail'
+import { type Clock, converges, explodes, staticTail, type Tail, tailAt } from './tail'
 import { remainingIn } from './tail-integral'
 import { type Direction, FARTHEST, type Search } from './turning'
 
@@ -26,7 +26,7 @@ export function beyondPanels(
 ): Beyond {
   const infinite = [Number.POSITIVE_INFINITY, 0] as const
   const nothing = [0, 0] as const
-  if (end.kind === 'double') return { tail: null, time: infinite, conformal: infinite }
+  if (end.kind === 'double') return { tail: staticTail(model, direction, end.N), time: infinite, conformal: infinite }
   if (end.kind === 'none' && end.farRoot !== null && stopped !== 'tail') return turningFar(model, direction, edge)
   const ends = end.kind === 'root' || (end.kind === 'singular' && Math.abs(end.N) <= FARTHEST)
   if (ends || stopped === 'end') return { tail: null, time: nothing, conformal: nothing }

@@ -33,7 +33,7 @@ export function fateOf(model: Model, future: Search, home: Search): Fate {
 /** Of a double root that exact arithmetic has shown. */
 export const AS_TYPED = 'Exactly so for the decimals of the densities as typed.'
 const AT_REST = 'E² and its slope vanish together at this scale factor: the expansion comes to rest there.'
-const FAR = 'E² vanishes at a scale factor that is beyond the range of floating-point numbers.'
+const FAR = 'E² vanishes where the scale factor or the densities are beyond the range of floating-point numbers.'
 
 function afterTurning(model: Model, size: string | null, home: Search): readonly [EndKind, string] {
   const turns = size === null ? FAR : 'The expansion turns round.'

@@ -37,21 +37,30 @@ const event = (phase: Phase, place: Place): Event => ({
 export function eventAtScale(history: History, N: number, branch: Branch): Found {
   if (branch === 'expanding') {
     const phase = N <= 0 ? 'past' : 'future'
-    const place = placeAt(history[phase], Math.abs(N))
-    return place ? event(phase, place) : missing('the expansion that holds today never has this scale factor')
+    return eventOn(phase, history[phase], N, 'the expansion that holds today never has this scale factor')
   }
   if (history.future.end.kind === 'root') {
     if (history.unfollowed) return missing(history.unfollowed.because)
-    return contracting('home', N > 0 ? history.descent : history.home, N)
+    return eventOn('home', N > 0 ? history.descent : history.home, N, NEVER_BACK)
   }
-  if (history.past.end.kind === 'root') return contracting('before', N > 0 ? history.before : history.past, N)
+  if (history.past.end.kind === 'root') return eventOn('before', N > 0 ? history.before : history.past, N, NEVER_BACK)
   return missing('this universe has no contracting branch')
 }
 
-function contracting(phase: Phase, arm: Arm, N: number): Found {
+const NEVER_BACK = 'the contracting branch never has this scale factor'
+
+/** `never` says why there is none beyond a turning point. */
+function eventOn(phase: Phase, arm: Arm, N: number, never: string): Found {
   const place = placeAt(arm, Math.abs(N))
-  return place ? event(phase, place) : missing('the contracting branch never has this scale factor')
+  if (place) return event(phase, place)
+  if (arm.end.kind === 'none') return missing(OUT_OF_RANGE)
+  return missing(arm.end.kind === 'double' && sameScale(N, arm.end.N) ? AT_REST : never)
 }
+
+/** To the digits of a scale factor. */
+const sameScale = (one: number, other: number): boolean => Math.abs(one - other) <= 4 * Number.EPSILON
+
+const AT_REST = 'this is the static state itself, which is infinitely far away in time'
 
 /** The event at a time from now, in 1/H₀. */
 export function eventAtTime(history: History, time: number): Found {
@@ -72,13 +81,15 @@ export function eventAtAge(history: History, age: number): Found {
   if (origin.time === null) return missing('the past is infinite, so no age can be counted')
   if (age < 0)
     return past.end.kind === 'root' ? beforeBounce(history, 'time', -age) : missing('nothing lies before the origin')
+  if (age === 0 && past.end.kind === 'none') return missing('this is the origin itself, where a = 0')
   if (age > past.time.total) return futureEvent(history, 'time', age - past.time.total)
   const place = placeRemaining(past, 'time', age)
   return place ? event('past', place) : missing(OUT_OF_RANGE)
 }
 
 const AFTER_THE_END = 'this is after the end'
-const OUT_OF_RANGE = 'the scale factor there is outside the range of floating-point numbers'
+const OUT_OF_RANGE =
+  'the scale factor there is outside the range of floating-point numbers, or farther than the history is followed'
 
 function pastEvent(history: History, clock: Clock, elapsed: number): Found {
   const { past } = history

@@ -20,9 +20,17 @@ export interface Place {
 /** On this part of the first panel an integral from today is taken directly, to keep its relative accuracy. */
 export const NEAR_TODAY = 0.15
 
-/** The place at distance m = |ln a| from today, or null beyond a turning point. */
+/** Farthest |ln a| on an arm: a turning point, just this side of a static state, or where its sums end; else Infinity. */
+export function farthestOf({ end, edges, tail, time }: Arm): number {
+  const last = edges[edges.length - 1]
+  if (end.kind === 'double') return last * (1 - Number.EPSILON)
+  if (end.kind !== 'none') return Math.abs(end.N)
+  return tail === null && time.total === Number.POSITIVE_INFINITY ? last : Number.POSITIVE_INFINITY
+}
+
+/** The place at distance m = |ln a| from today, or null beyond the farthest one. */
 export function placeAt(arm: Arm, m: number): Place | null {
-  if (arm.end.kind !== 'none' && m > Math.abs(arm.end.N)) return null
+  if (m > farthestOf(arm)) return null
   const panel = Math.min(indexBelow(arm.edges, m), arm.panels.length)
   const N = arm.direction * m
   if (panel === arm.panels.length) return { arm, N, panel, s: m - arm.edges[panel] }
@@ -143,11 +151,11 @@ function placeInPanel(arm: Arm, panel: number, clock: Clock, value: number): Pla
   return placeOf(arm, panel, from + ((x + 1) / 2) * (to - from))
 }
 
-/** Beyond the last panel; at a static state for ever where the arm leads there. */
+/** Beyond the last panel; next to a static state for ever where the arm leads there. */
 function placeInTail(arm: Arm, clock: Clock, along: (tail: Tail[Clock], D: number) => number): Place | null {
   const panel = arm.panels.length
-  if (arm.end.kind === 'double') return placeOf(arm, panel - 1, arm.panels[panel - 1].to)
-  const farthest = FARTHEST - arm.edges[panel]
+  const still = arm.end.kind === 'double' ? arm.end.N : null
+  const farthest = still === null ? FARTHEST - arm.edges[panel] : Number.MAX_VALUE
   if (arm.tail === null) return null
   const integral = arm.tail[clock]
   const f = (D: number) => along(integral, D)
@@ -156,11 +164,18 @@ function placeInTail(arm: Arm, clock: Clock, along: (tail: Tail[Clock], D: numbe
   while (f(reach) < 0 && reach < farthest) reach = Math.min(2 * reach, farthest)
   if (!(f(reach) >= 0)) return null
   const D = f(0) >= 0 ? 0 : brent(f, 0, reach)
-  return { arm, N: arm.direction * (arm.edges[panel] + D), panel, s: D }
+  return { arm, N: still ?? arm.direction * (arm.edges[panel] + D), panel, s: D }
 }
 
-/** E² at a place. */
+/** E² at a place; NaN where it leaves the doubles. */
 export function expansionAtPlace({ arm, panel, s, N }: Place): number {
-  if (panel < arm.panels.length) return arm.panels[panel].zone.expansion(s)
-  return arm.tail ? arm.tail.expansion(s) : arm.model.expansion(N, Math.exp(-N))
+  if (panel < arm.panels.length) return inDoubles(arm, arm.panels[panel].zone.expansion(s))
+  return inDoubles(arm, arm.tail ? arm.tail.expansion(s) : arm.model.expansion(N, Math.exp(-N)))
 }
+
+/** Below this doubles lose digits. */
+const LEAST_EXPANSION = 2 ** -1022
+
+/** E², which on an arm without a turning point is never nothing. */
+export const inDoubles = ({ end }: Arm, expansion: number): number =>
+  end.kind === 'none' && expansion < LEAST_EXPANSION ? Number.NaN : expansion

@@ -2,7 +2,7 @@
 import { evaluatePairs } from '../numerics/chebyshev'
 import type { Arm } from './arm'
 import type { Span } from './event'
-import { NEAR_TODAY, nearToday } from './place'
+import { inDoubles, NEAR_TODAY, nearToday } from './place'
 import type { Clock } from './tail'
 import { elapsedIn, remainingIn } from './tail-integral'
 
@@ -94,7 +94,7 @@ function toEndInto(
   })
 }
 
-/** E² by the form that rounds least: as the model has it, and where a zone or a tail knows it better, by that. */
+/** E², NaN where it leaves the doubles, by the form that rounds least: as the model has it, and where a zone or a tail knows it better, by that. */
 export function expansionsAt(out: Float64Array, places: Places): void {
   const { arm, count, N, inverseScale, s } = places
   arm.model.expansionsInto(out, N, inverseScale, 0, count)
@@ -103,4 +103,5 @@ export function expansionsAt(out: Float64Array, places: Places): void {
     const form = zone?.plain ? null : (zone ?? arm.tail)
     if (form !== null) for (let i = from; i < to; i++) out[i] = form.expansion(s[i])
   })
+  for (let i = 0; i < count; i++) out[i] = inDoubles(arm, out[i])
 }

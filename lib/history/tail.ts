@@ -202,6 +202,25 @@ function powerTail(
   }
 }
 
+/** Nearest approach in ln a to a static state that is followed; nearer, a is that of the static state to all its digits. */
+export const STATIC_NEAREST = 1e-16
+
+/** Next to a static state at N, E = κ d at the distance d in ln a: D counts by how many powers of e nearer it comes still. */
+export function staticTail({ derivatives }: Model, direction: Direction, N: number): Tail | null {
+  const kappa = Math.sqrt(derivatives(N).second / 2)
+  if (!(kappa > 0 && Number.isFinite(kappa))) return null
+  const integral = (scale: number): TailIntegral => ({ kind: 'power', scale, kappa: 0, terms: [] })
+  return {
+    N,
+    direction,
+    time: integral(1 / kappa),
+    conformal: integral(Math.exp(-N) / kappa),
+    corrections: [],
+    left: 0,
+    expansion: (D) => (kappa * STATIC_NEAREST * Math.exp(-D)) ** 2,
+  }
+}
+
 function slowTail(N: number, direction: Direction, density: number, law: Logarithmic): Tail {
   const scale = 1 / Math.sqrt(density)
   const rate = (direction * law.rate) / (1 + law.rate * N)

@@ -47,7 +47,7 @@ export function growthRateAt(history: History, event: Event): Outcome {
   const { N } = event.place
   if (holdsBeforePanels(growth, N)) return closedRate(growth.start, N)
   const e2 = expansionAtEvent(event)
-  if (atRest(event.place) || !(e2 > 0)) return AT_REST
+  if (atRest(event.place) || e2 <= 0) return AT_REST
   const state = stateAt(growth, event)
   if (state === null) return OUT_OF_RANGE
   const value = (state.flow * Math.exp(-2 * N)) / (Math.sqrt(e2) * state.contrast)

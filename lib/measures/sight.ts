@@ -24,7 +24,13 @@ export function comovingDistance(history: History, event: Event): number | Missi
 }
 
 export const NO_PARTICLE_HORIZON = missing('light has had unlimited conformal time: the horizon is infinite')
-export const NO_EVENT_HORIZON = missing('light has unlimited conformal time ahead: there is no event horizon')
+const NO_EVENT_HORIZON = missing('light has unlimited conformal time ahead: there is no event horizon')
+const NOT_FOLLOWED = missing(
+  'light would have to be followed to an end that is beyond the range of floating-point numbers',
+)
+const ALL_IN_VIEW = missing('light has unlimited conformal time ahead: all comes into view in the end')
+/** Comoving distance to the farthest matter that is ever seen, where there is no number for what is ahead. */
+export const noFarthest = (ahead: Missing): Missing => (ahead === NO_EVENT_HORIZON ? ALL_IN_VIEW : ahead)
 
 /** Comoving distance that light has covered since the beginning, to an event; the contraction before a bounce counts. */
 export function particleHorizonSpan(history: History, one: Position): Span | Missing {
@@ -53,8 +59,12 @@ function beforeExpansion(history: History): number | Missing {
 /** Comoving distance that light sent at the event can still cover before the end. */
 export function eventHorizon(history: History, event: Event): number | Missing {
   const left = untilEnd(history, event, 'conformal')
-  return Number.isFinite(left) ? left : NO_EVENT_HORIZON
+  return Number.isFinite(left) ? left : noEventHorizon(history)
 }
+
+/** Why the conformal time ahead is no number: there is no end, or none that the doubles hold. */
+export const noEventHorizon = ({ end }: History): Missing =>
+  end.kind === 'crunch' || end.kind === 'singular' ? NOT_FOLLOWED : NO_EVENT_HORIZON
 
 const OUT_OF_RANGE = 'the scale factor there, or the density, is outside the range of floating-point numbers'
 

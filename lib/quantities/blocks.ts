@@ -1,6 +1,7 @@
 /** The instants at many values of a variable, block by block. */
 import type { Arm } from '../history/arm'
 import { type Event, isEvent } from '../history/event'
+import { farthestOf } from '../history/place'
 import { listOf } from '../numerics/list'
 import { type Block, blockFrom } from './block'
 import { type ColumnSubject, eventAt, type Variable } from './instant'
@@ -67,7 +68,7 @@ function nextByScale(sheet: Sheet, first: number): Run {
   read(arrays, values, first, sheet.count - first)
   const past = N[0] <= 0
   const arm = past ? subject.history.past : subject.history.future
-  const reach = arm.end.kind === 'none' ? Number.POSITIVE_INFINITY : Math.abs(arm.end.N)
+  const reach = farthestOf(arm)
   const outside = Math.abs(N[0]) > reach
   let count = 1
   while (first + count < sheet.count && N[count] <= 0 === past && Math.abs(N[count]) > reach === outside) count++

@@ -22,7 +22,7 @@ const share = (key: ColumnKey, symbol: string, label: string, meaning: string, o
     block.arm.model.densitiesInto(out, of, block.N, block.inverseScale, block.count)
     return overExpansion(block, out)
   },
-  why: (block, i) => (expansionIn(block)[i] > 0 ? null : AT_REST),
+  why: (block, i) => (expansionIn(block)[i] <= 0 ? AT_REST : null),
 })
 
 /** By the law that rules there. */

@@ -1,4 +1,6 @@
 /** Errors of what columns are made from: the place in ln a, E², times and distances, each an absolute bound. */
+
+import type { Arm } from '../history/arm'
 import { type Span, spanSinceNow, spanSinceOrigin } from '../history/event'
 import type { History } from '../history/history'
 import type { Clock } from '../history/tail'
@@ -26,12 +28,19 @@ export const isTimed = ({ asked }: Block): boolean => asked !== null
 /** Of ln a. */
 export const placeErrors = shared((block) => {
   const squared = expansionIn(block)
-  const searched = isTimed(block) ? spanErrors(block, nearest(block), 'time', false) : null
-  return errors(({ N }, i) => {
-    const rounding = EPS * (1 + Math.abs(N[i]))
+  const searched = isTimed(block) ? timed(block) : null
+  return errors((_, i) => {
+    const rounding = searched && isNearRest(block, i) ? 0 : EPS * (1 + Math.abs(block.N[i]))
     return rounding + (searched ? searched[i] * Math.sqrt(Math.max(0, squared[i])) : 0)
   })(block)
 })
+
+/** Of the time that was asked for, where a place was searched for it. */
+const timed = shared((block) => spanErrors(block, nearest(block), 'time', false))
+
+/** Next to a static state a place that was searched for is known by the time that it takes to come there, not by ln a. */
+const isNearRest = ({ arm, panel }: Block, i: number): boolean =>
+  arm.end.kind === 'double' && arm.panels[panel[i]]?.zone.plain !== true
 
 /** From the origin or from now, as the instant was asked for. */
 const nearest = (block: Block): Span =>
@@ -43,9 +52,16 @@ const nearest = (block: Block): Span =>
 export const roundings = shared(
   errors(({ arm, panel, s }, i) => {
     const zone = panel[i] < arm.panels.length ? arm.panels[panel[i]].zone : null
-    return EPS * (FEW + 2 * (zone ? zone.conditioning(s[i]) + (zone.stray?.(s[i]) ?? 0) : 2))
+    const plain = EPS * (FEW + 2 * (zone ? zone.conditioning(s[i]) + (zone.stray?.(s[i]) ?? 0) : 2))
+    return zone === null && arm.end.kind === 'double' ? plain + 2 * fading(arm, s[i]) : plain
   }),
 )
+
+/** Of E next to a static state, relative: it falls by e in a time that is the scale of the tail, whose beginning is uncertain. */
+function fading({ time, tail }: Arm, s: number): number {
+  const scale = tail?.time.scale ?? Number.POSITIVE_INFINITY
+  return time.errorFromToday[time.errorFromToday.length - 1] / scale + FEW * EPS * s
+}
 
 /** Of E². */
 export const expansionErrors = shared((block) => {
@@ -61,7 +77,10 @@ export const expansionErrors = shared((block) => {
 /** Of E: where the expansion stands still, the root of that of E². */
 export const rateErrors = shared((block) => {
   const [squared, off] = [expansionIn(block), expansionErrors(block)]
-  return errors((_, i) => Math.min(Math.sqrt(off[i]), off[i] / (2 * Math.sqrt(Math.max(0, squared[i])))))(block)
+  return errors((_, i) => {
+    const root = Math.sqrt(off[i])
+    return squared[i] > 0 ? Math.min(root, off[i] / (2 * Math.sqrt(squared[i]))) : root
+  })(block)
 })
 
 /** Of a time or conformal time, in 1/H₀; `moved` counts what the error of the place moves it by. */
@@ -75,6 +94,8 @@ export function spanErrors(block: Block, span: Span, clock: Clock, moved = true)
   return errors(({ panel, scale }, i) => {
     const own = gathered[panel[i]] + beyond + FEW * EPS * Math.abs(values[i])
     if (!places) return own
+    // The place is as uncertain as the time was, and of it nothing else is known here.
+    if (isTimed(block) && isNearRest(block, i)) return own + timed(block)[i] / (clock === 'conformal' ? scale[i] : 1)
     // About a turning point time goes like the root of the distance in ln a.
     const moved = Math.min(
       places[i] / Math.sqrt(Math.max(0, squared[i])),

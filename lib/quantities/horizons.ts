@@ -1,7 +1,7 @@
 /** Columns of conformal time and of what light can reach, as seen from the epoch. */
 import { type Span, spanSinceOrigin, spanUntilEnd } from '../history/event'
 import { missing } from '../measures/outcome'
-import { NO_EVENT_HORIZON, NO_PARTICLE_HORIZON, particleHorizonSpan } from '../measures/sight'
+import { NO_PARTICLE_HORIZON, noEventHorizon, particleHorizonSpan } from '../measures/sight'
 import { hubbleLengthGly } from '../units'
 import { INTEGRAL } from './accuracy'
 import { type Block, nothing, spanIn, times } from './block'
@@ -60,6 +60,6 @@ export const HORIZON_COLUMNS: readonly Definition[] = [
     source: HORIZONS,
     accuracy: INTEGRAL,
     values: (block) => inGly(block, spanUntilEnd(block.subject.history, block, 'conformal')),
-    why: () => NO_EVENT_HORIZON,
+    why: ({ subject }) => noEventHorizon(subject.history),
   },
 ]

@@ -7,7 +7,7 @@ import { curvatureRadius } from '../measures/distances'
 import { type Crossing, nearestToNow } from '../measures/epochs'
 import { type Bounded, bounded, finiteOr, isMissing, type Missing, missing, type Outcome } from '../measures/outcome'
 import { deceleration, jerk } from '../measures/rates'
-import { eventHorizon, particleHorizon, redshiftAt } from '../measures/sight'
+import { eventHorizon, noFarthest, particleHorizon, redshiftAt } from '../measures/sight'
 import { acousticAngle, dragRedshift, recombinationRedshift, soundHorizon } from '../measures/sound'
 import { hubbleLengthGly, hubbleLengthMpc, hubbleTimeGyr } from '../units'
 import { DRAG_EPOCH, FROM_DRAG_FIT, FROM_SCATTERING_FIT, INTEGRAL, LAST_SCATTERING, ROOT, ROUNDING } from './accuracy'
@@ -185,7 +185,7 @@ const ALL: readonly MeasureQuantity[] = [
     value: (subject) => {
       const [behind, ahead] = [particle(subject), event(subject)]
       if (isMissing(behind)) return behind
-      if (isMissing(ahead)) return missing('light has unlimited conformal time ahead: all comes into view in the end')
+      if (isMissing(ahead)) return noFarthest(ahead)
       return inGly(bounded(behind.value + ahead.value, behind.error + ahead.error), subject)
     },
   },

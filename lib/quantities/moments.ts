@@ -66,10 +66,13 @@ const ENDS: Readonly<Record<History['end']['kind'], string>> = {
 export function momentsOf(subject: Subject): readonly Moment[] {
   const { history, scenario } = subject
   const gyr = hubbleTimeGyr(scenario.h0)
+  const start = first(subject, gyr)
   const at = (kind: MomentKind, label: string, event: Event): Moment => {
     const age = finite(sinceOrigin(history, event, 'time') * gyr)
     const remaining = finite(untilEnd(history, event, 'time') * gyr)
-    return momentAt(kind, label, sinceNow(history, event, 'time') * gyr, event.place.N, { age, remaining })
+    // Rounding may put it before the origin.
+    const time = Math.max(start.time ?? Number.NEGATIVE_INFINITY, sinceNow(history, event, 'time') * gyr)
+    return momentAt(kind, label, time, event.place.N, { age, remaining })
   }
   const crossing = (kind: MomentKind, label: string, one: Crossing | null): Moment[] =>
     onExpansion(history, one?.N ?? null, (event) => at(kind, label, event))
@@ -85,7 +88,7 @@ export function momentsOf(subject: Subject): readonly Moment[] {
     ...unbindings(subject, gyr),
   ]
   between.sort((one, other) => (one.time ?? 0) - (other.time ?? 0))
-  return [first(subject, gyr), ...between, last(subject, gyr)]
+  return [start, ...between, last(subject, gyr)]
 }
 
 /** null where it leaves the doubles. */

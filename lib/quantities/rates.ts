@@ -16,7 +16,7 @@ const rateIn = shared((block) => {
 })
 
 /** Ratios to H² have no value where the expansion stands still. */
-const atRest = (block: Block, i: number): Missing | null => (expansionIn(block)[i] > 0 ? null : AT_REST)
+const atRest = (block: Block, i: number): Missing | null => (expansionIn(block)[i] <= 0 ? AT_REST : null)
 
 /** −1 − ½ (E²)′/E², primes by ln a. */
 function decelerations(block: Block): Float64Array {
@@ -89,7 +89,7 @@ export const HUBBLE_RADIUS: Definition = {
     return out
   },
   why: (block, i) =>
-    expansionIn(block)[i] > 0 ? null : missing('the expansion stands still here, so the Hubble radius is infinite'),
+    expansionIn(block)[i] <= 0 ? missing('the expansion stands still here, so the Hubble radius is infinite') : null,
 }
 
 export const CRITICAL_DENSITY: Definition = {

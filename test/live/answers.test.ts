@@ -138,6 +138,16 @@ describe('with a worker', () => {
     expect(shown()).toBe('b')
   })
 
+  it('waits for nothing once a hand is back at what is shown', async () => {
+    const { answers, worker } = await page({ awake: true })
+    answers.want('a', true)
+    worker('a')
+    answers.want('b', true)
+    expect(answers.read().computing).toBe(true)
+    answers.want('a', true)
+    expect(answers.read().computing).toBe(false)
+  })
+
   it('keeps the object of a view that the server confirms', async () => {
     const { answers, settle, server, worker } = await page({ awake: true })
     answers.want('a', false)

@@ -1,6 +1,6 @@
 /** Where a measure has no value it says why, and what is told at the borders of the doubles. */
 import { describe, expect, it } from 'vitest'
-import { eventAtScale } from '../../lib/history/event'
+import { eventAtScale, eventAtTime } from '../../lib/history/event'
 import { growthAt, growthRateAt } from '../../lib/measures/growth'
 import type { Bounded } from '../../lib/measures/outcome'
 import { equationOfState } from '../../lib/measures/rates'
@@ -42,7 +42,7 @@ describe('growth', () => {
     // Matter 6.75 and Λ = 1 come to rest at a = 1.5 (Λ = ½ρ_m there, Einstein 1917).
     const { history } = universe('matter:6.75,cmb:0,dark:1')
     expect(history.future.end.kind).toBe('double')
-    const event = known(eventAtScale(history, Math.abs((history.future.end as { N: number }).N), 'expanding'))
+    const event = known(eventAtTime(history, 50))
     expect(growthAt(history, event)).toHaveProperty('because')
     expect(growthRateAt(history, event)).toHaveProperty('because')
   })
