@@ -12,6 +12,8 @@ interface Area {
 export interface Brush {
   /** What is selected so far, in pixels of the plot. */
   readonly span: { readonly left: number; readonly width: number } | null
+  /** True in the middle of a drag, in which the pointer belongs to the plot wherever it is. */
+  readonly isDragging: () => boolean
   readonly handlers: {
     onPointerDown(event: PointerEvent<HTMLElement>): void
     onPointerMove(event: PointerEvent<HTMLElement>): void
@@ -36,6 +38,7 @@ export function useBrush(area: Area | null, select: (one: number, other: number)
   }
   return {
     span,
+    isDragging: () => start.current !== null && dragged.current,
     handlers: {
       onPointerDown: (event) => {
         dragged.current = false
@@ -45,8 +48,9 @@ export function useBrush(area: Area | null, select: (one: number, other: number)
         if (start.current === null) return
         const to = across(event)
         if (!dragged.current && Math.abs(to - start.current) < LEAST) return
-        if (!dragged.current) event.currentTarget.setPointerCapture(event.pointerId)
+        const begins = !dragged.current
         dragged.current = true
+        if (begins) event.currentTarget.setPointerCapture(event.pointerId)
         setSpan({ left: Math.min(start.current, to), width: Math.abs(to - start.current) })
       },
       onPointerUp: (event) => {

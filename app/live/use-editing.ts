@@ -1,7 +1,7 @@
 /** What a person types, chooses and drags in the form, and where it leads. */
 import { useLayoutEffect, useMemo, useRef, useState } from 'react'
 import type { Desk } from '../../lib/words/desk'
-import { edited } from '../../lib/words/edit'
+import { dragged, type Edited, edited } from '../../lib/words/edit'
 import { go } from './address'
 
 /** What a field holds until it is taken over, and what is wrong with it. */
@@ -41,22 +41,22 @@ export function useEditing(desk: Desk): Editing {
         else after.delete(name)
         return after
       })
-    const take = (name: string, text: string, gesture: string | null) => {
-      const result = edited(latest.current.desk, name, text)
+    const take = (name: string, text: string, result: Edited, gesture: string | null = null) => {
       if (result.ok) {
         put(name, null)
         go(result.link, gesture)
       } else put(name, { text, complaint: result.complaint })
     }
+    const choose = (name: string, text: string) => take(name, text, edited(latest.current.desk, name, text))
     return {
       type: (name, text) => put(name, { text, complaint: null }),
       drop: (name) => put(name, null),
       commit: (name) => {
         const draft = latest.current.drafts.get(name)
-        if (draft && draft.complaint === null) take(name, draft.text, null)
+        if (draft && draft.complaint === null) choose(name, draft.text)
       },
-      choose: (name, text) => take(name, text, null),
-      drag: take,
+      choose,
+      drag: (name, text, gesture) => take(name, text, dragged(latest.current.desk, name, text), gesture),
     }
   }, [])
   return { drafts, hand }

@@ -79,6 +79,11 @@ export function Cursor({ figure, picture, label, template, reset, links, lit, li
       onBlur={leave}
       onPointerEnter={() => wake(true)}
       {...brush.handlers}
+      onPointerMove={(event) => {
+        // It may have left the plot for what stands beside it, and be back.
+        wake(true)
+        brush.handlers.onPointerMove(event)
+      }}
       onPointerDown={(event) => {
         wake(true)
         brush.handlers.onPointerDown(event)
@@ -96,7 +101,7 @@ export function Cursor({ figure, picture, label, template, reset, links, lit, li
               setIndex(to)
               setVoice(null)
             }}
-            leave={leave}
+            leave={() => brush.isDragging() || leave()}
             light={light}
             choose={choose}
           />

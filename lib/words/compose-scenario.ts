@@ -2,6 +2,7 @@
 import { isMissing, type Missing, missing } from '../measures/outcome'
 import { KEPT, type Kept, keptValue, retunedH0 } from '../retune'
 import { PUBLISHED_SETS } from '../scenario/presets'
+import { renamed } from '../scenario/published-names'
 import { readQuery } from '../scenario/query'
 import { readScenario } from '../scenario/read'
 import type { Scenario } from '../scenario/scenario'
@@ -23,8 +24,8 @@ function openedBy(query: URLSearchParams): Opened | null {
   return { scenarios: reading.value, place, chosen: reading.value[place.focus] as Scenario }
 }
 
-const replaced = ({ scenarios, place }: Opened, scenario: Scenario): string =>
-  pageLink(scenarios.with(place.focus, scenario), place)
+const replaced = ({ scenarios, place, chosen }: Opened, scenario: Scenario): string =>
+  pageLink(scenarios.with(place.focus, renamed(chosen, scenario)), place)
 
 /** The word of `set` that means every parameter at its default. */
 export const DEFAULTS = 'defaults'

@@ -1,5 +1,6 @@
 /** From the fields of the form back to an address; whatever was typed arrives there, good or not, and the page judges it. */
 import * as own from '../scenario/parameters'
+import { renamed } from '../scenario/published-names'
 import { MOST_SCENARIOS } from '../scenario/query'
 import { readScenario } from '../scenario/read'
 import { writeScenario } from '../scenario/write'
@@ -17,8 +18,14 @@ export interface Sent {
 
 export function composedLink({ codes, place, fields }: Sent): string {
   const kept = codes.length > 0 ? codes.slice(0, MOST_SCENARIOS) : ['']
-  const queries = kept.map((code, i) => `s=${addressed(i === place.focus ? codeOf(fields) : code)}`)
+  const queries = kept.map((code, i) => `s=${i === place.focus ? changed(code, codeOf(fields)) : addressed(code)}`)
   return `/?${[...queries, ...placeKeys(place)].join('&')}`
+}
+
+/** The scenario in focus as it was, and as the fields say. */
+function changed(before: string, after: string): string {
+  const [one, other] = [readScenario(before, null), readScenario(after, null)]
+  return one.ok && other.ok ? writeScenario(renamed(one.value, other.value)) : addressed(after)
 }
 
 /** Canonical where it can be read, as typed where not. */

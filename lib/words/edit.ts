@@ -18,6 +18,22 @@ export function edited(desk: Desk, name: string, text: string): Edited {
   return { ok: true, link: composedLink({ codes, place, fields }) }
 }
 
+/** The same in the middle of a drag, which stops at the last step before what the other fields do not allow. */
+export function dragged(desk: Desk, name: string, text: string): Edited {
+  const asked = edited(desk, name, text)
+  const field = shownFields(desk).find((one) => one.name === name)
+  if (asked.ok || field?.kind !== 'number') return asked
+  const { step } = field.slider
+  let [stop, good, bad] = [asked as Edited, Number(field.value), Number(text)]
+  while (Math.abs(bad - good) > 1.5 * step) {
+    const middle = Number((Math.round((good + bad) / 2 / step) * step).toPrecision(12))
+    const tried = edited(desk, name, String(middle))
+    if (tried.ok) [stop, good] = [tried, middle]
+    else bad = middle
+  }
+  return stop
+}
+
 function fieldsOf(desk: Desk): [string, string][] {
   return [...desk.form.hidden, ...shownFields(desk)].map(({ name, value }) => [name, value])
 }

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import { type Desk, readDesk } from '../../lib/words/desk'
-import { edited } from '../../lib/words/edit'
+import { dragged, edited } from '../../lib/words/edit'
 
 const desk = (...codes: string[]) => readDesk(new URLSearchParams(codes.map((code) => ['s', code]))) as Desk
 
@@ -21,6 +21,26 @@ describe('a change at the desk', () => {
     ['h0:70,matter:0.3', 'as', ' A, b: c ', 'h0:70,matter:0.3,as:A, b: c'],
   ])('%s with %s set to "%s"', (code, name, text, expected) => {
     expect(after(code, name, text)).toBe(expected)
+  })
+
+  it('leaves the name of a published set to its very numbers', () => {
+    const published = 'h0:67.36,matter:0.3153,baryons:0.02237,nu:3.046,as:Planck 2018'
+    expect(after(published, 'h0', '69')).toBe('h0:69,matter:0.3153,baryons:0.02237,nu:3.046')
+    expect(after(published, 'h0', '67.360')).toBe(published)
+    expect(after(published, 'as', 'Mine')).toBe(published.replace('Planck 2018', 'Mine'))
+    expect(after('h0:69,matter:0.3,as:Planck 2018', 'h0', '70')).toBe('h0:70,matter:0.3,as:Planck 2018')
+  })
+
+  it('stops a drag at the last step that the other fields allow', () => {
+    // A state of 0.06 eV weighs Ω h² = Σm/93.14 eV (Particle Data Group): 0.0013 of the whole at h0:70.
+    const result = dragged(desk('h0:70,matter:0.3'), 'matter', '0')
+    const stop = result.ok ? Number(/matter:([\d.]+)/.exec(result.link)?.[1]) : Number.NaN
+    expect(stop).toBeGreaterThan(0)
+    expect(stop).toBeLessThan(0.0025)
+    expect(edited(desk('h0:70,matter:0.3'), 'matter', '0').ok).toBe(false)
+    expect(dragged(desk('h0:70,matter:0.3'), 'matter', '0.25')).toEqual(
+      edited(desk('h0:70,matter:0.3'), 'matter', '0.25'),
+    )
   })
 
   it('keeps the other scenarios, the focus and the theme', () => {
