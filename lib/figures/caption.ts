@@ -3,10 +3,11 @@ import type { Solution } from '../solve'
 import { extrapolates } from '../words/beyond'
 import { fixed, signed, significant } from '../words/number'
 import { capital, joined, lowered } from '../words/sentence'
+import type { Told } from '../words/told'
 import { verdictOf } from '../words/verdict'
 import type { Window } from './window'
 
-type Told = Pick<Solution, 'scenario' | 'label' | 'origin' | 'end' | 'measures' | 'moments'>
+type Named = Told & Pick<Solution, 'label'>
 
 /** What a caption has to explain: the signs that are drawn. */
 interface Shown {
@@ -23,8 +24,10 @@ const SIGNS = [
   ['arrow', 'arrow: goes on'],
 ] as const
 
-export function longViewCaption(solutions: readonly Told[], { marks, ribbons, logarithmic, future }: Shown): string {
-  const signs = SIGNS.filter(([kind]) => marks.has(kind)).map(([, words]) => words)
+export function longViewCaption(solutions: readonly Named[], { marks, ribbons, logarithmic, future }: Shown): string {
+  const signs = SIGNS.filter(([kind]) => marks.has(kind)).map(([, words]) =>
+    words.replace('origin', beginnings(solutions)),
+  )
   const time = logarithmic ? 'time from now, logarithmic both ways' : 'time from now'
   const parts = [`Scale factor a against ${time}.`]
   if (signs.length > 0) parts.push(`${capital(signs.join('; '))}.`)
@@ -34,12 +37,19 @@ export function longViewCaption(solutions: readonly Told[], { marks, ribbons, lo
   return parts.join(' ')
 }
 
+/** What the rings mark: a history without a beginning has had its last bounce. */
+function beginnings(solutions: readonly Named[]): string {
+  const bounced = solutions.filter(({ origin: { kind } }) => kind === 'bounce' || kind === 'oscillating')
+  if (bounced.length === 0) return 'origin'
+  return bounced.length === solutions.length ? 'last bounce' : 'origin, or last bounce'
+}
+
 function hatching(labels: readonly string[]): string {
   const verb = labels.length > 1 ? 'follow' : 'follows'
   return `Hatched: ${joined(labels)} ${verb} a law of dark energy beyond the data it describes.`
 }
 
-export function longViewText(solutions: readonly Told[], { from, to, top }: Window): string {
+export function longViewText(solutions: readonly Named[], { from, to, top }: Window): string {
   const frame = `Line chart of the scale factor from 0 to ${significant(top, 2)} (1 today) against time from ${timeText(from)} to ${timeText(to)} Gyr.`
   const curves = solutions.map((one) => `${one.label}: ${lowered(verdictOf(one, null).sentences[0] ?? '')}`)
   return [frame, ...curves].join(' ')

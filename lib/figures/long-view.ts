@@ -9,7 +9,7 @@ import { placesAlong, type Ranges, type Source, sampleCurve } from './sample'
 import { fine, linearRange, type Range } from './scale'
 import { type Entry, type Wanted, type Window, windowOf } from './window'
 
-export type Drawn = Pick<Solution, 'scenario' | 'code' | 'label' | 'origin' | 'end' | 'measures' | 'moments'>
+export type Drawn = Pick<Solution, 'scenario' | 'budget' | 'code' | 'label' | 'origin' | 'end' | 'measures' | 'moments'>
 
 const TIME = { quantity: 'time', label: 'time from now', symbol: '', unit: 'Gyr' }
 const SCALE = { quantity: 'scale', label: 'scale factor', symbol: 'a', unit: '' }

@@ -8,7 +8,8 @@ import type { Kinds } from './kinds'
 export interface Nearest {
   readonly symbol: string
   readonly value: number
-  readonly direction: 'up' | 'down'
+  /** From there on, or only there, since the code allows no more. */
+  readonly where: 'above' | 'below' | 'at'
   /** False where the least change will do. */
   readonly apart: boolean
   readonly to: EndKind
@@ -68,11 +69,14 @@ function nearestIn(
   const boundary = boundaryIn(one, today, bracket, PRECISION, purse)
   if (!boundary) return null
   const change = Math.abs(boundary.value - one.value)
+  const near = 4 * PRECISION * Math.max(Math.abs(one.value), one.slider.step)
+  const limit = bracket.way > 0 ? one.max : one.min
+  const isLimit = Math.abs(limit - boundary.value) <= near
   return {
     symbol: one.symbol,
-    value: boundary.value,
-    direction: bracket.way > 0 ? 'up' : 'down',
-    apart: change > 4 * PRECISION * Math.max(Math.abs(one.value), one.slider.step),
+    value: isLimit ? limit : boundary.value,
+    where: isLimit ? 'at' : bracket.way > 0 ? 'above' : 'below',
+    apart: change > near,
     to: boundary.beyond.end.kind,
     share: change / widthOf(one),
   }

@@ -23,7 +23,7 @@ export const TIME_COLUMNS: readonly Definition[] = [
     symbol: 't',
     label: 'age',
     unit: 'Gyr',
-    digits: fixed(3),
+    digits: significant(5),
     meaning: 'Cosmic time since the origin, the big bang or the last bounce; negative before a bounce.',
     formula: 't = ∫ da/(a H), from the origin',
     source: FRIEDMANN,

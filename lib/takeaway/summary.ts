@@ -1,5 +1,6 @@
 /** Two sentences for readers without the trade's words: how it began and goes on, and how it ends. */
 import type { EndKind, OriginKind } from '../history/outcome'
+import { goesRound } from '../words/reach'
 import { capital } from '../words/sentence'
 import { textOf } from './rounded'
 import { type Known, rounded, sizeText } from './told'
@@ -62,6 +63,7 @@ function ending(known: Known): string {
 }
 
 function reach(known: Known): string {
+  if (goesRound(known.solution)) return ', and light that we send today can reach every place before the end'
   const far = rounded(known, 'eventHorizon', 2)
   if (far === null || far.value === 0) return ''
   return `, and light that we send today can reach places that are now up to ${sizeText(known, 'eventHorizon', DIGITS)} billion light years away`

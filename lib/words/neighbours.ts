@@ -18,8 +18,7 @@ const WOULD: Readonly<Record<EndKind, string>> = {
 }
 
 /** `With Ω_m above 1.70 it would end in a Big Crunch, Ω_k closing the budget.` Symbols are in the markup of labels. */
-export function nearestEnding({ closure }: Scenario, { symbol, value, direction, apart, to }: Nearest): string {
-  const where = `${direction === 'up' ? 'above' : 'below'} ${significant(value, 3)}`
+export function nearestEnding({ closure }: Scenario, { symbol, value, where, apart, to }: Nearest): string {
   const closing = closure.given === 'dark' ? 'Ω_k' : 'Ω_DE'
-  return `With ${apart ? '' : 'any '}${symbol} ${where} it would ${WOULD[to]}, ${closing} closing the budget.`
+  return `With ${apart ? '' : 'any '}${symbol} ${where} ${significant(value, 3)} it would ${WOULD[to]}, ${closing} closing the budget.`
 }

@@ -1,4 +1,4 @@
 import type { Solution } from '../solve'
 
 /** The part of a solution that the words need. */
-export type Told = Pick<Solution, 'scenario' | 'origin' | 'end' | 'measures' | 'moments'>
+export type Told = Pick<Solution, 'scenario' | 'budget' | 'origin' | 'end' | 'measures' | 'moments'>

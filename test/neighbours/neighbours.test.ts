@@ -130,6 +130,8 @@ describe('the sentence', () => {
   test.each([
     ['matter:0.3,cmb:0,dark:0.7', 'With Ω_DE below 0 it would end in a Big Crunch, Ω_k closing the budget.'],
     ['matter:0.3,eos:constant,w:-0.98', 'With w below −1.00 it would end in a Big Rip, Ω_DE closing the budget.'],
+    // B is 0 to 1, and a gas with B = 0 is dust.
+    ['matter:0.05,eos:chaplygin', /^With B at 0 it would expand for ever at a falling pace/],
     ['matter:1,cmb:0', /^With any Ω_(m|k) (above|below) (0|1\.00) it would /],
   ])('%s', (code, sentence) => expect(said(code)).toMatch(sentence))
   test('is about the scenario itself', () => {

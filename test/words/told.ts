@@ -2,6 +2,7 @@
 import type { EndKind, OriginKind } from '../../lib/history/outcome'
 import type { MeasureKey } from '../../lib/quantities/measures'
 import { MEASURE_KEYS } from '../../lib/quantities/measures'
+import { budgetOf } from '../../lib/scenario/budget'
 import type { Scenario } from '../../lib/scenario/scenario'
 import type { Answer, Moment, MomentKind, Solution } from '../../lib/solve'
 
@@ -17,7 +18,7 @@ export const SCENARIO: Scenario = {
   name: null,
 }
 
-type Told = Omit<Solution, 'history' | 'budget' | 'notices'>
+type Told = Omit<Solution, 'history' | 'notices'>
 
 interface Sketch {
   readonly scenario?: Partial<Scenario>
@@ -29,8 +30,10 @@ interface Sketch {
 }
 
 export function told({ scenario, label, origin, end, measures = {}, moments = [] }: Sketch): Told {
+  const whole = { ...SCENARIO, ...scenario }
   return {
-    scenario: { ...SCENARIO, ...scenario },
+    scenario: whole,
+    budget: budgetOf(whole),
     code: 'h0:70,matter:0.3',
     label: label ?? 'one',
     origin: { kind: 'big-bang', time: -13.789, scale: 0, ...origin },

@@ -116,3 +116,18 @@ it('a crunch after a turnaround beyond all numbers is not said to be in the infi
   const end = { kind: 'crunch', time: null, scale: 0, turnaround: null } as const
   expect(text({ end })).toContain('ends in a Big Crunch later than can be computed')
 })
+
+describe('light in a closed space', () => {
+  // πR with R = 14 Gly is 44 Gly: no place is farther away.
+  const scenario = { closure: { given: 'curvature', value: -1 } } as const
+  it('that goes farther than the antipode comes everywhere', () => {
+    const measures = { eventHorizon: 65.7, curvatureRadius: 14, particleHorizon: 30 }
+    expect(text({ scenario, end: { kind: 'crunch', time: 120 }, measures })).toContain(
+      'reaches any place of the closed space before the end',
+    )
+  })
+  it('that does not has its reach', () => {
+    const measures = { eventHorizon: 43.9, curvatureRadius: 14, particleHorizon: 30 }
+    expect(text({ scenario, end: { kind: 'crunch', time: 120 }, measures })).toContain('reaches 43.9 Gly, beyond')
+  })
+})
