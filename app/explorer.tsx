@@ -9,6 +9,7 @@ import { useAddress } from './live/address'
 import { follow } from './live/follow'
 import { type Packed, unpacked } from './live/packed'
 import { tellViewsSeen, useExplorer } from './live/use-explorer'
+import { useKeptFocus } from './live/use-kept-focus'
 import { useShownFrame } from './live/use-shown-frame'
 import { useStill } from './live/use-still'
 import { useUnhurried } from './live/use-unhurried'
@@ -57,6 +58,7 @@ export function Explorer({ load, asked, children }: Props) {
   const ruled = { desk: useStill(desk, dragged), address: useStill(address, dragged) }
   useTitle(view.title)
   useMeanings()
+  useKeptFocus(moving)
   return (
     // biome-ignore lint/a11y: links stay links; what is caught here is the click that they get
     <div className="page" data-theme={desk.place.theme} onClick={address ? follow : undefined}>

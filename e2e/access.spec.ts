@@ -16,6 +16,8 @@ const PAIRS = [EVERY[0], EVERY[3], EVERY[4]]
 const PAGES = {
   '/': EVERY,
   '/?s=matter:none&s=h0:70': PAIRS,
+  '/?s=h0:70,matter:0.3&engine=0': PAIRS,
+  '/retune': PAIRS,
   '/not-there': PAIRS,
   '/method': PAIRS,
   '/words': PAIRS,
@@ -87,6 +89,68 @@ for (const colorScheme of ['light', 'dark'] as const) {
           : element.outerHTML.slice(0, 120)
       })
       expect(marked).toBe('')
+    }
+  })
+}
+
+const focused = (page: Page) => page.locator(':focus')
+
+test('what takes the place of something that had the focus gets it', async ({ page }) => {
+  await open(page, '/')
+  const tabs = page.getByRole('navigation', { name: 'Scenarios' })
+  await tabs.getByRole('link', { name: 'Copy' }).press('Enter')
+  await expect(tabs.getByRole('link')).toHaveCount(8)
+  await expect(focused(page)).toHaveText('Copy')
+  await tabs.getByRole('link', { name: 'Fading light' }).first().press('Enter')
+  await expect(page).toHaveURL(/focus=3/)
+  await expect(focused(page)).toHaveText('Fading light')
+
+  await page.locator('.field .reset').first().press('Enter')
+  await expect(focused(page)).toHaveRole('textbox')
+
+  const zoom = page.locator('.long-view').getByRole('navigation', { name: 'Range of the long view' })
+  await zoom.getByRole('link', { name: 'Closer' }).press('Enter')
+  await zoom.getByRole('link', { name: 'Whole range' }).press('Enter')
+  await expect(zoom.getByRole('link', { name: 'Whole range' })).toHaveCount(0)
+  await expect(focused(page)).toHaveText('Closer')
+})
+
+test('the galaxy that cannot be followed is told beside its field', async ({ page }) => {
+  await open(page, '/?view=reach')
+  const field = page.getByRole('textbox', { name: 'Galaxy seen at z' })
+  await field.fill('abc')
+  await field.press('Enter')
+  await expect(field).toHaveAttribute('aria-invalid', 'true')
+  await expect(field).toHaveAccessibleDescription(/above 0/)
+  await expect(field).toHaveValue('abc')
+  await field.fill('2')
+  await field.press('Enter')
+  await expect(page).toHaveURL(/galaxy=2/)
+  await expect(field).toBeFocused()
+})
+
+for (const [width, height] of [
+  [1280, 900],
+  [390, 844],
+] as const) {
+  test(`what has the focus is not hidden under the figure: ${width} px`, async ({ page }) => {
+    await page.setViewportSize({ width, height })
+    await open(page, '/')
+    await page.locator('.ingredients summary').first().focus()
+    for (let i = 0; i < 24; i++) {
+      await page.keyboard.press('Shift+Tab')
+      // WCAG 2.4.11: not entirely hidden.
+      const hidden = await page.evaluate(() => {
+        const element = document.activeElement as HTMLElement
+        if (element === document.body) return ''
+        const { left, top, width, height } = element.getBoundingClientRect()
+        const seen = [0.1, 0.5, 0.9].some((part) => {
+          const at = document.elementFromPoint(left + width / 2, top + part * height)
+          return at !== null && (element.contains(at) || at.contains(element))
+        })
+        return seen ? '' : element.outerHTML.slice(0, 120)
+      })
+      expect(hidden).toBe('')
     }
   })
 }

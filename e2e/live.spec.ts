@@ -399,7 +399,7 @@ test.describe('the cursor over the figure', () => {
     await page.keyboard.press('ArrowRight')
     await expect(readout(page)).toBeVisible()
     await expect(cursor(page)).toHaveAttribute('aria-valuetext', /^\+\d\.\d\d Gyr$/)
-    const voice = cursor(page).getByRole('status')
+    const voice = page.locator('.frame').getByRole('status').first()
     await expect(voice).toContainText(/Steady light: a 1\.0\d, z −0\.0\d; Fading light: a 1\.0\d/)
     await page.keyboard.press('End')
     await expect(voice).toContainText('Fading light: nothing')

@@ -111,7 +111,7 @@ test('keys zoom and say so', async ({ page }) => {
   await cursor(page).focus()
   await page.keyboard.press('+')
   await arrived(page, /from=.*&to=/)
-  await expect(cursor(page).getByRole('status')).toHaveText(/^Range: −\d.* Gyr to \+\d.* Gyr\.$/)
+  await expect(page.locator('.frame').getByRole('status').last()).toHaveText(/^Range: −\d.* Gyr to \+\d.* Gyr\.$/)
   const closer = page.url()
   await page.keyboard.press('Shift+ArrowRight')
   await expect(page).not.toHaveURL(closer)

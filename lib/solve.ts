@@ -18,7 +18,7 @@ import { hubbleTimeGyr } from './units'
 
 export type { Moment, MomentKind } from './quantities/moments'
 
-/** Version of the numbers: it rises when the same code gives other digits. */
+/** Version of the numbers: it rises when the same code gives other digits, beyond rounding. */
 export const ENGINE = '1'
 
 /** A number with its unit and an absolute bound on its numerical error, or the reason why there is none. */

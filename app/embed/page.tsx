@@ -8,6 +8,7 @@ import { linkQuery } from '../../lib/scenario/write'
 import { ENGINE } from '../../lib/solve'
 import { nameOf } from '../../lib/words/desk'
 import { THEMES } from '../../lib/words/place'
+import { DataTable, tableOf } from '../ui/data-table'
 import { Drawing } from '../ui/drawing'
 
 interface Props {
@@ -30,12 +31,15 @@ export default async function Embed({ searchParams }: Props) {
           <Drawing node={drawChart(figure, frame, 'chart')} />
         </div>
       ))}
-      <p className="origin">
-        {problems.length > 0 && 'The link could not be read as written. '}
-        <a href={home} target="_blank" rel="noopener">
-          Longhence
-        </a>
-      </p>
+      <div className="foot">
+        <DataTable {...tableOf(figure)} />
+        <p className="origin">
+          {problems.length > 0 && 'The link could not be read as written. '}
+          <a href={home} target="_blank" rel="noopener">
+            Longhence
+          </a>
+        </p>
+      </div>
     </main>
   )
 }

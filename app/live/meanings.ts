@@ -59,12 +59,24 @@ function boxOf(): HTMLElement {
   return box
 }
 
-/** Below the name, or above it where there is no room. */
+/** Below the name, or above it where there is more room; never over it. */
 function placed(open: HTMLElement, { left, top, bottom }: DOMRect): void {
+  open.style.maxHeight = ''
   const { width, height } = open.getBoundingClientRect()
-  const below = bottom + GAP + height <= innerHeight || top < height + GAP
+  const [above, below] = [top - 2 * GAP, innerHeight - bottom - 2 * GAP]
+  const goesBelow = height <= below || below >= above
+  const most = Math.min(height, Math.max(above, below))
+  open.style.maxHeight = `${most}px`
   open.style.left = `${Math.max(GAP, Math.min(left, innerWidth - width - GAP))}px`
-  open.style.top = `${Math.max(GAP, below ? Math.min(bottom + GAP, innerHeight - height - GAP) : top - GAP - height)}px`
+  open.style.top = `${goesBelow ? bottom + GAP : top - GAP - most}px`
+}
+
+/** It goes along with its name, as far as that is seen. */
+function moved(): void {
+  if (!box?.matches(':popover-open') || !shown) return
+  const place = shown.getBoundingClientRect()
+  if (place.bottom < 0 || place.top > innerHeight) hide()
+  else placed(box, place)
 }
 
 function hide(): void {
@@ -101,5 +113,5 @@ export function watchMeanings(): void {
     else hide()
   })
   document.addEventListener('keydown', ({ key }) => key === 'Escape' && hide())
-  document.addEventListener('scroll', hide, { passive: true })
+  document.addEventListener('scroll', moved, { passive: true })
 }

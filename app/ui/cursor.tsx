@@ -1,5 +1,5 @@
 import dynamic from 'next/dynamic'
-import { type KeyboardEvent, type RefObject, useLayoutEffect, useRef, useState } from 'react'
+import { type KeyboardEvent, type RefObject, useId, useLayoutEffect, useRef, useState } from 'react'
 import type { Picture, Shown } from '../../lib/figures/picture'
 import { fractionOf } from '../../lib/figures/scale'
 import { aside, between, closer, type Ends, ranged, wider } from '../../lib/figures/zoom'
@@ -29,10 +29,11 @@ interface Props {
 export function Cursor({ figure, picture, label, template, reset, links, lit, light }: Props) {
   const { x, now, readings, curves } = figure
   const ref = useRef<HTMLDivElement>(null)
+  const keys = useId()
   const scale = useScale(ref, picture)
   const [woken, wake] = useState(false)
   const [index, setIndex] = useState<number | null>(null)
-  const [voice, setVoice] = useState<'reading' | 'range' | null>(null)
+  const [speaks, speak] = useState(false)
   const last = readings.places.length - 1
   const home = homeOf(figure)
   const at = index === null ? null : Math.min(index, last)
@@ -43,7 +44,7 @@ export function Cursor({ figure, picture, label, template, reset, links, lit, li
   const choose = links && ((curve: number) => go(links[curve] ?? ''))
   const leave = () => {
     setIndex(null)
-    setVoice(null)
+    speak(false)
     light(null)
     // A chart that nobody looks at would be drawn again with every turn of a slider.
     wake(false)
@@ -60,60 +61,68 @@ export function Cursor({ figure, picture, label, template, reset, links, lit, li
     else return
     event.preventDefault()
     wake(event.key !== 'Escape')
-    setVoice(event.key === 'Escape' ? null : steps !== null ? 'range' : 'reading')
+    speak(event.key !== 'Escape' && steps === null)
   }
   return (
-    <div
-      ref={ref}
-      className="cursor"
-      role="slider"
-      tabIndex={0}
-      aria-label={label}
-      aria-valuemin={0}
-      aria-valuemax={last}
-      aria-valuenow={at ?? home}
-      aria-valuetext={placeText(x, readings.places[at ?? home] ?? 0)}
-      aria-keyshortcuts="+ - 0 Shift+ArrowLeft Shift+ArrowRight"
-      onKeyDown={press}
-      onFocus={() => wake(true)}
-      onBlur={leave}
-      onPointerEnter={() => wake(true)}
-      {...brush.handlers}
-      onPointerMove={(event) => {
-        // It may have left the plot for what stands beside it, and be back.
-        wake(true)
-        brush.handlers.onPointerMove(event)
-      }}
-      onPointerDown={(event) => {
-        wake(true)
-        brush.handlers.onPointerDown(event)
-      }}
-    >
-      {woken && area && (
-        <div className="cursor-area" style={area}>
-          <CursorChart
-            figure={figure}
-            width={area.width}
-            height={area.height}
-            plotHeight={scale.by * (picture.plot.bottom - picture.plot.top)}
-            index={at}
-            move={(to) => {
-              setIndex(to)
-              setVoice(null)
-            }}
-            leave={() => brush.isDragging() || leave()}
-            light={light}
-            choose={choose}
-          />
-          {brush.span && <div className="brush" style={brush.span} />}
-          {at !== null && !brush.span && <Readout figure={figure} index={at} lit={lit} width={area.width} />}
-        </div>
-      )}
+    <>
+      <div
+        ref={ref}
+        className="cursor"
+        role="slider"
+        tabIndex={0}
+        aria-label={label}
+        aria-valuemin={0}
+        aria-valuemax={last}
+        aria-valuenow={at ?? home}
+        aria-valuetext={placeText(x, readings.places[at ?? home] ?? 0)}
+        aria-describedby={keys}
+        aria-keyshortcuts="ArrowLeft ArrowRight ArrowUp ArrowDown Home End PageUp PageDown Enter Escape + - 0 Shift+ArrowLeft Shift+ArrowRight"
+        onKeyDown={press}
+        onFocus={() => wake(true)}
+        onBlur={leave}
+        onPointerEnter={() => wake(true)}
+        {...brush.handlers}
+        onPointerMove={(event) => {
+          // It may have left the plot for what stands beside it, and be back.
+          wake(true)
+          brush.handlers.onPointerMove(event)
+        }}
+        onPointerDown={(event) => {
+          wake(true)
+          brush.handlers.onPointerDown(event)
+        }}
+      >
+        {woken && area && (
+          <div className="cursor-area" style={area}>
+            <CursorChart
+              figure={figure}
+              width={area.width}
+              height={area.height}
+              plotHeight={scale.by * (picture.plot.bottom - picture.plot.top)}
+              index={at}
+              move={(to) => {
+                setIndex(to)
+                speak(false)
+              }}
+              leave={() => brush.isDragging() || leave()}
+              light={light}
+              choose={choose}
+            />
+            {brush.span && <div className="brush" style={brush.span} />}
+            {at !== null && !brush.span && <Readout figure={figure} index={at} lit={lit} width={area.width} />}
+          </div>
+        )}
+      </div>
       <p className="spoken" role="status">
-        {voice === 'reading' && readingText(figure, at ?? home, lit)}
-        {voice === 'range' && rangeText(x)}
+        {speaks && readingText(figure, at ?? home, lit)}
       </p>
-    </div>
+      <p className="spoken" role="status">
+        {reset && rangeText(x)}
+      </p>
+      <p className="keys" id={keys}>
+        ← → read; ↑ ↓ choose a curve; + − 0 zoom
+      </p>
+    </>
   )
 }
 

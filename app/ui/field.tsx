@@ -67,7 +67,10 @@ function Control({ field, id, draft, hand, live }: ControlProps) {
     case 'closing':
       return (
         <span className="entry">
-          <output id={id}>{field.shown}</output>
+          {/* It changes with every turn of a slider. */}
+          <output id={id} aria-live="off">
+            {field.shown}
+          </output>
           <input type="hidden" name={field.name} value={field.value} />
         </span>
       )

@@ -3,6 +3,9 @@ import type { Explorer } from '../../lib/answers/explorer'
 import type { Panel } from '../../lib/answers/panel'
 import { go } from '../live/address'
 
+/** Farther away nothing is followed. */
+const FARTHEST = 1e4
+
 interface Props {
   readonly view: Explorer
   readonly galaxy: NonNullable<Panel['galaxy']>
@@ -12,11 +15,13 @@ interface Props {
 /** The redshift of the galaxy that is followed. Until the page is alive a plain form. */
 export function Galaxy({ view, galaxy, live }: Props) {
   const [text, setText] = useState(String(galaxy.redshift))
+  const [wrong, setWrong] = useState(false)
   const take = (event: FormEvent) => {
     event.preventDefault()
     const redshift = Number(text.trim().replace(',', '.') || Number.NaN)
-    if (redshift > 0 && redshift <= 1e4) go(galaxy.template.replace('GALAXY', String(redshift)))
-    else setText(String(galaxy.redshift))
+    const isGood = redshift > 0 && redshift <= FARTHEST
+    setWrong(!isGood)
+    if (isGood) go(galaxy.template.replace('GALAXY', String(redshift)))
   }
   return (
     <form className="galaxy" action="/" method="get" autoComplete="off" onSubmit={take}>
@@ -35,13 +40,23 @@ export function Galaxy({ view, galaxy, live }: Props) {
           inputMode="decimal"
           name="galaxy"
           value={text}
-          onChange={({ target }) => setText(target.value)}
+          aria-invalid={wrong || undefined}
+          aria-describedby={wrong ? 'galaxy-complaint' : undefined}
+          onChange={({ target }) => {
+            setText(target.value)
+            setWrong(false)
+          }}
           onBlur={live ? take : undefined}
         />
       </label>
       <button type="submit" className="act">
         Follow
       </button>
+      {wrong && (
+        <p id="galaxy-complaint" className="complaint" role="alert">
+          A redshift is a number above 0 and up to {FARTHEST}.
+        </p>
+      )}
     </form>
   )
 }

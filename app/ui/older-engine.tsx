@@ -8,7 +8,7 @@ interface Props {
 export function OlderEngine({ asked, today }: Props) {
   if (asked === undefined || asked === today || !/^[\w.-]{1,20}$/.test(asked)) return null
   return (
-    <aside className="older-engine" role="note">
+    <aside className="older-engine" aria-label="About this link">
       This link was made with engine {asked}. Today’s is engine {today}, whose digits may differ; the scenarios are the
       same.
     </aside>

@@ -1,6 +1,5 @@
 /** What the cursor reads, in words and rounded numbers. */
-import type { Axis } from '../../lib/figures/chart'
-import type { Shown } from '../../lib/figures/picture'
+import type { Axis, Chart } from '../../lib/figures/chart'
 import { fixed, signed, significant, withUnit } from '../../lib/words/number'
 
 export function timeText(time: number): string {
@@ -29,7 +28,12 @@ export interface Reading {
   readonly redshift: string | null
 }
 
-export function readingsAt({ curves, readings, y }: Shown, index: number): readonly Reading[] {
+/** What is read of a figure. */
+export type Read = Pick<Chart, 'x' | 'y' | 'readings'> & {
+  readonly curves: readonly Pick<Chart['curves'][number], 'tone' | 'name'>[]
+}
+
+export function readingsAt({ curves, readings, y }: Read, index: number): readonly Reading[] {
   return curves.map(({ tone, name }, i) => {
     const value = readings.values[i]?.[index] ?? null
     const redshift = y.quantity !== 'scale' || value === null || value === 0 ? null : redshiftText(1 / value - 1)
@@ -42,7 +46,7 @@ function redshiftText(redshift: number): string {
 }
 
 /** For a voice: the curve that stands out, or all. */
-export function readingText(figure: Shown, index: number, lit: number | null): string {
+export function readingText(figure: Read, index: number, lit: number | null): string {
   const { x, y, readings } = figure
   const told = readingsAt(figure, index).filter((_, i) => lit === null || i === lit)
   const symbol = y.quantity === 'scale' ? 'a ' : ''

@@ -77,11 +77,10 @@ function TextField({ field, label, unit, ask, complaints, hand }: TextProps) {
         />
         <span className="unit">{unit}</span>
       </span>
-      {complaint && (
-        <p id={`${id}-complaint`} className="complaint" role="alert">
-          {complaint}
-        </p>
-      )}
+      {/* It may change with every key, and is not to interrupt. */}
+      <p id={`${id}-complaint`} className="complaint" role="status">
+        {complaint}
+      </p>
     </div>
   )
 }

@@ -88,6 +88,13 @@ interface ReadingsProps extends Captions {
   readonly state: string | null
 }
 
+/** The first reading, for those who do not see the others change. */
+function spokenOf({ at: [first], scenarios }: RulerView, here: string): string {
+  if (!first) return here
+  const cells = first.cells.map((cell, i) => `${scenarios.length > 1 ? `${scenarios[i]?.name} ` : ''}${cell ?? 'none'}`)
+  return `${here}: ${first.label} ${cells.join(', ')} ${first.unit}`
+}
+
 function Readings({ view, state, here, there }: ReadingsProps) {
   const { at, between, notes, downloads } = view
   if (at.length === 0 && between.length === 0) {
@@ -97,6 +104,9 @@ function Readings({ view, state, here, there }: ReadingsProps) {
     <div className="readings" aria-busy={state ? true : undefined}>
       <p className="state-of-readings" role="status">
         {state}
+      </p>
+      <p className="spoken" role="status">
+        {state ? '' : spokenOf(view, here)}
       </p>
       {at.length > 0 && <RulerTable view={view} rows={at} of="reading" caption={here} />}
       {between.length > 0 && <RulerTable view={view} rows={between} of="between" caption={there} />}

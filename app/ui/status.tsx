@@ -1,6 +1,7 @@
 import type { Explorer } from '../../lib/answers/explorer'
 import type { Trouble } from '../live/use-explorer'
 import { useLate } from '../live/use-late'
+import { useStill } from '../live/use-still'
 import { Sentence } from './symbol'
 
 /** Sooner nobody misses anything. Milliseconds. */
@@ -16,6 +17,8 @@ interface Props {
 /** At the lower edge: that something is still on its way, or why it does not come. */
 export function Status({ view, moving, waiting, trouble }: Props) {
   const late = useLate(waiting && !trouble, PATIENCE)
+  // What stays the same is not said again.
+  const said = useStill(told(view), moving || waiting)
   return (
     <>
       {trouble && (
@@ -30,9 +33,13 @@ export function Status({ view, moving, waiting, trouble }: Props) {
           )}
         </div>
       )}
-      {late && <p className="state">Calculating</p>}
+      {late && (
+        <p className="state" role="status">
+          Calculating
+        </p>
+      )}
       <p className="spoken" role="status">
-        {moving || waiting ? '' : told(view)}
+        {said}
       </p>
     </>
   )

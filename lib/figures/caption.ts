@@ -5,6 +5,8 @@ import { fixed, signed, significant } from '../words/number'
 import { capital, joined, lowered } from '../words/sentence'
 import type { Told } from '../words/told'
 import { verdictOf } from '../words/verdict'
+import type { Ribbon } from './chart'
+import type { Eras } from './eras'
 import type { Window } from './window'
 
 type Named = Told & Pick<Solution, 'label'>
@@ -49,10 +51,24 @@ function hatching(labels: readonly string[]): string {
   return `Hatched: ${joined(labels)} ${verb} a law of dark energy beyond the data it describes.`
 }
 
-export function longViewText(solutions: readonly Named[], { from, to, top }: Window): string {
+export function longViewText(
+  solutions: readonly Named[],
+  { from, to, top }: Window,
+  ribbons: readonly Pick<Ribbon, 'dash' | 'eras'>[],
+): string {
   const frame = `Line chart of the scale factor from 0 to ${significant(top, 2)} (1 today) against time from ${timeText(from)} to ${timeText(to)} Gyr.`
-  const curves = solutions.map((one) => `${one.label}: ${lowered(verdictOf(one, null).sentences[0] ?? '')}`)
+  const curves = solutions.map(
+    (one, i) =>
+      `${one.label}: ${lowered(verdictOf(one, null).sentences[0] ?? '')}${erasText(ribbons.find(({ dash }) => dash === i)?.eras.dominant)}`,
+  )
   return [frame, ...curves].join(' ')
+}
+
+/** ` What dominates: matter until −3.8 Gyr, then dark energy.` */
+function erasText(spans: Eras['dominant'] = []): string {
+  if (spans.length === 0) return ''
+  const parts = spans.map(({ to, value }, i) => (i === spans.length - 1 ? value : `${value} until ${timeText(to)} Gyr`))
+  return ` What dominates: ${parts.join(', then ')}.`
 }
 
 function timeText(time: number): string {

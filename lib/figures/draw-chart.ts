@@ -44,8 +44,8 @@ export function plotOfChart(chart: Chart, frame: Frame): Plot {
 }
 
 /** Of the whole drawing: the ribbons hang below the frame. */
-export function heightOfChart({ ribbons }: Chart, frame: Frame): number {
-  return px(frame.height + ribbonsHeight(ribbons, frame))
+export function heightOfChart(chart: Chart, frame: Frame): number {
+  return px(frame.height + (chart.ribbons.length > 0 ? ribbonsHeight(chart, plotOfChart(chart, frame), frame) : 0))
 }
 
 /** Left margin with the shortest ticks, in units of the type. */

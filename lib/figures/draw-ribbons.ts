@@ -15,21 +15,29 @@ const BAR = 1.08
 const ABOVE = 0.16
 const WORD = 0.78
 
-export function ribbonsHeight({ length: rows }: readonly Ribbon[], { type, compact }: Frame): number {
-  return rows === 0 ? 0 : (rows * (compact ? PITCH.compact : PITCH.wide) + 0.5) * type
+/** Below the ribbons, where their colours are named that have no room for a word. */
+const KEY = 1.3
+
+export function ribbonsHeight({ ribbons }: Pick<Chart, 'ribbons'>, plot: Plot, frame: Frame): number {
+  return rowsHeight(ribbons.length, frame) + (unnamed(ribbons, plot, frame).length > 0 ? KEY * frame.type : 0)
 }
+
+const rowsHeight = (rows: number, { type, compact }: Frame): number =>
+  rows === 0 ? 0 : (rows * (compact ? PITCH.compact : PITCH.wide) + 0.5) * type
 
 /** The ribbons hang below the frame's own height. */
 export function drawRibbons({ ribbons, now, x: axis }: Chart, plot: Plot, frame: Frame): SvgNode[] {
   const pitch = (frame.compact ? PITCH.compact : PITCH.wide) * frame.type
-  const drawn = ribbons.map((one, i) => drawRibbon(one, frame.height + 0.3 * frame.type + i * pitch, plot, frame))
+  const rows = ribbons.map((one, i) => drawRibbon(one, frame.height + 0.3 * frame.type + i * pitch, plot, frame))
+  const below = frame.height + rowsHeight(ribbons.length, frame)
+  const drawn = [...rows, ...drawKey(unnamed(ribbons, plot, frame), below, plot, frame)]
   if (ribbons.length === 0 || now === null || !within(axis, now)) return drawn
   const x = plot.x(now)
   const line = svg('line', {
     x1: x,
     x2: x,
     y1: frame.height,
-    y2: px(frame.height + ribbonsHeight(ribbons, frame)),
+    y2: px(below),
     class: 'now',
   })
   return [...drawn, line]
@@ -83,10 +91,37 @@ function key(place: number, y: number, plot: Plot, type: number): SvgNode {
   })
 }
 
-function word({ from, to, value }: Stretch<Era>, y: number, plot: Plot, type: number): SvgNode[] {
+/** Narrower than this many pixels nothing is seen. */
+const SEEN = 2
+
+/** The eras that are seen and have their word nowhere. */
+function unnamed(ribbons: readonly Ribbon[], plot: Plot, { type }: Frame): readonly Era[] {
+  const spans = ribbons.flatMap(({ eras }) => eras.dominant)
+  const named = new Set(spans.filter((span) => wordStart(span, plot, type) !== null).map(({ value }) => value))
+  const seen = spans.filter(({ from, to, value }) => !named.has(value) && plot.x(to) - plot.x(from) >= SEEN)
+  return [...new Set(seen.map(({ value }) => value))]
+}
+
+function drawKey(eras: readonly Era[], top: number, plot: Plot, { type }: Frame): SvgNode[] {
   const size = px(WORD * type)
-  const start = startOf(plot.x(from), plot.x(to), plot.x(0), textWidth(value, size) + 0.6 * type)
+  const y = px(top + 0.25 * type)
+  let x = plot.left
+  return eras.flatMap((era) => {
+    const swatch = svg('rect', { x: px(x), y, width: px(type), height: px(0.8 * type), class: classOf(era) })
+    const place = { x: px(x + 1.35 * type), y: px(y + 0.68 * type), 'font-size': size }
+    x += 2.4 * type + textWidth(era, size)
+    return [swatch, svg('text', { ...place, class: 'axis' }, era)]
+  })
+}
+
+const wordStart = ({ from, to, value }: Stretch<Era>, plot: Plot, type: number): number | null =>
+  startOf(plot.x(from), plot.x(to), plot.x(0), textWidth(value, px(WORD * type)) + 0.6 * type)
+
+function word(span: Stretch<Era>, y: number, plot: Plot, type: number): SvgNode[] {
+  const { value } = span
+  const start = wordStart(span, plot, type)
   if (start === null) return []
+  const size = px(WORD * type)
   const place = { x: px(start + 0.45 * type), y: px(y + 0.79 * type), 'font-size': size }
   return [svg('text', { ...place, class: `era-word ${value.replace(' ', '-')}` }, value)]
 }

@@ -40,7 +40,7 @@ export function longView(entries: readonly Entry<Drawn>[], focus = 0, wanted?: W
       logarithmic: range.scaling !== 'linear',
       future: window.to > 0,
     }),
-    alternative: longViewText(solutions, window),
+    alternative: longViewText(solutions, window, ribbons),
   }
 }
 

@@ -1,5 +1,5 @@
 /**
- * Recombination and the sound horizon, by fits for the standard early universe. Each is null outside the range of its fit.
+ * Recombination and the sound horizon, by fits for the standard early universe. Each is missing outside the range of its fit.
  */
 import { eventAtScale, isEvent } from '../history/event'
 import type { History } from '../history/history'
@@ -12,10 +12,24 @@ import { comovingDistance } from './sight'
 
 /** z* of Hu & Sugiyama 1996 is 0.18% high of the values of Planck 2018 (arXiv:1807.06209, Table 2, five columns). */
 const CALIBRATION = 0.99818
-/** z* strays 0.03 from those columns once calibrated on them; ten times that away from them, where nothing was fitted. */
-const RECOMBINATION_FIT_ERROR = 0.3
-/** How far z_drag strays from those columns. */
-const DRAG_FIT_ERROR = 0.05
+
+/** How far off a fit may be: at the parameters of those columns, for each unit of N_eff away from them, and for each e-fold. */
+interface Straying {
+  readonly there: number
+  readonly nu: number
+  readonly baryons: number
+  readonly matter: number
+  readonly cmb: number
+}
+
+/** N_eff, Ω_b h², Ω_m h² and T_CMB of those columns. */
+const THERE = { nu: 3.046, baryons: 0.0224, matter: 0.143, cmb: 2.7255 }
+/**
+ * The columns are met within 0.03 and 0.05. Elsewhere the fits, which know neither N_eff nor T_CMB, depart so far from an integration of
+ * recombination with helium (Peebles 1968, ApJ 153, 1; test/reference/recombination.py), with some room.
+ */
+const RECOMBINATION_FIT: Straying = { there: 0.1, nu: 0.5, baryons: 2.3, matter: 0.4, cmb: 1150 }
+const DRAG_FIT: Straying = { there: 0.05, nu: 0.4, baryons: 1.4, matter: 0.8, cmb: 1350 }
 
 /** Why the fits do not hold, or null where they do: the ranges within which they were made or checked. */
 function outside({ radiation, baryons, h0, matter }: Scenario): Missing | null {
@@ -33,6 +47,19 @@ function outside({ radiation, baryons, h0, matter }: Scenario): Missing | null {
   return missing(`the fit holds for ${name} from ${low} to ${high}, and here it is ${Number(value.toPrecision(4))}`)
 }
 
+function fitError({ there, nu, baryons, matter, cmb }: Straying, { h0, radiation, ...scenario }: Scenario): number {
+  /* v8 ignore if -- without a temperature there is no fit */
+  if (radiation.kind !== 'thermal') return Number.NaN
+  const folds = (value: number, known: number) => Math.abs(Math.log(value / known))
+  return (
+    there +
+    nu * Math.abs(radiation.nu - THERE.nu) +
+    baryons * folds(scenario.baryons, THERE.baryons) +
+    matter * folds(scenario.matter * (h0 / 100) ** 2, THERE.matter) +
+    cmb * folds(radiation.cmb, THERE.cmb)
+  )
+}
+
 /** z of last scattering: Hu & Sugiyama 1996, ApJ 471, 542, eq. E-1, times 0.99818. */
 export function recombinationRedshift(scenario: Scenario): Outcome {
   const refusal = outside(scenario)
@@ -42,7 +69,7 @@ export function recombinationRedshift(scenario: Scenario): Outcome {
   const g2 = 0.56 / (1 + 21.1 * b ** 1.81)
   return {
     value: CALIBRATION * 1048 * (1 + 0.00124 * b ** -0.738) * (1 + g1 * m ** g2),
-    error: RECOMBINATION_FIT_ERROR,
+    error: fitError(RECOMBINATION_FIT, scenario),
   }
 }
 
@@ -52,7 +79,7 @@ export function dragRedshift(scenario: Scenario): Outcome {
   if (refusal) return refusal
   const [b, m] = [scenario.baryons, scenario.matter * (scenario.h0 / 100) ** 2]
   const value = (1 + 428.169 * b ** 0.256459 * m ** 0.616388 + 925.56 * m ** 0.751615) * m ** -0.714129
-  return { value, error: DRAG_FIT_ERROR }
+  return { value, error: fitError(DRAG_FIT, scenario) }
 }
 
 /** Of cold matter: with less the variable is as good. */

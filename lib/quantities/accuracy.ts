@@ -12,9 +12,12 @@ export const GROWTH = 'Within 10⁻¹⁰ of itself.'
 /** Of a difference of two distances. */
 export const DIFFERENCE = 'Within 10⁻¹² of the larger of the two that it lies between.'
 export const LAST_SCATTERING =
-  'Stated as ± 0.3: the fit strays 0.03 from the columns of Planck 2018 that it is calibrated on, ten times that is allowed for elsewhere.'
-export const DRAG_EPOCH = 'Stated as ± 0.05: so far the fit strays from the columns of Planck 2018.'
-export const FROM_DRAG_FIT = 'The stated error follows from ± 0.05 in z_d: about 3 × 10⁻⁵ of itself.'
-export const FROM_SCATTERING_FIT = 'The stated error follows from ± 0.3 in z_*: about 2 × 10⁻⁴ of itself.'
+  'Stated as ± 0.1 at the parameters of Planck 2018, where the fit strays 0.03 from the columns that it is calibrated on, and as more away from them, where it departs from an integration of recombination.'
+export const DRAG_EPOCH =
+  'Stated as ± 0.05 at the parameters of Planck 2018, so far as the fit strays from the columns there, and as more away from them, where it departs from an integration of recombination.'
+export const FROM_DRAG_FIT =
+  'The stated error follows from that of z_d: about 3 × 10⁻⁵ of itself at the parameters of Planck 2018.'
+export const FROM_SCATTERING_FIT =
+  'The stated error follows from that of z_*: about 10⁻⁴ of itself at the parameters of Planck 2018.'
 export const ORDER_OF_MAGNITUDE =
   'An order of magnitude: a circular orbit loses its bound state already at (27/256)(2π/P)², about three times as long before a rip.'
