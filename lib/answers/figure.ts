@@ -116,9 +116,9 @@ function readOrder(values: ReadonlyMap<string, string>, faults: Fault[], scenari
   return { view, place, format, size, theme, dpi }
 }
 
-/** At most: each scenario has a ribbon below the plot. In units of the type. */
+/** At most: each scenario has a ribbon below the plot, and the foot eight lines. In units of the type. */
 const RIBBON = 2
-const FRAME = 5
+const FRAME = 12.5
 
 function pixelsOf({ width, height, fixed, type }: Size, scenarios: number, dpi: number): number {
   const highest = fixed ? height : height + (scenarios * RIBBON + FRAME) * type

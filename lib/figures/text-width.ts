@@ -32,6 +32,20 @@ export function fitted(text: string, size: number, width: number): string {
   return `${signs.join('').trimEnd()}…`
 }
 
+/** A text in as many lines as it needs, up to `most`, broken after blanks, commas and semicolons; what is left then is cut. */
+export function inLines(text: string, size: number, width: number, most: number): readonly string[] {
+  const lines: string[] = []
+  let line = ''
+  for (const piece of text.split(/(?<=[ ,;])/)) {
+    if (line !== '' && lines.length < most - 1 && textWidth((line + piece).trimEnd(), size) > width) {
+      lines.push(line.trimEnd())
+      line = ''
+    }
+    line += piece
+  }
+  return [...lines, fitted(line.trimEnd(), size, width)]
+}
+
 /** A text in one line or, where that is too short, in two, broken between words. */
 export function wrapped(text: string, size: number, width: number): readonly string[] {
   const words = text.split(' ')

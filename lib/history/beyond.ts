@@ -26,7 +26,7 @@ export function beyondPanels(
 ): Beyond {
   const infinite = [Number.POSITIVE_INFINITY, 0] as const
   const nothing = [0, 0] as const
-  if (end.kind === 'double') return { tail: staticTail(model, direction, end.N), time: infinite, conformal: infinite }
+  if (end.kind === 'double') return { tail: staticTail(model, end.N), time: infinite, conformal: infinite }
   if (end.kind === 'none' && end.farRoot !== null && stopped !== 'tail') return turningFar(model, direction, edge)
   const ends = end.kind === 'root' || (end.kind === 'singular' && Math.abs(end.N) <= FARTHEST)
   if (ends || stopped === 'end') return { tail: null, time: nothing, conformal: nothing }

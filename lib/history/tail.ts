@@ -15,7 +15,6 @@ export type Clock = 'time' | 'conformal'
 export interface Tail {
   /** Where it begins. */
   readonly N: number
-  readonly direction: Direction
   readonly time: TailIntegral
   readonly conformal: TailIntegral
   /** Of E². */
@@ -190,7 +189,6 @@ function powerTail(
   const terms = inverseRoot(corrections)
   return {
     N,
-    direction,
     time: { kind: 'power', scale, kappa, terms },
     conformal: { kind: 'power', scale: scale * Math.exp(-N), kappa: kappa + direction, terms },
     corrections,
@@ -205,19 +203,21 @@ function powerTail(
 /** Nearest approach in ln a to a static state that is followed; nearer, a is that of the static state to all its digits. */
 export const STATIC_NEAREST = 1e-16
 
-/** Next to a static state at N, E = κ d at the distance d in ln a: D counts by how many powers of e nearer it comes still. */
-export function staticTail({ derivatives }: Model, direction: Direction, N: number): Tail | null {
-  const kappa = Math.sqrt(derivatives(N).second / 2)
-  if (!(kappa > 0 && Number.isFinite(kappa))) return null
+/**
+ * Next to a static state at N, E = κ d at the distance d in ln a: D counts by how many powers of e nearer it comes still. At the edge of
+ * a law, where E² has no such form, it is at rest by then, and D is the time.
+ */
+export function staticTail({ derivatives }: Model, N: number): Tail {
+  const steep = Math.sqrt(derivatives(N).second / 2)
+  const kappa = steep > 0 && Number.isFinite(steep) ? steep : null
   const integral = (scale: number): TailIntegral => ({ kind: 'power', scale, kappa: 0, terms: [] })
   return {
     N,
-    direction,
-    time: integral(1 / kappa),
-    conformal: integral(Math.exp(-N) / kappa),
+    time: integral(1 / (kappa ?? 1)),
+    conformal: integral(Math.exp(-N) / (kappa ?? 1)),
     corrections: [],
     left: 0,
-    expansion: (D) => (kappa * STATIC_NEAREST * Math.exp(-D)) ** 2,
+    expansion: (D) => ((kappa ?? 0) * STATIC_NEAREST * Math.exp(-D)) ** 2,
   }
 }
 
@@ -227,7 +227,6 @@ function slowTail(N: number, direction: Direction, density: number, law: Logarit
   const excess = law.overTwo / 2
   return {
     N,
-    direction,
     time: { kind: 'slow', rate, excess, scale, decay: 0 },
     conformal: { kind: 'slow', rate, excess, scale: scale * Math.exp(-N), decay: direction },
     corrections: [],

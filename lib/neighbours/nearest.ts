@@ -23,9 +23,8 @@ const WAYS: readonly Way[] = [-1, 1]
 interface Candidate {
   readonly one: Free
   readonly bracket: Bracket
-  /** Bounds of the change as a share of the slider. */
+  /** The least that the change can be, as a share of the slider. */
   readonly least: number
-  readonly most: number
 }
 
 /**
@@ -57,7 +56,6 @@ function candidateOf(one: Free, way: Way, today: Kinds, purse: Purse): readonly 
     one,
     bracket,
     least: Math.abs(bracket.near - one.value) / width,
-    most: Math.abs(bracket.far - one.value) / width,
   }))
 }
 

@@ -1,7 +1,7 @@
 /** A figure upon its sheet: ground, heading, drawing and the line that says where it comes from. */
 import type { Frame } from '../figures/plot'
 import { px, type SvgNode, svg } from '../figures/svg'
-import { fitted, wrapped } from '../figures/text-width'
+import { fitted, inLines, wrapped } from '../figures/text-width'
 import type { Size } from './sizes'
 import { styled } from './style'
 import type { Palette } from './theme'
@@ -36,7 +36,9 @@ export interface Sheet {
 const TYPE = 15
 /** In units of the type. */
 const MARGIN = 0.9
-const FOOT = 1.5
+const FOOT = { first: 1.5, more: 1.05 }
+/** Six scenarios with long names need so many lines of a column. */
+const MOST_FOOT = 8
 const HEADING = 1.7
 /** Sizes of letters over that of the type. */
 const FOOT_SIZE = 0.78
@@ -49,7 +51,8 @@ export function sheetOf(picture: Picture, size: Size, palette: Palette, { headin
   const inner = px(width - 2 * margin)
   const lines = size.headed ? headlines(heading, inner) : []
   const top = margin + lines.length * HEADING * TYPE
-  const bottom = margin + FOOT * TYPE
+  const origin = inLines(foot, FOOT_SIZE * TYPE, inner, MOST_FOOT)
+  const bottom = margin + (FOOT.first + (origin.length - 1) * FOOT.more) * TYPE
   const { drawing, height } = drawnIn(picture, size, { width: inner, height: size.height / scale, taken: top + bottom })
   const node = svg(
     'g',
@@ -57,7 +60,10 @@ export function sheetOf(picture: Picture, size: Size, palette: Palette, { headin
     svg('rect', { x: 0, y: 0, width, height, fill: palette('ground') }),
     ...lines.map((line, i) => headline(line, i, margin, inner)),
     svg('g', { transform: `translate(${px(margin)} ${px(top)})` }, ...drawing.children),
-    text(foot, { x: margin, y: height - 0.75 * margin, size: FOOT_SIZE, width: inner }, 'foot'),
+    ...origin.map((line, i) => {
+      const y = height - 0.75 * margin - (origin.length - 1 - i) * FOOT.more * TYPE
+      return text(line, { x: margin, y, size: FOOT_SIZE, width: inner }, 'foot')
+    }),
   )
   return { node: styled(node, palette), ground: palette('ground'), width, height, scale }
 }

@@ -5,7 +5,6 @@ import {
   eventAtAge,
   eventAtScale,
   eventAtTime,
-  expansionAtEvent,
   type Found,
   isEvent,
   sinceNow,
@@ -29,8 +28,6 @@ export interface Instant extends Event {
   readonly conformal: number
   /** Which time was asked for, so that the place is the result of a search; null where it follows from a. */
   readonly asked: 'time' | 'age' | null
-  /** E² = H²/H₀². */
-  readonly expansion: number
 }
 
 export const isInstant = (found: Instant | Missing): found is Instant => 'place' in found
@@ -107,6 +104,5 @@ export function instantOf({ scenario, history }: ColumnSubject, event: Event, gi
     age: given.age ?? sinceOrigin(history, event, 'time') * gyr,
     conformal: sinceNow(history, event, 'conformal'),
     asked: given.time !== undefined ? 'time' : given.age !== undefined ? 'age' : null,
-    expansion: expansionAtEvent(event),
   }
 }

@@ -24,6 +24,6 @@ export function readQuery(
 function tooMany(values: readonly string[]): Problem[] {
   if (values.length <= MOST_SCENARIOS) return []
   const message = `There are ${values.length} scenarios.`
-  const one = fault(QUERY, values[MOST_SCENARIOS], `at most ${MOST_SCENARIOS} times`, message)
+  const one = fault(QUERY, values[MOST_SCENARIOS], `at most ${MOST_SCENARIOS}`, message)
   return problemsOf([one], MOST_SCENARIOS)
 }

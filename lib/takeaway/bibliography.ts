@@ -10,7 +10,6 @@ export interface Publication {
   readonly volume?: string
   readonly pages?: string
   readonly eprint?: string
-  readonly publisher?: string
 }
 
 type Row = readonly [
