@@ -119,7 +119,7 @@ test.describe('without JavaScript', () => {
     await agrees(page)
     await page.getByRole('textbox', { name: 'sky area' }).fill('much')
     await page.getByRole('button', { name: 'Read', exact: true }).click()
-    await expect(page.getByRole('alert').filter({ hasText: 'square degrees' })).toBeVisible()
+    await expect(page.locator('.complaint', { hasText: 'square degrees' })).toBeVisible()
     await page.getByRole('button', { name: 'Apply' }).click()
     await expect(page).toHaveURL(/until=2\.1/)
   })

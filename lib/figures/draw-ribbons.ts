@@ -15,11 +15,13 @@ const BAR = 1.08
 const ABOVE = 0.16
 const WORD = 0.78
 
-/** Below the ribbons, where their colours are named that have no room for a word. */
+/** A row below the ribbons, where their colours are named that have no room for a word, and none beside the ribbons. */
 const KEY = 1.3
 
 export function ribbonsHeight({ ribbons }: Pick<Chart, 'ribbons'>, plot: Plot, frame: Frame): number {
-  return rowsHeight(ribbons.length, frame) + (unnamed(ribbons, plot, frame).length > 0 ? KEY * frame.type : 0)
+  const eras = unnamed(ribbons, plot, frame)
+  const below = eras.length > 0 && !fitsBeside(eras, ribbons.length, plot, frame)
+  return rowsHeight(ribbons.length, frame) + (below ? KEY * frame.type : 0)
 }
 
 const rowsHeight = (rows: number, { type, compact }: Frame): number =>
@@ -30,7 +32,15 @@ export function drawRibbons({ ribbons, now, x: axis }: Chart, plot: Plot, frame:
   const pitch = (frame.compact ? PITCH.compact : PITCH.wide) * frame.type
   const rows = ribbons.map((one, i) => drawRibbon(one, frame.height + 0.3 * frame.type + i * pitch, plot, frame))
   const below = frame.height + rowsHeight(ribbons.length, frame)
-  const drawn = [...rows, ...drawKey(unnamed(ribbons, plot, frame), below, plot, frame)]
+  const eras = unnamed(ribbons, plot, frame)
+  const keys = fitsBeside(eras, ribbons.length, plot, frame)
+    ? eras.map((era, i) => ({
+        era,
+        x: plot.right + BESIDE * frame.type,
+        y: below - (i + 1) * pitch + 0.26 * frame.type,
+      }))
+    : inRow(eras, below + 0.25 * frame.type, plot, frame)
+  const drawn = [...rows, ...keys.flatMap((key) => drawKey(key, frame))]
   if (ribbons.length === 0 || now === null || !within(axis, now)) return drawn
   const x = plot.x(now)
   const line = svg('line', {
@@ -102,16 +112,35 @@ function unnamed(ribbons: readonly Ribbon[], plot: Plot, { type }: Frame): reado
   return [...new Set(seen.map(({ value }) => value))]
 }
 
-function drawKey(eras: readonly Era[], top: number, plot: Plot, { type }: Frame): SvgNode[] {
-  const size = px(WORD * type)
-  const y = px(top + 0.25 * type)
-  let x = plot.left
-  return eras.flatMap((era) => {
-    const swatch = svg('rect', { x: px(x), y, width: px(type), height: px(0.8 * type), class: classOf(era) })
-    const place = { x: px(x + 1.35 * type), y: px(y + 0.68 * type), 'font-size': size }
-    x += 2.4 * type + textWidth(era, size)
-    return [swatch, svg('text', { ...place, class: 'axis' }, era)]
+/** Right of the plot, in units of the type. */
+const BESIDE = 0.8
+
+function fitsBeside(eras: readonly Era[], rows: number, plot: Plot, { type, width }: Frame): boolean {
+  const widest = Math.max(0, ...eras.map((era) => keyWidth(era, type)))
+  return eras.length <= rows && plot.right + BESIDE * type + widest <= width
+}
+
+const keyWidth = (era: Era, type: number): number => 1.35 * type + textWidth(era, px(WORD * type))
+
+interface Keyed {
+  readonly era: Era
+  readonly x: number
+  readonly y: number
+}
+
+function inRow(eras: readonly Era[], y: number, plot: Plot, { type }: Frame): readonly Keyed[] {
+  let next = plot.left
+  return eras.map((era) => {
+    const x = next
+    next += keyWidth(era, type) + 1.05 * type
+    return { era, x, y }
   })
+}
+
+function drawKey({ era, x, y }: Keyed, { type }: Frame): SvgNode[] {
+  const swatch = { x: px(x), y: px(y), width: px(type), height: px(0.8 * type), class: classOf(era) }
+  const place = { x: px(x + 1.35 * type), y: px(y + 0.68 * type), 'font-size': px(WORD * type) }
+  return [svg('rect', swatch), svg('text', { ...place, class: 'axis' }, era)]
 }
 
 const wordStart = ({ from, to, value }: Stretch<Era>, plot: Plot, type: number): number | null =>

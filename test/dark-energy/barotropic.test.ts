@@ -2,12 +2,14 @@
  * The barotropic law against closed forms (dark energy alone, flat: E² = u^(1/(1−α)), u = 1 + 3A(1 − α) ln a) and against
  * multiprecision values (test/reference/barotropic.json, made by barotropic.py beside it: mpmath, tanh-sinh, 40 digits).
  */
+
 import { describe, expect, test } from 'vitest'
+import { eventAtTime, expansionAtEvent } from '../../lib/history/event'
 import { UNBOUND_SYSTEMS, unbinding } from '../../lib/measures/unbinding'
 import { readScenario } from '../../lib/scenario/read'
 import REFERENCE from '../reference/barotropic.json'
 import { expectRelative } from '../world/published'
-import { gyr, measure, scaleAtTime, universe } from '../world/universe'
+import { gyr, known, measure, scaleAtTime, universe } from '../world/universe'
 
 const alone = (excess: number, alpha: number) =>
   universe(`h0:70,matter:0,cmb:0,eos:barotropic,excess:${excess},alpha:${alpha}`)
@@ -75,6 +77,7 @@ describe('dark energy alone', () => {
     const scale = solution.end.scale ?? Number.NaN
     expect(scaleAtTime(solution, 0.999 * rest)).toBeLessThan(scale)
     expectRelative(scaleAtTime(solution, rest + 1), scale, 1e-14)
+    expect(expansionAtEvent(known(eventAtTime(solution.history, rest + 1)))).toBe(0)
   })
   test('α = 0: ρ = 1 − 3|A| ln a turns negative, and the universe round, after 2/(3|A|) Hubble times', () => {
     const solution = alone(-0.1, 0)

@@ -57,6 +57,16 @@ test.each([
   }
 })
 
+test('so near to an origin that a leaves the doubles', () => {
+  // a ∝ t^(2/n) with n = 0.3: 10^(−60 × 6.7).
+  const { rows, notes } = rowsOf('s=h0:70,matter:0,cmb:0,eos:constant,w:-0.9&age=1e-60,0&columns=scale')
+  expect(rows).toEqual([{ scale: null }, { scale: null }])
+  expect(notes.map(({ because }) => because)).toEqual([
+    expect.stringContaining('outside the range'),
+    expect.stringContaining('the origin itself'),
+  ])
+})
+
 test('what the doubles do not hold is no number', () => {
   const { rows } = rowsOf('s=h0:70,matter:1,cmb:0&scale=1e90,1e108&columns=hubble,deceleration,time')
   // H = H₀ a^(−3/2), q = ½, t = (2/3) (a^(3/2) − 1)/H₀.
