@@ -48,9 +48,10 @@ export function useBrush(area: Area | null, select: (one: number, other: number)
         if (start.current === null) return
         const to = across(event)
         if (!dragged.current && Math.abs(to - start.current) < LEAST) return
-        const begins = !dragged.current
-        dragged.current = true
-        if (begins) event.currentTarget.setPointerCapture(event.pointerId)
+        if (!dragged.current) {
+          dragged.current = true
+          event.currentTarget.setPointerCapture(event.pointerId)
+        }
         setSpan({ left: Math.min(start.current, to), width: Math.abs(to - start.current) })
       },
       onPointerUp: (event) => {

@@ -1,10 +1,8 @@
 import { type FormEvent, useState } from 'react'
 import type { Explorer } from '../../lib/answers/explorer'
 import type { Panel } from '../../lib/answers/panel'
+import { FARTHEST_GALAXY } from '../../lib/words/place'
 import { go } from '../live/address'
-
-/** Farther away nothing is followed. */
-const FARTHEST = 1e4
 
 interface Props {
   readonly view: Explorer
@@ -19,7 +17,7 @@ export function Galaxy({ view, galaxy, live }: Props) {
   const take = (event: FormEvent) => {
     event.preventDefault()
     const redshift = Number(text.trim().replace(',', '.') || Number.NaN)
-    const isGood = redshift > 0 && redshift <= FARTHEST
+    const isGood = redshift > 0 && redshift <= FARTHEST_GALAXY
     setWrong(!isGood)
     if (isGood) go(galaxy.template.replace('GALAXY', String(redshift)))
   }
@@ -54,7 +52,7 @@ export function Galaxy({ view, galaxy, live }: Props) {
       </button>
       {wrong && (
         <p id="galaxy-complaint" className="complaint" role="alert">
-          A redshift is a number above 0 and up to {FARTHEST}.
+          A redshift is a number above 0 and up to {FARTHEST_GALAXY}.
         </p>
       )}
     </form>

@@ -175,9 +175,8 @@ export function expansionAtPlace({ arm, panel, s, N }: Place): number {
   return inDoubles(arm, arm.tail ? arm.tail.expansion(s) : arm.model.expansion(N, Math.exp(-N)))
 }
 
-/** Below this doubles lose digits. */
-const LEAST_EXPANSION = 2 ** -1022
+/** Below this doubles lose digits, and on an arm without a turning point E² is never nothing. */
+export const LEAST_EXPANSION = 2 ** -1022
 
-/** E², which on an arm without a turning point is never nothing. */
-export const inDoubles = ({ end }: Arm, expansion: number): number =>
+const inDoubles = ({ end }: Arm, expansion: number): number =>
   end.kind === 'none' && expansion < LEAST_EXPANSION ? Number.NaN : expansion

@@ -2,7 +2,7 @@
 import { evaluatePairs } from '../numerics/chebyshev'
 import type { Arm } from './arm'
 import type { Span } from './event'
-import { inDoubles, NEAR_TODAY, nearToday } from './place'
+import { LEAST_EXPANSION, NEAR_TODAY, nearToday } from './place'
 import type { Clock } from './tail'
 import { elapsedIn, remainingIn } from './tail-integral'
 
@@ -94,7 +94,10 @@ function toEndInto(
   })
 }
 
-/** E², NaN where it leaves the doubles, by the form that rounds least: as the model has it, and where a zone or a tail knows it better, by that. */
+/**
+ * E² by the form that rounds least: as the model has it, and where a zone or a tail knows it better, by that. NaN where it leaves the
+ * doubles.
+ */
 export function expansionsAt(out: Float64Array, places: Places): void {
   const { arm, count, N, inverseScale, s } = places
   arm.model.expansionsInto(out, N, inverseScale, 0, count)
@@ -103,5 +106,6 @@ export function expansionsAt(out: Float64Array, places: Places): void {
     const form = zone?.plain ? null : (zone ?? arm.tail)
     if (form !== null) for (let i = from; i < to; i++) out[i] = form.expansion(s[i])
   })
-  for (let i = 0; i < count; i++) out[i] = inDoubles(arm, out[i])
+  // A store of its own, since a choice between a number and NaN makes an object for every row.
+  if (arm.end.kind === 'none') for (let i = 0; i < count; i++) if (out[i] < LEAST_EXPANSION) out[i] = Number.NaN
 }

@@ -43,6 +43,9 @@ interface Key<K extends keyof Place = keyof Place> {
   write(value: Place[K]): string | null
 }
 
+/** Farther away no galaxy is followed. */
+export const FARTHEST_GALAXY = 1e4
+
 const KEYS = [
   key('focus', focused, (focus) => (focus > 0 ? String(focus + 1) : null)),
   key('theme', (text) => THEMES.find((one) => one === text) ?? null),
@@ -50,7 +53,7 @@ const KEYS = [
   key('show', token),
   key('by', token),
   key('compare', token),
-  key('galaxy', (text) => within(text, 0, 1e4) || null),
+  key('galaxy', (text) => within(text, 0, FARTHEST_GALAXY) || null),
   key('time', (text) => (text === 'log' ? text : null)),
   key('from', (text) => within(text, -1e6, 1e6)),
   key('to', (text) => within(text, -1e6, 1e6)),
