@@ -32,11 +32,21 @@ export function fitted(text: string, size: number, width: number): string {
   return `${signs.join('').trimEnd()}…`
 }
 
-/** A text in as many lines as it needs, up to `most`, broken after blanks, commas and semicolons; what is left then is cut. */
-export function inLines(text: string, size: number, width: number, most: number): readonly string[] {
+const AFTER_BLANKS = /(?<= )/
+/** A code may be broken between its parts. */
+export const AFTER_PARTS = /(?<=[ ,;])/
+
+/** A text in as many lines as it needs, up to `most`; what is left then is cut. */
+export function inLines(
+  text: string,
+  size: number,
+  width: number,
+  most: number,
+  breaks = AFTER_BLANKS,
+): readonly string[] {
   const lines: string[] = []
   let line = ''
-  for (const piece of text.split(/(?<=[ ,;])/)) {
+  for (const piece of text.split(breaks)) {
     if (line !== '' && lines.length < most - 1 && textWidth((line + piece).trimEnd(), size) > width) {
       lines.push(line.trimEnd())
       line = ''
@@ -44,13 +54,4 @@ export function inLines(text: string, size: number, width: number, most: number)
     line += piece
   }
   return [...lines, fitted(line.trimEnd(), size, width)]
-}
-
-/** A text in one line or, where that is too short, in two, broken between words. */
-export function wrapped(text: string, size: number, width: number): readonly string[] {
-  const words = text.split(' ')
-  const fits = (count: number) => textWidth(words.slice(0, count).join(' '), size) <= width
-  let count = words.length
-  while (count > 1 && !fits(count)) count--
-  return count === words.length ? [text] : [words.slice(0, count).join(' '), words.slice(count).join(' ')]
 }

@@ -1,7 +1,7 @@
 /** A figure upon its sheet: ground, heading, drawing and the line that says where it comes from. */
 import type { Frame } from '../figures/plot'
 import { px, type SvgNode, svg } from '../figures/svg'
-import { fitted, inLines, wrapped } from '../figures/text-width'
+import { AFTER_PARTS, fitted, inLines } from '../figures/text-width'
 import type { Size } from './sizes'
 import { styled } from './style'
 import type { Palette } from './theme'
@@ -51,7 +51,7 @@ export function sheetOf(picture: Picture, size: Size, palette: Palette, { headin
   const inner = px(width - 2 * margin)
   const lines = size.headed ? headlines(heading, inner) : []
   const top = margin + lines.length * HEADING * TYPE
-  const origin = inLines(foot, FOOT_SIZE * TYPE, inner, MOST_FOOT)
+  const origin = inLines(foot, FOOT_SIZE * TYPE, inner, MOST_FOOT, AFTER_PARTS)
   const bottom = margin + (FOOT.first + (origin.length - 1) * FOOT.more) * TYPE
   const { drawing, height } = drawnIn(picture, size, { width: inner, height: size.height / scale, taken: top + bottom })
   const node = svg(
@@ -90,7 +90,7 @@ function drawnIn(picture: Picture, size: Size, { width, height, taken }: Room): 
 
 /** The title has one line; what is said below it may have two. */
 function headlines([title = '', ...said]: readonly string[], width: number): readonly string[] {
-  return [title, ...said.flatMap((one) => wrapped(one, HEADING_SIZES[1] * TYPE, width))]
+  return [title, ...said.flatMap((one) => inLines(one, HEADING_SIZES[1] * TYPE, width, 2))]
 }
 
 function headline(line: string, i: number, margin: number, width: number): SvgNode {
