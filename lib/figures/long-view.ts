@@ -4,9 +4,10 @@ import { extrapolates } from '../words/beyond'
 import { END_NAMES, endLabel, endsInTime } from '../words/ending'
 import { longViewCaption, longViewText } from './caption'
 import type { Chart, Curve, Mark, Ribbon } from './chart'
+import { specialTimes } from './lines'
 import { NO_READINGS, type Readings, readingsOf } from './readings'
-import { placesAlong, type Ranges, type Source, sampleCurve } from './sample'
-import { fine, linearRange, type Range } from './scale'
+import type { Ranges } from './sample'
+import { linearRange, type Range } from './scale'
 import { type Entry, type Wanted, type Window, windowOf } from './window'
 
 export type Drawn = Pick<Solution, 'scenario' | 'budget' | 'code' | 'label' | 'origin' | 'end' | 'measures' | 'moments'>
@@ -53,30 +54,6 @@ function longReadings(entries: readonly Entry<Drawn>[], x: Range): Readings {
   )
 }
 
-function specialTimes({ origin, end }: Pick<Drawn, 'origin' | 'end'>): number[] {
-  return [origin.time, end.time, end.turnaround?.time ?? null].filter((time) => time !== null)
-}
-
-/** Samples of a history; where it begins and ends the scale factor is known without asking. */
-export function sourceOf({ solution, scales }: Entry, x: Ranges['x']): Source {
-  const known = new Map(boundary(solution))
-  return {
-    places: placesAlong(x, [0, ...specialTimes(solution)]),
-    values: (times) => {
-      const found = scales(times)
-      return times.map((time, i) => known.get(time) ?? found[i] ?? null)
-    },
-  }
-}
-
-/** Limits that the history itself may not include. */
-function boundary({ origin, end }: Pick<Drawn, 'origin' | 'end'>): [number, number][] {
-  const points: [number, number][] = []
-  if (origin.time !== null) points.push([origin.time, origin.scale])
-  if (end.time !== null && end.scale !== null) points.push([end.time, end.scale])
-  return points
-}
-
 function ribbonOf({ eras, solution }: Entry<Drawn>, slot: number, window: Window): Ribbon[] {
   if (!eras) return []
   const extrapolated = extrapolates(solution.scenario)
@@ -85,14 +62,14 @@ function ribbonOf({ eras, solution }: Entry<Drawn>, slot: number, window: Window
 
 function curveOf(entry: Entry<Drawn>, slot: number, strong: boolean, ranges: Ranges): Curve {
   const { solution } = entry
-  const segments = sampleCurve(sourceOf(entry, ranges.x), ranges)
+  const segments = entry.lines(ranges)
   const asymptote = asymptoteOf(solution, ranges)
   return {
     tone: `slot-${slot}`,
     dash: slot,
     name: solution.label,
     strong,
-    segments: segments.map((segment) => segment.map(([at, value]) => [fine(ranges.x, at), fine(ranges.y, value)])),
+    segments,
     marks: [...startMarks(solution, segments, ranges), ...endMarks(solution, segments, ranges)],
     note: asymptote === null ? noteOf(solution, ranges) : '',
     finish: finishOf(segments, ranges),

@@ -13,3 +13,16 @@ export function remembered<T>(answer: (place: number) => T): (place: number) => 
     return value
   }
 }
+
+/** For what is asked again and again in the same words: the last answer. */
+export function lastOf<Question, Answer>(
+  textOf: (question: Question) => string,
+  answer: (question: Question) => Answer,
+): (question: Question) => Answer {
+  let last: { readonly text: string; readonly answer: Answer } | null = null
+  return (question) => {
+    const text = textOf(question)
+    if (last?.text !== text) last = { text, answer: answer(question) }
+    return last.answer
+  }
+}

@@ -2,6 +2,7 @@
 import { evenParts } from '../numerics/list'
 import type { Solution } from '../solve'
 import type { Eras } from './eras'
+import type { Point, Ranges } from './sample'
 import { type Range, roundStep, type Scaling } from './scale'
 
 export type Seen = Pick<Solution, 'origin' | 'end' | 'measures'>
@@ -11,6 +12,8 @@ export type Scales = (times: readonly number[]) => readonly (number | null)[]
 export interface Entry<S extends Seen = Seen> {
   readonly solution: S
   readonly scales: Scales
+  /** The visible parts of its curve. */
+  readonly lines: (ranges: Ranges) => readonly (readonly Point[])[]
   /** What dominates when; absent where nobody knows. */
   readonly eras?: (x: Range) => Eras
 }

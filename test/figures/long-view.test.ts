@@ -1,10 +1,10 @@
 import { describe, expect, it } from 'vitest'
 import { drawChart } from '../../lib/figures/draw-chart'
+import { plainEntry } from '../../lib/figures/entry'
 import { type Label, labelHeight, labelWidth } from '../../lib/figures/label'
 import { placeLabels } from '../../lib/figures/labels'
-import { longView, sourceOf } from '../../lib/figures/long-view'
+import { longView } from '../../lib/figures/long-view'
 import { LONG_FRAMES as FRAMES, type Frame, plotOf } from '../../lib/figures/plot'
-import { sampleCurve } from '../../lib/figures/sample'
 import { linearRange } from '../../lib/figures/scale'
 import { serialize } from '../../lib/figures/svg'
 import { type Entry, outwards, type Window, windowOf } from '../../lib/figures/window'
@@ -23,7 +23,7 @@ const SETS = {
 
 /** The visible parts of a curve. */
 function partsOf(entry: Entry, { top, ...x }: Window) {
-  return sampleCurve(sourceOf(entry, x), { x, y: linearRange(0, top) })
+  return entry.lines({ x, y: linearRange(0, top) })
 }
 
 describe('the shared window', () => {
@@ -109,7 +109,7 @@ describe('the shared window', () => {
     const history = (t: number) => (t > time ? null : scale - (scale - 1) * Math.sqrt(1 - t / time))
     const solution = { ...flatLambda().solution, origin: { ...flatLambda().solution.origin, time: -14 } }
     const end = { ...solution.end, kind: 'singular' as const, time, scale }
-    const chart = longView([{ solution: { ...solution, end }, scales: (times) => times.map(history) }])
+    const chart = longView([plainEntry({ ...solution, end }, (times) => times.map(history))])
     expect(chart.y.to).toBeGreaterThan(scale)
     expect(chart.curves[0]?.marks).toContainEqual({ kind: 'cross', at: [time, scale] })
   })

@@ -1,4 +1,5 @@
 /** Histories with closed forms (Bondi 1952, Cosmology; any textbook), time in Gyr from now with 1/H₀ = 14 Gyr, a = 1 now. */
+import { plainEntry } from '../../lib/figures/entry'
 import type { Drawn } from '../../lib/figures/long-view'
 import type { Entry } from '../../lib/figures/window'
 import type { Scenario } from '../../lib/scenario/scenario'
@@ -10,7 +11,7 @@ type History = (time: number) => number | null
 
 function entry(label: string, history: History, sketch: Parameters<typeof told>[0]): Entry<Drawn> {
   const measures = { hubbleTime: HUBBLE_TIME, ...sketch.measures }
-  return { solution: told({ label, ...sketch, measures }), scales: (times) => times.map(history) }
+  return plainEntry(told({ label, ...sketch, measures }), (times) => times.map(history))
 }
 
 /** a = (1 + 3t/2)^(2/3): matter alone, flat. */

@@ -8,7 +8,7 @@ import type { Axis, Chart, Curve, Reference } from '../chart'
 import { finishOf } from '../long-view'
 import { readingsOf } from '../readings'
 import { placesAlong, type Ranges, sampleCurve } from '../sample'
-import { fine, type Range } from '../scale'
+import type { Range } from '../scale'
 import { spanOf } from '../span'
 import { fitted } from '../text-width'
 import { againstOf, alternativeOf, futureOf } from './describe'
@@ -144,7 +144,7 @@ export function curveOf(values: Values, ranges: Ranges, { tone, dash, name, stro
     dash,
     name,
     strong,
-    segments: segments.map((segment) => segment.map(([at, value]) => [fine(ranges.x, at), fine(ranges.y, value)])),
+    segments,
     marks: [],
     note: '',
     finish: finishOf(segments, ranges),
