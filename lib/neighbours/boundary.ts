@@ -33,30 +33,29 @@ export function classified(scenario: Scenario, purse: Purse): Kinds | null {
   return kindsOf(scenario)
 }
 
-/** The nearest bracket of each aspect in one direction, along steps of a list of distances; none beyond what the code allows. */
-export function bracketsOf(
+/** The nearest bracket of each aspect in one direction, as steps of a list of distances come to it; none beyond what the code allows. */
+export function* stepsOut(
   one: Free,
   today: Kinds,
   way: Way,
   distances: readonly number[],
   aspects: readonly Aspect[],
   purse: Purse,
-): readonly Bracket[] {
-  const found: Bracket[] = []
+): Generator<readonly Bracket[], undefined> {
+  let open = aspects
   const limit = way > 0 ? one.max : one.min
   let near = one.value
   for (const distance of distances) {
-    if (found.length === aspects.length || near === limit) break
+    if (open.length === 0 || near === limit) return
     const far = way > 0 ? Math.min(one.value + distance, limit) : Math.max(one.value - distance, limit)
     const kinds = classified(one.with(far), purse)
-    if (kinds === null) break
-    for (const aspect of aspects) {
-      if (kinds[aspect].kind !== today[aspect].kind && !found.some((other) => other.aspect === aspect))
-        found.push({ aspect, way, near, far })
-    }
+    if (kinds === null) return
+    const met = open.filter((aspect) => kinds[aspect].kind !== today[aspect].kind)
+    open = open.filter((aspect) => !met.includes(aspect))
+    const step = { way, near, far }
+    yield met.map((aspect) => ({ aspect, ...step }))
     near = far
   }
-  return found
 }
 
 /** Halves a bracket down to `precision`, then names the boundary by the shortest number in it. */

@@ -1,7 +1,7 @@
 /** The ending next to that of a scenario, within what its sliders offer: quick enough to go with every view of it. */
 import type { EndKind } from '../history/outcome'
 import type { Scenario } from '../scenario/scenario'
-import { type Bracket, boundaryIn, bracketsOf, classified, type Purse, type Way } from './boundary'
+import { type Bracket, boundaryIn, classified, type Purse, stepsOut, type Way } from './boundary'
 import { type Free, freeParameters } from './free'
 import type { Kinds } from './kinds'
 
@@ -17,15 +17,10 @@ export interface Nearest {
 
 const MOST = 400
 const PRECISION = 1e-6
-const STEPS = 8
+const RINGS = 8
 const WAYS: readonly Way[] = [-1, 1]
 
-interface Candidate {
-  readonly one: Free
-  readonly bracket: Bracket
-  /** The least that the change can be, as a share of the slider. */
-  readonly least: number
-}
+type Found = Nearest & { readonly share: number }
 
 /**
  * The boundary that is the smallest share of a slider away; null where none is in reach. Where only the integration of a scalar field
@@ -35,35 +30,29 @@ export function nearestOf(scenario: Scenario): Nearest | null {
   const purse: Purse = { left: MOST }
   const today = classified(scenario, purse)
   if (today === null) return null
-  const candidates = freeParameters(scenario).flatMap((one) =>
-    WAYS.flatMap((way) => candidateOf(one, way, today, purse)),
+  const ways = freeParameters(scenario).flatMap((one) =>
+    WAYS.map((way) => ({ one, steps: stepsOut(one, today, way, ringsOf(one), ['end'], purse) })),
   )
-  let best: (Nearest & { readonly share: number }) | null = null
-  for (const candidate of candidates.toSorted((a, b) => a.least - b.least)) {
-    if (best && candidate.least >= best.share) break
-    const found = nearestIn(candidate, today, purse)
-    if (found && (!best || found.share < best.share)) best = found
+  // What lies in one ring is nearer than all that lies beyond it.
+  for (let ring = 0; ring < RINGS; ring++) {
+    let best: Found | null = null
+    for (const { one, steps } of ways) {
+      const [bracket] = steps.next().value ?? []
+      const found = bracket ? nearestIn(one, bracket, today, purse) : null
+      if (found && (!best || found.share < best.share)) best = found
+    }
+    if (best) return best
   }
-  return best
+  return null
 }
 
 const widthOf = ({ slider }: Free): number => slider.max - slider.min
 
-function candidateOf(one: Free, way: Way, today: Kinds, purse: Purse): readonly Candidate[] {
-  const width = widthOf(one)
-  const distances = Array.from({ length: STEPS }, (_, i) => width * ((i + 1) / STEPS) ** 2)
-  return bracketsOf(one, today, way, distances, ['end'], purse).map((bracket) => ({
-    one,
-    bracket,
-    least: Math.abs(bracket.near - one.value) / width,
-  }))
-}
+/** Distances of equal shares of a slider for all numbers. */
+const ringsOf = (one: Free): readonly number[] =>
+  Array.from({ length: RINGS }, (_, i) => widthOf(one) * ((i + 1) / RINGS) ** 2)
 
-function nearestIn(
-  { one, bracket }: Candidate,
-  today: Kinds,
-  purse: Purse,
-): (Nearest & { readonly share: number }) | null {
+function nearestIn(one: Free, bracket: Bracket, today: Kinds, purse: Purse): Found | null {
   const boundary = boundaryIn(one, today, bracket, PRECISION, purse)
   if (!boundary) return null
   const change = Math.abs(boundary.value - one.value)

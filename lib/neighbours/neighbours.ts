@@ -1,7 +1,7 @@
 /** For each number of a scenario, the smallest change up or down that makes another kind of ending or of origin of it. */
 import { familyOf } from '../dark-energy/index'
 import type { Scenario } from '../scenario/scenario'
-import { type Aspect, boundaryIn, bracketsOf, classified, type Purse, type Way } from './boundary'
+import { type Aspect, boundaryIn, classified, type Purse, stepsOut, type Way } from './boundary'
 import { fieldNeighboursOf } from './field'
 import { type Free, freeParameters } from './free'
 import type { Kinds } from './kinds'
@@ -34,7 +34,7 @@ function neighboursByLaw(scenario: Scenario): Neighbourhood {
 
 const neighboursAlong = (one: Free, today: Kinds, purse: Purse): readonly Neighbour[] =>
   WAYS.flatMap((way) =>
-    bracketsOf(one, today, way, distancesOf(one, way), BOTH, purse).flatMap((bracket) => {
+    [...stepsOut(one, today, way, distancesOf(one, way), BOTH, purse)].flat().flatMap((bracket) => {
       const boundary = boundaryIn(one, today, bracket, PRECISION, purse)
       return boundary ? neighbourAt(one, today, bracket, boundary) : []
     }),
