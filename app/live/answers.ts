@@ -3,7 +3,7 @@
  * of a gesture this browser computes, as soon as it can; when the gesture is over, the server's answer is the one that
  * stands. Where the server does not answer, this browser does. Nothing old is ever shown over something newer.
  */
-import type { Brief, Explorer } from '../../lib/answers/explorer'
+import type { Brief, Explorer, ScenarioView } from '../../lib/answers/explorer'
 import type { Ask, Progress } from './asking'
 
 export interface Answer {
@@ -66,7 +66,9 @@ export function createAnswers(first: Answer, { isAwake, compute, load }: Means) 
     compute(state.wanted)
   }
   const show = ({ view, ...rest }: Omit<Answer, 'view'> & { readonly view: Brief }) => {
-    const answer: Answer = { ...rest, view: whole(view, state.answer.view) }
+    const full = whole(view, state.answer.view)
+    if (full === null) return
+    const answer: Answer = { ...rest, view: full }
     const its = turns.get(answer.asked) ?? -1
     const stands = its === shown && answer.here && !state.answer.here
     if (its < shown || stands) return
@@ -109,15 +111,32 @@ export function createAnswers(first: Answer, { isAwake, compute, load }: Means) 
   }
 }
 
-/** What is out of sight stays as it was. */
-function whole(view: Brief, before: Explorer): Explorer {
+/** What was not asked for stays as it was; null where it is not known, of a scenario that came meanwhile. */
+function whole(view: Explorer | Brief, before: Explorer): Explorer | null {
   if (isWhole(view)) return view
   const { readings } = before.long.figure
-  const long = { ...view.long, figure: { ...view.long.figure, readings } }
-  return { ...view, long, panel: before.panel }
+  const { moments, measures, panel } = before
+  const scenarios: ScenarioView[] = []
+  for (const [i, tab] of view.scenarios.entries()) {
+    const known = before.scenarios[i]
+    if (isTold(tab)) scenarios.push(tab)
+    else if (known) scenarios.push({ ...known, ...tab })
+    else return null
+  }
+  return {
+    ...view,
+    scenarios,
+    long: { ...view.long, figure: { ...view.long.figure, readings } },
+    moments: view.moments ?? moments,
+    measures: view.measures ?? measures,
+    panel: view.panel ?? panel,
+  }
 }
 
-const isWhole = (view: Brief): view is Explorer => view.panel !== null
+const isTold = (tab: Brief['scenarios'][number]): tab is ScenarioView => 'verdict' in tab
+
+/** Only a whole answer has what a cursor reads. */
+const isWhole = (view: Explorer | Brief): view is Explorer => view.long.figure.readings.places.length > 0
 
 /** The same content as the same object has nothing drawn again. */
 function unlessSame(answer: Answer, before: Answer): Answer {

@@ -1,9 +1,9 @@
 /** Asks the server for what an address shows. */
-import type { Brief } from '../../lib/answers/explorer'
+import type { Brief, Part } from '../../lib/answers/explorer'
 import { PLACE_KEYS, RULER_KEYS } from '../../lib/words/place'
 
-/** What of an address the answer depends on; figures are drawn for one frame, and of the two views maybe the long one alone. */
-export function askedOf(search: string, frame: string | null, isBrief = false): string {
+/** What of an address the answer depends on; figures are drawn for one frame, and beside the long one maybe only these parts. */
+export function askedOf(search: string, frame: string | null, parts: readonly Part[] | null = null): string {
   const query = new URLSearchParams(search)
   const asked = new URLSearchParams(query.getAll('s').map((code) => ['s', code]))
   const apart: readonly string[] = RULER_KEYS
@@ -12,7 +12,7 @@ export function askedOf(search: string, frame: string | null, isBrief = false): 
     if (value !== null) asked.set(key, value)
   }
   if (frame !== null) asked.set('frame', frame)
-  if (isBrief) asked.set('parts', 'long')
+  if (parts !== null) asked.set('parts', ['long', ...parts].join(' '))
   return asked.toString()
 }
 

@@ -1,12 +1,13 @@
 /** The view of an address: the last one stays until the next is there. */
 import { useEffect, useMemo, useState, useSyncExternalStore } from 'react'
-import type { Explorer } from '../../lib/answers/explorer'
+import type { Brief, Explorer, Part } from '../../lib/answers/explorer'
 import { type Desk, readDesk } from '../../lib/words/desk'
-import { type Address, watchAddress } from './address'
+import { type Address, addressNow, watchAddress } from './address'
 import { type Answers, createAnswers } from './answers'
 import { askedOf } from './fetch-view'
 import { compute, isAwake, onComputed } from './here'
 import { useOffline } from './use-offline'
+import { PAUSE } from './use-unhurried'
 
 export interface Live {
   readonly view: Explorer
@@ -61,11 +62,32 @@ export function tellViewsSeen(seen: boolean): void {
 function useAnswers(initial: Explorer, asked: string, frame: string | null) {
   const [answers] = useState(() => createAnswers({ asked, view: initial, here: false }, MEANS))
   useEffect(() => {
-    onComputed(answers.computed, () => askedOf(location.search, frame, !viewsSeen))
-    return watchAddress(({ search, moving }) => {
-      const plain = askedOf(search, null)
-      answers.want(plain === asked ? asked : askedOf(search, frame, moving && !viewsSeen), moving)
-    })
+    /** When there were words last. */
+    let said = 0
+    let rest: ReturnType<typeof setTimeout> | undefined
+    const partsOf = (search: string): readonly Part[] => {
+      const isOther = answers.read().answer.view.scenarios.length !== new URLSearchParams(search).getAll('s').length
+      const words = isOther || performance.now() - said > PAUSE
+      return [...(viewsSeen ? (['view'] as const) : []), ...(words ? (['words'] as const) : [])]
+    }
+    const want = () => {
+      clearTimeout(rest)
+      const { search, moving } = addressNow()
+      const isFirst = askedOf(search, null) === asked
+      answers.want(isFirst ? asked : askedOf(search, frame, moving ? partsOf(search) : null), moving)
+      // A hand that rests before it lets go sees the words of what it sees.
+      if (moving) rest = setTimeout(want, 2 * PAUSE)
+    }
+    const computed = (question: string, view: Brief | null) => {
+      if (view?.moments) said = performance.now()
+      answers.computed(question, view)
+    }
+    onComputed(computed, () => askedOf(location.search, frame, viewsSeen ? ['view', 'words'] : ['words']))
+    const stop = watchAddress(want)
+    return () => {
+      clearTimeout(rest)
+      stop()
+    }
   }, [answers, asked, frame])
   useOffline(answers.again)
   return answers

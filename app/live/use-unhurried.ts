@@ -1,7 +1,7 @@
 import { useEffect, useRef, useState } from 'react'
 
 /** As often as words and numbers that change can be read, in milliseconds. */
-const PAUSE = 200
+export const PAUSE = 200
 
 /** In the middle of a gesture the newest value a few times a second; else the value at once. */
 export function useUnhurried<T>(value: T, moving: boolean): T {

@@ -6,23 +6,27 @@ import { readQuery } from '../scenario/query'
 import type { Reading } from '../scenario/scenario'
 import { linkQuery } from '../scenario/write'
 import { PLACE_KEYS, placeKeys, readPlace } from '../words/place'
-import { type Asked, type Brief, brief, explorer } from './explorer'
+import { type Asked, type Brief, brief, explorer, type Part } from './explorer'
 import { readKeys, SCENARIO } from './keys'
 import type { Pairs, Question } from './question'
 
 /** The live page asks for the drawings that it shows. */
 const FRAME = 'frame'
-/** And in the middle of a gesture for the long view alone, where the other one is out of sight. */
+/** And in the middle of a gesture for the long view, with what else is in sight. */
 const PARTS = 'parts'
 const LONG = 'long'
+const MORE: readonly Part[] = ['view', 'words']
 
 export function askExplorer(pairs: Pairs): Reading<Question<Brief>> {
   const { codes, values, faults } = readKeys(pairs, [...PLACE_KEYS, FRAME, PARTS])
   if (faults.length > 0) return { ok: false, problems: problemsOf(faults, null) }
   const asked = { codes, keys: values, frame: values.get(FRAME) }
-  const isBrief = values.get(PARTS) === LONG
-  const canonical = isBrief ? `${canonicalOf(asked)}&${PARTS}=${LONG}` : canonicalOf(asked)
-  return { ok: true, value: { canonical, answer: () => ({ ok: true, value: (isBrief ? brief : explorer)(asked) }) } }
+  const named = values.get(PARTS)?.split(' ') ?? []
+  if (!named.includes(LONG))
+    return { ok: true, value: { canonical: canonicalOf(asked), answer: () => ({ ok: true, value: explorer(asked) }) } }
+  const parts = new Set(MORE.filter((one) => named.includes(one)))
+  const canonical = `${canonicalOf(asked)}&${PARTS}=${[LONG, ...parts].join('+')}`
+  return { ok: true, value: { canonical, answer: () => ({ ok: true, value: brief(asked, parts) }) } }
 }
 
 /** No scenario at all stays apart from the scenarios of the demo: it has a title. */

@@ -53,47 +53,75 @@ export interface Explorer extends Desk {
   readonly refusal: Refusal | null
 }
 
-/** While a hand drags, where the view below the long one is out of sight: without it and without what a cursor reads. */
-export type Brief = Omit<Explorer, 'panel'> & { readonly panel: Panel | null }
+/** What a hand that drags may leave out. */
+export type Part = 'view' | 'words'
 
-export const explorer = (asked: Asked): Explorer => shown(asked, longPanel, panelOf)
+type Words = Pick<Explorer, 'scenarios' | 'moments' | 'measures'>
+type Plain = Omit<Explorer, 'panel' | keyof Words>
 
-export const brief = (asked: Asked): Brief =>
-  shown(
-    asked,
-    (subject) => longPanel(subject, false),
-    () => null,
-  )
+/** While a hand drags: without what a cursor reads, and without what was not asked for. */
+export interface Brief extends Plain {
+  readonly scenarios: readonly (Tab & Partial<ScenarioView>)[]
+  readonly moments: Explorer['moments'] | null
+  readonly measures: Explorer['measures'] | null
+  readonly panel: Panel | null
+}
 
-function shown<P>(
-  asked: Asked,
-  long: (subject: Subject) => LongPanel,
-  below: (subject: Subject) => P,
-): Omit<Explorer, 'panel'> & { readonly panel: P } {
-  const address = opened(asked.codes)
+export function explorer(asked: Asked): Explorer {
+  const sight = sightOf(asked)
+  return { ...plain(sight, true), ...words(sight), panel: panelOf(sight.subject) }
+}
+
+export function brief(asked: Asked, parts: ReadonlySet<Part>): Brief {
+  const sight = sightOf(asked)
+  return {
+    ...plain(sight, false),
+    ...(parts.has('words') ? words(sight) : { scenarios: sight.desk.scenarios, moments: null, measures: null }),
+    panel: parts.has('view') ? panelOf(sight.subject) : null,
+  }
+}
+
+interface Sight {
+  readonly address: Opened
+  readonly subject: Subject
+  readonly desk: Desk
+  /** True where the address names no scenario. */
+  readonly plain: boolean
+}
+
+function sightOf({ codes, keys, frame }: Asked): Sight {
+  const address = opened(codes)
   const solutions = address.solutions.map(named)
   const scenarios = solutions.map(({ scenario }) => scenario)
   const place = settled(
-    readPlace((key) => asked.keys.get(key), scenarios.length),
+    readPlace((key) => keys.get(key), scenarios.length),
     solutions,
   )
-  const subject = { solutions, scenarios, place, frame: asked.frame ?? null }
-  const desk = deskOf(scenarios, place)
-  const focus = solutions[place.focus] as Solution
-  const titled = asked.codes.length === 0
+  const subject = { solutions, scenarios, place, frame: frame ?? null }
+  return { address, subject, desk: deskOf(scenarios, place), plain: codes.length === 0 }
+}
+
+/** `read` is with what a cursor reads. */
+function plain({ address, subject, desk, plain: titled }: Sight, read: boolean): Plain {
   return {
     ...desk,
     titled,
-    title: titled ? DEMO.title : joined(solutions.map(({ label }) => label)),
+    title: titled ? DEMO.title : joined(subject.solutions.map(({ label }) => label)),
+    long: longPanel(subject, read),
+    refusal: address.problems.length === 0 ? null : refusalOf(address, desk.links.here),
+  }
+}
+
+function words({ subject, desk }: Sight): Words {
+  const { solutions, scenarios, place } = subject
+  const focus = solutions[place.focus] as Solution
+  return {
     scenarios: desk.scenarios.map((tab) => ({
       ...tab,
       ...told(solutions[tab.slot] as Solution, tab.slot, scenarios, place),
     })),
-    long: long(subject),
-    panel: below(subject),
     moments: momentWords(focus),
     measures: measureWords(focus.measures),
-    refusal: address.problems.length === 0 ? null : refusalOf(address, desk.links.here),
   }
 }
 

@@ -30,12 +30,21 @@ describe('/api/explorer', () => {
   it('leaves out the view below, and what a cursor reads, where only the long one is asked for', () => {
     const query = 's=h0:70,as:One&s=h0:71&frame=wide'
     const [brief, whole] = [question(`${query}&parts=long`), question(query)]
-    expect(brief.canonical).not.toBe(whole.canonical)
+    const canonicals = ['', '+words', '+view'].map((more) => question(`${query}&parts=long${more}`).canonical)
+    expect(new Set([...canonicals, whole.canonical]).size).toBe(4)
+    expect(question(`${query}&parts=words+long`).canonical).toBe(canonicals[1])
     const answer = whole.answer()
     const { long } = (answer.ok && answer.value) || { long: null }
     expect(long?.figure.readings.places.length).toBeGreaterThan(100)
     const without = { ...long, figure: { ...long?.figure, readings: { places: [], values: [] } } }
-    expect(brief.answer()).toEqual(answer.ok && { ok: true, value: { ...answer.value, long: without, panel: null } })
+    const words = question(`${query}&parts=long+words`).answer()
+    expect(words).toEqual(answer.ok && { ok: true, value: { ...answer.value, long: without, panel: null } })
+    const bare = { moments: null, measures: null, scenarios: [{ name: 'One' }, { name: 'Scenario 2' }] }
+    const silent = brief.answer()
+    expect(silent).toMatchObject({ ok: true, value: { ...bare, long: without, panel: null } })
+    expect(silent.ok && silent.value.scenarios[0]).not.toHaveProperty('verdict')
+    const viewed = question(`${query}&parts=long+view`).answer()
+    expect(viewed.ok && viewed.value.panel).toEqual(answer.ok && answer.value.panel)
     expect(question(`${query}&parts=many`).canonical).toBe(whole.canonical)
   })
 

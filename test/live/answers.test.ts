@@ -2,9 +2,11 @@
 import { describe, expect, it } from 'vitest'
 import { type Answer, createAnswers } from '../../app/live/answers'
 import type { Ask, Progress } from '../../app/live/asking'
-import type { Explorer } from '../../lib/answers/explorer'
+import { type Asked, type Brief, brief, type Explorer, explorer, type Part } from '../../lib/answers/explorer'
 
-const viewOf = (text: string) => ({ title: text }) as unknown as Explorer
+/** A whole one. */
+const viewOf = (text: string) =>
+  ({ title: text, long: { figure: { readings: { places: [0] } } } }) as unknown as Explorer
 const first: Answer = { asked: 'first', view: viewOf('first'), here: false }
 
 /** A page whose server and worker answer when they are told to. */
@@ -45,19 +47,41 @@ async function page({ awake = false, loads = true } = {}) {
   }
 }
 
-it('leaves what is out of sight as it was', async () => {
-  const { answers } = await page({ awake: true })
-  const figured = (text: string, places: readonly number[]) =>
-    ({ title: text, long: { figure: { title: text, readings: { places } } } }) as unknown as Explorer
-  const whole = { ...figured('whole', [1, 2]), panel: { key: 'reach' } } as Explorer
-  answers.want('a', true)
-  answers.computed('a', whole)
-  expect(answers.read().answer.view).toBe(whole)
-  answers.want('b', true)
-  answers.computed('b', { ...figured('brief', []), panel: null })
-  const { title, long, panel } = answers.read().answer.view
-  expect([title, long.figure.title, panel]).toEqual(['brief', 'brief', whole.panel])
-  expect(long.figure.readings).toBe(whole.long.figure.readings)
+describe('in a gesture', () => {
+  const asked = (...codes: string[]): Asked => ({ codes, keys: new Map() })
+  const [before, after] = [asked('matter:0.3', 'matter:0.4'), asked('matter:0.3', 'matter:0.5')]
+  const whole = explorer(before)
+
+  async function afterwards(view: Brief) {
+    const { answers } = await page({ awake: true })
+    answers.want('before', true)
+    answers.computed('before', whole)
+    answers.want('after', true)
+    answers.computed('after', view)
+    return answers.read().answer.view
+  }
+
+  it.each<readonly Part[]>([[], ['words'], ['view'], ['view', 'words']])(
+    'what is not asked for stays: %s %s',
+    async (...parts) => {
+      const [shown, then] = [await afterwards(brief(after, new Set(parts))), explorer(after)]
+      const [words, panel] = [parts.includes('words') ? then : whole, parts.includes('view') ? then.panel : whole.panel]
+      const { moments, measures } = words
+      const scenarios = then.scenarios.map(({ slot, name, plainCode, link }, i) => ({
+        ...words.scenarios[i],
+        ...{ slot, name, plainCode, link },
+      }))
+      const figure = { ...then.long.figure, readings: whole.long.figure.readings }
+      expect(shown).toEqual({ ...then, scenarios, moments, measures, panel, long: { ...then.long, figure } })
+      expect(shown.long.figure.readings).toBe(whole.long.figure.readings)
+    },
+  )
+
+  it('a scenario is not shown before there are words about it', async () => {
+    const more = asked('matter:0.3', 'matter:0.4', 'matter:0.5')
+    expect(await afterwards(brief(more, new Set()))).toBe(whole)
+    expect((await afterwards(brief(more, new Set(['words'])))).scenarios).toEqual(explorer(more).scenarios)
+  })
 })
 
 describe('without a worker', () => {
