@@ -90,7 +90,7 @@ export function Explorer({ load, asked, children }: Props) {
         <InSight of={later} moving={moving} className="far of-views" told={tellViewsSeen}>
           {(shown) => <Views view={shown} shown={address && frame} />}
         </InSight>
-        <RulerPlace {...ruled} initial={ruler} shelf={shelf}>
+        <RulerPlace {...ruled} initial={ruler} shelf={shelf} changed={waiting || view !== initial}>
           {children}
         </RulerPlace>
         <TakeAway desk={ruled.desk} lists={lists} version={edition.version} live={address !== null} />

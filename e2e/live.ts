@@ -4,10 +4,13 @@ import { expect, type Locator, type Page } from '@playwright/test'
 /** The page, once its scripts have taken over, as they do when a hand comes near. */
 export async function open(page: Page, path: string): Promise<void> {
   await page.goto(path)
-  // Of a hand that is neither a mouse nor a finger, whose tests come later.
-  await page.evaluate(() => dispatchEvent(new Event('pointermove')))
+  await stir(page)
   await expect(page.getByRole('button', { name: 'Copy link' })).toBeVisible()
+  await stir(page)
 }
+
+/** By a hand that is neither a mouse nor a finger, whose tests come later. */
+const stir = (page: Page) => page.evaluate(() => void dispatchEvent(new Event('pointermove')))
 
 export const slider = (page: Page, name: string) => page.getByRole('slider', { name, exact: true })
 export const field = (page: Page, name: string) => page.getByRole('textbox', { name })

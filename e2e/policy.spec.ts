@@ -1,4 +1,5 @@
 /** The content policy: it stops what was not meant, and nothing that was. */
+import { gzipSync } from 'node:zlib'
 import { expect, test } from '@playwright/test'
 import { complaints } from './live'
 
@@ -24,6 +25,25 @@ test('a page that nobody touches comes alive by itself', async ({ page }) => {
   await expect.poll(() => fetched.count()).toBeGreaterThan(4)
   expect(await page.evaluate(() => 'next' in window)).toBe(false)
   await expect(page.getByRole('button', { name: 'Copy link' })).toBeVisible()
+})
+
+/** Without a hand: whatever a page fetches that only lies there, by itself alive. Compressed as servers do, in bytes. */
+test('before there is a hand the scripts are at most 185 kB', async ({ page }) => {
+  const sizes = new Map<string, Promise<number>>()
+  page.on('response', (response) => {
+    const url = response.url()
+    if (response.request().resourceType() === 'script')
+      sizes.set(
+        url,
+        response.body().then((body) => gzipSync(body).length),
+      )
+  })
+  await page.goto('/')
+  await expect(page.getByRole('button', { name: 'Copy link' })).toBeVisible()
+  await page.waitForLoadState('networkidle')
+  const found = await Promise.all(sizes.values())
+  expect(found.length).toBeGreaterThan(8)
+  expect(found.reduce((sum, one) => sum + one, 0)).toBeLessThanOrEqual(185_000)
 })
 
 test('a script without the nonce does not run', async ({ page }) => {
