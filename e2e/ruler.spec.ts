@@ -6,11 +6,13 @@ const TWO = '/?s=h0:70,matter:0.3,cmb:0,as:One&s=h0:67.66,matter:0.3111,as:Two'
 
 const cells = (page: Page, key: string) => page.locator(`[data-reading="${key}"] .value`)
 const alive = (page: Page) => expect(page.getByRole('button', { name: 'Copy link' })).toBeVisible({ timeout: 15_000 })
-/** The live ruler has taken over. */
+/** The live ruler has taken over, as it does when a hand is there. */
 const live = (page: Page) =>
-  expect(page.getByRole('button', { name: 'Read', exact: true, includeHidden: true })).toHaveCount(0, {
-    timeout: 15_000,
-  })
+  expect(async () => {
+    for (const at of [1, 2]) await page.mouse.move(at, at)
+    const read = page.getByRole('button', { name: 'Read', exact: true, includeHidden: true })
+    await expect(read).toHaveCount(0, { timeout: 500 })
+  }).toPass({ timeout: 15_000 })
 
 /** Rows of a downloaded table by the names of its columns; the first cell is quoted. */
 function rowsOf(csv: string): Readonly<Record<string, string>>[] {
