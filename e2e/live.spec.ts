@@ -59,6 +59,25 @@ test('set by mouse and by keyboard, undone and redone, handed over by a link', a
   expect(heard).toEqual([])
 })
 
+test('a hand that rests before it lets go has the words of what it sees', async ({ page }) => {
+  // High enough for slider and words: what is out of sight waits.
+  await page.setViewportSize({ width: 1280, height: 1500 })
+  await open(page, ONE)
+  const words = () => said(page, 'One').textContent()
+  const first = await words()
+  const { x, y, width, height } = await clear(slider(page, 'matter'))
+  const to = (part: number) => page.mouse.move(x + part * width, y + height / 2)
+  await to(0.3)
+  await page.mouse.down()
+  for (let i = 1; i <= 60; i++) await to(0.3 + i / 300)
+  await page.waitForTimeout(2000)
+  const resting = await words()
+  expect(resting).not.toBe(first)
+  await page.mouse.up()
+  await settled(page)
+  expect(await words()).toBe(resting)
+})
+
 test('the number on the page is the cell of the table', async ({ page, request }) => {
   await open(page, ONE)
   await drag(page, slider(page, 'matter'), 0.3, 0.42)
