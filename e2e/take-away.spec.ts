@@ -40,6 +40,10 @@ test('words come when they are opened, and one click copies each', async ({ page
   const heard = await complaints(page)
   await page.goto(SCENARIOS, { waitUntil: 'networkidle' })
   // The ruler above is another one then, and what stands below moves no more.
+  for (const at of [1, 2]) {
+    await page.mouse.move(at, at)
+    await expect(page.getByRole('button', { name: 'Copy link' })).toBeVisible()
+  }
   await expect(page.getByRole('button', { name: 'Read', exact: true, includeHidden: true })).toHaveCount(0)
   await page.locator('.take-away summary').click()
   await page.getByRole('button', { name: 'Copy: LaTeX macros' }).click()

@@ -1,11 +1,11 @@
 /** The visible lines of a history; where it begins and ends the scale factor is known without asking. */
-import { type Point, placesAlong, type Ranges, type Source, sampleCurve } from './sample'
+import { type Lines, placesAlong, type Ranges, type Source, sampleCurve } from './sample'
 import type { Range } from './scale'
 import type { Scales, Seen } from './window'
 
 type Limits = Pick<Seen, 'origin' | 'end'>
 
-export const linesOf = (solution: Limits, scales: Scales, ranges: Ranges): readonly (readonly Point[])[] =>
+export const linesOf = (solution: Limits, scales: Scales, ranges: Ranges): Lines =>
   sampleCurve(sourceOf(solution, scales, ranges.x), ranges)
 
 function sourceOf(solution: Limits, scales: Scales, x: Range): Source {

@@ -6,7 +6,7 @@ import { longViewCaption, longViewText } from './caption'
 import type { Chart, Curve, Mark, Ribbon } from './chart'
 import { specialTimes } from './lines'
 import { NO_READINGS, type Readings, readingsOf } from './readings'
-import type { Ranges } from './sample'
+import { type Ranges, steady } from './sample'
 import { linearRange, type Range } from './scale'
 import { type Entry, type Wanted, type Window, windowOf } from './window'
 
@@ -69,7 +69,7 @@ function curveOf(entry: Entry<Drawn>, slot: number, strong: boolean, ranges: Ran
     dash: slot,
     name: solution.label,
     strong,
-    segments,
+    segments: steady(segments, ranges),
     marks: [...startMarks(solution, segments, ranges), ...endMarks(solution, segments, ranges)],
     note: asymptote === null ? noteOf(solution, ranges) : '',
     finish: finishOf(segments, ranges),

@@ -1,6 +1,6 @@
 /** Points of a curve where it bends, cut at the edges of the figure and thinned to what an eye can see. */
 import { evenParts } from '../numerics/list'
-import { fractionOf, type Range, valueAt } from './scale'
+import { fine, fractionOf, type Range, valueAt } from './scale'
 
 export type Point = readonly [x: number, y: number]
 
@@ -28,11 +28,17 @@ const REFINED = 12
 const TOLERANCE = 2e-4
 
 /** The visible parts of a curve, each a line without a gap. */
-export function sampleCurve({ places, values }: Source, ranges: Ranges): readonly (readonly Point[])[] {
+export type Lines = readonly (readonly Point[])[]
+
+export function sampleCurve({ places, values }: Source, ranges: Ranges): Lines {
   const first = samples(places, values)
   const refined = samples(refine(first, ranges.y), values)
   return cut(merge(first, refined), ranges.y).map((segment) => thin(segment, ranges))
 }
+
+/** Without the last digits of doubles, which differ from one browser to another: labels find the same places in all of them. */
+export const steady = (lines: Lines, { x, y }: Ranges): Lines =>
+  lines.map((line) => line.map(([one, other]) => [fine(x, one), fine(y, other)]))
 
 /** Even steps along the axis, crowded about the special places, those included. */
 export function placesAlong(x: Range, special: readonly number[]): readonly number[] {

@@ -41,3 +41,13 @@ export function roundStep(least: number): number {
   const power = 10 ** Math.floor(Math.log10(least))
   return power * ([1, 2, 5].find((one) => one * power >= least) ?? 10)
 }
+
+/** Parts of an axis that nobody can tell apart. */
+const FINEST = 1e-5
+
+/** A value with the digits that can be seen along an axis, which far from 0 are more than the first few. */
+export function fine({ scaling, from, to }: Range, value: number): number {
+  const least = scaling === 'linear' ? FINEST * (to - from) : FINEST * Math.abs(value)
+  const decimals = Math.ceil(-Math.log10(least))
+  return decimals >= 0 && decimals <= 100 ? Number(value.toFixed(decimals)) : Number(value.toPrecision(6))
+}

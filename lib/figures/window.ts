@@ -2,7 +2,7 @@
 import { evenParts } from '../numerics/list'
 import type { Solution } from '../solve'
 import type { Eras } from './eras'
-import type { Point, Ranges } from './sample'
+import type { Lines, Ranges } from './sample'
 import { type Range, roundStep, type Scaling } from './scale'
 
 export type Seen = Pick<Solution, 'origin' | 'end' | 'measures'>
@@ -13,7 +13,7 @@ export interface Entry<S extends Seen = Seen> {
   readonly solution: S
   readonly scales: Scales
   /** The visible parts of its curve. */
-  readonly lines: (ranges: Ranges) => readonly (readonly Point[])[]
+  readonly lines: (ranges: Ranges) => Lines
   /** What dominates when; absent where nobody knows. */
   readonly eras?: (x: Range) => Eras
 }

@@ -7,7 +7,7 @@ import { columnAlong, type Values } from '../along'
 import type { Axis, Chart, Curve, Reference } from '../chart'
 import { finishOf } from '../long-view'
 import { readingsOf } from '../readings'
-import { placesAlong, type Ranges, sampleCurve } from '../sample'
+import { placesAlong, type Ranges, sampleCurve, steady } from '../sample'
 import type { Range } from '../scale'
 import { spanOf } from '../span'
 import { fitted } from '../text-width'
@@ -144,7 +144,7 @@ export function curveOf(values: Values, ranges: Ranges, { tone, dash, name, stro
     dash,
     name,
     strong,
-    segments,
+    segments: steady(segments, ranges),
     marks: [],
     note: '',
     finish: finishOf(segments, ranges),
