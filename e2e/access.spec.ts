@@ -63,6 +63,34 @@ for (const [path, looks] of Object.entries(PAGES)) {
   })
 }
 
+for (const width of [320, 1280]) {
+  test(`text that a reader has spaced out is not cut off: ${width} px`, async ({ page }) => {
+    // WCAG 1.4.12.
+    await page.setViewportSize({ width, height: 800 })
+    await open(page, '/')
+    const over = await page.evaluate(() => {
+      for (const element of document.querySelectorAll<HTMLElement>('body *:not(svg *, math *)')) {
+        const { style } = element
+        style.setProperty('content-visibility', 'visible', 'important')
+        style.setProperty('line-height', '1.5', 'important')
+        style.setProperty('letter-spacing', '0.12em', 'important')
+        style.setProperty('word-spacing', '0.16em', 'important')
+        if (element.tagName === 'P') style.setProperty('margin-bottom', '2em', 'important')
+      }
+      // Parts of the page are painted as far beyond their edges as its own margin goes.
+      const margin = 16
+      const scrolls = (element: Element) => ['auto', 'scroll'].includes(getComputedStyle(element).overflowX)
+      const parts = [...document.querySelectorAll('html, main, main section, main div, .said, .value, button, a')]
+      const cut = parts.filter((one) => {
+        const { scrollWidth, clientWidth } = one
+        return clientWidth > 1 && scrollWidth > clientWidth + margin && !scrolls(one)
+      })
+      return cut.map(({ className, textContent }) => `${className}: ${textContent?.slice(0, 40)}`)
+    })
+    expect(over).toEqual([])
+  })
+}
+
 test('the first key leads past the masthead', async ({ page }) => {
   await open(page, '/')
   await page.keyboard.press('Tab')
