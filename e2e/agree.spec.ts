@@ -118,8 +118,11 @@ function differences(one: unknown, other: unknown, unlike: Unlike, path = '', bo
 const far = (one: number, other: number, part: number) =>
   Math.abs(one - other) > part * Math.max(Math.abs(one), Math.abs(other))
 
-/** Numbers for cursors have seven digits, and two that differ by 1e-13 may be rounded to neighbours. */
-const asShown: Unlike = (one, other) => far(one, other, 1.01e-6)
+/** Two that differ by 1e-13 may be rounded to neighbours: places for cursors have seven digits, and values there five. */
+const asShown: Unlike = (one, other, path) =>
+  Math.abs(one - other) > 1.01 * lastPlace(one, path.includes('.readings.values.') ? 5 : 7)
+
+const lastPlace = (value: number, digits: number) => 10 ** (Math.floor(Math.log10(Math.abs(value))) + 1 - digits)
 
 /** Places in drawings have two decimals: they may be rounded to neighbours. */
 function sameDrawing(one: unknown, other: unknown): boolean {

@@ -8,6 +8,7 @@ import {
   coefficientsInto,
   evaluate,
   NODE_COUNT,
+  noiseIn,
   relativeTail,
   type Series,
   sumAtOne,
@@ -36,7 +37,7 @@ const RESOLVED = 2e-14
 /** A panel this narrow (in s) is taken as it is; its error bound says so. */
 const NARROWEST = 1e-9
 const GROWTH = 1.7
-/** A narrower trial that is not five times better shows noise, unless above NOISIEST times what is asked: it should be 60 times. */
+/** Noise is at most this many times what is asked. */
 const NOISIEST = 1e3
 /** Panels tried in one zone before the scenario is given up. */
 const MOST_PANELS = 1500
@@ -56,7 +57,7 @@ export function panelsOf(zone: Zone, enough: (panel: Panel, edge: number) => boo
     if (++tried > MOST_PANELS) throw overBudget(`The integrals take more than ${MOST_PANELS} panels.`)
     const to = from + width >= zone.to - width * 0.05 ? zone.to : from + width
     attempt(zone, from, to)
-    floor = Math.max(floor, noiseIn(before, trial.worst))
+    floor = Math.max(floor, noiseIn(before, trial.worst, NOISIEST))
     const excess = trial.worst / floor
     if (excess > 1 && to - from > NARROWEST) {
       width = (to - from) * Math.max(0.35, Math.min(0.75, excess ** (-1 / 15)))
@@ -71,12 +72,6 @@ export function panelsOf(zone: Zone, enough: (panel: Panel, edge: number) => boo
     from = to
   }
   return panels
-}
-
-/** What a narrower trial no longer betters is noise: how much of it there is, with a margin; 0 while there is no sign of it. */
-function noiseIn(before: number, now: number): number {
-  const noise = now > 0.2 * before ? 4 * Math.max(before, now) : 0
-  return noise < NOISIEST ? noise : 0
 }
 
 /**

@@ -20,12 +20,22 @@ export interface Place {
 /** On this part of the first panel an integral from today is taken directly, to keep its relative accuracy. */
 export const NEAR_TODAY = 0.15
 
+/** Part of an integral that sums leave out by rounding at most. */
+const ROUNDED = 1e-12
+
+/** Does more lie beyond the last panel than rounding, and no tail that knows it? */
+function isUnfollowed(arm: Arm, clock: Clock): boolean {
+  const { fromToday, total } = arm[clock]
+  return arm.tail === null && fromToday[arm.panels.length] < (1 - ROUNDED) * total
+}
+
 /** Farthest |ln a| on an arm: a turning point, just this side of a static state, or where its sums end; else Infinity. */
-export function farthestOf({ end, edges, tail, time }: Arm): number {
+export function farthestOf(arm: Arm): number {
+  const { end, edges } = arm
   const last = edges[edges.length - 1]
   if (end.kind === 'double') return last * (1 - Number.EPSILON)
   if (end.kind !== 'none') return Math.abs(end.N)
-  return tail === null && time.total === Number.POSITIVE_INFINITY ? last : Number.POSITIVE_INFINITY
+  return isUnfollowed(arm, 'time') ? last : Number.POSITIVE_INFINITY
 }
 
 /** The place at distance m = |ln a| from today, or null beyond the farthest one. */
@@ -87,7 +97,7 @@ export function placeElapsed(arm: Arm, clock: Clock, value: number): Place | nul
   const sums = arm[clock]
   if (!(value <= sums.total)) return null
   const holding = indexBelow(sums.fromToday, value)
-  const ends = arm.tail === null && Number.isFinite(sums.total)
+  const ends = arm.tail === null && !isUnfollowed(arm, clock)
   const panel = ends ? Math.min(holding, arm.panels.length - 1) : holding
   if (panel === arm.panels.length) {
     return placeInTail(arm, clock, (tail, D) => elapsedIn(tail, D) - (value - sums.fromToday[panel]))

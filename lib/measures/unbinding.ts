@@ -47,10 +47,16 @@ export function unbinding(history: History, h0: number, { period }: UnboundSyste
   const far = firstAbove(excess)
   if (far === null) return null
   const N = brent(excess, 0, far)
+  const { total } = future.time
   const place = placeAt(future, N)
-  // Rounding alone must not put it behind the end.
-  if (place === null) return null
-  return { time: Math.min(fromToday(place, 'time'), future.time.total), remaining: remainingFrom(future, place), N }
+  if (place) {
+    // Rounding alone must not put it behind the end.
+    return { time: Math.min(fromToday(place, 'time'), total), remaining: remainingFrom(future, place), N }
+  }
+  if (future.end.kind !== 'none') return null
+  // Farther than times from today are followed: next to all of the time has passed.
+  const remaining = remainingAt(future, N)
+  return { time: total - remaining, remaining, N }
 }
 
 /**
@@ -65,8 +71,10 @@ function remainingFrom(future: Arm, place: Place): number | null {
     return blurred ? null : left
   }
   if (future.tail !== null) return toEnd(place, 'time')
-  return integralOfExp((N) => -0.5 * logExpansion(future.model, N), place.N)
+  return remainingAt(future, place.N)
 }
+
+const remainingAt = ({ model }: Arm, from: number): number => integralOfExp((N) => -0.5 * logExpansion(model, N), from)
 
 /** Part of ln a, or of the whole time, that eps blurs by a millionth. */
 const BLURRED = 1e6 * Number.EPSILON

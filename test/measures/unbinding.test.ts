@@ -5,6 +5,7 @@ import { eventAtScale } from '../../lib/history/event'
 import { accelerationAt } from '../../lib/measures/rates'
 import { UNBOUND_SYSTEMS, unbinding } from '../../lib/measures/unbinding'
 import { hubbleTimeGyr } from '../../lib/units'
+import { erfc } from '../world/erfc'
 import { expectRelative } from '../world/published'
 import { known, universe } from '../world/universe'
 
@@ -115,5 +116,21 @@ test('what is left where dark energy outgrows every power: ∫ √a e^(−3(a−
     const gamma = (Math.exp(1.5 - x) * x ** 1.5) / (x - 0.5 - rest)
     // e^(−x) multiplies the eps of a by x, up to some hundred.
     expectRelative(found?.remaining ?? Number.NaN, (2 / 3) ** 1.5 * gamma, 1e-12)
+  }
+})
+
+test('before a rip so late that times from today are not followed to it: dark energy alone, ln E = bN² − cN, is an integral of Gauss', () => {
+  const [c, b] = [1.5 * 0.66, 0.75 * 0.001]
+  const { history, scenario } = universe('matter:0,cmb:0,eos:log,w0:-0.34,wa:0.001')
+  // ∫ e^(cN − bN²) dN = √(π/b) e^(c²/4b) erfc(√b (N − c/2b))/2. From today it is all but 1e-143 of √(π/b) e^(c²/4b).
+  const whole = Math.sqrt(Math.PI / b) * Math.exp((c * c) / (4 * b))
+  const ends = history.end.time ?? Number.NaN
+  expectRelative(ends, whole, 1e-13)
+  for (const system of UNBOUND_SYSTEMS) {
+    const found = unbinding(history, scenario.h0, system)
+    const x = Math.sqrt(b) * ((found?.N ?? Number.NaN) - c / (2 * b))
+    // e^(−x²) multiplies the eps of N by 2x√b N, up to some thousand.
+    expectRelative(found?.remaining ?? Number.NaN, (whole / 2) * erfc(x), 1e-11)
+    expect(found?.time).toBe(ends)
   }
 })

@@ -6,6 +6,7 @@ import {
   evaluate,
   NODE_COUNT,
   NODES,
+  noiseIn,
   relativeTail,
   solveIncreasing,
   sumAtOne,
@@ -84,6 +85,17 @@ test('the tail is that of the last two coefficients, over the largest', () => {
   // An entire function is resolved, a kink is not.
   expect(relativeTail(coefficientsOf(Math.exp))).toBeLessThan(1e-14)
   expect(relativeTail(coefficientsOf(Math.abs))).toBeGreaterThan(1e-3)
+})
+
+test('what half the width does not better is noise, unless it is more than may be', () => {
+  const noisy = (half: number) =>
+    relativeTail(coefficientsOf((x) => Math.exp(half * x) * (1 + 1e-12 * Math.sin(1e9 * x))))
+  const [wide, narrow] = [noisy(0.5), noisy(0.25)]
+  expect(noiseIn(wide, narrow, 1e-8)).toBe(4 * Math.max(wide, narrow))
+  expect(noiseIn(wide, narrow, 1e-13)).toBe(0)
+  const smooth = (half: number) => relativeTail(coefficientsOf((x) => 1 / (1.2 + half * x)))
+  expect(noiseIn(smooth(1), smooth(0.5), 1)).toBe(0)
+  expect(noiseIn(Number.POSITIVE_INFINITY, narrow, 1e-8)).toBe(0)
 })
 
 describe('inverting an increasing series', () => {
