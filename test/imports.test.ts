@@ -30,8 +30,6 @@ const ORDER = [
   'answers',
   'interface',
 ]
-/** Entry points for threads of their own: these may take from anywhere. */
-const FREE = 'workers'
 
 /** What a pure function cannot know: the time, chance, its process, the network, the page. */
 const OUTSIDE =
@@ -59,7 +57,6 @@ const placeOf = (path: string): string => path.split('/')[0].replace(/\.[mc]?[jt
 
 /** What is wrong with an import, or null. `file` is a path inside lib. */
 function complaint(file: string, specifier: string): string | null {
-  if (placeOf(file) === FREE) return null
   if (!specifier.startsWith('.')) return PACKAGES_OUTSIDE.test(specifier) ? `${specifier} is no part of lib` : null
   const target = normalize(join(dirname(file), specifier))
   if (target.startsWith('..')) return `${specifier} lies outside lib`
@@ -80,7 +77,6 @@ describe('the rules can fail', () => {
     ['dark-energy/law.ts', '../scenario/read'],
     ['numerics/roots.ts', '../neutrinos/energy'],
     ['units.ts', './parameter'],
-    ['scenario/read.ts', '../workers/batch'],
     ['scenario/read.ts', '../unheard-of/thing'],
     ['scenario/read.ts', '../../app/page'],
     ['scenario/read.ts', './write.ts'],
@@ -94,7 +90,6 @@ describe('the rules can fail', () => {
     ['scenario/read.ts', '../dark-energy'],
     ['solve.ts', './history/history'],
     ['scenario/read.ts', '../units'],
-    ['workers/batch.ts', 'node:worker_threads'],
   ])('%s may import %s', (file, specifier) => expect(complaint(file, specifier)).toBe(null))
   test('imports are found in every form', () => {
     const code =
@@ -109,11 +104,11 @@ describe('the rules can fail', () => {
 })
 
 describe.each(files)('lib/%s', (file) => {
-  test('stands in the list', () => expect([...ORDER, FREE]).toContain(placeOf(file)))
+  test('stands in the list', () => expect(ORDER).toContain(placeOf(file)))
   test('imports from its folder or above', () => {
     expect(importsOf(codeOf(file)).flatMap((one) => complaint(file, one) ?? [])).toEqual([])
   })
-  test.skipIf(placeOf(file) === FREE)('knows no clock, chance, process, network or page', () => {
+  test('knows no clock, chance, process, network or page', () => {
     expect(codeOf(file).match(OUTSIDE)?.[0] ?? null).toBe(null)
   })
 })
@@ -138,4 +133,10 @@ test('every relative import leads to a file', () => {
       .map((one) => `${file}: ${one}`),
   )
   expect(lost).toEqual([])
+})
+
+test('DEVELOPERS.md tells this order', () => {
+  const [, flow = ''] = readFileSync(new URL('../DEVELOPERS.md', import.meta.url), 'utf8').split('```')
+  const told = flow.split('\n').flatMap((line) => (line.startsWith('lib/') ? line.split(/ {2}/)[0].split(' ') : []))
+  expect(told.map((path) => placeOf(path.replace('lib/', '')))).toEqual(ORDER)
 })

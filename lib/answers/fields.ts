@@ -3,7 +3,7 @@ import { z } from 'zod'
 import { COLUMN_KEYS, type Column } from '../quantities/column'
 import { columnNamed } from '../quantities/columns'
 import { type Fault, fault } from '../scenario/problems'
-import { plainDecimal } from '../scenario/values'
+import { plainDecimal, readNumber } from '../scenario/values'
 
 /** What a reader makes of a text: the value, or all that is wrong with it. */
 type Read<T> = (text: string) => { readonly value: T } | { readonly faults: readonly Fault[] }
@@ -51,6 +51,13 @@ export const number = (one: Above, meaning: string) =>
   field<number>(meaning, (text) => {
     const found = numberFault(one, text, allowedNumber(one))
     return found ? { faults: [found] } : { value: plainDecimal(text) as number }
+  })
+
+/** A number within limits, as those of the scenario code. */
+export const limited = (one: Parameters<typeof readNumber>[0], meaning: string) =>
+  field<number>(meaning, (text) => {
+    const read = readNumber(one, text)
+    return 'fault' in read ? { faults: [read.fault] } : read
   })
 
 const MOST_VALUES = 1000

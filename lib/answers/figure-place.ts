@@ -4,14 +4,13 @@ import { HORIZONTALS } from '../figures/horizontal'
 import { VIEWS } from '../figures/views'
 import { type Fault, fault } from '../scenario/problems'
 import { MOST_SCENARIOS } from '../scenario/query'
-import { PLAIN_PLACE, type Place } from '../words/place'
-import { count, number, oneOf, take } from './fields'
+import { FARTHEST_END, FARTHEST_GALAXY, PLAIN_PLACE, type Place } from '../words/place'
+import { count, limited, oneOf, take } from './fields'
 
-const ANY = Number.NEGATIVE_INFINITY
 const SHOWS = [...new Set(VIEWS.flatMap(({ shows }) => shows.map(({ key }) => key)))].map((key) => ({ key }))
 const COMPARISONS = [{ key: 'ratio' }, { key: 'difference' }] as const
 
-const end = (key: string, meaning: string) => number({ key, above: ANY, unit: '' }, meaning)
+const end = (key: string, meaning: string) => limited({ key, min: -FARTHEST_END, max: FARTHEST_END, unit: '' }, meaning)
 
 export const PLACE_FIELDS = {
   focus: count('focus', 1, MOST_SCENARIOS, 'The scenario that comparisons refer to, counted from 1.'),
@@ -25,7 +24,10 @@ export const PLACE_FIELDS = {
     `Of the other views: the horizontal axis, ${HORIZONTALS.map(({ key }) => key).join(', ')}.`,
   ),
   compare: oneOf('compare', COMPARISONS, 'Of the other views: over the scenario in focus, or less it.'),
-  galaxy: number({ key: 'galaxy', above: 0, unit: '' }, 'Of the view reach: redshift of the galaxy that is followed.'),
+  galaxy: limited(
+    { key: 'galaxy', min: 0, above: true, max: FARTHEST_GALAXY, unit: '' },
+    'Of the view reach: redshift of the galaxy that is followed.',
+  ),
   left: end('left', 'Of the other views: where the axis begins, in its own unit.'),
   right: end('right', 'Of the other views: where the axis ends, in its own unit.'),
 }

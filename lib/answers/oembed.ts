@@ -4,7 +4,7 @@ import { FRAME_SIZE, frameHtml } from '../formats/frame'
 import { DEMO } from '../scenario/demo'
 import { type Fault, fault, problemsOf } from '../scenario/problems'
 import { readQuery } from '../scenario/query'
-import type { Reading, Scenario } from '../scenario/scenario'
+import type { Reading } from '../scenario/scenario'
 import { linkQuery } from '../scenario/write'
 import { nameOf } from '../words/desk'
 import { joined } from '../words/sentence'
@@ -53,14 +53,14 @@ export function askOEmbed(pairs: Pairs, home: Home): Reading<Question<OEmbed>> {
     FRAME_SIZE.height,
     take(keys.values, 'maxheight', OEMBED_FIELDS.maxheight, faults) ?? FRAME_SIZE.height,
   )
-  const scenarios = url === undefined ? null : scenariosAt(url, home)
-  if (scenarios === null) faults.push(urlFault(url, home))
-  if (faults.length > 0 || scenarios === null) return { ok: false, problems: problemsOf(faults, null) }
-  const value = answerOf(scenarios, { width, height }, home)
+  const link = url === undefined ? null : linkAt(url, home)
+  if (link === null) faults.push(urlFault(url, home))
+  if (faults.length > 0 || link === null) return { ok: false, problems: problemsOf(faults, null) }
+  const value = answerOf(link, { width, height }, home)
   return {
     ok: true,
     value: {
-      canonical: `${linkQuery(scenarios)}&width=${width}&height=${height}`,
+      canonical: `${link.query}&width=${width}&height=${height}`,
       answer: () => ({ ok: true, value }),
     },
   }
@@ -73,21 +73,28 @@ function urlFault(url: string | undefined, { base }: Home): Fault {
   return fault('url', url ?? '', allowed, url === undefined ? 'url is missing.' : why)
 }
 
+interface Link {
+  readonly title: string
+  /** The scenarios, as a query. */
+  readonly query: string
+}
+
 /** Null for what is no link of ours. */
-function scenariosAt(url: string, { base }: Home): readonly Scenario[] | null {
+function linkAt(url: string, { base }: Home): Link | null {
   const [path, query = ''] = url.split(/\?(.*)/s)
   if (base === '' || ![base, `${base}/`, `${base}/embed`].includes(path)) return null
-  const reading = readQuery(new URLSearchParams(query.replace(/#.*/, '')).getAll('s'))
-  return reading.ok ? reading.value : null
+  const codes = new URLSearchParams(query.replace(/#.*/, '')).getAll('s')
+  const reading = readQuery(codes)
+  if (!reading.ok) return null
+  const title = codes.length === 0 ? DEMO.title : joined(reading.value.map(nameOf))
+  return { title, query: linkQuery(reading.value) }
 }
 
 function answerOf(
-  scenarios: readonly Scenario[],
+  { title, query }: Link,
   { width, height }: { width: number; height: number },
   { base }: Home,
 ): OEmbed {
-  const query = linkQuery(scenarios)
-  const title = joined(scenarios.map(nameOf)) || DEMO.title
   return {
     version: '1.0',
     type: 'rich',

@@ -43,13 +43,14 @@ function valueText({ symbol, value, error }: PublishedValue): string {
 }
 
 function shelved({ key, title, code, values, citation, confidence, note, kept }: PublishedSet): ShelvedSet {
-  const errors = confidence === 'best fit' ? 'best fit' : `errors ${confidence}`
+  const hasErrors = values.some(({ error }) => error !== '')
+  const what = confidence === 'best fit' ? '; best fit' : hasErrors ? `; errors ${confidence}` : ''
   return {
     key,
     title,
     plain: code?.replace(/,as:.*$/, '') ?? null,
     values: values.map(valueText).join(', '),
-    cited: `${citation}; ${errors}. ${note}`,
+    cited: `${citation}${what}. ${note}`,
     retunes: kept !== null && RETUNED_TO.includes(key),
   }
 }

@@ -12,6 +12,7 @@ import { THEME_KEYS } from '../print/theme'
 import { COLUMNS } from '../quantities/columns'
 import { MOST_SCENARIOS } from '../scenario/query'
 import { SPACINGS } from '../tables/spacing'
+import { FARTHEST_END, FARTHEST_GALAXY } from '../words/place'
 import type { RouteParameter } from './route'
 import { codeDescription } from './scenario-code'
 import type { Schema } from './shapes'
@@ -51,18 +52,18 @@ const TABLE_SHAPES: Readonly<Record<keyof typeof TABLE_FIELDS, Schema>> = {
   bounds,
 }
 
-const plain: Schema = { type: 'number' }
+const end: Schema = { type: 'number', minimum: -FARTHEST_END, maximum: FARTHEST_END }
 const PLACE_SHAPES: Readonly<Record<keyof typeof PLACE_FIELDS, Schema>> = {
   focus: { type: 'integer', minimum: 1, maximum: MOST_SCENARIOS, default: 1 },
   time: { enum: ['log'] },
-  from: plain,
-  to: plain,
+  from: end,
+  to: end,
   show: { type: 'string' },
   by: { type: 'string' },
   compare: { enum: ['ratio', 'difference'] },
-  galaxy: plain,
-  left: plain,
-  right: plain,
+  galaxy: { type: 'number', exclusiveMinimum: 0, maximum: FARTHEST_GALAXY },
+  left: end,
+  right: end,
 }
 
 const FIGURE_SHAPES: Readonly<Record<keyof typeof FIGURE_FIELDS, Schema>> = {

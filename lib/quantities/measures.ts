@@ -42,7 +42,6 @@ const scaled = (outcome: Outcome, factor: number): Outcome =>
 
 const inGly = (outcome: Outcome, { scenario }: Subject): Outcome => scaled(outcome, hubbleLengthGly(scenario.h0))
 
-/** Rounding of a ratio of sums of densities: the bound follows the sizes of what was added. */
 const today = ({ history }: Subject): Event => {
   const event = eventAtScale(history, 0, 'expanding')
   if (!isEvent(event)) throw new Error('every history holds today')
@@ -52,6 +51,7 @@ const today = ({ history }: Subject): Event => {
 const withError = (value: number | Missing, error: number): Outcome =>
   typeof value === 'number' ? bounded(value, error) : value
 
+/** Rounding of a ratio of sums of densities: the bound follows the sizes of what was added. */
 const rounding = ({ history }: Subject): number =>
   16 * Number.EPSILON * (1 + history.past.model.magnitude(0)) + 4 * noise(history)
 

@@ -29,7 +29,7 @@ function withDecimalPoints(pieces: readonly string[], changes: string[]): string
   const whole: string[] = []
   for (const piece of pieces) {
     const before = whole.at(-1) ?? ''
-    const decimals = /^\s*\d+(?:e[+-]?\d+)?(?:_[+-]?\d+)*\s*$/i.test(piece) && /[:=_]\s*[+-−]?\d+$/.test(before)
+    const decimals = /^\s*\d+(?:e[+-]?\d+)?(?:_[+-]?\d+)*\s*$/i.test(piece) && /[:=_]\s*[+−-]?\d+$/.test(before)
     if (decimals) {
       whole[whole.length - 1] = `${before}.${piece.trim()}`
       changes.push(`The decimal comma is read as a point: ${clip(`${before}.${piece}`.trim())}.`)

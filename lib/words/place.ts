@@ -1,5 +1,7 @@
 /** What an address says beside the scenarios: every key once. It is read leniently, and defaults are not written. */
 
+import { plainDecimal } from '../scenario/values'
+
 export const THEMES = ['paper', 'night'] as const
 export type Theme = (typeof THEMES)[number]
 
@@ -45,6 +47,8 @@ interface Key<K extends keyof Place = keyof Place> {
 
 /** Farther away no galaxy is followed. */
 export const FARTHEST_GALAXY = 1e4
+/** The ends of ranges lie within this of zero. */
+export const FARTHEST_END = 1e6
 
 const KEYS = [
   key('focus', focused, (focus) => (focus > 0 ? String(focus + 1) : null)),
@@ -55,10 +59,10 @@ const KEYS = [
   key('compare', token),
   key('galaxy', (text) => within(text, 0, FARTHEST_GALAXY) || null),
   key('time', (text) => (text === 'log' ? text : null)),
-  key('from', (text) => within(text, -1e6, 1e6)),
-  key('to', (text) => within(text, -1e6, 1e6)),
-  key('left', (text) => within(text, -1e6, 1e6)),
-  key('right', (text) => within(text, -1e6, 1e6)),
+  key('from', end),
+  key('to', end),
+  key('left', end),
+  key('right', end),
   key('epoch', token),
   key('at', typed),
   key('until', typed),
@@ -137,7 +141,11 @@ function typed(text: string): string | null {
   return kept === '' ? null : [...kept].slice(0, 40).join('')
 }
 
+function end(text: string): number | null {
+  return within(text, -FARTHEST_END, FARTHEST_END)
+}
+
 function within(text: string, least: number, most: number): number | null {
-  const value = /^-?\d{1,9}(\.\d{1,12})?$/.test(text) ? Number(text) : Number.NaN
-  return value >= least && value <= most ? value + 0 : null
+  const value = plainDecimal(text)
+  return value !== null && value >= least && value <= most ? value : null
 }

@@ -1,6 +1,7 @@
 /** oEmbed 1.0 (oembed.com, section 2.3.4): the fields of the type rich, and sizes within those asked for. */
 import { describe, expect, test } from 'vitest'
 import { askOEmbed } from '../../lib/answers/oembed'
+import { DEMO } from '../../lib/scenario/demo'
 import { answerOf, problemsOf } from './ask'
 
 const ask = (base: string) => (pairs: URLSearchParams) => askOEmbed(pairs, { version: '1', base })
@@ -20,6 +21,12 @@ test('a link of ours', () => {
   })
   expect(answer.html).toMatch(/^<iframe src="https:\/\/a\.example\/embed\?s=h0:70,matter:0\.3111,as:%3Cb%3E%22x%22" /)
   expect(answer.html).toContain('title="&lt;b&gt;&quot;x&quot;"')
+})
+
+test('a link without scenarios is that of the demo, under its title', () => {
+  const answer = answerOf(here, query('https://a.example/'))
+  expect(answer.title).toBe(DEMO.title)
+  expect(new URL(answer.thumbnail_url).searchParams.getAll('s')).toHaveLength(DEMO.codes.length)
 })
 
 test('no wider and no higher than asked', () => {

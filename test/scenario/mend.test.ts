@@ -10,6 +10,7 @@ describe('the nearest good reading', () => {
     ['matter:0.3,foo:1,h0:70', 'h0:70,matter:0.3'],
     ['__proto__:1,h0:70', 'h0:70,matter:0.3111'],
     ['matter:0,3,h0:70,5', 'h0:70.5,matter:0.3'],
+    ['h0:70,matter:.3,5', 'h0:70,matter:0.3'],
     ['masses:0,05_0,1,h0:70', 'h0:70,matter:0.3111,masses:0.05_0.1'],
     ['eos:constant,w:-0,9', 'h0:67.66,matter:0.3111,eos:constant,w:-0.9'],
     ['matter=0.3;h0=70', 'h0:70,matter:0.3'],

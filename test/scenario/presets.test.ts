@@ -32,7 +32,7 @@ describe.each(PUBLISHED_SETS.map((one) => [one.key, one] as const))('%s', (key, 
       expect(value.replace('−', '-')).toBe(row?.value)
       const errors = row?.plus === row?.minus ? (row?.plus ? `± ${row.plus}` : '') : `+${row?.plus} −${row?.minus}`
       expect(error).toBe(errors)
-      expect(`${row?.confidence}%`).toBe(set.confidence === '68%' && error !== '' ? '68%' : `${row?.confidence}%`)
+      expect(set.confidence).toBe(row?.confidence ? `${row.confidence}%` : 'best fit')
       const [identifier] = /arXiv:[\d.]+/.exec(row?.source ?? '') ?? []
       expect(set.citation).toContain(identifier)
     }

@@ -125,7 +125,7 @@ describe('the address', () => {
   })
 
   it('is read leniently in what is not a scenario', () => {
-    expect(placeOf({ focus: '9', theme: 'pink', from: '1e5', left: 'x', view: 'R/' })).toEqual(PLAIN_PLACE)
+    expect(placeOf({ focus: '9', theme: 'pink', from: '1e7', left: 'x', view: 'R/' })).toEqual(PLAIN_PLACE)
     expect(placeOf({ focus: '3', theme: 'night' })).toEqual({ ...PLAIN_PLACE, focus: 2, theme: 'night' })
   })
 
