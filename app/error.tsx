@@ -1,14 +1,12 @@
 'use client'
 
+import { Masthead } from './ui/masthead'
+
 /** Where the page itself fails: what can be said, and the ways on. */
 export default function Failure({ reset }: { readonly reset: () => void }) {
   return (
     <div className="page">
-      <header className="masthead">
-        <a className="brand" href="/">
-          Longhence
-        </a>
-      </header>
+      <Masthead />
       <main className="lone">
         <h1>This page could not be drawn</h1>
         <p>The fault is ours, not that of the link: the scenario in it is kept in the address.</p>

@@ -1,16 +1,13 @@
 import { EDITION } from './edition'
 import { Footer } from './ui/footer'
+import { Masthead } from './ui/masthead'
 
 export const metadata = { title: 'No such page' }
 
 export default function NotFound() {
   return (
     <div className="page">
-      <header className="masthead">
-        <a className="brand" href="/">
-          Longhence
-        </a>
-      </header>
+      <Masthead />
       <main className="lone">
         <h1>There is no such page</h1>
         <p>

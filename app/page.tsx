@@ -7,6 +7,7 @@ import { takeAwayLists } from '../lib/answers/take-away'
 import { HOME } from './api/home'
 import { EDITION } from './edition'
 import { Explorer, type Load } from './explorer'
+import { all, type PageProps, queryOf } from './keys'
 import { linkCard } from './link-card'
 import { askedOf } from './live/fetch-view'
 import { packed } from './live/packed'
@@ -15,11 +16,7 @@ import { Ruler } from './ui/ruler'
 
 const LISTS = takeAwayLists(HOME.base)
 
-interface Props {
-  readonly searchParams: Promise<Readonly<Record<string, string | string[] | undefined>>>
-}
-
-export async function generateMetadata(props: Props): Promise<Metadata> {
+export async function generateMetadata(props: PageProps): Promise<Metadata> {
   const view = await read(props)
   return {
     title: { absolute: `${view.title} · Longhence` },
@@ -28,11 +25,11 @@ export async function generateMetadata(props: Props): Promise<Metadata> {
   }
 }
 
-export default async function Page(props: Props) {
+export default async function Page(props: PageProps) {
   const { s, ...others } = await props.searchParams
   const ruler = rulerOf(all(s), (key) => all(others[key])[0])
   const view = await read(props)
-  const asked = askedOf(await queryOf(props), null)
+  const asked = askedOf(`${await queryOf(props)}`, null)
   const load = packed<Load>({ initial: view, ruler, shelf: SHELF, lists: LISTS, edition: EDITION })
   return (
     <>
@@ -49,17 +46,8 @@ const explorerOf = cache((codes: string, keys: string) =>
   explorer({ codes: JSON.parse(codes), keys: new Map(JSON.parse(keys)) }),
 )
 
-async function read({ searchParams }: Props): Promise<View> {
+async function read({ searchParams }: PageProps): Promise<View> {
   const { s, ...others } = await searchParams
   const keys = Object.entries(others).map(([key, value]) => [key, all(value)[0] ?? ''])
   return explorerOf(JSON.stringify(all(s)), JSON.stringify(keys))
-}
-
-async function queryOf({ searchParams }: Props): Promise<string> {
-  const pairs = Object.entries(await searchParams).flatMap(([key, value]) => all(value).map((one) => [key, one]))
-  return new URLSearchParams(pairs).toString()
-}
-
-function all(value: string | string[] | undefined): readonly string[] {
-  return value === undefined ? [] : [value].flat()
 }

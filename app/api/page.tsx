@@ -8,6 +8,7 @@ import { typeset } from '../../lib/words/number'
 import { EDITION } from '../edition'
 import { Formula } from '../method/formula'
 import { Footer } from '../ui/footer'
+import { Masthead } from '../ui/masthead'
 import { Sentence } from '../ui/symbol'
 import { HOME } from './home'
 
@@ -20,11 +21,7 @@ export const metadata: Metadata = {
 export default function Page() {
   return (
     <div className="page">
-      <header className="masthead">
-        <a className="brand" href="/">
-          Longhence
-        </a>
-      </header>
+      <Masthead />
       <main className="interface">
         <h1>Interface for scripts</h1>
         <p>

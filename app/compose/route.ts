@@ -1,5 +1,6 @@
 import { composedLink } from '../../lib/words/compose'
 import { readPlace } from '../../lib/words/place'
+import { sent } from './sent'
 
 /** Where the form of the page goes: it answers with the address that the fields spell. */
 export function GET(request: Request): Response {
@@ -10,5 +11,5 @@ export function GET(request: Request): Response {
     place: readPlace((key) => query.get(key), Math.max(1, codes.length)),
     fields: new Map([...query].reverse()),
   })
-  return new Response(null, { status: 303, headers: { location, 'cache-control': 'no-store' } })
+  return sent(request, location)
 }

@@ -8,19 +8,16 @@ import { linkQuery } from '../../lib/scenario/write'
 import { ENGINE } from '../../lib/solve'
 import { nameOf } from '../../lib/words/desk'
 import { THEMES } from '../../lib/words/place'
+import { all, type PageProps } from '../keys'
 import { DataTable, tableOf } from '../ui/data-table'
 import { Drawing } from '../ui/drawing'
-
-interface Props {
-  readonly searchParams: Promise<Readonly<Record<string, string | string[] | undefined>>>
-}
 
 export const metadata: Metadata = { title: 'Figure', robots: { index: false } }
 
 /** The figure alone, for a frame in somebody else's page. */
-export default async function Embed({ searchParams }: Props) {
+export default async function Embed({ searchParams }: PageProps) {
   const { s, theme } = await searchParams
-  const { solutions, problems } = opened(s === undefined ? [] : [s].flat())
+  const { solutions, problems } = opened(all(s))
   const figure = figureOf(solutions.map((one, slot) => ({ ...one, label: nameOf(one.scenario, slot) })))
   const home = `/?${linkQuery(solutions.map(({ scenario }) => scenario))}&engine=${ENGINE}`
   return (

@@ -4,27 +4,21 @@ import { drawChart } from '../../lib/figures/draw-chart'
 import { type Frame, LONG_FRAMES, VIEW_FRAMES } from '../../lib/figures/plot'
 import { serialize } from '../../lib/figures/svg'
 import { placeKeys, THEMES } from '../../lib/words/place'
+import type { PageProps } from '../keys'
+import { Masthead } from '../ui/masthead'
 import { Sentence } from '../ui/symbol'
-
-interface Props {
-  readonly searchParams: Promise<Readonly<Record<string, string | string[] | undefined>>>
-}
 
 export const metadata: Metadata = { title: 'Gallery', robots: { index: false, follow: false } }
 
 /** Every figure in both themes, for a set of scenarios and a width at a time. */
-export default async function Gallery({ searchParams }: Props) {
+export default async function Gallery({ searchParams }: PageProps) {
   const { set, width } = await searchParams
   const collection = COLLECTIONS.find(({ key }) => key === set) ?? COLLECTIONS[0]
   const id = VIEW_FRAMES.find((one) => one.id === width)?.id ?? 'middle'
   if (!collection) return null
   return (
     <div className="page gallery">
-      <header className="masthead">
-        <a className="brand" href="/">
-          Longhence
-        </a>
-      </header>
+      <Masthead />
       <main>
         <h1>Gallery: {collection.title}</h1>
         <nav className="choices" aria-label="Sets">

@@ -2,7 +2,9 @@ import type { Metadata } from 'next'
 import { method } from '../../lib/answers/method'
 import { THEMES, themed } from '../../lib/words/place'
 import { EDITION } from '../edition'
+import type { PageProps } from '../keys'
 import { Footer } from '../ui/footer'
+import { Masthead } from '../ui/masthead'
 import { EntryOfMethod } from './entry'
 
 export const metadata: Metadata = {
@@ -10,21 +12,13 @@ export const metadata: Metadata = {
   description: 'Every quantity, law and parameter with symbol, formula, unit, meaning, accuracy and source.',
 }
 
-interface Props {
-  readonly searchParams: Promise<Readonly<Record<string, string | string[] | undefined>>>
-}
-
-export default async function Method({ searchParams }: Props) {
+export default async function Method({ searchParams }: PageProps) {
   const asked = (await searchParams).theme
   const theme = THEMES.find((one) => one === asked)
   const sections = method()
   return (
     <div className="page" data-theme={theme}>
-      <header className="masthead">
-        <a className="brand" href={themed('/', theme)}>
-          Longhence
-        </a>
-      </header>
+      <Masthead home={themed('/', theme)} />
       <main className="methods">
         <h1>Methods</h1>
         <nav aria-label="Sections">

@@ -1,29 +1,20 @@
 import type { Metadata } from 'next'
 import { retuned } from '../../lib/words/compose-scenario'
 import { EDITION } from '../edition'
+import { type PageProps, queryOf } from '../keys'
 import { Footer } from '../ui/footer'
+import { Masthead } from '../ui/masthead'
 import { Sentence } from '../ui/symbol'
 
 export const metadata: Metadata = { title: 'H₀ not retuned', robots: { index: false } }
 
-interface Props {
-  readonly searchParams: Promise<Readonly<Record<string, string | string[] | undefined>>>
-}
-
 /** Why no Hubble constant keeps what was to be kept, and the way back. */
-export default async function NotRetuned({ searchParams }: Props) {
-  const pairs = Object.entries(await searchParams).flatMap(([key, value]) =>
-    [value ?? []].flat().map((one) => [key, one]),
-  )
-  const result = retuned(new URLSearchParams(pairs))
+export default async function NotRetuned(props: PageProps) {
+  const result = retuned(await queryOf(props))
   const because = result?.because
   return (
     <div className="page">
-      <header className="masthead">
-        <a className="brand" href="/">
-          Longhence
-        </a>
-      </header>
+      <Masthead />
       <main className="lone">
         <h1>The Hubble constant stays</h1>
         {because ? (

@@ -2,6 +2,7 @@ import { memo } from 'react'
 import type { Desk } from '../../lib/words/desk'
 import { type Address, undo } from '../live/address'
 import { CopyLink } from './copy-link'
+import { Brand } from './masthead'
 import { Tables } from './tables'
 
 const NAMES = { paper: 'Paper', night: 'Night' } as const
@@ -19,9 +20,7 @@ export const Header = memo(function Header({ desk, depth }: Props) {
       <a className="skip" href="#scenarios">
         Skip to the scenarios
       </a>
-      <a className="brand" href="/">
-        Longhence
-      </a>
+      <Brand home="/" />
       <div className="acts-of-page">
         <button type="button" className={depth ? 'act' : 'act absent'} onClick={undo}>
           Undo

@@ -6,12 +6,10 @@ import { ENGINE } from '../../lib/solve'
 import { THEMES, themed } from '../../lib/words/place'
 import { HOME } from '../api/home'
 import { EDITION } from '../edition'
+import { all, type PageProps } from '../keys'
 import { Footer } from '../ui/footer'
+import { Masthead } from '../ui/masthead'
 import { TakeAwayWords } from '../ui/take-away-words'
-
-interface Props {
-  readonly searchParams: Promise<Readonly<Record<string, string | string[] | undefined>>>
-}
 
 export const metadata: Metadata = {
   title: 'Words to take away',
@@ -20,20 +18,16 @@ export const metadata: Metadata = {
 }
 
 /** The words of scenarios, complete without scripts. */
-export default async function Page({ searchParams }: Props) {
+export default async function Page({ searchParams }: PageProps) {
   const { s, theme: asked } = await searchParams
   const theme = THEMES.find((one) => one === asked)
   const kept = theme ? [`theme=${theme}`] : []
-  const { solutions, problems } = opened(s === undefined ? [] : [s].flat())
+  const { solutions, problems } = opened(all(s))
   const query = linkQuery(solutions.map(({ scenario }) => scenario))
   const edition = { version: HOME.version, engine: ENGINE, link: `${HOME.base}/?${query}&engine=${ENGINE}` }
   return (
     <div className="page" data-theme={theme}>
-      <header className="masthead">
-        <a className="brand" href={themed('/', theme)}>
-          Longhence
-        </a>
-      </header>
+      <Masthead home={themed('/', theme)} />
       <main className="take-away alone">
         <h1>Words to take away</h1>
         {problems.length > 0 && (

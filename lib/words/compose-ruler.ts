@@ -1,6 +1,5 @@
 /** From the form of the ruler back to an address of the page. */
-import { readScenario } from '../scenario/read'
-import { writeScenario } from '../scenario/write'
+import { addressed } from './compose'
 import { type Place, placeKeys, RULER_KEYS, readPlace } from './place'
 import { type RulerAsk, rulerAskOf, rulerPlaceOf } from './ruler-ask'
 
@@ -16,11 +15,6 @@ const chosen = (query: URLSearchParams): string => query.getAll('read').join(','
 
 /** Without what would hold anyway. */
 const settled = (place: Place): Place => ({ ...place, ...rulerPlaceOf(rulerAskOf(place)) })
-
-function addressed(code: string): string {
-  const reading = readScenario(code, null)
-  return reading.ok ? writeScenario(reading.value) : encodeURIComponent(code)
-}
 
 /** The same address with the ruler asked otherwise. */
 export function rulerLink(here: string, place: Place, ask: RulerAsk): string {

@@ -29,7 +29,7 @@ function changed(before: string, after: string): string {
 }
 
 /** Canonical where it can be read, as typed where not. */
-function addressed(code: string): string {
+export function addressed(code: string): string {
   const reading = readScenario(code, null)
   if (reading.ok) return writeScenario(reading.value)
   return encodeURIComponent(code).replace(/%(3A|2C)/g, decodeURIComponent)
