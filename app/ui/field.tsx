@@ -83,7 +83,7 @@ function Control({ field, id, draft, hand, live }: ControlProps) {
         <span className="entry">
           <input inputMode="text" title={field.allowed} {...typed(field, id, draft, hand)} />
           <span className="unit">
-            {field.unit}
+            <Symbols markup={field.unit} />
             {field.kind === 'number' && <Reset field={field} choose={hand.choose} live={live} />}
           </span>
         </span>

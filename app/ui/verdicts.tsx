@@ -38,9 +38,7 @@ function VerdictOf({ scenario, current }: { readonly scenario: ScenarioView; rea
         </p>
       )}
       {!proven && (
-        <p className="aside">
-          The ending is computed, not proven: it rests on digits or steps that rounding could change.
-        </p>
+        <p className="aside">The ending is found by numerical integration, to the digits typed; it is not proven.</p>
       )}
       {notices.map((notice) => (
         <p key={notice.message} className="aside notice">

@@ -5,6 +5,7 @@ export const constant: Family = {
   key: 'constant',
   label: 'constant w',
   formula: 'w constant',
+  clause: 'has a constant equation of state',
   meaning: 'Pressure over density stays the same for ever; below −1 the density grows (phantom).',
   source: 'Turner & White 1997, Phys. Rev. D 56, R4439',
   caution: 'A constant w is a description of measurements up to now; run forward it is an assumption.',

@@ -3,10 +3,10 @@ import { type Family, type Law, numberOf } from './law'
 import { cosine, exponential, inverse, linear, type Potential, type PotentialKind } from './potential'
 
 const CHOICES: readonly { readonly value: PotentialKind; readonly label: string }[] = [
-  { value: 'exponential', label: 'V ∝ e^(−slope φ)' },
-  { value: 'linear', label: 'V ∝ 1 − slope φ' },
-  { value: 'inverse', label: 'V ∝ φ^(−slope)' },
-  { value: 'cosine', label: 'V ∝ 1 + cos(φ/width)' },
+  { value: 'exponential', label: 'V ∝ e^(−sφ)' },
+  { value: 'linear', label: 'V ∝ 1 − sφ' },
+  { value: 'inverse', label: 'V ∝ φ^(−s)' },
+  { value: 'cosine', label: 'V ∝ 1 + cos(φ/f)' },
 ]
 
 const slope: Omit<NumberParameter, 'only' | 'min'> = {

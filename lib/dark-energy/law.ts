@@ -104,6 +104,8 @@ export interface Family {
   readonly label: string
   /** w(a) or p(ρ) in the markup of labels. */
   readonly formula: string
+  /** What dark energy does by it, where `follows` and the formula make no sentence. */
+  readonly clause?: string
   /** One sentence. */
   readonly meaning: string
   /** Publication of the law. */

@@ -90,6 +90,7 @@ export const nodes: Family = {
   key: 'nodes',
   label: 'w given at scale factors',
   formula: 'w(a) through nodes, monotone between them',
+  clause: 'has a w(a) through nodes, monotone between them,',
   meaning: 'w runs smoothly through the given values, without overshooting, and stays constant before and after them.',
   source: 'Fritsch & Butland 1984, SIAM J. Sci. Stat. Comput. 5, 300',
   caution: 'Between the nodes the curve is a choice, and outside them w stays as it was at the first and the last.',

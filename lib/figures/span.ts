@@ -22,18 +22,27 @@ const RATIOS = 30
 export interface Wish {
   /** Values that must be seen. */
   readonly steady: readonly number[]
+  /** A curve that stays within them is shown as a whole. */
+  readonly bounds?: Extent
   /** Values whose logarithm may be drawn where it helps, ratios, differences, or others. */
   readonly kind: 'size' | 'ratio' | 'difference' | 'value'
 }
 
 type Sorted = readonly number[]
-type Extent = readonly [low: number, high: number]
+export type Extent = readonly [low: number, high: number]
 
 export function spanOf(curves: readonly (readonly (number | null)[])[], wish: Wish): Range {
   const known = curves.map(ascending).filter(({ length }) => length > 0)
   if (known.length === 0) return linearRange(0, 1)
   const least = Math.min(...known.map(first))
-  const main = capped(merged(known.map(bulk), wish.steady), known, wish)
+  const main = capped(
+    merged(
+      known.map((sorted) => bulk(sorted, wish.bounds)),
+      wish.steady,
+    ),
+    known,
+    wish,
+  )
   return logarithmic(known, main, wish) ?? padded(main, least)
 }
 
@@ -45,9 +54,10 @@ const last = (sorted: Sorted) => sorted.at(-1) as number
 const at = (sorted: Sorted, part: number) => sorted[Math.round(part * (sorted.length - 1))] as number
 
 /** Of each curve by itself: one that is short has few values among those of all. */
-function bulk(sorted: Sorted): Extent {
+function bulk(sorted: Sorted, bounds: Extent = [0, 0]): Extent {
   const [low, high] = [at(sorted, CUT.low), at(sorted, CUT.high)]
   const whole = [first(sorted), last(sorted)] as const
+  if (whole[0] >= bounds[0] && whole[1] <= bounds[1]) return whole
   return whole[1] - whole[0] <= HARDLY * (high - low) ? whole : [low, high]
 }
 
@@ -64,7 +74,7 @@ function capped([low, high]: Extent, curves: readonly Sorted[], { steady, kind }
 
 function logarithmic(curves: readonly Sorted[], [low]: Extent, { steady, kind }: Wish): Range | null {
   const least = Math.min(...curves.map(first))
-  if (kind === 'ratio' && least > 0) return logRange(low, Math.max(...curves.map(bulk).map(last)), RATIOS)
+  if (kind === 'ratio' && least > 0) return logRange(low, Math.max(...curves.map((sorted) => bulk(sorted)[1])), RATIOS)
   if (kind !== 'size' || least < 0) return null
   const most = Math.max(...curves.map(last))
   const to = Math.min(most, RUNAWAY.log * Math.max(0, ...steady) || most)

@@ -44,7 +44,7 @@ function outside({ radiation, baryons, h0, matter }: Scenario): Missing | null {
   const broken = ranges.find(([, value, low, high]) => !(value >= low && value <= high))
   if (!broken) return null
   const [name, value, low, high] = broken
-  return missing(`the fit holds for ${name} from ${low} to ${high}, and here it is ${Number(value.toPrecision(4))}`)
+  return missing(`the fit holds for ${name} from ${low} to ${high}, not for ${Number(value.toPrecision(4))}`)
 }
 
 function fitError({ there, nu, baryons, matter, cmb }: Straying, { h0, radiation, ...scenario }: Scenario): number {

@@ -25,7 +25,7 @@ const COLOURS: Colours = {
   'hue-2': ['#007a58', '#3cc898'],
   'hue-3': ['#a3387a', '#e99cca'],
   'hue-4': ['#8a6100', '#e8b93c'],
-  'hue-5': ['#33729a', '#a5d8f7'],
+  'hue-5': ['#3f4248', '#d3d6da'],
 }
 
 /** Colours by name, as a theme has them. */

@@ -71,13 +71,15 @@ function mendValue(bench: Bench, key: string, typed: string, families: readonly 
   const parameters = parametersOf(key, bench.texts.get(EOS.key), families)
   // A key may have several records, each for other words beside it: the strict reader then decides.
   const nearest = parameters.map((one) => nearestText(one, typed)).find((one) => one !== null)
-  if (nearest === undefined) drop(bench, key, reasonToDrop(key, parameters.length > 0))
+  if (nearest === undefined) drop(bench, key, reasonToDrop(key, typed, parameters.length > 0))
   else bench.texts.set(key, nearest)
   if (nearest !== undefined && nearest !== typed) bench.changes.push(`${key}:${clip(typed)} is read as ${nearest}.`)
 }
 
-const reasonToDrop = (key: string, known: boolean): string =>
-  known ? `${key} cannot be read and is left out.` : `“${clip(key)}” is not used here and is left out.`
+const reasonToDrop = (key: string, typed: string, known: boolean): string =>
+  known
+    ? `${key}:${clip(typed)} cannot be read and counts as not given.`
+    : `“${clip(key)}” is not used here and is left out.`
 
 function parametersOf(
   key: string,

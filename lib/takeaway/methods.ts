@@ -26,7 +26,7 @@ export function methodsOf({ scenario, code, measures, budget }: Solution, { vers
 
 function inputs({ h0, matter, closure, radiation }: Scenario): string[] {
   return [
-    `H₀ = ${minus(h0)} km s⁻¹ Mpc⁻¹`,
+    `H_0 = ${minus(h0)} km s⁻¹ Mpc⁻¹`,
     `Ω_m = ${minus(matter)}`,
     closure.given === 'dark'
       ? `Ω_DE = ${minus(closure.value)} (curvature closes the budget)`
@@ -50,7 +50,7 @@ function lawSentence(scenario: Scenario): string {
   const used = family.parameters.filter((one) => isUsed(one, scenario.law) === true)
   const values = used.map((one) => valueText(one, scenario.law[one.key]))
   const cites = publicationsIn(family.source).map(({ cite }) => cite)
-  const law = `Dark energy follows ${family.formula}${values.length > 0 ? ` with ${joined(values)}` : ''} (${cites.join('; ')})`
+  const law = `Dark energy ${family.clause ?? `follows ${family.formula}`}${values.length > 0 ? ` with ${joined(values)}` : ''} (${cites.join('; ')})`
   if (!variesAhead({ ...scenario, beyond: 'follow' })) return `${law}.`
   return scenario.beyond === 'hold' ? `${law}; after today w keeps its value.` : `${law}, in the future too.`
 }

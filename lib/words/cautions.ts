@@ -45,7 +45,7 @@ export const CAUTIONS: readonly Caution[] = [
   {
     key: 'antipode',
     title: 'Closed space',
-    text: 'Beyond the antipode of a closed space distances across the line of sight shrink again, and the comoving volume is that of all space.',
+    text: 'The antipode of a closed space lies at a comoving distance of πR_k. Beyond it distances across the line of sight shrink again, the comoving volume is that of all space, and a horizon takes in the whole of it.',
   },
   {
     key: 'smooth',

@@ -39,5 +39,5 @@ function whereOf({ kind, time, scale, redshift }: Moment): string {
   if (kind === 'now' || scale === null || scale === 0) return ''
   const past = time === null ? kind === 'origin' : time < 0
   if (!past || redshift === null || redshift <= 0) return `a ${significant(scale, 3)}`
-  return `z ${redshift < 20 ? fixed(redshift, 2) : significant(redshift, 4)}`
+  return `z ${redshift < 20 ? fixed(redshift, 2) : redshift < 1000 ? significant(redshift, 4) : fixed(redshift, 0)}`
 }

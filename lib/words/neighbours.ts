@@ -8,7 +8,7 @@ const WOULD: Readonly<Record<EndKind, string>> = {
   crunch: 'end in a Big Crunch',
   rip: 'end in a Big Rip',
   'little-rip': 'expand without bound, in a little rip',
-  exponential: 'expand for ever, at a rate that becomes constant',
+  exponential: 'expand for ever, exponentially',
   accelerating: 'expand for ever at a rising pace',
   coasting: 'expand for ever at a pace that becomes steady',
   decelerating: 'expand for ever at a falling pace',

@@ -72,7 +72,10 @@ function numberIn(text: string, { least, most, above: strict }: Limits): number 
   return (strict ? value > least : value >= least) && value <= most ? value : null
 }
 
-const complaint = (text: string, allowed: string): string => `${text} cannot be read here. Allowed: ${allowed}.`
+function complaint(text: string, allowed: string): string {
+  const why = plainDecimal(numberText(text)) === null ? 'cannot be read here' : 'is out of range'
+  return `${text} ${why}. Allowed: ${allowed}.`
+}
 
 /** Other ways in which people type the units. */
 const SPELLINGS: ReadonlyMap<string, LineUnit> = new Map([

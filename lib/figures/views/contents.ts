@@ -81,7 +81,17 @@ function law(): Vertical {
   const column = columnOf('w')
   const { label, symbol, unit } = column
   const divide = { axis: 'y', at: -1, label: '' } as const
-  return { quantity: 'w', label, symbol, unit, factors: [column], past: false, logarithmic: false, divide }
+  return {
+    quantity: 'w',
+    label,
+    symbol,
+    unit,
+    factors: [column],
+    past: false,
+    logarithmic: false,
+    divide,
+    bounds: [-1, 1],
+  }
 }
 
 export const CONTENTS: View = {

@@ -9,7 +9,7 @@ import { finishOf } from '../long-view'
 import { readingsOf } from '../readings'
 import { placesAlong, type Ranges, sampleCurve, steady } from '../sample'
 import type { Range } from '../scale'
-import { spanOf } from '../span'
+import { type Extent, spanOf } from '../span'
 import { fitted } from '../text-width'
 import { againstOf, alternativeOf, futureOf } from './describe'
 import { type Asked, focusOf, rangeOf } from './view'
@@ -28,6 +28,8 @@ export interface Vertical {
   readonly past: boolean
   /** A value that divides, as q = 0. */
   readonly divide?: Reference
+  /** Where a curve stays within them, all of it is shown. */
+  readonly bounds?: Extent
   /** False where a logarithm would make no sense. */
   readonly logarithmic: boolean
 }
@@ -42,6 +44,7 @@ export function quantityChart(asked: Asked, vertical: Vertical): Chart {
   const divide = dividerOf(asked, vertical)
   const today = all.flatMap((values) => values([by.now]))
   const y = spanOf(readings.values, {
+    bounds: compare === 'value' ? vertical.bounds : undefined,
     steady: steadyOf(by.now >= x.from && by.now <= x.to ? today : [], divide),
     kind: compare !== 'value' ? compare : vertical.logarithmic && x.scaling !== 'linear' ? 'size' : 'value',
   })
