@@ -3,7 +3,7 @@ import type { Field } from '../../lib/words/fields'
 import type { Draft, Hand } from '../live/use-editing'
 import { Means } from './means'
 import { Slider } from './slider'
-import { Symbols } from './symbol'
+import { Sentence, Symbols } from './symbol'
 
 interface Props {
   readonly field: Field
@@ -83,7 +83,7 @@ function Control({ field, id, draft, hand, live }: ControlProps) {
         <span className="entry">
           <input inputMode="text" title={field.allowed} {...typed(field, id, draft, hand)} />
           <span className="unit">
-            <Symbols markup={field.unit} />
+            <Sentence text={field.unit} />
             {field.kind === 'number' && <Reset field={field} choose={hand.choose} live={live} />}
           </span>
         </span>

@@ -8,8 +8,11 @@ export function Symbols({ markup }: { readonly markup: string }) {
 
 /** The same within a sentence, where a letter that stands alone may be a word. */
 export function Sentence({ text }: { readonly text: string }) {
-  return <Scripts markup={text} plain={(run) => run} />
+  return <Scripts markup={text} plain={unbroken} />
 }
+
+/** Relations keep what they relate on one line. */
+const unbroken = (run: string): string => run.replace(/ ([=<>≤≥]) /g, '\u00a0$1\u00a0')
 
 function Scripts({ markup, plain }: { readonly markup: string; readonly plain: (text: string) => ReactNode }) {
   return runsOf(markup).map(({ kind, text }, i) => {

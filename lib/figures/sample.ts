@@ -22,8 +22,9 @@ export const EVEN = 240
 const CROWDED = 28
 /** Part of the figure over which points crowd towards an origin or an ending. */
 const CROWD = 0.1
-/** Points added where a curve leaves through an edge. */
+/** Points added in a step where a curve leaves through an edge, or beside one where it bends by more than BENT of the axis. */
 const REFINED = 12
+const BENT = 0.05
 /** Largest departure of the drawn line from the sampled one, in parts of the figure: a fifth of a pixel of a thousand. */
 const TOLERANCE = 2e-4
 
@@ -75,9 +76,16 @@ function sideOf(value: number | null, y: Range): Side {
 function refine(found: readonly Sample[], y: Range): number[] {
   return found.flatMap(([place, value], i) => {
     const next = found[i + 1]
-    if (!next || sideOf(value, y) === sideOf(next[1], y)) return []
+    if (!next || (sideOf(value, y) === sideOf(next[1], y) && !bends(found, i, y) && !bends(found, i + 1, y))) return []
     return Array.from({ length: REFINED }, (_, k) => place + ((next[0] - place) * (k + 1)) / (REFINED + 1))
   })
+}
+
+/** Does the curve within the figure turn at a sample? */
+function bends(found: readonly Sample[], i: number, y: Range): boolean {
+  const [before, here, after] = [found[i - 1]?.[1], found[i]?.[1], found[i + 1]?.[1]]
+  if (before == null || here == null || after == null || sideOf(here, y) !== 0) return false
+  return Math.abs(fractionOf(y, before) - 2 * fractionOf(y, here) + fractionOf(y, after)) > BENT
 }
 
 function merge(one: readonly Sample[], other: readonly Sample[]): Sample[] {

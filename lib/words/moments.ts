@@ -12,10 +12,19 @@ export interface MomentWords {
   readonly where: string
 }
 
+const CHANGES: readonly Moment['kind'][] = ['acceleration-start', 'acceleration-end']
+/** Of the changes of the sign of ä ahead so many are told, and the last. */
+const FEW = 4
+
 export function momentWords({ moments }: Pick<Solution, 'moments'>): MomentWords[] {
-  return moments.map((moment) => ({
+  const swings = moments.filter(({ kind, time }) => CHANGES.includes(kind) && time !== null && time > 0)
+  const skipped = new Set(swings.slice(FEW, -1))
+  const more = (moment: Moment) =>
+    skipped.size > 0 && moment === swings[FEW - 1] ? `, and ${skipped.size} changes more` : ''
+  const shown = moments.filter((moment) => !skipped.has(moment))
+  return shown.map((moment) => ({
     kind: moment.kind,
-    label: `${moment.kind === 'now' ? 'today' : moment.label}${apart(moment)}`,
+    label: `${moment.kind === 'now' ? 'today' : moment.label}${apart(moment)}${more(moment)}`,
     when: whenOf(moment),
     where: whereOf(moment),
   }))

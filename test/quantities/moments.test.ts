@@ -2,6 +2,7 @@
 import { expect, it } from 'vitest'
 import { readScenario } from '../../lib/scenario/read'
 import { solve } from '../../lib/solve'
+import { momentWords } from '../../lib/words/moments'
 
 function momentsOf(code: string) {
   const reading = readScenario(code, null)
@@ -24,4 +25,18 @@ it('a field that swings about its minimum tells twenty changes of the sign of ä
   const changes = momentsOf('h0:70,matter:0.3,eos:field,v:cosine').filter(({ kind }) => kind.startsWith('acceleration'))
   expect(changes).toHaveLength(20)
   expect(changes.filter(({ label }) => label.includes('oscillates'))).toEqual([changes[19]])
+})
+
+it('in words the first changes ahead stand for those up to the last', () => {
+  const moments = momentsOf('h0:70,matter:0.3,eos:field,v:cosine')
+  const words = momentWords({ moments })
+  const ahead = words.filter(({ kind, when }) => kind.startsWith('acceleration') && when.startsWith('+'))
+  expect(moments.length - words.length).toBe(14)
+  expect(ahead.map(({ label }) => label)).toEqual([
+    'acceleration ends',
+    'acceleration begins',
+    'acceleration ends',
+    'acceleration begins, and 14 changes more',
+    'acceleration ends; from here on the sign of ä oscillates',
+  ])
 })
