@@ -1,9 +1,7 @@
-/** The ruler as the page shows it: rounded numbers, reasons once each, complaints beside the fields, and the downloads. */
-import type { Quantity } from '../quantities/quantity'
 import { linkQuery } from '../scenario/write'
 import type { Solution } from '../solve'
 import { nameOf } from '../words/desk'
-import { fixed, significant } from '../words/number'
+import { rounded } from '../words/number'
 import { PLAIN_PLACE, type Place, placeKeys, readPlace } from '../words/place'
 import { rulerAskOf, rulerPlaceOf } from '../words/ruler-ask'
 import { type RulerTyped, rulerTyped } from '../words/ruler-typed'
@@ -63,10 +61,6 @@ function rowOf({ quantity, unit, cells }: RulerLine): RulerRow {
   const { key, symbol, label, digits } = quantity
   const texts = cells.map(({ value }) => (value === null ? null : rounded(value, digits)))
   return { key, symbol, label, unit, cells: texts }
-}
-
-function rounded(value: number, { kind, count }: Quantity['digits']): string {
-  return kind === 'fixed' ? fixed(value, count) : significant(value, count)
 }
 
 /** `Steady light, comoving distance: …`, each reason once; what holds of all scenarios or of all rows does not name them. */

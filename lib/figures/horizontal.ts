@@ -2,7 +2,8 @@
 
 import { eventAtConformal, isEvent } from '../history/event'
 import { type Missing, missing } from '../measures/outcome'
-import { columnNamed } from '../quantities/columns'
+import type { ColumnKey } from '../quantities/column'
+import { columnOf } from '../quantities/columns'
 import { type Instant, instantAt, instantOf, type Variable } from '../quantities/instant'
 import type { Solution } from '../solve'
 import { hubbleLengthGly } from '../units'
@@ -35,9 +36,8 @@ const MARGIN = 1.02
 /** Beyond the least and the largest scale factor there ever is. */
 const REACHED = 1.25
 
-const columnOf = (key: string, symbol?: string): Horizontal['quantity'] => {
-  const column = columnNamed(key)
-  if (!column) throw new Error(`there is no column ${key}`)
+const axisOf = (key: ColumnKey, symbol?: string): Horizontal['quantity'] => {
+  const column = columnOf(key)
   return { quantity: key, label: column.label, symbol: symbol ?? column.symbol, unit: column.unit }
 }
 
@@ -107,7 +107,7 @@ export const HORIZONTALS: readonly Horizontal[] = [
   {
     key: 'time',
     word: 'time',
-    quantity: columnOf('time', ''),
+    quantity: axisOf('time', ''),
     now: 0,
     future: 'right',
     ...by('time'),
@@ -117,7 +117,7 @@ export const HORIZONTALS: readonly Horizontal[] = [
   {
     key: 'logtime',
     word: 'time, logarithmic',
-    quantity: columnOf('time', ''),
+    quantity: axisOf('time', ''),
     now: 0,
     future: 'right',
     ...by('time'),
@@ -127,7 +127,7 @@ export const HORIZONTALS: readonly Horizontal[] = [
   {
     key: 'lookback',
     word: 'lookback time',
-    quantity: columnOf('lookback'),
+    quantity: axisOf('lookback'),
     now: 0,
     future: 'none',
     ...by('time', -1),
@@ -137,7 +137,7 @@ export const HORIZONTALS: readonly Horizontal[] = [
   {
     key: 'scale',
     word: 'scale factor',
-    quantity: columnOf('scale'),
+    quantity: axisOf('scale'),
     now: 1,
     future: 'right',
     ...by('scale'),
@@ -147,7 +147,7 @@ export const HORIZONTALS: readonly Horizontal[] = [
   {
     key: 'logscale',
     word: 'scale factor, logarithmic',
-    quantity: columnOf('scale'),
+    quantity: axisOf('scale'),
     now: 1,
     future: 'right',
     ...by('scale'),
@@ -157,7 +157,7 @@ export const HORIZONTALS: readonly Horizontal[] = [
   {
     key: 'redshift',
     word: 'redshift',
-    quantity: columnOf('redshift'),
+    quantity: axisOf('redshift'),
     now: 0,
     future: 'none',
     ...by('z'),
@@ -167,7 +167,7 @@ export const HORIZONTALS: readonly Horizontal[] = [
   {
     key: 'logredshift',
     word: 'redshift, logarithmic in 1 + z',
-    quantity: columnOf('redshift'),
+    quantity: axisOf('redshift'),
     now: 0,
     future: 'none',
     ...by('z'),

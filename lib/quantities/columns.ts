@@ -24,3 +24,10 @@ const byKey: ReadonlyMap<string, Column> = new Map(COLUMNS.map((one) => [one.key
 
 /** The column of a name; undefined for a name that is none. */
 export const columnNamed = (key: ColumnKey | string): Column | undefined => byKey.get(key)
+
+/** The column of a key. */
+export function columnOf(key: ColumnKey): Column {
+  const column = byKey.get(key)
+  if (!column) throw new Error(`there is no column ${key}`)
+  return column
+}

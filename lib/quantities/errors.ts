@@ -6,7 +6,7 @@ import type { History } from '../history/history'
 import type { Clock } from '../history/tail'
 import { type Block, expansionIn, shared, slopesIn, spanIn } from './block'
 import type { ColumnKey } from './column'
-import { columnNamed } from './columns'
+import { columnOf } from './columns'
 
 export const EPS = Number.EPSILON
 /** Roundings of a short formula. */
@@ -119,7 +119,7 @@ export const relative = (key: ColumnKey, of: At) => (block: Block) => {
   return errors((one, i) => Math.abs(values[i]) * of(one, i))(block)
 }
 
-export const valuesOf = (key: ColumnKey, block: Block): Float64Array => columnNamed(key)?.values(block) ?? block.take()
+export const valuesOf = (key: ColumnKey, block: Block): Float64Array => columnOf(key).values(block)
 
 /** Rounding and what the error of the place adds where it was searched for. */
 export const placed: At = (block, i) => FEW * EPS + (isTimed(block) ? placeErrors(block)[i] : 0)

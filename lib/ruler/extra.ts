@@ -2,7 +2,7 @@
 import { isMissing, type Missing, missing } from '../measures/outcome'
 import { INTEGRAL, ROUNDING } from '../quantities/accuracy'
 import type { ColumnKey } from '../quantities/column'
-import { columnNamed } from '../quantities/columns'
+import { columnOf } from '../quantities/columns'
 import { HOGG, HORIZONS, significant } from '../quantities/quantity'
 import { hubbleLengthMpc } from '../units'
 import { observed, SQUARE_DEGREES, WHOLE_SKY } from './given'
@@ -14,7 +14,7 @@ const ARCSECONDS = 648000 / Math.PI
 
 /** A column of tables at the epoch. */
 export function columnAt(key: ColumnKey, { subject, instant }: Pick<Epoch, 'subject' | 'instant'>): number | Missing {
-  return columnNamed(key)?.value(subject, instant) ?? missing('there is no such column')
+  return columnOf(key).value(subject, instant)
 }
 
 const through = (value: number | Missing, make: (x: number) => number | Missing): number | Missing =>

@@ -2,7 +2,8 @@
 
 import { LIGHT_YEAR, PARSEC } from '../constants'
 import { familyOf } from '../dark-energy'
-import { columnNamed } from '../quantities/columns'
+import type { ColumnKey } from '../quantities/column'
+import { columnOf } from '../quantities/columns'
 import { type Instant, instantAt, isInstant } from '../quantities/instant'
 import type { Solution } from '../solve'
 import { significant } from '../words/number'
@@ -42,8 +43,8 @@ function travel(solution: Solution): string {
   return ''
 }
 
-function columnValue(solution: Solution, instant: Instant, key: string): number | null {
-  const value = columnNamed(key)?.value(solution, instant)
+function columnValue(solution: Solution, instant: Instant, key: ColumnKey): number | null {
+  const value = columnOf(key).value(solution, instant)
   return typeof value === 'number' ? value : null
 }
 

@@ -1,8 +1,7 @@
 /** The rows of the measures: value and unit, or the reason why there is none. */
 import { MEASURES } from '../quantities/measures'
-import type { Quantity } from '../quantities/quantity'
 import type { Solution } from '../solve'
-import { fixed, significant } from './number'
+import { rounded } from './number'
 
 export interface MeasureWords {
   readonly key: string
@@ -20,8 +19,4 @@ export function measureWords(measures: Solution['measures']): readonly MeasureWo
     const { value, unit, because } = measures[key]
     return { key, symbol, label, meaning, unit, because, value: value === null ? null : rounded(value, digits) }
   })
-}
-
-function rounded(value: number, { kind, count }: Quantity['digits']): string {
-  return kind === 'fixed' ? fixed(value, count) : significant(value, count)
 }

@@ -60,3 +60,11 @@ function dressed(text: string): string {
   const grouped = whole.length > 4 ? whole.replace(/\B(?=(\d{3})+$)/g, THIN) : whole
   return (negative ? MINUS : '') + grouped + (fraction === undefined ? '' : `.${fraction}`)
 }
+
+/** To the digits that a quantity is told with. */
+export function rounded(
+  value: number,
+  { kind, count }: { readonly kind: 'fixed' | 'significant'; readonly count: number },
+): string {
+  return kind === 'fixed' ? fixed(value, count) : significant(value, count)
+}

@@ -1,6 +1,6 @@
 /** Of what: the share of each component in the scenario in focus, and the law of dark energy of all. */
-import type { Column, ColumnKey } from '../../quantities/column'
-import { columnNamed } from '../../quantities/columns'
+import type { ColumnKey } from '../../quantities/column'
+import { columnOf } from '../../quantities/columns'
 import { extrapolates } from '../../words/beyond'
 import { columnAlong } from '../along'
 import type { Chart } from '../chart'
@@ -25,12 +25,6 @@ const STEPS = 160
 const NOTHING = 5e-4
 /** Near a turning point the shares have no bounds. */
 const MOST = 2
-
-function columnOf(key: ColumnKey): Column {
-  const column = columnNamed(key)
-  if (!column) throw new Error(`there is no column ${key}`)
-  return column
-}
 
 function shares(asked: Asked): Chart {
   const solution = focusOf(asked)

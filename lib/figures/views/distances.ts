@@ -1,6 +1,6 @@
 /** Distances along the line of sight, and what follows from them. */
 import type { ColumnKey } from '../../quantities/column'
-import { columnNamed } from '../../quantities/columns'
+import { columnOf } from '../../quantities/columns'
 import { quantityChart, type Vertical } from './quantity-chart'
 import type { Comparison, Show, View } from './view'
 
@@ -13,9 +13,8 @@ const show = (key: ColumnKey, word: string, compare: readonly Comparison[] = ['r
   compare,
 })
 
-function verticalOf(key: string): Vertical {
-  const column = columnNamed(key)
-  if (!column) throw new Error(`there is no column ${key}`)
+function verticalOf(key: ColumnKey): Vertical {
+  const column = columnOf(key)
   const { label, symbol, unit } = column
   return { quantity: key, label, symbol, unit, factors: [column], past: true, logarithmic: key !== 'modulus' }
 }
@@ -38,5 +37,6 @@ export const DISTANCES: View = {
       compare: ['ratio', 'difference'],
     },
   ],
-  chart: (asked) => quantityChart(asked, verticalOf(asked.show.key)),
+  // What it shows are columns, by their keys.
+  chart: (asked) => quantityChart(asked, verticalOf(asked.show.key as ColumnKey)),
 }

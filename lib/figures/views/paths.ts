@@ -1,6 +1,7 @@
 /** What the view of horizons draws: light cones, horizons, and a galaxy that rests in the expansion. */
 import { isMissing } from '../../measures/outcome'
-import { columnNamed } from '../../quantities/columns'
+import type { ColumnKey } from '../../quantities/column'
+import { columnOf } from '../../quantities/columns'
 import type { Instant } from '../../quantities/instant'
 import type { Solution } from '../../solve'
 import { hubbleLengthGly } from '../../units'
@@ -15,11 +16,11 @@ export interface Path {
 /** Gly for one unit of comoving distance. */
 export const unitOf = ({ scenario }: Solution): number => hubbleLengthGly(scenario.h0)
 
-const column = (key: string) => {
-  const found = columnNamed(key)
+const column = (key: ColumnKey) => {
+  const found = columnOf(key)
   return (solution: Solution, instant: Instant): number | null => {
-    const value = found?.value(solution, instant)
-    return value === undefined || isMissing(value) ? null : value
+    const value = found.value(solution, instant)
+    return isMissing(value) ? null : value
   }
 }
 

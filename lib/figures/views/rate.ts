@@ -1,29 +1,21 @@
-/** How fast: the expansion rate over 1 + z, and how the expansion slows or speeds up. */
-import type { Column } from '../../quantities/column'
-import { columnNamed } from '../../quantities/columns'
+import { columnOf } from '../../quantities/columns'
 import { quantityChart, type Vertical } from './quantity-chart'
 import type { View } from './view'
 
 const BY = ['redshift', 'logredshift', 'time', 'logtime', 'lookback', 'scale', 'logscale']
 
-const column = (key: string): Column => {
-  const found = columnNamed(key)
-  if (!found) throw new Error(`there is no column ${key}`)
-  return found
-}
-
-const HUBBLE = column('hubble')
-const DECELERATION = column('deceleration')
+const HUBBLE = columnOf('hubble')
+const DECELERATION = columnOf('deceleration')
 
 const PACE: Vertical = {
   quantity: 'pace',
-  label: 'expansion rate',
+  label: 'expansion speed',
   symbol: 'H/(1 + z)',
   spelled: 'H/(1 + z)',
   unit: HUBBLE.unit,
   past: false,
   logarithmic: true,
-  factors: [HUBBLE, column('scale')],
+  factors: [HUBBLE, columnOf('scale')],
 }
 
 const SLOWING: Vertical = {
