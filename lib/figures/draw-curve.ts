@@ -1,6 +1,7 @@
 /** A curve with its marks. Hue comes by class, dash by the place in the list: a reader without colours can tell them apart. */
 import type { Curve, Mark } from './chart'
 import { dashOf } from './dash'
+import type { Stroke } from './label'
 import type { Frame, Plot } from './plot'
 import type { Point } from './sample'
 import { px, type SvgNode, svg } from './svg'
@@ -12,16 +13,22 @@ const CROSS = 0.36
 const ARROW = 0.62
 
 export function drawCurve(curve: Curve, plot: Plot, { type }: Frame): SvgNode {
-  const width = px((curve.strong ? LINE.strong : LINE.quiet) * type)
-  const dash = dashOf(curve.dash, width)
-  const stroke = { class: 'curve', 'stroke-width': width, ...(dash === null ? {} : { 'stroke-dasharray': dash }) }
+  const width = widthOf(curve, type)
   return svg(
     'g',
     { class: curve.tone },
     ...asymptote(curve, plot, type),
-    svg('path', { d: curve.segments.map((segment) => pathOf(segment, plot)).join(''), ...stroke }),
+    svg('path', { d: curve.segments.map((segment) => pathOf(segment, plot)).join(''), ...strokeOf(curve, type) }),
     ...curve.marks.map((mark) => drawMark(mark, plot, type, width)),
   )
+}
+
+const widthOf = ({ strong }: Stroke, type: number): number => px((strong ? LINE.strong : LINE.quiet) * type)
+
+export function strokeOf(curve: Stroke, type: number) {
+  const width = widthOf(curve, type)
+  const dash = dashOf(curve.dash, width)
+  return { class: 'curve', 'stroke-width': width, ...(dash === null ? {} : { 'stroke-dasharray': dash }) }
 }
 
 function pathOf(points: readonly Point[], plot: Plot): string {

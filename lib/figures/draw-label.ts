@@ -1,5 +1,6 @@
 /** A label in the colour of its curve, with a rim of the ground so that it stays readable over lines. */
-import { type Label, NAME_LINE, NOTE_LINE, NOTE_SIZE } from './label'
+import { strokeOf } from './draw-curve'
+import { boxOf, type Label, NAME_LINE, NOTE_LINE, NOTE_SIZE, type Stroke, SWATCH } from './label'
 import type { Frame } from './plot'
 import { px, type SvgNode, svg } from './svg'
 
@@ -8,6 +9,7 @@ export function drawLabel(label: Label, { type }: Pick<Frame, 'type'>): SvgNode 
   const children: SvgNode[] = []
   let y = label.y
   if (label.leader) children.push(leader(label.leader))
+  if (label.swatch) children.push(swatch(label.swatch, label, type))
   if (label.name) {
     children.push(svg('text', { ...place, y: px(y + 0.92 * type), 'font-size': type, class: 'name' }, label.name))
     y += NAME_LINE * type
@@ -18,6 +20,11 @@ export function drawLabel(label: Label, { type }: Pick<Frame, 'type'>): SvgNode 
     y += NOTE_LINE * type
   }
   return svg('g', { class: label.tone }, ...children)
+}
+
+function swatch(stroke: Stroke, label: Label, type: number): SvgNode {
+  const [x, y] = [boxOf(label, type).x, px(label.y + 0.6 * type)]
+  return svg('line', { x1: px(x), x2: px(x + SWATCH.length * type), y1: y, y2: y, ...strokeOf(stroke, type) })
 }
 
 function leader([x1, y1, x2, y2]: readonly [number, number, number, number]): SvgNode {

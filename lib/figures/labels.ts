@@ -1,7 +1,17 @@
 /** Labels at the ends of curves: above the plot, beside it, or next to a mark within it, never one over another. */
 import type { Chart, Curve } from './chart'
 import { insideLabels } from './inside-labels'
-import { boxOf, type Label, labelHeight, labelWidth, NOTE_SIZE, type Texts, textsOf, toneOf } from './label'
+import {
+  boxOf,
+  type Label,
+  labelHeight,
+  labelWidth,
+  NOTE_SIZE,
+  swatchWidth,
+  type Texts,
+  textsOf,
+  toneOf,
+} from './label'
 import { costOf, coverOf, obstaclesOf } from './obstacles'
 import type { Frame, Plot } from './plot'
 import { rowsOf } from './rows'
@@ -108,8 +118,17 @@ function rightLabels(curves: readonly Curve[], plot: Plot, frame: Frame): Label[
 /** Worth of a pixel between a name and the end of its curve. Tuned by eye. */
 const AWAY = 0.5
 
-/** Without room beside the plot: right-aligned within it, in the order of the ends. */
+/** Without room beside the plot: right-aligned within it, in the order of the ends; with strokes where a name is nearer to another. */
 function withinRight(chart: Drawn, plot: Plot, frame: Frame, placed: readonly Label[]): Label[] {
+  const labels = rightAligned(chart, plot, frame, placed, false)
+  const ends = chart.curves.flatMap(({ finish }) => (finish?.edge === 'right' ? [plot.y(finish.at[1])] : []))
+  const middles = labels.map((label) => label.y + labelHeight(label, frame.type) / 2)
+  const own = ends.toSorted((one, other) => one - other)
+  const isLed = middles.every((y, i) => ends.every((end) => Math.abs(y - end) >= Math.abs(y - (own[i] ?? 0))))
+  return isLed ? labels : rightAligned(chart, plot, frame, placed, true)
+}
+
+function rightAligned(chart: Drawn, plot: Plot, frame: Frame, placed: readonly Label[], stroked: boolean): Label[] {
   const { type } = frame
   const ends = chart.curves
     .filter((curve) => curve.finish?.edge === 'right')
@@ -120,7 +139,8 @@ function withinRight(chart: Drawn, plot: Plot, frame: Frame, placed: readonly La
   const taken = placed.map((label) => boxOf(label, type))
   const covered = coverOf(obstaclesOf(chart, plot))
   const rows = ends.map(({ texts, at }) => {
-    const [width, height] = [labelWidth(texts, type), labelHeight(texts, type)]
+    const width = labelWidth(texts, type) + (stroked ? swatchWidth(type) : 0)
+    const height = labelHeight(texts, type)
     const cost = (y: number) =>
       AWAY * Math.abs(y + height / 2 - at) +
       costOf({ x: right - width, y, width, height }, { covered, lines: [], taken, edges: plot })
@@ -128,6 +148,14 @@ function withinRight(chart: Drawn, plot: Plot, frame: Frame, placed: readonly La
   })
   const edges = rowsOf(rows, plot.top, plot.bottom)
   return ends.map(({ curve, texts }, i) => {
-    return { tone: toneOf(curve), ...texts, anchor: 'end' as const, x: right, y: edges[i] as number, leader: null }
+    const label = {
+      tone: toneOf(curve),
+      ...texts,
+      anchor: 'end' as const,
+      x: right,
+      y: edges[i] as number,
+      leader: null,
+    }
+    return stroked ? { ...label, swatch: curve } : label
   })
 }

@@ -90,3 +90,23 @@ it('counts the spots that a box covers', () => {
   expect(box(-40, -40, 20, 20)).toBe(0)
   expect(box(300, 300, 20, 20)).toBe(0)
 })
+
+describe('a name within a narrow figure that is nearer to another curve than to its own', () => {
+  const distances = (codes: readonly string[]) => {
+    const { chart } =
+      exhibitsOf({ key: 'narrow', title: '', codes }).find(({ place }) => place.view === 'distances') ?? {}
+    if (!chart) throw new Error('no view of distances')
+    return { chart, labels: labelsOf(chart, NARROW).filter(({ name }) => name !== '') }
+  }
+  it('bears the stroke of its own, as do those beside it', () => {
+    const matters = [0.1, 0.12, 0.14, 0.16, 0.18, 0.2]
+    const { chart, labels } = distances(matters.map((one) => `h0:70,matter:${one},as:Matter ${one}`))
+    expect(labels.map(({ swatch, name }) => [name, swatch?.dash]).toSorted()).toEqual(
+      chart.curves.map(({ dash, name }) => [name, dash]),
+    )
+  })
+  it('and none where each is next to its own', () => {
+    const { labels } = distances(['h0:70,matter:0.1', 'h0:70,matter:2'])
+    expect(labels.map(({ swatch }) => swatch)).toEqual([undefined, undefined])
+  })
+})
