@@ -1,6 +1,6 @@
 /** Comma-separated values, RFC 4180, after lines that start with # and say where the table comes from. */
 import type { Cells } from '../tables/table'
-import { citation, type Format, MOST_ROWS, type Sheet } from './format'
+import { type Format, MOST_ROWS, remarksOf } from './format'
 
 const END = '\r\n'
 
@@ -12,25 +12,13 @@ export const CSV: Format = {
   mostRows: MOST_ROWS,
   *pieces(sheet) {
     const several = sheet.tables.length > 1
-    for (const line of remarks(sheet)) yield `# ${line}${END}`
+    for (const line of remarksOf(sheet)) yield `# ${line}${END}`
     yield [...(several ? ['scenario'] : []), ...sheet.columns.map(({ key }) => key)].map(textCell).join(',') + END
     for (const { code, rows } of sheet.tables) {
       const first = several ? `${textCell(code)},` : ''
       for (const cells of rows()) yield first + numberCells(cells) + END
     }
   },
-}
-
-function remarks({ provenance, columns, tables }: Sheet): string[] {
-  const { version, engine, page, data } = provenance
-  return [
-    `Longhence ${version}, engine ${engine}`,
-    ...tables.map(({ code }) => `scenario: ${code}`),
-    `link: ${page}`,
-    `table: ${data}`,
-    ...columns.map(({ key, label, unit }) => `${key}: ${label}${unit && `, ${unit}`}`),
-    `cite as: ${citation(provenance)}`,
-  ]
 }
 
 function numberCells(cells: Cells): string {

@@ -37,3 +37,16 @@ export const MOST_ROWS = 1_000_000
 
 export const citation = ({ version, engine, page }: Provenance): string =>
   `The Longhence authors, Longhence ${version}, engine ${engine}, ${page}`
+
+/** What stands above a table as remarks, a line each. */
+export function remarksOf({ provenance, columns, tables }: Sheet): string[] {
+  const { version, engine, page, data } = provenance
+  return [
+    `Longhence ${version}, engine ${engine}`,
+    ...tables.map(({ code }) => `scenario: ${code}`),
+    `link: ${page}`,
+    `table: ${data}`,
+    ...columns.map(({ key, label, unit }) => `${key}: ${label}${unit && `, ${unit}`}`),
+    `cite as: ${citation(provenance)}`,
+  ]
+}

@@ -1,6 +1,6 @@
 /** A LaTeX table for booktabs: cells are the doubles themselves, padded so that the source can be read too. */
 import type { Table } from '../tables/table'
-import { citation, type Format, type Sheet } from './format'
+import { type Format, remarksOf, type Sheet } from './format'
 import { tex } from './tex'
 
 const MOST = 1000
@@ -42,17 +42,8 @@ function headsOf({ columns, tables }: Sheet): [readonly string[], ...(readonly s
   return units.every((unit) => unit === '') ? [labels] : [labels, units]
 }
 
-function remarks({ provenance, columns, tables }: Sheet, long: boolean): string {
-  const { version, engine, page, data } = provenance
-  return [
-    `Longhence ${version}, engine ${engine}`,
-    ...tables.map(({ code }) => `scenario: ${code}`),
-    `link: ${page}`,
-    `table: ${data}`,
-    ...columns.map(({ key, label, unit }) => `${key}: ${label}${unit && `, ${unit}`}`),
-    `cite as: ${citation(provenance)}`,
-    `needs: \\usepackage{booktabs}${long ? '\\usepackage{longtable}' : ''}`,
-  ]
+function remarks(sheet: Sheet, long: boolean): string {
+  return [...remarksOf(sheet), `needs: \\usepackage{booktabs}${long ? '\\usepackage{longtable}' : ''}`]
     .map((text) => `% ${text}\n`)
     .join('')
 }

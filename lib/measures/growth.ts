@@ -84,7 +84,7 @@ function growthOf(history: History): Growth | Missing {
 function obstacleTo({ past, origin }: History): Missing | null {
   const { coldMatter, states } = past.model.budget
   if (coldMatter === 0 && states.length === 0) return missing('there is no matter to cluster')
-  if (origin.kind !== 'big-bang') return missing('growth starts from a big bang, and this expansion has none')
+  if (origin.kind !== 'big-bang') return missing('growth starts from a Big Bang, and this expansion has none')
   const exponent = leadingExponent(past.model, -1)
   if (explodes(past.model, -1) || exponent === null || exponent > 4) {
     return missing('something stiffer than radiation rules early, and all solutions are regular there')

@@ -5,7 +5,7 @@ import type { History } from '../history/history'
 import { leadingExponent } from '../history/tail'
 import { curvatureRadius } from '../measures/distances'
 import { type Crossing, nearestToNow } from '../measures/epochs'
-import { type Bounded, bounded, finiteOr, isMissing, type Missing, missing, type Outcome } from '../measures/outcome'
+import { bounded, finiteOr, isMissing, type Missing, missing, type Outcome } from '../measures/outcome'
 import { deceleration, jerk } from '../measures/rates'
 import { eventHorizon, noFarthest, particleHorizon, redshiftAt } from '../measures/sight'
 import { acousticAngle, dragRedshift, recombinationRedshift, soundHorizon } from '../measures/sound'
@@ -80,14 +80,14 @@ const redshiftOf = (crossing: Crossing | null, because: string): Outcome => {
   return bounded(Math.expm1(-crossing.N), relative * Math.exp(-crossing.N))
 }
 
-const ALL: readonly MeasureQuantity[] = [
+export const MEASURES: readonly MeasureQuantity[] = [
   {
     key: 'age',
     symbol: 't_0',
     label: 'age',
     unit: 'Gyr',
     digits: fixed(2),
-    meaning: 'Time since the origin: the big bang, or the bounce.',
+    meaning: 'Time since the origin: the Big Bang, or the bounce.',
     formula: 't_0 = ∫ da/(a H), from the origin to today',
     source: FRIEDMANN,
     accuracy: INTEGRAL,
@@ -362,6 +362,3 @@ function finalRate({ history, scenario }: Subject): Outcome {
   }, 0)
   return bounded(scenario.h0 * Math.sqrt(constant), 0, 8)
 }
-
-export const MEASURES: readonly MeasureQuantity[] = ALL
-export type { Bounded }

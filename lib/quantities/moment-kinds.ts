@@ -20,7 +20,7 @@ export const MOMENT_KINDS: Readonly<Record<MomentKind, MomentEntry>> = {
     symbol: 't_{or}',
     label: 'origin',
     formula: 'a → 0, or ȧ = 0 at the smallest a',
-    meaning: 'Where the expansion that holds today began: a big bang, a bounce, or infinitely long ago.',
+    meaning: 'Where the expansion that holds today began: a Big Bang, a bounce, or infinitely long ago.',
     accuracy: INTEGRAL,
     source: FRIEDMANN,
   },

@@ -24,7 +24,7 @@ export const TIME_COLUMNS: readonly Definition[] = [
     label: 'age',
     unit: 'Gyr',
     digits: significant(5),
-    meaning: 'Cosmic time since the origin, the big bang or the last bounce; negative before a bounce.',
+    meaning: 'Cosmic time since the origin, the Big Bang or the last bounce; negative before a bounce.',
     formula: 't = ∫ da/(a H), from the origin',
     source: FRIEDMANN,
     accuracy: INTEGRAL,
