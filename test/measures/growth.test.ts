@@ -133,7 +133,7 @@ describe('printed values', () => {
 describe('where there is none', () => {
   test.each([
     ['matter:0,cmb:0', 'no matter'],
-    ['matter:0.1,dark:2,cmb:0', 'big bang'],
+    ['matter:0.1,dark:2,cmb:0', 'Big Bang'],
     ['matter:0.3,eos:constant,w:0.5', 'stiffer than radiation'],
     ['matter:0.3,eos:constant,w:1', 'stiffer than radiation'],
   ])('%s: %s', (code, reason) => {
