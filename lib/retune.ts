@@ -53,6 +53,7 @@ export function keptValue(kept: Kept, scenario: Scenario): number | Missing {
 /** Steps of ln H₀ away from today's value, and how far they grow. */
 const FIRST_STEP = 0.02
 const GROWTH = 1.6
+const SMALLEST_STEP = FIRST_STEP / 64
 /** Digits of H₀ that are kept: θ* then holds to some 1e-12 of itself. */
 const DIGITS = 13
 
@@ -65,33 +66,45 @@ export function retunedH0(kept: Kept, scenario: Scenario, target: number): numbe
   const here = excess(scenario.h0)
   if (isMissing(here)) return here
   if (here === 0) return scenario.h0
-  const ends = [1, -1].map((way) => searched(excess, scenario.h0, here, way))
-  const [bracket] = ends
-    .filter((one) => !isMissing(one as Missing | number))
-    .map(Number)
+  const [low, high] = [searched(excess, scenario.h0, here, -1), searched(excess, scenario.h0, here, 1)]
+  if (typeof low !== 'number' && typeof high !== 'number') return nowhere(low, high)
+  const [bracket] = [low, high]
+    .filter((one) => typeof one === 'number')
     .toSorted((one, other) => Math.abs(Math.log(one / scenario.h0)) - Math.abs(Math.log(other / scenario.h0)))
-  if (bracket === undefined) return ends.find((one) => typeof one !== 'number') ?? missing('there is none')
-  const exact = brent((h0) => numberOr(excess(h0), here), scenario.h0, bracket)
+  const exact = brent((h0) => numberOr(excess(h0), here), scenario.h0, bracket as number)
   return Number(exact.toPrecision(DIGITS))
+}
+
+function nowhere(low: Stopped, high: Stopped): Missing {
+  const tried = [low, high].map(({ last }) => Number(last.toPrecision(4)))
+  const why = (side: string, { because }: Stopped) => (because === null ? [] : [`${side}, ${because}`])
+  return missing(
+    [`no H_0 from ${tried.join(' to ')} km/s/Mpc does it`, ...why('below', low), ...why('above', high)].join('; '),
+  )
 }
 
 /** Inside a bracket every value exists; should one not, its neighbour's sign keeps the search going. */
 const numberOr = (value: number | Missing, other: number): number => (isMissing(value) ? other : value)
 
-/** A value of H₀ on one side where the excess has the other sign, or why the search came to its end. */
-function searched(excess: (h0: number) => number | Missing, from: number, here: number, way: number): number | Missing {
+/** How far a search came without finding the other sign, and what is amiss beyond; null where H₀ has its limit. */
+interface Stopped {
+  readonly last: number
+  readonly because: string | null
+}
+
+/** A value of H₀ on one side where the excess has the other sign, or where the search came to its end. */
+function searched(excess: (h0: number) => number | Missing, from: number, here: number, way: number): number | Stopped {
   let step = FIRST_STEP
   let last = from
-  for (let i = 0; i < 60; i++) {
+  for (;;) {
     const next = Math.min(H0.max, Math.max(H0.min, last * Math.exp(way * step)))
-    const value =
-      next === last ? missing(`no Hubble constant from ${H0.min} to ${H0.max} km/s/Mpc does it`) : excess(next)
+    if (next === last) return { last, because: null }
+    const value = excess(next)
     if (!isMissing(value)) {
       if (value > 0 !== here > 0) return next
       last = next
       step *= GROWTH
-    } else if (step < FIRST_STEP / 64 || next === last) return value
+    } else if (step < SMALLEST_STEP) return { last, because: value.because }
     else step /= 4
   }
-  return missing('no Hubble constant nearby does it')
 }

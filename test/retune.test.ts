@@ -79,6 +79,15 @@ describe('the acoustic angle', () => {
       expect(allowed).toBeLessThan(0.2)
     },
   )
+  it('says how far it was sought, and what is amiss beyond', () => {
+    // Ω_m h² is 0.08 at 51.6 km/s/Mpc and 0.25 at 91.3; an open universe has a smaller angle throughout.
+    const found = retunedH0(ANGLE, scenario('h0:70,matter:0.3,dark:0'), target)
+    if (typeof found === 'number') throw new Error(`${found}`)
+    const [, low, high] = /^no H_0 from ([\d.]+) to ([\d.]+) km/.exec(found.because) ?? []
+    expect(Math.abs(Number(low) / Math.sqrt(0.08e4 / 0.3) - 1)).toBeLessThan(2e-3)
+    expect(Math.abs(Number(high) / Math.sqrt(0.25e4 / 0.3) - 1)).toBeLessThan(2e-3)
+    expect(found.because).toMatch(/; below, the fit holds .*; above, the fit holds /)
+  })
   it('says where the fits of recombination do not hold', () => {
     expect(retunedH0(ANGLE, scenario('h0:67,matter:2'), target)).toEqual({ because: expect.stringContaining('fit') })
     expect(retunedH0(ANGLE, scenario('h0:67,matter:0.3,cmb:0'), target)).toHaveProperty('because')

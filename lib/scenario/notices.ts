@@ -55,7 +55,7 @@ function dustNotice(scenario: Scenario): Notice | null {
   if (scenario.eos !== 'chaplygin' || typeof b !== 'number' || b >= 1 || scenario.matter <= 0.1) return null
   const unified: Scenario = { ...scenario, matter: 0.05 }
   const message =
-    'A Chaplygin gas with B below 1 carries dust of its own; as unified dark matter it stands beside baryons alone.'
+    'A Chaplygin gas with B below 1 carries dust of its own; as unified dark matter it stands beside baryons alone, with Ω_m near 0.05.'
   return { message, code: writeScenario(unified) }
 }
 
