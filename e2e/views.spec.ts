@@ -8,7 +8,7 @@ test.describe.configure({ timeout: 180_000 })
 const VIEWS = {
   Reach: /^Horizons and light paths/,
   Contents: /^Density of each/,
-  Rate: /^Expansion rate/,
+  Rate: /^Expansion speed/,
   Distances: /^Comoving distance/,
 }
 const panel = (page: Page) => page.locator('.views')
