@@ -51,15 +51,17 @@ test.describe('without JavaScript', () => {
   })
 
   test('the theme is chosen by a link and stays', async ({ page }) => {
-    const ground = () => page.evaluate(() => getComputedStyle(document.documentElement).backgroundColor)
+    const root = page.locator('html')
+    const ground = () => root.evaluate((one) => getComputedStyle(one).backgroundColor)
     await page.goto('/')
     const paper = await ground()
     await page.getByRole('link', { name: 'Night' }).click()
-    await expect.poll(ground).not.toBe(paper)
+    await expect(page).toHaveURL(/theme=night/)
+    await expect(root).not.toHaveCSS('background-color', paper)
     const night = await ground()
     await page.getByRole('button', { name: 'Apply' }).click()
-    await expect(page).toHaveURL(/theme=night/)
-    await expect.poll(ground).toBe(night)
+    await expect(page).toHaveURL(/h0=|s=.*theme=night/)
+    await expect(root).toHaveCSS('background-color', night)
   })
 })
 

@@ -73,7 +73,7 @@ export type BatchResult =
       }
       measures: {
         /**
-         * age: Time since the origin: the big bang, or the bounce.
+         * age: Time since the origin: the Big Bang, or the bounce.
          */
         age:
           | {
@@ -880,7 +880,7 @@ export interface History {
   }
   measures: {
     /**
-     * age: Time since the origin: the big bang, or the bounce.
+     * age: Time since the origin: the Big Bang, or the bounce.
      */
     age:
       | {
