@@ -54,6 +54,7 @@ export function keptValue(kept: Kept, scenario: Scenario): number | Missing {
 const FIRST_STEP = 0.02
 const GROWTH = 1.6
 const SMALLEST_STEP = FIRST_STEP / 64
+const MOST_TRIED = 60
 /** Digits of H₀ that are kept: θ* then holds to some 1e-12 of itself. */
 const DIGITS = 13
 
@@ -86,7 +87,7 @@ function nowhere(low: Stopped, high: Stopped): Missing {
 /** Inside a bracket every value exists; should one not, its neighbour's sign keeps the search going. */
 const numberOr = (value: number | Missing, other: number): number => (isMissing(value) ? other : value)
 
-/** How far a search came without finding the other sign, and what is amiss beyond; null where H₀ has its limit. */
+/** How far a search came without finding the other sign, and what is amiss beyond; null where nothing is. */
 interface Stopped {
   readonly last: number
   readonly because: string | null
@@ -96,7 +97,7 @@ interface Stopped {
 function searched(excess: (h0: number) => number | Missing, from: number, here: number, way: number): number | Stopped {
   let step = FIRST_STEP
   let last = from
-  for (;;) {
+  for (let tried = 0; tried < MOST_TRIED; tried++) {
     const next = Math.min(H0.max, Math.max(H0.min, last * Math.exp(way * step)))
     if (next === last) return { last, because: null }
     const value = excess(next)
@@ -107,4 +108,5 @@ function searched(excess: (h0: number) => number | Missing, from: number, here: 
     } else if (step < SMALLEST_STEP) return { last, because: value.because }
     else step /= 4
   }
+  return { last, because: null }
 }

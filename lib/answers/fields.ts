@@ -1,5 +1,6 @@
 /** What the values of query keys may be, as zod schemas; their leaves are the readers of the scenario code. */
 import { z } from 'zod'
+import type { Limits } from '../parameter'
 import { COLUMN_KEYS, type Column } from '../quantities/column'
 import { columnNamed } from '../quantities/columns'
 import { type Fault, fault } from '../scenario/problems'
@@ -54,7 +55,7 @@ export const number = (one: Above, meaning: string) =>
   })
 
 /** A number within limits, as those of the scenario code. */
-export const limited = (one: Parameters<typeof readNumber>[0], meaning: string) =>
+export const limited = (one: Limits & Pick<Above, 'key' | 'unit'>, meaning: string) =>
   field<number>(meaning, (text) => {
     const read = readNumber(one, text)
     return 'fault' in read ? { faults: [read.fault] } : read

@@ -1,3 +1,4 @@
+/** The ruler as the page shows it: rounded numbers, reasons once each, complaints beside the fields, and the downloads. */
 import { linkQuery } from '../scenario/write'
 import type { Solution } from '../solve'
 import { nameOf } from '../words/desk'

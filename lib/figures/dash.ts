@@ -12,3 +12,9 @@ export function dashOf(place: number, width: number): string | null {
     .map((part) => px(Number(part) * width))
     .join(' ')
 }
+
+/** How a curve is stroked: that in a legend or in a margin is the same. */
+export function strokeOf(place: number, width: number) {
+  const dash = dashOf(place, width)
+  return { class: 'curve', 'stroke-width': width, ...(dash === null ? {} : { 'stroke-dasharray': dash }) }
+}

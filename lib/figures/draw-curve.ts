@@ -1,6 +1,6 @@
 /** A curve with its marks. Hue comes by class, dash by the place in the list: a reader without colours can tell them apart. */
 import type { Curve, Mark } from './chart'
-import { dashOf } from './dash'
+import { strokeOf } from './dash'
 import type { Stroke } from './label'
 import type { Frame, Plot } from './plot'
 import type { Point } from './sample'
@@ -18,18 +18,12 @@ export function drawCurve(curve: Curve, plot: Plot, { type }: Frame): SvgNode {
     'g',
     { class: curve.tone },
     ...asymptote(curve, plot, type),
-    svg('path', { d: curve.segments.map((segment) => pathOf(segment, plot)).join(''), ...strokeOf(curve, type) }),
+    svg('path', { d: curve.segments.map((segment) => pathOf(segment, plot)).join(''), ...strokeOf(curve.dash, width) }),
     ...curve.marks.map((mark) => drawMark(mark, plot, type, width)),
   )
 }
 
-const widthOf = ({ strong }: Stroke, type: number): number => px((strong ? LINE.strong : LINE.quiet) * type)
-
-export function strokeOf(curve: Stroke, type: number) {
-  const width = widthOf(curve, type)
-  const dash = dashOf(curve.dash, width)
-  return { class: 'curve', 'stroke-width': width, ...(dash === null ? {} : { 'stroke-dasharray': dash }) }
-}
+export const widthOf = ({ strong }: Stroke, type: number): number => px((strong ? LINE.strong : LINE.quiet) * type)
 
 function pathOf(points: readonly Point[], plot: Plot): string {
   return points.map(([x, y], i) => `${i === 0 ? 'M' : 'L'}${fine(plot.x(x))} ${fine(plot.y(y))}`).join('')

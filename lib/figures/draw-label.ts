@@ -1,5 +1,6 @@
 /** A label in the colour of its curve, with a rim of the ground so that it stays readable over lines. */
-import { strokeOf } from './draw-curve'
+import { strokeOf } from './dash'
+import { widthOf } from './draw-curve'
 import { boxOf, type Label, NAME_LINE, NOTE_LINE, NOTE_SIZE, type Stroke, SWATCH } from './label'
 import type { Frame } from './plot'
 import { px, type SvgNode, svg } from './svg'
@@ -24,7 +25,8 @@ export function drawLabel(label: Label, { type }: Pick<Frame, 'type'>): SvgNode 
 
 function swatch(stroke: Stroke, label: Label, type: number): SvgNode {
   const [x, y] = [boxOf(label, type).x, px(label.y + 0.6 * type)]
-  return svg('line', { x1: px(x), x2: px(x + SWATCH.length * type), y1: y, y2: y, ...strokeOf(stroke, type) })
+  const ends = { x1: px(x), x2: px(x + SWATCH.length * type), y1: y, y2: y }
+  return svg('line', { ...ends, ...strokeOf(stroke.dash, widthOf(stroke, type)) })
 }
 
 function leader([x1, y1, x2, y2]: readonly [number, number, number, number]): SvgNode {

@@ -2,7 +2,7 @@
 
 import type { Chart, Ribbon } from './chart'
 import type { Era } from './contents'
-import { dashOf } from './dash'
+import { strokeOf } from './dash'
 import { within } from './draw-axes'
 import type { Stretch } from './eras'
 import type { Frame, Plot } from './plot'
@@ -91,14 +91,8 @@ function classOf(era: Era): string {
 /** The scenario's line in the margin. */
 function key(place: number, y: number, plot: Plot, type: number): SvgNode {
   const width = px(0.17 * type)
-  const dash = dashOf(place, width)
   const ends = { x1: px(0.2 * type), x2: px(plot.left - 0.7 * type), y1: px(y), y2: px(y) }
-  return svg('line', {
-    ...ends,
-    class: 'curve',
-    'stroke-width': width,
-    ...(dash === null ? {} : { 'stroke-dasharray': dash }),
-  })
+  return svg('line', { ...ends, ...strokeOf(place, width) })
 }
 
 /** Narrower than this many pixels nothing is seen. */

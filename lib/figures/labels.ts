@@ -118,44 +118,55 @@ function rightLabels(curves: readonly Curve[], plot: Plot, frame: Frame): Label[
 /** Worth of a pixel between a name and the end of its curve. Tuned by eye. */
 const AWAY = 0.5
 
-/** Without room beside the plot: right-aligned within it, in the order of the ends; with strokes where a name is nearer to another. */
-function withinRight(chart: Drawn, plot: Plot, frame: Frame, placed: readonly Label[]): Label[] {
-  const labels = rightAligned(chart, plot, frame, placed, false)
-  const ends = chart.curves.flatMap(({ finish }) => (finish?.edge === 'right' ? [plot.y(finish.at[1])] : []))
-  const middles = labels.map((label) => label.y + labelHeight(label, frame.type) / 2)
-  const own = ends.toSorted((one, other) => one - other)
-  const isLed = middles.every((y, i) => ends.every((end) => Math.abs(y - end) >= Math.abs(y - (own[i] ?? 0))))
-  return isLed ? labels : rightAligned(chart, plot, frame, placed, true)
+interface RightEnd {
+  readonly curve: Curve
+  readonly texts: Texts
+  /** Where the curve ends. */
+  readonly at: number
+  readonly height: number
 }
 
-function rightAligned(chart: Drawn, plot: Plot, frame: Frame, placed: readonly Label[], stroked: boolean): Label[] {
+/** Without room beside the plot: right-aligned within it, in the order of the ends; with strokes where a name is nearer to another. */
+function withinRight(chart: Drawn, plot: Plot, frame: Frame, placed: readonly Label[]): Label[] {
   const { type } = frame
   const ends = chart.curves
     .filter((curve) => curve.finish?.edge === 'right')
-    .map((curve) => ({ curve, texts: textsOf(curve, frame), at: plot.y(curve.finish?.at[1] ?? 0) }))
+    .map((curve): RightEnd => {
+      const texts = textsOf(curve, frame)
+      return { curve, texts, at: plot.y(curve.finish?.at[1] ?? 0), height: labelHeight(texts, type) }
+    })
     .sort((one, other) => one.at - other.at)
   if (ends.length === 0) return []
   const right = plot.right - 0.7 * type
   const taken = placed.map((label) => boxOf(label, type))
-  const covered = coverOf(obstaclesOf(chart, plot))
-  const rows = ends.map(({ texts, at }) => {
-    const width = labelWidth(texts, type) + (stroked ? swatchWidth(type) : 0)
-    const height = labelHeight(texts, type)
-    const cost = (y: number) =>
-      AWAY * Math.abs(y + height / 2 - at) +
-      costOf({ x: right - width, y, width, height }, { covered, lines: [], taken, edges: plot })
-    return { height, cost }
-  })
-  const edges = rowsOf(rows, plot.top, plot.bottom)
-  return ends.map(({ curve, texts }, i) => {
-    const label = {
-      tone: toneOf(curve),
-      ...texts,
-      anchor: 'end' as const,
-      x: right,
-      y: edges[i] as number,
-      leader: null,
-    }
-    return stroked ? { ...label, swatch: curve } : label
+  const way = { covered: coverOf(obstaclesOf(chart, plot)), lines: [], taken, edges: plot }
+  const topsWith = (more: number) => {
+    const rows = ends.map(({ texts, at, height }) => {
+      const width = labelWidth(texts, type) + more
+      const cost = (y: number) =>
+        AWAY * Math.abs(y + height / 2 - at) + costOf({ x: right - width, y, width, height }, way)
+      return { height, cost }
+    })
+    return rowsOf(rows, plot.top, plot.bottom)
+  }
+  const plain = topsWith(0)
+  const stray = isAstray(ends, plain)
+  const tops = stray ? topsWith(swatchWidth(type)) : plain
+  return ends.map(({ curve, texts }, i) => ({
+    tone: toneOf(curve),
+    ...texts,
+    anchor: 'end',
+    x: right,
+    y: tops[i] as number,
+    leader: null,
+    swatch: stray ? curve : undefined,
+  }))
+}
+
+/** Is any name nearer to the end of another curve than to that of its own? */
+function isAstray(ends: readonly RightEnd[], tops: readonly number[]): boolean {
+  return ends.some(({ at, height }, i) => {
+    const middle = (tops[i] as number) + height / 2
+    return ends.some((other) => Math.abs(middle - other.at) < Math.abs(middle - at))
   })
 }

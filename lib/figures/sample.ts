@@ -74,9 +74,12 @@ function sideOf(value: number | null, y: Range): Side {
 }
 
 function refine(found: readonly Sample[], y: Range): number[] {
+  const turns = found.map((_, i) => bends(found, i, y))
   return found.flatMap(([place, value], i) => {
     const next = found[i + 1]
-    if (!next || (sideOf(value, y) === sideOf(next[1], y) && !bends(found, i, y) && !bends(found, i + 1, y))) return []
+    if (!next) return []
+    const isPlain = sideOf(value, y) === sideOf(next[1], y) && !turns[i] && !turns[i + 1]
+    if (isPlain) return []
     return Array.from({ length: REFINED }, (_, k) => place + ((next[0] - place) * (k + 1)) / (REFINED + 1))
   })
 }

@@ -35,14 +35,8 @@ export function spanOf(curves: readonly (readonly (number | null)[])[], wish: Wi
   const known = curves.map(ascending).filter(({ length }) => length > 0)
   if (known.length === 0) return linearRange(0, 1)
   const least = Math.min(...known.map(first))
-  const main = capped(
-    merged(
-      known.map((sorted) => bulk(sorted, wish.bounds)),
-      wish.steady,
-    ),
-    known,
-    wish,
-  )
+  const seen = known.map((sorted) => bulk(sorted, wish.bounds))
+  const main = capped(merged(seen, wish.steady), known, wish)
   return logarithmic(known, main, wish) ?? padded(main, least)
 }
 
@@ -54,10 +48,10 @@ const last = (sorted: Sorted) => sorted.at(-1) as number
 const at = (sorted: Sorted, part: number) => sorted[Math.round(part * (sorted.length - 1))] as number
 
 /** Of each curve by itself: one that is short has few values among those of all. */
-function bulk(sorted: Sorted, bounds: Extent = [0, 0]): Extent {
+function bulk(sorted: Sorted, bounds?: Extent): Extent {
   const [low, high] = [at(sorted, CUT.low), at(sorted, CUT.high)]
   const whole = [first(sorted), last(sorted)] as const
-  if (whole[0] >= bounds[0] && whole[1] <= bounds[1]) return whole
+  if (bounds && whole[0] >= bounds[0] && whole[1] <= bounds[1]) return whole
   return whole[1] - whole[0] <= HARDLY * (high - low) ? whole : [low, high]
 }
 

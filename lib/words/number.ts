@@ -1,4 +1,5 @@
 /** Numbers as people read them: rounded, with a true minus sign and thin spaces between thousands. */
+import type { Quantity } from '../quantities/quantity'
 
 export const MINUS = '−'
 /** Narrow no-break space. */
@@ -62,9 +63,6 @@ function dressed(text: string): string {
 }
 
 /** To the digits that a quantity is told with. */
-export function rounded(
-  value: number,
-  { kind, count }: { readonly kind: 'fixed' | 'significant'; readonly count: number },
-): string {
+export function rounded(value: number, { kind, count }: Quantity['digits']): string {
   return kind === 'fixed' ? fixed(value, count) : significant(value, count)
 }

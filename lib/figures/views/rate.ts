@@ -1,3 +1,4 @@
+/** How fast: the expansion speed, which is H/(1 + z), and how the expansion slows or speeds up. */
 import { columnOf } from '../../quantities/columns'
 import { quantityChart, type Vertical } from './quantity-chart'
 import type { View } from './view'
